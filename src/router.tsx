@@ -1,0 +1,28 @@
+import { createBrowserRouter, type RouteObject } from "react-router";
+import { LoadingPage } from "./components/loading-page.tsx";
+import { RouteError } from "./components/route-error.tsx";
+import { Root } from "./routes/root.tsx";
+
+/**
+ * The pages. Each is one lazy module in src/routes that exports `Component` and, where it needs them,
+ * `loader` and `ErrorBoundary`. Every area has its own boundary, so that a fault in one page leaves
+ * the band and the other pages standing.
+ */
+export const routes: RouteObject[] = [
+  {
+    Component: Root,
+    HydrateFallback: LoadingPage,
+    ErrorBoundary: RouteError,
+    children: [
+      {
+        ErrorBoundary: RouteError,
+        children: [
+          { path: "/design", lazy: () => import("./routes/design.tsx") },
+          { path: "*", lazy: () => import("./routes/not-found.tsx") },
+        ],
+      },
+    ],
+  },
+];
+
+export const router = createBrowserRouter(routes);
