@@ -1,0 +1,38 @@
+import { defineConfig } from "vitest/config";
+
+/**
+ * One project a side of the arrows, so that a sandbox test cannot lean on a DOM and a client test has
+ * one. `tests` holds what crosses sides on the server; `journeys` drives Chromium against the built
+ * product and runs its files one after the other.
+ */
+export default defineConfig({
+  test: {
+    maxWorkers: 2,
+    testTimeout: 30_000,
+    hookTimeout: 120_000,
+    projects: [
+      { test: { name: "sandbox", include: ["sandbox/**/*.test.ts"], environment: "node" } },
+      { test: { name: "shared", include: ["shared/**/*.test.ts", "lessons/**/*.test.ts"], environment: "node" } },
+      { test: { name: "server", include: ["server/**/*.test.ts"], environment: "node" } },
+      {
+        test: {
+          name: "src",
+          include: ["src/**/*.test.{ts,tsx}"],
+          environment: "jsdom",
+          setupFiles: ["tests/support/dom-setup.ts"],
+        },
+      },
+      { test: { name: "tests", include: ["tests/**/*.test.ts"], environment: "node" } },
+      {
+        test: {
+          name: "journeys",
+          include: ["tests/journeys/**/*.spec.ts"],
+          environment: "node",
+          fileParallelism: false,
+          testTimeout: 180_000,
+          hookTimeout: 240_000,
+        },
+      },
+    ],
+  },
+});
