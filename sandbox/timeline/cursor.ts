@@ -32,6 +32,8 @@ export interface Cursor {
    * depend on where the cursor was before.
    */
   seek(tick: number): Frame;
+  /** As `seek` for one light: writes only that light's places in the frame, whose `tick` stays as it was. */
+  seekLight(light: number, tick: number): Frame;
 }
 
 /** What sampling needs to know of a light. */
@@ -73,7 +75,8 @@ class TrackCursor implements Cursor {
   readonly #pulseEntry: Int32Array;
   /** Entries of the pulses that run, in order. */
   readonly #running: number[][];
-  #tick = -Infinity;
+  /** Where each light was read last. */
+  readonly #tick: Float64Array;
 
   constructor(timeline: Timeline, lights: readonly SampledLight[], tracks: Tracks) {
     this.#timeline = timeline;
@@ -85,27 +88,35 @@ class TrackCursor implements Cursor {
     this.#colourEntry = before(tracks.colour.first);
     this.#pulseEntry = before(tracks.pulse.first);
     this.#running = lights.map(() => []);
+    this.#tick = new Float64Array(lights.length).fill(-1);
   }
 
   seek(tick: number): Frame {
-    const { frame } = this;
-    frame.tick = tick;
+    this.frame.tick = tick;
+    for (let light = 0; light < this.#lights.length; light++) this.seekLight(light, tick);
+    return this.frame;
+  }
+
+  seekLight(light: number, tick: number): Frame {
     // Not a number fails both comparisons: such a moment is dark, too.
     if (!(tick >= 0 && tick < this.#timeline.endTick)) {
-      frame.rgb.fill(0);
-      frame.level.fill(0);
-      frame.cue.fill(-1);
-      frame.colourCue.fill(-1);
-      return frame;
+      this.#darken(light);
+      return this.frame;
     }
-    const isForward = tick >= this.#tick;
-    this.#tick = tick;
-    for (let light = 0; light < this.#lights.length; light++) {
-      if (isForward) this.#advance(light, tick);
-      else this.#goBack(light, tick);
-      this.#show(light, tick);
-    }
-    return frame;
+    if (tick >= (this.#tick[light] ?? 0)) this.#advance(light, tick);
+    else this.#goBack(light, tick);
+    this.#tick[light] = tick;
+    const traits = this.#lights[light];
+    if (traits?.hasColour) this.#showColour(light, tick);
+    else this.#showPlain(light, tick, traits?.isSwitched ?? false);
+    return this.frame;
+  }
+
+  #darken(light: number): void {
+    const { rgb, level, cue, colourCue } = this.frame;
+    rgb[light * 3] = rgb[light * 3 + 1] = rgb[light * 3 + 2] = 0;
+    level[light] = 0;
+    cue[light] = colourCue[light] = -1;
   }
 
   #advance(light: number, tick: number): void {
@@ -136,12 +147,6 @@ class TrackCursor implements Cursor {
     for (let entry = last; entry >= (pulse.first[light] ?? 0) && (pulse.latestEnd[entry] ?? 0) > tick; entry--)
       if ((pulse.end[entry] ?? 0) > tick) running.push(entry);
     running.reverse();
-  }
-
-  #show(light: number, tick: number): void {
-    const traits = this.#lights[light];
-    if (traits?.hasColour) this.#showColour(light, tick);
-    else this.#showPlain(light, tick, traits?.isSwitched ?? false);
   }
 
   /** Rule 20: the largest of level and pulses; a switched light is on or off. */
