@@ -32,7 +32,7 @@ export function Dialog({ isOpen, onClose, title, children, actions, size = "norm
       }}
       isDismissable={role === "dialog" && !isBusy}
       isKeyboardDismissDisabled={isBusy}
-      className="fixed inset-0 z-40 flex h-(--visual-viewport-height) items-center justify-center bg-[rgb(15_19_36/0.62)] p-4 max-wide:items-end max-wide:p-0"
+      className="fixed inset-0 z-40 flex h-(--visual-viewport-height) items-center justify-center bg-veil p-4 max-wide:items-end max-wide:p-0"
     >
       <Modal className={joinClasses("w-full", SIZES[size], "max-wide:max-w-none")}>
         <DialogPanel

@@ -39,7 +39,7 @@ export function StreetScene({ fronts = 10, narrowFronts = 6, seed = 3, isTall = 
   }, [width, height, count, seed, isTall, lighting, isStill]);
 
   return (
-    <div className={joinClasses("bg-[#1b2138]", className)}>
+    <div className={joinClasses("bg-sky", className)}>
       <canvas ref={canvasRef} className="block size-full" role={label ? "img" : undefined} aria-label={label} aria-hidden={label ? undefined : true} />
     </div>
   );
