@@ -1,0 +1,31 @@
+import type { showsContract } from "../../../shared/contracts/shows.ts";
+import type { FeatureDeps } from "../../deps.ts";
+import type { Handlers } from "../../http/mount.ts";
+import { createDraftRibbons } from "../../show-runs/draft-ribbons.ts";
+import { changeShow, createShow, duplicateShow, getShowDetail, getVersionDetail, listOwnShows, saveDraft } from "./shows.service.ts";
+
+/** The handlers of the shows contract. A save answers at once; its ribbon follows in the background. */
+export function createShowsHandlers(deps: FeatureDeps): Handlers<typeof showsContract> {
+  const ribbons = createDraftRibbons(deps);
+  return {
+    list: ({ actor, query }) => ({ shows: listOwnShows(deps.db, actor, query.archived === "yes") }),
+    create: ({ actor, body }) => {
+      const show = createShow(deps, actor, body);
+      ribbons.refresh(show.id);
+      return { show };
+    },
+    get: ({ actor, params }) => getShowDetail(deps.db, actor, params.showId),
+    update: ({ actor, params, body }) => {
+      const changed = changeShow(deps.db, actor, params.showId, body);
+      if (body.seed !== undefined) ribbons.refresh(params.showId);
+      return changed;
+    },
+    duplicate: ({ actor, params }) => ({ show: duplicateShow(deps, actor, params.showId) }),
+    saveDraft: ({ actor, params, body }) => {
+      const saved = saveDraft(deps, actor, params.showId, body);
+      ribbons.refresh(params.showId);
+      return saved;
+    },
+    version: ({ actor, params }) => getVersionDetail(deps.db, actor, params.versionId),
+  };
+}
