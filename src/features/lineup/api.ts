@@ -1,57 +1,55 @@
 import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
 import { contracts } from "../../../shared/contracts/index.ts";
-import type { ForwardSummary, Lineup } from "../../../shared/contracts/lineup.ts";
+import type { Lineup } from "../../../shared/contracts/lineup.ts";
+import type { ForwardId, NightId, SubmissionId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
 import { applyChange, type Change, findSlotAt } from "./model/change.ts";
 
-const keys = {
-  lineup: ["lineup"] as const,
-  forwards: ["forwards"] as const,
-  forward: (forwardId: string) => ["forwards", forwardId] as const,
-};
+/** The season's plan with its findings. */
+export const lineupQuery = queryOptions({
+  queryKey: ["lineup", "plan"],
+  queryFn: ({ signal }) => callApi(contracts.lineup.lineup, {}, signal),
+});
 
-export function lineupQuery() {
-  return queryOptions({ queryKey: keys.lineup, queryFn: ({ signal }) => callApi(contracts.lineup.lineup, {}, signal) });
-}
+/** Forwarded shows: all of them for the coordinator, a teacher's own. */
+export const forwardsQuery = queryOptions({
+  queryKey: ["lineup", "forwards"],
+  queryFn: async ({ signal }) => (await callApi(contracts.lineup.forwards, {}, signal)).forwards,
+});
 
-export function forwardsQuery() {
-  return queryOptions({
-    queryKey: keys.forwards,
-    queryFn: async ({ signal }) => (await callApi(contracts.lineup.forwards, {}, signal)).forwards,
-  });
-}
-
-export function forwardDetailQuery(forwardId: ForwardSummary["id"]) {
-  return queryOptions({
-    queryKey: keys.forward(forwardId),
+export const forwardQuery = (forwardId: ForwardId) =>
+  queryOptions({
+    queryKey: ["lineup", "forward", forwardId],
     queryFn: ({ signal }) => callApi(contracts.lineup.forwardDetail, { params: { forwardId } }, signal),
   });
-}
 
-/** Answers to a forwarded show change it, the list it is in, and the plan. */
-function useForwardAnswer(answer: (forwardId: ForwardSummary["id"], note: string) => Promise<unknown>) {
-  const client = useQueryClient();
-  return useMutation({
-    mutationFn: ({ forwardId, note }: { forwardId: ForwardSummary["id"]; note: string }) => answer(forwardId, note),
-    onSuccess: () =>
-      Promise.all([client.invalidateQueries({ queryKey: keys.forwards }), client.invalidateQueries({ queryKey: keys.lineup })]),
-  });
+export interface ForwardAnswer {
+  forwardId: ForwardId;
+  note: string;
 }
 
 export function useApprove() {
-  return useForwardAnswer((forwardId, note) => callApi(contracts.lineup.approve, { params: { forwardId }, body: { note } }));
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(contracts.lineup.approve, { params: { forwardId }, body: { note } }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
+  });
 }
 
 export function useDecline() {
-  return useForwardAnswer((forwardId, note) => callApi(contracts.lineup.decline, { params: { forwardId }, body: { note } }));
-}
-
-export function useForwardShow(onForwarded: () => Promise<unknown>) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (input: { submissionId: ForwardSummary["submissionId"]; note: string }) =>
-      callApi(contracts.lineup.forward, { params: { submissionId: input.submissionId }, body: { note: input.note } }),
-    onSuccess: () => Promise.all([client.invalidateQueries({ queryKey: keys.forwards }), onForwarded()]),
+    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(contracts.lineup.decline, { params: { forwardId }, body: { note } }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
+  });
+}
+
+/** Forwards a marked show; the submission shows it from then on. */
+export function useForwardShow(submissionId: SubmissionId) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (note: string) => callApi(contracts.lineup.forward, { params: { submissionId }, body: { note } }),
+    onSuccess: () => Promise.all([client.invalidateQueries({ queryKey: ["lineup"] }), client.invalidateQueries({ queryKey: ["marking"] })]),
   });
 }
 
@@ -84,23 +82,23 @@ export function useChangeLineup() {
     scope: { id: "lineup" },
     mutationFn: ({ before, change }: { before: Lineup; change: Change }) => sendChange(before, change),
     onMutate: async ({ change }) => {
-      await client.cancelQueries({ queryKey: keys.lineup });
-      const shown = client.getQueryData<Lineup>(keys.lineup);
-      if (shown) client.setQueryData(keys.lineup, applyChange(shown, change));
+      await client.cancelQueries({ queryKey: lineupQuery.queryKey });
+      const shown = client.getQueryData(lineupQuery.queryKey);
+      if (shown) client.setQueryData(lineupQuery.queryKey, applyChange(shown, change));
     },
     onSuccess: (after) => {
-      client.setQueryData(keys.lineup, after);
-      void client.invalidateQueries({ queryKey: keys.forwards });
+      client.setQueryData(lineupQuery.queryKey, after);
+      void client.invalidateQueries({ queryKey: forwardsQuery.queryKey });
     },
     onError: (_error, { before }) => {
-      client.setQueryData(keys.lineup, before);
-      return client.invalidateQueries({ queryKey: keys.lineup });
+      client.setQueryData(lineupQuery.queryKey, before);
+      return client.invalidateQueries({ queryKey: lineupQuery.queryKey });
     },
   });
 }
 
 export interface NightChange {
-  nightId: Lineup["nights"][number]["id"];
+  nightId: NightId;
   opensAt?: string;
   closesAt?: string;
   closedReason?: string | null;
@@ -110,7 +108,7 @@ export function useSetNight() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: ({ nightId, ...body }: NightChange) => callApi(contracts.lineup.setNight, { params: { nightId }, body }),
-    onSuccess: (after) => client.setQueryData(keys.lineup, after),
+    onSuccess: (after) => client.setQueryData(lineupQuery.queryKey, after),
   });
 }
 
@@ -118,6 +116,6 @@ export function usePublish() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: () => callApi(contracts.lineup.publish, {}),
-    onSuccess: () => Promise.all([client.invalidateQueries({ queryKey: keys.lineup }), client.invalidateQueries({ queryKey: ["programme"] }), client.invalidateQueries({ queryKey: keys.forwards })]),
+    onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
   });
 }
