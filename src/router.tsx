@@ -1,7 +1,7 @@
 import { createBrowserRouter, type RouteObject } from "react-router";
 import { LoadingPage } from "./components/loading-page.tsx";
 import { RouteError } from "./components/route-error.tsx";
-import { Root } from "./routes/root.tsx";
+import { loader as rootLoader, Root } from "./routes/root.tsx";
 
 /**
  * The pages. Each is one lazy module in src/routes that exports `Component` and, where it needs them,
@@ -10,6 +10,7 @@ import { Root } from "./routes/root.tsx";
  */
 export const routes: RouteObject[] = [
   {
+    loader: rootLoader,
     Component: Root,
     HydrateFallback: LoadingPage,
     ErrorBoundary: RouteError,
@@ -17,6 +18,8 @@ export const routes: RouteObject[] = [
       {
         ErrorBoundary: RouteError,
         children: [
+          { path: "/", lazy: () => import("./routes/start.tsx") },
+          { path: "/sign-in", handle: { hasOwnHead: true }, lazy: () => import("./routes/sign-in.tsx") },
           { path: "/design", lazy: () => import("./routes/design.tsx") },
           { path: "*", lazy: () => import("./routes/not-found.tsx") },
         ],

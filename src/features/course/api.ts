@@ -1,0 +1,35 @@
+import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
+import { courseContract } from "../../../shared/contracts/course.ts";
+import { callApi } from "../../lib/api-client.ts";
+
+export const lessonsQuery = queryOptions({
+  queryKey: ["course", "lessons"],
+  queryFn: async ({ signal }) => (await callApi(courseContract.lessons, {}, signal)).lessons,
+});
+
+export const lessonQuery = (lessonId: string) =>
+  queryOptions({
+    queryKey: ["course", "lesson", lessonId],
+    queryFn: ({ signal }) => callApi(courseContract.lesson, { params: { lessonId } }, signal),
+  });
+
+export interface StepKey {
+  readonly lessonId: string;
+  readonly stepId: string;
+}
+
+export function useAnswerStep({ lessonId, stepId }: StepKey) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (choice: number) => callApi(courseContract.answer, { params: { lessonId, stepId }, body: { choice } }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ["course"] }),
+  });
+}
+
+export function useAttemptStep({ lessonId, stepId }: StepKey) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (source: string) => callApi(courseContract.attempt, { params: { lessonId, stepId }, body: { source } }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ["course"] }),
+  });
+}

@@ -1,0 +1,18 @@
+import { queryOptions } from "@tanstack/react-query";
+import { squareContract } from "../../../shared/contracts/square.ts";
+import type { LayoutId } from "../../../shared/ids.ts";
+import { callApi } from "../../lib/api-client.ts";
+
+/** The layout that drafts follow now. */
+export const squareQuery = queryOptions({
+  queryKey: ["square", "current"],
+  queryFn: ({ signal }) => callApi(squareContract.current, {}, signal),
+});
+
+/** A numbered layout never changes. */
+export const layoutQuery = (layoutId: LayoutId) =>
+  queryOptions({
+    queryKey: ["square", "layout", layoutId],
+    queryFn: ({ signal }) => callApi(squareContract.layout, { params: { layoutId } }, signal),
+    staleTime: Infinity,
+  });
