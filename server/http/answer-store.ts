@@ -32,12 +32,21 @@ export function createAnswerStore(db: Db, clock: Clock): AnswerStore {
     },
     keep(userId, key, answer) {
       db.insert(idempotencyKeys)
-        .values({ userId, key, requestHash: answer.requestHash, status: answer.status, response: answer.body, createdAt: clock.now() })
+        .values({
+          userId,
+          key,
+          requestHash: answer.requestHash,
+          status: answer.status,
+          response: answer.body,
+          createdAt: clock.now(),
+        })
         .onConflictDoNothing()
         .run();
     },
     prune() {
-      db.delete(idempotencyKeys).where(lt(idempotencyKeys.createdAt, clock.now() - KEEP_MS)).run();
+      db.delete(idempotencyKeys)
+        .where(lt(idempotencyKeys.createdAt, clock.now() - KEEP_MS))
+        .run();
     },
   };
 }

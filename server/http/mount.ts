@@ -14,9 +14,7 @@ export interface HandlerInput<E extends Endpoint> extends EndpointInput<E> {
   readonly res: Response;
 }
 
-export type Handler<E extends Endpoint> = (
-  input: HandlerInput<E>,
-) => EndpointResult<E> | Promise<EndpointResult<E>>;
+export type Handler<E extends Endpoint> = (input: HandlerInput<E>) => EndpointResult<E> | Promise<EndpointResult<E>>;
 
 export type Handlers<C extends Contract> = { readonly [K in keyof C]: Handler<C[K]> };
 
@@ -53,7 +51,8 @@ function handleEndpoint(endpoint: Endpoint, handler: Handler<Endpoint>, options:
       if (options.checkResponses) assertResponse(endpoint, result);
       return { status: endpoint.status ?? 200, body: result === undefined ? "" : JSON.stringify(result) };
     };
-    const sent = endpoint.isIdempotent === true && actor !== null ? await answerOnce(req, actor, answer, options) : await answer();
+    const sent =
+      endpoint.isIdempotent === true && actor !== null ? await answerOnce(req, actor, answer, options) : await answer();
     if (res.headersSent) return;
     res.status(sent.status);
     if (sent.status === 204) res.end();
@@ -111,7 +110,9 @@ async function answerOnce(
   if (key === undefined || !KEY_PATTERN.test(key)) {
     throw new ProblemError("malformed-request", { detail: "Send an Idempotency-Key of 8 to 80 letters and numbers." });
   }
-  const requestHash = createHash("sha256").update(`${req.method} ${req.path}\n${JSON.stringify(req.body ?? null)}`).digest("hex");
+  const requestHash = createHash("sha256")
+    .update(`${req.method} ${req.path}\n${JSON.stringify(req.body ?? null)}`)
+    .digest("hex");
   const kept = answers.find(actor.userId, key);
   if (kept) {
     if (kept.requestHash !== requestHash) throw new ProblemError("key-reused");

@@ -1,14 +1,7 @@
-import type { SchoolId, UserId } from "../../shared/ids.ts";
-import type { Role } from "../../shared/roles.ts";
+import type { LiveSession } from "../identity/sessions.ts";
 
 /** The signed-in person of a request, put there by the session middleware. */
-export interface Person {
-  readonly userId: UserId;
-  readonly roles: readonly Role[];
-  readonly schoolId: SchoolId | null;
-  readonly displayName: string;
-  readonly sessionId: string;
-}
+export type Person = LiveSession;
 
 declare global {
   namespace Express {
