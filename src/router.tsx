@@ -1,6 +1,6 @@
 import { createBrowserRouter, type RouteObject } from "react-router";
-import { LoadingPage } from "./components/loading-page.tsx";
 import { RouteError } from "./components/route-error.tsx";
+import { FirstLoad, RootError } from "./routes/root-fallbacks.tsx";
 import { loader as rootLoader, Root } from "./routes/root.tsx";
 
 /**
@@ -12,8 +12,8 @@ export const routes: RouteObject[] = [
   {
     loader: rootLoader,
     Component: Root,
-    HydrateFallback: LoadingPage,
-    ErrorBoundary: RouteError,
+    HydrateFallback: FirstLoad,
+    ErrorBoundary: RootError,
     children: [
       {
         ErrorBoundary: RouteError,

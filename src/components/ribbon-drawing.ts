@@ -1,14 +1,5 @@
+import type { RibbonCells } from "../../sandbox/timeline/ribbon.ts";
 import type { Theme } from "../lib/theme.ts";
-
-/**
- * The cells of a show's ribbon, `rows` (fronts in walking order) by `columns` (equal spans of the song),
- * row after row, four bytes a cell: red, green, blue, and the strength 0 to 255. Borrowed, never changed here.
- */
-export interface RibbonCells {
-  rows: number;
-  columns: number;
-  cells: Uint8Array;
-}
 
 export interface RibbonLook {
   /** Device pixels. */

@@ -1,16 +1,15 @@
 import { useEffect, useRef } from "react";
+import type { RibbonCells } from "../../sandbox/timeline/ribbon.ts";
 import { useElementSize } from "../hooks/use-element-size.ts";
 import { useTheme } from "../hooks/use-theme.ts";
 import { joinClasses } from "./class-names.ts";
 import { queueDrawing } from "./draw-queue.ts";
-import { drawRibbon, threadsFor, type RibbonCells } from "./ribbon-drawing.ts";
-
-export type { RibbonCells } from "./ribbon-drawing.ts";
+import { drawRibbon, threadsFor } from "./ribbon-drawing.ts";
 
 export type RibbonSize = "queue" | "row" | "strip" | "card" | "marking" | "reading";
 
 export interface RibbonProps {
-  /** Null while there is no timeline, or none yet: the bare weave is drawn. */
+  /** From `decodeRibbon` of the picture the server sends; keep it stable (useMemo). Null while there is no timeline: the bare weave is drawn. */
   ribbon: RibbonCells | null;
   /** Title, length and the generated sentence: "Nine Foxes, 2:24, starts dark, busiest in the second chorus". Empty where the same words stand beside it. */
   label: string;

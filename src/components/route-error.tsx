@@ -1,4 +1,5 @@
 import { isRouteErrorResponse, useRevalidator, useRouteError } from "react-router";
+import { ApiProblem } from "../lib/api-client.ts";
 import { ErrorState } from "./error-state.tsx";
 import { LinkButton } from "./link-button.tsx";
 import { NotFoundPage } from "./not-found-page.tsx";
@@ -19,13 +20,14 @@ interface Failure {
 /** Reads what a page needs from whatever was thrown: a router response, an API problem (status, instance), or a fault. */
 function toFailure(error: unknown): Failure {
   if (isRouteErrorResponse(error)) return { status: error.status, requestId: null, isMissingPart: false };
-  const fields: Record<string, unknown> = typeof error === "object" && error !== null ? { ...error } : {};
-  const requestId = fields.requestId ?? fields.instance;
-  return {
-    status: typeof fields.status === "number" ? fields.status : null,
-    requestId: typeof requestId === "string" ? requestId : null,
-    isMissingPart: error instanceof TypeError && /module|import/i.test(error.message),
-  };
+  if (error instanceof ApiProblem) return { status: error.status, requestId: error.requestId, isMissingPart: false };
+  return { status: null, requestId: null, isMissingPart: error instanceof TypeError && /module|import/i.test(error.message) };
+}
+
+function describeFailure({ isMissingPart, status }: Failure): string {
+  if (isMissingPart) return "A part of Duskbell could not be fetched.";
+  if (status === 0) return "The server cannot be reached.";
+  return status === null ? "A fault in the page stopped it." : "The server could not finish this.";
 }
 
 /** The boundary of a route area: says what failed, keeps the band, offers to try again. A 404 becomes the not-found page. */
@@ -48,7 +50,7 @@ export function RouteError({ area = "This page" }: RouteErrorProps) {
     <Page title="Something failed">
       <PageHeader title={`${area} could not be shown`} />
       <ErrorState
-        title={failure.isMissingPart ? "A part of Duskbell could not be fetched." : failure.status === null || failure.status === 0 ? "Duskbell could not finish this." : "The server could not finish this."}
+        title={describeFailure(failure)}
         onRetry={retry}
         isRetrying={revalidator.state === "loading"}
         requestId={failure.requestId}

@@ -1,24 +1,33 @@
+import { useSearchParams } from "react-router";
 import { Page, PageHeader } from "../components/page.tsx";
-import { StreetScene } from "../components/street-scene.tsx";
-import { Button } from "../components/button.tsx";
-import { Icon } from "../components/icon.tsx";
-import { ICON_NAMES } from "../components/icon-paths.ts";
-import { Notice } from "../components/notice.tsx";
-import { Tag } from "../components/tag.tsx";
+import { RadioRow } from "../components/radio-row.tsx";
+import { Colours } from "./design/colours.tsx";
+import { Controls } from "./design/controls.tsx";
+import { Fields } from "./design/fields.tsx";
+import { Pictures } from "./design/pictures.tsx";
+import { States } from "./design/states.tsx";
 
+const DENSITIES = [
+  { value: "student", label: "student" },
+  { value: "staff", label: "staff" },
+] as const;
+
+/** Every part of the design system in its states: for people who build pages, for screenshots and for the accessibility check. */
 export function Component() {
+  const [search, setSearch] = useSearchParams();
+  const density = search.get("density") === "staff" ? "staff" : "student";
   return (
-    <Page title="Design">
-      <PageHeader title="Hello, Wren" lead="Every part" tag={<Tag state="working" />} actions={<Button look="main" icon="play">Run</Button>} />
-      <StreetScene fronts={9} seed={12} className="h-60 overflow-hidden rounded-sheet" />
-      <div className="flex flex-wrap gap-3 py-4">
-        <Button look="plain" disabledReason="Write one line first.">Change</Button>
-        <Button look="quiet" icon="hand">Ask for help</Button>
-      </div>
-      <Notice title="Saved here">Fine.</Notice>
-      <div className="flex flex-wrap gap-3 py-4 text-5">
-        {ICON_NAMES.map((name) => <span key={name} title={name}><Icon name={name} className="size-8" /></span>)}
-      </div>
+    <Page title="Design" density={density} layout="column">
+      <PageHeader
+        title="Design"
+        lead="Every part in its states. The theme switch is in the band."
+        actions={<RadioRow legend="Density" isLegendHidden options={[...DENSITIES]} value={density} onChange={(value) => setSearch({ density: value }, { replace: true })} className="w-56" />}
+      />
+      <Pictures />
+      <Controls />
+      <Fields />
+      <States />
+      <Colours />
     </Page>
   );
 }
