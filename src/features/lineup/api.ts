@@ -1,6 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
-import { contracts } from "../../../shared/contracts/index.ts";
-import type { Lineup } from "../../../shared/contracts/lineup.ts";
+import { lineupContract, type Lineup } from "../../../shared/contracts/lineup.ts";
 import type { ForwardId, NightId, SubmissionId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
 import { applyChange, type Change, findSlotAt } from "./model/change.ts";
@@ -8,19 +7,25 @@ import { applyChange, type Change, findSlotAt } from "./model/change.ts";
 /** The season's plan with its findings. */
 export const lineupQuery = queryOptions({
   queryKey: ["lineup", "plan"],
-  queryFn: ({ signal }) => callApi(contracts.lineup.lineup, {}, signal),
+  queryFn: ({ signal }) => callApi(lineupContract.lineup, {}, signal),
+});
+
+/** The published programme, for everybody. */
+export const programmeQuery = queryOptions({
+  queryKey: ["lineup", "programme"],
+  queryFn: ({ signal }) => callApi(lineupContract.programme, {}, signal),
 });
 
 /** Forwarded shows: all of them for the coordinator, a teacher's own. */
 export const forwardsQuery = queryOptions({
   queryKey: ["lineup", "forwards"],
-  queryFn: async ({ signal }) => (await callApi(contracts.lineup.forwards, {}, signal)).forwards,
+  queryFn: async ({ signal }) => (await callApi(lineupContract.forwards, {}, signal)).forwards,
 });
 
 export const forwardQuery = (forwardId: ForwardId) =>
   queryOptions({
     queryKey: ["lineup", "forward", forwardId],
-    queryFn: ({ signal }) => callApi(contracts.lineup.forwardDetail, { params: { forwardId } }, signal),
+    queryFn: ({ signal }) => callApi(lineupContract.forwardDetail, { params: { forwardId } }, signal),
   });
 
 export interface ForwardAnswer {
@@ -31,7 +36,7 @@ export interface ForwardAnswer {
 export function useApprove() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(contracts.lineup.approve, { params: { forwardId }, body: { note } }),
+    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(lineupContract.approve, { params: { forwardId }, body: { note } }),
     onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
   });
 }
@@ -39,7 +44,7 @@ export function useApprove() {
 export function useDecline() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(contracts.lineup.decline, { params: { forwardId }, body: { note } }),
+    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(lineupContract.decline, { params: { forwardId }, body: { note } }),
     onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
   });
 }
@@ -48,7 +53,7 @@ export function useDecline() {
 export function useForwardShow(submissionId: SubmissionId) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (note: string) => callApi(contracts.lineup.forward, { params: { submissionId }, body: { note } }),
+    mutationFn: (note: string) => callApi(lineupContract.forward, { params: { submissionId }, body: { note } }),
     onSuccess: () => Promise.all([client.invalidateQueries({ queryKey: ["lineup"] }), client.invalidateQueries({ queryKey: ["marking"] })]),
   });
 }
@@ -58,19 +63,19 @@ async function sendChange(lineup: Lineup, change: Change): Promise<Lineup> {
   switch (change.kind) {
     case "place": {
       const { forwardId, nightId, startsAt } = change;
-      const placed = await callApi(contracts.lineup.place, { body: { forwardId, nightId, startsAt } });
+      const placed = await callApi(lineupContract.place, { body: { forwardId, nightId, startsAt } });
       const slot = findSlotAt(placed, nightId, startsAt);
       return change.isPinned && slot ? sendChange(placed, { kind: "pin", slotId: slot.id, isPinned: true }) : placed;
     }
     case "move": {
       const { slotId, nightId, startsAt } = change;
       const swap = findSlotAt(lineup, nightId, startsAt) !== null;
-      return callApi(contracts.lineup.move, { params: { slotId }, body: { nightId, startsAt, swap } });
+      return callApi(lineupContract.move, { params: { slotId }, body: { nightId, startsAt, swap } });
     }
     case "pin":
-      return callApi(contracts.lineup.move, { params: { slotId: change.slotId }, body: { isPinned: change.isPinned } });
+      return callApi(lineupContract.move, { params: { slotId: change.slotId }, body: { isPinned: change.isPinned } });
     case "remove":
-      return callApi(contracts.lineup.remove, { params: { slotId: change.slotId } });
+      return callApi(lineupContract.remove, { params: { slotId: change.slotId } });
   }
 }
 
@@ -107,7 +112,7 @@ export interface NightChange {
 export function useSetNight() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ nightId, ...body }: NightChange) => callApi(contracts.lineup.setNight, { params: { nightId }, body }),
+    mutationFn: ({ nightId, ...body }: NightChange) => callApi(lineupContract.setNight, { params: { nightId }, body }),
     onSuccess: (after) => client.setQueryData(lineupQuery.queryKey, after),
   });
 }
@@ -115,7 +120,7 @@ export function useSetNight() {
 export function usePublish() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: () => callApi(contracts.lineup.publish, {}),
+    mutationFn: () => callApi(lineupContract.publish, {}),
     onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
   });
 }
