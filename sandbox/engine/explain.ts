@@ -1,0 +1,203 @@
+import ts from "typescript";
+import { placeOf, type CompiledScript } from "../language/compile.ts";
+import { LINES_BEFORE, type Site } from "../language/mark.ts";
+import { createProblem, isProblemCode, type ProblemPlace } from "../language/problem.ts";
+import { toExcerpt, toOffset, toRange } from "../language/ranges.ts";
+import type { SentenceValues } from "../language/sentence.ts";
+import type { ProblemCode } from "../language/problems/index.ts";
+import type { GuestFailure } from "./guest.ts";
+import type { Problem } from "./model.ts";
+import type { RuntimeResult } from "./runtime.ts";
+
+/** The problem of a run in the words of the catalogue, at its place in the script; null when it ended well. */
+export function explainFailure(compiled: CompiledScript, result: RuntimeResult): Problem | null {
+  const sites = (result.report?.sites ?? [0]).map((site) => compiled.marked.sites[site] ?? scriptSite(compiled));
+  const site = sites.at(-1) ?? scriptSite(compiled);
+  const failure = result.report?.failure ?? null;
+  if (result.end === "out-of-fuel") return explainFuel(compiled, sites);
+  if (result.end === "unreadable") return explainUnreadable(compiled, result.details);
+  if (result.end === "broken") return explainBroken(compiled, site, result.details);
+  if (failure === null) return null;
+  if (failure.code === "engine") return explainEngine(compiled, site, failure);
+  if (failure.code === "thrown") return explainThrown(compiled, site, failure);
+  return explainLibrary(compiled, site, failure);
+}
+
+function scriptSite(compiled: CompiledScript): Site {
+  return compiled.marked.sites[0] as Site;
+}
+
+/** The innermost loop around the innermost call that is in one: that loop has no end. */
+function explainFuel(compiled: CompiledScript, sites: readonly Site[]): Problem {
+  for (const site of sites.toReversed()) {
+    const loop = loopAround(site.node);
+    if (loop !== null) return createProblem("endless", {}, headOf(compiled, loop));
+  }
+  const site = sites.at(-1) ?? scriptSite(compiled);
+  return createProblem("too-much-work", {}, placeOfSite(compiled, site));
+}
+
+function loopAround(node: ts.Node): ts.Node | null {
+  let outermost: ts.Node | null = null;
+  for (let at: ts.Node | undefined = node; at !== undefined && !ts.isFunctionLike(at); at = at.parent)
+    if (ts.isIterationStatement(at, false)) outermost = at;
+  return outermost;
+}
+
+/** A statement's first line only: a loop as far as its body. */
+function headOf(compiled: CompiledScript, node: ts.Node): ProblemPlace {
+  const start = node.getStart(compiled.file);
+  const body = ts.isIterationStatement(node, false) && !ts.isDoStatement(node) ? node.statement.getStart(compiled.file) : node.end;
+  const lineEnd = compiled.text.indexOf("\n", start);
+  const end = Math.min(body, lineEnd < 0 ? node.end : lineEnd);
+  const text = compiled.text.slice(start, end).trimEnd();
+  return { range: toRange(compiled.file, start, start + text.length), excerpt: toExcerpt(compiled.text, start, start + text.length) };
+}
+
+function explainUnreadable(compiled: CompiledScript, details: string): Problem {
+  const place = placeInStack(compiled, details) ?? { range: { line: 1, column: 1, endLine: 1, endColumn: 1 }, excerpt: "" };
+  if (details.includes("stack overflow")) return createProblem("too-deep", {}, { ...place, details });
+  return createProblem("unreadable", {}, { ...place, details });
+}
+
+function explainBroken(compiled: CompiledScript, site: Site, details: string): Problem {
+  const place = { ...placeOfSite(compiled, site), details };
+  if (details.includes("out of memory")) return createProblem("too-big", {}, place);
+  return createProblem("could-not-run", {}, place);
+}
+
+/** The place in the script of the top frame of an engine's stack. */
+function placeInStack(compiled: CompiledScript, stack: string): ProblemPlace | null {
+  const found = /script\.js:(\d+)(?::(\d+))?/.exec(stack);
+  if (found === null) return null;
+  const line = Number(found[1]) - LINES_BEFORE;
+  if (line < 1) return null;
+  const column = found[2] === undefined ? 1 : compiled.marked.toScriptColumn(line, Number(found[2]));
+  const start = toOffset(compiled.text, line, column);
+  const word = /^[\w$.]+/.exec(compiled.text.slice(start))?.[0] ?? compiled.text.slice(start, start + 1);
+  return { range: toRange(compiled.file, start, start + word.length), excerpt: toExcerpt(compiled.text, start, start + word.length) };
+}
+
+/** Where a call site is shown: the name of what is called, up to the end of the call when it is on one line. */
+function placeOfSite(compiled: CompiledScript, site: Site): ProblemPlace {
+  const { file } = compiled;
+  if (site.kind === "loop") return headOf(compiled, site.node);
+  if (site.kind === "function") return headOf(compiled, nameOf(site.node) ?? site.node);
+  if (!ts.isCallExpression(site.node)) return headOf(compiled, site.node);
+  const callee = site.node.expression;
+  const start = ts.isPropertyAccessExpression(callee) ? callee.name.getStart(file) : callee.getStart(file);
+  const line = compiled.text.indexOf("\n", start);
+  const end = line >= 0 && line < site.node.end ? callee.end : site.node.end;
+  return { range: toRange(file, start, end), excerpt: toExcerpt(compiled.text, start, end) };
+}
+
+function nameOf(node: ts.Node): ts.Node | undefined {
+  if (ts.isFunctionLike(node) && node.name !== undefined) return node.name;
+  if (node.parent !== undefined && ts.isVariableDeclaration(node.parent)) return node.parent.name;
+  return undefined;
+}
+
+/** The function around a node, as a sentence names it. */
+function functionName(compiled: CompiledScript, node: ts.Node): string {
+  for (let at: ts.Node | undefined = node; at !== undefined; at = at.parent) {
+    if (!ts.isFunctionLike(at)) continue;
+    const name = nameOf(at);
+    if (name !== undefined) return name.getText(compiled.file);
+  }
+  return "This";
+}
+
+function explainLibrary(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
+  const argument = failure.argument === undefined ? undefined : argumentOf(site, failure.argument);
+  const place = argument === undefined ? placeOfSite(compiled, site) : placeOf(compiled.file, argument);
+  if (failure.code === "calls-itself") return createProblem("calls-itself", { name: functionName(compiled, site.node) }, place);
+  if (failure.code === "not-an-action") return explainAction(compiled, failure, argument, place);
+  const code: ProblemCode = isProblemCode(failure.code) ? failure.code : "could-not-run";
+  return createProblem(code, { ...failure.values, ...extraValues(compiled, failure, argument) }, { ...place, ...fixOf(compiled, failure, argument) });
+}
+
+function argumentOf(site: Site, index: number): ts.Node | undefined {
+  if (!ts.isCallExpression(site.node)) return undefined;
+  const argument = site.node.arguments[index];
+  return argument === undefined || ts.isSpreadElement(argument) ? undefined : argument;
+}
+
+/** Something ran where steps were wanted: `at(8, all.off())`. */
+function explainAction(compiled: CompiledScript, failure: GuestFailure, argument: ts.Node | undefined, place: ProblemPlace): Problem {
+  const word = String(failure.values["word"] ?? "at");
+  if (argument !== undefined && ts.isCallExpression(argument)) {
+    const start = argument.getStart(compiled.file);
+    const range = toRange(compiled.file, start, start);
+    const when = failure.values["when"] === undefined ? "later" : `at beat ${failure.values["when"]}`;
+    return createProblem("ran-too-early", { when }, { ...place, fix: { range, text: "() => ", label: "Put `() =>` in front" } });
+  }
+  return createProblem("not-an-action", { word, got: String(failure.values["got"] ?? ""), example: ACTION_EXAMPLES[word] ?? `${word}(() => { ... })` }, place);
+}
+
+const ACTION_EXAMPLES: { readonly [word: string]: string } = {
+  at: "at(8, () => { ... })",
+  repeat: "repeat(4, () => { ... })",
+  together: "together(() => { ... }, () => { ... })",
+  inTurn: "inTurn(1, front => { ... })",
+  forEach: "forEach(front => { ... })",
+  filter: "filter(front => ...)",
+  map: "map(front => ...)",
+};
+
+function extraValues(compiled: CompiledScript, failure: GuestFailure, argument: ts.Node | undefined): SentenceValues {
+  if (failure.code === "missing-value") return { things: failure.values["count"] === 1 ? "thing" : "things" };
+  const number = failure.code === "wants-a-number" ? numberInQuotes(argument) : null;
+  return number === null ? {} : { number };
+}
+
+function numberInQuotes(argument: ts.Node | undefined): string | null {
+  if (argument === undefined || !ts.isStringLiteralLike(argument)) return null;
+  return argument.text.trim() !== "" && Number.isFinite(Number(argument.text)) ? argument.text.trim() : null;
+}
+
+/** Replacements that are certain: the name that was meant, the number without its quotes. */
+function fixOf(compiled: CompiledScript, failure: GuestFailure, argument: ts.Node | undefined): Pick<Problem, "fix"> {
+  if (argument === undefined || !ts.isStringLiteralLike(argument)) return {};
+  const { range } = placeOf(compiled.file, argument);
+  const meant = failure.values["meant"];
+  if (typeof meant === "string") return { fix: { range, text: JSON.stringify(meant), label: `Write "${meant}"` } };
+  const number = failure.code === "wants-a-number" ? numberInQuotes(argument) : null;
+  return number === null ? {} : { fix: { range, text: number, label: "Take the quotes off" } };
+}
+
+function explainThrown(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
+  const place = (failure.stack === undefined ? null : placeInStack(compiled, failure.stack)) ?? placeOfSite(compiled, site);
+  return createProblem("thrown", failure.message === undefined || failure.message === "" ? {} : { message: failure.message }, place);
+}
+
+/** An error of QuickJS itself, by its own words; those are pinned with the engine and covered by tests. */
+function explainEngine(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
+  const message = failure.message ?? "";
+  const details = `${failure.name ?? "Error"}: ${message}`;
+  const inStack = failure.stack === undefined ? null : placeInStack(compiled, failure.stack);
+  const place = { ...(inStack ?? placeOfSite(compiled, site)), details };
+  if (message.includes("stack overflow")) return createProblem("calls-itself", { name: functionName(compiled, site.node) }, { ...placeOfSite(compiled, site), details });
+  if (message.includes("out of memory") || message.includes("invalid array length") || message.includes("string too long") || message.includes("array too large"))
+    return createProblem("too-big", {}, place);
+  if (message.includes("is not initialized")) return createProblem("not-made-yet", { name: quoted(message) ?? place.excerpt }, place);
+  if (failure.name === "ReferenceError") return createProblem("out-of-reach", { name: quoted(message) ?? place.excerpt }, place);
+  if (message.includes("read-only") || message.includes("not extensible") || message.includes("no setter")) return createProblem("can-not-change", {}, place);
+  if (message.includes("cannot read property") || message.includes("cannot set property")) {
+    const name = quoted(message) ?? "";
+    return createProblem("nothing-there", { name }, place);
+  }
+  if (message.includes("not iterable")) return createProblem("not-a-list", {}, place);
+  if (message.includes("not a function")) return createProblem("not-a-function", { name: calleeText(compiled, site) }, { ...placeOfSite(compiled, site), details });
+  return createProblem("could-not-run", {}, place);
+}
+
+function quoted(message: string): string | null {
+  return /'([^']+)'/.exec(message)?.[1] ?? /^(\S+) is not/.exec(message)?.[1] ?? null;
+}
+
+function calleeText(compiled: CompiledScript, site: Site): string {
+  if (!ts.isCallExpression(site.node)) return "This";
+  const callee = site.node.expression;
+  const name = ts.isPropertyAccessExpression(callee) ? callee.name : callee;
+  return name.getText(compiled.file);
+}

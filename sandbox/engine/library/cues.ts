@@ -1,0 +1,152 @@
+import { BUFFER_MARK, CUE_WORDS, HEAD_WORDS, MAX_CHANGES, MAX_CUES, STOOD_STILL_CUES } from "../guest.ts";
+import { fail, notice, state, toTick } from "./state.ts";
+
+/**
+ * The cues of the run, seven words each, in the order they were written. Selections and chains of
+ * call sites are interned: a show repeats the same few thousands of times.
+ */
+const FIRST_CUES = 256;
+const HASH_START = 0x81_1c_9d_c5;
+const HASH_FACTOR = 0x01_00_01_93;
+/** More call sites than a script of 64 KiB can hold. */
+const SITE_RANGE = 0x1_00_00;
+const NO_COLOUR = 0xff_ff_ff_ff;
+
+let words = new Uint32Array(FIRST_CUES * CUE_WORDS);
+let kept = 0;
+let written = 0;
+let changes = 0;
+let stoodSince = 0;
+let lastClock = -1;
+
+const selections: Uint16Array[] = [];
+const selectionsByHash = new Map<number, number[]>();
+let selectedLights = 0;
+
+/** A chain is a call site below the chain of its callers; chain 0 is empty. */
+const chainParent: number[] = [0];
+const chainSite: number[] = [0];
+const chainIndex = new Map<number, number>();
+
+function isSame(a: Uint16Array, b: Uint16Array): boolean {
+  if (a.length !== b.length) return false;
+  for (let i = 0; i < a.length; i++) if (a[i] !== b[i]) return false;
+  return true;
+}
+
+/** Index of a list of lights among those already used; the list is kept, not copied. */
+export function internSelection(lights: Uint16Array): number {
+  let hash = HASH_START;
+  for (let i = 0; i < lights.length; i++) hash = Math.imul(hash ^ (lights[i] ?? 0), HASH_FACTOR);
+  let bucket = selectionsByHash.get(hash);
+  if (bucket === undefined) {
+    bucket = [];
+    selectionsByHash.set(hash, bucket);
+  }
+  for (const candidate of bucket) {
+    const known = selections[candidate];
+    if (known !== undefined && isSame(known, lights)) return candidate;
+  }
+  const index = selections.length;
+  selections.push(lights);
+  selectedLights += lights.length;
+  bucket.push(index);
+  return index;
+}
+
+function chainBelow(parent: number, site: number): number {
+  const key = parent * SITE_RANGE + site;
+  const known = chainIndex.get(key);
+  if (known !== undefined) return known;
+  const index = chainParent.length;
+  chainParent.push(parent);
+  chainSite.push(site);
+  chainIndex.set(key, index);
+  return index;
+}
+
+function chainNow(): number {
+  const { frames } = state;
+  const depth = frames.depth();
+  let chain = 0;
+  for (let i = 0; i < depth; i++) chain = chainBelow(chain, frames.callers[i] ?? 0);
+  return chainBelow(chain, frames.site());
+}
+
+function grow(): void {
+  const larger = new Uint32Array(words.length * 2);
+  larger.set(words);
+  words = larger;
+}
+
+/** What a cue sets; numbers as the timeline stores them. */
+export interface CueValues {
+  readonly action: number;
+  readonly level: number;
+  readonly length: number;
+  readonly colour: number;
+}
+
+/** A cue's values; fields that the action does not have are 0 or no colour. */
+export function cueValues(action: number, level: number, length: number, colour: number = NO_COLOUR): CueValues {
+  return { action, level, length, colour };
+}
+
+/** Counts one write against the limits, whether or not it is kept. */
+function count(lights: number): void {
+  if (state.clock !== lastClock) {
+    lastClock = state.clock;
+    stoodSince = written;
+  }
+  written++;
+  changes += lights;
+  if (written > MAX_CUES)
+    fail(written - stoodSince > STOOD_STILL_CUES ? "clock-stood-still" : "too-many-cues", { limit: MAX_CUES });
+  if (changes > MAX_CHANGES) fail("too-many-changes", { limit: MAX_CHANGES });
+}
+
+/** Writes one cue at the clock (rule 12). `isQuiet`: nobody needs to hear that it came at the very end. */
+export function writeCue(selection: number, lights: number, values: CueValues, isQuiet: boolean): void {
+  if (lights === 0) {
+    notice("nothing-to-light");
+    return;
+  }
+  count(lights);
+  const tick = toTick(state.clock);
+  const end = toTick(state.tables.song.beats.length - 1);
+  if (tick >= end) {
+    if (tick > end || !isQuiet) notice("after-the-end");
+    return;
+  }
+  if ((kept + 1) * CUE_WORDS > words.length) grow();
+  const at = kept * CUE_WORDS;
+  words[at] = tick;
+  words[at + 1] = values.action;
+  words[at + 2] = selection;
+  words[at + 3] = values.level;
+  words[at + 4] = values.length;
+  words[at + 5] = values.colour;
+  words[at + 6] = chainNow();
+  kept++;
+}
+
+/**
+ * Everything written, as one buffer of 32-bit words: head, cues, length of every selection, lights of
+ * all selections, callers and sites of all chains.
+ */
+export function takeBuffer(): ArrayBuffer {
+  const size = HEAD_WORDS + kept * CUE_WORDS + selections.length + selectedLights + 2 * chainParent.length;
+  const out = new Uint32Array(size);
+  out.set([BUFFER_MARK, kept, selections.length, selectedLights, chainParent.length]);
+  out.set(words.subarray(0, kept * CUE_WORDS), HEAD_WORDS);
+  let at = HEAD_WORDS + kept * CUE_WORDS;
+  let lightsAt = at + selections.length;
+  for (const lights of selections) {
+    out[at++] = lights.length;
+    out.set(lights, lightsAt);
+    lightsAt += lights.length;
+  }
+  out.set(chainParent, lightsAt);
+  out.set(chainSite, lightsAt + chainParent.length);
+  return out.buffer;
+}
