@@ -1,40 +1,5 @@
-import { createBrowserRouter, type RouteObject } from "react-router";
-import { RouteError } from "./components/route-error.tsx";
-import { FirstLoad, RootError } from "./routes/root-fallbacks.tsx";
-import { loader as rootLoader, Root } from "./routes/root.tsx";
+import { createBrowserRouter } from "react-router";
+import { routes } from "./route-table.tsx";
 
-/**
- * The pages. Each is one lazy module in src/routes that exports `Component` and, where it needs them,
- * `loader` and `ErrorBoundary`. Every area has its own boundary, so that a fault in one page leaves
- * the band and the other pages standing.
- */
-export const routes: RouteObject[] = [
-  {
-    loader: rootLoader,
-    Component: Root,
-    HydrateFallback: FirstLoad,
-    ErrorBoundary: RootError,
-    children: [
-      {
-        ErrorBoundary: RouteError,
-        children: [
-          { path: "/", lazy: () => import("./routes/start.tsx") },
-          { path: "/sign-in", handle: { hasOwnHead: true }, lazy: () => import("./routes/sign-in.tsx") },
-          { path: "/home", lazy: () => import("./routes/home.tsx") },
-          { path: "/shows", lazy: () => import("./routes/shows.tsx") },
-          { path: "/shows/new", lazy: () => import("./routes/new-show.tsx") },
-          { path: "/shows/:showId", handle: { hasOwnHead: true }, lazy: () => import("./routes/studio.tsx") },
-          { path: "/assignments/:assignmentId", lazy: () => import("./routes/assignment.tsx") },
-          { path: "/lessons", lazy: () => import("./routes/lessons.tsx") },
-          { path: "/lessons/:lessonId", lazy: () => import("./routes/lesson.tsx") },
-          { path: "/programme", lazy: () => import("./routes/programme.tsx") },
-          { path: "/account", lazy: () => import("./routes/account.tsx") },
-          { path: "/design", lazy: () => import("./routes/design.tsx") },
-          { path: "*", lazy: () => import("./routes/not-found.tsx") },
-        ],
-      },
-    ],
-  },
-];
-
+/** The router of this page. The table stands apart, so that tests can walk it without a browser. */
 export const router = createBrowserRouter(routes);

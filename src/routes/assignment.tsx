@@ -1,14 +1,13 @@
 import { useQuery } from "@tanstack/react-query";
 import { useParams, type LoaderFunctionArgs } from "react-router";
-import { AssignmentIdSchema } from "../../shared/ids.ts";
-import { ErrorState } from "../components/error-state.tsx";
+import { AssignmentIdSchema, type SubmissionId } from "../../shared/ids.ts";
 import { Page } from "../components/page.tsx";
+import { QueryView } from "../components/query-view.tsx";
 import { Skeleton, SkeletonGroup } from "../components/skeleton.tsx";
 import { assignmentQuery } from "../features/assignments/api.ts";
 import { AssignmentBrief } from "../features/assignments/components/assignment-brief.tsx";
 import { submissionQuery } from "../features/marking/api.ts";
 import { Feedback } from "../features/marking/components/feedback.tsx";
-import { ApiProblem } from "../lib/api-client.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { requireSession } from "./guards.ts";
 
@@ -20,10 +19,7 @@ function parseId(value: string | undefined) {
 
 export async function loader({ request, params }: LoaderFunctionArgs) {
   await requireSession(request, "student");
-  const query = assignmentQuery(parseId(params["assignmentId"]));
-  await queryClient.ensureQueryData(query).catch((error: unknown) => {
-    if (error instanceof ApiProblem && error.status === 404) throw new Response(null, { status: 404 });
-  });
+  void queryClient.prefetchQuery(assignmentQuery(parseId(params["assignmentId"])));
   return null;
 }
 
@@ -31,22 +27,43 @@ export async function loader({ request, params }: LoaderFunctionArgs) {
 export function Component() {
   const { assignmentId } = useParams();
   const assignment = useQuery(assignmentQuery(parseId(assignmentId)));
-  const submissionId = assignment.data?.assignment.mine?.submissionId ?? null;
-  const submission = useQuery({ ...submissionQuery(submissionId ?? ("none" as never)), enabled: submissionId !== null });
-  if (assignment.isError) {
-    return (
-      <Page title="Assignment">
-        <h1 className="mb-4">Assignment</h1>
-        <ErrorState title="The assignment could not be loaded." onRetry={() => void assignment.refetch()} isRetrying={assignment.isFetching} />
-      </Page>
-    );
-  }
-  if (!assignment.data) return <AssignmentSkeleton />;
   return (
-    <Page title={assignment.data.assignment.title}>
-      <AssignmentBrief detail={assignment.data} feedback={submission.data ? <Feedback detail={submission.data} /> : null} />
-      {submission.isError && <ErrorState title="What came back could not be loaded." onRetry={() => void submission.refetch()} isRetrying={submission.isFetching} />}
-    </Page>
+    <QueryView
+      query={assignment}
+      errorTitle="The assignment could not be loaded."
+      skeleton={<AssignmentSkeleton />}
+      frame={(message) => (
+        <Page title="Assignment">
+          <h1 className="mb-4">Assignment</h1>
+          {message}
+        </Page>
+      )}
+    >
+      {(detail) => (
+        <Page title={detail.assignment.title}>
+          <AssignmentBrief
+            detail={detail}
+            feedback={detail.assignment.mine?.submissionId ? <CameBack submissionId={detail.assignment.mine.submissionId} /> : null}
+          />
+        </Page>
+      )}
+    </QueryView>
+  );
+}
+
+function CameBack({ submissionId }: { submissionId: SubmissionId }) {
+  return (
+    <QueryView
+      query={useQuery(submissionQuery(submissionId))}
+      errorTitle="What came back could not be loaded."
+      skeleton={
+        <SkeletonGroup label="Loading what came back">
+          <Skeleton shape="block" className="h-24" />
+        </SkeletonGroup>
+      }
+    >
+      {(detail) => <Feedback detail={detail} />}
+    </QueryView>
   );
 }
 

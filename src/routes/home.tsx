@@ -1,9 +1,9 @@
 import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
 import { Link, type LoaderFunctionArgs } from "react-router";
 import { EmptyState } from "../components/empty-state.tsx";
-import { ErrorState } from "../components/error-state.tsx";
 import { LinkButton } from "../components/link-button.tsx";
 import { Page, PageHeader } from "../components/page.tsx";
+import { QueryView } from "../components/query-view.tsx";
 import { Ribbon } from "../components/ribbon.tsx";
 import { Skeleton, SkeletonGroup } from "../components/skeleton.tsx";
 import { assignmentsQuery } from "../features/assignments/api.ts";
@@ -51,22 +51,22 @@ export function Component() {
 }
 
 function Next() {
-  const lessons = useQuery(lessonsQuery);
-  if (lessons.isError) {
-    return <ErrorState title="Your lessons could not be loaded." onRetry={() => void lessons.refetch()} isRetrying={lessons.isFetching} />;
-  }
-  if (!lessons.data) {
-    return (
-      <SkeletonGroup label="Loading what comes next">
-        <Skeleton shape="ribbon" className="h-60" />
-      </SkeletonGroup>
-    );
-  }
-  return <NextThing lessons={lessons.data} />;
+  return (
+    <QueryView
+      query={useQuery(lessonsQuery)}
+      errorTitle="Your lessons could not be loaded."
+      skeleton={
+        <SkeletonGroup label="Loading what comes next">
+          <Skeleton shape="ribbon" className="h-60" />
+        </SkeletonGroup>
+      }
+    >
+      {(lessons) => <NextThing lessons={lessons} />}
+    </QueryView>
+  );
 }
 
 function MyShows({ reader }: { reader: string }) {
-  const shows = useQuery(showsQuery());
   const now = useNow();
   return (
     <section aria-labelledby="my-shows">
@@ -76,67 +76,81 @@ function MyShows({ reader }: { reader: string }) {
           New show
         </LinkButton>
       </div>
-      {shows.isError && <ErrorState title="Your shows could not be loaded." onRetry={() => void shows.refetch()} isRetrying={shows.isFetching} />}
-      {shows.isPending && <ShowGridSkeleton />}
-      {shows.data?.length === 0 && (
-        <EmptyState title="No show yet" picture={<Ribbon ribbon={null} label="" />}>
-          Begin an assignment, or pick a song and start one of your own. Its ribbon will be here.
-        </EmptyState>
-      )}
-      {shows.data && shows.data.length > 0 && <ShowGrid shows={shows.data.slice(0, SHOWS_HERE)} reader={reader} now={now} />}
-      {shows.data && shows.data.length > SHOWS_HERE && (
-        <p className="mt-3">
-          <Link to="/shows">All {shows.data.length} shows</Link>
-        </p>
-      )}
+      <QueryView query={useQuery(showsQuery())} errorTitle="Your shows could not be loaded." skeleton={<ShowGridSkeleton />}>
+        {(shows) =>
+          shows.length === 0 ? (
+            <EmptyState title="No show yet" picture={<Ribbon ribbon={null} label="" />}>
+              Begin an assignment, or pick a song and start one of your own. Its ribbon will be here.
+            </EmptyState>
+          ) : (
+            <>
+              <ShowGrid shows={shows.slice(0, SHOWS_HERE)} reader={reader} now={now} />
+              {shows.length > SHOWS_HERE && (
+                <p className="mt-3">
+                  <Link to="/shows">All {shows.length} shows</Link>
+                </p>
+              )}
+            </>
+          )
+        }
+      </QueryView>
     </section>
   );
 }
 
 function MyAssignments() {
-  const assignments = useQuery(assignmentsQuery);
   const now = useNow();
   return (
     <section aria-labelledby="my-assignments">
       <h2 id="my-assignments" className="mb-1">
         Class assignments
       </h2>
-      {assignments.isError && (
-        <ErrorState title="The assignments could not be loaded." onRetry={() => void assignments.refetch()} isRetrying={assignments.isFetching} />
-      )}
-      {assignments.isPending && (
-        <SkeletonGroup label="Loading the assignments" className="space-y-4 py-3">
-          <Skeleton className="w-1/2" />
-          <Skeleton className="w-2/3" />
-        </SkeletonGroup>
-      )}
-      {assignments.data?.length === 0 && (
-        <EmptyState title="Nothing is set" icon="page" className="mt-3">
-          When your teacher sets an assignment, it is here.
-        </EmptyState>
-      )}
-      {assignments.data && assignments.data.length > 0 && <AssignmentRows assignments={assignments.data} now={now} />}
+      <QueryView
+        query={useQuery(assignmentsQuery)}
+        errorTitle="The assignments could not be loaded."
+        skeleton={
+          <SkeletonGroup label="Loading the assignments" className="space-y-4 py-3">
+            <Skeleton className="w-1/2" />
+            <Skeleton className="w-2/3" />
+          </SkeletonGroup>
+        }
+      >
+        {(assignments) =>
+          assignments.length === 0 ? (
+            <EmptyState title="Nothing is set" icon="page" className="mt-3">
+              When your teacher sets an assignment, it is here.
+            </EmptyState>
+          ) : (
+            <AssignmentRows assignments={assignments} now={now} />
+          )
+        }
+      </QueryView>
     </section>
   );
 }
 
 function Coming() {
-  const programme = useQuery(programmeQuery);
-  const coming = programme.data?.shows.filter((show) => show.date >= programme.data.tonight).slice(0, COMING_HERE);
   return (
     <aside aria-labelledby="on-the-square">
       <h2 id="on-the-square" className="mb-1">
         On the square
       </h2>
-      {programme.isError && <ErrorState title="The programme could not be loaded." onRetry={() => void programme.refetch()} isRetrying={programme.isFetching} />}
-      {programme.isPending && (
-        <SkeletonGroup label="Loading the programme" className="space-y-4 py-3">
-          <Skeleton shape="ribbon" />
-          <Skeleton shape="ribbon" />
-        </SkeletonGroup>
-      )}
-      {coming?.length === 0 && <p className="py-2 text-soft">No night is published yet. When one is, the shows stand here.</p>}
-      {coming && coming.length > 0 && <ComingShows shows={coming} />}
+      <QueryView
+        query={useQuery(programmeQuery)}
+        errorTitle="The programme could not be loaded."
+        skeleton={
+          <SkeletonGroup label="Loading the programme" className="space-y-4 py-3">
+            <Skeleton shape="ribbon" />
+            <Skeleton shape="ribbon" />
+          </SkeletonGroup>
+        }
+      >
+        {({ shows, tonight }) => {
+          const coming = shows.filter((show) => show.date >= tonight).slice(0, COMING_HERE);
+          if (coming.length === 0) return <p className="py-2 text-soft">No night is published yet. When one is, the shows stand here.</p>;
+          return <ComingShows shows={coming} />;
+        }}
+      </QueryView>
       <p className="mt-4">
         <Link to="/programme">The whole programme</Link>
       </p>

@@ -1,8 +1,8 @@
 import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
 import type { LoaderFunctionArgs } from "react-router";
 import { EmptyState } from "../components/empty-state.tsx";
-import { ErrorState } from "../components/error-state.tsx";
 import { Page, PageHeader } from "../components/page.tsx";
+import { QueryView } from "../components/query-view.tsx";
 import { Skeleton, SkeletonGroup } from "../components/skeleton.tsx";
 import { sessionQuery } from "../features/auth/api.ts";
 import { lessonsQuery } from "../features/course/api.ts";
@@ -19,28 +19,32 @@ export async function loader({ request }: LoaderFunctionArgs) {
 
 /** The course from first light to showpiece. */
 export function Component() {
-  const lessons = useQuery(lessonsQuery);
   const { data: session } = useSuspenseQuery(sessionQuery);
   const isTeacher = session?.user.roles.includes("teacher") ?? false;
   return (
     <Page title="Lessons">
       <PageHeader title="Lessons" lead="Each lesson takes one class hour: predict, run, investigate, change, make." />
-      {lessons.isError && <ErrorState title="The lessons could not be loaded." onRetry={() => void lessons.refetch()} isRetrying={lessons.isFetching} />}
-      {lessons.isPending && (
-        <SkeletonGroup label="Loading the lessons" className="space-y-5">
-          <Skeleton shape="block" className="h-20" />
-          <Skeleton shape="block" className="h-20" />
-          <Skeleton shape="block" className="h-20" />
-        </SkeletonGroup>
-      )}
-      {lessons.data?.length === 0 && (
-        <EmptyState title="No lesson is here yet" headingLevel={2} icon="book">
-          The course comes with Duskbell. If this stays empty, whoever looks after the installation can help.
-        </EmptyState>
-      )}
-      {lessons.data && lessons.data.length > 0 && (
-        <LessonList lessons={lessons.data} isTeacher={isTeacher} nextLessonId={isTeacher ? null : (findNextLesson(lessons.data)?.id ?? null)} />
-      )}
+      <QueryView
+        query={useQuery(lessonsQuery)}
+        errorTitle="The lessons could not be loaded."
+        skeleton={
+          <SkeletonGroup label="Loading the lessons" className="space-y-5">
+            <Skeleton shape="block" className="h-20" />
+            <Skeleton shape="block" className="h-20" />
+            <Skeleton shape="block" className="h-20" />
+          </SkeletonGroup>
+        }
+      >
+        {(lessons) =>
+          lessons.length === 0 ? (
+            <EmptyState title="No lesson is here yet" headingLevel={2} icon="book">
+              The course comes with Duskbell. If this stays empty, whoever looks after the installation can help.
+            </EmptyState>
+          ) : (
+            <LessonList lessons={lessons} isTeacher={isTeacher} nextLessonId={isTeacher ? null : (findNextLesson(lessons)?.id ?? null)} />
+          )
+        }
+      </QueryView>
     </Page>
   );
 }

@@ -1,9 +1,9 @@
 import { useQuery } from "@tanstack/react-query";
 import { useNavigate, useSearchParams, type LoaderFunctionArgs } from "react-router";
-import { AssignmentIdSchema } from "../../shared/ids.ts";
+import { type AssignmentId, AssignmentIdSchema } from "../../shared/ids.ts";
 import { EmptyState } from "../components/empty-state.tsx";
-import { ErrorState } from "../components/error-state.tsx";
 import { Page, PageHeader } from "../components/page.tsx";
+import { QueryView } from "../components/query-view.tsx";
 import { Skeleton, SkeletonGroup } from "../components/skeleton.tsx";
 import { assignmentQuery } from "../features/assignments/api.ts";
 import { NewShowForm } from "../features/shows/components/new-show-form.tsx";
@@ -21,33 +21,37 @@ export async function loader({ request }: LoaderFunctionArgs) {
 export function Component() {
   const [search] = useSearchParams();
   const wanted = AssignmentIdSchema.safeParse(search.get("assignment"));
+  const assignment = useQuery({ ...assignmentQuery(wanted.data ?? ("none" as AssignmentId)), enabled: wanted.success });
   const songs = useQuery(songsQuery);
-  const assignment = useQuery({ ...assignmentQuery(wanted.data ?? ("none" as never)), enabled: wanted.success });
   const navigate = useNavigate();
-  const failed = songs.isError ? songs : assignment.isError ? assignment : null;
-  const isReady = songs.data !== undefined && (!wanted.success || assignment.data !== undefined);
+  const forAssignment = assignment.data?.assignment;
   return (
     <Page title="New show">
-      <PageHeader title="New show" lead={assignment.data ? `For “${assignment.data.assignment.title}”` : "Pick a song. Your script will light the square to it."} />
-      {failed && <ErrorState title="The songs could not be loaded." onRetry={() => void failed.refetch()} isRetrying={failed.isFetching} />}
-      {!failed && !isReady && (
-        <SkeletonGroup label="Loading the songs" className="max-w-2xl space-y-3">
-          <Skeleton shape="block" className="h-16" />
-          <Skeleton shape="block" className="h-16" />
-        </SkeletonGroup>
-      )}
-      {isReady && songs.data?.length === 0 && (
-        <EmptyState title="There is no song yet" headingLevel={2} icon="music">
-          The event’s coordinator adds the songs. Ask your teacher when they come.
-        </EmptyState>
-      )}
-      {isReady && songs.data && songs.data.length > 0 && (
-        <NewShowForm
-          songs={songs.data}
-          {...(assignment.data && { assignment: { id: assignment.data.assignment.id, songId: assignment.data.assignment.songId } })}
-          onCreated={(show) => void navigate(`/shows/${show.id}`)}
-        />
-      )}
+      <PageHeader title="New show" lead={forAssignment ? `For “${forAssignment.title}”` : "Pick a song. Your script will light the square to it."} />
+      <QueryView query={songs} errorTitle="The songs could not be loaded." skeleton={<SongsSkeleton />}>
+        {(list) =>
+          list.length === 0 ? (
+            <EmptyState title="There is no song yet" headingLevel={2} icon="music">
+              The event’s coordinator adds the songs. Ask your teacher when they come.
+            </EmptyState>
+          ) : wanted.success ? (
+            <QueryView query={assignment} errorTitle="The assignment could not be loaded." skeleton={<SongsSkeleton />}>
+              {({ assignment: { id, songId } }) => <NewShowForm songs={list} assignment={{ id, songId }} onCreated={(show) => void navigate(`/shows/${show.id}`)} />}
+            </QueryView>
+          ) : (
+            <NewShowForm songs={list} onCreated={(show) => void navigate(`/shows/${show.id}`)} />
+          )
+        }
+      </QueryView>
     </Page>
+  );
+}
+
+function SongsSkeleton() {
+  return (
+    <SkeletonGroup label="Loading the songs" className="max-w-2xl space-y-3">
+      <Skeleton shape="block" className="h-16" />
+      <Skeleton shape="block" className="h-16" />
+    </SkeletonGroup>
   );
 }

@@ -3,11 +3,11 @@ import { useState } from "react";
 import { Link, useSearchParams } from "react-router";
 import { Button } from "../components/button.tsx";
 import { EmptyState } from "../components/empty-state.tsx";
-import { ErrorState } from "../components/error-state.tsx";
 import { List, ListRow } from "../components/list.tsx";
 import { Notice } from "../components/notice.tsx";
 import { Page } from "../components/page.tsx";
 import { PictureRibbon } from "../components/picture-ribbon.tsx";
+import { QueryView } from "../components/query-view.tsx";
 import { Skeleton, SkeletonGroup } from "../components/skeleton.tsx";
 import { StreetScene } from "../components/street-scene.tsx";
 import { TextField } from "../components/text-field.tsx";
@@ -62,20 +62,27 @@ export function Component() {
               </Button>
             )}
           </div>
-          {programme.isError && <ErrorState title="The programme could not be loaded." onRetry={() => void programme.refetch()} isRetrying={programme.isFetching} />}
-          {programme.isPending && (
-            <SkeletonGroup label="Loading the programme" className="space-y-6 pt-3">
-              <Skeleton shape="ribbon" />
-              <Skeleton shape="ribbon" />
-              <Skeleton shape="ribbon" />
-            </SkeletonGroup>
-          )}
-          {data && shows.length === 0 && (
-            <EmptyState title={closedReason ?? (data.publishedAt === null ? "Nothing is published yet" : "The square stays dark this night")} icon="moon">
-              {data.publishedAt === null ? "When the lineup is published, every show stands here with its time." : "Pick another night in the calendar."}
-            </EmptyState>
-          )}
-          {data && shows.length > 0 && <NightList shows={shows} nowSlotId={findOnNow(shows, now, data.timeZone)} />}
+          <QueryView
+            query={programme}
+            errorTitle="The programme could not be loaded."
+            skeleton={
+              <SkeletonGroup label="Loading the programme" className="space-y-6 pt-3">
+                <Skeleton shape="ribbon" />
+                <Skeleton shape="ribbon" />
+                <Skeleton shape="ribbon" />
+              </SkeletonGroup>
+            }
+          >
+            {({ publishedAt, timeZone }) =>
+              shows.length > 0 ? (
+                <NightList shows={shows} nowSlotId={findOnNow(shows, now, timeZone)} />
+              ) : (
+                <EmptyState title={closedReason ?? (publishedAt === null ? "Nothing is published yet" : "The square stays dark this night")} icon="moon">
+                  {publishedAt === null ? "When the lineup is published, every show stands here with its time." : "Pick another night in the calendar."}
+                </EmptyState>
+              )
+            }
+          </QueryView>
         </section>
         <div className="space-y-8 print:hidden">
           {data && <FindOurs shows={data.shows} />}

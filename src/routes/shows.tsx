@@ -1,9 +1,9 @@
 import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
 import { useSearchParams, type LoaderFunctionArgs } from "react-router";
 import { EmptyState } from "../components/empty-state.tsx";
-import { ErrorState } from "../components/error-state.tsx";
 import { LinkButton } from "../components/link-button.tsx";
 import { Page, PageHeader } from "../components/page.tsx";
+import { QueryView } from "../components/query-view.tsx";
 import { Ribbon } from "../components/ribbon.tsx";
 import { sessionQuery } from "../features/auth/api.ts";
 import { showsQuery } from "../features/shows/api.ts";
@@ -26,7 +26,6 @@ export async function loader({ request }: LoaderFunctionArgs) {
 export function Component() {
   const [search] = useSearchParams();
   const archived = shownShows(search);
-  const shows = useQuery(showsQuery(archived));
   const { data: session } = useSuspenseQuery(sessionQuery);
   const now = useNow();
   const isArchive = archived === "yes";
@@ -45,16 +44,19 @@ export function Component() {
           </>
         }
       />
-      {shows.isError && <ErrorState title="Your shows could not be loaded." onRetry={() => void shows.refetch()} isRetrying={shows.isFetching} />}
-      {shows.isPending && <ShowGridSkeleton />}
-      {shows.data?.length === 0 && (
-        <EmptyState title={isArchive ? "Nothing is archived" : "No show yet"} headingLevel={2} picture={<Ribbon ribbon={null} label="" />}>
-          {isArchive
-            ? "A show that you archive in the studio waits here. You can bring it back at any time."
-            : "Pick a song and write the first line. The ribbon of your show will be here."}
-        </EmptyState>
-      )}
-      {shows.data && shows.data.length > 0 && <ShowGrid shows={shows.data} reader={session?.user.displayName ?? ""} now={now} />}
+      <QueryView query={useQuery(showsQuery(archived))} errorTitle="Your shows could not be loaded." skeleton={<ShowGridSkeleton />}>
+        {(shows) =>
+          shows.length === 0 ? (
+            <EmptyState title={isArchive ? "Nothing is archived" : "No show yet"} headingLevel={2} picture={<Ribbon ribbon={null} label="" />}>
+              {isArchive
+                ? "A show that you archive in the studio waits here. You can bring it back at any time."
+                : "Pick a song and write the first line. The ribbon of your show will be here."}
+            </EmptyState>
+          ) : (
+            <ShowGrid shows={shows} reader={session?.user.displayName ?? ""} now={now} />
+          )
+        }
+      </QueryView>
     </Page>
   );
 }
