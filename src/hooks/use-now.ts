@@ -1,13 +1,15 @@
-import { useEffect, useState } from "react";
+import { useSyncExternalStore } from "react";
 
-const MINUTE_MS = 60_000;
+const STEP_MS = 30_000;
 
-/** The time of day, renewed every minute: for "saved 4 min ago" and due dates. */
+const toStep = () => Math.floor(Date.now() / STEP_MS) * STEP_MS;
+
+function subscribe(listener: () => void): () => void {
+  const timer = window.setInterval(listener, STEP_MS);
+  return () => window.clearInterval(timer);
+}
+
+/** Now in UTC milliseconds, to the half minute; renders again when that changes. For "today 08:55" and the like. */
 export function useNow(): number {
-  const [now, setNow] = useState(() => Date.now());
-  useEffect(() => {
-    const timer = setInterval(() => setNow(Date.now()), MINUTE_MS);
-    return () => clearInterval(timer);
-  }, []);
-  return now;
+  return useSyncExternalStore(subscribe, toStep);
 }

@@ -1,5 +1,5 @@
 import { useQuery } from "@tanstack/react-query";
-import { programmeQuery } from "../features/lineup/api.ts";
+import { programmeQuery } from "../features/lineup/programme/api.ts";
 
 /** The event's time zone, in which its schools live too; the computer's own until it is known. */
 export function useEventZone(): string {

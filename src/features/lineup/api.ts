@@ -10,12 +10,6 @@ export const lineupQuery = queryOptions({
   queryFn: ({ signal }) => callApi(lineupContract.lineup, {}, signal),
 });
 
-/** The published programme, for everybody. */
-export const programmeQuery = queryOptions({
-  queryKey: ["lineup", "programme"],
-  queryFn: ({ signal }) => callApi(lineupContract.programme, {}, signal),
-});
-
 /** Forwarded shows: all of them for the coordinator, a teacher's own. */
 export const forwardsQuery = queryOptions({
   queryKey: ["lineup", "forwards"],

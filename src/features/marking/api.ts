@@ -1,8 +1,10 @@
 import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
-import type { EndpointCall } from "../../../shared/contract.ts";
+import type { EndpointCall, EndpointResponse } from "../../../shared/contract.ts";
 import { markingContract } from "../../../shared/contracts/marking.ts";
 import type { AssignmentId, CommentId, SubmissionId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
+
+export type MarkingInbox = EndpointResponse<typeof markingContract.inbox>["assignments"];
 
 /** The teacher's assignments with what waits for a mark. */
 export const inboxQuery = queryOptions({
