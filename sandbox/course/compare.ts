@@ -1,3 +1,5 @@
+import { TICKS_PER_BEAT } from "../../shared/units.ts";
+import type { Timeline } from "../timeline/model.ts";
 import type { CheckedRun } from "./stage.ts";
 
 /** How far two runs of one song and layout are from each other. */
@@ -13,12 +15,21 @@ export interface Difference {
 const LEVEL_ALIKE = 6;
 const COLOUR_ALIKE = 0.05;
 
+/** The tick by which everything has come to rest: a beat after the last change has ended. */
+function restTick({ cues }: Timeline): number {
+  let rest = 0;
+  for (let cue = 0; cue < cues.count; cue += 1) rest = Math.max(rest, (cues.tick[cue] ?? 0) + (cues.length[cue] ?? 0));
+  return rest + TICKS_PER_BEAT;
+}
+
 /**
  * Compares what is seen at every moment that either run is looked at. Every light counts once a
- * moment, so many small differences and a few long ones weigh alike.
+ * moment, so many small differences and a few long ones weigh alike. What stays lit when both have
+ * come to rest is not looked at: a long end would outweigh everything before it.
  */
 export function compareRuns(mine: CheckedRun, aim: CheckedRun): Difference {
-  const ticks = [...new Set([...mine.momentsSeen(), ...aim.momentsSeen()])].sort((a, b) => a - b);
+  const rest = Math.max(restTick(mine.timeline), restTick(aim.timeline));
+  const ticks = [...new Set([...mine.momentsSeen(), ...aim.momentsSeen()])].filter((tick) => tick <= rest).sort((a, b) => a - b);
   let lit = 0;
   let different = 0;
   let first: { tick: number; light: number } | null = null;
