@@ -20,6 +20,8 @@ export default defineConfig({
           include: ["src/**/*.test.{ts,tsx}"],
           environment: "jsdom",
           setupFiles: ["tests/support/dom-setup.ts"],
+          // Stylesheets are emptied in tests; the contrast test reads the tokens.
+          css: { include: [/tokens\.css/] },
         },
       },
       { test: { name: "tests", include: ["tests/**/*.test.ts"], environment: "node" } },

@@ -1,11 +1,7 @@
-const SLICE_MS = 6;
-const LATEST_MS = 300;
+const SLICE_MS = 8;
 
 const waiting = new Set<() => void>();
 let isBooked = false;
-
-const bookIdle: (run: () => void) => void =
-  typeof requestIdleCallback === "function" ? (run) => requestIdleCallback(run, { timeout: LATEST_MS }) : (run) => setTimeout(run, 1);
 
 function work() {
   isBooked = false;
@@ -21,12 +17,13 @@ function work() {
 function book() {
   if (isBooked) return;
   isBooked = true;
-  bookIdle(work);
+  // After the next paint: text and buttons are on screen first. Idle callbacks starve while a street plays.
+  requestAnimationFrame(() => setTimeout(work, 0));
 }
 
 /**
- * Draws when the page has nothing better to do, in slices of 6 ms, so that sixty pictures on a board
- * never hold up a keystroke. Returns the way to call it off.
+ * Draws after the next paint, in slices of 8 ms a frame, so that sixty pictures on a board never hold
+ * up a keystroke. Returns the way to call it off.
  */
 export function queueDrawing(draw: () => void): () => void {
   waiting.add(draw);

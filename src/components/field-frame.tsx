@@ -62,7 +62,7 @@ export function FieldNotes({ id, hint, error }: { id: string; hint?: ReactNode; 
 export function inputClass(hasError: boolean, className?: string): string {
   return joinClasses(
     "block min-h-(--control) w-full rounded-cut bg-card px-3 py-1 text-ink placeholder:text-slate placeholder:opacity-100",
-    "read-only:bg-well disabled:bg-well disabled:text-slate",
+    "[&[readonly]]:bg-well disabled:bg-well disabled:text-slate",
     hasError ? "border-2 border-rowan" : "border-[1.5px] border-rim",
     className,
   );

@@ -4,7 +4,7 @@ import { useElementSize } from "../hooks/use-element-size.ts";
 import { useTheme } from "../hooks/use-theme.ts";
 import { joinClasses } from "./class-names.ts";
 import { queueDrawing } from "./draw-queue.ts";
-import { drawRibbon, threadsFor } from "./ribbon-drawing.ts";
+import { drawRibbon } from "./ribbon-canvas.ts";
 
 export type RibbonSize = "queue" | "row" | "strip" | "card" | "marking" | "reading";
 
@@ -30,7 +30,6 @@ const HEIGHTS: Record<RibbonSize, string> = {
   marking: "h-[62px]",
   reading: "h-[120px]",
 };
-const MAX_PIXEL_RATIO = 3;
 
 /** The face of a show: woven cloth in the colours of its lights, fronts as threads, the song from left to right. For reading only. */
 export function Ribbon({ ribbon, label, size = "card", isSquare = false, now = null, className }: RibbonProps) {
@@ -41,13 +40,7 @@ export function Ribbon({ ribbon, label, size = "card", isSquare = false, now = n
   useEffect(() => {
     const canvas = canvasRef.current;
     if (!canvas || width === 0 || height === 0) return;
-    return queueDrawing(() => {
-      const ratio = Math.min(MAX_PIXEL_RATIO, window.devicePixelRatio || 1);
-      canvas.width = Math.round(width * ratio);
-      canvas.height = Math.round(height * ratio);
-      const pen = canvas.getContext("2d");
-      if (pen) drawRibbon(pen, ribbon, { width: canvas.width, height: canvas.height, ratio, theme, isSquare, threads: threadsFor(height) });
-    });
+    return queueDrawing(() => drawRibbon(canvas, ribbon, { width, height, theme, isSquare }));
   }, [ribbon, width, height, theme, isSquare]);
 
   return (

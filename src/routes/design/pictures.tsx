@@ -18,7 +18,7 @@ export function Pictures() {
   return (
     <>
       <GallerySection title="Next thing">
-        <div className="grid grid-cols-[1fr_1.15fr] overflow-hidden rounded-sheet on-dusk bg-dusk shadow-sheet-2 max-wide:grid-cols-1">
+        <div className="grid grid-cols-[1fr_1.15fr] dusk-sheet max-wide:grid-cols-1">
           <div className="flex flex-col items-start justify-center gap-2 px-7 py-6 max-wide:order-2 max-wide:px-4.5">
             <p className="text-on-dusk-soft">Next thing to do</p>
             <h3 className="text-[1.6875rem]">Taking turns</h3>
