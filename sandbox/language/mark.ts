@@ -295,7 +295,10 @@ function ownerOf(node: ts.CallExpression): ts.Expression | null {
 /** The statement that begins with this call's owner, or null. */
 function statementAt(node: ts.CallExpression, owner: ts.Expression, file: ts.SourceFile): ts.ExpressionStatement | null {
   let top: ts.Node = node;
-  while (!ts.isStatement(top) && !ts.isFunctionLike(top)) top = top.parent;
+  while (!ts.isStatement(top) && !ts.isFunctionLike(top)) {
+    if (ts.isElementAccessExpression(top) && isUsedItem(top)) return null;
+    top = top.parent;
+  }
   if (!ts.isExpressionStatement(top)) return null;
   return top.getStart(file) === owner.getStart(file) && top.getStart(file) === node.getStart(file) ? top : null;
 }

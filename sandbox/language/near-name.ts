@@ -19,7 +19,7 @@ export function letterDistance(a: string, b: string): number {
 const LONGEST_NAME = 60;
 
 /**
- * The name that was most likely meant: the nearest within a third of its letters (rule 25), big and
+ * The name that was most likely meant: the nearest within a third of the letters written (rule 25), big and
  * small letters counting only in a tie; null when none is near. Of equals the first wins.
  */
 export function near(name: string, names: Iterable<string>): string | null {
@@ -30,7 +30,7 @@ export function near(name: string, names: Iterable<string>): string | null {
   for (const candidate of names) {
     if (candidate.length > LONGEST_NAME || candidate === name) continue;
     const distance = letterDistance(small, candidate.toLowerCase());
-    if (distance <= candidate.length / 3 && distance < bestDistance) {
+    if (distance <= name.length / 3 && distance < bestDistance) {
       best = candidate;
       bestDistance = distance;
     }

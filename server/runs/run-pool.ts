@@ -1,0 +1,198 @@
+import { fork, type ChildProcess } from "node:child_process";
+import { fileURLToPath } from "node:url";
+import type { RunInput } from "../../sandbox/engine/model.ts";
+import { createStoppedOutcome } from "../../sandbox/engine/stopped.ts";
+import { FairQueue } from "./fair-queue.ts";
+import type { ChildMessage, RunRequest, TimedOutcome } from "./messages.ts";
+
+const CHILD = fileURLToPath(new URL("./run-child.ts", import.meta.url));
+/** A child that does not answer so long after a thread's deadline is stuck itself. */
+const CHILD_GRACE_MS = 2000;
+/** Old instances leave some memory behind; a fresh child has none. */
+const RUNS_PER_CHILD = 500;
+/** How often a run is tried when the child dies under it, which another run may have done. */
+const MAX_TRIES = 2;
+const NO_CLASS = "";
+/** Loading the compiler and the engine takes seconds on a busy machine. */
+const START_TIMEOUT_MS = 60_000;
+/** Children that may fail in a row before the pool tells its callers. */
+const MAX_FAILED_STARTS = 3;
+
+/** Runs scripts away from the server's own thread. */
+export interface RunPool {
+  /**
+   * Runs a script; its outcome is a value whatever it does. Rejects with `RunQueueFullError` when too
+   * many runs wait, and with `RunPoolClosedError` after `close`.
+   */
+  run(input: RunInput, options?: { readonly classId?: string }): Promise<TimedOutcome>;
+  /** Ends the child process; runs under way are rejected. */
+  close(): Promise<void>;
+}
+
+export interface RunPoolOptions {
+  /** Runs at once. */
+  readonly threads?: number;
+  /** Wall time of one run: the backstop for what fuel can not count. */
+  readonly deadlineMs?: number;
+  /** Runs that may wait. */
+  readonly maxWaiting?: number;
+}
+
+/** Too many runs wait: the caller should say so and try again later. */
+export class RunQueueFullError extends Error {
+  override readonly name = "RunQueueFullError";
+}
+
+/** The child process does not start: a broken installation, not a script's doing. */
+export class RunPoolBrokenError extends Error {
+  override readonly name = "RunPoolBrokenError";
+}
+
+/** The pool was closed. */
+export class RunPoolClosedError extends Error {
+  override readonly name = "RunPoolClosedError";
+}
+
+interface Job {
+  readonly group: string;
+  readonly input: RunInput;
+  readonly resolve: (outcome: TimedOutcome) => void;
+  readonly reject: (error: Error) => void;
+  tries: number;
+}
+
+/** Gives a pool; its child process starts at once, so that the first run finds it warm. */
+export function createRunPool(options: RunPoolOptions = {}): RunPool {
+  return new ChildRunPool(options.threads ?? 2, options.deadlineMs ?? 3000, options.maxWaiting ?? 200);
+}
+
+class ChildRunPool implements RunPool {
+  readonly #threads: number;
+  readonly #deadlineMs: number;
+  readonly #maxWaiting: number;
+  readonly #queue = new FairQueue<Job>();
+  readonly #running = new Map<number, { readonly job: Job; readonly timer: NodeJS.Timeout }>();
+  #child: ChildProcess;
+  #nextId = 1;
+  #runsOfChild = 0;
+  #isReady = false;
+  #failedStarts = 0;
+  #startTimer: NodeJS.Timeout | undefined;
+  #isClosed = false;
+
+  constructor(threads: number, deadlineMs: number, maxWaiting: number) {
+    this.#threads = threads;
+    this.#deadlineMs = deadlineMs;
+    this.#maxWaiting = maxWaiting;
+    this.#child = this.#startChild();
+  }
+
+  run(input: RunInput, options: { readonly classId?: string } = {}): Promise<TimedOutcome> {
+    if (this.#isClosed) return Promise.reject(new RunPoolClosedError("The run pool is closed."));
+    if (this.#queue.size >= this.#maxWaiting) return Promise.reject(new RunQueueFullError(`${this.#queue.size} runs wait already.`));
+    return new Promise((resolve, reject) => {
+      const group = options.classId ?? NO_CLASS;
+      this.#queue.add(group, { group, input, resolve, reject, tries: 0 });
+      this.#advance();
+    });
+  }
+
+  async close(): Promise<void> {
+    if (this.#isClosed) return;
+    this.#isClosed = true;
+    clearTimeout(this.#startTimer);
+    const child = this.#child;
+    const gone = new Promise<void>((resolve) => child.once("exit", () => resolve()));
+    this.#rejectAll(new RunPoolClosedError("The run pool was closed."));
+    if (child.exitCode !== null || child.signalCode !== null) return;
+    child.kill("SIGKILL");
+    await gone;
+  }
+
+  #rejectAll(error: Error): void {
+    for (const { job, timer } of this.#running.values()) {
+      clearTimeout(timer);
+      job.reject(error);
+    }
+    this.#running.clear();
+    for (let job = this.#queue.take(); job !== undefined; job = this.#queue.take()) job.reject(error);
+  }
+
+  #startChild(): ChildProcess {
+    // Typed arrays cross as they are; the child gets no more of the environment than it needs.
+    const child = fork(CHILD, [], {
+      serialization: "advanced",
+      execArgv: ["--import", "tsx"],
+      env: { NODE_ENV: process.env["NODE_ENV"] ?? "production", PATH: process.env["PATH"] ?? "", DUSKBELL_RUN_THREADS: String(this.#threads) },
+    });
+    child.on("message", (message: ChildMessage) => this.#hear(child, message));
+    child.on("error", () => this.#replaceChild(child));
+    child.on("exit", () => this.#replaceChild(child));
+    this.#runsOfChild = 0;
+    this.#isReady = false;
+    this.#startTimer = setTimeout(() => this.#replaceChild(child), START_TIMEOUT_MS);
+    return child;
+  }
+
+  #hear(child: ChildProcess, message: ChildMessage): void {
+    if (child !== this.#child) return;
+    if (message.kind === "ready") return this.#heardReady();
+    const running = this.#running.get(message.id);
+    if (running === undefined) return;
+    clearTimeout(running.timer);
+    this.#running.delete(message.id);
+    running.job.resolve(message.outcome);
+    if (this.#runsOfChild >= RUNS_PER_CHILD && this.#running.size === 0) this.#replaceChild(child);
+    this.#advance();
+  }
+
+  #heardReady(): void {
+    clearTimeout(this.#startTimer);
+    this.#isReady = true;
+    this.#failedStarts = 0;
+    this.#advance();
+  }
+
+  #advance(): void {
+    while (this.#isReady && !this.#isClosed && this.#running.size < this.#threads && this.#runsOfChild < RUNS_PER_CHILD) {
+      const job = this.#queue.take();
+      if (job === undefined) return;
+      this.#start(job);
+    }
+  }
+
+  #start(job: Job): void {
+    const id = this.#nextId++;
+    job.tries++;
+    this.#runsOfChild++;
+    const child = this.#child;
+    const timer = setTimeout(() => this.#replaceChild(child), this.#deadlineMs + CHILD_GRACE_MS);
+    this.#running.set(id, { job, timer });
+    const request: RunRequest = { id, input: job.input, deadlineMs: this.#deadlineMs };
+    child.send(request, (error) => {
+      if (error !== null) this.#replaceChild(child);
+    });
+  }
+
+  /** Ends a child that died, hangs or is used up; the runs it had are tried once more in the next. */
+  #replaceChild(child: ChildProcess): void {
+    if (this.#isClosed || child !== this.#child) return;
+    child.removeAllListeners();
+    child.on("error", () => {});
+    child.kill("SIGKILL");
+    clearTimeout(this.#startTimer);
+    if (!this.#isReady && ++this.#failedStarts >= MAX_FAILED_STARTS) {
+      this.#failedStarts = 0;
+      this.#rejectAll(new RunPoolBrokenError(`The process that runs scripts failed to start ${MAX_FAILED_STARTS} times.`));
+    }
+    const lost = [...this.#running.values()];
+    this.#running.clear();
+    this.#child = this.#startChild();
+    for (const { job, timer } of lost) {
+      clearTimeout(timer);
+      if (job.tries < MAX_TRIES) this.#queue.addFirst(job.group, job);
+      else job.resolve({ ...createStoppedOutcome(job.input.source, "could-not-run", "The process that ran it ended."), engineMs: 0 });
+    }
+    this.#advance();
+  }
+}
