@@ -1,0 +1,74 @@
+import type { Finding, Severity } from "../engine/model.ts";
+import { findColourNeverLit } from "./colour-never-lit.ts";
+import { createCheckContext, type CheckContext, type CheckInput } from "./context.ts";
+import { findFadeCut } from "./fade-cut.ts";
+import { MOST_PLACES } from "./finding.ts";
+import { findFit } from "./fit.ts";
+import { findLoads } from "./load.ts";
+import { findNeverSeen } from "./never-seen.ts";
+import { findNeverSwitches } from "./never-switches.ts";
+import { findOffGrid } from "./off-grid.ts";
+import { findStreetFlashes } from "./street-flash.ts";
+import { findHalfCycle, findRelayDwell, findRelayRate } from "./switching.ts";
+
+/** Every rule of the show check. */
+const RULES: readonly ((context: CheckContext) => Finding[])[] = [
+  findStreetFlashes,
+  findLoads,
+  findFit,
+  findRelayDwell,
+  findRelayRate,
+  findHalfCycle,
+  findNeverSwitches,
+  findNeverSeen,
+  findFadeCut,
+  findColourNeverLit,
+  findOffGrid,
+];
+
+const RANK: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 };
+
+/**
+ * Gives everything that the show check finds in a timeline on its layout, with its song, by the
+ * event's rules: stops first, then warnings, then notes. A stop may not be forwarded or scheduled;
+ * nothing here ever blocks handing in. Throws `RangeError` when the timeline is for another number
+ * of lights. The same input gives the same findings.
+ */
+export function checkShow(input: CheckInput): Finding[] {
+  return checkContext(createCheckContext(input));
+}
+
+/** As `checkShow`, with a context that others use, too. */
+export function checkContext(context: CheckContext): Finding[] {
+  return mergeFindings(RULES.map((rule) => rule(context)));
+}
+
+/**
+ * Gives several lists of findings as one: stops first, each severity in the order given. Findings of
+ * one rule with the same sentence become one, with the places of both.
+ */
+export function mergeFindings(lists: readonly (readonly Finding[])[]): Finding[] {
+  const merged = new Map<string, Finding>();
+  for (const finding of lists.flat()) {
+    const key = `${finding.rule}\n${finding.sentence}`;
+    const known = merged.get(key);
+    merged.set(key, known === undefined ? finding : joinFindings(known, finding));
+  }
+  return [...merged.values()].sort((a, b) => RANK[a.severity] - RANK[b.severity]);
+}
+
+function joinFindings(a: Finding, b: Finding): Finding {
+  const once = (numbers: readonly number[]) => [...new Set(numbers)].sort((x, y) => x - y);
+  return {
+    ...a,
+    severity: RANK[a.severity] <= RANK[b.severity] ? a.severity : b.severity,
+    moments: once([...a.moments, ...b.moments]).slice(0, MOST_PLACES),
+    lights: [...new Set([...a.lights, ...b.lights])].slice(0, MOST_PLACES),
+    lines: once([...a.lines, ...b.lines]),
+  };
+}
+
+/** Says whether findings forbid forwarding and scheduling. */
+export function hasStop(findings: readonly Finding[]): boolean {
+  return findings.some(({ severity }) => severity === "stop");
+}
