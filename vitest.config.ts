@@ -29,6 +29,7 @@ export default defineConfig({
         test: {
           name: "journeys",
           include: ["tests/journeys/**/*.spec.ts"],
+          globalSetup: ["tests/journeys/support/global-setup.ts"],
           environment: "node",
           fileParallelism: false,
           testTimeout: 180_000,

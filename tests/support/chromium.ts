@@ -19,7 +19,8 @@ export function ensureChromium(log: (line: string) => void): string {
   const found = findChromium();
   if (found !== null) return found;
   const needs = "The browser checks need Chromium.";
-  if (process.getuid?.() !== 0) throw new Error(`${needs} Install it first:\n  sudo sh -c "${APT_COMMAND}"\nor set CHROMIUM_PATH.`);
+  if (process.getuid?.() !== 0)
+    throw new Error(`${needs} Install it first:\n  sudo sh -c "${APT_COMMAND}"\nor set CHROMIUM_PATH.`);
   log(`${needs} Installing it with apt-get ...`);
   const installed = spawnSync("sh", ["-c", APT_COMMAND], { encoding: "utf8" });
   const path = findChromium();

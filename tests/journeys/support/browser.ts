@@ -1,0 +1,58 @@
+import { type Browser, type BrowserContext, chromium, type Page } from "playwright-core";
+import { ensureChromium } from "../../support/chromium.ts";
+
+/** Without the background flags Chromium asks for hosts of its own, which a closed network refuses noisily. */
+const ARGS = [
+  "--no-sandbox",
+  "--disable-gpu",
+  "--disable-quic",
+  "--no-first-run",
+  "--disable-background-networking",
+  "--disable-component-update",
+  "--disable-sync",
+  "--autoplay-policy=user-gesture-required",
+];
+
+export async function launchBrowser(): Promise<Browser> {
+  return chromium.launch({ executablePath: ensureChromium(console.log), args: ARGS });
+}
+
+/** One person at one computer, with everything that went wrong on its pages. */
+export interface Person {
+  readonly context: BrowserContext;
+  readonly page: Page;
+  /** Console errors, uncaught errors and requests off the origin, as sentences. Empty is good. */
+  readonly faults: string[];
+  close(): Promise<void>;
+}
+
+export interface PersonOptions {
+  readonly width?: number;
+  readonly height?: number;
+  readonly colorScheme?: "light" | "dark";
+  /** Console errors that the test causes on purpose. */
+  readonly expectedErrors?: RegExp;
+}
+
+/** Opens a fresh browser profile on the product. */
+export async function openPerson(browser: Browser, address: string, options: PersonOptions = {}): Promise<Person> {
+  const context = await browser.newContext({
+    baseURL: address,
+    viewport: { width: options.width ?? 1366, height: options.height ?? 768 },
+    colorScheme: options.colorScheme ?? "light",
+  });
+  const page = await context.newPage();
+  const faults: string[] = [];
+  const note = (fault: string) => {
+    if (!options.expectedErrors?.test(fault)) faults.push(fault);
+  };
+  page.on("console", (message) => {
+    if (message.type() === "error") note(`console: ${message.text()} (${message.location().url})`);
+  });
+  page.on("pageerror", (error) => note(`uncaught: ${error.message}`));
+  context.on("request", (request) => {
+    const url = new URL(request.url());
+    if (url.protocol.startsWith("http") && url.origin !== address) note(`off origin: ${request.url()}`);
+  });
+  return { context, page, faults, close: () => context.close() };
+}

@@ -1,0 +1,17 @@
+import type { TestProject } from "vitest/node";
+import { ensureClientBuild } from "../../../server/cli/client-build.ts";
+import { startProduct } from "./product.ts";
+
+declare module "vitest" {
+  export interface ProvidedContext {
+    address: string;
+  }
+}
+
+/** One product for all journeys: seeding the demo world is the slow part. */
+export default async function setup(project: TestProject): Promise<() => Promise<void>> {
+  ensureClientBuild((line) => console.log(line));
+  const product = await startProduct();
+  project.provide("address", product.address);
+  return () => product.stop();
+}
