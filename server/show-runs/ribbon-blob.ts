@@ -1,5 +1,5 @@
 import type { RibbonPicture } from "../../shared/contracts/common.ts";
-import { type RibbonCells, shrinkRibbon } from "../../sandbox/timeline/ribbon.ts";
+import { decodeRibbon, type RibbonCells, shrinkRibbon, toRibbonPicture } from "../../sandbox/timeline/ribbon.ts";
 
 /**
  * A ribbon as a row keeps it: the whole picture, then its face for lists. Each is one byte of rows,
@@ -10,6 +10,7 @@ const HEADER_BYTES = 3;
 
 /** Cards draw 10 rows, list rows 4; the whole is shown where one show is read. */
 const FACE = { rows: 10, columns: 96 };
+const THREADS = { rows: 4, columns: 64 };
 
 /** The bytes that a row keeps of a ribbon. */
 export function encodeRibbon(ribbon: RibbonCells): Buffer {
@@ -24,6 +25,12 @@ export function presentRibbon(bytes: Buffer | null): RibbonPicture | null {
 /** The ribbon's face for lists: at most 10 rows of 96 cells. Null where there is none. */
 export function presentRibbonFace(bytes: Buffer | null): RibbonPicture | null {
   return bytes === null ? null : readPicture(bytes, readPicture(bytes, 0).end).picture;
+}
+
+/** Four threads for the long public programme: a fifth of the face's bytes. Null where there is no ribbon. */
+export function presentRibbonThreads(bytes: Buffer | null): RibbonPicture | null {
+  const face = presentRibbonFace(bytes);
+  return face && toRibbonPicture(shrinkRibbon(decodeRibbon(face), THREADS));
 }
 
 function encodePicture({ rows, columns, cells }: RibbonCells): Buffer {

@@ -1,7 +1,7 @@
-import { asc, desc, eq, inArray } from "drizzle-orm";
+import { asc, count, desc, eq, inArray, sql } from "drizzle-orm";
 import type { ForwardState } from "../../shared/contracts/shows.ts";
 import type { Db } from "../db/connection.ts";
-import { forwards, showAuthors, slots, submissions, users } from "../db/schema/index.ts";
+import { forwards, showAuthors, slots, submissionEvents, submissions, users } from "../db/schema/index.ts";
 
 export type SubmissionRow = typeof submissions.$inferSelect;
 export type ForwardRow = typeof forwards.$inferSelect;
@@ -35,16 +35,16 @@ export function listSubmissionsByShow(db: Db, showIds: readonly string[]): Map<s
 /** The latest forward of each submission, with its state as people see it. */
 export function listLatestForwards(db: Db, submissionIds: readonly string[]): Map<string, ForwardRow & { shownState: ForwardState }> {
   if (submissionIds.length === 0) return new Map();
-  const rows = db.select().from(forwards).where(inArray(forwards.submissionId, [...submissionIds])).orderBy(asc(forwards.forwardedAt)).all();
-  const placed = listPlacedForwardIds(db, rows.map((row) => row.id));
+  const rows = db.select().from(forwards).where(inArray(forwards.submissionId, [...submissionIds])).orderBy(asc(forwards.forwardedAt), asc(sql`forwards.rowid`)).all();
+  const placed = listSlotCounts(db, rows.map((row) => row.id));
   return new Map(rows.map((row) => [row.submissionId, { ...row, shownState: toForwardState(row.state, placed.has(row.id)) }]));
 }
 
-/** Which of these forwards have a slot in the plan. */
-export function listPlacedForwardIds(db: Db, forwardIds: readonly string[]): Set<string> {
-  if (forwardIds.length === 0) return new Set();
-  const rows = db.selectDistinct({ id: slots.forwardId }).from(slots).where(inArray(slots.forwardId, [...forwardIds])).all();
-  return new Set(rows.map((row) => row.id));
+/** How many slots each of these forwards has in the plan; none means that it is missing. */
+export function listSlotCounts(db: Db, forwardIds: readonly string[]): Map<string, number> {
+  if (forwardIds.length === 0) return new Map();
+  const rows = db.select({ id: slots.forwardId, count: count() }).from(slots).where(inArray(slots.forwardId, [...forwardIds])).groupBy(slots.forwardId).all();
+  return new Map(rows.map((row) => [row.id, row.count]));
 }
 
 /** `scheduled` is no stored state: it means approved and placed in a night. */
@@ -54,5 +54,10 @@ export function toForwardState(state: ForwardRow["state"], isPlaced: boolean): F
 
 /** The latest forward of one submission, or null. */
 export function findLatestForward(db: Db, submissionId: string): ForwardRow | null {
-  return db.select().from(forwards).where(eq(forwards.submissionId, submissionId)).orderBy(desc(forwards.forwardedAt)).limit(1).get() ?? null;
+  return db.select().from(forwards).where(eq(forwards.submissionId, submissionId)).orderBy(desc(forwards.forwardedAt), desc(sql`forwards.rowid`)).limit(1).get() ?? null;
+}
+
+/** Adds a step to the history of a submission. */
+export function insertSubmissionEvent(db: Db, row: typeof submissionEvents.$inferInsert): void {
+  db.insert(submissionEvents).values(row).run();
 }

@@ -9,10 +9,10 @@ export function createShowsHandlers(deps: FeatureDeps): Handlers<typeof showsCon
   const ribbons = createDraftRibbons(deps);
   return {
     list: ({ actor, query }) => ({ shows: listOwnShows(deps.db, actor, query.archived === "yes") }),
-    create: ({ actor, body }) => {
-      const show = createShow(deps, actor, body);
-      ribbons.refresh(show.id);
-      return { show };
+    create: ({ actor, body, commit }) => {
+      const created = commit(() => ({ show: createShow(deps, actor, body) }));
+      ribbons.refresh(created.show.id);
+      return created;
     },
     get: ({ actor, params }) => getShowDetail(deps.db, actor, params.showId),
     update: ({ actor, params, body }) => {
@@ -21,8 +21,8 @@ export function createShowsHandlers(deps: FeatureDeps): Handlers<typeof showsCon
       return changed;
     },
     duplicate: ({ actor, params }) => ({ show: duplicateShow(deps, actor, params.showId) }),
-    saveDraft: ({ actor, params, body }) => {
-      const saved = saveDraft(deps, actor, params.showId, body);
+    saveDraft: ({ actor, params, body, commit }) => {
+      const saved = commit(() => saveDraft(deps, actor, params.showId, body));
       ribbons.refresh(params.showId);
       return saved;
     },

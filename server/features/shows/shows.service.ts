@@ -62,7 +62,7 @@ export function getShowDetail(db: Db, actor: Actor, showId: string): ShowDetail 
   };
 }
 
-/** Renames, archives, brings back, or deals new luck. Versions keep their own seed. Throws `not-found`. */
+/** Renames, archives, brings back, or deals new luck. Versions keep their own seed. Throws `not-found`, `invalid-request` for a new title while the show is with the event. */
 export function changeShow(
   db: Db,
   actor: Actor,
@@ -70,7 +70,12 @@ export function changeShow(
   change: { title?: string | undefined; isArchived?: boolean | undefined; seed?: number | undefined },
 ): { show: ShowSummary; seed: number } {
   return inTransaction(db, (tx) => {
-    getRelatedShow(tx, actor, showId);
+    const { show } = getRelatedShow(tx, actor, showId);
+    const forward = presentShow(tx, getShow(tx, showId)).forwardState;
+    if (change.title !== undefined && change.title !== show.title && forward !== null && forward !== "declined") {
+      // The title was looked at when the show was approved; the programme prints it.
+      throw fieldProblem("/title", "This show is with the event under this title. Ask your teacher if it has to change.");
+    }
     updateShow(tx, showId, {
       ...(change.title === undefined ? {} : { title: change.title }),
       ...(change.isArchived === undefined ? {} : { isArchived: change.isArchived }),

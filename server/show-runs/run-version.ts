@@ -1,0 +1,83 @@
+import type { BeatMap } from "../../shared/contracts/songs.ts";
+import type { Layout } from "../../shared/contracts/square.ts";
+import type { Finding, RunOutcome } from "../../sandbox/engine/model.ts";
+import { checkShow, mergeFindings } from "../../sandbox/checks/index.ts";
+import { encodeTimeline } from "../../sandbox/timeline/codec.ts";
+import { ribbonCells } from "../../sandbox/timeline/ribbon.ts";
+import { newId } from "../db/schema/columns.ts";
+import type { FeatureDeps } from "../deps.ts";
+import { getBeatMap, songSeconds } from "../event/song.queries.ts";
+import { getLayout } from "../event/square.queries.ts";
+import { CHECK_RULES_VERSION, engineHash } from "./engine-hash.ts";
+import { presentFinding, presentProblem } from "./present-problem.ts";
+import { encodeRibbon } from "./ribbon-blob.ts";
+import { findLatestRun, insertRun, listVersionsWithoutRun, type RunRow, type VersionRow } from "./runs.queries.ts";
+
+/** What a run of a version came to, as its row keeps it. */
+export type RunResult = Pick<RunRow, "summary" | "hash" | "timeline" | "ribbon">;
+
+/**
+ * Runs a version on its own layout and beat map, checks it and keeps the run. Gives null when the pool
+ * could not take it (it is full or closing); the version is then run by the next start-up pass.
+ */
+export async function runVersion(deps: FeatureDeps, version: VersionRow, classId: string | null): Promise<RunRow | null> {
+  const { db, clock, runs, log } = deps;
+  const known = findLatestRun(db, version.id);
+  if (known) return known;
+  const { layout } = getLayout(db, version.layoutId);
+  const song = getBeatMap(db, version.beatMapId);
+  try {
+    const input = { source: version.source, songId: version.songId, song, layout, seed: version.seed };
+    const outcome = await runs.run(input, classId === null ? {} : { classId });
+    const row: RunRow = {
+      id: newId(),
+      versionId: version.id,
+      layoutId: version.layoutId,
+      beatMapId: version.beatMapId,
+      engine: engineHash(),
+      rulesVersion: CHECK_RULES_VERSION,
+      ...judgeOutcome(outcome, layout, song),
+      createdAt: clock.now(),
+    };
+    insertRun(db, row);
+    return row;
+  } catch (error) {
+    log.error({ err: error, versionId: version.id }, "a version that was handed in was not run; it waits for the next pass");
+    return null;
+  }
+}
+
+/** Turns an outcome into what is kept of it: summary with the show check, hash, timeline and ribbon. */
+export function judgeOutcome(outcome: RunOutcome, layout: Layout, song: BeatMap): RunResult {
+  const { timeline } = outcome;
+  const checked: Finding[] = timeline ? checkShow({ timeline, layout, song }) : [];
+  const hash = outcome.ok ? outcome.hash : null;
+  return {
+    summary: {
+      isOk: outcome.ok,
+      problem: outcome.ok ? null : presentProblem(outcome.problem),
+      hash,
+      cueCount: outcome.cueCount,
+      findings: mergeFindings([outcome.findings, checked]).map(presentFinding),
+      seconds: songSeconds(song),
+      description: timeline && timeline.cues.count > 0 ? `${timeline.cues.count} cues.` : "Nothing lights up.",
+    },
+    hash,
+    timeline: timeline ? Buffer.from(encodeTimeline(timeline)) : null,
+    ribbon: timeline ? encodeRibbon(ribbonCells(timeline, layout)) : null,
+  };
+}
+
+/**
+ * Runs every version that was handed in and never ran, oldest first, one after another: the process
+ * ended between the two. Call it once at start-up, after the pool is there; resolves with how many
+ * were run.
+ */
+export async function runUnfinishedVersions(deps: FeatureDeps): Promise<number> {
+  let count = 0;
+  for (const version of listVersionsWithoutRun(deps.db)) {
+    if ((await runVersion(deps, version, null)) !== null) count++;
+  }
+  if (count > 0) deps.log.info({ count }, "ran versions that were handed in before the server stopped");
+  return count;
+}
