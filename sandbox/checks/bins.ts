@@ -1,4 +1,4 @@
-import { CURVE_STEP_TICKS, type LightCurve } from "../timeline/curves.ts";
+import { CURVE_STEP_TICKS, JUMP_TICKS, type LightCurve } from "../timeline/curves.ts";
 import type { CheckContext } from "./context.ts";
 
 /** Spans of 1/16 beat in which loads and darkness are added up. */
@@ -16,11 +16,13 @@ export function highestPerBin({ tick, level }: LightCurve, bins: number): Float3
     const start = tick[point] ?? 0;
     const end = tick[point + 1] ?? bins * BIN_TICKS;
     const from = level[point] ?? 0;
-    const to = level[point + 1] ?? from;
+    // Of a jump the bin before sees only the start, the bin it leads to only the end.
+    const isJump = end - start <= JUMP_TICKS * 1.5;
+    const to = isJump ? from : (level[point + 1] ?? from);
     const slope = end > start ? (to - from) / (end - start) : 0;
     const first = Math.max(0, Math.floor(start / BIN_TICKS));
-    const last = Math.min(bins - 1, Math.floor(end / BIN_TICKS));
-    for (let bin = first; bin <= last; bin++) {
+    const last = isJump ? first : Math.min(bins - 1, Math.floor(end / BIN_TICKS));
+    for (let bin = first; bin <= last && bin < bins; bin++) {
       // A straight line is highest at one of the two ends of its part in the bin.
       const left = Math.max(start, bin * BIN_TICKS);
       const right = Math.min(end, (bin + 1) * BIN_TICKS);

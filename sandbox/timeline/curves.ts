@@ -20,8 +20,8 @@ export interface LightCurve {
   readonly strongest: Float32Array;
 }
 
-/** "Just before" a tick. */
-const BEFORE = 1e-3;
+/** "Just before" a tick: two points this close together are a jump. */
+export const JUMP_TICKS = 1e-3;
 /** Moving stretches get a point at least this often: 1/16 beat. */
 export const CURVE_STEP_TICKS = 60;
 
@@ -48,9 +48,9 @@ function keyOf(light: Light, { level, colour, pulse }: Tracks): string {
 
 function traceSwitched(tracks: Tracks, light: number): LightCurve {
   const points = listOnSpans(tracks, light).flatMap(({ start, end }) => [
-    [start - BEFORE, 0],
+    [start - JUMP_TICKS, 0],
     [start, 1],
-    [end - BEFORE, 1],
+    [end - JUMP_TICKS, 1],
     [end, 0],
   ]);
   const on = Float32Array.from(points, ([, value]) => value ?? 0);
@@ -78,11 +78,11 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
   };
   const breaks = listBreaks(tracks, light);
   breaks.forEach((tick, index) => {
-    if (tick > 0) add(tick - BEFORE);
+    if (tick > 0) add(tick - JUMP_TICKS);
     add(tick);
     const next = breaks[index + 1];
     if (next === undefined) return;
-    const samples = [tick, (tick + next) / 2, next - BEFORE].map(read);
+    const samples = [tick, (tick + next) / 2, next - JUMP_TICKS].map(read);
     const [first] = samples;
     if (samples.every((sample) => sample.level === first?.level && sample.luminance === first.luminance && sample.strongest === first.strongest)) return;
     for (let between = tick + CURVE_STEP_TICKS; between < next; between += CURVE_STEP_TICKS) add(between);
