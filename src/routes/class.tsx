@@ -11,7 +11,6 @@ import { AssignmentTable, AssignmentTableSkeleton } from "../features/assignment
 import { classQuery } from "../features/classes/api.ts";
 import { CardMaker } from "../features/classes/components/card-maker.tsx";
 import { StudentTable } from "../features/classes/components/student-table.tsx";
-import { inboxQuery } from "../features/marking/api.ts";
 import { useNow } from "../hooks/use-now.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { useEventZone } from "./event-zone.ts";
@@ -22,10 +21,7 @@ export async function loader({ request, params }: LoaderFunctionArgs) {
   const classId = ClassIdSchema.safeParse(params.classId);
   if (!classId.success) throw new Response(null, { status: 404 });
   void queryClient.prefetchQuery(classQuery(classId.data));
-  if (params.section === "work") {
-    void queryClient.prefetchQuery(assignmentsQuery);
-    void queryClient.prefetchQuery(inboxQuery);
-  }
+  if (params.section === "work") void queryClient.prefetchQuery(assignmentsQuery);
   return null;
 }
 
@@ -78,14 +74,9 @@ function Students({ classId }: SectionProps) {
 function Work({ classId }: SectionProps) {
   const timeZone = useEventZone();
   const now = useNow();
-  const { data: inbox = [] } = useQuery(inboxQuery);
-  const toDesk = (assignmentId: string) => {
-    const first = inbox.find((assignment) => assignment.id === assignmentId)?.firstSubmissionId;
-    return first ? `/marking/${assignmentId}/${first}` : null;
-  };
   return (
     <QueryView query={useQuery(assignmentsQuery)} skeleton={<AssignmentTableSkeleton />} errorTitle="The assignments could not be loaded.">
-      {(assignments) => <AssignmentTable classId={classId} assignments={assignments.filter((assignment) => assignment.classId === classId)} timeZone={timeZone} now={now} toDesk={toDesk} />}
+      {(assignments) => <AssignmentTable classId={classId} assignments={assignments.filter((assignment) => assignment.classId === classId)} timeZone={timeZone} now={now} />}
     </QueryView>
   );
 }

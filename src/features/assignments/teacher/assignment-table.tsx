@@ -11,12 +11,10 @@ export interface AssignmentTableProps {
   classId: string;
   timeZone: string;
   now: number;
-  /** The desk with the first submission of an assignment; null when nothing was handed in. */
-  toDesk: (assignmentId: string) => string | null;
 }
 
 /** The assignments of one class with how far the class is, newest due date first. */
-export function AssignmentTable({ assignments, classId, timeZone, now, toDesk }: AssignmentTableProps) {
+export function AssignmentTable({ assignments, classId, timeZone, now }: AssignmentTableProps) {
   const order = [...assignments].sort((a, b) => b.dueAt - a.dueAt);
   const newAssignment = (
     <LinkButton to={`/classes/${classId}/assignments/new`} look="main" icon="plus">
@@ -38,7 +36,8 @@ export function AssignmentTable({ assignments, classId, timeZone, now, toDesk }:
       </div>
       <ul className="divide-y divide-line rounded-sheet border border-line bg-card shadow-sheet-1">
         {order.map((assignment) => {
-          const desk = toDesk(assignment.id);
+          const { submitted = 0, revise = 0, marked = 0 } = assignment.counts ?? {};
+          const desk = submitted + revise + marked > 0 ? `/marking/${assignment.id}` : null;
           return (
             <li key={assignment.id} className="flex flex-wrap items-center gap-x-6 gap-y-2 px-4 py-3">
               <div className="min-w-60 flex-1">
@@ -62,7 +61,7 @@ export function AssignmentTable({ assignments, classId, timeZone, now, toDesk }:
                   Change
                 </LinkButton>
                 {desk && (
-                  <LinkButton to={desk} look={assignment.counts?.submitted ? "main" : "plain"} icon="rubric" aria-label={`Mark ${assignment.title}`}>
+                  <LinkButton to={desk} look={submitted > 0 ? "main" : "plain"} icon="rubric" aria-label={`Mark ${assignment.title}`}>
                     Mark
                   </LinkButton>
                 )}

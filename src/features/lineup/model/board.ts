@@ -63,6 +63,7 @@ function toCell(lineup: Lineup, night: Night | null, startsAt: string): Cell {
   const slot = lineup.slots.find((candidate) => candidate.nightId === night.id && candidate.startsAt === startsAt);
   const show = slot && lineup.shows.find((candidate) => candidate.id === slot.forwardId);
   if (slot && show) return { kind: "slot", slot, show, finding: findWorst(lineup.findings, slot.id) };
+  if (night.date < lineup.tonight) return { kind: "rest", reason: "over" };
   if (night.closedReason !== null) return { kind: "rest", reason: night.closedReason };
   if (startsAt < night.opensAt || startsAt >= night.closesAt || !lineup.times.includes(startsAt)) return { kind: "rest", reason: "dark" };
   return { kind: "free", nightId: night.id, startsAt };

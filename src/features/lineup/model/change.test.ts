@@ -57,6 +57,15 @@ describe("findObstacle", () => {
   });
 });
 
+describe("a night that is over", () => {
+  const later = { ...lineup, tonight: "2026-12-08" };
+  it("keeps its shows and takes no other", () => {
+    expect(findObstacle(later, { kind: "remove", slotId: foxes.id })).toBe("That night is over: it stays as it was.");
+    expect(findObstacle(later, { kind: "place", forwardId: snow.forwardId, nightId: foxes.nightId, startsAt: "17:40" })).toBe("That night is over.");
+    expect(findObstacle(later, { kind: "remove", slotId: snow.id })).toBeNull();
+  });
+});
+
 describe("presentChange", () => {
   it("says where a show went and which one it changed places with", () => {
     expect(presentChange(lineup, moveFoxesOntoSnow)).toBe("Nine Foxes moved to Tuesday 8 December, 17:20. Slow Snow took its place.");

@@ -28,8 +28,16 @@ export function presentTitle(lineup: Lineup, forwardId: string): string {
   return lineup.shows.find((show) => show.id === forwardId)?.title ?? "This show";
 }
 
+function isOver(lineup: Lineup, nightId: string): boolean {
+  const night = lineup.nights.find((candidate) => candidate.id === nightId);
+  return night !== undefined && night.date < lineup.tonight;
+}
+
 /** What stands in the way of a change, as a sentence; null when nothing does. */
 export function findObstacle(lineup: Lineup, change: Change): string | null {
+  const slotNight = change.kind === "place" ? null : findSlot(lineup, change.slotId)?.nightId;
+  if (slotNight && change.kind !== "pin" && isOver(lineup, slotNight)) return "That night is over: it stays as it was.";
+  if ((change.kind === "place" || change.kind === "move") && isOver(lineup, change.nightId)) return "That night is over.";
   if (change.kind === "place") {
     const there = findSlotAt(lineup, change.nightId, change.startsAt);
     return there ? `${presentTitle(lineup, there.forwardId)} is there. Move it first, or choose a free time.` : null;

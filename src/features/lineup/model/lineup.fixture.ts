@@ -49,7 +49,7 @@ export function buildLineup(overrides: Partial<Lineup> = {}): Lineup {
     findings: [],
     publication: null,
     changeCount: 0,
-    tonight: "2026-12-09",
+    tonight: "2026-12-07",
     ...overrides,
   };
 }

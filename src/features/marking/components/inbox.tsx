@@ -33,7 +33,7 @@ export function Inbox({ assignments, timeZone }: InboxProps) {
   return (
     <List className="rounded-sheet border border-line bg-card shadow-sheet-1">
       {order.map((assignment) => {
-        const desk = assignment.firstSubmissionId && `/marking/${assignment.id}/${assignment.firstSubmissionId}`;
+        const desk = toDesk(assignment);
         return (
           <ListRow
             key={assignment.id}
@@ -55,6 +55,12 @@ export function Inbox({ assignments, timeZone }: InboxProps) {
       })}
     </List>
   );
+}
+
+/** The desk, at what has waited longest; null when nothing was handed in. */
+function toDesk({ id, firstSubmissionId, sentBack, marked }: MarkingInbox[number]): string | null {
+  if (firstSubmissionId) return `/marking/${id}/${firstSubmissionId}`;
+  return sentBack + marked > 0 ? `/marking/${id}` : null;
 }
 
 function presentCounts({ sentBack, marked }: MarkingInbox[number]): string {
