@@ -29,9 +29,9 @@ export function BandLink({ item, isInMenu, onFollow }: BandLinkProps) {
       onClick={onFollow}
       className={({ isActive }) =>
         joinClasses(
-          "flex items-center gap-[7px] no-underline hover:text-white",
+          "flex items-center gap-[7px] no-underline hover:text-on-dusk",
           isInMenu ? "min-h-12 flex-1 border-l-4 pl-3 text-4" : "relative px-[13px] text-[max(0.96875rem,var(--text-meta))] [--bar-inset:13px]",
-          isActive ? "font-semibold text-white" : "text-on-dusk-soft",
+          isActive ? "font-semibold text-on-dusk" : "text-on-dusk-soft",
           isActive && (isInMenu ? "border-lamp" : "lamp-bar"),
           !isActive && isInMenu && "border-transparent",
         )
@@ -40,7 +40,7 @@ export function BandLink({ item, isInMenu, onFollow }: BandLinkProps) {
       <Icon name={item.icon} />
       {item.label}
       {item.count ? (
-        <span className="rounded-cut bg-twilight px-1.5 py-[3px] text-[0.75rem]/none font-semibold text-white tabular-nums">
+        <span className="rounded-cut bg-twilight px-1.5 py-[3px] text-[0.75rem]/none font-semibold text-on-dusk tabular-nums">
           {item.count}
           {item.countLabel && <span className="sr-only"> {item.countLabel}</span>}
         </span>

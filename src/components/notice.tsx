@@ -20,13 +20,15 @@ export interface NoticeProps {
   children?: ReactNode;
   /** Buttons. */
   actions?: ReactNode;
+  /** In the corner: an IconButton that closes it. */
+  end?: ReactNode;
   /** `alert` interrupts, `status` waits its turn; leave it out for what was there when the page came. */
   role?: "alert" | "status";
   className?: string;
 }
 
 /** A message in the page: 4 px edge, icon, bold sentence, meaning, action. For what concerns the place it stands in; passing news is a toast. */
-export function Notice({ tone = "info", icon, title, children, actions, role, className }: NoticeProps) {
+export function Notice({ tone = "info", icon, title, children, actions, end, role, className }: NoticeProps) {
   const look = TONES[tone];
   return (
     <div role={role} className={joinClasses("flex gap-3 rounded-r-sheet border-l-4 px-4 py-3 text-ink", look.box, className)}>
@@ -36,6 +38,7 @@ export function Notice({ tone = "info", icon, title, children, actions, role, cl
         {children && <div className="mt-0.5 max-w-[62ch] space-y-2">{children}</div>}
         {actions && <div className="mt-2.5 flex flex-wrap gap-2">{actions}</div>}
       </div>
+      {end && <div className="-my-1.5 -mr-2.5 shrink-0">{end}</div>}
     </div>
   );
 }

@@ -36,11 +36,12 @@ function ToastSlip({ toast, isHeld }: { toast: QueuedToast; isHeld: boolean }) {
   }, [id, leavesAfterMs, isHeld]);
 
   return (
-    <div className="pointer-events-auto flex w-full max-w-[26rem] items-start rounded-sheet bg-card shadow-sheet-2">
+    <div className="pointer-events-auto flex w-full max-w-[26rem] rounded-r-sheet shadow-sheet-2">
       <Notice
         tone={toast.tone ?? "ok"}
         title={toast.title}
-        className="flex-1 pr-1"
+        className="flex-1"
+        end={<IconButton icon="cross" label={`Close: ${toast.title}`} size="small" onPress={() => dismissToast(id)} />}
         actions={
           action && (
             <Button
@@ -57,7 +58,6 @@ function ToastSlip({ toast, isHeld }: { toast: QueuedToast; isHeld: boolean }) {
       >
         {toast.detail}
       </Notice>
-      <IconButton icon="cross" label={`Close: ${toast.title}`} size="small" onPress={() => dismissToast(id)} className="m-1" />
     </div>
   );
 }
