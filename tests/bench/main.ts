@@ -1,0 +1,20 @@
+import { writeFileSync } from "node:fs";
+import { parseArgs } from "node:util";
+import { benchPages } from "./pages.ts";
+import { benchRequests } from "./requests.ts";
+import { benchRuns } from "./runs.ts";
+import type { Figure } from "./measure.ts";
+
+// `npm run bench [-- --json FILE]`: prints each figure; speed is judged by ratios measured in one run.
+const { values } = parseArgs({ options: { json: { type: "string" } } });
+
+const figures: Figure[] = [];
+for (const bench of [benchRuns, benchRequests, benchPages]) {
+  for (const figure of await bench()) {
+    figures.push(figure);
+    const ratio = figure.ratio === null ? "" : `  ${figure.ratio.toFixed(2)} x ${figure.against ?? ""}`;
+    console.log(`${figure.name}: ${figure.value.toFixed(figure.value < 10 ? 2 : 0)} ${figure.unit}${ratio}`);
+  }
+}
+if (values.json !== undefined) writeFileSync(values.json, `${JSON.stringify(figures, null, 2)}\n`);
+process.exit(0);

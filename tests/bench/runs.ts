@@ -1,0 +1,71 @@
+import vm from "node:vm";
+import { readFileSync } from "node:fs";
+import path from "node:path";
+import { compileScript } from "../../sandbox/language/compile.ts";
+import { LIBRARY } from "../../sandbox/engine/library.generated.ts";
+import { createEngine } from "../../sandbox/engine/engine.ts";
+import type { GuestTables } from "../../sandbox/engine/guest.ts";
+import type { RunInput } from "../../sandbox/engine/model.ts";
+import { buildTables, listNames } from "../../sandbox/engine/tables.ts";
+import { createNodeHost } from "../../server/runs/node-host.ts";
+import { demoSong } from "../../server/db/seed/world/songs/demo-songs.ts";
+import { DEMO_SQUARE } from "../../server/db/seed/world/square.ts";
+import { type Figure, timeInTurns } from "./measure.ts";
+
+const ROUNDS = 9;
+const SEED = 20_261_201;
+
+/** A whole three-minute show for the demo square: verse, chorus and drums, as a good pupil writes it. */
+const SHOWPIECE = path.resolve(import.meta.dirname, "../samples/showpiece.ts");
+
+/**
+ * A typical show through the whole engine (compile, fresh module, marks, limits, decoding, hash)
+ * against the same marked code and library in a bare QuickJS, and in node:vm.
+ */
+export async function benchRuns(): Promise<Figure[]> {
+  const host = await createNodeHost();
+  const engine = createEngine(host);
+  const input: RunInput = {
+    source: readFileSync(SHOWPIECE, "utf8"),
+    songId: "bench",
+    song: demoSong("quillhaven-bells").beatMap,
+    layout: DEMO_SQUARE,
+    seed: SEED,
+  };
+  const compiled = compileScript(input.source, listNames(input.layout, input.song));
+  if (!compiled.ok) throw new Error(`The bench script does not compile: ${compiled.problem.sentence}`);
+  const tables: GuestTables = {
+    ...buildTables(input.layout, input.song),
+    seed: input.seed,
+    streamOf: compiled.marked.streamOf,
+    streams: compiled.marked.streams,
+  };
+  const json = JSON.stringify(tables);
+  const { code } = compiled.marked;
+
+  const outcome = await engine.run(input);
+  if (!outcome.ok) throw new Error(`The bench script does not run: ${outcome.problem.sentence}`);
+  const times = await timeInTurns(ROUNDS, {
+    engine: () => engine.run(input),
+    bare: async () => {
+      const context = (await host.newModule()).newContext();
+      const library = context.unwrapResult(context.evalCode(LIBRARY, "library.js"));
+      const call = (name: string, argument: Parameters<typeof context.callFunction>[2]) =>
+        context.unwrapResult(context.callFunction(context.getProp(library, name), context.undefined, argument));
+      call("open", context.newString(json));
+      call("run", context.unwrapResult(context.evalCode(code, "script.js")));
+    },
+    vm: () => {
+      const realm = vm.createContext({});
+      const library = vm.runInContext(LIBRARY, realm) as { open(tables: string): void; run(script: unknown): void };
+      library.open(json);
+      library.run(vm.runInContext(code, realm));
+    },
+  });
+  return [
+    { name: "run of a three-minute show", value: times.engine, unit: "ms", against: "bare QuickJS on the same code", ratio: times.engine / times.bare },
+    { name: "run of a three-minute show", value: times.engine, unit: "ms", against: "node:vm on the same code", ratio: times.engine / times.vm },
+    { name: "fuel of a three-minute show", value: outcome.fuel, unit: "polls", against: null, ratio: null },
+    { name: "cues of a three-minute show", value: outcome.cueCount, unit: "cues", against: null, ratio: null },
+  ];
+}
