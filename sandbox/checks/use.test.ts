@@ -1,0 +1,57 @@
+import fc from "fast-check";
+import { describe, expect, it } from "vitest";
+import { listUnmet, listUses, type UseKind } from "./use.ts";
+
+const lines = (source: string, kind: UseKind) => listUses(source).filter((use) => use.kind === kind).map(({ name, line }) => `${line} ${name}`);
+
+const SCRIPT = `// for every front, if you like
+const north = square.side("north");
+function flash(lights: Lights, beats = 1) {
+  lights.pulse(beats, "for");
+}
+const rest = () => wait(1);
+for (const front of north) {
+  for (let i = 0; i < 4; i++) {
+    if (i % 2 === 0) flash(front);
+    rest();
+  }
+}
+const chorus = song.section("chorus");
+at(chorus.bars, turn => square.fronts[turn % 3].on(turn > 2 ? 50 : 90));
+repeat(2, () => north.inTurn(0.5, f => f.off()));
+`;
+
+describe("listUses", () => {
+  it("finds loops and loops in loops, those of the language too", () => {
+    expect(lines(SCRIPT, "loop")).toEqual(["7 for", "8 for", "15 repeat", "15 inTurn"]);
+    expect(lines(SCRIPT, "nested-loop")).toEqual(["8 for", "15 inTurn"]);
+  });
+  it("does not take a loop's head for its body, nor two loops in a row for nested ones", () => {
+    expect(lines("for (const f of square.fronts.map(x => x)) f.on();\nwhile (now() < 4) wait(1);", "nested-loop")).toEqual([]);
+  });
+  it("finds functions of the script's own, with and without parameters", () => {
+    expect(lines(SCRIPT, "function")).toEqual(["3 flash", "6 rest"]);
+    expect(lines(SCRIPT, "function-with-parameters")).toEqual(["3 flash"]);
+  });
+  it("finds conditions, lists and the song", () => {
+    expect(lines(SCRIPT, "condition")).toEqual(["9 if", "14 ? :"]);
+    expect(lines(SCRIPT, "list")).toEqual(["14 [ ]"]);
+    expect(lines("const [a, b] = square.all.split(2);\nconst c = [a, b];", "list")).toEqual(["1 [ ]", "2 [ ]"]);
+    expect(lines(SCRIPT, "song-data")).toEqual(["13 song.section"]);
+  });
+  it("finds words of the language, but not in comments, texts or names that the script gives", () => {
+    expect(lines("// wait(1)\nlet bar = 'repeat';\nsquare.all.on();\nbar.length;", "word")).toEqual(["3 on", "3 all", "3 square", "4 length"]);
+  });
+  it("reads what it can of a script with a mistake, and never throws", () => {
+    expect(lines("for (const f of square.fronts) {\n  f.on();", "loop")).toEqual(["1 for"]);
+    expect(listUses("(".repeat(20_000))).toEqual([]);
+    fc.assert(fc.property(fc.string({ maxLength: 60 }), (source) => Array.isArray(listUses(source))));
+  });
+});
+
+describe("listUnmet", () => {
+  it("keeps what is asked for and not there, or not often enough", () => {
+    expect(listUnmet(SCRIPT, [{ kind: "loop", atLeast: 4 }, { kind: "function", atLeast: 3 }, { kind: "song-data", atLeast: 1 }])).toEqual([{ kind: "function", atLeast: 3 }]);
+    expect(listUnmet("", [{ kind: "loop", atLeast: 1 }])).toHaveLength(1);
+  });
+});
