@@ -3,7 +3,7 @@ import { IconButton } from "../../../components/icon-button.tsx";
 import { Tag } from "../../../components/tag.tsx";
 import { Tooltip } from "../../../components/tooltip.tsx";
 import { presentWhen } from "../../../lib/zoned-time.ts";
-import { presentAuthors } from "../model/queue.ts";
+import { formatNames } from "../../../lib/format.ts";
 
 export interface DeskHeadProps {
   submission: SubmissionDetail["submission"];
@@ -26,7 +26,7 @@ export function DeskHead({ submission, timeZone, now, position, onPrevious, onNe
         {submission.showTitle}
       </h1>
       <p className="text-slate max-wide:order-5 max-wide:w-full">
-        {presentAuthors(submission.authors)} · version {submission.versionNumber}, handed in {presentWhen(submission.handedInAt, now, timeZone)}
+        {formatNames(submission.authors)} · version {submission.versionNumber}, handed in {presentWhen(submission.handedInAt, now, timeZone)}
       </p>
       <span className="ml-auto text-meta whitespace-nowrap text-slate wide:hidden">{position}</span>
       <span className="flex gap-2 max-wide:order-6 wide:ml-auto">

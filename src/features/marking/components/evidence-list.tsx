@@ -1,5 +1,6 @@
 import type { Evidence } from "../../../../shared/contracts/marking.ts";
 import { Icon, type IconName } from "../../../components/icon.tsx";
+import { PlaceButton } from "../../../components/place-button.tsx";
 
 export interface EvidenceListProps {
   evidence: readonly Evidence[];
@@ -45,13 +46,5 @@ export function EvidenceList({ evidence, presentMoment, onShowLine, onShowMoment
         );
       })}
     </ul>
-  );
-}
-
-function PlaceButton({ onPress, children }: { onPress: () => void; children: React.ReactNode }) {
-  return (
-    <button type="button" onClick={onPress} className="mr-1.5 min-h-6 text-plum underline decoration-1 underline-offset-2 hover:decoration-2">
-      {children}
-    </button>
   );
 }

@@ -8,7 +8,7 @@ export const DESK_KEYS: readonly { readonly keys: readonly string[]; readonly do
   { keys: ["J"], does: "Next in the queue", short: "next" },
   { keys: ["K"], does: "Previous in the queue", short: "previous" },
   { keys: ["1", "2", "3", "4"], does: "Level of the marked criterion, then on to the next criterion", short: "level" },
-  { keys: ["C"], does: "Comment on the line with the focus, else on the moment that is playing", short: "comment here" },
+  { keys: ["C"], does: "Comment on the moment that is playing", short: "comment here" },
   { keys: ["Space"], does: "Play and pause", short: "play" },
   { keys: ["G"], does: "Release the mark", short: "release" },
   { keys: ["?"], does: "Show these keys", short: "all keys" },

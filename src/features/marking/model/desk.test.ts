@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { parseDeskKey } from "./desk-keys.ts";
 import { buildQueueRow, buildRubric } from "./marking.fixture.ts";
-import { findNeighbour, findNextToMark, orderQueue, presentAuthors, presentQueue } from "./queue.ts";
+import { findNeighbour, findNextToMark, orderQueue, presentQueue } from "./queue.ts";
 import { countPoints, findCurrent, findReleaseObstacle, pressLevel } from "./rubric.ts";
 
 const rows = orderQueue([
@@ -28,7 +28,6 @@ describe("orderQueue", () => {
   });
   it("is counted in words", () => {
     expect(presentQueue(rows)).toBe("2 to mark, 1 sent back");
-    expect(presentAuthors(["Wren", "Idris"])).toBe("Wren and Idris");
   });
 });
 

@@ -28,8 +28,3 @@ export function presentQueue(rows: readonly QueueRow[]): string {
   if (count("revise") > 0) parts.push(`${count("revise")} sent back`);
   return parts.join(", ");
 }
-
-/** Names in a sentence: "Ada", "Wren and Idris", "Ada, Wren and Idris". */
-export function presentAuthors(names: readonly string[]): string {
-  return new Intl.ListFormat("en-GB", { type: "conjunction" }).format(names);
-}
