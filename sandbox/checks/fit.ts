@@ -3,7 +3,7 @@ import type { Finding } from "../engine/model.ts";
 import { BIN_TICKS, litBins } from "./bins.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding } from "./finding.ts";
-import { countWord, nameBar } from "./words.ts";
+import { countWord, nameBar } from "../timeline/words.ts";
 
 /** Whether a show fits its song: whole, of the song's length, and not dark for long. */
 export function findFit(context: CheckContext): Finding[] {
@@ -44,7 +44,7 @@ function findDarkness(context: CheckContext, lit: Uint8Array, first: number, las
   if (share < rules.leastLengthShare)
     findings.push(
       buildFinding(context, "ends-early", {
-        sentence: `The square is dark from ${nameBar(context, (last + 1) * BIN_TICKS)} on, but the song plays on.`,
+        sentence: `The square is dark from ${nameBar(context.song, (last + 1) * BIN_TICKS)} on, but the song plays on.`,
         hint: "Use `song.end` or `song.bars` to fill the song.",
         measured: { value: Math.round(share * 100), limit: Math.round(rules.leastLengthShare * 100), unit: "% of the song" },
         moments: [(last + 1) * BIN_TICKS],
@@ -53,7 +53,7 @@ function findDarkness(context: CheckContext, lit: Uint8Array, first: number, las
   const dark = listDark(lit, first, last).filter(([start, end]) => seconds(end) - seconds(start) > rules.longestDarkSeconds);
   if (dark.length > 0) {
     const longest = Math.max(...dark.map(([start, end]) => seconds(end) - seconds(start)));
-    const where = dark.map(([start]) => nameBar(context, start * BIN_TICKS));
+    const where = dark.map(([start]) => nameBar(context.song, start * BIN_TICKS));
     findings.push(
       buildFinding(context, "long-dark", {
         sentence: `The square is dark for ${Math.round(longest)} seconds from ${where[0] ?? ""} on${dark.length > 1 ? ", and more than once" : ""}.`,

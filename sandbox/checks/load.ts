@@ -4,7 +4,7 @@ import { createLightsCursor } from "../timeline/cursor.ts";
 import { BIN_TICKS, countBins, highestPerBin } from "./bins.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, lineOfCue } from "./finding.ts";
-import { nameBar } from "./words.ts";
+import { nameBar } from "../timeline/words.ts";
 
 /** What a circuit carries in a show. */
 export interface CircuitLoad {
@@ -69,7 +69,7 @@ export function findLoads(context: CheckContext): Finding[] {
       const { lights, lines } = lightsAt(context, load);
       return [
         buildFinding(context, "circuit-overload", {
-          sentence: `The circuit "${circuit.id}" takes ${inAmps(peakAmps)} in ${nameBar(context, peakTick)}. It may take ${inAmps(limitAmps)}.`,
+          sentence: `The circuit "${circuit.id}" takes ${inAmps(peakAmps)} in ${nameBar(context.song, peakTick)}. It may take ${inAmps(limitAmps)}.`,
           hint: `Light fewer lights at once, or use lower levels. ${PLANNING_AID}`,
           measured: { value: round(peakAmps), limit: round(limitAmps), unit: "A" },
           moments: [peakTick],

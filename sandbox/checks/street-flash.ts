@@ -5,7 +5,7 @@ import type { LightCurve } from "../timeline/curves.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, lineOfCue } from "./finding.ts";
 import { findTransitions } from "./transitions.ts";
-import { nameBar } from "./words.ts";
+import { nameBar } from "../timeline/words.ts";
 
 /**
  * The street rule: what flashes on the real square, whatever the picture on a screen shows.
@@ -179,7 +179,7 @@ function describeOver(context: CheckContext, { side, events, worst }: FlashCount
   const first = bad[0];
   const startsAt = first === undefined ? 0 : events.indexOf(first);
   const together = events.slice(startsAt, startsAt + limit + 1);
-  const where = first === undefined ? "" : ` in ${nameBar(context, first.tick)}`;
+  const where = first === undefined ? "" : ` in ${nameBar(context.song, first.tick)}`;
   const who = side === null ? `The sides together flash` : `The ${side} side flashes`;
   return buildFinding(context, side === null ? "street-flash-all-sides" : "street-flash", {
     sentence: `${who} ${worst} times in one second${where}. More than ${limit} can harm people.`,

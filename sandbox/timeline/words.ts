@@ -1,16 +1,10 @@
 import type { BeatMap } from "../../shared/contracts/songs.ts";
-import { TICKS_PER_BEAT } from "../../shared/units.ts";
+import { barNumberAt } from "./spans.ts";
 
 /** Gives "bar 12" for a tick, or "the pick-up" for what lies before bar 1. */
-export function nameBar({ song }: { readonly song: BeatMap }, tick: number): string {
-  const number = barAt(song, tick);
+export function nameBar(song: BeatMap, tick: number): string {
+  const number = barNumberAt(song, tick);
   return number === 0 ? "the pick-up" : `bar ${number}`;
-}
-
-/** Gives the number of the bar that a tick lies in; after the last bar the last. */
-export function barAt(song: BeatMap, tick: number): number {
-  const moment = tick / TICKS_PER_BEAT;
-  return song.bars.findLast((bar) => bar.start <= moment + 1e-9)?.number ?? song.bars[0]?.number ?? 1;
 }
 
 /** Gives "a", "a and b", "a, b and c". */
@@ -22,4 +16,3 @@ export function joinWords(words: readonly string[]): string {
 export function countWord(count: number, word: string): string {
   return `${count} ${word}${count === 1 ? "" : "s"}`;
 }
-

@@ -1,0 +1,132 @@
+import type { BeatMap } from "../../shared/contracts/songs.ts";
+import { SIDES, type Layout, type Side } from "../../shared/contracts/square.ts";
+import { listFronts, listLights } from "../square/lights.ts";
+import { measureSpans, type Activity, type Movement } from "./activity.ts";
+import { nameColour } from "./colour-word.ts";
+import type { Timeline } from "./model.ts";
+import { listSongSpans, type SongSpan } from "./spans.ts";
+import { buildTracks } from "./tracks.ts";
+import { joinWords } from "./words.ts";
+
+/** A show in words, for people who can not see it. */
+export interface ShowDescription {
+  /** One sentence for a ribbon: "Starts dark, mostly one front after another, busiest in the second chorus." */
+  readonly summary: string;
+  /** A sentence for each part of the song, in order; equal neighbours are one. */
+  readonly steps: readonly string[];
+}
+
+/**
+ * Gives what happens in a show, worked out from the timeline alone: which sides are lit, how they
+ * move, in what colours, part by part. An incomplete timeline is described up to its last cue.
+ */
+export function describeShow(timeline: Timeline, layout: Layout, song: BeatMap): ShowDescription {
+  const lights = listLights(layout);
+  const fronts = listFronts(layout).map(({ front }) => front);
+  const sides = SIDES.filter((side) => fronts.some((front) => front.side === side));
+  const spans = listSongSpans(song).filter((span) => span.start < timeline.endTick);
+  const activities = measureSpans(timeline, lights, buildTracks(timeline), spans.map(({ start, end }) => [start, Math.min(end, timeline.endTick)] as const));
+  const parts = spans.flatMap((span, index) => {
+    const activity = activities[index];
+    return activity === undefined ? [] : [{ span, activity, words: describeActivity(activity, sides, (front) => fronts[front]?.name ?? "") }];
+  });
+  const steps = joinParts(parts).map(({ spans: joined, words }) => `${nameSpans(joined)}: ${words}.`);
+  const ending = timeline.isComplete ? [] : ["The script stopped here, so the show is not whole."];
+  return { summary: summarise(parts, timeline.isComplete), steps: [...steps, ...ending] };
+}
+
+interface Part {
+  readonly span: SongSpan;
+  readonly activity: Activity;
+  readonly words: string;
+}
+
+/** Parts that follow each other and read the same become one. */
+function joinParts(parts: readonly Part[]): readonly { readonly spans: readonly SongSpan[]; readonly words: string }[] {
+  const joined: { spans: SongSpan[]; words: string }[] = [];
+  for (const { span, words } of parts) {
+    const last = joined.at(-1);
+    if (last?.words === words) last.spans.push(span);
+    else joined.push({ spans: [span], words });
+  }
+  return joined;
+}
+
+function nameSpans(spans: readonly SongSpan[]): string {
+  const first = spans[0]?.firstBar ?? 1;
+  const last = spans.at(-1)?.lastBar ?? first;
+  const bars = first === last ? `Bar ${first}` : `Bars ${first} to ${last}`;
+  const names = [...new Set(spans.flatMap(({ name }) => name ?? []))];
+  return names.length === 0 ? bars : `${bars} (${names.join(", ")})`;
+}
+
+/** What one does, and what several do. */
+const MOVES: Readonly<Record<Exclude<Movement, "dark">, readonly [string, string]>> = {
+  steady: ["stays lit", "stay lit"],
+  "in-turn": ["lights up one front after another", "light up one front after another"],
+  scattered: ["sparkles here and there", "sparkle here and there"],
+  together: ["lights up all together", "light up all together"],
+  fading: ["grows brighter and dims", "grow brighter and dim"],
+};
+
+function describeActivity(activity: Activity, sides: readonly Side[], nameFront: (front: number) => string): string {
+  if (activity.movement === "dark") return "all is dark";
+  const { who, isSeveral } = nameWho(activity, sides, nameFront);
+  const [one, several] = describeMove(activity, activity.movement);
+  return `${who} ${isSeveral ? several : one}${describeColours(activity)}`;
+}
+
+/** Half the light again, or half of it gone, is seen as growing or dimming. */
+function describeMove({ light, lightFirst, lightLast, fronts }: Activity, movement: Exclude<Movement, "dark">): readonly [string, string] {
+  if (movement === "steady" && light < 0.3) return ["stays dimly lit", "stay dimly lit"];
+  if (movement === "together" && fronts.size === 1) return ["lights up", "light up"];
+  if (movement === "fading" && lightLast > lightFirst * 1.5 + 0.05) return ["slowly grows brighter", "slowly grow brighter"];
+  if (movement === "fading" && lightLast * 1.5 + 0.05 < lightFirst) return ["slowly goes dim", "slowly go dim"];
+  return MOVES[movement];
+}
+
+/** A side counts when it gives a good share of the light. */
+function nameWho({ fronts, sides: shares }: Activity, sides: readonly Side[], nameFront: (front: number) => string): { readonly who: string; readonly isSeveral: boolean } {
+  const [only] = fronts;
+  if (fronts.size === 1 && only !== undefined) return { who: `only the front "${nameFront(only)}"`, isSeveral: false };
+  const lit = sides.filter((side) => (shares.get(side) ?? 0) > 0.4 / Math.max(1, sides.length));
+  if (lit.length === 0) return { who: "a part of the square", isSeveral: false };
+  if (lit.length === sides.length && sides.length > 1) return { who: "the whole square", isSeveral: false };
+  return lit.length === 1 ? { who: `the ${lit[0]} side`, isSeveral: false } : { who: `the ${joinWords(lit)} sides`, isSeveral: true };
+}
+
+function describeColours({ colours }: Activity): string {
+  const shares = new Map<string, number>();
+  for (const [colour, share] of colours) shares.set(nameColour(colour), (shares.get(nameColour(colour)) ?? 0) + share);
+  const words = [...shares].filter(([word, share]) => share > 0.08 && word !== "black").sort((a, b) => b[1] - a[1]);
+  if (words.length > 3) return ", in many colours";
+  return words.length === 0 ? "" : `, in ${joinWords(words.map(([word]) => word))}`;
+}
+
+const MOSTLY: Readonly<Record<Movement, string>> = {
+  dark: "mostly dark",
+  steady: "mostly still",
+  "in-turn": "mostly one front after another",
+  scattered: "mostly sparkling",
+  together: "mostly all together",
+  fading: "mostly slow fades",
+};
+
+function summarise(parts: readonly Part[], isComplete: boolean): string {
+  const [first] = parts;
+  const last = parts.at(-1);
+  if (first === undefined || last === undefined || parts.every(({ activity }) => activity.movement === "dark")) return "All is dark.";
+  const lengths = new Map<Movement, number>();
+  for (const { activity } of parts) lengths.set(activity.movement, (lengths.get(activity.movement) ?? 0) + activity.end - activity.start);
+  const [mostly] = [...lengths].sort((a, b) => b[1] - a[1])[0] ?? ["steady"];
+  const words = [first.activity.lightFirst < 0.02 ? "starts dark" : first.activity.lightFirst < 0.4 ? "starts dim" : "starts bright", MOSTLY[mostly]];
+  const busiest = parts.reduce((most, part) => (pace(part) > pace(most) ? part : most));
+  if (parts.length > 1 && pace(busiest) > 0) words.push(`busiest in ${busiest.span.name === null ? nameSpans([busiest.span]).replace("B", "b") : `the ${busiest.span.name}`}`);
+  if (!isComplete) words.push("then the script stops");
+  else words.push(last.activity.lightLast < 0.02 ? "dark at the end" : "lit until the end");
+  const sentence = words.join(", ");
+  return `${sentence.charAt(0).toUpperCase()}${sentence.slice(1)}.`;
+}
+
+/** Steps a tick: how much happens. */
+const pace = ({ activity }: Part) => activity.steps / Math.max(1, activity.end - activity.start);
