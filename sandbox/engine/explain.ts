@@ -66,14 +66,31 @@ function explainBroken(compiled: CompiledScript, site: Site, details: string): P
   return createProblem("could-not-run", {}, place);
 }
 
+/** Offset in the script of the top frame of an engine's stack, or -1. */
+function offsetInStack(compiled: CompiledScript, stack: string): number {
+  const found = /script\.js:(\d+)(?::(\d+))?/.exec(stack);
+  const line = Number(found?.[1] ?? 0) - LINES_BEFORE;
+  if (line < 1) return -1;
+  const column = found?.[2] === undefined ? 1 : compiled.marked.toScriptColumn(line, Number(found[2]));
+  return toOffset(compiled.text, line, column);
+}
+
+/** The innermost node at an offset. */
+function nodeAt(file: ts.SourceFile, offset: number): ts.Node {
+  let innermost: ts.Node = file;
+  const look = (node: ts.Node): void => {
+    if (offset < node.getStart(file) || offset >= node.end) return;
+    innermost = node;
+    ts.forEachChild(node, look);
+  };
+  look(file);
+  return innermost;
+}
+
 /** The place in the script of the top frame of an engine's stack. */
 function placeInStack(compiled: CompiledScript, stack: string): ProblemPlace | null {
-  const found = /script\.js:(\d+)(?::(\d+))?/.exec(stack);
-  if (found === null) return null;
-  const line = Number(found[1]) - LINES_BEFORE;
-  if (line < 1) return null;
-  const column = found[2] === undefined ? 1 : compiled.marked.toScriptColumn(line, Number(found[2]));
-  const start = toOffset(compiled.text, line, column);
+  const start = offsetInStack(compiled, stack);
+  if (start < 0) return null;
   const word = /^[\w$.]+/.exec(compiled.text.slice(start))?.[0] ?? compiled.text.slice(start, start + 1);
   return { range: toRange(compiled.file, start, start + word.length), excerpt: toExcerpt(compiled.text, start, start + word.length) };
 }
@@ -166,7 +183,10 @@ function fixOf(compiled: CompiledScript, failure: GuestFailure, argument: ts.Nod
 }
 
 function explainThrown(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
-  const place = (failure.stack === undefined ? null : placeInStack(compiled, failure.stack)) ?? placeOfSite(compiled, site);
+  const offset = offsetInStack(compiled, failure.stack ?? "");
+  let thrower: ts.Node | undefined = offset < 0 ? undefined : nodeAt(compiled.file, offset);
+  while (thrower !== undefined && !ts.isThrowStatement(thrower)) thrower = thrower.parent;
+  const place = thrower === undefined ? placeOfSite(compiled, site) : placeOf(compiled.file, thrower);
   return createProblem("thrown", failure.message === undefined || failure.message === "" ? {} : { message: failure.message }, place);
 }
 
@@ -183,21 +203,33 @@ function explainEngine(compiled: CompiledScript, site: Site, failure: GuestFailu
   if (failure.name === "ReferenceError") return createProblem("out-of-reach", { name: quoted(message) ?? place.excerpt }, place);
   if (message.includes("read-only") || message.includes("not extensible") || message.includes("no setter")) return createProblem("can-not-change", {}, place);
   if (message.includes("cannot read property") || message.includes("cannot set property")) {
-    const name = quoted(message) ?? "";
-    return createProblem("nothing-there", { name }, place);
+    return explainNothing(compiled, failure, quoted(message) ?? "", place);
   }
   if (message.includes("not iterable")) return createProblem("not-a-list", {}, place);
-  if (message.includes("not a function")) return createProblem("not-a-function", { name: calleeText(compiled, site) }, { ...placeOfSite(compiled, site), details });
+  if (message.includes("not a function")) return explainSkill(compiled, site, { ...placeOfSite(compiled, site), details });
   return createProblem("could-not-run", {}, place);
+}
+
+/** `x.on()` where `x` holds nothing: named with what holds it when that is a plain name. */
+function explainNothing(compiled: CompiledScript, failure: GuestFailure, name: string, place: ProblemPlace): Problem {
+  const offset = offsetInStack(compiled, failure.stack ?? "");
+  const node = offset < 0 ? compiled.file : nodeAt(compiled.file, offset);
+  const access = ts.isPropertyAccessExpression(node.parent ?? node) ? node.parent : node;
+  if (!ts.isPropertyAccessExpression(access)) return createProblem("nothing-there", { name }, place);
+  const exact = { ...placeOf(compiled.file, access), details: place.details };
+  return createProblem("nothing-there", ts.isIdentifier(access.expression) ? { name, owner: access.expression.text } : { name }, exact);
 }
 
 function quoted(message: string): string | null {
   return /'([^']+)'/.exec(message)?.[1] ?? /^(\S+) is not/.exec(message)?.[1] ?? null;
 }
 
-function calleeText(compiled: CompiledScript, site: Site): string {
-  if (!ts.isCallExpression(site.node)) return "This";
+/** A call of what is no function: a thing that lights do not have, or a name for something else. */
+function explainSkill(compiled: CompiledScript, site: Site, place: ProblemPlace): Problem {
+  if (!ts.isCallExpression(site.node)) return createProblem("not-a-function", { name: "This" }, place);
   const callee = site.node.expression;
-  const name = ts.isPropertyAccessExpression(callee) ? callee.name : callee;
-  return name.getText(compiled.file);
+  if (!ts.isPropertyAccessExpression(callee)) return createProblem("not-a-function", { name: callee.getText(compiled.file) }, place);
+  const owner = callee.expression.getText(compiled.file);
+  const isShort = owner.length <= 20 && !owner.includes("\n");
+  return createProblem("unknown-skill", { owner: isShort ? `\`${owner}\`` : "This", name: callee.name.text, skills: "Check what it is, and what it can do." }, place);
 }

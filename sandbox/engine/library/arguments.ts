@@ -68,7 +68,7 @@ export function call(callback: Callback, first: unknown, second: unknown): unkno
   state.callbackDepth++;
   const run = callback as (...values: unknown[]) => unknown;
   const named = callback.length;
-  const answer = named === 0 ? run() : named === 1 ? run(first) : run(first, second);
+  const answer = named === 1 ? run(first) : named === 0 ? run() : run(first, second);
   state.callbackDepth--;
   return answer;
 }

@@ -10,7 +10,8 @@ const HASH_START = 0x81_1c_9d_c5;
 const HASH_FACTOR = 0x01_00_01_93;
 /** More call sites than a script of 64 KiB can hold. */
 const SITE_RANGE = 0x1_00_00;
-const NO_COLOUR = 0xff_ff_ff_ff;
+/** The colour of a cue that names none. */
+export const NO_COLOUR = 0xff_ff_ff_ff;
 
 let words = new Uint32Array(FIRST_CUES * CUE_WORDS);
 let kept = 0;
@@ -37,7 +38,7 @@ function isSame(a: Uint16Array, b: Uint16Array): boolean {
 /** Index of a list of lights among those already used; the list is kept, not copied. */
 export function internSelection(lights: Uint16Array): number {
   let hash = HASH_START;
-  for (let i = 0; i < lights.length; i++) hash = Math.imul(hash ^ (lights[i] ?? 0), HASH_FACTOR);
+  for (let i = 0; i < lights.length; i++) hash = Math.imul(hash ^ (lights[i] as number), HASH_FACTOR);
   let bucket = selectionsByHash.get(hash);
   if (bucket === undefined) {
     bucket = [];
@@ -66,11 +67,11 @@ function chainBelow(parent: number, site: number): number {
 }
 
 function chainNow(): number {
-  const { frames } = state;
-  const depth = frames.depth();
+  const { callers, depth, site } = state.frames;
+  const count = depth();
   let chain = 0;
-  for (let i = 0; i < depth; i++) chain = chainBelow(chain, frames.callers[i] ?? 0);
-  return chainBelow(chain, frames.site());
+  for (let i = 0; i < count; i++) chain = chainBelow(chain, callers[i] as number);
+  return chainBelow(chain, site());
 }
 
 function grow(): void {
@@ -79,55 +80,44 @@ function grow(): void {
   words = larger;
 }
 
-/** What a cue sets; numbers as the timeline stores them. */
-export interface CueValues {
-  readonly action: number;
-  readonly level: number;
-  readonly length: number;
-  readonly colour: number;
+function failTooMuch(code: "too-many-cues" | "too-many-changes", limit: number): never {
+  return fail(written - stoodSince > STOOD_STILL_CUES ? "clock-stood-still" : code, { limit });
 }
 
-/** A cue's values; fields that the action does not have are 0 or no colour. */
-export function cueValues(action: number, level: number, length: number, colour: number = NO_COLOUR): CueValues {
-  return { action, level, length, colour };
-}
-
-/** Counts one write against the limits, whether or not it is kept. */
-function count(lights: number): void {
-  if (state.clock !== lastClock) {
-    lastClock = state.clock;
-    stoodSince = written;
-  }
-  written++;
-  changes += lights;
-  if (written > MAX_CUES)
-    fail(written - stoodSince > STOOD_STILL_CUES ? "clock-stood-still" : "too-many-cues", { limit: MAX_CUES });
-  if (changes > MAX_CHANGES) fail("too-many-changes", { limit: MAX_CHANGES });
-}
-
-/** Writes one cue at the clock (rule 12). `isQuiet`: nobody needs to hear that it came at the very end. */
-export function writeCue(selection: number, lights: number, values: CueValues, isQuiet: boolean): void {
+/**
+ * Writes one cue at the clock (rule 12). Fields that the action does not have are 0 or `NO_COLOUR`.
+ * `isQuiet`: nobody needs to hear that it came at the very end. Flat and without objects, since its
+ * steps count on every script's fuel.
+ */
+export function writeCue(selection: number, lights: number, action: number, level: number, length: number, colour: number, isQuiet: boolean): void {
   if (lights === 0) {
     notice("nothing-to-light");
     return;
   }
-  count(lights);
-  const tick = toTick(state.clock);
-  const end = toTick(state.tables.song.beats.length - 1);
-  if (tick >= end) {
-    if (tick > end || !isQuiet) notice("after-the-end");
+  const { clock, endTick } = state;
+  if (clock !== lastClock) {
+    lastClock = clock;
+    stoodSince = written;
+  }
+  changes += lights;
+  // What is dropped counts too: a loop that writes behind the end has to stop.
+  if (++written > MAX_CUES) failTooMuch("too-many-cues", MAX_CUES);
+  if (changes > MAX_CHANGES) failTooMuch("too-many-changes", MAX_CHANGES);
+  const tick = toTick(clock);
+  if (tick >= endTick) {
+    if (tick > endTick || !isQuiet) notice("after-the-end");
     return;
   }
-  if ((kept + 1) * CUE_WORDS > words.length) grow();
-  const at = kept * CUE_WORDS;
-  words[at] = tick;
-  words[at + 1] = values.action;
-  words[at + 2] = selection;
-  words[at + 3] = values.level;
-  words[at + 4] = values.length;
-  words[at + 5] = values.colour;
-  words[at + 6] = chainNow();
+  let at = kept * CUE_WORDS;
+  if (at === words.length) grow();
   kept++;
+  words[at] = tick;
+  words[++at] = action;
+  words[++at] = selection;
+  words[++at] = level;
+  words[++at] = length;
+  words[++at] = colour;
+  words[++at] = chainNow();
 }
 
 /**

@@ -1,6 +1,6 @@
 import { action, beats, call, number, tidy, whole, type Callback } from "./arguments.ts";
 import { parseColour } from "./colour.ts";
-import { cueValues, internSelection, writeCue, type CueValues } from "./cues.ts";
+import { NO_COLOUR, internSelection, writeCue } from "./cues.ts";
 import { drawBelow } from "./luck.ts";
 import { fail, notice, state } from "./state.ts";
 import { TICKS_PER_BEAT } from "../../../shared/units.ts";
@@ -15,18 +15,21 @@ const FULL = 100;
 /** Kept, since a script's realm has no `Symbol`. */
 const iterator: typeof Symbol.iterator = Symbol.iterator;
 const LONGEST_TICKS = 0xff_ff_ff_ff;
+/** Beats up to which a length needs no second look. */
+const LONGEST_PLAIN = 1_000_000;
 
+/** A level as stored; what lies outside is clamped with a warning (rule 17). */
 function level(word: string, value: unknown): number {
+  if (typeof value === "number" && value >= 0 && value <= FULL) return Math.round(value * 100);
   const asked = number(word, value, 0);
-  if (asked > FULL || asked < 0) {
-    const used = asked < 0 ? 0 : FULL;
-    notice("level-clamped", { used });
-    return used * 100;
-  }
-  return Math.round(asked * 100);
+  const used = asked < 0 ? 0 : FULL;
+  notice("level-clamped", { used });
+  return used * 100;
 }
 
+/** A length as stored. */
 function ticks(word: string, value: unknown, argument: number): number {
+  if (typeof value === "number" && value >= 0 && value <= LONGEST_PLAIN) return Math.round(value * TICKS_PER_BEAT);
   return Math.min(LONGEST_TICKS, Math.round(beats(word, value, argument) * TICKS_PER_BEAT));
 }
 
@@ -82,36 +85,36 @@ export class Lights {
     return this.#items[iterator]() as IterableIterator<Lights>;
   }
 
-  #write(values: CueValues, isQuiet = false): this {
-    if (this.#selection < 0 && this.#indexes.length > 0) this.#selection = internSelection(this.#indexes);
-    writeCue(this.#selection, this.#indexes.length, values, isQuiet);
+  #write(action: number, value: number, long: number, colour: number, isQuiet: boolean): this {
+    if (this.#selection < 0) this.#selection = this.#indexes.length === 0 ? 0 : internSelection(this.#indexes);
+    writeCue(this.#selection, this.#indexes.length, action, value, long, colour, isQuiet);
     return this;
   }
 
   on(asked: number = FULL): this {
     const value = level("on", asked);
-    return this.#write(cueValues(ON, value, 0), value === 0);
+    return this.#write(ON, value, 0, NO_COLOUR, value === 0);
   }
 
   off(): this {
-    return this.#write(cueValues(OFF, 0, 0), true);
+    return this.#write(OFF, 0, 0, NO_COLOUR, true);
   }
 
   fadeTo(asked: number, length: number): this {
     if (arguments.length < 2) fail("missing-value", { word: "fadeTo", count: 2, what: "a level and the beats", example: `fadeTo(${typeof asked === "number" ? tidy(asked) : 50}, 2)` });
     const value = level("fadeTo", asked);
-    return this.#write(cueValues(FADE, value, ticks("fadeTo", length, 1)), value === 0);
+    return this.#write(FADE, value, ticks("fadeTo", length, 1), NO_COLOUR, value === 0);
   }
 
   pulse(length: number, colour?: string): this {
     if (arguments.length < 1) fail("missing-value", { word: "pulse", count: 1, what: "the beats", example: "pulse(1)" });
     const long = ticks("pulse", length, 0);
-    return this.#write(colour === undefined ? cueValues(PULSE, 0, long) : cueValues(PULSE, 0, long, parseColour("pulse", colour, 1)));
+    return this.#write(PULSE, 0, long, colour === undefined ? NO_COLOUR : parseColour("pulse", colour, 1), false);
   }
 
   colour(colour: string, length: number = 0): this {
     if (arguments.length < 1) fail("missing-value", { word: "colour", count: 1, what: "a colour", example: 'colour("gold")' });
-    return this.#write(cueValues(COLOUR, 0, ticks("colour", length, 1), parseColour("colour", colour, 0)));
+    return this.#write(COLOUR, 0, ticks("colour", length, 1), parseColour("colour", colour, 0), false);
   }
 
   color(colour: string, length: number = 0): this {

@@ -72,6 +72,7 @@ export const library = {
   /** Takes the tables and closes the realm. */
   open(tables: string): void {
     state.tables = JSON.parse(tables) as GuestTables;
+    state.endTick = toTick(state.tables.song.beats.length - 1);
     harden(draw, [words, marks, Lights, Front, Section, Stop]);
   },
   /** Runs the marked script to its end or to its first problem. */

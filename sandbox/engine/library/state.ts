@@ -19,6 +19,8 @@ interface RunState {
   frames: ScriptFrames;
   /** Beats; never rounded. */
   clock: number;
+  /** The song's end. */
+  endTick: number;
   /** Callbacks of the library running inside each other. */
   callbackDepth: number;
   failure: GuestFailure | null;
@@ -41,6 +43,7 @@ export const state: RunState = {
   },
   frames: { site: () => 0, callers: [], depth: () => 0 },
   clock: 0,
+  endTick: 0,
   callbackDepth: 0,
   failure: null,
   notes: [],

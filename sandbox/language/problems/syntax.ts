@@ -12,10 +12,11 @@ export const SYNTAX_PROBLEMS = defineEntries({
   "curly-quotes": { sentence: "These quotes are of the wrong kind.", hint: 'Use straight ones: `"`.' },
   "else-alone": { sentence: "This `else` has no `if` before it.", hint: "Close the braces of the `if` first." },
   "const-without-value": { sentence: "A `const` needs a value when you make it.", hint: "`const {name} = 1;`" },
-  "wrong-place": { sentence: "`{word}` can not stand here.", hint: "{try}" },
   unreadable: { sentence: "I can not read this line.", hint: "Look for a missing comma, quote or bracket." },
   "one-equals": { sentence: "One `=` puts a value in. It does not compare.", hint: "Write `===`." },
   "unused-list": { sentence: "`{name}` makes a new list. Nothing uses it here.", hint: "`{example}`" },
   "unused-answer": { sentence: "You work out a sum here, but nothing keeps the answer.", hint: "`{example}`" },
-  "empty-loop": { sentence: "The `;` ends this loop, so it does nothing.", hint: "Take out the `;` before the braces." },
+  "unused-name": { sentence: "`{name}` stands here alone and does nothing.", hint: "Use it, or take it out." },
+  "two-steps": { sentence: "Two steps stand on one line.", hint: "Put `;` between them, or a new line." },
+  "empty-loop": { sentence: "The `;` ends this {what}, so it does nothing.", hint: "Take out the `;` before the braces." },
 });
