@@ -16,7 +16,7 @@ export function Skeleton({ shape = "line", className }: SkeletonProps) {
       className={joinClasses(
         "block skeleton",
         shape === "line" && "h-[0.8em]",
-        shape === "ribbon" && "h-[58px] bg-thread ribbon-ends [--sweep:var(--color-thread-lit)]",
+        shape === "ribbon" && "h-[58px] bare-weave ribbon-ends [--sweep:var(--color-thread-lit)]",
         className,
       )}
     />
