@@ -78,9 +78,9 @@ export function createSessions(db: Db, clock: Clock, options: { isSecure: boolea
     if (clock.now() >= endsAt) return null;
     return {
       sessionId: hashToken(token),
-      userId: user.id as UserId,
+      userId: user.id,
       displayName: user.displayName,
-      schoolId: user.schoolId as SchoolId | null,
+      schoolId: user.schoolId,
       roles,
       endsAt,
       idleEndsAt: Math.min(session.idleEndsAt, endsAt),
@@ -142,9 +142,8 @@ function dropOldest(db: Db, userId: string): void {
     .from(sessions)
     .where(eq(sessions.userId, userId))
     .orderBy(desc(sessions.createdAt))
-    .limit(-1)
-    .offset(SESSIONS_PER_PERSON)
-    .all();
+    .all()
+    .slice(SESSIONS_PER_PERSON);
   if (old.length > 0)
     db.delete(sessions)
       .where(
