@@ -1,4 +1,5 @@
 import { beforeAll, describe, expect, it } from "vitest";
+import { checkShow, hasStop } from "../../../../../sandbox/checks/index.ts";
 import { createEngine } from "../../../../../sandbox/engine/engine.ts";
 import type { Engine } from "../../../../../sandbox/engine/engine.ts";
 import type { RunOutcome } from "../../../../../sandbox/engine/model.ts";
@@ -47,5 +48,21 @@ describe("findings that the demo shows", () => {
     ["too-bright", "level-clamped"], ["much-too-long", "after-the-end"], ["stairs", "level-clamped"],
   ])("%s has %s", async (id, rule) => {
     expect(await rules(id)).toContain(rule);
+  });
+});
+
+describe("the show check of the demo's shows", () => {
+  async function stops(script: DemoScript): Promise<string[]> {
+    const outcome = await run(script);
+    if (!outcome.ok) return ["does-not-run"];
+    const findings = checkShow({ timeline: outcome.timeline, layout: DEMO_SQUARE, song: demoSong(script.songId).beatMap });
+    return hasStop(findings) ? findings.filter((finding) => finding.severity === "stop").map((finding) => finding.rule) : [];
+  }
+
+  const STOPPED: { readonly [id: string]: string } = { lightning: "street-flash", "empty-page": "nothing-lit" };
+
+  it.each(rows.filter(([, script]) => script.expected.runs))("%s", async (_, script) => {
+    const wanted = STOPPED[script.id];
+    expect([...new Set(await stops(script))]).toEqual(wanted === undefined ? [] : [wanted]);
   });
 });

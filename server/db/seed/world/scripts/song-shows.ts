@@ -7,7 +7,7 @@ export const SONG_SHOWS: readonly DemoScript[] = [
     id: "nine-foxes", title: "Nine Foxes", songId: "quillhaven-bells", authors: ["7B-TARN/wren", "7B-TARN/idris"], lesson: 10, about: "The demo's best-known show: forwarded, approved, on Friday night.",
     source: `
 // Nine foxes run round the square, each one faster.
-const trail = square.side("north").and(square.side("east"));
+const trail = square.fronts.first(20);
 const drums = song.hits("drums", song.section("bridge"));
 
 function fox(turn) {
@@ -22,12 +22,14 @@ repeat(9, (turn) => {
 });
 
 // where the foxes live, the street breathes
-at(song.section("chorus").bars, () => {
-  square.side("south").colour("darkorange").fadeTo(70, 2);
-  wait(2);
-  square.side("south").fadeTo(20, 2);
-});
-at(song.section("chorus").end, () => square.side("south").fadeTo(0, 4));
+for (const nth of [1, 2]) {
+  at(song.section("chorus", nth).bars, () => {
+    square.side("south").colour("darkorange").fadeTo(70, 2);
+    wait(2);
+    square.side("south").fadeTo(20, 2);
+  });
+  at(song.section("chorus", nth).end, () => square.side("south").fadeTo(0, 4));
+}
 
 // they come back for the last chorus
 repeat(7, (turn) => {
@@ -113,8 +115,7 @@ at(song.section("ending").start, () => {
     id: "two-trains", title: "Two Trains", songId: "jingle-bells", authors: ["7B-TARN/june"], lesson: 10, about: "Two things at once with together.",
     source: `
 // one train leaves the north, one leaves the south. where do they meet?
-const up = square.side("north").and(square.side("east"));
-const down = square.side("south").and(square.side("west"));
+const [up, down] = square.fronts.split(2);
 
 function train(track, colour, pace) {
   for (const front of track) {
@@ -124,8 +125,8 @@ function train(track, colour, pace) {
   }
 }
 
-repeat(8, (turn) => {
-  const pace = turn % 2 === 0 ? 1 : 0.75;
+repeat(9, (turn) => {
+  const pace = turn % 2 === 0 ? 1 : 0.75; // every second one is an express
   together(
     () => train(up, "tomato", pace),
     () => train(down.reversed(), "gold", 1),
@@ -243,15 +244,15 @@ at(song.section("ending").start, () => ice.fadeTo(0, 14));
     source: `
 // the ferry leaves the boathouse and crosses to the cinema
 const bar = song.beatsPerBar;
-const route = square.side("west").reversed().and(square.side("north"));
+const route = [...square.side("west").reversed(), ...square.side("north")];
 
-function sail(path: Lights, beats: number) {
+function sail(path: Front[], beats: number) {
   const step = beats / path.length;
-  path.inTurn(step, (front) => {
+  for (const front of path) {
     front.colour("deepskyblue", 1);
     front.fadeTo(65, 1);
-  });
-  wait(beats);
+    wait(step);
+  }
 }
 
 function horn() {
@@ -264,8 +265,10 @@ horn();
 sail(route, 12 * bar);
 horn();
 wait(2 * bar);
-route.reversed().inTurn(1, (front) => front.fadeTo(0, 4));
-wait(6 * bar);
+for (let i = route.length - 1; i >= 0; i--) {
+  route[i].fadeTo(0, 4);
+  wait(1);
+}
 for (const mark of [song.bar(24), song.bar(28), song.bar(32)]) {
   at(mark, () => {
     square.front("town hall").part("strip").colour("gold").fadeTo(80, bar);
