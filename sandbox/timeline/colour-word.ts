@@ -18,7 +18,7 @@ const HUES: readonly (readonly [number, string])[] = [
   [56, "gold"],
   [70, "yellow"],
   [160, "green"],
-  [195, "turquoise"],
+  [190, "turquoise"],
   [255, "blue"],
   [290, "violet"],
   [345, "pink"],

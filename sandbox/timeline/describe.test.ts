@@ -74,7 +74,7 @@ describe("listSongSpans", () => {
 
 describe("nameColour", () => {
   it("gives the everyday word of colours that scripts name", () => {
-    const words = { "#ff0000": "red", "#ffa500": "orange", "#ffd700": "gold", "#ffff00": "yellow", "#008000": "green", "#40e0d0": "turquoise", "#0000ff": "blue", "#ee82ee": "pink", "#ffffff": "white", "#000000": "black", "#add8e6": "light turquoise" };
+    const words = { "#ff0000": "red", "#ffa500": "orange", "#ffd700": "gold", "#ffff00": "yellow", "#008000": "green", "#40e0d0": "turquoise", "#0000ff": "blue", "#ee82ee": "pink", "#ffffff": "white", "#000000": "black", "#add8e6": "light blue" };
     for (const [hex, word] of Object.entries(words)) expect([hex, nameColour(Number.parseInt(hex.slice(1), 16))]).toEqual([hex, word]);
   });
 });
