@@ -1,6 +1,6 @@
 import { and, eq, lt } from "drizzle-orm";
 import type { Clock } from "../clock.ts";
-import type { Db } from "../db/connection.ts";
+import { type Db, inTransaction } from "../db/connection.ts";
 import { idempotencyKeys } from "../db/schema/index.ts";
 
 export interface KeptAnswer {
@@ -13,6 +13,8 @@ export interface KeptAnswer {
 export interface AnswerStore {
   find(userId: string, key: string): KeptAnswer | null;
   keep(userId: string, key: string, answer: KeptAnswer): void;
+  /** Runs `work` in one transaction of the same database, so that writes and their answer stand or fall together. */
+  transact<T>(work: () => T): T;
   /** Forgets what is older than two days; a retry never comes that late. */
   prune(): void;
 }
@@ -31,18 +33,12 @@ export function createAnswerStore(db: Db, clock: Clock): AnswerStore {
       return row ? { requestHash: row.requestHash, status: row.status, body: row.response } : null;
     },
     keep(userId, key, answer) {
+      const { requestHash, status, body } = answer;
       db.insert(idempotencyKeys)
-        .values({
-          userId,
-          key,
-          requestHash: answer.requestHash,
-          status: answer.status,
-          response: answer.body,
-          createdAt: clock.now(),
-        })
-        .onConflictDoNothing()
+        .values({ userId, key, requestHash, status, response: body, createdAt: clock.now() })
         .run();
     },
+    transact: (work) => inTransaction(db, work),
     prune() {
       db.delete(idempotencyKeys)
         .where(lt(idempotencyKeys.createdAt, clock.now() - KEEP_MS))

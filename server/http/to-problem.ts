@@ -1,4 +1,5 @@
 import { ProblemError } from "../../shared/problem.ts";
+import { RunPoolClosedError, RunQueueFullError } from "../runs/run-pool.ts";
 
 /** Codes of SQLite that mean "try again": another connection holds the lock. */
 const BUSY_CODES: ReadonlySet<unknown> = new Set(["SQLITE_BUSY", "SQLITE_BUSY_SNAPSHOT", "SQLITE_LOCKED"]);
@@ -6,7 +7,7 @@ const BUSY_RETRY_SECONDS = 2;
 
 /**
  * Gives the problem that answers a thrown value: problems as they are, unreadable requests of the
- * body parser and the router as 4xx, a locked database as `busy`, and null for everything else,
+ * body parser and the router as 4xx, a locked database or a full run queue as `busy`, and null for everything else,
  * which is a bug.
  */
 export function toProblem(error: unknown): ProblemError | null {
@@ -20,7 +21,7 @@ export function toProblem(error: unknown): ProblemError | null {
   if (typeof status === "number" && status >= 400 && status < 500) {
     return new ProblemError("malformed-request", { cause: error });
   }
-  if (BUSY_CODES.has(code)) {
+  if (BUSY_CODES.has(code) || error instanceof RunQueueFullError || error instanceof RunPoolClosedError) {
     return new ProblemError("busy", { extensions: { retryAfterSeconds: BUSY_RETRY_SECONDS }, cause: error });
   }
   return null;
