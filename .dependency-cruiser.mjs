@@ -81,8 +81,15 @@ export default {
       name: "virtual-machine-only-in-workers",
       comment: "An endless loop must never freeze a tab or the server: the engine runs behind a thread that can be ended.",
       severity: "error",
-      from: { path: "^(src|server)/", pathNot: `\\.worker\\.ts$|${testFiles}` },
+      from: { path: "^(src|server)/", pathNot: `\\.worker\\.ts$|^server/runs/node-host\\.ts$|${testFiles}` },
       to: { path: "^node_modules/(quickjs-emscripten-core|@jitl)/" },
+    },
+    {
+      name: "node-host-only-in-workers",
+      comment: "It holds the virtual machine: as above.",
+      severity: "error",
+      from: { path: "^server/", pathNot: `\\.worker\\.ts$|${testFiles}` },
+      to: { path: "^server/runs/node-host\\.ts$" },
     },
   ],
   options: {

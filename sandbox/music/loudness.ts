@@ -1,4 +1,4 @@
-import type { Score } from "./score.ts";
+import type { Score } from "../../shared/contracts/songs.ts";
 
 /** Seconds in which a struck sound falls to about a third. */
 const DECAY_SECONDS = 1.2;

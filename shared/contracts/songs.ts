@@ -61,21 +61,30 @@ export const BeatMapSchema = z.object({
 });
 export type BeatMap = z.infer<typeof BeatMapSchema>;
 
-/** What playback needs of a score: one track an instrument, in seconds from the start of the audio. */
-export const ScoreSchema = z.object({
-  tracks: z.array(
-    z.object({
-      instrument: z.string(),
-      /** General MIDI programme 0 to 127; drums are `isDrums`. */
-      programme: z.int().min(0).max(127),
-      isDrums: z.boolean(),
-      notes: z.array(
-        z.object({ seconds: z.number().min(0), length: z.number().positive(), pitch: z.int().min(0).max(127), velocity: z.number().min(0).max(1) }),
-      ),
-    }),
-  ),
-  seconds: z.number().positive(),
+/** A note as it is played: times in seconds from the start of the audio. */
+export const ScoreNoteSchema = z.object({
+  start: z.number().min(0),
+  lasts: z.number().min(0),
+  /** MIDI key number: 60 is middle C, 69 is A at 440 Hz. */
+  pitch: z.int().min(0).max(127),
+  velocity: z.number().min(0).max(1),
 });
+export type ScoreNote = z.infer<typeof ScoreNoteSchema>;
+
+export const ScoreTrackSchema = z.object({
+  /** The instrument's name, as scripts know it. */
+  name: z.string(),
+  /** General MIDI program (0 to 127), when the file names one. */
+  program: z.int().min(0).max(127).nullable(),
+  /** Drum notes name a drum by their pitch, not a tone. */
+  isDrums: z.boolean(),
+  /** Sorted by start, then pitch. */
+  notes: z.array(ScoreNoteSchema),
+});
+export type ScoreTrack = z.infer<typeof ScoreTrackSchema>;
+
+/** What playback needs of a song: a track an instrument, and when the last note ends. */
+export const ScoreSchema = z.object({ seconds: z.number().min(0), tracks: z.array(ScoreTrackSchema) });
 export type Score = z.infer<typeof ScoreSchema>;
 
 export const SongSummarySchema = z.object({

@@ -13,7 +13,7 @@ export function listSongSummaries(db: Db): SongSummary[] {
 /** A song with what scripts read of it and what playback needs. Throws `not-found`. */
 export function getSongToPlay(db: Db, songId: string): { song: SongSummary; beatMap: BeatMap; score: Score } {
   const song = getSong(db, songId);
-  return { song: presentSong(song), beatMap: song.beatMap, score: presentScore(getSongFile(db, songId).bytes) };
+  return { song: presentSong(song), beatMap: song.beatMap, score: buildScore(readMidi(getSongFile(db, songId).bytes)) };
 }
 
 function presentSong(song: SongRow): SongSummary {
@@ -30,23 +30,5 @@ function presentSong(song: SongRow): SongSummary {
     beatsPerBar: beatMap.beatsPerBar,
     sections: beatMap.sections.map((section) => section.name),
     instruments: beatMap.instruments.map((instrument) => instrument.name),
-  };
-}
-
-/** General MIDI programme 0 (a piano) where the file names none. */
-const NO_PROGRAMME = 0;
-
-function presentScore(midi: Uint8Array): Score {
-  const score = buildScore(readMidi(midi));
-  return {
-    seconds: score.seconds,
-    tracks: score.tracks.map((track) => ({
-      instrument: track.name,
-      programme: track.program ?? NO_PROGRAMME,
-      isDrums: track.isDrums,
-      notes: track.notes
-        .filter((note) => note.lasts > 0)
-        .map((note) => ({ seconds: note.start, length: note.lasts, pitch: note.pitch, velocity: note.velocity })),
-    })),
   };
 }

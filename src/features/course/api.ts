@@ -1,4 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
+import type { EndpointResponse } from "../../../shared/contract.ts";
 import { courseContract } from "../../../shared/contracts/course.ts";
 import { callApi } from "../../lib/api-client.ts";
 
@@ -6,6 +7,8 @@ export const lessonsQuery = queryOptions({
   queryKey: ["course", "lessons"],
   queryFn: async ({ signal }) => (await callApi(courseContract.lessons, {}, signal)).lessons,
 });
+
+export type LessonDetail = EndpointResponse<typeof courseContract.lesson>;
 
 export const lessonQuery = (lessonId: string) =>
   queryOptions({

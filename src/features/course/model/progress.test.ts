@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { LessonSummary } from "../../../../shared/contracts/course.ts";
-import { findNextLesson, stepsDone } from "./progress.ts";
+import { findNextLesson, findStepIndex, stepsDone } from "./progress.ts";
 
 const lesson = (number: number, done: readonly boolean[]): LessonSummary => ({
   id: `lesson-${number}`,
@@ -27,5 +27,13 @@ describe("findNextLesson", () => {
 
   it("gives nothing when all are done", () => {
     expect(findNextLesson([lesson(1, [true])])).toBeUndefined();
+  });
+});
+
+describe("findStepIndex", () => {
+  it("opens the step asked for, else the first open one, else the last", () => {
+    expect(findStepIndex(lesson(1, [true, false, false]), "step-2")).toBe(2);
+    expect(findStepIndex(lesson(1, [true, false, false]), null)).toBe(1);
+    expect(findStepIndex(lesson(1, [true, true]), "gone")).toBe(1);
   });
 });

@@ -11,3 +11,9 @@ export function findNextLesson(lessons: readonly LessonSummary[]): LessonSummary
   const open = lessons.filter((lesson) => stepsDone(lesson) < lesson.steps.length).sort((a, b) => a.number - b.number);
   return open.find((lesson) => lesson.steps.some((step) => step.isDone)) ?? open[0];
 }
+
+/** Index of the step asked for; without one, or for one that is not there, the step the pupil is at. */
+export function findStepIndex(lesson: LessonSummary, stepId: string | null): number {
+  const asked = lesson.steps.findIndex((step) => step.id === stepId);
+  return asked === -1 ? Math.min(stepsDone(lesson), lesson.steps.length - 1) : asked;
+}

@@ -1,4 +1,4 @@
-import type { Score } from "../../../../sandbox/music/score.ts";
+import type { Score } from "../../../../shared/contracts/songs.ts";
 import { numbersFrom } from "../../../../sandbox/square/stable-chance.ts";
 import { DrumKit } from "./drum-kit.ts";
 import { findFamily } from "./instrument-family.ts";

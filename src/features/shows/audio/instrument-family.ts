@@ -1,4 +1,4 @@
-import type { ScoreTrack } from "../../../../sandbox/music/score.ts";
+import type { ScoreTrack } from "../../../../shared/contracts/songs.ts";
 
 /** How a track sounds. */
 export const FAMILIES = ["bells", "piano", "bass", "strings", "flute", "brass", "plucked", "drums"] as const;

@@ -1,4 +1,4 @@
-import type { Score, ScoreNote } from "../../../../sandbox/music/score.ts";
+import type { Score, ScoreNote } from "../../../../shared/contracts/songs.ts";
 
 /** A note with the track that plays it. */
 export interface QueuedNote extends ScoreNote {

@@ -1,4 +1,4 @@
-import type { Score } from "../../../../sandbox/music/score.ts";
+import type { Score } from "../../../../shared/contracts/songs.ts";
 import { Ensemble } from "./ensemble.ts";
 import { HeardClock, type AudioTime } from "./heard-clock.ts";
 import { NoteQueue } from "./note-queue.ts";

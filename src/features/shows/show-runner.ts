@@ -1,0 +1,39 @@
+import * as Comlink from "comlink";
+import type { Finding, RunInput, RunOutcome } from "../../../sandbox/engine/model.ts";
+import type { Timeline } from "../../../sandbox/timeline/model.ts";
+import { RunClient } from "../../lib/run-client.ts";
+import type { CheckWorker } from "../../workers/check.worker.ts";
+
+/** What does not change from one run of a show to the next. */
+export type ShowSetting = Omit<RunInput, "source">;
+
+/**
+ * Runs and checks the scripts of one show, each in a worker of its own. `dispose` ends both.
+ */
+export class ShowRunner {
+  readonly #setting: ShowSetting;
+  readonly #runs = new RunClient();
+  readonly #checker: Worker;
+  readonly #checks: Comlink.Remote<CheckWorker>;
+
+  constructor(setting: ShowSetting) {
+    this.#setting = setting;
+    this.#checker = new Worker(new URL("../../workers/check.worker.ts", import.meta.url), { type: "module", name: "check" });
+    this.#checks = Comlink.wrap<CheckWorker>(this.#checker);
+  }
+
+  /** The outcome of a script; the latest wins. Bound, so that it can be passed on. */
+  readonly runScript = (source: string): Promise<RunOutcome> => this.#runs.run({ ...this.#setting, source });
+
+  /** Findings of the show check on a timeline of this setting. Bound. */
+  readonly checkShow = (timeline: Timeline): Promise<readonly Finding[]> => {
+    const { layout, song } = this.#setting;
+    return this.#checks.check({ timeline, layout, song });
+  };
+
+  dispose(): void {
+    this.#runs.dispose();
+    this.#checks[Comlink.releaseProxy]();
+    this.#checker.terminate();
+  }
+}
