@@ -5,7 +5,7 @@ import type { Engine } from "../sandbox/engine/engine.ts";
 import type { RunOutcome } from "../sandbox/engine/model.ts";
 import { demoSong } from "../server/db/seed/world/songs/demo-songs.ts";
 import { DEMO_SQUARE } from "../server/db/seed/world/square.ts";
-import { createNodeHost } from "../server/runs/node-host.ts";
+import { createNodeHost } from "../server/runs/node-host.worker.ts";
 import type { CheckResult } from "../shared/contracts/course.ts";
 import { countText, readingGrade } from "../shared/reading-grade.ts";
 import { LESSONS } from "./index.ts";

@@ -3,7 +3,7 @@ import { checkShow, hasStop } from "../../../../../sandbox/checks/index.ts";
 import { createEngine } from "../../../../../sandbox/engine/engine.ts";
 import type { Engine } from "../../../../../sandbox/engine/engine.ts";
 import type { RunOutcome } from "../../../../../sandbox/engine/model.ts";
-import { createNodeHost } from "../../../../runs/node-host.ts";
+import { createNodeHost } from "../../../../runs/node-host.worker.ts";
 import { demoStudent } from "../people.ts";
 import { demoSong } from "../songs/demo-songs.ts";
 import { DEMO_SQUARE } from "../square.ts";

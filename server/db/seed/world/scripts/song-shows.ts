@@ -50,14 +50,16 @@ for (const front of north) {
   front.pulse(1, "gold");
   wait(1);
 }
+
+function breathe(turn) {
+  north.colour(turn % 2 === 0 ? "gold" : "tomato");
+  square.all.fadeTo(80, 2);
+  wait(2);
+  square.all.fadeTo(25, 2);
+}
+
 for (const nth of [1, 2, 3]) {
-  const chorus = song.section("chorus", nth);
-  at(chorus.bars, (turn) => {
-    square.side("north").colour(turn % 2 === 0 ? "gold" : "tomato");
-    square.all.fadeTo(80, 2);
-    wait(2);
-    square.all.fadeTo(25, 2);
-  });
+  at(song.section("chorus", nth).bars, breathe);
 }
 for (const nth of [1, 2]) {
   at(song.section("verse", nth).bars, () => {
@@ -279,7 +281,7 @@ for (const mark of [song.bar(24), song.bar(28), song.bar(32)]) {
 `,
   }),
   written({
-    id: "the-long-hallway", title: "The Long Hallway", songId: "good-king-wenceslas", authors: ["7K-QUILL/otto"], lesson: 9, about: "Splits the square in two halves that meet.",
+    id: "the-long-hallway", title: "The Long Hallway", songId: "good-king-wenceslas", authors: ["7K-QUILL/jasper"], lesson: 9, about: "Splits the square in two halves that meet.",
     source: `
 const [left, right] = square.fronts.split(2);
 const doors = square.parts("door");
