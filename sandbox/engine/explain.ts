@@ -20,7 +20,8 @@ export function explainFailure(compiled: CompiledScript, result: RuntimeResult):
   if (failure === null) return null;
   if (failure.code === "engine") return explainEngine(compiled, site, failure);
   if (failure.code === "thrown") return explainThrown(compiled, site, failure);
-  return explainLibrary(compiled, site, failure);
+  const meant = failure.site === undefined ? site : (compiled.marked.sites[failure.site] ?? site);
+  return explainLibrary(compiled, meant, failure);
 }
 
 function scriptSite(compiled: CompiledScript): Site {
@@ -91,6 +92,9 @@ function nodeAt(file: ts.SourceFile, offset: number): ts.Node {
 function placeInStack(compiled: CompiledScript, stack: string): ProblemPlace | null {
   const start = offsetInStack(compiled, stack);
   if (start < 0) return null;
+  const node = nodeAt(compiled.file, start);
+  // The engine points at the bracket of a call; its name says more.
+  if (compiled.text.charAt(start) === "(" && ts.isCallExpression(node)) return placeOfCall(compiled, node);
   const word = /^[\w$.]+/.exec(compiled.text.slice(start))?.[0] ?? compiled.text.slice(start, start + 1);
   return { range: toRange(compiled.file, start, start + word.length), excerpt: toExcerpt(compiled.text, start, start + word.length) };
 }
@@ -100,12 +104,16 @@ function placeOfSite(compiled: CompiledScript, site: Site): ProblemPlace {
   const { file } = compiled;
   if (site.kind === "loop") return headOf(compiled, site.node);
   if (site.kind === "function") return headOf(compiled, nameOf(site.node) ?? site.node);
-  if (!ts.isCallExpression(site.node)) return headOf(compiled, site.node);
-  const callee = site.node.expression;
+  if (site.kind === "item") return placeOf(file, site.node);
+  return ts.isCallExpression(site.node) ? placeOfCall(compiled, site.node) : headOf(compiled, site.node);
+}
+
+function placeOfCall({ file, text }: CompiledScript, node: ts.CallExpression): ProblemPlace {
+  const callee = node.expression;
   const start = ts.isPropertyAccessExpression(callee) ? callee.name.getStart(file) : callee.getStart(file);
-  const line = compiled.text.indexOf("\n", start);
-  const end = line >= 0 && line < site.node.end ? callee.end : site.node.end;
-  return { range: toRange(file, start, end), excerpt: toExcerpt(compiled.text, start, end) };
+  const line = text.indexOf("\n", start);
+  const end = line >= 0 && line < node.end ? callee.end : node.end;
+  return { range: toRange(file, start, end), excerpt: toExcerpt(text, start, end) };
 }
 
 function nameOf(node: ts.Node): ts.Node | undefined {

@@ -70,6 +70,8 @@ export interface GuestFailure {
   readonly values: { readonly [name: string]: string | number };
   /** Which argument of the call is meant, from 0. */
   readonly argument?: number;
+  /** The site that is meant, when it is not the last call. */
+  readonly site?: number;
   /** Name and message of the engine's error. */
   readonly name?: string;
   readonly message?: string;

@@ -13,9 +13,9 @@ import { GLOBAL_WORDS, MARK_PREFIX } from "./words.ts";
  * caller's site back on every way out; since scripts have no `try`, a throw needs none.
  */
 
-/** What a call site is: a call, a loop or a function. Index 0 is the script itself. */
+/** What a site is: a call, a loop, a function, or a place of a list. Index 0 is the script itself. */
 export interface Site {
-  readonly kind: "script" | "call" | "loop" | "function";
+  readonly kind: "script" | "call" | "loop" | "function" | "item";
   readonly node: ts.Node;
   /** Line from 1. */
   readonly line: number;
@@ -219,13 +219,14 @@ class Marker {
 
   /** `list[i].on()`: a place that the list does not have gets a problem of its own. */
   #writeItem(node: ts.ElementAccessExpression, frame: Frame | null): void {
+    const id = this.#site("item", node);
     this.writer.put(`${M}i(`);
     this.write(node.expression, frame);
     this.writer.copyTo(bracketOf(node, this.#file));
     this.writer.replaceSign(",");
     this.write(node.argumentExpression, frame);
     this.writer.copyTo(node.end - 1);
-    this.writer.replaceSign(")");
+    this.writer.replaceSign(`,${id})`);
   }
 
   #noteLoop(node: ts.Node, condition: ts.Expression): void {

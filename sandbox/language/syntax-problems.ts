@@ -84,19 +84,25 @@ function openQuote(line: string): number {
 
 const elseAlone: Explain = (fault) => (fault.code === STATEMENT_EXPECTED && fault.token === "else" ? here(fault, "else-alone") : null);
 
-const numberFirst: Explain = (fault) =>
-  fault.code === NAME_AFTER_NUMBER || /^\d/.test(madeName(fault)) ? here(fault, "number-first") : null;
+const numberFirst: Explain = (fault) => {
+  const made = madeName(fault);
+  const name = /^\d\w*/.exec(made.text)?.[0];
+  if (name !== undefined) return { code: "number-first", values: {}, start: made.at, end: made.at + name.length };
+  return fault.code === NAME_AFTER_NUMBER ? here(fault, "number-first") : null;
+};
 
 /** What stands where a `let`, `const` or `function` has its name; the parser may point at either. */
-function madeName({ before, after }: Fault): string {
-  if (/\b(let|const|function)\s+$/.test(before)) return after;
-  return /^(?:let|const|function)\s+([^]*)$/.exec(after)?.[1] ?? "";
+function madeName({ before, after, start }: Fault): { readonly text: string; readonly at: number } {
+  if (/\b(let|const|function)\s+$/.test(before)) return { text: after, at: start };
+  const word = /^(?:let|const|function)\s+/.exec(after)?.[0].length;
+  return word === undefined ? { text: "", at: start } : { text: after.slice(word), at: start + word };
 }
 
 const reservedName: Explain = (fault) => {
   if (fault.code === RESERVED_WORD || fault.code === RESERVED_VARIABLE) return here(fault, "taken-word", { name: fault.token });
-  const name = /^\w+/.exec(madeName(fault))?.[0] ?? "";
-  return RESERVED.has(name) ? here(fault, "taken-word", { name }) : null;
+  const made = madeName(fault);
+  const name = /^\w+/.exec(made.text)?.[0] ?? "";
+  return RESERVED.has(name) ? { code: "taken-word", values: { name }, start: made.at, end: made.at + name.length } : null;
 };
 
 const unquotedName: Explain = ({ text, start }) => {

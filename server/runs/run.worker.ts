@@ -3,7 +3,7 @@ import { createEngine } from "../../sandbox/engine/engine.ts";
 import { createStoppedOutcome } from "../../sandbox/engine/stopped.ts";
 import type { RunOutcome } from "../../sandbox/engine/model.ts";
 import type { RunRequest, ThreadMessage, TimedOutcome } from "./messages.ts";
-import { createNodeHost } from "./node-host.ts";
+import { createNodeHost } from "./node-host.worker.ts";
 
 /** One thread that runs scripts, one after the other. It has no way to end itself: its parent does that. */
 const port = parentPort;

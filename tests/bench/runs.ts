@@ -7,7 +7,7 @@ import { createEngine } from "../../sandbox/engine/engine.ts";
 import type { GuestTables } from "../../sandbox/engine/guest.ts";
 import type { RunInput } from "../../sandbox/engine/model.ts";
 import { buildTables, listNames } from "../../sandbox/engine/tables.ts";
-import { createNodeHost } from "../../server/runs/node-host.ts";
+import { createNodeHost } from "../../server/runs/node-host.worker.ts";
 import { demoSong } from "../../server/db/seed/world/songs/demo-songs.ts";
 import { DEMO_SQUARE } from "../../server/db/seed/world/square.ts";
 import { type Figure, timeInTurns } from "./measure.ts";

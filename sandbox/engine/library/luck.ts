@@ -3,7 +3,8 @@ import { state } from "./state.ts";
 /**
  * Luck: one sfc32 stream for each statement of the script, keyed by the seed and by the statement's
  * own tokens, so that adding a roll leaves the others alone (rules 26 and 27).
- * Source: sfc32 (small fast counter, 32 bits) from Chris Doty-Humphrey's PractRand, twelve rounds of warm-up.
+ * Source: sfc32 (small fast counter, 32 bits) from Chris Doty-Humphrey's PractRand, written from memory
+ * like its twelve rounds of warm-up; the test has a second version in whole numbers.
  */
 const WARM_UP_ROUNDS = 12;
 const streams: (Uint32Array | undefined)[] = [];

@@ -59,6 +59,12 @@ export function fail(code: string, values: { readonly [name: string]: string | n
   throw new Stop();
 }
 
+/** Stops the script with a problem at a site that is not a call. */
+export function failAt(site: number, code: string, values: { readonly [name: string]: string | number }): never {
+  state.failure ??= { code, values, site };
+  throw new Stop();
+}
+
 /** The tick of a moment: rounded once, here. */
 export function toTick(moment: number): number {
   return Math.round(moment * TICKS_PER_BEAT);
