@@ -1,0 +1,154 @@
+import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
+import { lazy, Suspense, useMemo } from "react";
+import { useNavigate, useParams, type LoaderFunctionArgs } from "react-router";
+import { decodeRibbon } from "../../sandbox/timeline/ribbon.ts";
+import { describeShow } from "../../sandbox/timeline/describe.ts";
+import type { HandInResult } from "../../shared/contracts/assignments.ts";
+import type { BeatMap, Score } from "../../shared/contracts/songs.ts";
+import type { ShowDetail } from "../../shared/contracts/shows.ts";
+import type { Layout } from "../../shared/contracts/square.ts";
+import { type AssignmentId, ShowIdSchema, type ShowId, type VersionId } from "../../shared/ids.ts";
+import { Page } from "../components/page.tsx";
+import { QueryView } from "../components/query-view.tsx";
+import { showToast } from "../components/toast-queue.ts";
+import { assignmentQuery, useHandIn } from "../features/assignments/api.ts";
+import { describeHandIn } from "../features/assignments/model/hand-in.ts";
+import { sessionQuery } from "../features/auth/api.ts";
+import { showQuery, versionQuery } from "../features/shows/api.ts";
+import { DraftSaver } from "../features/shows/draft-saver.ts";
+import { ShowRunner } from "../features/shows/show-runner.ts";
+import { StudioLoading } from "../features/shows/studio/studio-loading.tsx";
+import { songQuery } from "../features/songs/api.ts";
+import { layoutQuery } from "../features/square/api.ts";
+import { useDisposable } from "../hooks/use-disposable.ts";
+import { useNow } from "../hooks/use-now.ts";
+import { HERE } from "../lib/format.ts";
+import { queryClient } from "../lib/query-client.ts";
+import { presentDue, presentWhen } from "../lib/zoned-time.ts";
+import { requireSession } from "./guards.ts";
+
+/** Editor, stage and sound: a chunk of their own. */
+const Studio = lazy(async () => ({ default: (await import("../features/shows/studio/studio.tsx")).Studio }));
+
+function parseId(value: string | undefined): ShowId {
+  const id = ShowIdSchema.safeParse(value);
+  if (!id.success) throw new Response(null, { status: 404 });
+  return id.data;
+}
+
+export async function loader({ request, params }: LoaderFunctionArgs) {
+  await requireSession(request, "student");
+  // Always fresh: a draft opened on an old revision would look like somebody else's version.
+  await queryClient.prefetchQuery({ ...showQuery(parseId(params["showId"])), staleTime: 0 });
+  return null;
+}
+
+/** A pupil's studio for one show. */
+export function Component() {
+  const { showId } = useParams();
+  const show = useQuery(showQuery(parseId(showId)));
+  return (
+    <QueryView query={show} errorTitle="The show could not be loaded." skeleton={<StudioLoading title="Loading" />} frame={(message) => <StudioMessage>{message}</StudioMessage>}>
+      {(detail) => <ShowStudio key={detail.show.id} detail={detail} />}
+    </QueryView>
+  );
+}
+
+function StudioMessage({ children }: { children: React.ReactNode }) {
+  return (
+    <Page title="Studio">
+      <h1 className="mb-4">Studio</h1>
+      {children}
+    </Page>
+  );
+}
+
+function ShowStudio({ detail }: { detail: ShowDetail }) {
+  const song = useQuery(songQuery(detail.show.songId));
+  const layout = useQuery(layoutQuery(detail.layoutId));
+  const loading = <StudioLoading title={detail.show.title} />;
+  const frame = (message: React.ReactNode) => <StudioMessage>{message}</StudioMessage>;
+  return (
+    <QueryView query={layout} errorTitle="The square could not be loaded." skeleton={loading} frame={frame}>
+      {(square) => (
+        <QueryView query={song} errorTitle="The song could not be loaded." skeleton={loading} frame={frame}>
+          {({ beatMap, score }) => <OpenShow detail={detail} layout={square.layout} beatMap={beatMap} score={score} />}
+        </QueryView>
+      )}
+    </QueryView>
+  );
+}
+
+interface OpenShowProps {
+  detail: ShowDetail;
+  layout: Layout;
+  beatMap: BeatMap;
+  score: Score;
+}
+
+function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
+  const { show, draft, seed } = detail;
+  const { data: session, dataUpdatedAt } = useSuspenseQuery(sessionQuery);
+  const navigate = useNavigate();
+  const now = useNow();
+  const assignment = useQuery({ ...assignmentQuery(show.assignmentId ?? ("none" as AssignmentId)), enabled: show.assignmentId !== null });
+  const handIn = useHandIn(show.assignmentId ?? ("none" as AssignmentId));
+  const runner = useDisposable(() => new ShowRunner({ songId: show.songId, song: beatMap, layout, seed }), [show.songId, beatMap, layout, seed]);
+  // What the server held at opening: later revisions come as answers to saves.
+  // eslint-disable-next-line react-hooks/exhaustive-deps
+  const saver = useMemo(() => new DraftSaver(show.id, { revision: draft.revision, source: draft.source }), [show.id]);
+  const versions = detail.versions.map((version) => ({
+    id: version.id,
+    title: `Version ${version.number}`,
+    when: presentWhen(version.createdAt, now, HERE),
+    ribbon: version.ribbon && decodeRibbon(version.ribbon),
+  }));
+
+  const handleHandIn = async (source: string) => {
+    if (!runner) throw new Error("The script can not be run yet.");
+    const [revision, outcome] = await Promise.all([saver.revisionOf(source), runner.runScript(source)]);
+    const result = await handIn.mutateAsync({
+      showId: show.id,
+      revision,
+      hash: outcome.ok ? outcome.hash : null,
+      idempotencyKey: `hand-in-${show.id}-${revision}`,
+    });
+    showHandedIn(result, () => void navigate(`/assignments/${show.assignmentId ?? ""}`));
+  };
+
+  if (!runner || session === null) return <StudioLoading title={show.title} />;
+  const due = assignment.data ? ` · due ${presentDue(assignment.data.assignment.dueAt, HERE)}` : "";
+  return (
+    <Suspense fallback={<StudioLoading title={show.title} />}>
+      <Studio
+        title={show.title}
+        context={`${show.assignmentTitle ?? "A show of your own"}${due}`}
+        homeHref="/home"
+        layout={layout}
+        song={beatMap}
+        score={score}
+        runScript={runner.runScript}
+        checkShow={runner.checkShow}
+        describeShow={(timeline) => {
+          const { summary, steps } = describeShow(timeline, layout, beatMap);
+          return [summary, ...steps].join(" ");
+        }}
+        draft={{
+          userId: session.user.id,
+          showId: show.id,
+          server: { revision: draft.revision, source: draft.source },
+          savedAt: draft.savedAt,
+          transport: saver,
+          signedInAt: dataUpdatedAt,
+        }}
+        versions={versions}
+        readVersion={async (versionId) => (await queryClient.fetchQuery(versionQuery(versionId as VersionId))).source}
+        onHandIn={show.assignmentId === null ? null : handleHandIn}
+      />
+    </Suspense>
+  );
+}
+
+function showHandedIn(result: HandInResult, onOpen: () => void): void {
+  showToast({ ...describeHandIn(result), action: { label: "See the assignment", onPress: onOpen } });
+}
