@@ -7,10 +7,10 @@ const SECOND_HALF =
 const CHIMES = "B5 r:3 | r:2 D5 G5 | G5 r A5 r | B5:2 D6:2 | B5 r:3 | r:2 D5 G5 | G5 r A5 r | B5:2 D6:2";
 
 const verse = (rest: Omit<SectionPlan, "name" | "chords">): SectionPlan => ({
-  name: "verse", chords: "G | G | C D | G | G | G | C D | G", ...rest,
+  name: "verse", chords: "G | G | C G Am D | G | G | G | C G Am D | G", ...rest,
 });
 const chorus = (rest: Omit<SectionPlan, "name" | "chords">): SectionPlan => ({
-  name: "chorus", chords: "G D | G | C D | G | G D | C D | G D | Em C | G", ...rest,
+  name: "chorus", chords: "G Am G D | G | C G Am D | G | G G C D | C D | G Am G D | Em C | G", ...rest,
 });
 
 /** The spring carol of 1582 in G major, three stanzas; the second half of each is called its chorus here. */

@@ -34,7 +34,7 @@ export const JINGLE_BELLS: SongPlan = {
     },
     {
       name: "verse",
-      chords: "G | G | G | C | Am | D7 | D7 | G | G | G | G | C | Am | D7 | D7 | G",
+      chords: "G | G | G | C | Am | D7 | D7 | G | G | G | G | C | Am | D7 | Am D7 | G",
       flute: VERSE_TUNE,
       bells:
         "r:2 B5 D6 | r:4 | r:2 B5 D6 | r:4 | r:2 C6 E6 | r:4 | r:2 A5 C6 | r:4 | r:2 B5 D6 | r:4 | r:2 B5 D6 | r:4 | r:2 C6 E6 | r:4 | r:2 A5 C6 | B5:2 G5:2",

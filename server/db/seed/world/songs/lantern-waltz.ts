@@ -3,7 +3,7 @@ import { THREE } from "./drum-patterns.ts";
 
 const VERSE: SectionPlan = {
   name: "verse",
-  chords: "F | F | Dm | Dm | Bb | Bb | C | C | F | F | Dm | Dm | Gm | C7 | F | F",
+  chords: "F | F | Dm | Dm | Bb | Gm | C | C | F | F | Dm | Dm | Gm | C7 | F | F",
   flute:
     "F4:2 A4 | C5:2 A4 | D5:2 C5 | A4:3 | Bb4:2 A4 | G4:2 F4 | E4:2 F4 | G4:2 C4 | F4:2 A4 | C5:2 A4 | D5:2 E5 | F5:3 | D5:2 Bb4 | G4:2 E4 | F4:3 | F4:2 r",
   bells:

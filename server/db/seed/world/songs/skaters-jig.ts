@@ -47,7 +47,7 @@ export const SKATERS_JIG: SongPlan = {
     { ...VERSE, strings: 54 },
     CHORUS,
     {
-      name: "ending", chords: "G | C | G | D | Em | C | D | G", flute: `${TUNE.split(" | ").slice(0, 4).join(" | ")} | B4:1.5 G4:1.5 | C5:1.5 E5:1.5 | D5:1.5 F#5:1.5 | G5:3`,
+      name: "ending", chords: "G | G | C | G | Em | C | D | G", flute: `${TUNE.split(" | ").slice(0, 4).join(" | ")} | B4:1.5 G4:1.5 | C5:1.5 E5:1.5 | D5:1.5 F#5:1.5 | G5:3`,
       drums: [SIX.soft], lastDrums: SIX.last, strings: 56, bass: "halves", force: 82, slowTo: 108,
     },
   ],
