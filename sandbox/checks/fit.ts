@@ -44,19 +44,21 @@ function findDarkness(context: CheckContext, lit: Uint8Array, first: number, las
   if (share < rules.leastLengthShare)
     findings.push(
       buildFinding(context, "ends-early", {
-        sentence: `The square is dark from ${nameBar(context.song, (last + 1) * BIN_TICKS)} on, but the song plays on.`,
+        sentence: `The square is dark after ${nameBar(context.song, last * BIN_TICKS)}, but the song plays on.`,
         hint: "Use `song.end` or `song.bars` to fill the song.",
         measured: { value: Math.round(share * 100), limit: Math.round(rules.leastLengthShare * 100), unit: "% of the song" },
         moments: [(last + 1) * BIN_TICKS],
       }),
     );
-  const dark = listDark(lit, first, last).filter(([start, end]) => seconds(end) - seconds(start) > rules.longestDarkSeconds);
-  if (dark.length > 0) {
-    const longest = Math.max(...dark.map(([start, end]) => seconds(end) - seconds(start)));
-    const where = dark.map(([start]) => nameBar(context.song, start * BIN_TICKS));
+  const lengthOf = ([start, end]: readonly [number, number]) => seconds(end) - seconds(start);
+  const dark = listDark(lit, first, last).filter((stretch) => lengthOf(stretch) > rules.longestDarkSeconds);
+  const [longestDark] = dark.toSorted((a, b) => lengthOf(b) - lengthOf(a));
+  if (longestDark !== undefined) {
+    const longest = lengthOf(longestDark);
+    const where = longestDark[0] === 0 ? "at the start" : `after ${nameBar(context.song, (longestDark[0] - 1) * BIN_TICKS)}`;
     findings.push(
       buildFinding(context, "long-dark", {
-        sentence: `The square is dark for ${Math.round(longest)} seconds from ${where[0] ?? ""} on${dark.length > 1 ? ", and more than once" : ""}.`,
+        sentence: `The square is dark for ${Math.round(longest)} seconds ${where}.`,
         measured: { value: Math.round(longest), limit: rules.longestDarkSeconds, unit: "s" },
         moments: dark.map(([start]) => start * BIN_TICKS),
       }),

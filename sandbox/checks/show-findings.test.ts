@@ -138,13 +138,15 @@ describe("fit", () => {
   it("notes a song that plays on over a dark square", () => {
     const [finding] = fit([on(0, [0, 1]), off(16, [0, 1])]);
     expect(finding).toMatchObject({ rule: "ends-early", severity: "note", measured: { value: 50, limit: 90 }, moments: [16 * 960] });
-    expect(finding?.sentence).toBe("The square is dark from bar 5 on, but the song plays on.");
+    expect(finding?.sentence).toBe("The square is dark after bar 4, but the song plays on.");
     expect(fit([on(0, [0, 1]), off(29, [0, 1])])).toEqual([]);
   });
   it("notes a long dark stretch, at the start too", () => {
     // At 60 beats a minute: 16 seconds of darkness.
     const slow = buildSong({}, { tempo: 60 });
     expect(fit([on(16, [0, 1])], {}, slow)[0]).toMatchObject({ rule: "long-dark", measured: { value: 16, limit: 15, unit: "s" }, moments: [0] });
+    expect(fit([on(16, [0, 1])], {}, slow)[0]?.sentence).toBe("The square is dark for 16 seconds at the start.");
+    expect(fit([on(0, [0, 1]), off(8, [0, 1]), on(24, [0, 1])], {}, slow)[0]?.sentence).toBe("The square is dark for 16 seconds after bar 2.");
     expect(fit([on(0, [0, 1]), off(8, [0, 1]), on(20, [0, 1])], {}, slow)).toEqual([]);
   });
   it("notes fronts that stay dark", () => {

@@ -1,5 +1,7 @@
 import { SIDES, type Side } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
+import { sideGeometry } from "../square/geometry.ts";
+import type { Light } from "../square/lights.ts";
 import { createLightsCursor } from "../timeline/cursor.ts";
 import type { LightCurve } from "../timeline/curves.ts";
 import type { CheckContext } from "./context.ts";
@@ -15,7 +17,9 @@ import { nameBar } from "../timeline/words.ts";
  *   luminance and its strongest channel are looked at, and the worse counts: a saturated blue or red
  *   flash has little luminance and is a flash all the same.
  * - Rising transitions within 20 ms (TRACE, 2024) of lights that together are at least 25 % of what
- *   is in view make one *event*. Every light weighs the same, a strip's pixels share one weight.
+ *   is in view make one *event*: 25 % of the luminous area in the reference picture, or 25 % of the
+ *   lights by number (a strip's pixels count as one together). The picture gives windows most of the
+ *   area; on the street a roof line of lamps is as bright, so each measure stands in for the other.
  * - More than 3 events in any half-open second are a stop, also when different lights take turns.
  *
  * A view is one side of the square; what stands free in the middle is seen from every side. The view
@@ -51,13 +55,31 @@ const ROUNDING_SECONDS = 0.0005;
 export function countStreetFlashes(context: CheckContext): readonly FlashCount[] {
   const rises = listRises(context);
   const sides = SIDES.filter((side) => context.lights.some((light) => light.side === side));
+  const areas = measureAreas(context, sides);
   const views: readonly (Side | null)[] = sides.length === 1 ? sides : [...sides, null];
   return views.map((side) => {
-    const inView = context.lights.filter((light) => side === null || light.side === side || light.side === null);
-    const weights = new Map(inView.map((light) => [light.index, 1 / (light.pixels ?? 1)]));
+    const weights = listWeights(context, side, areas);
     const counts = rises.map((measure) => countView(context, side, weights, measure));
     return counts.reduce((worse, count) => (count.worst > worse.worst || (count.worst === worse.worst && count.longestRun > worse.longestRun) ? count : worse));
   });
+}
+
+/** Shares of what is in view, by light index: of the luminous area, and of the number of lights. */
+type Weights = ReadonlyMap<number, { readonly area: number; readonly number: number }>;
+
+/** Luminous area of every light in the reference picture of its side, in square pixels. */
+function measureAreas({ layout }: CheckContext, sides: readonly Side[]): ReadonlyMap<number, number> {
+  return new Map(sides.flatMap((side) => sideGeometry(layout, side).flatMap((front) => front.lights.map((light) => [light.lightIndex, light.area] as const))));
+}
+
+/** What stands on no side is in every view. */
+function listWeights({ lights }: CheckContext, side: Side | null, areas: ReadonlyMap<number, number>): Weights {
+  const inView = lights.filter((light) => side === null || light.side === side || light.side === null);
+  const areaOf = (light: Light) => areas.get(light.index) ?? 0;
+  const numberOf = (light: Light) => 1 / (light.pixels ?? 1);
+  const sum = (measure: (light: Light) => number) => inView.reduce((total, light) => total + measure(light), 0) || 1;
+  const [area, number] = [sum(areaOf), sum(numberOf)];
+  return new Map(inView.map((light) => [light.index, { area: areaOf(light) / area, number: numberOf(light) / number }]));
 }
 
 interface Rise {
@@ -87,12 +109,9 @@ function listRises(context: CheckContext): readonly (readonly Rise[])[] {
   });
 }
 
-function countView(context: CheckContext, side: Side | null, weights: ReadonlyMap<number, number>, rises: readonly Rise[]): FlashCount {
-  const { rules } = context;
+function countView({ rules }: CheckContext, side: Side | null, weights: Weights, rises: readonly Rise[]): FlashCount {
   const inView = rises.filter(({ light }) => weights.has(light));
-  let total = 0;
-  for (const weight of weights.values()) total += weight;
-  const events = groupRises(inView, weights, total * rules.flashShare, rules.flashTogetherSeconds);
+  const events = groupRises(inView, weights, rules.flashShare, rules.flashTogetherSeconds);
   let worst = 0;
   let oldest = 0;
   events.forEach(({ seconds }, newest) => {
@@ -105,21 +124,23 @@ function countView(context: CheckContext, side: Side | null, weights: ReadonlyMa
 const isWithinSecond = (first: number, last: number) => last - first < 1 - ROUNDING_SECONDS;
 
 /** From the earliest on: rises within 20 ms are one event when their lights weigh enough. */
-function groupRises(rises: readonly Rise[], weights: ReadonlyMap<number, number>, needed: number, together: number): FlashEvent[] {
+function groupRises(rises: readonly Rise[], weights: Weights, needed: number, together: number): FlashEvent[] {
   const events: FlashEvent[] = [];
   for (let start = 0; start < rises.length; ) {
     const first = rises[start];
     if (first === undefined) break;
     const lights = new Set<number>();
-    let weight = 0;
+    let [area, number] = [0, 0];
     let end = start;
     for (let rise = rises[end]; rise !== undefined && rise.seconds - first.seconds <= together; rise = rises[++end]) {
       if (lights.has(rise.light)) continue;
       lights.add(rise.light);
-      weight += weights.get(rise.light) ?? 0;
+      const weight = weights.get(rise.light);
+      area += weight?.area ?? 0;
+      number += weight?.number ?? 0;
     }
     // A sum of thirds may lack the last digit of a quarter.
-    if (weight >= needed - 1e-9) {
+    if (Math.max(area, number) >= needed - 1e-9) {
       events.push({ tick: first.tick, seconds: first.seconds, lights: [...lights] });
       start = end;
     } else {

@@ -49,6 +49,11 @@ describe("describeShow", () => {
     expect(describeCues([fadeTo(4, ALL, 100, 8)]).steps[1]).toContain("the whole square slowly grows brighter.");
     expect(describeCues(Array.from({ length: 16 }, (_, turn) => pulse(4 + turn / 2, (turn * 5) % 12, 1))).steps[1]).toContain("sparkles here and there");
   });
+  it("calls a few fronts by their names, and the pick-up by its", () => {
+    expect(describeCues([on(4, 2), on(6, 9)]).steps[1]).toContain('only the fronts "front c" and "front j" light up one by one.');
+    const waltz = buildSong({ beatsPerBar: 3, bars: [{ number: 0, start: 0, beats: 2 }, ...Array.from({ length: 10 }, (_, bar) => ({ number: bar + 1, start: 2 + bar * 3, beats: 3 }))], beats: Array.from({ length: 33 }, (_, beat) => beat * 500_000) });
+    expect(describeShow(buildShow(layout, [on(0, ALL)]), layout, waltz).steps[0]).toMatch(/^The pick-up and bars 1 to 3: /);
+  });
   it("says that an incomplete show is not whole", () => {
     const { steps, summary } = describeCues([on(0, ALL)], { isComplete: false });
     expect(steps.at(-1)).toBe("The script stopped here, so the show is not whole.");

@@ -55,10 +55,19 @@ function joinParts(parts: readonly Part[]): readonly { readonly spans: readonly 
 function nameSpans(spans: readonly SongSpan[]): string {
   const first = spans[0]?.firstBar ?? 1;
   const last = spans.at(-1)?.lastBar ?? first;
-  const bars = first === last ? `Bar ${first}` : `Bars ${first} to ${last}`;
+  const bars = nameBars(first, last);
   const names = [...new Set(spans.flatMap(({ name }) => name ?? []))];
   return names.length === 0 ? bars : `${bars} (${names.join(", ")})`;
 }
+
+/** Bar 0 is the pick-up. */
+function nameBars(first: number, last: number): string {
+  if (first === 0) return last === 0 ? "The pick-up" : `The pick-up and ${nameBars(1, last).toLowerCase()}`;
+  return first === last ? `Bar ${first}` : `Bars ${first} to ${last}`;
+}
+
+/** So few fronts are called by their names. */
+const FEW_FRONTS = 3;
 
 /** What one does, and what several do. */
 const MOVES: Readonly<Record<Exclude<Movement, "dark">, readonly [string, string]>> = {
@@ -80,6 +89,7 @@ function describeActivity(activity: Activity, sides: readonly Side[], nameFront:
 function describeMove({ light, lightFirst, lightLast, fronts }: Activity, movement: Exclude<Movement, "dark">): readonly [string, string] {
   if (movement === "steady" && light < 0.3) return ["stays dimly lit", "stay dimly lit"];
   if (movement === "together" && fronts.size === 1) return ["lights up", "light up"];
+  if (movement === "scattered" && fronts.size <= FEW_FRONTS) return ["lights up now and then", "light up one by one"];
   if (movement === "fading" && lightLast > lightFirst * 1.5 + 0.05) return ["slowly grows brighter", "slowly grow brighter"];
   if (movement === "fading" && lightLast * 1.5 + 0.05 < lightFirst) return ["slowly goes dim", "slowly go dim"];
   return MOVES[movement];
@@ -87,8 +97,10 @@ function describeMove({ light, lightFirst, lightLast, fronts }: Activity, moveme
 
 /** A side counts when it gives a good share of the light. */
 function nameWho({ fronts, sides: shares }: Activity, sides: readonly Side[], nameFront: (front: number) => string): { readonly who: string; readonly isSeveral: boolean } {
-  const [only] = fronts;
-  if (fronts.size === 1 && only !== undefined) return { who: `only the front "${nameFront(only)}"`, isSeveral: false };
+  if (fronts.size <= FEW_FRONTS) {
+    const names = joinWords([...fronts].sort((a, b) => a - b).map((front) => `"${nameFront(front)}"`));
+    return { who: fronts.size === 1 ? `only the front ${names}` : `only the fronts ${names}`, isSeveral: fronts.size > 1 };
+  }
   const lit = sides.filter((side) => (shares.get(side) ?? 0) > 0.4 / Math.max(1, sides.length));
   if (lit.length === 0) return { who: "a part of the square", isSeveral: false };
   if (lit.length === sides.length && sides.length > 1) return { who: "the whole square", isSeveral: false };
