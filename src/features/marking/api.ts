@@ -79,3 +79,17 @@ export function useReopen() {
     onSuccess: forget,
   });
 }
+
+/** Opens released work again, or leaves it open when it is already; gives the assignment whose desk it lies on. */
+export function useReopenForDesk() {
+  const client = useQueryClient();
+  const forget = useForget();
+  return useMutation({
+    mutationFn: async (submissionId: SubmissionId) => {
+      const { submission } = await client.fetchQuery({ ...submissionQuery(submissionId), staleTime: 0 });
+      if (submission.state === "marked") await callApi(markingContract.reopen, { params: { submissionId } });
+      return submission.assignmentId;
+    },
+    onSuccess: forget,
+  });
+}
