@@ -1,8 +1,10 @@
 import { infiniteQueryOptions, queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
-import type { EndpointCall } from "../../../shared/contract.ts";
+import type { EndpointCall, EndpointResponse } from "../../../shared/contract.ts";
 import { adminContract } from "../../../shared/contracts/admin.ts";
 import type { UserId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
+
+export type AdminOverview = EndpointResponse<typeof adminContract.overview>;
 
 /** Schools, staff and the state of the database. */
 export const overviewQuery = queryOptions({

@@ -27,7 +27,7 @@ export const STARTING_RUBRIC: readonly Criterion[] = [
     "Fronts, sides and parts are used on purpose.",
     "The whole square works as one picture.",
   ]),
-  buildCriterion("safe", "Safe and ready for the square", [
+  buildCriterion("ready", "Safe and ready for the square", [
     "A stop of the show check is open.",
     "It runs, with things to look at.",
     "No stop, and every warning has a reason.",
