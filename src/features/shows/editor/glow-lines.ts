@@ -31,22 +31,29 @@ class BeadMarker extends GutterMarker {
   }
 }
 
+/** Pixels from the upper edge of the scrolled content; a layer has no width of its own. */
+interface SheetBox {
+  readonly top: number;
+  readonly height: number;
+  readonly width: number;
+}
+
 /** The lamplight behind one line: outside the text, so that a frame costs no editor update. */
 class GlowSheet implements LayerMarker {
   readonly #line: number;
-  readonly #top: number;
-  readonly #height: number;
+  readonly #box: SheetBox;
   readonly #book: GlowBook;
 
-  constructor(line: number, top: number, height: number, book: GlowBook) {
+  constructor(line: number, box: SheetBox, book: GlowBook) {
     this.#line = line;
-    this.#top = top;
-    this.#height = height;
+    this.#box = box;
     this.#book = book;
   }
 
   eq(other: LayerMarker): boolean {
-    return other instanceof GlowSheet && other.#line === this.#line && other.#top === this.#top && other.#height === this.#height;
+    if (!(other instanceof GlowSheet) || other.#line !== this.#line) return false;
+    const { top, height, width } = other.#box;
+    return top === this.#box.top && height === this.#box.height && width === this.#box.width;
   }
 
   draw(): HTMLElement {
@@ -64,8 +71,9 @@ class GlowSheet implements LayerMarker {
   }
 
   #place(sheet: HTMLElement): void {
-    sheet.style.top = `${this.#top}px`;
-    sheet.style.height = `${this.#height}px`;
+    sheet.style.top = `${this.#box.top}px`;
+    sheet.style.height = `${this.#box.height}px`;
+    sheet.style.width = `${this.#box.width}px`;
   }
 }
 
@@ -116,8 +124,9 @@ function listSheets(view: EditorView, beads: RangeSet<BeadMarker>, book: GlowBoo
   const { from, to } = view.viewport;
   beads.between(from, to, (position, _end, marker) => {
     const block = view.lineBlockAt(position);
+    // A problem under the line belongs to its block; the glow is behind the text only.
     const text = view.elementAtHeight(block.top);
-    found.push(new GlowSheet(marker.line, top + block.top, text.height || block.height, book));
+    found.push(new GlowSheet(marker.line, { top: top + block.top, height: text.height, width: view.scrollDOM.clientWidth }, book));
   });
   return found;
 }

@@ -10,6 +10,7 @@ import { adoptEditorStyles } from "./adopt-styles.ts";
 import { completeScript } from "./completion.ts";
 import "./editor.css";
 import { createGlowLines, type GlowLines } from "./glow-lines.ts";
+import { nounMarks } from "./noun-marks.ts";
 import { problemNotes, showProblem } from "./problem-note.ts";
 import type { ScriptNames } from "./script-names.ts";
 import { syntaxClasses } from "./syntax-classes.ts";
@@ -141,6 +142,7 @@ export class ScriptEditor {
       search({ top: true }),
       javascript({ typescript: true }),
       syntaxHighlighting(syntaxClasses),
+      nounMarks,
       completeScript(() => this.#names),
       problemNotes,
       EditorView.lineWrapping,

@@ -1,5 +1,6 @@
 import { typescriptLanguage } from "@codemirror/lang-javascript";
 import { highlightCode } from "@lezer/highlight";
+import { isOurNoun } from "./noun-marks.ts";
 import { syntaxClasses } from "./syntax-classes.ts";
 
 /** A piece of a line with the classes of its token; `className` is empty for plain text. */
@@ -15,7 +16,7 @@ export function listScriptLines(source: string): TextPiece[][] {
     source,
     typescriptLanguage.parser.parse(source),
     syntaxClasses,
-    (text, className) => lines.at(-1)?.push({ text, className }),
+    (text, className) => lines.at(-1)?.push({ text, className: className || (isOurNoun(text) ? "syn-object" : "") }),
     () => lines.push([]),
   );
   return lines;

@@ -141,7 +141,7 @@ function bakePane(tint: CanvasRenderingContext2D, hot: CanvasRenderingContext2D,
   tint.fillStyle = glow;
   tint.fill(path);
   const heart = hot.createRadialGradient(x, y, 0, x, y, reach);
-  heart.addColorStop(0, "rgba(255,246,226,.42)");
+  heart.addColorStop(0, "rgba(255,240,205,.34)");
   heart.addColorStop(0.55, "rgba(255,240,210,.1)");
   heart.addColorStop(0.6, "rgba(120,60,30,.04)");
   heart.addColorStop(1, "rgba(120,60,30,.22)");

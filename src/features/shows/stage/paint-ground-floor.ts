@@ -11,7 +11,7 @@ export function paintGroundFloor(context: CanvasRenderingContext2D, house: House
   if (silhouette.ground === "shop" && silhouette.awning === 0) paintBoard(context, house);
   if (silhouette.sign && silhouette.ground !== "marquee" && !hasSignLight) paintPennant(context, house);
   if (silhouette.awning > 0) paintAwning(context, house);
-  if (silhouette.ground === "marquee") paintMarquee(context, house);
+  if (silhouette.ground === "marquee") paintMarquee(context, house, !hasSignLight);
   if (hasSignLight) paintNameBoard(context, house);
 }
 
@@ -105,7 +105,7 @@ function paintAwning(context: CanvasRenderingContext2D, { facade, front, soft }:
   context.restore();
 }
 
-function paintMarquee(context: CanvasRenderingContext2D, house: HouseSheet): void {
+function paintMarquee(context: CanvasRenderingContext2D, house: HouseSheet, isNamed: boolean): void {
   const { facade, ink, soft } = house;
   const { x, width, groundY, groundFloor: g, unit, eaveY, topY } = facade;
   const top = groundY - g * 0.98;
@@ -125,7 +125,7 @@ function paintMarquee(context: CanvasRenderingContext2D, house: HouseSheet): voi
     blur: soft(3),
     drop: soft(1),
   });
-  paintLetters(context, house.front.name, board);
+  if (isNamed) paintLetters(context, house.front.name, board);
   const fin = new Path2D();
   fin.roundRect(x + width * 0.44, topY + unit * 0.02, width * 0.12, Math.max(1, eaveY - topY), unit * 0.008);
   cutSheet(context, fin, { fill: shade(ink, 0.2), blur: soft(8), drop: soft(3) });

@@ -1,0 +1,99 @@
+import { useEffect, useId, useRef, useState, type Ref, useImperativeHandle } from "react";
+import type { Problem } from "../../../../sandbox/engine/model.ts";
+import { useDisposable } from "../../../hooks/use-disposable.ts";
+import { Icon } from "../../../components/icon.tsx";
+import { ScriptEditor } from "../editor/script-editor.ts";
+import type { ScriptNames } from "../editor/script-names.ts";
+import type { ShowPlayer } from "./show-player.ts";
+
+/** What the rest of the studio asks of the editor. */
+export interface ScriptPanelHandle {
+  goToLine: (line: number) => void;
+  insert: (code: string) => void;
+}
+
+export interface ScriptPanelProps {
+  /** The text to begin with. */
+  source: string;
+  /** The text as it should be: differs from the editor's only when another version was chosen. */
+  wantedSource: string;
+  names: ScriptNames;
+  problem: Problem | null;
+  actLines: readonly number[];
+  player: ShowPlayer;
+  /** What is on stage, in a few words. */
+  stageNote: string;
+  isRunning: boolean;
+  onChange: (source: string) => void;
+  onRun: (source: string) => void;
+  onSave: () => void;
+  ref: Ref<ScriptPanelHandle>;
+}
+
+const SIZE_KEY = "duskbell-script-large";
+
+/** The script with its head: what is on stage, the size of the letters, Run. */
+export function ScriptPanel(props: ScriptPanelProps) {
+  const { source, wantedSource, names, problem, actLines, player, stageNote, isRunning, onChange, onRun, onSave, ref } = props;
+  const hostRef = useRef<HTMLDivElement>(null);
+  const hintId = useId();
+  const [isLarge, setIsLarge] = useState(() => localStorage.getItem(SIZE_KEY) === "yes");
+  // The editor is made once; it calls what is current then.
+  const calls = useRef({ onChange, onRun, onSave });
+  useEffect(() => {
+    calls.current = { onChange, onRun, onSave };
+  });
+  const editor = useDisposable(() => {
+    if (!hostRef.current) throw new Error("The editor has no place on the page.");
+    const made: ScriptEditor = new ScriptEditor({
+      parent: hostRef.current,
+      source,
+      names,
+      hintId,
+      onChange: (text) => calls.current.onChange(text),
+      onRun: () => calls.current.onRun(made.source),
+      onSave: () => calls.current.onSave(),
+    });
+    return made;
+  }, []);
+
+  useEffect(() => editor?.setNames(names), [editor, names]);
+  useEffect(() => editor?.setProblem(problem), [editor, problem]);
+  useEffect(() => editor?.setActLines(actLines), [editor, actLines]);
+  useEffect(() => editor?.replace(wantedSource), [editor, wantedSource]);
+  useEffect(() => {
+    if (!editor) return;
+    return player.addView({ showMoment: ({ linesLit }) => editor.setGlow(linesLit) });
+  }, [editor, player, actLines]);
+  useImperativeHandle(ref, () => ({
+    goToLine: (line) => editor?.goToLine(line),
+    insert: (code) => editor?.insert(code),
+  }));
+
+  const toggleSize = () => {
+    localStorage.setItem(SIZE_KEY, isLarge ? "no" : "yes");
+    setIsLarge(!isLarge);
+  };
+  return (
+    <section className="studio-script studio-card" aria-labelledby={`${hintId}-title`}>
+      <div className="studio-script-head">
+        <h2 id={`${hintId}-title`}>Script</h2>
+        <p className="studio-script-state">
+          <Icon name="bulb" className="size-4" />
+          <span>{stageNote}</span>
+        </p>
+        <button type="button" className="studio-quiet-icon" aria-pressed={isLarge} aria-label="Large letters" onClick={toggleSize}>
+          <Icon name="letters" />
+        </button>
+        <button type="button" className="studio-run" aria-keyshortcuts="Control+Enter" aria-busy={isRunning} onClick={() => editor && onRun(editor.source)}>
+          <i aria-hidden="true" className={isRunning ? "is-running" : undefined} />
+          Run <kbd>Ctrl Enter</kbd>
+        </button>
+      </div>
+      <div ref={hostRef} className="script-editor studio-script-text" style={isLarge ? ({ "--script-size": "1.3125rem" } as React.CSSProperties) : undefined} />
+      <p id={hintId} className="sr-only">
+        Press Escape, then Tab, to leave the script. Control and Enter runs it. Alt and Enter takes an offered fix.
+      </p>
+    </section>
+  );
+}

@@ -1,0 +1,104 @@
+import { useCallback, useEffect, useMemo, useState } from "react";
+import { SIDES, type Layout } from "../../../../shared/contracts/square.ts";
+import type { BeatMap } from "../../../../shared/contracts/songs.ts";
+import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
+import { ribbonCells, type RibbonCells } from "../../../../sandbox/timeline/ribbon.ts";
+import type { Timeline } from "../../../../sandbox/timeline/model.ts";
+import { queueDrawing } from "../../../components/draw-queue.ts";
+import { useMediaQuery } from "../../../hooks/use-media-query.ts";
+import { LargeRibbon } from "../ribbon/large-ribbon.tsx";
+import { findSongPlace, nearestBarLine, type TickLoop } from "../ribbon/song-place.ts";
+import { findRibbonTimeline, type RunState } from "./run-model.ts";
+import type { ShowPlayer } from "./show-player.ts";
+import { StageWindow, type StageWindowProps } from "./stage-window.tsx";
+import { TransportBar } from "./transport-bar.tsx";
+import { useTransport } from "./use-transport.ts";
+
+/** Columns of the large ribbon: about one for two pixels on a laptop. */
+const RIBBON_COLUMNS = 340;
+
+export interface SongColumnProps extends StageWindowProps {
+  song: BeatMap;
+  run: RunState;
+}
+
+/** The stage, the transport and the ribbon, one under the other. */
+export function SongColumn({ song, run, ...stage }: SongColumnProps) {
+  const { layout, player } = stage;
+  const transport = useTransport(player);
+  const timeline = findRibbonTimeline(run);
+  const cells = useRibbonCells(timeline, layout);
+  const bands = useMemo(() => listBands(layout), [layout]);
+  const section = usePlayingSection(player, song);
+  const thread = useThread();
+  const followTick = useCallback((show: (tick: number) => void) => player.addView({ showMoment: ({ tick }) => show(tick) }), [player]);
+  const toggleLoop = () => {
+    const { loop, isLooping } = player.transport.state;
+    player.transport.setLoop(loop ?? loopAround(song, player.tick), !isLooping);
+  };
+  return (
+    <section className="studio-song" aria-label="Square and song">
+      <StageWindow {...stage} />
+      <TransportBar song={song} player={player} onToggle={() => player.transport.toggle()} onToggleLoop={toggleLoop} />
+      <div className="studio-ribbon studio-card" role="group" aria-label="Ribbon of the show">
+        <LargeRibbon
+          song={song}
+          cells={cells}
+          bands={bands}
+          thread={thread}
+          stoppedAt={timeline && !timeline.isComplete ? findStop(timeline) : null}
+          loop={transport.loop}
+          isLooping={transport.isLooping}
+          followTick={followTick}
+          onSeek={(tick) => player.seekTick(tick)}
+          onLoop={(loop) => player.transport.setLoop(loop)}
+          section={section}
+        />
+      </div>
+    </section>
+  );
+}
+
+/** The cells of a timeline's ribbon, worked out after the paint; the old ones stay until then. */
+function useRibbonCells(timeline: Timeline | null, layout: Layout): RibbonCells | null {
+  const [cells, setCells] = useState<RibbonCells | null>(null);
+  useEffect(() => {
+    if (!timeline) return setCells(null);
+    return queueDrawing(() => setCells(ribbonCells(timeline, layout, { rows: layout.fronts.length, columns: RIBBON_COLUMNS })));
+  }, [timeline, layout]);
+  return cells;
+}
+
+/** Index of the section that is playing; renders again only when it changes. */
+function usePlayingSection(player: ShowPlayer, song: BeatMap): number {
+  const [section, setSection] = useState(0);
+  useEffect(() => player.addView({ showMoment: ({ tick }) => setSection(findSongPlace(song, tick).section) }), [player, song]);
+  return section;
+}
+
+/** CSS pixels of a ribbon row, by the room there is. */
+function useThread(): number {
+  const isPhone = useMediaQuery("(max-width: 559px)");
+  const isLow = useMediaQuery("(max-height: 640px)");
+  const isTall = useMediaQuery("(min-height: 860px) and (min-width: 900px)");
+  return isPhone ? 1.2 : isLow ? 2 : isTall ? 4 : 3;
+}
+
+function listBands(layout: Layout): { name: string; rows: number }[] {
+  const rowsOf = (side: string | null) => layout.fronts.filter((front) => front.side === side).length;
+  return [...SIDES.map((side) => ({ name: side.charAt(0).toUpperCase() + side.slice(1), rows: rowsOf(side) })), { name: "Tree", rows: rowsOf(null) }].filter((band) => band.rows > 0);
+}
+
+/** The section that plays at a tick, else the eight bars around it. */
+function loopAround(song: BeatMap, tick: number): TickLoop {
+  const section = song.sections[findSongPlace(song, tick).section];
+  if (section) return { start: Math.round(section.start * TICKS_PER_BEAT), end: Math.round(section.end * TICKS_PER_BEAT) };
+  const end = (song.beats.length - 1) * TICKS_PER_BEAT;
+  const bars = 8 * song.beatsPerBar * TICKS_PER_BEAT;
+  const start = nearestBarLine(song, Math.max(0, tick - bars / 2));
+  return { start, end: nearestBarLine(song, Math.min(end, start + bars)) };
+}
+
+function findStop({ cues }: Timeline): number {
+  return cues.count > 0 ? (cues.tick[cues.count - 1] ?? 0) : 0;
+}

@@ -1,0 +1,144 @@
+import { useCallback, useEffect, useMemo, useRef, useState, type PointerEvent } from "react";
+import { SIDES, type Layout, type Side } from "../../../../shared/contracts/square.ts";
+import { listFronts, listLights, type Light } from "../../../../sandbox/square/lights.ts";
+import { useDisposable } from "../../../hooks/use-disposable.ts";
+import { useElementSize } from "../../../hooks/use-element-size.ts";
+import { Stage } from "../stage/stage.ts";
+import { UnrolledStrip, type SideSpan } from "../stage/unrolled-strip.ts";
+import { findLitLight, type LitLight } from "./lit-light.ts";
+import type { ShowPlayer } from "./show-player.ts";
+import { FrontButtons } from "./front-buttons.tsx";
+import { GentleButton } from "./gentle-button.tsx";
+import { SideStrip } from "./side-strip.tsx";
+import { SideWalk } from "./side-walk.tsx";
+import { WhyCard, type WhyPlace } from "./why-card.tsx";
+
+/** Narrower than this six fronts fit, not ten. */
+const PHONE_WIDTH = 560;
+const PHONE_FRONTS = 6;
+
+export interface StageWindowProps {
+  layout: Layout;
+  player: ShowPlayer;
+  isGentle: boolean;
+  /** Why the preview is gentle by itself; null when the person may choose. */
+  gentleReason: string | null;
+  onGentle: (isGentle: boolean) => void;
+  onGoToLine: (line: number) => void;
+  /** What the picture shows, for assistive technology. */
+  description: string;
+}
+
+/** The window onto the square: one side at dusk, all sides in a strip below, and what is lit by which line. */
+export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, onGoToLine, description }: StageWindowProps) {
+  const stageRef = useRef<HTMLCanvasElement>(null);
+  const stripRef = useRef<HTMLCanvasElement>(null);
+  const stageBox = useRef<HTMLDivElement>(null);
+  const stripBox = useRef<HTMLDivElement>(null);
+  const stageSize = useElementSize(stageBox);
+  const stripSize = useElementSize(stripBox);
+  const [side, setSide] = useState<Side>("north");
+  const [first, setFirst] = useState(0);
+  const [spans, setSpans] = useState<readonly SideSpan[]>([]);
+  const [why, setWhy] = useState<WhyPlace | null>(null);
+  const lights = useMemo(() => listLights(layout), [layout]);
+  const fronts = useMemo(() => listFronts(layout), [layout]);
+  const isPhone = stageSize.width > 0 && stageSize.width < PHONE_WIDTH;
+  const sideLength = fronts.filter(({ front }) => front.side === side).length;
+
+  const stage = useDisposable(() => new Stage(getCanvas(stageRef.current), layout), [layout]);
+  const strip = useDisposable(() => new UnrolledStrip(getCanvas(stripRef.current), layout), [layout]);
+
+  useEffect(() => {
+    if (!stage || stageSize.width === 0) return;
+    stage.setSize({ ...stageSize, dpr: window.devicePixelRatio || 1, ...(isPhone && { count: PHONE_FRONTS }) });
+    player.redraw();
+  }, [stage, stageSize, isPhone, player]);
+  useEffect(() => {
+    if (!strip || stripSize.width === 0) return;
+    strip.setSize({ ...stripSize, dpr: window.devicePixelRatio || 1 });
+    setSpans(strip.spans);
+    player.redraw();
+  }, [strip, stripSize, player]);
+  useEffect(() => {
+    stage?.look(side, isPhone ? first : 0);
+    setWhy(null);
+    player.redraw();
+  }, [stage, side, first, isPhone, player]);
+  useEffect(() => {
+    if (!stage || !strip) return;
+    return player.addView({
+      showMoment: ({ rgb }) => {
+        stage.draw(rgb);
+        strip.draw(rgb);
+      },
+    });
+  }, [stage, strip, player]);
+
+  const readLight = useCallback(
+    (candidates: readonly Light[]): LitLight | null => player.timeline && findLitLight(player.timeline, player.readFrame(), candidates),
+    [player],
+  );
+  const showWhy = (frontIndex: number, light: Light | null) => {
+    const shown = stage?.fronts.find((front) => front.frontIndex === frontIndex);
+    if (!shown) return setWhy(null);
+    const own = fronts[frontIndex]?.lights.flatMap((index) => lights[index] ?? []) ?? [];
+    const lit = (light && readLight([light])) ?? readLight(own);
+    setWhy({ name: shown.name, lit, x: shown.x + shown.width / 2, y: shown.y });
+  };
+  const handleMove = (event: PointerEvent<HTMLCanvasElement>) => {
+    const box = event.currentTarget.getBoundingClientRect();
+    const hit = stage?.findHit(event.clientX - box.left, event.clientY - box.top);
+    if (hit) showWhy(hit.front.frontIndex, hit.light ? (lights[hit.light.lightIndex] ?? null) : null);
+    else setWhy(null);
+  };
+  const handleUp = (event: PointerEvent<HTMLCanvasElement>) => {
+    handleMove(event);
+    const box = event.currentTarget.getBoundingClientRect();
+    const hit = stage?.findHit(event.clientX - box.left, event.clientY - box.top);
+    const lit = hit?.light && readLight(lights.slice(hit.light.lightIndex, hit.light.lightIndex + 1));
+    // A finger first shows the card; its link goes to the line.
+    if (lit?.line && event.pointerType !== "touch") onGoToLine(lit.line);
+  };
+  const walk = (step: number) => {
+    const next = first + step * PHONE_FRONTS;
+    if (isPhone && next > -PHONE_FRONTS && next < sideLength && !(step < 0 && first === 0)) {
+      setFirst(Math.min(Math.max(0, next), Math.max(0, sideLength - PHONE_FRONTS)));
+      return;
+    }
+    setSide(SIDES[(SIDES.indexOf(side) + step + SIDES.length) % SIDES.length] ?? "north");
+    setFirst(0);
+  };
+
+  return (
+    <div className="studio-window" onPointerLeave={() => setWhy(null)}>
+      <div ref={stageBox} className="studio-window-stage">
+        <canvas ref={stageRef} role="img" aria-label={`${sideName(side)} of the square at dusk. ${description}`} onPointerMove={handleMove} onPointerUp={handleUp} />
+        {stage && <FrontButtons fronts={stage.fronts} key={`${side}-${first}-${stageSize.width}`} onShow={(index) => showWhy(index, null)} onHide={() => setWhy(null)} onGo={() => why?.lit?.line && onGoToLine(why.lit.line)} />}
+        {why && <WhyCard place={why} width={stageSize.width} onGoToLine={onGoToLine} />}
+      </div>
+      <SideWalk side={side} onWalk={walk} />
+      <GentleButton isGentle={isGentle} reason={gentleReason} onGentle={onGentle} />
+      <div ref={stripBox} className="studio-window-strip">
+        <canvas ref={stripRef} role="img" aria-label="All fronts of the square side by side" />
+        <SideStrip
+          spans={spans}
+          side={side}
+          onLook={(next) => {
+            setSide(next);
+            setFirst(0);
+          }}
+        />
+      </div>
+    </div>
+  );
+}
+
+function getCanvas(canvas: HTMLCanvasElement | null): HTMLCanvasElement {
+  if (!canvas) throw new Error("The canvas is not on the page.");
+  return canvas;
+}
+
+function sideName(side: Side): string {
+  return `${side.charAt(0).toUpperCase()}${side.slice(1)} side`;
+}

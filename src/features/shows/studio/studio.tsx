@@ -1,0 +1,195 @@
+import { useCallback, useEffect, useMemo, useRef, useState } from "react";
+import type { BeatMap, Score } from "../../../../shared/contracts/songs.ts";
+import type { Layout } from "../../../../shared/contracts/square.ts";
+import { useDisposable } from "../../../hooks/use-disposable.ts";
+import { useMediaQuery } from "../../../hooks/use-media-query.ts";
+import { listScriptNames } from "../editor/script-names.ts";
+import { CheckPane } from "./check-pane.tsx";
+import { HandInDialog } from "./hand-in-dialog.tsx";
+import { NamesPane } from "./names-pane.tsx";
+import { NotesPane } from "./notes-pane.tsx";
+import { findGentleReason, listActLines, listFindings, presentRun } from "./run-model.ts";
+import type { StudioVersion } from "./save-menu.tsx";
+import { ScriptPanel, type ScriptPanelHandle } from "./script-panel.tsx";
+import { ShowPlayer } from "./show-player.ts";
+import { SongColumn } from "./song-column.tsx";
+import "./studio.css";
+import { StudioHeader } from "./studio-header.tsx";
+import { StudioLoading } from "./studio-loading.tsx";
+import { TrayTabs, type TrayTab } from "./tray-tabs.tsx";
+import { TwoVersionsDialog } from "./two-versions-dialog.tsx";
+import { useDraft, type DraftSource } from "./use-draft.ts";
+import { usePlayKeys } from "./use-play-keys.ts";
+import { useScriptRun, type ScriptRunOptions } from "./use-script-run.ts";
+import { VersionDialog } from "./version-dialog.tsx";
+
+export interface StudioProps extends ScriptRunOptions {
+  title: string;
+  /** "A show for the square · due Friday 4 December" */
+  context: string;
+  homeHref: string;
+  layout: Layout;
+  song: BeatMap;
+  /** Null for a song without a score: no sound. */
+  score: Score | null;
+  draft: DraftSource;
+  versions: readonly StudioVersion[];
+  readVersion: (versionId: string) => Promise<string>;
+  /** Hands in what is saved; null where there is nobody to hand it to. */
+  onHandIn: ((source: string) => Promise<void>) | null;
+  /** Words on what the show looks like, from its timeline; said where the picture is described. */
+  describeShow?: ((timeline: NonNullable<ReturnType<typeof useScriptRun>["state"]["onStage"]>) => string) | undefined;
+}
+
+type OpenDialog = { kind: "hand-in" } | { kind: "versions" } | { kind: "version"; version: StudioVersion } | null;
+
+/** The studio: the square, the song, the script and what is to be said about it, on one screen. */
+export function Studio(props: StudioProps) {
+  const { layout, song, score } = props;
+  const player = useDisposable(() => new ShowPlayer({ layout, song, score }), [layout, song, score]);
+  const draft = useDraft(props.draft);
+  if (!player || !draft.store) return <StudioLoading title={props.title} />;
+  return <OpenStudio {...props} player={player} opened={draft} key={props.draft.showId} />;
+}
+
+interface OpenStudioProps extends StudioProps {
+  player: ShowPlayer;
+  opened: ReturnType<typeof useDraft>;
+}
+
+function OpenStudio(props: OpenStudioProps) {
+  const { layout, song, player, opened, versions, title } = props;
+  const { store, state: draft } = opened;
+  const [firstSource] = useState(draft.source);
+  const editor = useRef<ScriptPanelHandle>(null);
+  const isPhone = useMediaQuery("(max-width: 559px)");
+  const [tab, setTab] = useState<TrayTab>(isPhone ? "script" : "check");
+  const [dialog, setDialog] = useState<OpenDialog>(null);
+  const [wantsGentle, setWantsGentle] = useState(() => window.matchMedia("(prefers-reduced-motion: reduce)").matches);
+  const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
+  const { state: run, run: runNow, runSoon } = useScriptRun(props);
+  const gentleReason = findGentleReason(run);
+  const isGentle = wantsGentle || gentleReason !== null;
+  const selected = !isPhone && tab === "script" ? "check" : tab;
+
+  useEffect(() => runNow(firstSource), [runNow, firstSource]);
+  useEffect(() => player.setTimeline(run.onStage), [player, run.onStage]);
+  useEffect(() => player.setGentle(isGentle), [player, isGentle]);
+  usePlayKeys(player);
+
+  const actLines = useMemo(() => listActLines(run.onStage), [run.onStage]);
+  const findings = listFindings(run);
+  const problem = run.outcome?.ok === false ? run.outcome.problem : null;
+  const goToLine = useCallback((line: number) => {
+    setTab("script");
+    // On a phone the script is not on screen before the tab has changed.
+    requestAnimationFrame(() => editor.current?.goToLine(line));
+  }, []);
+  const showMoment = (tick: number | undefined, line: number | undefined) => {
+    if (tick !== undefined) player.seekTick(tick);
+    if (line !== undefined) goToLine(line);
+  };
+  const edit = (source: string) => {
+    store?.edit(source);
+    runSoon(source);
+  };
+  const choose = (source: string) => {
+    setDialog(null);
+    void store?.choose(source);
+    runNow(source);
+  };
+  const insert = (code: string) => {
+    setTab("script");
+    requestAnimationFrame(() => editor.current?.insert(code));
+  };
+  const description = run.onStage && props.describeShow ? props.describeShow(run.onStage) : presentRun(run);
+
+  return (
+    <div className="studio" data-tab={selected}>
+      <StudioHeader
+        title={title}
+        context={props.context}
+        homeHref={props.homeHref}
+        draft={draft}
+        versions={versions}
+        onLook={(version) => setDialog({ kind: "version", version })}
+        onChoose={() => setDialog({ kind: "versions" })}
+        onHandIn={props.onHandIn && (() => setDialog({ kind: "hand-in" }))}
+      />
+      <div className="studio-columns">
+        <SongColumn
+          layout={layout}
+          song={song}
+          player={player}
+          run={run}
+          isGentle={isGentle}
+          gentleReason={gentleReason}
+          onGentle={setWantsGentle}
+          onGoToLine={goToLine}
+          description={description}
+        />
+        <div className="studio-work">
+          <div id="studio-pane-script" className="studio-script-slot" {...(isPhone && { role: "tabpanel", "aria-labelledby": "studio-tab-script" })}>
+            <ScriptPanel
+              ref={editor}
+              source={firstSource}
+              wantedSource={draft.source}
+              names={names}
+              problem={problem}
+              actLines={actLines}
+              player={player}
+              stageNote={presentStage(run.onStage !== null, problem !== null, run.isRunning)}
+              isRunning={run.isRunning}
+              onChange={edit}
+              onRun={runNow}
+              onSave={() => void store?.flush()}
+            />
+          </div>
+          <div className="studio-tray studio-card">
+            <TrayTabs selected={selected} onSelect={setTab} counts={{ check: findings.length + (problem ? 1 : 0), notes: run.outcome?.notes.length ?? 0 }} hasScript={isPhone} />
+            {selected !== "script" && (
+              <div id={`studio-pane-${selected}`} className="studio-pane" role="tabpanel" aria-labelledby={`studio-tab-${selected}`} tabIndex={0}>
+                {selected === "check" && (
+                  <CheckPane song={song} run={run} onShow={(finding) => showMoment(finding.moments[0], finding.lines[0])} onShowProblem={({ range }) => goToLine(range.line)} />
+                )}
+                {selected === "notes" && <NotesPane song={song} notes={run.outcome?.notes ?? []} onShow={(note) => showMoment(note.tick, note.line)} />}
+                {selected === "names" && <NamesPane layout={layout} names={names} onInsert={insert} />}
+              </div>
+            )}
+          </div>
+        </div>
+      </div>
+      <p className="sr-only" role="status">
+        {run.isRunning ? "" : presentRun(run)}
+      </p>
+      {dialog?.kind === "hand-in" && props.onHandIn && (
+        <HandInDialog
+          title={title}
+          run={run}
+          isRunCurrent={run.ranSource === draft.source}
+          onHandIn={() => props.onHandIn?.(draft.source) ?? Promise.resolve()}
+          onClose={() => setDialog(null)}
+        />
+      )}
+      {dialog?.kind === "version" && (
+        <VersionDialog
+          version={dialog.version}
+          readSource={props.readVersion}
+          onUse={(source) => {
+            setDialog(null);
+            edit(source);
+          }}
+          onClose={() => setDialog(null)}
+        />
+      )}
+      {dialog?.kind === "versions" && draft.sync.kind === "two-versions" && (
+        <TwoVersionsDialog mine={draft.source} theirs={draft.sync.theirs.source} onChoose={choose} onClose={() => setDialog(null)} />
+      )}
+    </div>
+  );
+}
+
+function presentStage(hasStage: boolean, hasProblem: boolean, isRunning: boolean): string {
+  if (!hasStage) return hasProblem ? "Nothing on stage yet" : isRunning ? "Running" : "Not run yet";
+  return hasProblem ? "On stage: your last run that worked" : "On stage: this script";
+}
