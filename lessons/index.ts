@@ -5,4 +5,6 @@ import { LessonFileSchema } from "./schema.ts";
 import type { LessonFile } from "./schema.ts";
 
 /** The course in order. Every file is checked against its schema when it is loaded. */
-export const LESSONS: readonly LessonFile[] = [FIRST_LIGHT, CHANGING_COLOURS, FOR_EACH_FRONT].map((lesson) => LessonFileSchema.parse(lesson));
+export const LESSONS: readonly LessonFile[] = [FIRST_LIGHT, CHANGING_COLOURS, FOR_EACH_FRONT].map((lesson) =>
+  LessonFileSchema.parse(lesson),
+);

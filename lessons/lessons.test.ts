@@ -27,7 +27,9 @@ async function check(lesson: LessonFile, step: LessonFileStep, source: string): 
   return checkExercise(step, { outcome, source, layout: DEMO_SQUARE, song: demoSong(lesson.songId).beatMap, aim });
 }
 
-const steps = LESSONS.flatMap((lesson) => lesson.steps.map((step) => [`${lesson.id}/${step.id}`, lesson, step] as const));
+const steps = LESSONS.flatMap((lesson) =>
+  lesson.steps.map((step) => [`${lesson.id}/${step.id}`, lesson, step] as const),
+);
 const checked = steps.filter(([, , step]) => step.checks.length > 0);
 
 describe("every exercise", () => {
@@ -38,23 +40,29 @@ describe("every exercise", () => {
   });
 
   // A step of kind "run" is there to be run as it stands.
-  it.each(checked.filter(([, , step]) => step.kind !== "run"))("%s is not passed by its starter, and says what to try", async (_, lesson, step) => {
-    const results = await check(lesson, step, step.starter ?? "");
-    expect(results).toHaveLength(step.checks.length);
-    expect(results.every((result) => result.state === "passed")).toBe(false);
-    for (const result of results) if (result.state === "not-yet") expect(result.hint).not.toBeNull();
-  });
+  it.each(checked.filter(([, , step]) => step.kind !== "run"))(
+    "%s is not passed by its starter, and says what to try",
+    async (_, lesson, step) => {
+      const results = await check(lesson, step, step.starter ?? "");
+      expect(results).toHaveLength(step.checks.length);
+      expect(results.every((result) => result.state === "passed")).toBe(false);
+      for (const result of results) if (result.state === "not-yet") expect(result.hint).not.toBeNull();
+    },
+  );
 
   it.each(checked)("%s is not passed by an empty script", async (_, lesson, step) => {
     const results = await check(lesson, step, "");
     expect(results.some((result) => result.state === "not-yet")).toBe(true);
   });
 
-  it.each(steps.filter(([, , step]) => step.aim !== null))("%s has an aim that runs and lights something", async (_, lesson, step) => {
-    const outcome = await run(lesson, step.aim ?? "");
-    expect(outcome.ok).toBe(true);
-    expect(outcome.cueCount).toBeGreaterThan(0);
-  });
+  it.each(steps.filter(([, , step]) => step.aim !== null))(
+    "%s has an aim that runs and lights something",
+    async (_, lesson, step) => {
+      const outcome = await run(lesson, step.aim ?? "");
+      expect(outcome.ok).toBe(true);
+      expect(outcome.cueCount).toBeGreaterThan(0);
+    },
+  );
 });
 
 describe("questions", () => {
@@ -63,8 +71,22 @@ describe("questions", () => {
     const [lesson] = LESSONS;
     const step = lesson?.steps.find((one) => one.id === "without-wait");
     if (!lesson || !step) throw new Error("The step is gone.");
-    const darkness = { ...step, checks: [0, 0.1, 1].map((atBeat, n) => ({ id: `d${n}`, kind: "dark" as const, lights: { front: "bakery" }, atBeat, text: "It is dark.", hint: "Nothing." })) };
-    expect((await check(lesson, darkness, step.starter ?? "")).map((result) => result.state)).toEqual(["passed", "passed", "passed"]);
+    const darkness = {
+      ...step,
+      checks: [0, 0.1, 1].map((atBeat, n) => ({
+        id: `d${n}`,
+        kind: "dark" as const,
+        lights: { front: "bakery" },
+        atBeat,
+        text: "It is dark.",
+        hint: "Nothing.",
+      })),
+    };
+    expect((await check(lesson, darkness, step.starter ?? "")).map((result) => result.state)).toEqual([
+      "passed",
+      "passed",
+      "passed",
+    ]);
   });
 
   it("changing-colours/kept-answer: the note says 2", async () => {
@@ -102,7 +124,8 @@ describe("the course", () => {
   it("is written for readers of grade 5 or 6 (common practice for these classes, no source)", () => {
     for (const lesson of LESSONS) {
       const text = lesson.steps.flatMap((step) => [
-        ...step.text, ...step.checks.flatMap((one) => [one.text, one.hint]),
+        ...step.text,
+        ...step.checks.flatMap((one) => [one.text, one.hint]),
         ...(step.question === null ? [] : [step.question.ask, ...step.question.choices.map((choice) => choice.answer)]),
       ]);
       for (const paragraph of text) expect(readingGrade(countText(paragraph)), paragraph).toBeLessThan(9);

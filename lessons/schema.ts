@@ -23,7 +23,10 @@ export const LessonFileStepSchema = z.object({
   starter: Script.nullable().default(null),
   question: z
     .object({ ask: z.string().min(5).max(200), choices: z.array(ChoiceSchema).min(2).max(5) })
-    .refine((question) => question.choices.filter((choice) => choice.isRight).length === 1, "Exactly one choice is right.")
+    .refine(
+      (question) => question.choices.filter((choice) => choice.isRight).length === 1,
+      "Exactly one choice is right.",
+    )
     .nullable()
     .default(null),
   /** A script whose ribbon is shown as the aim; its text is not. */

@@ -10,12 +10,25 @@ describe("reading grade (Flesch-Kincaid; values computed by hand from the formul
     expect(readingGrade(count)).toBeCloseTo(grade, 1);
   });
 
-  it.each([["wait", 1], ["light", 1], ["bakery", 3], ["colour", 2], ["variable", 4], ["note", 1], ["named", 1], ["time", 1], ["square", 1]])("%s has %i", (word, count) => {
+  it.each([
+    ["wait", 1],
+    ["light", 1],
+    ["bakery", 3],
+    ["colour", 2],
+    ["variable", 4],
+    ["note", 1],
+    ["named", 1],
+    ["time", 1],
+    ["square", 1],
+  ])("%s has %i", (word, count) => {
     expect(Math.abs(countSyllables(word) - count)).toBeLessThanOrEqual(1);
   });
 
   it("takes code as one short word", () => {
-    expect(countText("Write `square.front(\"bakery\").on()` here. Then run it.")).toMatchObject({ sentences: 2, words: 6 });
+    expect(countText('Write `square.front("bakery").on()` here. Then run it.')).toMatchObject({
+      sentences: 2,
+      words: 6,
+    });
     expect(readingGrade(countText(""))).toBe(0);
   });
 });

@@ -18,7 +18,8 @@ function shownShares(frame: Frame, light: number): Shares | null {
   return shares(frame.rgb[light * 3] ?? 0, frame.rgb[light * 3 + 1] ?? 0, frame.rgb[light * 3 + 2] ?? 0);
 }
 
-const isNear = (a: Shares, b: Shares): boolean => a.every((share, channel) => Math.abs(share - (b[channel] ?? 0)) <= NEAR);
+const isNear = (a: Shares, b: Shares): boolean =>
+  a.every((share, channel) => Math.abs(share - (b[channel] ?? 0)) <= NEAR);
 
 /** Whether a light shows this colour, at whatever level. `colour` is a CSS name or `#rrggbb`. */
 export function showsColour(frame: Frame, light: number, colour: string): boolean {

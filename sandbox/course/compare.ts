@@ -29,7 +29,9 @@ function restTick({ cues }: Timeline): number {
  */
 export function compareRuns(mine: CheckedRun, aim: CheckedRun): Difference {
   const rest = Math.max(restTick(mine.timeline), restTick(aim.timeline));
-  const ticks = [...new Set([...mine.momentsSeen(), ...aim.momentsSeen()])].filter((tick) => tick <= rest).sort((a, b) => a - b);
+  const ticks = [...new Set([...mine.momentsSeen(), ...aim.momentsSeen()])]
+    .filter((tick) => tick <= rest)
+    .sort((a, b) => a - b);
   let lit = 0;
   let different = 0;
   let first: { tick: number; light: number } | null = null;
@@ -40,8 +42,11 @@ export function compareRuns(mine: CheckedRun, aim: CheckedRun): Difference {
       const [levelA, levelB] = [a.level[light] ?? 0, b.level[light] ?? 0];
       if (levelA === 0 && levelB === 0) continue;
       lit += 1;
-      const isAlike = Math.abs(levelA - levelB) <= LEVEL_ALIKE &&
-        [0, 1, 2].every((channel) => Math.abs((a.rgb[light * 3 + channel] ?? 0) - (b.rgb[light * 3 + channel] ?? 0)) <= COLOUR_ALIKE);
+      const isAlike =
+        Math.abs(levelA - levelB) <= LEVEL_ALIKE &&
+        [0, 1, 2].every(
+          (channel) => Math.abs((a.rgb[light * 3 + channel] ?? 0) - (b.rgb[light * 3 + channel] ?? 0)) <= COLOUR_ALIKE,
+        );
       if (isAlike) continue;
       different += 1;
       first ??= { tick, light };

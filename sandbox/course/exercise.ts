@@ -24,12 +24,28 @@ const beat = z.number().min(0).max(2000);
 const count = z.int().min(0).max(100_000);
 
 /** Things that a script can use; each is found in its syntax tree. */
-export const USES = ["for-of", "for", "variable", "changing-variable", "constant", "function", "if", "nested-loop"] as const;
+export const USES = [
+  "for-of",
+  "for",
+  "variable",
+  "changing-variable",
+  "constant",
+  "function",
+  "if",
+  "nested-loop",
+] as const;
 export type Use = (typeof USES)[number];
 
 export const ExerciseCheckSchema = z.discriminatedUnion("kind", [
   /** At a beat, at least `share` of the lights have `atLeast`. */
-  z.object({ ...said, kind: z.literal("lit"), lights: LightChoiceSchema, atBeat: beat, atLeast: z.number().min(1).max(100).default(20), share: z.number().min(0.01).max(1).default(1) }),
+  z.object({
+    ...said,
+    kind: z.literal("lit"),
+    lights: LightChoiceSchema,
+    atBeat: beat,
+    atLeast: z.number().min(1).max(100).default(20),
+    share: z.number().min(0.01).max(1).default(1),
+  }),
   /** At a beat, none of the lights can be seen. */
   z.object({ ...said, kind: z.literal("dark"), lights: LightChoiceSchema, atBeat: beat }),
   /** At a beat, every light that is lit and can show a colour shows this one; at least one does. */
@@ -45,7 +61,13 @@ export const ExerciseCheckSchema = z.discriminatedUnion("kind", [
   /** The ribbon agrees with the aim's: at most `tolerance` of what lights in either may differ. */
   z.object({ ...said, kind: z.literal("same-as-aim"), tolerance: z.number().min(0).max(1).default(0.02) }),
   /** Cues of one action, or of all. */
-  z.object({ ...said, kind: z.literal("cue-count"), action: z.enum(["on", "off", "fadeTo", "pulse", "colour"]).optional(), atLeast: count, atMost: count.optional() }),
+  z.object({
+    ...said,
+    kind: z.literal("cue-count"),
+    action: z.enum(["on", "off", "fadeTo", "pulse", "colour"]).optional(),
+    atLeast: count,
+    atMost: count.optional(),
+  }),
   /** Something still changes at or after this beat. */
   z.object({ ...said, kind: z.literal("lasts-until"), beat }),
   /** From this beat on, or from the last change on when left out, all is dark. */

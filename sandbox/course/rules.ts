@@ -4,7 +4,7 @@ import { ACTION_CODE } from "../timeline/model.ts";
 import { ColourCounter, showsColour } from "./colour-seen.ts";
 import { compareRuns } from "./compare.ts";
 import type { CheckOf, ExerciseCheck, LightChoice } from "./exercise.ts";
-import { CheckedRun, SEEN } from "./stage.ts";
+import { type CheckedRun, SEEN } from "./stage.ts";
 import { countQuoted, countUses, countWord } from "./syntax.ts";
 import type { Count } from "./syntax.ts";
 
@@ -31,8 +31,10 @@ const toBeat = (tick: number): number => Math.round((tick / TICKS_PER_BEAT) * 10
 const times = (count: number, one: string, many = `${one}s`): string => `${count} ${count === 1 ? one : many}`;
 
 function nameOf(choice: LightChoice): string {
-  if (choice.front !== undefined) return choice.part === undefined ? `The ${choice.front}` : `The ${choice.part} of the ${choice.front}`;
-  if (choice.side !== undefined) return choice.part === undefined ? `The ${choice.side} side` : `The ${choice.part} of the ${choice.side} side`;
+  if (choice.front !== undefined)
+    return choice.part === undefined ? `The ${choice.front}` : `The ${choice.part} of the ${choice.front}`;
+  if (choice.side !== undefined)
+    return choice.part === undefined ? `The ${choice.side} side` : `The ${choice.part} of the ${choice.side} side`;
   return choice.part === undefined ? "The square" : `The ${choice.part} of the square`;
 }
 
@@ -41,8 +43,18 @@ function lit(check: CheckOf<"lit">, { run }: Evidence): Verdict {
   const frame = run.frameAt(check.atBeat);
   const bright = lights.filter((light) => (frame.level[light.index] ?? 0) >= check.atLeast);
   const isPassed = lights.length > 0 && bright.length >= lights.length * check.share;
-  const what = bright.length === 0 ? "dark" : bright.length === lights.length ? "lit" : `lit at ${bright.length} of ${lights.length} lights`;
-  return { isPassed, seen: `${nameOf(check.lights)} was ${what} at beat ${check.atBeat}.`, tick: toTick(check.atBeat), line: run.lineOf(frame.cue[bright[0]?.index ?? -1] ?? -1) };
+  const what =
+    bright.length === 0
+      ? "dark"
+      : bright.length === lights.length
+        ? "lit"
+        : `lit at ${bright.length} of ${lights.length} lights`;
+  return {
+    isPassed,
+    seen: `${nameOf(check.lights)} was ${what} at beat ${check.atBeat}.`,
+    tick: toTick(check.atBeat),
+    line: run.lineOf(frame.cue[bright[0]?.index ?? -1] ?? -1),
+  };
 }
 
 function dark(check: CheckOf<"dark">, { run }: Evidence): Verdict {
@@ -58,7 +70,9 @@ function dark(check: CheckOf<"dark">, { run }: Evidence): Verdict {
 
 function colour(check: CheckOf<"colour">, { run }: Evidence): Verdict {
   const frame = run.frameAt(check.atBeat);
-  const shining = run.choose(check.lights).filter((light) => light.hasColour && (frame.level[light.index] ?? 0) >= SEEN);
+  const shining = run
+    .choose(check.lights)
+    .filter((light) => light.hasColour && (frame.level[light.index] ?? 0) >= SEEN);
   const other = shining.find((light) => !showsColour(frame, light.index, check.colour));
   const isPassed = shining.length > 0 && other === undefined;
   const what = shining.length === 0 ? "dark" : isPassed ? check.colour : `not ${check.colour}`;
@@ -94,7 +108,10 @@ function order(check: CheckOf<"order">, { run }: Evidence): Verdict {
 function inWalkingOrder(check: CheckOf<"in-walking-order">, { run }: Evidence): Verdict {
   const used = run.firstLights().filter((one) => one.tick !== null);
   if (used.length < check.atLeast) return { isPassed: false, seen: `${times(used.length, "front")} came on.` };
-  return inOrder(used.map((one) => one.front.front.name), run);
+  return inOrder(
+    used.map((one) => one.front.front.name),
+    run,
+  );
 }
 
 function frontsLit(check: CheckOf<"fronts-lit">, { run }: Evidence): Verdict {
@@ -109,7 +126,10 @@ function coloursSeen(check: CheckOf<"colours-seen">, { run }: Evidence): Verdict
     for (const light of colourful) if ((frame.level[light.index] ?? 0) >= SEEN) counter.add(frame, light.index);
     return counter.count < check.atLeast;
   });
-  return { isPassed: counter.count >= check.atLeast, seen: `${times(counter.count, "colour was", "colours were")} seen.` };
+  return {
+    isPassed: counter.count >= check.atLeast,
+    seen: `${times(counter.count, "colour was", "colours were")} seen.`,
+  };
 }
 
 function sameAsAim(check: CheckOf<"same-as-aim">, { run, aim }: Evidence): Verdict {
@@ -133,7 +153,13 @@ function cueCount(check: CheckOf<"cue-count">, { run }: Evidence): Verdict {
   let count = 0;
   for (let cue = 0; cue < cues.count; cue += 1) if (wanted === null || cues.action[cue] === wanted) count += 1;
   const isPassed = count >= check.atLeast && count <= (check.atMost ?? Number.POSITIVE_INFINITY);
-  return { isPassed, seen: check.action === undefined ? `The lights changed ${times(count, "time")}.` : `\`${check.action}\` ran ${times(count, "time")}.` };
+  return {
+    isPassed,
+    seen:
+      check.action === undefined
+        ? `The lights changed ${times(count, "time")}.`
+        : `\`${check.action}\` ran ${times(count, "time")}.`,
+  };
 }
 
 function lastsUntil(check: CheckOf<"lasts-until">, { run }: Evidence): Verdict {
@@ -149,8 +175,17 @@ function lastsUntil(check: CheckOf<"lasts-until">, { run }: Evidence): Verdict {
 function darkAtTheEnd(_: CheckOf<"dark-at-the-end">, { run }: Evidence): Verdict {
   const frame = run.frameAtTick(run.timeline.endTick - 1);
   const still = run.lights.find((light) => (frame.level[light.index] ?? 0) >= SEEN);
-  if (still === undefined) return { isPassed: run.timeline.cues.count > 0, seen: run.timeline.cues.count > 0 ? "All was dark at the end." : "Nothing was ever lit." };
-  return { isPassed: false, seen: `The ${still.frontName} stayed lit.`, line: run.lineOf(frame.cue[still.index] ?? -1), tick: run.timeline.endTick - 1 };
+  if (still === undefined)
+    return {
+      isPassed: run.timeline.cues.count > 0,
+      seen: run.timeline.cues.count > 0 ? "All was dark at the end." : "Nothing was ever lit.",
+    };
+  return {
+    isPassed: false,
+    seen: `The ${still.frontName} stayed lit.`,
+    line: run.lineOf(frame.cue[still.index] ?? -1),
+    tick: run.timeline.endTick - 1,
+  };
 }
 
 function note(check: CheckOf<"note">, { outcome }: Evidence): Verdict {
@@ -158,18 +193,34 @@ function note(check: CheckOf<"note">, { outcome }: Evidence): Verdict {
   const match = check.says === undefined ? notes[0] : notes.find((one) => one.text === check.says);
   const first = notes[0];
   const seen = first === undefined ? "No notes were printed." : `The first note says "${first.text.slice(0, 40)}".`;
-  return { isPassed: notes.length >= check.atLeast && (check.says === undefined || match !== undefined), seen, line: match?.line ?? first?.line ?? null, tick: match?.tick ?? first?.tick ?? null };
+  return {
+    isPassed: notes.length >= check.atLeast && (check.says === undefined || match !== undefined),
+    seen,
+    line: match?.line ?? first?.line ?? null,
+    tick: match?.tick ?? first?.tick ?? null,
+  };
 }
 
 const USE_NAMES = {
-  "for-of": "a `for..of` loop", for: "a `for` loop", variable: "a variable", "changing-variable": "a new value for a variable",
-  constant: "a `const`", function: "a function", if: "an `if`", "nested-loop": "a loop in a loop",
+  "for-of": "a `for..of` loop",
+  for: "a `for` loop",
+  variable: "a variable",
+  "changing-variable": "a new value for a variable",
+  constant: "a `const`",
+  function: "a function",
+  if: "an `if`",
+  "nested-loop": "a loop in a loop",
 } as const;
 
 function counted(found: Count, atLeast: number, atMost: number | undefined, name: string): Verdict {
   const isPassed = found.count >= atLeast && found.count <= (atMost ?? Number.POSITIVE_INFINITY);
   const line = found.count > atLeast ? found.lines.at(-1) : found.lines[0];
-  return { isPassed, seen: found.count === 0 ? `I found no ${name.replace(/^an? /, "")}.` : `I found ${name} ${times(found.count, "time")}.`, line: line ?? null };
+  return {
+    isPassed,
+    seen:
+      found.count === 0 ? `I found no ${name.replace(/^an? /, "")}.` : `I found ${name} ${times(found.count, "time")}.`,
+    line: line ?? null,
+  };
 }
 
 const RULES: Rules = {
@@ -187,7 +238,8 @@ const RULES: Rules = {
   note,
   uses: (check, { source }) => counted(countUses(source, check.what), check.atLeast, undefined, USE_NAMES[check.what]),
   word: (check, { source }) => counted(countWord(source, check.word), check.atLeast, check.atMost, `\`${check.word}\``),
-  quoted: (check, { source }) => counted(countQuoted(source, check.quoted), check.atLeast, check.atMost, `"${check.quoted}"`),
+  quoted: (check, { source }) =>
+    counted(countQuoted(source, check.quoted), check.atLeast, check.atMost, `"${check.quoted}"`),
 };
 
 /** What a check finds in a run. */

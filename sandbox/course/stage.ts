@@ -84,7 +84,8 @@ export class CheckedRun {
     const first = new Map<number, number>();
     this.watch((frame) => {
       for (const front of this.fronts)
-        if (!first.has(front.index) && front.lights.some((light) => (frame.level[light] ?? 0) >= SEEN)) first.set(front.index, frame.tick);
+        if (!first.has(front.index) && front.lights.some((light) => (frame.level[light] ?? 0) >= SEEN))
+          first.set(front.index, frame.tick);
       return first.size < this.fronts.length;
     });
     return this.fronts.map((front) => ({ front, tick: first.get(front.index) ?? null }));

@@ -40,9 +40,11 @@ const ASSIGNMENTS: ReadonlySet<ts.SyntaxKind> = new Set([
 
 function changesVariable(node: ts.Node): boolean {
   if (ts.isBinaryExpression(node)) return ASSIGNMENTS.has(node.operatorToken.kind) && ts.isIdentifier(node.left);
-  return (ts.isPostfixUnaryExpression(node) || ts.isPrefixUnaryExpression(node)) &&
+  return (
+    (ts.isPostfixUnaryExpression(node) || ts.isPrefixUnaryExpression(node)) &&
     (node.operator === ts.SyntaxKind.PlusPlusToken || node.operator === ts.SyntaxKind.MinusMinusToken) &&
-    !ts.isForStatement(node.parent);
+    !ts.isForStatement(node.parent)
+  );
 }
 
 const USE_TEST: { readonly [U in Use]: (node: ts.Node) => boolean } = {
@@ -51,7 +53,9 @@ const USE_TEST: { readonly [U in Use]: (node: ts.Node) => boolean } = {
   variable: isOwnVariable,
   "changing-variable": changesVariable,
   constant: (node) => isOwnVariable(node) && isConstant(node),
-  function: (node) => ts.isFunctionDeclaration(node) || (isOwnVariable(node) && node.initializer !== undefined && ts.isArrowFunction(node.initializer)),
+  function: (node) =>
+    ts.isFunctionDeclaration(node) ||
+    (isOwnVariable(node) && node.initializer !== undefined && ts.isArrowFunction(node.initializer)),
   if: ts.isIfStatement,
   "nested-loop": (node) => isLoop(node) && isInLoop(node),
 };

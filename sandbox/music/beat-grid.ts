@@ -17,7 +17,11 @@ export interface BeatGrid {
 const toMoment = (beats: number): number => Math.round(beats * TICKS_PER_BEAT) / TICKS_PER_BEAT;
 
 /** Builds the grid for sounds between two MIDI ticks (`firstSound` < `lastSound`). */
-export function beatGrid(file: Pick<MidiFile, "meters" | "ticksPerQuarter">, firstSound: number, lastSound: number): BeatGrid {
+export function beatGrid(
+  file: Pick<MidiFile, "meters" | "ticksPerQuarter">,
+  firstSound: number,
+  lastSound: number,
+): BeatGrid {
   const ticks: number[] = [];
   const bars: Bar[] = [];
   let number = 0;

@@ -6,11 +6,20 @@ import { countedBeats, meterGrid } from "./meter-grid.ts";
 
 const Q = 480;
 const note = (quarters: number, length = 1, pitch = 60, velocity = 100, channel = 0): MidiNote => ({
-  tick: quarters * Q, ticks: length * Q, channel, pitch, velocity,
+  tick: quarters * Q,
+  ticks: length * Q,
+  channel,
+  pitch,
+  velocity,
 });
 const song = (notes: MidiNote[], rest: Partial<MidiFile> = {}): MidiFile => ({
-  format: 1, ticksPerQuarter: Q, tempos: [], meters: [], markers: [],
-  tracks: [{ name: "bells", program: null, notes }], ...rest,
+  format: 1,
+  ticksPerQuarter: Q,
+  tempos: [],
+  meters: [],
+  markers: [],
+  tracks: [{ name: "bells", program: null, notes }],
+  ...rest,
 });
 
 describe("beats and bars (LANGUAGE rules 2, 21, 22)", () => {
@@ -19,7 +28,10 @@ describe("beats and bars (LANGUAGE rules 2, 21, 22)", () => {
     // The first sound is in the middle of the third beat of bar 1: two beats are left in that bar.
     const map = buildBeatMap(song([note(2.5, 0.5), note(4, 4)]));
     expect(map.beats[0]).toBe(1_000_000);
-    expect(map.bars).toEqual([{ number: 0, start: 0, beats: 2 }, { number: 1, start: 2, beats: 4 }]);
+    expect(map.bars).toEqual([
+      { number: 0, start: 0, beats: 2 },
+      { number: 1, start: 2, beats: 4 },
+    ]);
     expect(map.instruments[0]?.hits).toEqual([0.5, 2]);
   });
 
@@ -35,7 +47,16 @@ describe("beats and bars (LANGUAGE rules 2, 21, 22)", () => {
   });
 
   it("counts 6/8 in two, 9/8 in three, 3/8 in three, 2/2 in two", () => {
-    expect([[6, 8], [9, 8], [12, 8], [3, 8], [2, 2], [7, 8]].map(([beats = 0, unit = 0]) => countedBeats({ tick: 0, beats, unit }))).toEqual([2, 3, 4, 3, 2, 7]);
+    expect(
+      [
+        [6, 8],
+        [9, 8],
+        [12, 8],
+        [3, 8],
+        [2, 2],
+        [7, 8],
+      ].map(([beats = 0, unit = 0]) => countedBeats({ tick: 0, beats, unit })),
+    ).toEqual([2, 3, 4, 3, 2, 7]);
     const map = buildBeatMap(song([note(0, 3)], { meters: [{ tick: 0, beats: 6, unit: 8 }] }));
     expect(map.beatsPerBar).toBe(2);
     // A dotted quarter at 120 quarters a minute lasts 0.75 s.
@@ -43,14 +64,37 @@ describe("beats and bars (LANGUAGE rules 2, 21, 22)", () => {
   });
 
   it("knows a pick-up that the file writes as a short first meter", () => {
-    const map = buildBeatMap(song([note(0), note(1, 3)], { meters: [{ tick: 0, beats: 1, unit: 4 }, { tick: Q, beats: 3, unit: 4 }] }));
+    const map = buildBeatMap(
+      song([note(0), note(1, 3)], {
+        meters: [
+          { tick: 0, beats: 1, unit: 4 },
+          { tick: Q, beats: 3, unit: 4 },
+        ],
+      }),
+    );
     expect(map.beatsPerBar).toBe(3);
-    expect(map.bars).toEqual([{ number: 0, start: 0, beats: 1 }, { number: 1, start: 1, beats: 3 }]);
+    expect(map.bars).toEqual([
+      { number: 0, start: 0, beats: 1 },
+      { number: 1, start: 1, beats: 3 },
+    ]);
   });
 
   it("begins a new bar with every meter", () => {
-    const grid = meterGrid({ ticksPerQuarter: Q, meters: [{ tick: 0, beats: 4, unit: 4 }, { tick: 6 * Q, beats: 3, unit: 4 }] }, 9 * Q);
-    expect(grid.map((bar) => [bar.tick / Q, bar.beats])).toEqual([[0, 4], [4, 2], [6, 3]]);
+    const grid = meterGrid(
+      {
+        ticksPerQuarter: Q,
+        meters: [
+          { tick: 0, beats: 4, unit: 4 },
+          { tick: 6 * Q, beats: 3, unit: 4 },
+        ],
+      },
+      9 * Q,
+    );
+    expect(grid.map((bar) => [bar.tick / Q, bar.beats])).toEqual([
+      [0, 4],
+      [4, 2],
+      [6, 3],
+    ]);
   });
 
   it("follows tempo changes inside a bar", () => {
@@ -61,16 +105,31 @@ describe("beats and bars (LANGUAGE rules 2, 21, 22)", () => {
 
 describe("sections and instruments (LANGUAGE rule 23)", () => {
   it("opens a section at every marker and closes it at the next", () => {
-    const markers = [{ tick: 0, name: "intro" }, { tick: 4 * Q, name: "chorus" }, { tick: 8 * Q, name: "" }, { tick: 12 * Q, name: "chorus" }];
+    const markers = [
+      { tick: 0, name: "intro" },
+      { tick: 4 * Q, name: "chorus" },
+      { tick: 8 * Q, name: "" },
+      { tick: 12 * Q, name: "chorus" },
+    ];
     expect(buildBeatMap(song([note(0, 16)], { markers })).sections).toEqual([
-      { name: "intro", start: 0, end: 4 }, { name: "chorus", start: 4, end: 8 }, { name: "chorus", start: 12, end: 16 },
+      { name: "intro", start: 0, end: 4 },
+      { name: "chorus", start: 4, end: 8 },
+      { name: "chorus", start: 12, end: 16 },
     ]);
   });
 
   it("sorts hits and notes, one a moment, one a start and pitch, the longest", () => {
     const map = buildBeatMap(song([note(1, 1, 64), note(0, 1, 60), note(0, 2, 60), note(0, 1, 67)]));
     expect(map.instruments).toEqual([
-      { name: "bells", hits: [0, 1], notes: [{ start: 0, beats: 2, pitch: 60 }, { start: 0, beats: 1, pitch: 67 }, { start: 1, beats: 1, pitch: 64 }] },
+      {
+        name: "bells",
+        hits: [0, 1],
+        notes: [
+          { start: 0, beats: 2, pitch: 60 },
+          { start: 0, beats: 1, pitch: 67 },
+          { start: 1, beats: 1, pitch: 64 },
+        ],
+      },
     ]);
   });
 
@@ -87,7 +146,11 @@ describe("sections and instruments (LANGUAGE rule 23)", () => {
         { name: "flute", program: 73, notes: [note(3)] },
       ],
     });
-    expect(buildBeatMap(file).instruments.map((one) => [one.name, one.hits.length])).toEqual([["channel 1", 1], ["drums", 1], ["flute", 2]]);
+    expect(buildBeatMap(file).instruments.map((one) => [one.name, one.hits.length])).toEqual([
+      ["channel 1", 1],
+      ["drums", 1],
+      ["flute", 2],
+    ]);
   });
 
   it("refuses a file without notes, and one that is far too long", () => {

@@ -76,7 +76,8 @@ export function buildBeatMap(file: MidiFile): BeatMap {
   if (notes.length === 0) throw new MidiFileError("This MIDI file has no notes. Choose another one.", 0);
   const first = notes.reduce((earliest, note) => Math.min(earliest, note.tick), Number.POSITIVE_INFINITY);
   const last = notes.reduce((latest, note) => Math.max(latest, note.tick + note.ticks), 0);
-  if (last / file.ticksPerQuarter > MOST_BEATS) throw new MidiFileError("This song is too long for a show. Cut it to a few minutes.", 0);
+  if (last / file.ticksPerQuarter > MOST_BEATS)
+    throw new MidiFileError("This song is too long for a show. Cut it to a few minutes.", 0);
   const grid = beatGrid(file, first, last);
   const beats = beatTimes(file, grid);
   return BeatMapSchema.parse({

@@ -43,7 +43,8 @@ export class ByteReader {
   }
 
   bytes(count: number): Uint8Array {
-    if (this.#at + count > this.#end) throw new MidiFileError("The file ends in the middle. Export it again.", this.#at);
+    if (this.#at + count > this.#end)
+      throw new MidiFileError("The file ends in the middle. Export it again.", this.#at);
     this.#at += count;
     return this.#bytes.subarray(this.#at - count, this.#at);
   }

@@ -20,7 +20,8 @@ export function countedBeats(meter: MeterChange): number {
   return isCompound(meter) ? meter.beats / 3 : meter.beats;
 }
 
-const barTicks = (meter: MeterChange, ticksPerQuarter: number): number => (meter.beats * 4 * ticksPerQuarter) / meter.unit;
+const barTicks = (meter: MeterChange, ticksPerQuarter: number): number =>
+  (meter.beats * 4 * ticksPerQuarter) / meter.unit;
 
 function metersFrom(file: Pick<MidiFile, "meters">): MeterChange[] {
   return file.meters[0]?.tick === 0 ? [...file.meters] : [COMMON, ...file.meters];

@@ -4,7 +4,15 @@ import type { Marker, MeterChange, MidiFile, MidiNote, MidiTrack, TempoChange } 
 import { readText } from "./midi-text.ts";
 
 const META = { trackName: 0x03, marker: 0x06, endOfTrack: 0x2f, tempo: 0x51, meter: 0x58 } as const;
-const KIND = { noteOff: 0x8, noteOn: 0x9, keyPressure: 0xa, control: 0xb, program: 0xc, pressure: 0xd, bend: 0xe } as const;
+const KIND = {
+  noteOff: 0x8,
+  noteOn: 0x9,
+  keyPressure: 0xa,
+  control: 0xb,
+  program: 0xc,
+  pressure: 0xd,
+  bend: 0xe,
+} as const;
 
 /** More events than any song has: a guard against files made to fill memory. */
 const MOST_EVENTS = 200_000;
@@ -45,7 +53,8 @@ class TrackReader {
       this.#tick += this.#reader.variableLength();
       this.#event();
       this.#all.events += 1;
-      if (this.#all.events > MOST_EVENTS) throw new MidiFileError("The file has more events than a song can have.", this.#reader.offset);
+      if (this.#all.events > MOST_EVENTS)
+        throw new MidiFileError("The file has more events than a song can have.", this.#reader.offset);
     }
     for (const key of this.#open.keys()) while (this.#close(key));
     this.#notes.sort((a, b) => a.tick - b.tick || a.pitch - b.pitch);
@@ -61,10 +70,15 @@ class TrackReader {
       this.#status = 0;
       return;
     }
-    if (first >= 0xf0) throw new MidiFileError("The file holds an event that belongs to a live cable, not to a file.", this.#reader.offset);
+    if (first >= 0xf0)
+      throw new MidiFileError(
+        "The file holds an event that belongs to a live cable, not to a file.",
+        this.#reader.offset,
+      );
     // A byte below 0x80 means: the same kind of event as before (running status).
     if (first >= 0x80) this.#status = this.#reader.byte();
-    else if (this.#status === 0) throw new MidiFileError("The file has an event of no kind. Export it again.", this.#reader.offset);
+    else if (this.#status === 0)
+      throw new MidiFileError("The file has an event of no kind. Export it again.", this.#reader.offset);
     this.#channelEvent(this.#status >> 4, this.#status & 0x0f);
   }
 
@@ -121,7 +135,8 @@ class TrackReader {
   }
 
   #meter(beats: number, power: number, at: number): void {
-    if (beats === 0 || beats > 32 || power > 5) throw new MidiFileError("The file has a meter that cannot be counted. Use 1 to 32 beats.", at);
+    if (beats === 0 || beats > 32 || power > 5)
+      throw new MidiFileError("The file has a meter that cannot be counted. Use 1 to 32 beats.", at);
     this.#all.meters.push({ tick: this.#tick, beats, unit: 2 ** power });
   }
 }
@@ -140,13 +155,16 @@ function lastAtEachTick<Event extends { readonly tick: number }>(events: readonl
 }
 
 function readHeader(reader: ByteReader): { format: 0 | 1; tracks: number; ticksPerQuarter: number } {
-  if (reader.letters() !== "MThd") throw new MidiFileError("This is not a MIDI file. Choose a file that ends in .mid.", 0);
+  if (reader.letters() !== "MThd")
+    throw new MidiFileError("This is not a MIDI file. Choose a file that ends in .mid.", 0);
   const header = reader.part(reader.number(4));
   const format = header.number(2);
   const tracks = header.number(2);
   const division = header.number(2);
-  if (format !== 0 && format !== 1) throw new MidiFileError("This MIDI file holds several songs (format 2). Export one song as format 1.", 8);
-  if (division >= 0x8000) throw new MidiFileError("This MIDI file counts film frames, not beats. Export it with ticks per quarter note.", 12);
+  if (format !== 0 && format !== 1)
+    throw new MidiFileError("This MIDI file holds several songs (format 2). Export one song as format 1.", 8);
+  if (division >= 0x8000)
+    throw new MidiFileError("This MIDI file counts film frames, not beats. Export it with ticks per quarter note.", 12);
   if (division === 0) throw new MidiFileError("This MIDI file has no ticks in a quarter note. Export it again.", 12);
   return { format, tracks, ticksPerQuarter: division };
 }
@@ -166,7 +184,8 @@ export function readMidi(bytes: Uint8Array): MidiFile {
     const kind = reader.letters();
     const chunk = reader.part(reader.number(4));
     if (kind === "MTrk") tracks.push(new TrackReader(chunk, all).read());
-    if (tracks.length > MOST_TRACKS) throw new MidiFileError(`The file has more than ${MOST_TRACKS} tracks.`, reader.offset);
+    if (tracks.length > MOST_TRACKS)
+      throw new MidiFileError(`The file has more than ${MOST_TRACKS} tracks.`, reader.offset);
   }
   return {
     format: header.format,

@@ -13,10 +13,18 @@ export function buildScore(file: MidiFile): Score {
     isDrums: part.isDrums,
     notes: part.notes.map((note) => {
       const start = seconds(note.tick);
-      return { start, lasts: seconds(note.tick + note.ticks) - start, pitch: note.pitch, velocity: note.velocity / 127 };
+      return {
+        start,
+        lasts: seconds(note.tick + note.ticks) - start,
+        pitch: note.pitch,
+        velocity: note.velocity / 127,
+      };
     }),
   }));
-  const end = tracks.reduce((latest, track) => track.notes.reduce((late, note) => Math.max(late, note.start + note.lasts), latest), 0);
+  const end = tracks.reduce(
+    (latest, track) => track.notes.reduce((late, note) => Math.max(late, note.start + note.lasts), latest),
+    0,
+  );
   return { seconds: end, tracks };
 }
 

@@ -15,7 +15,9 @@ interface Stretch {
  * added up over the stretches between tempo events; 120 a minute before the first one (RP-001).
  */
 export function tempoMap(file: Pick<MidiFile, "tempos" | "ticksPerQuarter">): TempoMap {
-  const stretches: Stretch[] = [{ tick: 0, micros: 0, microsPerTick: DEFAULT_MICROS_PER_QUARTER / file.ticksPerQuarter }];
+  const stretches: Stretch[] = [
+    { tick: 0, micros: 0, microsPerTick: DEFAULT_MICROS_PER_QUARTER / file.ticksPerQuarter },
+  ];
   for (const { tick, microsPerQuarter } of file.tempos) {
     const last = stretches.at(-1);
     if (!last) continue;

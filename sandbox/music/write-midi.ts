@@ -13,7 +13,8 @@ const bigEndian = (value: number, width: number): number[] =>
 
 /** A number of variable length (RP-001): 720 is 85 50. Whole, 0 to 0x0FFFFFFF. */
 export function variableLength(value: number): number[] {
-  if (!Number.isInteger(value) || value < 0 || value > 0x0f_ff_ff_ff) throw new RangeError(`${value} does not fit a variable length.`);
+  if (!Number.isInteger(value) || value < 0 || value > 0x0f_ff_ff_ff)
+    throw new RangeError(`${value} does not fit a variable length.`);
   const bytes = [value & 0x7f];
   for (let rest = value >>> 7; rest > 0; rest >>>= 7) bytes.unshift((rest & 0x7f) | 0x80);
   return bytes;
@@ -39,7 +40,11 @@ function trackChunk(events: readonly TimedBytes[]): number[] {
 
 function conductorEvents(file: MidiFile): TimedBytes[] {
   return [
-    ...file.tempos.map(({ tick, microsPerQuarter }) => ({ tick, order: 1, bytes: meta(0x51, bigEndian(microsPerQuarter, 3)) })),
+    ...file.tempos.map(({ tick, microsPerQuarter }) => ({
+      tick,
+      order: 1,
+      bytes: meta(0x51, bigEndian(microsPerQuarter, 3)),
+    })),
     ...file.meters.map(({ tick, beats, unit }) => {
       const isCompound = unit >= 8 && beats > 3 && beats % 3 === 0;
       const clocksPerClick = (96 / unit) * (isCompound ? 3 : 1);
@@ -65,7 +70,11 @@ function trackEvents(track: MidiTrack): TimedBytes[] {
  * one track for each of the file's. Reading them back gives the same notes.
  */
 export function writeMidi(file: MidiFile): Uint8Array {
-  const header = chunk("MThd", [...bigEndian(1, 2), ...bigEndian(file.tracks.length + 1, 2), ...bigEndian(file.ticksPerQuarter, 2)]);
+  const header = chunk("MThd", [
+    ...bigEndian(1, 2),
+    ...bigEndian(file.tracks.length + 1, 2),
+    ...bigEndian(file.ticksPerQuarter, 2),
+  ]);
   const tracks = [conductorEvents(file), ...file.tracks.map(trackEvents)].flatMap(trackChunk);
   return Uint8Array.from([...header, ...tracks]);
 }

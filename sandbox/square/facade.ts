@@ -93,7 +93,16 @@ function atticWindow(frame: Frame): Opening[] {
   const rise = frame.top - frame.eave;
   const middle = x + width / 2;
   const round = (radius: number, height: number): Opening[] => [
-    { kind: "attic", shape: "round", x: middle - radius, y: groundY - height - radius, width: 2 * radius, height: 2 * radius, columns: 1, rows: 1 },
+    {
+      kind: "attic",
+      shape: "round",
+      x: middle - radius,
+      y: groundY - height - radius,
+      width: 2 * radius,
+      height: 2 * radius,
+      columns: 1,
+      rows: 1,
+    },
   ];
   if (silhouette.roof === "round") return round(Math.min(width * 0.13, rise * 0.36), frame.eave + rise * 0.34);
   if (silhouette.roof === "pediment") return round(rise * 0.24, frame.eave + rise * 0.36);
@@ -101,11 +110,28 @@ function atticWindow(frame: Frame): Opening[] {
   const size = Math.min(width * 0.2, rise * 0.36);
   const y = groundY - frame.eave - rise * 0.26;
   if (frame.mark % 2 === 0) return round(size * 0.5, frame.eave + rise * 0.26);
-  return [{ kind: "attic", shape: "arch", x: middle - size / 2, y: y - size * 0.75, width: size, height: size * 1.3, columns: 2, rows: 1 }];
+  return [
+    {
+      kind: "attic",
+      shape: "arch",
+      x: middle - size / 2,
+      y: y - size * 0.75,
+      width: size,
+      height: size * 1.3,
+      columns: 2,
+      rows: 1,
+    },
+  ];
 }
 
 /** Two openings beside a door in the middle, centred at these shares of the width. */
-function besideDoor(frame: Frame, shares: readonly number[], box: { width: number; top: number; height: number }, shape: "rect" | "arch", rows: number): Opening[] {
+function besideDoor(
+  frame: Frame,
+  shares: readonly number[],
+  box: { width: number; top: number; height: number },
+  shape: "rect" | "arch",
+  rows: number,
+): Opening[] {
   return shares.map((share) => ({
     kind: "window",
     shape,
@@ -123,7 +149,14 @@ function groundFloor(frame: Frame): { openings: Opening[]; door: Opening } {
   const g = frame.groundFloor;
   const leaf = Math.min(width * 0.2, unit * 0.075);
   const door = (left: number, share: number, shape: "rect" | "arch"): Opening => ({
-    kind: "door", shape, x: left, y: groundY - g * 0.72, width: leaf * share, height: g * 0.72, columns: 1, rows: 1,
+    kind: "door",
+    shape,
+    x: left,
+    y: groundY - g * 0.72,
+    width: leaf * share,
+    height: g * 0.72,
+    columns: 1,
+    rows: 1,
   });
   const middle = x + width / 2;
   switch (silhouette.ground) {
@@ -132,21 +165,36 @@ function groundFloor(frame: Frame): { openings: Opening[]; door: Opening } {
       const left = isFlipped ? x + width * 0.17 + leaf : x + width * 0.09;
       const glass = width * 0.74 - leaf;
       const shop: Opening = {
-        kind: "shop", shape: "rect", x: left, y: groundY - g * 0.7, width: glass, height: g * 0.56,
-        columns: Math.max(2, Math.round(glass / (unit * 0.055))), rows: 1,
+        kind: "shop",
+        shape: "rect",
+        x: left,
+        y: groundY - g * 0.7,
+        width: glass,
+        height: g * 0.56,
+        columns: Math.max(2, Math.round(glass / (unit * 0.055))),
+        rows: 1,
       };
       return { openings: [shop], door: door(isFlipped ? x + width * 0.1 : x + width * 0.9 - leaf, 1, "rect") };
     }
     case "door": {
       const pane = Math.min(width * 0.2, unit * 0.09);
-      return { openings: besideDoor(frame, [0.2, 0.8], { width: pane, top: g * 0.72, height: g * 0.46 }, "rect", 2), door: door(middle - leaf * 0.6, 1.2, "arch") };
+      return {
+        openings: besideDoor(frame, [0.2, 0.8], { width: pane, top: g * 0.72, height: g * 0.46 }, "rect", 2),
+        door: door(middle - leaf * 0.6, 1.2, "arch"),
+      };
     }
     case "marquee":
-      return { openings: besideDoor(frame, [0.16, 0.84], { width: width * 0.18, top: g * 0.62, height: g * 0.44 }, "rect", 1), door: door(middle - leaf * 0.75, 1.5, "rect") };
+      return {
+        openings: besideDoor(frame, [0.16, 0.84], { width: width * 0.18, top: g * 0.62, height: g * 0.44 }, "rect", 1),
+        door: door(middle - leaf * 0.75, 1.5, "rect"),
+      };
     case "arches":
     case "columns": {
       const shape = silhouette.ground === "arches" ? "arch" : "rect";
-      return { openings: besideDoor(frame, [0.18, 0.82], { width: width * 0.15, top: g * 0.74, height: g * 0.62 }, shape, 2), door: door(middle - leaf * 0.6, 1.2, "arch") };
+      return {
+        openings: besideDoor(frame, [0.18, 0.82], { width: width * 0.15, top: g * 0.74, height: g * 0.62 }, shape, 2),
+        door: door(middle - leaf * 0.6, 1.2, "arch"),
+      };
     }
   }
 }
@@ -161,7 +209,11 @@ function tower(frame: Frame): Tower | null {
   const left = middle - wide / 2;
   return {
     body: { x: left, y: top, width: wide, height: base - top },
-    cap: [{ x: left - wide * 0.1, y: top }, { x: middle, y: groundY - unit * 0.985 }, { x: left + wide * 1.1, y: top }],
+    cap: [
+      { x: left - wide * 0.1, y: top },
+      { x: middle, y: groundY - unit * 0.985 },
+      { x: left + wide * 1.1, y: top },
+    ],
     clock: { x: middle, y: top + wide * 0.62, radius: wide * 0.36 },
     belfry: { shape: "arch", x: middle - wide * 0.22, y: top + wide * 1.12, width: wide * 0.44, height: wide * 0.62 },
   };
@@ -173,13 +225,23 @@ function chimney(frame: Frame): Rect | null {
   const isSteep = ["gable", "step", "bell"].includes(silhouette.roof);
   const fromMiddle = Math.abs(2 * silhouette.chimney - 1);
   const height = isSteep ? frame.top + (frame.eave - frame.top) * fromMiddle : frame.top;
-  return { x: x + width * silhouette.chimney, y: groundY - height - unit * 0.05, width: Math.max(2, width * 0.085), height: unit * 0.16 };
+  return {
+    x: x + width * silhouette.chimney,
+    y: groundY - height - unit * 0.05,
+    width: Math.max(2, width * 0.085),
+    height: unit * 0.16,
+  };
 }
 
 function sills(openings: readonly Opening[], unit: number): Rect[] {
   return openings
     .filter((opening) => opening.kind !== "shop" && opening.shape !== "round")
-    .map((opening) => ({ x: opening.x - opening.width * 0.18, y: opening.y + opening.height, width: opening.width * 1.36, height: unit * 0.007 }));
+    .map((opening) => ({
+      x: opening.x - opening.width * 0.18,
+      y: opening.y + opening.height,
+      width: opening.width * 1.36,
+      height: unit * 0.007,
+    }));
 }
 
 /** Where a house is put: its left edge, width, the ground, and the pixels of one silhouette unit. */
@@ -201,7 +263,10 @@ export function facadeOf(name: string, silhouette: Silhouette, plot: Plot): Faca
   const openings = [...upperWindows(frame), ...atticWindow(frame), ...ground.openings];
   const isMarquee = silhouette.ground === "marquee";
   return {
-    x, width, groundY, unit,
+    x,
+    width,
+    groundY,
+    unit,
     y: groundY - top,
     height: top,
     eaveY: groundY - eave,

@@ -16,19 +16,48 @@ describe("shapes", () => {
   });
 
   it("cuts a path into equal parts and takes their middles", () => {
-    const corner = [{ x: 0, y: 0 }, { x: 3, y: 0 }, { x: 3, y: 4 }];
+    const corner = [
+      { x: 0, y: 0 },
+      { x: 3, y: 0 },
+      { x: 3, y: 4 },
+    ];
     expect(pathLength(corner)).toBe(7);
     expect(inParts(corner, 7).map(({ x, y }) => [x, y])).toEqual([
-      [0.5, 0], [1.5, 0], [2.5, 0], [3, 0.5], [3, 1.5], [3, 2.5], [3, 3.5],
+      [0.5, 0],
+      [1.5, 0],
+      [2.5, 0],
+      [3, 0.5],
+      [3, 1.5],
+      [3, 2.5],
+      [3, 3.5],
     ]);
     expect(everyStep(corner, 2)).toHaveLength(4);
-    expect(everyStep([{ x: 1, y: 1 }, { x: 1, y: 1 }], 2)).toEqual([{ x: 1, y: 1 }]);
+    expect(
+      everyStep(
+        [
+          { x: 1, y: 1 },
+          { x: 1, y: 1 },
+        ],
+        2,
+      ),
+    ).toEqual([{ x: 1, y: 1 }]);
   });
 });
 
 describe("roofs", () => {
   it("all run from eave to eave, touch the top and never go back", () => {
-    for (const roof of ["gable", "step", "parapet", "pediment", "hip", "twin", "round", "deco", "bell", "tower"] as const) {
+    for (const roof of [
+      "gable",
+      "step",
+      "parapet",
+      "pediment",
+      "hip",
+      "twin",
+      "round",
+      "deco",
+      "bell",
+      "tower",
+    ] as const) {
       const points = roofPoints(roof, { width: 10, eave: 5, top: 9 });
       expect(points[0], roof).toMatchObject({ x: 0, y: 5 });
       expect(points.at(-1)?.x, roof).toBeCloseTo(10, 12);
@@ -85,7 +114,12 @@ describe("a side of the square", () => {
   it("shows a part of a side larger, with the same lights", () => {
     const part = sideGeometry(DEMO_SQUARE, "north", { width: 390, height: 238, first: 4, count: 6 });
     expect(part.filter((front) => front.facade !== null).map((front) => [front.name, front.place])).toEqual([
-      ["town hall", 4], ["post office", 5], ["tea room", 6], ["cinema", 7], ["clockmaker", 8], ["florist", 9],
+      ["town hall", 4],
+      ["post office", 5],
+      ["tea room", 6],
+      ["cinema", 7],
+      ["clockmaker", 8],
+      ["florist", 9],
     ]);
   });
 
@@ -93,7 +127,10 @@ describe("a side of the square", () => {
     const [bakery] = DEMO_SQUARE.fronts;
     const box = bakery?.boxes[0];
     if (!bakery || !box) throw new Error("The demo square has no bakery.");
-    const odd = { ...bakery, boxes: [{ ...box, outlets: [{ number: 1, part: "weather-vane", watts: 10, circuit: "north-1" }] }] };
+    const odd = {
+      ...bakery,
+      boxes: [{ ...box, outlets: [{ number: 1, part: "weather-vane", watts: 10, circuit: "north-1" }] }],
+    };
     const tree = DEMO_SQUARE.fronts.filter((front) => front.side === null);
     const layout = { ...DEMO_SQUARE, fronts: [odd, ...tree] };
     expect(sideGeometry(layout, "north")[0]?.lights[0]?.beads.length).toBeGreaterThan(3);
@@ -104,7 +141,9 @@ describe("a side of the square", () => {
 describe("a silhouette from a name", () => {
   it("is always the same for the same name", () => {
     expect(silhouetteFor("pottery")).toEqual(silhouetteFor("pottery"));
-    const looks = new Set(["pottery", "museum", "tailor", "chapel", "weaver"].map((name) => JSON.stringify(silhouetteFor(name))));
+    const looks = new Set(
+      ["pottery", "museum", "tailor", "chapel", "weaver"].map((name) => JSON.stringify(silhouetteFor(name))),
+    );
     expect(looks.size).toBe(5);
   });
 });

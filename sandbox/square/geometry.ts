@@ -85,7 +85,12 @@ export function viewFrame(view: View, shown: number): ViewFrame {
   return { groundY, paving, unit: Math.min(groundY * 0.985, (view.width / Math.max(1, shown)) * 3.9) };
 }
 
-function lightsOf(walked: WalkedFront, all: readonly Light[], shapeOfPart: (part: string) => PartShape, step: number): LightGeometry[] {
+function lightsOf(
+  walked: WalkedFront,
+  all: readonly Light[],
+  shapeOfPart: (part: string) => PartShape,
+  step: number,
+): LightGeometry[] {
   const found: LightGeometry[] = [];
   const strips = new Map<string, LightShape[]>();
   for (const index of walked.lights) {
@@ -101,7 +106,14 @@ function lightsOf(walked: WalkedFront, all: readonly Light[], shapeOfPart: (part
 
 function frontAt(walked: WalkedFront, place: number, plot: Plot, all: readonly Light[]): FrontGeometry {
   const { front, index } = walked;
-  const base = { frontIndex: index, frontId: front.id, name: front.name, side: front.side, place, silhouette: front.silhouette };
+  const base = {
+    frontIndex: index,
+    frontId: front.id,
+    name: front.name,
+    side: front.side,
+    place,
+    silhouette: front.silhouette,
+  };
   const step = beadStep(plot.unit);
   if (front.silhouette.roof === "tree") {
     const tree = treeAt(plot.x + plot.width / 2, plot.groundY, front.silhouette.top * plot.unit);
@@ -114,13 +126,29 @@ function frontAt(walked: WalkedFront, place: number, plot: Plot, all: readonly L
   const lights = lightsOf(walked, all, (part) => partShape(facade, part), step);
   const sidePlace = front.side === null ? 0 : SIDES.indexOf(front.side);
   const { x, y, width, height } = facade;
-  return { ...base, isNear: place % 2 === sidePlace % 2, x, y, width, height, groundY: plot.groundY, facade, tree: null, lights };
+  return {
+    ...base,
+    isNear: place % 2 === sidePlace % 2,
+    x,
+    y,
+    width,
+    height,
+    groundY: plot.groundY,
+    facade,
+    tree: null,
+    lights,
+  };
 }
 
 function freeStanding(walked: WalkedFront, place: number, of: number, side: Side, view: View, frame: ViewFrame): Plot {
   const width = walked.front.silhouette.width * frame.unit * 0.25;
   const middle = view.width * (TREE_PLACE[side] + (place - (of - 1) / 2) * 0.2);
-  return { x: middle - width / 2, width, groundY: frame.groundY + frame.paving * 0.3, unit: frame.unit * (walked.front.silhouette.roof === "tree" ? 1 : TREE_HEIGHT) };
+  return {
+    x: middle - width / 2,
+    width,
+    groundY: frame.groundY + frame.paving * 0.3,
+    unit: frame.unit * (walked.front.silhouette.roof === "tree" ? 1 : TREE_HEIGHT),
+  };
 }
 
 /**
@@ -146,5 +174,8 @@ export function sideGeometry(layout: Layout, side: Side, view: View = REFERENCE_
     return frontAt(walked, first + n, plot, all);
   });
   const free = fronts.filter(({ front }) => front.side === null);
-  return [...houses, ...free.map((walked, n) => frontAt(walked, n, freeStanding(walked, n, free.length, side, view, frame), all))];
+  return [
+    ...houses,
+    ...free.map((walked, n) => frontAt(walked, n, freeStanding(walked, n, free.length, side, view, frame), all)),
+  ];
 }

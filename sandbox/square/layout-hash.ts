@@ -22,6 +22,9 @@ export function canonicalLayout(layout: Layout): string {
  * nothing without it. The host passes in `sha256`, which hashes the UTF-8 bytes of a text; where its
  * answer is a promise, so is this one.
  */
-export function layoutHash<Digest extends string | Promise<string>>(layout: Layout, sha256: (text: string) => Digest): Digest {
+export function layoutHash<Digest extends string | Promise<string>>(
+  layout: Layout,
+  sha256: (text: string) => Digest,
+): Digest {
   return sha256(canonicalLayout(layout));
 }

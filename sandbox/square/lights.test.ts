@@ -6,10 +6,17 @@ import { frontBox, listFronts, listLights } from "./lights.ts";
 import { silhouetteFor } from "./silhouette.ts";
 
 const front = (name: string, side: Front["side"], order: number, boxes: Front["boxes"]): Front => ({
-  id: name, name, side, order, silhouette: silhouetteFor(name), boxes,
+  id: name,
+  name,
+  side,
+  order,
+  silhouette: silhouetteFor(name),
+  boxes,
 });
 const relay = (id: string, parts: string[]): Front["boxes"][number] => ({
-  id, kind: "relay", outlets: parts.map((part, n) => ({ number: n + 1, part, watts: 100, circuit: "a" })),
+  id,
+  kind: "relay",
+  outlets: parts.map((part, n) => ({ number: n + 1, part, watts: 100, circuit: "a" })),
 });
 
 const SMALL: Layout = {
@@ -18,10 +25,15 @@ const SMALL: Layout = {
   mains: { volts: 120, hertz: 60 },
   circuits: [{ id: "a", volts: 120, breakerAmps: 20 }],
   fronts: [
-    front("tree", null, 0, [{ id: "tree-c", kind: "colour", outlets: [{ number: 1, part: "strip", watts: 9, circuit: "a", pixels: 3 }] }]),
+    front("tree", null, 0, [
+      { id: "tree-c", kind: "colour", outlets: [{ number: 1, part: "strip", watts: 9, circuit: "a", pixels: 3 }] },
+    ]),
     front("west-house", "west", 0, [relay("w", ["door"])]),
     front("north-right", "north", 1, [relay("nr", ["windows", "roof"])]),
-    front("north-left", "north", 0, [relay("nl", ["roof"]), { id: "nl-d", kind: "dimmer", outlets: [{ number: 1, part: "door", watts: 60, circuit: "a" }] }]),
+    front("north-left", "north", 0, [
+      relay("nl", ["roof"]),
+      { id: "nl-d", kind: "dimmer", outlets: [{ number: 1, part: "door", watts: 60, circuit: "a" }] },
+    ]),
     front("east-house", "east", 0, [relay("e", ["roof"])]),
     front("south-house", "south", 0, [relay("s", ["roof"])]),
   ],
@@ -30,14 +42,27 @@ const SMALL: Layout = {
 describe("walking order (LANGUAGE rule 10)", () => {
   it("goes clockwise from the north-west, each side left to right, the tree last", () => {
     expect(listFronts(SMALL).map((walked) => walked.front.id)).toEqual([
-      "north-left", "north-right", "east-house", "south-house", "west-house", "tree",
+      "north-left",
+      "north-right",
+      "east-house",
+      "south-house",
+      "west-house",
+      "tree",
     ]);
   });
 
   it("takes parts as the layout lists them and pixels left to right", () => {
     expect(listLights(SMALL).map((light) => light.id)).toEqual([
-      "north-left/roof", "north-left/door", "north-right/windows", "north-right/roof", "east-house/roof",
-      "south-house/roof", "west-house/door", "tree/strip/1", "tree/strip/2", "tree/strip/3",
+      "north-left/roof",
+      "north-left/door",
+      "north-right/windows",
+      "north-right/roof",
+      "east-house/roof",
+      "south-house/roof",
+      "west-house/door",
+      "tree/strip/1",
+      "tree/strip/2",
+      "tree/strip/3",
     ]);
   });
 
@@ -45,7 +70,8 @@ describe("walking order (LANGUAGE rule 10)", () => {
     const lights = listLights(DEMO_SQUARE);
     expect(lights.every((light, place) => light.index === place)).toBe(true);
     for (const walked of listFronts(DEMO_SQUARE))
-      for (const index of walked.lights) expect(lights[index]).toMatchObject({ frontIndex: walked.index, frontId: walked.front.id });
+      for (const index of walked.lights)
+        expect(lights[index]).toMatchObject({ frontIndex: walked.index, frontId: walked.front.id });
     expect(listFronts(DEMO_SQUARE).flatMap((walked) => walked.lights)).toEqual(lights.map((light) => light.index));
   });
 
@@ -60,7 +86,14 @@ describe("walking order (LANGUAGE rule 10)", () => {
     expect(byId.get("north-left/roof")).toMatchObject({ isSwitched: true, hasColour: false });
     expect(byId.get("north-left/door")).toMatchObject({ isSwitched: false, hasColour: false });
     expect(byId.get("tree/strip/2")).toMatchObject({ isSwitched: false, hasColour: true });
-    expect(listFronts(SMALL).map((walked) => frontBox(walked.front))).toEqual(["mixed", "relay", "relay", "relay", "relay", "colour"]);
+    expect(listFronts(SMALL).map((walked) => frontBox(walked.front))).toEqual([
+      "mixed",
+      "relay",
+      "relay",
+      "relay",
+      "relay",
+      "colour",
+    ]);
   });
 });
 
@@ -69,7 +102,11 @@ describe("the layout's hash", () => {
     Array.isArray(value)
       ? (value.map(reversed) as Value)
       : value !== null && typeof value === "object"
-        ? (Object.fromEntries(Object.entries(value).reverse().map(([key, field]) => [key, reversed(field)])) as Value)
+        ? (Object.fromEntries(
+            Object.entries(value)
+              .reverse()
+              .map(([key, field]) => [key, reversed(field)]),
+          ) as Value)
         : value;
 
   it("does not depend on the order of keys, but on every value", () => {

@@ -15,13 +15,59 @@ interface RoofSize {
 type Profile = readonly (readonly [number, number])[];
 
 const STRAIGHT: { readonly [R in Exclude<Roof, "round" | "bell" | "step" | "tree">]: Profile } = {
-  gable: [[0, 0], [0.5, 1], [1, 0]],
-  parapet: [[0, 0], [0.3, 0], [0.3, 1], [0.7, 1], [0.7, 0], [1, 0]],
-  pediment: [[0, 0], [0.06, 0], [0.5, 1], [0.94, 0], [1, 0]],
-  hip: [[0, 0], [0.13, 1], [0.87, 1], [1, 0]],
-  twin: [[0, 0], [0.25, 1], [0.5, 0.12], [0.75, 1], [1, 0]],
-  deco: [[0, 0], [0.16, 0], [0.16, 0.4], [0.33, 0.4], [0.33, 1], [0.67, 1], [0.67, 0.4], [0.84, 0.4], [0.84, 0], [1, 0]],
-  tower: [[0, 0], [0.06, 0], [0.34, 0.86], [0.66, 0.86], [0.94, 0], [1, 0]],
+  gable: [
+    [0, 0],
+    [0.5, 1],
+    [1, 0],
+  ],
+  parapet: [
+    [0, 0],
+    [0.3, 0],
+    [0.3, 1],
+    [0.7, 1],
+    [0.7, 0],
+    [1, 0],
+  ],
+  pediment: [
+    [0, 0],
+    [0.06, 0],
+    [0.5, 1],
+    [0.94, 0],
+    [1, 0],
+  ],
+  hip: [
+    [0, 0],
+    [0.13, 1],
+    [0.87, 1],
+    [1, 0],
+  ],
+  twin: [
+    [0, 0],
+    [0.25, 1],
+    [0.5, 0.12],
+    [0.75, 1],
+    [1, 0],
+  ],
+  deco: [
+    [0, 0],
+    [0.16, 0],
+    [0.16, 0.4],
+    [0.33, 0.4],
+    [0.33, 1],
+    [0.67, 1],
+    [0.67, 0.4],
+    [0.84, 0.4],
+    [0.84, 0],
+    [1, 0],
+  ],
+  tower: [
+    [0, 0],
+    [0.06, 0],
+    [0.34, 0.86],
+    [0.66, 0.86],
+    [0.94, 0],
+    [1, 0],
+  ],
 };
 
 /** Stairs up to the middle and down again. */
@@ -64,6 +110,11 @@ function profileOf(roof: Exclude<Roof, "tree">): Profile {
  */
 export function roofPoints(roof: Roof, size: RoofSize): Point[] {
   const { width, eave, top } = size;
-  if (roof === "tree") return [{ x: 0, y: 0 }, { x: width / 2, y: top }, { x: width, y: 0 }];
+  if (roof === "tree")
+    return [
+      { x: 0, y: 0 },
+      { x: width / 2, y: top },
+      { x: width, y: 0 },
+    ];
   return profileOf(roof).map(([x, y]) => ({ x: x * width, y: eave + (top - eave) * y }));
 }

@@ -86,10 +86,18 @@ export function overPane(pane: Pane, gap: number): Point[] {
   const foot = pane.y + pane.height;
   if (pane.shape === "rect") {
     const top = pane.y - gap;
-    return [{ x: left, y: foot }, { x: left, y: top }, { x: right, y: top }, { x: right, y: foot }];
+    return [
+      { x: left, y: foot },
+      { x: left, y: top },
+      { x: right, y: top },
+      { x: right, y: foot },
+    ];
   }
   const steps = 12;
-  const centre = { x: pane.x + pane.width / 2, y: pane.shape === "arch" ? pane.y + pane.width / 2 : pane.y + pane.height / 2 };
+  const centre = {
+    x: pane.x + pane.width / 2,
+    y: pane.shape === "arch" ? pane.y + pane.width / 2 : pane.y + pane.height / 2,
+  };
   const radius = pane.width / 2 + gap;
   const turn = pane.shape === "arch" ? Math.PI : 2 * Math.PI;
   const curve = Array.from({ length: steps + 1 }, (_, n) => ({

@@ -30,7 +30,10 @@ function roofPaths(facade: Facade): Point[][] {
   }));
   if (!facade.tower) return [line];
   const { body, cap } = facade.tower;
-  const corner = (x: number): Point[] => [{ x, y: body.y + body.height }, { x, y: body.y }];
+  const corner = (x: number): Point[] => [
+    { x, y: body.y + body.height },
+    { x, y: body.y },
+  ];
   return [line, [...corner(body.x), ...cap, ...corner(body.x + body.width).toReversed()]];
 }
 
@@ -51,7 +54,12 @@ function stripPath(facade: Facade): Point[] {
   const right = facade.x + facade.width - inset;
   const foot = facade.groundY - facade.unit * 0.02;
   const under = facade.eaveY + facade.unit * 0.022;
-  return [{ x: left, y: foot }, { x: left, y: under }, { x: right, y: under }, { x: right, y: foot }];
+  return [
+    { x: left, y: foot },
+    { x: left, y: under },
+    { x: right, y: under },
+    { x: right, y: foot },
+  ];
 }
 
 /** A part with a name of its own: a string across the wall, at a height that its name decides. */
@@ -59,7 +67,10 @@ function wallPath(facade: Facade, part: string): Point[] {
   const share = 0.15 + 0.7 * ((hashText(part) % 97) / 96);
   const y = facade.groundY - facade.groundFloor - (facade.groundY - facade.groundFloor - facade.eaveY) * share;
   const inset = facade.width * 0.06;
-  return [{ x: facade.x + inset, y }, { x: facade.x + facade.width - inset, y }];
+  return [
+    { x: facade.x + inset, y },
+    { x: facade.x + facade.width - inset, y },
+  ];
 }
 
 /** What a part of a house is made of. Any name has a place; those below have one of their own. */
@@ -80,7 +91,17 @@ export function partShape(facade: Facade, part: string): PartShape {
     }
     case "awning": {
       const { x, y, width, height } = facade.awning;
-      return { panes: [], paths: [[{ x, y }, { x, y: y + height }, { x: x + width, y: y + height }, { x: x + width, y }]] };
+      return {
+        panes: [],
+        paths: [
+          [
+            { x, y },
+            { x, y: y + height },
+            { x: x + width, y: y + height },
+            { x: x + width, y },
+          ],
+        ],
+      };
     }
     case "strip":
       return { panes: [], paths: [stripPath(facade)] };

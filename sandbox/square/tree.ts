@@ -75,7 +75,10 @@ export function treePart(tree: Tree, part: string, parts: readonly string[]): Pa
       const turn = (Math.PI * i) / spokes - Math.PI / 2;
       return { x: x + radius + reach * Math.cos(turn), y: y + radius + reach * Math.sin(turn) };
     });
-    return { panes: [{ shape: "round", x: x + width * 0.2, y: y + height * 0.2, width: width * 0.6, height: height * 0.6 }], paths: [points] };
+    return {
+      panes: [{ shape: "round", x: x + width * 0.2, y: y + height * 0.2, width: width * 0.6, height: height * 0.6 }],
+      paths: [points],
+    };
   }
   const bands = parts.filter((name) => name !== "star");
   const place = bands.indexOf(part);

@@ -10,8 +10,7 @@ export const CLASS_LISTS = {
     "Anwen Bashir Clem Dorotea Esme Felix Goran Honor Ines Jasper Kamala Lars Mei Nico Otto Priya Rowan Saskia Teo Uri Vida Willa",
   "8L-QUILL":
     "Aino Bodhi Corin Dalia Elio Fiadh Griff Hira Isolde Joaquin Keziah Luca Maren Nasir Olwen Pascal Romy Silas Tova Zaki",
-  "6C-QUILL":
-    "Alba Bjorn Carys Dev Etta Finn Gemma Hugo Iris Jomo Kaya Lior Mina Ned Orla Paz Rune Suki",
+  "6C-QUILL": "Alba Bjorn Carys Dev Etta Finn Gemma Hugo Iris Jomo Kaya Lior Mina Ned Orla Paz Rune Suki",
 } as const satisfies { readonly [code: string]: string };
 
 export type ClassCode = keyof typeof CLASS_LISTS;

@@ -1,5 +1,10 @@
 import { describe, expect, it } from "vitest";
-import { ClassCodeSchema, NewPasswordSchema, PassphraseSchema, UsernameSchema } from "../../../../shared/contracts/auth.ts";
+import {
+  ClassCodeSchema,
+  NewPasswordSchema,
+  PassphraseSchema,
+  UsernameSchema,
+} from "../../../../shared/contracts/auth.ts";
 import { CLASSES, demoStudent, SCHOOLS, STAFF, STUDENTS } from "./people.ts";
 
 describe("the people of the demo world", () => {

@@ -37,13 +37,62 @@ export interface DemoStaff {
 const at = (name: string): string => `${name}@quillhaven.example`;
 
 export const STAFF: readonly DemoStaff[] = [
-  { key: "marlow", displayName: "Ms Marlow", email: at("d.marlow"), roles: ["teacher"], school: "tarn", password: "seven lanterns by the bridge" },
-  { key: "okafor", displayName: "Mr Okafor", email: at("c.okafor"), roles: ["teacher"], school: "tarn", password: "the old clock runs late again" },
-  { key: "lindqvist", displayName: "Mrs Lindqvist", email: at("m.lindqvist"), roles: ["teacher"], school: "tarn", password: "two geese crossed the square" },
-  { key: "bahar", displayName: "Ms Bahar", email: at("s.bahar"), roles: ["teacher"], school: "quill", password: "blue paper and a pair of scissors" },
-  { key: "tremain", displayName: "Mr Tremain", email: at("j.tremain"), roles: ["teacher"], school: "quill", password: "nine ferries left before noon" },
-  { key: "holm", displayName: "Petra Holm", email: at("p.holm"), roles: ["coordinator"], school: null, password: "every lamp is someones lamp" },
-  { key: "quist", displayName: "Aron Quist", email: at("a.quist"), roles: ["admin"], school: null, password: "keep two copies in two places" },
+  {
+    key: "marlow",
+    displayName: "Ms Marlow",
+    email: at("d.marlow"),
+    roles: ["teacher"],
+    school: "tarn",
+    password: "seven lanterns by the bridge",
+  },
+  {
+    key: "okafor",
+    displayName: "Mr Okafor",
+    email: at("c.okafor"),
+    roles: ["teacher"],
+    school: "tarn",
+    password: "the old clock runs late again",
+  },
+  {
+    key: "lindqvist",
+    displayName: "Mrs Lindqvist",
+    email: at("m.lindqvist"),
+    roles: ["teacher"],
+    school: "tarn",
+    password: "two geese crossed the square",
+  },
+  {
+    key: "bahar",
+    displayName: "Ms Bahar",
+    email: at("s.bahar"),
+    roles: ["teacher"],
+    school: "quill",
+    password: "blue paper and a pair of scissors",
+  },
+  {
+    key: "tremain",
+    displayName: "Mr Tremain",
+    email: at("j.tremain"),
+    roles: ["teacher"],
+    school: "quill",
+    password: "nine ferries left before noon",
+  },
+  {
+    key: "holm",
+    displayName: "Petra Holm",
+    email: at("p.holm"),
+    roles: ["coordinator"],
+    school: null,
+    password: "every lamp is someones lamp",
+  },
+  {
+    key: "quist",
+    displayName: "Aron Quist",
+    email: at("a.quist"),
+    roles: ["admin"],
+    school: null,
+    password: "keep two copies in two places",
+  },
 ];
 
 export interface DemoClass {
@@ -82,8 +131,15 @@ export interface DemoStudent {
 
 /** Answers that the demo's programme depends on. */
 const ANSWERS: { readonly [key: string]: Consent } = {
-  "7B-TARN/wren": "yes", "7B-TARN/idris": "yes", "7B-TARN/june": "yes", "7B-TARN/oren": "yes", "7B-TARN/fern": "yes",
-  "7B-TARN/zoe": "no", "7K-QUILL/ines": "no", "7K-QUILL/otto": "yes", "7K-QUILL/mei": "open",
+  "7B-TARN/wren": "yes",
+  "7B-TARN/idris": "yes",
+  "7B-TARN/june": "yes",
+  "7B-TARN/oren": "yes",
+  "7B-TARN/fern": "yes",
+  "7B-TARN/zoe": "no",
+  "7K-QUILL/ines": "no",
+  "7K-QUILL/otto": "yes",
+  "7K-QUILL/mei": "open",
 };
 
 function consentOf(key: string, share: number): Consent {
@@ -100,11 +156,21 @@ function buildStudent(displayName: string, inClass: DemoClass): DemoStudent {
   const username = displayName.toLowerCase();
   const key = `${inClass.code}/${username}`;
   const next = numbersFrom(hashText(key));
-  return { key, displayName, username, classCode: inClass.code, school: inClass.school, passphrase: passphrase(next), consent: consentOf(key, next()) };
+  return {
+    key,
+    displayName,
+    username,
+    classCode: inClass.code,
+    school: inClass.school,
+    passphrase: passphrase(next),
+    consent: consentOf(key, next()),
+  };
 }
 
 /** All 130 students, class by class. */
-export const STUDENTS: readonly DemoStudent[] = CLASSES.flatMap((one) => CLASS_LISTS[one.code].split(" ").map((name) => buildStudent(name, one)));
+export const STUDENTS: readonly DemoStudent[] = CLASSES.flatMap((one) =>
+  CLASS_LISTS[one.code].split(" ").map((name) => buildStudent(name, one)),
+);
 
 /** A student by its key: "7B-TARN/wren". */
 export function demoStudent(key: string): DemoStudent {

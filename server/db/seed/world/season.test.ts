@@ -13,7 +13,8 @@ describe.each([2026, 2027, 2028])("the season of %i", (year) => {
   it("has 31 nights; Sundays and holidays are dark", () => {
     expect(nights).toHaveLength(31);
     expect(nights[0]?.date).toBe(`${year}-12-01`);
-    for (const night of nights) if (new Date(`${night.date}T12:00:00Z`).getUTCDay() === 0) expect(night.closedReason).not.toBeNull();
+    for (const night of nights)
+      if (new Date(`${night.date}T12:00:00Z`).getUTCDay() === 0) expect(night.closedReason).not.toBeNull();
   });
 
   it("plans only scheduled shows, on open nights, each of them on several", () => {

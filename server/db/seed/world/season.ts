@@ -69,7 +69,8 @@ export function listSlots(year: number): readonly DemoSlot[] {
     for (const [place, startsAt] of START_TIMES.slice(0, isFull ? FULL_NIGHT : USUAL_NIGHT).entries()) {
       const shows = schools[place % schools.length] ?? [];
       const scriptId = shows[(n + Math.floor(place / schools.length)) % Math.max(1, shows.length)];
-      if (scriptId !== undefined && !slots.some((slot) => slot.scriptId === scriptId)) slots.push({ date, startsAt, scriptId, isPinned: false });
+      if (scriptId !== undefined && !slots.some((slot) => slot.scriptId === scriptId))
+        slots.push({ date, startsAt, scriptId, isPinned: false });
     }
     return slots;
   });

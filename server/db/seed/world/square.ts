@@ -2,7 +2,13 @@ import { LayoutSchema, SIDES } from "../../../../shared/contracts/square.ts";
 import type { Box, Circuit, Front, Layout, Side } from "../../../../shared/contracts/square.ts";
 import { silhouetteFor } from "../../../../sandbox/square/silhouette.ts";
 import {
-  LARGE_STRIP_PIXELS, MAINS_120, MAINS_230, SQUARE_NAME, STRIP_PIXELS, stringWatts, stripWatts,
+  LARGE_STRIP_PIXELS,
+  MAINS_120,
+  MAINS_230,
+  SQUARE_NAME,
+  STRIP_PIXELS,
+  stringWatts,
+  stripWatts,
 } from "./figures.ts";
 import type { MainsProfile } from "./figures.ts";
 import { SIDE_ROWS, TREE_ROW } from "./fronts.ts";

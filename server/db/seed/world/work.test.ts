@@ -62,13 +62,17 @@ describe("work", () => {
   });
 
   it("is handed in once for each author and assignment", () => {
-    const pairs = WORK.flatMap((one) => demoScript(one.scriptId).authors.map((author) => `${one.assignment} ${author}`));
+    const pairs = WORK.flatMap((one) =>
+      demoScript(one.scriptId).authors.map((author) => `${one.assignment} ${author}`),
+    );
     expect(new Set(pairs).size).toBe(pairs.length);
   });
 
   it("is in every state, and so are the forwarded shows", () => {
     expect(new Set(WORK.map((one) => one.state))).toEqual(new Set(["working", "submitted", "revise", "marked"]));
-    expect(new Set(WORK.flatMap((one) => one.forward?.state ?? []))).toEqual(new Set(["waiting", "approved", "declined", "scheduled"]));
+    expect(new Set(WORK.flatMap((one) => one.forward?.state ?? []))).toEqual(
+      new Set(["waiting", "approved", "declined", "scheduled"]),
+    );
   });
 
   it("meets its assignment's requirements where it was marked", () => {

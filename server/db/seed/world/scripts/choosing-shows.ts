@@ -4,7 +4,12 @@ import type { DemoScript } from "./demo-script.ts";
 /** Shows with the words of lessons 6 and 7: conditions, chance, functions of their own. */
 export const CHOOSING_SHOWS: readonly DemoScript[] = [
   written({
-    id: "slow-snow", title: "Slow Snow", songId: "frost-fair", authors: ["7B-TARN/oren"], lesson: 7, about: "Calm and careful: chance, a function, and slow boxes left out.",
+    id: "slow-snow",
+    title: "Slow Snow",
+    songId: "frost-fair",
+    authors: ["7B-TARN/oren"],
+    lesson: 7,
+    about: "Calm and careful: chance, a function, and slow boxes left out.",
     source: `
 // snow lands on roofs and stays a while
 const roofs = square.parts("roof").filter((roof) => roof.box !== "relay");
@@ -26,7 +31,12 @@ square.all.fadeTo(0, 12);
 `,
   }),
   written({
-    id: "half-past-owl", title: "Half Past Owl", songId: "lantern-waltz", authors: ["7K-QUILL/ines"], lesson: 7, about: "Two functions with parameters; an owl that looks left and right.",
+    id: "half-past-owl",
+    title: "Half Past Owl",
+    songId: "lantern-waltz",
+    authors: ["7K-QUILL/ines"],
+    lesson: 7,
+    about: "Two functions with parameters; an owl that looks left and right.",
     source: `
 // the owl has two eyes: bank and museum doors
 const left = square.front("bank");
@@ -56,7 +66,12 @@ left.and(right).fadeTo(0, 3);
 `,
   }),
   written({
-    id: "paper-moths", title: "Paper Moths", songId: "quillhaven-bells", authors: ["7B-TARN/pia"], lesson: 7, about: "Chance decides where a moth goes, conditions keep it off the slow boxes.",
+    id: "paper-moths",
+    title: "Paper Moths",
+    songId: "quillhaven-bells",
+    authors: ["7B-TARN/pia"],
+    lesson: 7,
+    about: "Chance decides where a moth goes, conditions keep it off the slow boxes.",
     source: `
 // moths fly to the brightest house
 let house = 0;
@@ -91,7 +106,12 @@ square.parts("door").fadeTo(0, 8);
 `,
   }),
   written({
-    id: "a-kite-in-december", title: "A Kite in December", songId: "frost-fair", authors: ["7B-TARN/sara"], lesson: 7, about: "A path there and back again with reversed and inTurn.",
+    id: "a-kite-in-december",
+    title: "A Kite in December",
+    songId: "frost-fair",
+    authors: ["7B-TARN/sara"],
+    lesson: 7,
+    about: "A path there and back again with reversed and inTurn.",
     source: `
 // the kite goes up the north side and comes down the south side
 const north = square.side("north");
@@ -118,7 +138,12 @@ square.front("tree").fadeTo(0, 4);
 `,
   }),
   written({
-    id: "fair-without-rain", title: "Fair Without Rain", songId: "frost-fair", authors: ["7B-TARN/arlo"], lesson: 7, about: "Stalls open and close; a dice decides how long.",
+    id: "fair-without-rain",
+    title: "Fair Without Rain",
+    songId: "frost-fair",
+    authors: ["7B-TARN/arlo"],
+    lesson: 7,
+    about: "Stalls open and close; a dice decides how long.",
     source: `
 // every stall opens for as long as the dice says
 function open(front, beats) {
@@ -137,7 +162,12 @@ square.parts("awning").off();
 `,
   }),
   written({
-    id: "crossing", title: "Crossing", songId: "jingle-bells", authors: ["7A-TARN/grace"], lesson: 7, about: "One function for two directions.",
+    id: "crossing",
+    title: "Crossing",
+    songId: "jingle-bells",
+    authors: ["7A-TARN/grace"],
+    lesson: 7,
+    about: "One function for two directions.",
     source: `
 function walk(list, colour) {
   list.inTurn(1, (front) => front.pulse(3, colour));
@@ -155,7 +185,12 @@ repeat(10, () => {
 `,
   }),
   written({
-    id: "only-the-quick-ones", title: "Only the Quick Ones", songId: "skaters-jig", authors: ["7A-TARN/haruto"], lesson: 6, about: "Looks at the kind of box before it flashes.",
+    id: "only-the-quick-ones",
+    title: "Only the Quick Ones",
+    songId: "skaters-jig",
+    authors: ["7A-TARN/haruto"],
+    lesson: 6,
+    about: "Looks at the kind of box before it flashes.",
     source: `
 for (let round = 0; round < 6; round++) {
   for (const front of square.fronts) {
@@ -171,7 +206,12 @@ for (let round = 0; round < 6; round++) {
 `,
   }),
   written({
-    id: "coin-toss", title: "Coin Toss", songId: "good-king-wenceslas", authors: ["7A-TARN/ilse"], lesson: 6, about: "Heads is north, tails is south.",
+    id: "coin-toss",
+    title: "Coin Toss",
+    songId: "good-king-wenceslas",
+    authors: ["7A-TARN/ilse"],
+    lesson: 6,
+    about: "Heads is north, tails is south.",
     source: `
 let heads = 0;
 for (let toss = 0; toss < 28; toss++) {
@@ -187,7 +227,12 @@ console.log("heads came", heads, "times out of 28");
 `,
   }),
   written({
-    id: "growing-circle", title: "Growing Circle", songId: "quillhaven-bells", authors: ["7A-TARN/jonah"], lesson: 7, about: "A function with a number that grows.",
+    id: "growing-circle",
+    title: "Growing Circle",
+    songId: "quillhaven-bells",
+    authors: ["7A-TARN/jonah"],
+    lesson: 7,
+    about: "A function with a number that grows.",
     source: `
 function ring(size, shade) {
   const part = square.fronts.first(size);
@@ -204,7 +249,12 @@ ring(41, "gold");
 `,
   }),
   written({
-    id: "dice-street", title: "Dice Street", songId: "frost-fair", authors: ["7A-TARN/kiri"], lesson: 6, about: "Everything by luck, still calm.",
+    id: "dice-street",
+    title: "Dice Street",
+    songId: "frost-fair",
+    authors: ["7A-TARN/kiri"],
+    lesson: 6,
+    about: "Everything by luck, still calm.",
     source: `
 const north = square.side("north");
 for (let i = 0; i < 46; i++) {

@@ -4,7 +4,12 @@ import type { DemoScript } from "./demo-script.ts";
 /** Shows with the words of lessons 4 and 5: counting loops, sides, parts, loops in loops. */
 export const COUNTING_SHOWS: readonly DemoScript[] = [
   written({
-    id: "ladders", title: "Ladders", songId: "quillhaven-bells", authors: ["7K-QUILL/mei"], lesson: 5, about: "Loops in loops; doors, windows and roofs as rungs.",
+    id: "ladders",
+    title: "Ladders",
+    songId: "quillhaven-bells",
+    authors: ["7K-QUILL/mei"],
+    lesson: 5,
+    about: "Loops in loops; doors, windows and roofs as rungs.",
     source: `
 // a ladder is door, windows, roof. four ladders at a time
 for (let round = 0; round < 10; round++) {
@@ -28,7 +33,12 @@ square.front("tree").fadeTo(0, 8);
 `,
   }),
   written({
-    id: "window-by-window", title: "Window by Window", songId: "quillhaven-bells", authors: ["7K-QUILL/ines"], lesson: 5, about: "Calm, covers the whole song.",
+    id: "window-by-window",
+    title: "Window by Window",
+    songId: "quillhaven-bells",
+    authors: ["7K-QUILL/ines"],
+    lesson: 5,
+    about: "Calm, covers the whole song.",
     source: `
 // somebody walks through the town and turns on the windows
 const windows = square.parts("windows");
@@ -52,7 +62,12 @@ for (let i = windows.length - 1; i >= 0; i--) {
 `,
   }),
   written({
-    id: "the-bakers-kettle", title: "The Baker's Kettle", songId: "good-king-wenceslas", authors: ["7K-QUILL/otto"], lesson: 5, about: "Tells a story with one front and the rest of the side.",
+    id: "the-bakers-kettle",
+    title: "The Baker's Kettle",
+    songId: "good-king-wenceslas",
+    authors: ["7K-QUILL/otto"],
+    lesson: 5,
+    about: "Tells a story with one front and the rest of the side.",
     source: `
 // the kettle in the bakery gets hot
 const bakery = square.front("bakery");
@@ -85,7 +100,12 @@ square.all.fadeTo(0, 12);
 `,
   }),
   written({
-    id: "stripes", title: "Stripes", songId: "frost-fair", authors: ["7K-QUILL/anwen"], lesson: 4, about: "Even and odd fronts with a remainder.",
+    id: "stripes",
+    title: "Stripes",
+    songId: "frost-fair",
+    authors: ["7K-QUILL/anwen"],
+    lesson: 4,
+    about: "Even and odd fronts with a remainder.",
     source: `
 for (let bar = 0; bar < 36; bar++) {
   for (let i = 0; i < square.fronts.length; i++) {
@@ -100,7 +120,12 @@ for (let bar = 0; bar < 36; bar++) {
 `,
   }),
   written({
-    id: "first-five", title: "First Five", songId: "jingle-bells", authors: ["7K-QUILL/bashir"], lesson: 4, about: "Uses first with a growing number.",
+    id: "first-five",
+    title: "First Five",
+    songId: "jingle-bells",
+    authors: ["7K-QUILL/bashir"],
+    lesson: 4,
+    about: "Uses first with a growing number.",
     source: `
 const south = square.side("south");
 for (let n = 1; n <= 10; n++) {
@@ -117,7 +142,12 @@ south.off();
 `,
   }),
   written({
-    id: "stairs", title: "Stairs", songId: "skaters-jig", authors: ["7K-QUILL/clem"], lesson: 4, about: "Levels go up by counting; one goes past 100.",
+    id: "stairs",
+    title: "Stairs",
+    songId: "skaters-jig",
+    authors: ["7K-QUILL/clem"],
+    lesson: 4,
+    about: "Levels go up by counting; one goes past 100.",
     source: `
 const west = square.side("west");
 let level = 10;
@@ -132,7 +162,12 @@ west.fadeTo(0, 16);
 `,
   }),
   written({
-    id: "chess", title: "Chess", songId: "good-king-wenceslas", authors: ["7A-TARN/delphine"], lesson: 5, about: "Roofs against windows.",
+    id: "chess",
+    title: "Chess",
+    songId: "good-king-wenceslas",
+    authors: ["7A-TARN/delphine"],
+    lesson: 5,
+    about: "Roofs against windows.",
     source: `
 const roofs = square.parts("roof");
 const windows = square.parts("windows");
@@ -150,7 +185,12 @@ square.all.fadeTo(0, 8);
 `,
   }),
   written({
-    id: "cut-off-fades", title: "Hurry", songId: "frost-fair", authors: ["7A-TARN/emre"], lesson: 4, about: "Every fade is cut off by the next one.",
+    id: "cut-off-fades",
+    title: "Hurry",
+    songId: "frost-fair",
+    authors: ["7A-TARN/emre"],
+    lesson: 4,
+    about: "Every fade is cut off by the next one.",
     source: `
 // why does it never get bright??
 const east = square.side("east");
@@ -163,7 +203,12 @@ for (let i = 0; i < 30; i++) {
 `,
   }),
   written({
-    id: "four-corners", title: "Four Corners", songId: "quillhaven-bells", authors: ["7A-TARN/farah"], lesson: 5, about: "A list of side names in a loop in a loop.",
+    id: "four-corners",
+    title: "Four Corners",
+    songId: "quillhaven-bells",
+    authors: ["7A-TARN/farah"],
+    lesson: 5,
+    about: "A list of side names in a loop in a loop.",
     source: `
 const sides = ["north", "east", "south", "west"];
 const mood = ["gold", "tomato", "skyblue", "palegreen"];
@@ -184,7 +229,12 @@ square.front("tree").fadeTo(0, 8);
 `,
   }),
   written({
-    id: "rain-on-the-baths", title: "Rain on the Baths", songId: "frost-fair", authors: ["7B-TARN/wren"], lesson: 5, about: "Wren's own idea outside class: drops that fall from roof to door.",
+    id: "rain-on-the-baths",
+    title: "Rain on the Baths",
+    songId: "frost-fair",
+    authors: ["7B-TARN/wren"],
+    lesson: 5,
+    about: "Wren's own idea outside class: drops that fall from roof to door.",
     source: `
 // drops fall from the roof to the door
 for (let drop = 0; drop < 34; drop++) {

@@ -4,7 +4,12 @@ import type { DemoScript } from "./demo-script.ts";
 /** Shows with the words of lessons 1 to 3: line by line, variables, the first loops. */
 export const FIRST_SHOWS: readonly DemoScript[] = [
   written({
-    id: "my-first-street", title: "My First Street", songId: "frost-fair", authors: ["6C-QUILL/alba"], lesson: 1, about: "Line by line, and it works.",
+    id: "my-first-street",
+    title: "My First Street",
+    songId: "frost-fair",
+    authors: ["6C-QUILL/alba"],
+    lesson: 1,
+    about: "Line by line, and it works.",
     source: `
 // my first street
 square.front("bakery").on();
@@ -22,7 +27,12 @@ square.front("library").off();
 `,
   }),
   written({
-    id: "cinema-then-school", title: "Cinema Then School", songId: "frost-fair", authors: ["6C-QUILL/bjorn"], lesson: 1, about: "Forgets to turn one front off.",
+    id: "cinema-then-school",
+    title: "Cinema Then School",
+    songId: "frost-fair",
+    authors: ["6C-QUILL/bjorn"],
+    lesson: 1,
+    about: "Forgets to turn one front off.",
     source: `
 square.front("cinema").on();
 wait(8);
@@ -36,7 +46,12 @@ square.front("museum").off();
 `,
   }),
   written({
-    id: "hello-tree", title: "Hello Tree", songId: "jingle-bells", authors: ["6C-QUILL/carys"], lesson: 1, about: "Very short.",
+    id: "hello-tree",
+    title: "Hello Tree",
+    songId: "jingle-bells",
+    authors: ["6C-QUILL/carys"],
+    lesson: 1,
+    about: "Very short.",
     source: `
 square.front("tree").on();
 wait(16);
@@ -46,7 +61,12 @@ square.front("tree").on();
 `,
   }),
   written({
-    id: "blink-and-gone", title: "Blink and Gone", songId: "frost-fair", authors: ["6C-QUILL/dev"], lesson: 1, about: "On and off at one moment: nobody sees the first one.",
+    id: "blink-and-gone",
+    title: "Blink and Gone",
+    songId: "frost-fair",
+    authors: ["6C-QUILL/dev"],
+    lesson: 1,
+    about: "On and off at one moment: nobody sees the first one.",
     source: `
 square.front("gallery").on();
 square.front("gallery").off();
@@ -61,7 +81,12 @@ square.front("gallery").off();
 `,
   }),
   written({
-    id: "two-colours-of-tea", title: "Two Colours of Tea", songId: "good-king-wenceslas", authors: ["8L-QUILL/aino"], lesson: 2, about: "Constants for colours, a growing wait.",
+    id: "two-colours-of-tea",
+    title: "Two Colours of Tea",
+    songId: "good-king-wenceslas",
+    authors: ["8L-QUILL/aino"],
+    lesson: 2,
+    about: "Constants for colours, a growing wait.",
     source: `
 const green = "yellowgreen";
 const black = "sienna";
@@ -82,7 +107,12 @@ square.front("corner cafe").off();
 `,
   }),
   written({
-    id: "sunset-shops", title: "Sunset Shops", songId: "frost-fair", authors: ["8L-QUILL/bodhi"], lesson: 2, about: "Colour with fade time, one after the other.",
+    id: "sunset-shops",
+    title: "Sunset Shops",
+    songId: "frost-fair",
+    authors: ["8L-QUILL/bodhi"],
+    lesson: 2,
+    about: "Colour with fade time, one after the other.",
     source: `
 const early = "gold";
 const later = "tomato";
@@ -108,7 +138,12 @@ square.front("hat shop").off();
 `,
   }),
   written({
-    id: "counting-up", title: "Counting Up", songId: "jingle-bells", authors: ["8L-QUILL/corin"], lesson: 2, about: "Prints notes to find out what happens.",
+    id: "counting-up",
+    title: "Counting Up",
+    songId: "jingle-bells",
+    authors: ["8L-QUILL/corin"],
+    lesson: 2,
+    about: "Prints notes to find out what happens.",
     source: `
 let n = 1;
 square.front("weaver").pulse(2, "gold");
@@ -129,7 +164,12 @@ square.front("boathouse").pulse(4, "red");
 `,
   }),
   written({
-    id: "painted-dark", title: "Painted Dark", songId: "frost-fair", authors: ["8L-QUILL/dalia"], lesson: 2, about: "A colour on lights that are off.",
+    id: "painted-dark",
+    title: "Painted Dark",
+    songId: "frost-fair",
+    authors: ["8L-QUILL/dalia"],
+    lesson: 2,
+    about: "A colour on lights that are off.",
     source: `
 square.front("sweet shop").colour("hotpink");
 wait(8);
@@ -142,7 +182,12 @@ square.front("boathouse").off();
 `,
   }),
   written({
-    id: "once-round", title: "Once Round", songId: "quillhaven-bells", authors: ["7A-TARN/amara"], lesson: 3, about: "The plain round, twice.",
+    id: "once-round",
+    title: "Once Round",
+    songId: "quillhaven-bells",
+    authors: ["7A-TARN/amara"],
+    lesson: 3,
+    about: "The plain round, twice.",
     source: `
 // once round in gold, once in blue
 for (const front of square.fronts) {
@@ -156,7 +201,12 @@ for (const front of square.fronts) {
 `,
   }),
   written({
-    id: "slow-then-quick", title: "Slow Then Quick", songId: "good-king-wenceslas", authors: ["7A-TARN/ben"], lesson: 3, about: "Two speeds in two variables.",
+    id: "slow-then-quick",
+    title: "Slow Then Quick",
+    songId: "good-king-wenceslas",
+    authors: ["7A-TARN/ben"],
+    lesson: 3,
+    about: "Two speeds in two variables.",
     source: `
 const slow = 2;
 const quick = 0.5;
@@ -175,7 +225,12 @@ for (const house of square.fronts) {
 `,
   }),
   written({
-    id: "wall-of-light", title: "Wall of Light", songId: "frost-fair", authors: ["7A-TARN/chidi"], lesson: 3, about: "The wait stands after the loop, so all come on at once.",
+    id: "wall-of-light",
+    title: "Wall of Light",
+    songId: "frost-fair",
+    authors: ["7A-TARN/chidi"],
+    lesson: 3,
+    about: "The wait stands after the loop, so all come on at once.",
     source: `
 for (const front of square.fronts) {
   front.on();
@@ -196,7 +251,12 @@ for (const front of square.fronts) {
 `,
   }),
   written({
-    id: "ten-small-suns", title: "Ten Small Suns", songId: "skaters-jig", authors: ["7B-TARN/wren"], lesson: 4, about: "A side, one by one, still being worked on.",
+    id: "ten-small-suns",
+    title: "Ten Small Suns",
+    songId: "skaters-jig",
+    authors: ["7B-TARN/wren"],
+    lesson: 4,
+    about: "A side, one by one, still being worked on.",
     source: `
 // ten small suns come up on the east side
 const east = square.side("east");

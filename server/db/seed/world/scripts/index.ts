@@ -8,7 +8,12 @@ import { TROUBLED_SHOWS } from "./troubled-shows.ts";
 
 /** Every show of the demo world, the easiest first. */
 export const DEMO_SCRIPTS: readonly DemoScript[] = [
-  ...FIRST_SHOWS, ...COUNTING_SHOWS, ...CHOOSING_SHOWS, ...SONG_SHOWS, ...LAYERED_SHOWS, ...TROUBLED_SHOWS,
+  ...FIRST_SHOWS,
+  ...COUNTING_SHOWS,
+  ...CHOOSING_SHOWS,
+  ...SONG_SHOWS,
+  ...LAYERED_SHOWS,
+  ...TROUBLED_SHOWS,
 ];
 
 /** A show of the demo world by its id. */

@@ -4,7 +4,12 @@ import type { DemoScript } from "./demo-script.ts";
 /** Shows of the oldest class, with the words of lessons 9 to 12: lists, layers, melody, typed parameters. */
 export const LAYERED_SHOWS: readonly DemoScript[] = [
   written({
-    id: "melody-map", title: "Melody Map", songId: "quillhaven-bells", authors: ["8A-TARN/abel"], lesson: 11, about: "High notes on the left, low notes on the right.",
+    id: "melody-map",
+    title: "Melody Map",
+    songId: "quillhaven-bells",
+    authors: ["8A-TARN/abel"],
+    lesson: 11,
+    about: "High notes on the left, low notes on the right.",
     source: `
 const north = square.side("north");
 const bells = song.notes("bells");
@@ -24,7 +29,12 @@ at(song.section("bridge").end, () => square.side("south").fadeTo(0, 8));
 `,
   }),
   written({
-    id: "rainbow-hall", title: "Rainbow Hall", songId: "frost-fair", authors: ["8A-TARN/bianca", "8A-TARN/caspian"], lesson: 11, about: "Colour circles on both strips; many cues.",
+    id: "rainbow-hall",
+    title: "Rainbow Hall",
+    songId: "frost-fair",
+    authors: ["8A-TARN/bianca", "8A-TARN/caspian"],
+    lesson: 11,
+    about: "Colour circles on both strips; many cues.",
     source: `
 const strips = square.parts("strip");
 strips.fadeTo(70, 8);
@@ -41,7 +51,12 @@ at(song.section("ending").start, () => strips.fadeTo(0, 14));
 `,
   }),
   written({
-    id: "four-bands", title: "Four Bands", songId: "jingle-bells", authors: ["8A-TARN/dina"], lesson: 10, about: "A side for every instrument, with an object as a table.",
+    id: "four-bands",
+    title: "Four Bands",
+    songId: "jingle-bells",
+    authors: ["8A-TARN/dina"],
+    lesson: 10,
+    about: "A side for every instrument, with an object as a table.",
     source: `
 const band = {
   bells: square.side("north"),
@@ -67,7 +82,12 @@ at(song.bars, (turn) => {
 `,
   }),
   written({
-    id: "mirror-square", title: "Mirror Square", songId: "good-king-wenceslas", authors: ["8A-TARN/ezra"], lesson: 9, about: "Builds its own list of pairs.",
+    id: "mirror-square",
+    title: "Mirror Square",
+    songId: "good-king-wenceslas",
+    authors: ["8A-TARN/ezra"],
+    lesson: 9,
+    about: "Builds its own list of pairs.",
     source: `
 const north = square.side("north");
 const south = square.side("south").reversed();
@@ -86,7 +106,12 @@ at(song.section("ending").start, () => square.all.fadeTo(0, 14));
 `,
   }),
   written({
-    id: "heartbeat", title: "Heartbeat", songId: "lantern-waltz", authors: ["8A-TARN/freya"], lesson: 10, about: "Two layers that do not disturb each other.",
+    id: "heartbeat",
+    title: "Heartbeat",
+    songId: "lantern-waltz",
+    authors: ["8A-TARN/freya"],
+    lesson: 10,
+    about: "Two layers that do not disturb each other.",
     source: `
 // layer 1: a slow glow. layer 2: the heart in the town hall
 const heart = square.front("town hall").part("strip");
@@ -113,7 +138,12 @@ together(glow, beat);
 `,
   }),
   written({
-    id: "caterpillar", title: "Caterpillar", songId: "skaters-jig", authors: ["8A-TARN/gideon"], lesson: 12, about: "A class of his own with a method.",
+    id: "caterpillar",
+    title: "Caterpillar",
+    songId: "skaters-jig",
+    authors: ["8A-TARN/gideon"],
+    lesson: 12,
+    about: "A class of his own with a method.",
     source: `
 class Caterpillar {
   place = 0;
@@ -148,7 +178,12 @@ square.all.fadeTo(0, 6);
 `,
   }),
   written({
-    id: "echo", title: "Echo", songId: "quillhaven-bells", authors: ["8A-TARN/hedda"], lesson: 12, about: "A function that calls itself, and stops.",
+    id: "echo",
+    title: "Echo",
+    songId: "quillhaven-bells",
+    authors: ["8A-TARN/hedda"],
+    lesson: 12,
+    about: "A function that calls itself, and stops.",
     source: `
 // an echo comes back softer each time
 function echo(side: number, level: number) {
@@ -178,7 +213,12 @@ for (const section of song.sections) {
 `,
   }),
   written({
-    id: "seconds-count", title: "Seconds Count", songId: "frost-fair", authors: ["8A-TARN/ivo"], lesson: 12, about: "Counts real seconds with beatsIn.",
+    id: "seconds-count",
+    title: "Seconds Count",
+    songId: "frost-fair",
+    authors: ["8A-TARN/ivo"],
+    lesson: 12,
+    about: "Counts real seconds with beatsIn.",
     source: `
 // a clock on the clockmaker: one pulse every second for a minute
 const clock = square.front("clockmaker");
@@ -193,7 +233,12 @@ console.log("a minute is", now(), "beats");
 `,
   }),
   written({
-    id: "patchwork", title: "Patchwork", songId: "jingle-bells", authors: ["8A-TARN/juno", "8A-TARN/keir"], lesson: 9, about: "Groups from split, changed by chance.",
+    id: "patchwork",
+    title: "Patchwork",
+    songId: "jingle-bells",
+    authors: ["8A-TARN/juno", "8A-TARN/keir"],
+    lesson: 9,
+    about: "Groups from split, changed by chance.",
     source: `
 const patches = square.fronts.shuffled().split(6);
 const colours = ["tomato", "gold", "olivedrab", "teal", "royalblue", "plum"];

@@ -16,7 +16,13 @@ beforeAll(async () => {
 });
 
 function run(script: DemoScript): Promise<RunOutcome> {
-  return engine.run({ source: script.source, songId: script.songId, song: demoSong(script.songId).beatMap, layout: DEMO_SQUARE, seed: script.seed });
+  return engine.run({
+    source: script.source,
+    songId: script.songId,
+    song: demoSong(script.songId).beatMap,
+    layout: DEMO_SQUARE,
+    seed: script.seed,
+  });
 }
 
 const rows = DEMO_SCRIPTS.map((script) => [script.title, script] as const);
@@ -26,12 +32,15 @@ describe("the shows of the demo world", () => {
     expect(DEMO_SCRIPTS.length).toBeGreaterThanOrEqual(60);
     expect(new Set(DEMO_SCRIPTS.map((script) => script.id)).size).toBe(DEMO_SCRIPTS.length);
     expect(new Set(DEMO_SCRIPTS.map((script) => script.title)).size).toBe(DEMO_SCRIPTS.length);
-    for (const script of DEMO_SCRIPTS) expect(script.authors.map((key) => demoStudent(key).key)).toEqual([...script.authors]);
+    for (const script of DEMO_SCRIPTS)
+      expect(script.authors.map((key) => demoStudent(key).key)).toEqual([...script.authors]);
   });
 
   it.each(rows.filter(([, script]) => script.expected.runs))("%s runs", async (_, script) => {
     const outcome = await run(script);
-    expect(outcome.ok ? null : `${outcome.problem.code}: ${outcome.problem.sentence} (line ${outcome.problem.range.line})`).toBeNull();
+    expect(
+      outcome.ok ? null : `${outcome.problem.code}: ${outcome.problem.sentence} (line ${outcome.problem.range.line})`,
+    ).toBeNull();
     if (script.id !== "empty-page") expect(outcome.cueCount).toBeGreaterThan(0);
   });
 
@@ -42,10 +51,13 @@ describe("the shows of the demo world", () => {
 });
 
 describe("findings that the demo shows", () => {
-  const rules = async (id: string): Promise<string[]> => (await run(demoScript(id))).findings.map((finding) => finding.rule);
+  const rules = async (id: string): Promise<string[]> =>
+    (await run(demoScript(id))).findings.map((finding) => finding.rule);
 
   it.each([
-    ["too-bright", "level-clamped"], ["much-too-long", "after-the-end"], ["stairs", "level-clamped"],
+    ["too-bright", "level-clamped"],
+    ["much-too-long", "after-the-end"],
+    ["stairs", "level-clamped"],
   ])("%s has %s", async (id, rule) => {
     expect(await rules(id)).toContain(rule);
   });
@@ -55,8 +67,14 @@ describe("the show check of the demo's shows", () => {
   async function stops(script: DemoScript): Promise<string[]> {
     const outcome = await run(script);
     if (!outcome.ok) return ["does-not-run"];
-    const findings = checkShow({ timeline: outcome.timeline, layout: DEMO_SQUARE, song: demoSong(script.songId).beatMap });
-    return hasStop(findings) ? findings.filter((finding) => finding.severity === "stop").map((finding) => finding.rule) : [];
+    const findings = checkShow({
+      timeline: outcome.timeline,
+      layout: DEMO_SQUARE,
+      song: demoSong(script.songId).beatMap,
+    });
+    return hasStop(findings)
+      ? findings.filter((finding) => finding.severity === "stop").map((finding) => finding.rule)
+      : [];
   }
 
   const STOPPED: { readonly [id: string]: string } = { lightning: "street-flash", "empty-page": "nothing-lit" };

@@ -4,7 +4,12 @@ import type { DemoScript } from "./demo-script.ts";
 /** Shows with the words of lesson 8 and later: they follow the song's bars, sections and instruments. */
 export const SONG_SHOWS: readonly DemoScript[] = [
   written({
-    id: "nine-foxes", title: "Nine Foxes", songId: "quillhaven-bells", authors: ["7B-TARN/wren", "7B-TARN/idris"], lesson: 10, about: "The demo's best-known show: forwarded, approved, on Friday night.",
+    id: "nine-foxes",
+    title: "Nine Foxes",
+    songId: "quillhaven-bells",
+    authors: ["7B-TARN/wren", "7B-TARN/idris"],
+    lesson: 10,
+    about: "The demo's best-known show: forwarded, approved, on Friday night.",
     source: `
 // Nine foxes run round the square, each one faster.
 const trail = square.fronts.first(20);
@@ -43,7 +48,12 @@ at(song.section("ending").end - 6, () => square.all.fadeTo(0, 6));
 `,
   }),
   written({
-    id: "bells-up-the-north-side", title: "Bells up the North Side", songId: "quillhaven-bells", authors: ["7B-TARN/ada"], lesson: 8, about: "Bells climb in the intro, the chorus breathes.",
+    id: "bells-up-the-north-side",
+    title: "Bells up the North Side",
+    songId: "quillhaven-bells",
+    authors: ["7B-TARN/ada"],
+    lesson: 8,
+    about: "Bells climb in the intro, the chorus breathes.",
     source: `
 const north = square.side("north");
 for (const front of north) {
@@ -72,7 +82,12 @@ at(song.section("ending").start, () => square.all.fadeTo(0, 14));
 `,
   }),
   written({
-    id: "frost-letters", title: "Frost Letters", songId: "frost-fair", authors: ["7B-TARN/zoe"], lesson: 9, about: "Writes letters with lists of fronts.",
+    id: "frost-letters",
+    title: "Frost Letters",
+    songId: "frost-fair",
+    authors: ["7B-TARN/zoe"],
+    lesson: 9,
+    about: "Writes letters with lists of fronts.",
     source: `
 // each list is a letter, written on the square from above
 const f = [0, 1, 2, 3, 10, 11, 14];
@@ -114,7 +129,12 @@ at(song.section("ending").start, () => {
 `,
   }),
   written({
-    id: "two-trains", title: "Two Trains", songId: "jingle-bells", authors: ["7B-TARN/june"], lesson: 10, about: "Two things at once with together.",
+    id: "two-trains",
+    title: "Two Trains",
+    songId: "jingle-bells",
+    authors: ["7B-TARN/june"],
+    lesson: 10,
+    about: "Two things at once with together.",
     source: `
 // one train leaves the north, one leaves the south. where do they meet?
 const [up, down] = square.fronts.split(2);
@@ -141,7 +161,12 @@ square.all.fadeTo(0, 4);
 `,
   }),
   written({
-    id: "hush-then-drums", title: "Hush, Then Drums", songId: "good-king-wenceslas", authors: ["7B-TARN/rafi"], lesson: 10, about: "Follows how loud the song is.",
+    id: "hush-then-drums",
+    title: "Hush, Then Drums",
+    songId: "good-king-wenceslas",
+    authors: ["7B-TARN/rafi"],
+    lesson: 10,
+    about: "Follows how loud the song is.",
     source: `
 const windows = square.parts("windows");
 const quick = windows.filter((window) => window.box !== "relay");
@@ -165,7 +190,12 @@ at(song.section("ending").start, () => square.all.fadeTo(0, 12));
 `,
   }),
   written({
-    id: "tea-room-waltz", title: "Tea Room Waltz", songId: "lantern-waltz", authors: ["7B-TARN/dara"], lesson: 8, about: "Three beats a bar; a pick-up before bar 1.",
+    id: "tea-room-waltz",
+    title: "Tea Room Waltz",
+    songId: "lantern-waltz",
+    authors: ["7B-TARN/dara"],
+    lesson: 8,
+    about: "Three beats a bar; a pick-up before bar 1.",
     source: `
 // ONE two three ONE two three
 const roofs = square.parts("roof");
@@ -192,7 +222,12 @@ at(song.section("ending").start, () => square.all.fadeTo(0, 20));
 `,
   }),
   written({
-    id: "lantern-walk", title: "Lantern Walk", songId: "lantern-waltz", authors: ["7B-TARN/hana"], lesson: 11, about: "Follows the flute note by note.",
+    id: "lantern-walk",
+    title: "Lantern Walk",
+    songId: "lantern-waltz",
+    authors: ["7B-TARN/hana"],
+    lesson: 11,
+    about: "Follows the flute note by note.",
     source: `
 // the flute carries the lantern
 const notes = song.notes("flute");
@@ -219,7 +254,12 @@ console.log("the lantern took", notes.length, "steps");
 `,
   }),
   written({
-    id: "ice-on-the-millpond", title: "Ice on the Millpond", songId: "skaters-jig", authors: ["7B-TARN/fern"], lesson: 11, about: "Uses the strips as ice that cracks.",
+    id: "ice-on-the-millpond",
+    title: "Ice on the Millpond",
+    songId: "skaters-jig",
+    authors: ["7B-TARN/fern"],
+    lesson: 11,
+    about: "Uses the strips as ice that cracks.",
     source: `
 // the strips are the ice
 const ice = square.parts("strip");
@@ -242,7 +282,12 @@ at(song.section("ending").start, () => ice.fadeTo(0, 14));
 `,
   }),
   written({
-    id: "ferry-at-six", title: "Ferry at Six", songId: "frost-fair", authors: ["7B-TARN/sara"], lesson: 12, about: "Uses beatsPerBar and typed parameters.",
+    id: "ferry-at-six",
+    title: "Ferry at Six",
+    songId: "frost-fair",
+    authors: ["7B-TARN/sara"],
+    lesson: 12,
+    about: "Uses beatsPerBar and typed parameters.",
     source: `
 // the ferry leaves the boathouse and crosses to the cinema
 const bar = song.beatsPerBar;
@@ -281,7 +326,12 @@ for (const mark of [song.bar(24), song.bar(28), song.bar(32)]) {
 `,
   }),
   written({
-    id: "the-long-hallway", title: "The Long Hallway", songId: "good-king-wenceslas", authors: ["7K-QUILL/jasper"], lesson: 9, about: "Splits the square in two halves that meet.",
+    id: "the-long-hallway",
+    title: "The Long Hallway",
+    songId: "good-king-wenceslas",
+    authors: ["7K-QUILL/jasper"],
+    lesson: 9,
+    about: "Splits the square in two halves that meet.",
     source: `
 const [left, right] = square.fronts.split(2);
 const doors = square.parts("door");
@@ -304,7 +354,12 @@ at(song.section("ending").start, () => square.all.fadeTo(0, 12));
 `,
   }),
   written({
-    id: "twelve-bars-of-calm", title: "Twelve Bars of Calm", songId: "frost-fair", authors: ["7B-TARN/wren"], lesson: 8, about: "Sent back once: the last bars are empty.",
+    id: "twelve-bars-of-calm",
+    title: "Twelve Bars of Calm",
+    songId: "frost-fair",
+    authors: ["7B-TARN/wren"],
+    lesson: 8,
+    about: "Sent back once: the last bars are empty.",
     source: `
 // calm means slow
 at(song.bars, (turn) => {
@@ -316,7 +371,12 @@ at(song.bar(13), () => square.side("north").fadeTo(10, 16));
 `,
   }),
   written({
-    id: "one-song-two-moods", title: "One Song, Two Moods", songId: "jingle-bells", authors: ["7B-TARN/wren"], lesson: 8, about: "Verse and chorus differ clearly.",
+    id: "one-song-two-moods",
+    title: "One Song, Two Moods",
+    songId: "jingle-bells",
+    authors: ["7B-TARN/wren"],
+    lesson: 8,
+    about: "Verse and chorus differ clearly.",
     source: `
 const verse = song.section("verse");
 at(verse.bars, (turn) => {

@@ -60,7 +60,13 @@ class Pages {
   readonly #notes = new Map<Player, MidiNote[]>(PLAYERS.map((player) => [player, []]));
 
   add(player: Player, at: number, length: number, pitch: number, velocity: number): void {
-    const note = { tick: ticks(at), ticks: ticks(length), channel: CHANNELS[player], pitch, velocity: Math.min(127, Math.max(1, Math.round(velocity))) };
+    const note = {
+      tick: ticks(at),
+      ticks: ticks(length),
+      channel: CHANNELS[player],
+      pitch,
+      velocity: Math.min(127, Math.max(1, Math.round(velocity))),
+    };
     this.#notes.get(player)?.push(note);
   }
 
@@ -73,7 +79,14 @@ class Pages {
   }
 }
 
-function addTune(pages: Pages, player: "bells" | "flute", at: number, tune: Passage, barLength: number, force: number): void {
+function addTune(
+  pages: Pages,
+  player: "bells" | "flute",
+  at: number,
+  tune: Passage,
+  barLength: number,
+  force: number,
+): void {
   for (const tone of tune.tones) {
     const inBar = tone.start % barLength;
     const lift = inBar === 0 ? 10 : Number.isInteger(inBar) ? 0 : -8;
@@ -90,7 +103,8 @@ function voicing(chord: Chord, floor: number): number[] {
 function addChords(pages: Pages, at: number, chords: readonly Chord[], section: SectionPlan): void {
   for (const chord of chords) {
     if (section.strings !== undefined)
-      for (const pitch of voicing(chord, 55)) pages.add("strings", at + chord.start, chord.length * 0.97, pitch, section.strings);
+      for (const pitch of voicing(chord, 55))
+        pages.add("strings", at + chord.start, chord.length * 0.97, pitch, section.strings);
     if (section.harp === undefined) continue;
     const tones = voicing(chord, 67);
     const rising = [...tones, (tones[0] ?? 67) + 12];
@@ -129,13 +143,22 @@ function addDrums(pages: Pages, at: number, bars: number, section: SectionPlan, 
       [...row].forEach((mark, n) => {
         if (mark === ".") return;
         const length = barLength / row.length;
-        pages.add("drums", at + bar * barLength + n * length, Math.min(0.25, length), DRUM_KEYS[drum], mark === "X" ? 112 : drum === "hat" || drum === "jingles" ? 58 : 88);
+        pages.add(
+          "drums",
+          at + bar * barLength + n * length,
+          Math.min(0.25, length),
+          DRUM_KEYS[drum],
+          mark === "X" ? 112 : drum === "hat" || drum === "jingles" ? 58 : 88,
+        );
       });
     }
   }
 }
 
-const tempo = (at: number, perMinute: number): TempoChange => ({ tick: ticks(at), microsPerQuarter: Math.round(60_000_000 / perMinute) });
+const tempo = (at: number, perMinute: number): TempoChange => ({
+  tick: ticks(at),
+  microsPerQuarter: Math.round(60_000_000 / perMinute),
+});
 
 /** Tempo steps on every quarter note of the last two bars, evenly from one tempo to the other. */
 function slowing(end: number, barLength: number, from: number, to: number): TempoChange[] {
@@ -169,7 +192,8 @@ export function arrange(plan: SongPlan): MidiFile {
       const text = section[player];
       if (text === undefined) continue;
       const tune = readTune(text, barLength, plan.usual);
-      if (tune.length !== length) throw new RangeError(`The ${player} of "${section.name}" in ${plan.title} last ${tune.length}, not ${length}.`);
+      if (tune.length !== length)
+        throw new RangeError(`The ${player} of "${section.name}" in ${plan.title} last ${tune.length}, not ${length}.`);
       addTune(pages, player, at, tune, barLength, section.force ?? 88);
     }
     addChords(pages, at, chords, section);
@@ -178,5 +202,12 @@ export function arrange(plan: SongPlan): MidiFile {
     at += length;
     if (section.slowTo !== undefined) tempos.push(...slowing(at, barLength, perMinute, section.slowTo));
   }
-  return { format: 1, ticksPerQuarter: TICKS_PER_QUARTER, tempos, meters: [{ tick: 0, ...plan.meter }], markers, tracks: pages.tracks() };
+  return {
+    format: 1,
+    ticksPerQuarter: TICKS_PER_QUARTER,
+    tempos,
+    meters: [{ tick: 0, ...plan.meter }],
+    markers,
+    tracks: pages.tracks(),
+  };
 }

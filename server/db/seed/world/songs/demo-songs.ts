@@ -36,7 +36,12 @@ function play(plan: SongPlan): DemoSong {
 
 /** The six songs of the season: four in bars of four, a waltz with a pick-up, a jig counted in two. */
 export const DEMO_SONGS: readonly DemoSong[] = [
-  FROST_FAIR, QUILLHAVEN_BELLS, JINGLE_BELLS, GOOD_KING_WENCESLAS, LANTERN_WALTZ, SKATERS_JIG,
+  FROST_FAIR,
+  QUILLHAVEN_BELLS,
+  JINGLE_BELLS,
+  GOOD_KING_WENCESLAS,
+  LANTERN_WALTZ,
+  SKATERS_JIG,
 ].map(play);
 
 /** One of the songs of the demo world by its id. */

@@ -33,7 +33,8 @@ export const FROST_FAIR: SongPlan = {
     {
       name: "verse",
       chords: "D | Bm | G | A | D | F#m | G A | D",
-      flute: "F#4:1.5 G4:.5 A4 D5 | B4:1.5 A4:.5 F#4:2 | G4 A4 B4 G4 | E4:3 A4 | F#4:1.5 G4:.5 A4 D5 | C#5:1.5 B4:.5 A4:2 | B4 G4 A4 C#5 | D5:3 r",
+      flute:
+        "F#4:1.5 G4:.5 A4 D5 | B4:1.5 A4:.5 F#4:2 | G4 A4 B4 G4 | E4:3 A4 | F#4:1.5 G4:.5 A4 D5 | C#5:1.5 B4:.5 A4:2 | B4 G4 A4 C#5 | D5:3 r",
       bells: "r:2 D5 F#5 | r:2 D5 B4 | r:2 B4 D5 | r:2 C#5 E5 | r:2 D5 F#5 | r:2 C#5 F#5 | r:2 E5 A5 | F#5:2 D5:2",
       drums: [FOUR.steady],
       lastDrums: FOUR.fill,

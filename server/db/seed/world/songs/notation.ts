@@ -39,7 +39,8 @@ export function readTune(text: string, barLength: number, usual = 1): Passage {
       if (name !== "r") tones.push({ start: at, length: lasts, pitch: keyNumber(name) });
       at += lasts;
     }
-    if (Math.abs(at - before - barLength) > 1e-9) throw new RangeError(`Bar ${n + 1} of "${text.slice(0, 30)}" lasts ${at - before}, not ${barLength}.`);
+    if (Math.abs(at - before - barLength) > 1e-9)
+      throw new RangeError(`Bar ${n + 1} of "${text.slice(0, 30)}" lasts ${at - before}, not ${barLength}.`);
   });
   return { length: at, tones };
 }
@@ -53,7 +54,12 @@ export interface Chord {
   readonly steps: readonly number[];
 }
 
-const KINDS: { readonly [kind: string]: readonly number[] } = { "": [0, 4, 7], m: [0, 3, 7], "7": [0, 4, 7, 10], sus: [0, 5, 7] };
+const KINDS: { readonly [kind: string]: readonly number[] } = {
+  "": [0, 4, 7],
+  m: [0, 3, 7],
+  "7": [0, 4, 7, 10],
+  sus: [0, 5, 7],
+};
 
 /** Reads chords: "G | Em C | D7". The chords of a bar share it evenly. */
 export function readChords(text: string, barLength: number): readonly Chord[] {

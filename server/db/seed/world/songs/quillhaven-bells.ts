@@ -4,7 +4,8 @@ import { FOUR } from "./drum-patterns.ts";
 const VERSE: SectionPlan = {
   name: "verse",
   chords: "C | Am | F | G | C | Am | F G | C",
-  flute: "E4 G4 C5:1.5 B4:.5 | A4:1.5 B4:.5 C5:2 | A4 F4 A4 C5 | B4:3 G4 | E4 G4 C5:1.5 B4:.5 | A4 C5 E5:2 | F5 D5 B4 D5 | C5:3 r",
+  flute:
+    "E4 G4 C5:1.5 B4:.5 | A4:1.5 B4:.5 C5:2 | A4 F4 A4 C5 | B4:3 G4 | E4 G4 C5:1.5 B4:.5 | A4 C5 E5:2 | F5 D5 B4 D5 | C5:3 r",
   bells: "C6 r:3 | A5 r:3 | F5 r:3 | G5 B5 D6 r | C6 r:3 | A5 r C6 r | F5 A5 G5 B5 | C6:2 G5:2",
   drums: [FOUR.steady],
   lastDrums: FOUR.fill,
