@@ -104,6 +104,30 @@ describe("questions", () => {
   });
 });
 
+describe("steps that are to be mended or explained", () => {
+  it.each([
+    ["first-light/quotes", "needs-quotes"],
+    ["for-each-front/missing-brace", "missing-bracket"],
+    ["decisions/one-or-three", "one-equals"],
+  ])("%s stops with %s", async (id, code) => {
+    const [, lesson, step] = steps.find(([name]) => name === id) ?? [];
+    if (!lesson || !step) throw new Error("The step is gone.");
+    const outcome = await run(lesson, step.starter ?? "");
+    expect(outcome.ok ? "it ran" : outcome.problem.code).toBe(code);
+  });
+
+  it("no other starter is stopped by a problem", async () => {
+    const mended = ["first-light/quotes", "for-each-front/missing-brace", "decisions/one-or-three"];
+    const stopped: string[] = [];
+    for (const [id, lesson, step] of steps) {
+      if (step.starter === null || mended.includes(id)) continue;
+      const outcome = await run(lesson, step.starter);
+      if (!outcome.ok) stopped.push(`${id}: ${outcome.problem.code}`);
+    }
+    expect(stopped).toEqual([]);
+  }, 60_000);
+});
+
 describe("the course", () => {
   it("numbers its lessons from 1 and names every step once", () => {
     expect(LESSONS.map((lesson) => lesson.number)).toEqual(LESSONS.map((_, n) => n + 1));

@@ -106,10 +106,10 @@ export interface DemoClass {
 }
 
 export const CLASSES: readonly DemoClass[] = [
-  { code: "7B-TARN", name: "7B", school: "tarn", teachers: ["marlow"], lesson: 3 },
-  { code: "7A-TARN", name: "7A", school: "tarn", teachers: ["marlow", "okafor"], lesson: 3 },
-  { code: "8A-TARN", name: "8A", school: "tarn", teachers: ["lindqvist"], lesson: 3 },
-  { code: "7K-QUILL", name: "7K", school: "quill", teachers: ["bahar"], lesson: 3 },
+  { code: "7B-TARN", name: "7B", school: "tarn", teachers: ["marlow"], lesson: 5 },
+  { code: "7A-TARN", name: "7A", school: "tarn", teachers: ["marlow", "okafor"], lesson: 4 },
+  { code: "8A-TARN", name: "8A", school: "tarn", teachers: ["lindqvist"], lesson: 6 },
+  { code: "7K-QUILL", name: "7K", school: "quill", teachers: ["bahar"], lesson: 5 },
   { code: "8L-QUILL", name: "8L", school: "quill", teachers: ["tremain", "bahar"], lesson: 2 },
   { code: "6C-QUILL", name: "6C", school: "quill", teachers: ["tremain"], lesson: 1 },
 ];
