@@ -1,4 +1,5 @@
 import type { Finding } from "../engine/model.ts";
+import { createLightsCursor } from "../timeline/cursor.ts";
 import type { CheckContext } from "./context.ts";
 import { SEVERITIES, type CheckRule } from "./severities.ts";
 
@@ -36,6 +37,16 @@ export function buildFinding(context: CheckContext, rule: CheckRule, parts: Find
 /** Gives the innermost line of a cue: where the action itself is written. */
 export function lineOfCue({ timeline }: Pick<CheckContext, "timeline">, cue: number): number {
   return timeline.chains[timeline.cues.chain[cue] ?? 0]?.at(-1) ?? 1;
+}
+
+/** Gives the innermost lines of the cues that light these lights right after a tick; dark ones have none. */
+export function linesAt(context: CheckContext, tick: number, lights: Iterable<number>): number[] {
+  const cursor = createLightsCursor(context.timeline, context.lights, context.tracks);
+  // A rise is timed where its line crosses the step, just before the jump: look right behind it.
+  return [...lights].flatMap((light) => {
+    const cue = cursor.seekLight(light, tick + 1).cue[light] ?? -1;
+    return cue < 0 ? [] : [lineOfCue(context, cue)];
+  });
 }
 
 function sortedOnce(numbers: Iterable<number>): number[] {

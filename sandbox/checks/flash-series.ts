@@ -49,7 +49,7 @@ export function countRedFlashes(colours: readonly LinearColour[], framesPerSecon
 const BLACK: LinearColour = [0, 0, 0];
 const SATURATED = 0.8;
 const CHROMATICITY_STEP = 0.2;
-const FORMER_STEP = 20;
+export const FORMER_STEP = 20;
 
 /** Says whether two colours are the two states of a red transition. */
 export function isRedChange(a: LinearColour, b: LinearColour, rule: RedRule): boolean {
@@ -64,8 +64,8 @@ export function isSaturatedRed([red, green, blue]: LinearColour): boolean {
   return sum > 0 && red / sum >= SATURATED;
 }
 
-/** WCAG 2.0 and 2.1: (R - G - B) x 320, not below 0. */
-function formerRed([red, green, blue]: LinearColour): number {
+/** WCAG 2.0 and 2.1: (R - G - B) x 320, not below 0; a change of more than 20 counts. */
+export function formerRed([red, green, blue]: LinearColour): number {
   return Math.max(0, (red - green - blue) * 320);
 }
 

@@ -8,12 +8,14 @@ import { findLoads } from "./load.ts";
 import { findNeverSeen } from "./never-seen.ts";
 import { findNeverSwitches } from "./never-switches.ts";
 import { findOffGrid } from "./off-grid.ts";
+import { findPictureFlashes } from "./picture-flash.ts";
 import { findStreetFlashes } from "./street-flash.ts";
 import { findHalfCycle, findRelayDwell, findRelayRate } from "./switching.ts";
 
 /** Every rule of the show check. */
 const RULES: readonly ((context: CheckContext) => Finding[])[] = [
   findStreetFlashes,
+  findPictureFlashes,
   findLoads,
   findFit,
   findRelayDwell,

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { countText, readingGrade } from "../../shared/reading-grade.ts";
-import { buildFront, buildLayout, buildShow, buildSong, colour, fadeTo, off, on, pulse } from "../../tests/factories/small-show.ts";
+import { buildBroadStreet, buildFront, buildLayout, buildShow, buildSong, colour, fadeTo, off, on, pulse } from "../../tests/factories/small-show.ts";
 import type { Finding } from "../engine/model.ts";
 import type { WrittenCue } from "../timeline/build.ts";
 import { checkShow } from "./index.ts";
@@ -12,6 +12,8 @@ const sides = buildLayout([
   { side: "north", outlets: ["dimmer"] },
   { side: "south", outlets: ["dimmer"] },
 ]);
+const windows = buildLayout(Array.from({ length: 8 }, () => ({ side: "north" as const, outlets: [{ kind: "colour" as const, part: "windows" }] })));
+const WINDOWS = [0, 1, 2, 3, 4, 5, 6, 7];
 const turns = (step: number, action: (beat: number) => WrittenCue[]) => Array.from({ length: Math.floor(32 / step) }, (_, turn) => action(turn * step)).flat();
 const check = (layout: typeof mixed, cues: readonly WrittenCue[], overrides = {}, song = buildSong()) => checkShow({ timeline: buildShow(layout, cues, overrides), layout, song });
 
@@ -21,6 +23,8 @@ const FINDINGS: readonly Finding[] = [
   ...check(mixed, []),
   ...check(sides, turns(1, (beat) => [pulse(beat, 0, 1), pulse(beat + 0.5, 1, 1)])),
   ...check(sides, turns(1, (beat) => [pulse(beat, [0, 1], 1)]), {}, buildSong({}, { tempo: 179 })),
+  ...check(windows, turns(0.5, (beat) => [colour(beat, WINDOWS, 0xff_00_00), on(beat, WINDOWS, 35), off(beat + 0.25, WINDOWS)])),
+  ...check(buildBroadStreet(), turns(0.5, (beat) => [pulse(beat, 0, 0.5)])),
   ...check(sides, [on(0, 0), off(4, 0), on(28, 0)], {}, buildSong({}, { tempo: 60 })),
 ];
 

@@ -8,6 +8,8 @@ export const SEVERITIES = {
   "street-flash": { severity: "stop", reason: "Flashing light can harm people with photosensitive epilepsy." },
   "street-flash-all-sides": { severity: "warn", reason: "Each side keeps the limit, but somebody who sees several sides may see more flashes." },
   "street-flash-long-run": { severity: "warn", reason: "A long run at the limit may be risky though it keeps the limit." },
+  "picture-flash": { severity: "stop", reason: "The show is watched on screens, too, and WCAG 2.2 draws the line there." },
+  "picture-red-flash": { severity: "stop", reason: "Flashes of saturated red are the most dangerous ones." },
   "circuit-overload": { severity: "stop", reason: "Above 80 % of a breaker a circuit is overloaded while shows run for hours." },
   "circuit-everything-on": { severity: "warn", reason: "A stuck box or a test can switch on everything at once; that is for the square, not the show." },
   incomplete: { severity: "stop", reason: "A script that stopped half way is never played." },

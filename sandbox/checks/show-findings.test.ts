@@ -81,7 +81,7 @@ describe("load", () => {
 
 describe("switching", () => {
   const layout = buildFront("relay", "solid-state", "dimmer");
-  const check = (cues: readonly WrittenCue[], { tempo = 120, hertz = 60 as 50 | 60 } = {}) => {
+  const check = (cues: readonly WrittenCue[], { tempo = 120, hertz = 60 }: { readonly tempo?: number; readonly hertz?: 50 | 60 } = {}) => {
     const square = { ...layout, mains: { volts: 120, hertz } };
     return createCheckContext({ timeline: buildShow(square, cues), layout: square, song: buildSong({}, { tempo }) });
   };

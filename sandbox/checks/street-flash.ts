@@ -2,10 +2,10 @@ import { SIDES, type Side } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
 import { sideGeometry } from "../square/geometry.ts";
 import type { Light } from "../square/lights.ts";
-import { createLightsCursor } from "../timeline/cursor.ts";
 import type { LightCurve } from "../timeline/curves.ts";
 import type { CheckContext } from "./context.ts";
-import { buildFinding, lineOfCue } from "./finding.ts";
+import { buildFinding, linesAt } from "./finding.ts";
+import { isWithinSecond, sortRises, type Rise } from "./rises.ts";
 import { findTransitions } from "./transitions.ts";
 import { nameBar } from "../timeline/words.ts";
 
@@ -26,8 +26,7 @@ import { nameBar } from "../timeline/words.ts";
  * of all sides together is a warning only. A show that passes here is not proved safe: lamps, viewing
  * angle and reflections differ, so the event's safety officer decides.
  *
- * The rule on the reference picture (areas of 341 x 256 pixels, red flashes) is a rule of its own
- * and belongs beside this one; it counts with `findTransitions`, too.
+ * What flashes on a screen that shows the square is a rule of its own, `picture-flash.ts`.
  */
 export interface FlashEvent {
   readonly tick: number;
@@ -47,9 +46,6 @@ export interface FlashCount {
   /** Longest time in seconds without a break in which each second holds as many events as allowed, or more. */
   readonly longestRun: number;
 }
-
-/** Seconds: beats are whole microseconds, so four events "a second apart" may lack a few of them. */
-const ROUNDING_SECONDS = 0.0005;
 
 /** Gives the flash counts of every side that has lights, and of the whole square when it has several sides. */
 export function countStreetFlashes(context: CheckContext): readonly FlashCount[] {
@@ -82,12 +78,6 @@ function listWeights({ lights }: CheckContext, side: Side | null, areas: Readonl
   return new Map(inView.map((light) => [light.index, { area: areaOf(light) / area, number: numberOf(light) / number }]));
 }
 
-interface Rise {
-  readonly light: number;
-  readonly tick: number;
-  readonly seconds: number;
-}
-
 /** Rising transitions of all lights by time: once by luminance, once by the strongest channel. */
 function listRises(context: CheckContext): readonly (readonly Rise[])[] {
   const { rules, tempo, lights } = context;
@@ -105,7 +95,7 @@ function listRises(context: CheckContext): readonly (readonly Rise[])[] {
       known.set(curve, ticks);
       return ticks.map((tick) => ({ light, tick, seconds: tempo.toSeconds(tick) }));
     });
-    return rises.sort((a, b) => a.seconds - b.seconds || a.light - b.light);
+    return sortRises(rises);
   });
 }
 
@@ -121,7 +111,6 @@ function countView({ rules }: CheckContext, side: Side | null, weights: Weights,
   return { side, events, worst, longestRun: longestRunAtLimit(events, rules.flashesPerSecond) };
 }
 
-const isWithinSecond = (first: number, last: number) => last - first < 1 - ROUNDING_SECONDS;
 
 /** From the earliest on: rises within 20 ms are one event when their lights weigh enough. */
 function groupRises(rises: readonly Rise[], weights: Weights, needed: number, together: number): FlashEvent[] {
@@ -208,18 +197,6 @@ function describeOver(context: CheckContext, { side, events, worst }: FlashCount
     measured: { value: worst, limit, unit: "flashes a second" },
     moments: bad.map(({ tick }) => tick),
     lights: together.flatMap(({ lights }) => lights),
-    lines: linesOf(context, together),
+    lines: together.flatMap(({ tick, lights }) => linesAt(context, tick, lights)),
   });
-}
-
-/** Lines of the cues that light the lights of these events. */
-function linesOf(context: CheckContext, events: readonly FlashEvent[]): number[] {
-  const cursor = createLightsCursor(context.timeline, context.lights, context.tracks);
-  return events.flatMap(({ tick, lights }) =>
-    lights.flatMap((light) => {
-      // A rise is timed where its line crosses the step, just before the jump: look right behind it.
-      const cue = cursor.seekLight(light, tick + 1).cue[light] ?? -1;
-      return cue < 0 ? [] : [lineOfCue(context, cue)];
-    }),
-  );
 }

@@ -18,6 +18,8 @@ export interface LightCurve {
   readonly luminance: Float32Array;
   /** The strongest of its linear channels, 0 to 1: full for a saturated red or blue, too. */
   readonly strongest: Float32Array;
+  /** Linear red, green and blue, three numbers a point; empty for a light without colour. */
+  readonly rgb: Float32Array;
 }
 
 /** "Just before" a tick: two points this close together are a jump. */
@@ -54,7 +56,7 @@ function traceSwitched(tracks: Tracks, light: number): LightCurve {
     [end, 0],
   ]);
   const on = Float32Array.from(points, ([, value]) => value ?? 0);
-  return { tick: Float64Array.from(points, ([tick]) => tick ?? 0), level: on.map((value) => value * 100), luminance: on, strongest: on };
+  return { tick: Float64Array.from(points, ([tick]) => tick ?? 0), level: on.map((value) => value * 100), luminance: on, strongest: on, rgb: new Float32Array(0) };
 }
 
 function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
@@ -62,19 +64,21 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
   const levels: number[] = [];
   const luminances: number[] = [];
   const strongests: number[] = [];
+  const colours: number[] = [];
   const read = (tick: number) => {
     const { rgb, level } = cursor.seekLight(light.index, tick);
     const at = light.index * 3;
     const [red, green, blue] = [rgb[at] ?? 0, rgb[at + 1] ?? 0, rgb[at + 2] ?? 0];
     // Red is the full channel of the warm white that plain strings have.
-    return { level: level[light.index] ?? 0, luminance: light.hasColour ? relativeLuminance(red, green, blue) : red, strongest: Math.max(red, green, blue) };
+    return { level: level[light.index] ?? 0, luminance: light.hasColour ? relativeLuminance(red, green, blue) : red, strongest: Math.max(red, green, blue), rgb: [red, green, blue] };
   };
   const add = (tick: number) => {
-    const { level, luminance, strongest } = read(tick);
+    const { level, luminance, strongest, rgb } = read(tick);
     ticks.push(tick);
     levels.push(level);
     luminances.push(luminance);
     strongests.push(strongest);
+    if (light.hasColour) colours.push(...rgb);
   };
   const breaks = listBreaks(tracks, light);
   breaks.forEach((tick, index) => {
@@ -87,7 +91,13 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
     if (samples.every((sample) => sample.level === first?.level && sample.luminance === first.luminance && sample.strongest === first.strongest)) return;
     for (let between = tick + CURVE_STEP_TICKS; between < next; between += CURVE_STEP_TICKS) add(between);
   });
-  return { tick: Float64Array.from(ticks), level: Float32Array.from(levels), luminance: Float32Array.from(luminances), strongest: Float32Array.from(strongests) };
+  return {
+    tick: Float64Array.from(ticks),
+    level: Float32Array.from(levels),
+    luminance: Float32Array.from(luminances),
+    strongest: Float32Array.from(strongests),
+    rgb: Float32Array.from(colours),
+  };
 }
 
 /** Ticks at which a light may jump or bend, sorted; the last is the song's end. */

@@ -51,6 +51,15 @@ export function buildFront(...outlets: readonly OutletSketch[]): Layout {
   return buildLayout([{ side: "north", outlets }]);
 }
 
+/** Seven fronts on the north side whose windows dim, the first broad: a fifth of the side, yet a quarter of any screen's middle. */
+export function buildBroadStreet(): Layout {
+  const street = buildLayout(Array.from({ length: 7 }, () => ({ side: "north" as const, outlets: [{ kind: "dimmer" as const, part: "windows" }] })));
+  return {
+    ...street,
+    fronts: street.fronts.map((front, index) => ({ ...front, silhouette: { ...front.silhouette, floors: 3, bays: index === 0 ? 6 : 4, width: index === 0 ? 1.6 : 1 } })),
+  };
+}
+
 function letters(index: number): string {
   return index < 26 ? String.fromCharCode(97 + index) : letters(Math.floor(index / 26) - 1) + letters(index % 26);
 }
