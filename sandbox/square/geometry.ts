@@ -76,7 +76,7 @@ const MARGIN = 0.012;
 const TREE_PLACE: { readonly [S in Side]: number } = { north: 0.655, east: 0.345, south: 0.56, west: 0.44 };
 const TREE_HEIGHT = 0.56;
 /** A house is never drawn wider than this for its height, however few there are. */
-const WIDEST = 0.32;
+const WIDEST = 0.46;
 
 /** Measures of a view that shows this many fronts. */
 export function viewFrame(view: View, shown: number): ViewFrame {

@@ -42,6 +42,14 @@ export function ScriptView({ source, label, actLines = [], markedLines = [], not
       book.add(Number(element.dataset["glowLine"]), element);
   }, [acting, lines]);
 
+  const [firstMarked] = markedLines;
+  useEffect(() => {
+    const list = listRef.current;
+    const line = firstMarked === undefined ? undefined : list?.children[firstMarked - 1];
+    // Where the list scrolls by itself, what is marked is in sight from the start.
+    if (list && line instanceof HTMLElement) list.scrollTop = line.offsetTop - list.offsetTop - 40;
+  }, [firstMarked]);
+
   useImperativeHandle(ref, () => ({
     setGlow: (byLine) => bookRef.current.set(byLine),
     showLine: (line) => listRef.current?.children[line - 1]?.scrollIntoView({ block: "center" }),

@@ -3,6 +3,7 @@ import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
 import type { RibbonCells } from "../../../../sandbox/timeline/ribbon.ts";
 import { useElementSize } from "../../../hooks/use-element-size.ts";
+import { useTheme } from "../../../hooks/use-theme.ts";
 import { LoopEdge } from "./loop-edge.tsx";
 import { Playhead } from "./playhead.tsx";
 import { RibbonBars } from "./ribbon-bars.tsx";
@@ -42,6 +43,7 @@ export function LargeRibbon(props: LargeRibbonProps) {
   const clothRef = useRef<HTMLDivElement>(null);
   const canvasRef = useRef<HTMLCanvasElement>(null);
   const { width } = useElementSize(clothRef);
+  const theme = useTheme();
   const rows = bands.reduce((sum, band) => sum + band.rows, 0);
   const gap = thread < 1.5 ? 0 : BAND_GAP;
   const height = Math.round(thread * rows + gap * (bands.length - 1));
@@ -59,8 +61,9 @@ export function LargeRibbon(props: LargeRibbonProps) {
       gap: gap * ratio,
       bands: bands.map((band) => band.rows),
       ratio,
+      theme,
     });
-  }, [cells, width, height, gap, bands]);
+  }, [cells, width, height, gap, bands, theme]);
 
   const handlePointer = (event: PointerEvent<HTMLDivElement>) => {
     if (event.target instanceof Element && event.target.closest("[role=slider]")) return;

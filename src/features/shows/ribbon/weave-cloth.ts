@@ -1,4 +1,5 @@
 import type { RibbonCells } from "../../../../sandbox/timeline/ribbon.ts";
+import type { Theme } from "../../../lib/theme.ts";
 
 /** How the cloth is woven: sizes in device pixels. */
 export interface ClothLook {
@@ -12,10 +13,11 @@ export interface ClothLook {
   readonly bands: readonly number[];
   /** Device pixels of a CSS pixel: the weave has threads two CSS pixels wide. */
   readonly ratio: number;
+  readonly theme: Theme;
 }
 
-/** A bare thread. */
-const THREAD = [44, 52, 86] as const;
+/** A bare thread; one step lighter in the dark theme, or the cloth would vanish on its card. */
+const THREADS = { light: [44, 52, 86], dark: [56, 66, 106] } as const;
 
 /** Where each row of the cloth lies: its first and past-the-last device pixel. */
 export function listRowSpans({ height, gap, bands }: Pick<ClothLook, "height" | "gap" | "bands">): { top: number; bottom: number }[] {
@@ -37,6 +39,7 @@ export function listRowSpans({ height, gap, bands }: Pick<ClothLook, "height" | 
  */
 export function weaveCloth(ribbon: RibbonCells | null, look: ClothLook): Uint8ClampedArray<ArrayBuffer> {
   const { width, height, tail, ratio } = look;
+  const thread = THREADS[look.theme];
   const pixels = new Uint8ClampedArray(width * height * 4);
   const inner = Math.max(1, width - 2 * tail);
   listRowSpans(look).forEach(({ top, bottom }, row) => {
@@ -49,7 +52,7 @@ export function weaveCloth(ribbon: RibbonCells | null, look: ClothLook): Uint8Cl
         const light = (isOver ? 1 : 0.88) * threadLight(y, top, bottom);
         const at = (y * width + x) * 4;
         for (let channel = 0; channel < 3; channel += 1) {
-          const bare = THREAD[channel] ?? 0;
+          const bare = thread[channel] ?? 0;
           const lit = ribbon && cell >= 0 ? (ribbon.cells[cell + channel] ?? 0) : bare;
           pixels[at + channel] = (bare + (lit - bare) * strength) * light;
         }

@@ -43,8 +43,10 @@ export function NamesMap({ layout, onInsert }: NamesMapProps) {
       })}
       <div className="studio-court">
         <p className="studio-court-side">
-          <b>{picked.side ? `${picked.side.charAt(0).toUpperCase()}${picked.side.slice(1)} side` : "In the middle"}</b>
-          {picked.side ? ", in walking order" : ""}
+          <span>
+            <b>{picked.side ? `${picked.side.charAt(0).toUpperCase()}${picked.side.slice(1)} side` : "In the middle"}</b>
+            {picked.side ? ", in walking order" : ""}
+          </span>
           {fronts.filter((front) => front.side === null).map(cell)}
         </p>
         <ul className="studio-court-names">

@@ -10,13 +10,13 @@ import type { ShowPlayer } from "./show-player.ts";
 export interface ScriptPanelHandle {
   goToLine: (line: number) => void;
   insert: (code: string) => void;
+  /** Takes another text over: a version, or what was saved elsewhere. */
+  replace: (source: string) => void;
 }
 
 export interface ScriptPanelProps {
   /** The text to begin with. */
   source: string;
-  /** The text as it should be: differs from the editor's only when another version was chosen. */
-  wantedSource: string;
   names: ScriptNames;
   problem: Problem | null;
   actLines: readonly number[];
@@ -34,7 +34,7 @@ const SIZE_KEY = "duskbell-script-large";
 
 /** The script with its head: what is on stage, the size of the letters, Run. */
 export function ScriptPanel(props: ScriptPanelProps) {
-  const { source, wantedSource, names, problem, actLines, player, stageNote, isRunning, onChange, onRun, onSave, ref } = props;
+  const { source, names, problem, actLines, player, stageNote, isRunning, onChange, onRun, onSave, ref } = props;
   const hostRef = useRef<HTMLDivElement>(null);
   const hintId = useId();
   const [isLarge, setIsLarge] = useState(() => localStorage.getItem(SIZE_KEY) === "yes");
@@ -60,7 +60,6 @@ export function ScriptPanel(props: ScriptPanelProps) {
   useEffect(() => editor?.setNames(names), [editor, names]);
   useEffect(() => editor?.setProblem(problem), [editor, problem]);
   useEffect(() => editor?.setActLines(actLines), [editor, actLines]);
-  useEffect(() => editor?.replace(wantedSource), [editor, wantedSource]);
   useEffect(() => {
     if (!editor) return;
     return player.addView({ showMoment: ({ linesLit }) => editor.setGlow(linesLit) });
@@ -68,6 +67,7 @@ export function ScriptPanel(props: ScriptPanelProps) {
   useImperativeHandle(ref, () => ({
     goToLine: (line) => editor?.goToLine(line),
     insert: (code) => editor?.insert(code),
+    replace: (text) => editor?.replace(text),
   }));
 
   const toggleSize = () => {

@@ -3,6 +3,7 @@ import { SIDES, type Layout, type Side } from "../../../../shared/contracts/squa
 import { listFronts, listLights, type Light } from "../../../../sandbox/square/lights.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { useElementSize } from "../../../hooks/use-element-size.ts";
+import { useMediaQuery } from "../../../hooks/use-media-query.ts";
 import { Stage } from "../stage/stage.ts";
 import { UnrolledStrip, type SideSpan } from "../stage/unrolled-strip.ts";
 import { findLitLight, type LitLight } from "./lit-light.ts";
@@ -13,8 +14,7 @@ import { SideStrip } from "./side-strip.tsx";
 import { SideWalk } from "./side-walk.tsx";
 import { WhyCard, type WhyPlace } from "./why-card.tsx";
 
-/** Narrower than this six fronts fit, not ten. */
-const PHONE_WIDTH = 560;
+/** A phone shows six fronts at a time: ten would be too small to tell apart. */
 const PHONE_FRONTS = 6;
 
 export interface StageWindowProps {
@@ -43,7 +43,7 @@ export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, 
   const [why, setWhy] = useState<WhyPlace | null>(null);
   const lights = useMemo(() => listLights(layout), [layout]);
   const fronts = useMemo(() => listFronts(layout), [layout]);
-  const isPhone = stageSize.width > 0 && stageSize.width < PHONE_WIDTH;
+  const isPhone = useMediaQuery("(max-width: 559px)");
   const sideLength = fronts.filter(({ front }) => front.side === side).length;
 
   const stage = useDisposable(() => new Stage(getCanvas(stageRef.current), layout), [layout]);

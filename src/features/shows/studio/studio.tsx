@@ -89,14 +89,23 @@ function OpenStudio(props: OpenStudioProps) {
     if (tick !== undefined) player.seekTick(tick);
     if (line !== undefined) goToLine(line);
   };
+  // The store and this agree unless the text was changed from outside: another version, another computer.
+  const lastEdited = useRef(firstSource);
+  useEffect(() => {
+    const source = store?.state.source ?? "";
+    if (source === lastEdited.current) return;
+    lastEdited.current = source;
+    editor.current?.replace(source);
+    runNow(source);
+  }, [store, draft.source, runNow]);
   const edit = (source: string) => {
+    lastEdited.current = source;
     store?.edit(source);
     runSoon(source);
   };
   const choose = (source: string) => {
     setDialog(null);
     void store?.choose(source);
-    runNow(source);
   };
   const insert = (code: string) => {
     setTab("script");
@@ -133,7 +142,6 @@ function OpenStudio(props: OpenStudioProps) {
             <ScriptPanel
               ref={editor}
               source={firstSource}
-              wantedSource={draft.source}
               names={names}
               problem={problem}
               actLines={actLines}
@@ -177,7 +185,7 @@ function OpenStudio(props: OpenStudioProps) {
           readSource={props.readVersion}
           onUse={(source) => {
             setDialog(null);
-            edit(source);
+            store?.edit(source);
           }}
           onClose={() => setDialog(null)}
         />
