@@ -24,7 +24,7 @@ try {
     welcome = await seedDemoWorld({ db: connection.db, clock: systemClock, runs, log });
   });
   printAddress(server.address);
-  stopOnSignals(server.stop);
+  stopOnSignals(() => server.stop());
 } catch (error) {
   fail(error);
 }

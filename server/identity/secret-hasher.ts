@@ -26,12 +26,13 @@ export interface SecretHasher {
 
 export function createSecretHasher(): SecretHasher {
   const limit = createLimiter(CONCURRENCY, QUEUE_LIMIT);
-  // Made once and of the same cost as every real one.
-  const dummy = hash("no account has this secret", ARGON2);
+  // Made with the first check of all, whatever account that is for.
+  let dummy: Promise<string> | null = null;
   return {
     hash: (secret) => limit(() => hash(normalize(secret), ARGON2)),
     verify: (secretHash, secret) =>
       limit(async () => {
+        dummy ??= hash("no account has this secret", ARGON2);
         const isRight = await verify(secretHash ?? (await dummy), normalize(secret));
         return isRight && secretHash !== null;
       }),

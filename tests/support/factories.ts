@@ -195,7 +195,7 @@ export function buildAssignment(db: Db, overrides: Partial<typeof assignments.$i
       createdBy: overrides.createdBy ?? buildUser(db, { roles: ["teacher"] }).id,
       createdAt: MADE_AT,
       ...overrides,
-    } as typeof assignments.$inferInsert)
+    })
     .returning()
     .get();
 }

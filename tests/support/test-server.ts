@@ -55,7 +55,7 @@ export function createTestServer(
   let keyCount = 0;
 
   const signIn = async (userId: string) => {
-    const { cookie } = await createSessions(db, clock, { isSecure: deps.config.secureCookies }).open(userId as UserId);
+    const { cookie } = await createSessions(db, clock, { isSecure: deps.config.secureCookies }).open(userId);
     return cookie.slice(0, cookie.indexOf(";"));
   };
 

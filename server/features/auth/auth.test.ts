@@ -142,7 +142,7 @@ describe("POST /api/auth/student-sign-in", () => {
     }
     server.clock.advance(60 * MINUTE_MS);
     expect((await signInPupil()).status).toBe(429);
-    const params = { classId: group.id as ClassId, studentId: pupil.id as UserId };
+    const params = { classId: group.id, studentId: pupil.id };
     expect((await server.call(classesContract.resetSignIn, { params }, { as: teacher.id })).status).toBe(200);
     expect((await signInPupil()).status).toBe(200);
   }, 60_000);
@@ -324,7 +324,7 @@ describe("POST /api/auth/redeem-reset", () => {
     });
   const makeCode = async () => {
     const { pupil, group, teacher } = buildPupil();
-    const params = { classId: group.id as ClassId, studentId: pupil.id as UserId };
+    const params = { classId: group.id, studentId: pupil.id };
     const answer = await server.call(classesContract.resetSignIn, { params }, { as: teacher.id });
     return String(answer.body.code);
   };
