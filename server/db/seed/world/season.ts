@@ -2,15 +2,21 @@ import { CLASSES } from "./people.ts";
 import { demoScript } from "./scripts/index.ts";
 import { WORK } from "./work.ts";
 
-/** The demo world's season: every night of December, and which show is planned when. */
+/** The demo world's season: five weeks round the day of seeding, and which show is planned when. */
 
-export const SEASON_NAME = "December on the square";
+export const SEASON_NAME = "Five weeks of lights";
 /** The start times that the board offers. */
 export const START_TIMES = ["17:00", "17:20", "17:40", "18:00", "18:20", "18:40", "19:00", "19:20", "19:40"] as const;
 export const OPENS_AT = "17:00";
 /** Quiet hour: every show must be over. */
 export const CLOSES_AT = "20:00";
-const NIGHTS_IN_DECEMBER = 31;
+/** First and last night, and the last that is planned, in days from today: the season is half filled. */
+const FIRST_DAY = -10;
+const LAST_DAY = 24;
+const LAST_PLANNED_DAY = 9;
+/** Market day comes every week, three days after today: tonight is never dark. */
+const MARKET_DAY = 3;
+const DAYS_IN_WEEK = 7;
 /** Most and fewest shows of a night: Fridays and Saturdays are full. */
 const FULL_NIGHT = START_TIMES.length;
 const USUAL_NIGHT = 6;
@@ -32,17 +38,22 @@ export interface DemoSlot {
 /** 0 is Sunday. */
 const weekday = (date: string): number => new Date(`${date}T12:00:00Z`).getUTCDay();
 
-function closedReason(date: string): string | null {
-  const day = date.slice(-2);
-  if (day === "24" || day === "25" || day === "31") return "Holiday";
-  return weekday(date) === 0 ? "Market day" : null;
+function addDays(date: string, days: number): string {
+  const at = new Date(`${date}T12:00:00Z`);
+  at.setUTCDate(at.getUTCDate() + days);
+  return at.toISOString().slice(0, 10);
 }
 
-/** Every night of December of a year. */
-export function listNights(year: number): readonly DemoNight[] {
-  return Array.from({ length: NIGHTS_IN_DECEMBER }, (_, n) => {
-    const date = `${year}-12-${String(n + 1).padStart(2, "0")}`;
-    return { date, closedReason: closedReason(date) };
+function closedReason(date: string, day: number): string | null {
+  if (/-12-2[45]$/.test(date) && day !== 0) return "Holiday";
+  return (((day - MARKET_DAY) % DAYS_IN_WEEK) + DAYS_IN_WEEK) % DAYS_IN_WEEK === 0 ? "Market day" : null;
+}
+
+/** Every night of the season that lies round this date. */
+export function listNights(today: string): readonly DemoNight[] {
+  return Array.from({ length: LAST_DAY - FIRST_DAY + 1 }, (_, n) => {
+    const date = addDays(today, FIRST_DAY + n);
+    return { date, closedReason: closedReason(date, FIRST_DAY + n) };
   });
 }
 
@@ -57,12 +68,13 @@ function scheduledBySchool(): readonly (readonly string[])[] {
 }
 
 /**
- * The planned slots of a December: the schools take turns within a night, no show comes twice in one,
+ * The planned slots of that season: the schools take turns within a night, no show comes twice in one,
  * and every show moves on by one place from night to night.
  */
-export function listSlots(year: number): readonly DemoSlot[] {
+export function listSlots(today: string): readonly DemoSlot[] {
   const schools = scheduledBySchool();
-  const open = listNights(year).filter((night) => night.closedReason === null);
+  const lastDate = addDays(today, LAST_PLANNED_DAY);
+  const open = listNights(today).filter((night) => night.closedReason === null && night.date <= lastDate);
   return open.flatMap(({ date }, n) => {
     const isFull = [5, 6].includes(weekday(date));
     const slots: DemoSlot[] = [];
