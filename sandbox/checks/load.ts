@@ -1,10 +1,11 @@
 import type { Circuit } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
 import { createLightsCursor } from "../timeline/cursor.ts";
+import { nameBar } from "../timeline/words.ts";
 import { BIN_TICKS, countBins, highestPerBin } from "./bins.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, lineOfCue } from "./finding.ts";
-import { nameBar } from "../timeline/words.ts";
+import { continuousLimitWatts } from "./load-rules.ts";
 
 /** What a circuit carries in a show. */
 export interface CircuitLoad {
@@ -48,7 +49,7 @@ export function listCircuitLoads(context: CheckContext): readonly CircuitLoad[] 
     });
     return {
       circuit,
-      limitAmps: circuit.breakerAmps * rules.continuousShare,
+      limitAmps: continuousLimitWatts(circuit.volts, circuit.breakerAmps, rules.continuousShare) / circuit.volts,
       peakAmps: (sum[peakBin] ?? 0) / circuit.volts,
       peakTick: peakBin * BIN_TICKS,
       fullAmps: onIt.reduce((total, light) => total + light.watts, 0) / circuit.volts,

@@ -1,3 +1,5 @@
+import { CONTINUOUS_FACTOR } from "./load-rules.ts";
+
 /**
  * The limits that the show check measures against. They are settings of an event: an event may make
  * them stricter. Each says where it comes from; "common practice" has no source that could be cited.
@@ -37,7 +39,7 @@ export const DEFAULT_RULES: EventRules = {
   relayDwellSeconds: 0.5,
   relayCyclesPerSecond: 0.5,
   relayWindowSeconds: 30,
-  continuousShare: 0.8,
+  continuousShare: 1 / CONTINUOUS_FACTOR,
   leastLengthShare: 0.9,
   longestDarkSeconds: 15,
 };

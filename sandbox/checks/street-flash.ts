@@ -47,8 +47,17 @@ export interface FlashCount {
   readonly longestRun: number;
 }
 
-/** Gives the flash counts of every side that has lights, and of the whole square when it has several sides. */
+/** Several rules and the evidence ask for the same counts. */
+const countsOf = new WeakMap<CheckContext, readonly FlashCount[]>();
+
+/** Gives the flash counts of every side that has lights, and of the whole square when it has several sides. Worked out once for a context. */
 export function countStreetFlashes(context: CheckContext): readonly FlashCount[] {
+  const counts = countsOf.get(context) ?? countViews(context);
+  countsOf.set(context, counts);
+  return counts;
+}
+
+function countViews(context: CheckContext): readonly FlashCount[] {
   const rises = listRises(context);
   const sides = SIDES.filter((side) => context.lights.some((light) => light.side === side));
   const areas = measureAreas(context, sides);
