@@ -67,7 +67,8 @@ export function FindingList({ findings, presentMoment, onShowMoment, onShowLine 
         </ul>
       )}
       <p className="mt-2 text-meta text-slate">
-        A planning aid, worked out from the script and the plan of the square: local codes, the venue’s safety officer and a licensed electrician decide. Flashing light can harm people with photosensitive epilepsy.
+        A planning aid, worked out from the script and the plan of the square: local codes, the venue’s safety officer
+        and a licensed electrician decide. Flashing light can harm people with photosensitive epilepsy.
       </p>
     </div>
   );

@@ -15,7 +15,13 @@ export interface QueryViewProps<Data> {
 }
 
 /** One query on a page: skeleton, then content; what failed can be tried again; what is not there is the not-found page. */
-export function QueryView<Data>({ query, skeleton, errorTitle, frame = (message) => message, children }: QueryViewProps<Data>) {
+export function QueryView<Data>({
+  query,
+  skeleton,
+  errorTitle,
+  frame = (message) => message,
+  children,
+}: QueryViewProps<Data>) {
   // Content that is here already stays, even when a later refresh failed.
   if (query.data !== undefined) return <>{children(query.data)}</>;
   if (!query.isError) return <>{skeleton}</>;
@@ -29,7 +35,9 @@ export function QueryView<Data>({ query, skeleton, errorTitle, frame = (message)
       isRetrying={query.isFetching}
       requestId={"requestId" in error && typeof error.requestId === "string" ? error.requestId : null}
     >
-      <p>{isOffline ? "The server does not answer. Nothing is lost; try again when the network is back." : error.message}</p>
+      <p>
+        {isOffline ? "The server does not answer. Nothing is lost; try again when the network is back." : error.message}
+      </p>
     </ErrorState>,
   );
 }

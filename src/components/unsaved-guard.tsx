@@ -11,7 +11,9 @@ export interface UnsavedGuardProps {
 
 /** Asks before a page with unsaved changes is left, by a link, by going back, or by closing the tab. */
 export function UnsavedGuard({ isDirty, what }: UnsavedGuardProps) {
-  const blocker = useBlocker(({ currentLocation, nextLocation }) => isDirty && currentLocation.pathname !== nextLocation.pathname);
+  const blocker = useBlocker(
+    ({ currentLocation, nextLocation }) => isDirty && currentLocation.pathname !== nextLocation.pathname,
+  );
   useEffect(() => {
     if (!isDirty) return;
     const warn = (event: BeforeUnloadEvent) => event.preventDefault();

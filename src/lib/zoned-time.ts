@@ -1,6 +1,7 @@
 const DAY_MS = 86_400_000;
 
-const parts = (zone: string, options: Intl.DateTimeFormatOptions) => new Intl.DateTimeFormat("en-GB", { timeZone: zone, ...options });
+const parts = (zone: string, options: Intl.DateTimeFormatOptions) =>
+  new Intl.DateTimeFormat("en-GB", { timeZone: zone, ...options });
 
 /** The calendar date of an instant (UTC milliseconds) in a zone, as 2026-12-04. */
 export function toLocalDate(instant: number, zone: string): string {

@@ -27,14 +27,24 @@ export function Component() {
   return (
     <Page title="Admin" density="staff" className="mx-auto max-w-page">
       <PageHeader title="Admin" lead="Schools, staff accounts and the state of this installation." />
-      <QueryView query={overview} skeleton={<AdminSkeleton />} errorTitle="The installation’s state could not be loaded.">
+      <QueryView
+        query={overview}
+        skeleton={<AdminSkeleton />}
+        errorTitle="The installation’s state could not be loaded."
+      >
         {({ schools, staff, database }) => (
           <div className="space-y-5">
             <div className="grid grid-cols-2 gap-5 max-wide:grid-cols-1">
               <SchoolsSection schools={schools} />
               <DatabaseSection database={database} timeZone={timeZone} now={now} />
             </div>
-            <StaffSection staff={staff} schools={schools} ownId={session?.user.id ?? ""} timeZone={timeZone} now={now} />
+            <StaffSection
+              staff={staff}
+              schools={schools}
+              ownId={session?.user.id ?? ""}
+              timeZone={timeZone}
+              now={now}
+            />
           </div>
         )}
       </QueryView>

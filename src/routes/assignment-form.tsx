@@ -19,7 +19,10 @@ import { requireSession } from "./guards.ts";
 
 export async function loader({ request, params }: LoaderFunctionArgs) {
   await requireSession(request, "teacher");
-  const isKnown = params.assignmentId === undefined ? ClassIdSchema.safeParse(params.classId).success : AssignmentIdSchema.safeParse(params.assignmentId).success;
+  const isKnown =
+    params.assignmentId === undefined
+      ? ClassIdSchema.safeParse(params.classId).success
+      : AssignmentIdSchema.safeParse(params.assignmentId).success;
   if (!isKnown) throw new Response(null, { status: 404 });
   // The form reads dates in the school's zone, so the zone must be there before it is filled.
   void queryClient.prefetchQuery(programmeQuery);
@@ -30,7 +33,11 @@ export async function loader({ request, params }: LoaderFunctionArgs) {
 /** Sets an assignment for a class, or changes one. */
 export function Component() {
   const { classId, assignmentId } = useParams();
-  return assignmentId === undefined ? <NewAssignment classId={classId as ClassId} /> : <ChangeAssignment assignmentId={assignmentId as AssignmentId} />;
+  return assignmentId === undefined ? (
+    <NewAssignment classId={classId as ClassId} />
+  ) : (
+    <ChangeAssignment assignmentId={assignmentId} />
+  );
 }
 
 function NewAssignment({ classId }: { classId: ClassId }) {
@@ -84,7 +91,11 @@ function ChangeForm({ detail, zone, now, songs }: Ready & { detail: AssignmentDe
     <AssignmentForm
       start={toDraft(detail, zone)}
       check={{ zone, now, keptDue: assignment.dueAt }}
-      songs={songs.some((song) => song.id === assignment.songId) ? songs : [...songs, { id: assignment.songId, title: assignment.songTitle, seconds: 0 }]}
+      songs={
+        songs.some((song) => song.id === assignment.songId)
+          ? songs
+          : [...songs, { id: assignment.songId, title: assignment.songTitle, seconds: 0 }]
+      }
       saveLabel="Save the changes"
       backTo={backTo}
       isRubricFixed={isRubricFixed}
@@ -92,7 +103,9 @@ function ChangeForm({ detail, zone, now, songs }: Ready & { detail: AssignmentDe
       isPending={update.isPending}
       isSaved={update.isSuccess}
       error={update.error}
-      onSave={({ rubric, songId, ...fields }) => update.mutate({ ...fields, ...(!isRubricFixed && { rubric }), ...(!isSongFixed && { songId }) })}
+      onSave={({ rubric, songId, ...fields }) =>
+        update.mutate({ ...fields, ...(!isRubricFixed && { rubric }), ...(!isSongFixed && { songId }) })
+      }
     />
   );
 }
@@ -113,7 +126,15 @@ interface Ready {
   songs: readonly { id: AssignmentDetail["assignment"]["songId"]; title: string; seconds: number }[];
 }
 
-function Frame({ title, lead, children }: { title: string; lead?: string; children: (ready: Ready) => React.ReactNode }) {
+function Frame({
+  title,
+  lead,
+  children,
+}: {
+  title: string;
+  lead?: string;
+  children: (ready: Ready) => React.ReactNode;
+}) {
   const programme = useQuery(programmeQuery);
   const songs = useQuery(songsQuery);
   const now = useNow();

@@ -22,7 +22,10 @@ export function Component() {
   const timeZone = useEventZone();
   return (
     <Page title="Audit log" density="staff" className="mx-auto max-w-page">
-      <PageHeader title="Audit log" lead="Who did what, newest first. Rows are chained: a row that is changed or taken out breaks the chain." />
+      <PageHeader
+        title="Audit log"
+        lead="Who did what, newest first. Rows are chained: a row that is changed or taken out breaks the chain."
+      />
       <QueryView query={audit} skeleton={<AuditSkeleton />} errorTitle="The audit log could not be loaded.">
         {({ pages }) => (
           <div className="space-y-4">
@@ -30,12 +33,17 @@ export function Component() {
               <Notice tone="ok" title="The chain is whole." />
             ) : (
               <Notice tone="stop" title="The chain is broken.">
-                A row was changed or taken out after it was written. Keep a copy of the database and of its backups, and find out who had access to the file.
+                A row was changed or taken out after it was written. Keep a copy of the database and of its backups, and
+                find out who had access to the file.
               </Notice>
             )}
             <AuditTable rows={pages.flatMap((page) => page.rows)} timeZone={timeZone} />
             {audit.hasNextPage && (
-              <Button icon="chevron-down" isPending={audit.isFetchingNextPage} onPress={() => void audit.fetchNextPage()}>
+              <Button
+                icon="chevron-down"
+                isPending={audit.isFetchingNextPage}
+                onPress={() => void audit.fetchNextPage()}
+              >
                 Older rows
               </Button>
             )}

@@ -65,7 +65,14 @@ function Students({ classId }: SectionProps) {
   return (
     <QueryView query={useQuery(classQuery(classId))} skeleton={<ClassSkeleton />} errorTitle={ERROR_TITLE}>
       {({ class: classSummary, students, lessons }) => (
-        <StudentTable classSummary={classSummary} students={students} lessons={lessons} timeZone={timeZone} now={now} onCardsMade={() => void navigate(`/classes/${classId}/cards`)} />
+        <StudentTable
+          classSummary={classSummary}
+          students={students}
+          lessons={lessons}
+          timeZone={timeZone}
+          now={now}
+          onCardsMade={() => void navigate(`/classes/${classId}/cards`)}
+        />
       )}
     </QueryView>
   );
@@ -75,8 +82,19 @@ function Work({ classId }: SectionProps) {
   const timeZone = useEventZone();
   const now = useNow();
   return (
-    <QueryView query={useQuery(assignmentsQuery)} skeleton={<AssignmentTableSkeleton />} errorTitle="The assignments could not be loaded.">
-      {(assignments) => <AssignmentTable classId={classId} assignments={assignments.filter((assignment) => assignment.classId === classId)} timeZone={timeZone} now={now} />}
+    <QueryView
+      query={useQuery(assignmentsQuery)}
+      skeleton={<AssignmentTableSkeleton />}
+      errorTitle="The assignments could not be loaded."
+    >
+      {(assignments) => (
+        <AssignmentTable
+          classId={classId}
+          assignments={assignments.filter((assignment) => assignment.classId === classId)}
+          timeZone={timeZone}
+          now={now}
+        />
+      )}
     </QueryView>
   );
 }

@@ -38,7 +38,12 @@ export function Component() {
   const detail = useQuery(forwardQuery(forwardId as ForwardId));
   return (
     <Page title={detail.data?.forward.title ?? "Show"} density="staff" layout="full">
-      <QueryView query={detail} skeleton={<ShowSkeleton />} errorTitle="The show could not be loaded." frame={(message) => <div className="p-6">{message}</div>}>
+      <QueryView
+        query={detail}
+        skeleton={<ShowSkeleton />}
+        errorTitle="The show could not be loaded."
+        frame={(message) => <div className="p-6">{message}</div>}
+      >
         {(loaded) => <LoadedShow key={loaded.forward.id} detail={loaded} isTeachers={isTeachers} />}
       </QueryView>
     </Page>
@@ -59,13 +64,27 @@ function LoadedShow({ detail, isTeachers }: ShowProps) {
       isTeachers={isTeachers}
       presentMoment={() => "there"}
       onShowMoment={() => undefined}
-      show={show.error ? <ErrorState title="The show could not be loaded." onRetry={show.retry} /> : <SkeletonGroup label="Loading the show"><div className="h-[380px] skeleton bg-stage!" /></SkeletonGroup>}
+      show={
+        show.error ? (
+          <ErrorState title="The show could not be loaded." onRetry={show.retry} />
+        ) : (
+          <SkeletonGroup label="Loading the show">
+            <div className="h-[380px] skeleton bg-stage!" />
+          </SkeletonGroup>
+        )
+      }
     />
   );
 }
 
 function WatchedShow({ detail, isTeachers, show: { version, song, layout } }: ShowProps & { show: VersionShow }) {
-  const viewer = useShowViewer({ layout, song: song.beatMap, score: song.score, timeline: version.timeline, findings: detail.findings });
+  const viewer = useShowViewer({
+    layout,
+    song: song.beatMap,
+    score: song.score,
+    timeline: version.timeline,
+    findings: detail.findings,
+  });
   return (
     <Frame
       detail={detail}
@@ -74,8 +93,23 @@ function WatchedShow({ detail, isTeachers, show: { version, song, layout } }: Sh
       onShowMoment={(tick) => viewer?.player.seekTick(tick)}
       show={
         <>
-          {viewer ? <ViewerStage viewer={viewer} layout={layout} description={detail.run.description} onGoToLine={() => undefined} className="h-[400px] max-wide:h-[230px]" /> : <div className="h-[400px] bg-stage" />}
-          <PictureRibbon picture={detail.forward.ribbon} size="marking" isSquare label={`Ribbon of ${detail.forward.title}: ${detail.run.description}`} />
+          {viewer ? (
+            <ViewerStage
+              viewer={viewer}
+              layout={layout}
+              description={detail.run.description}
+              onGoToLine={() => undefined}
+              className="h-[400px] max-wide:h-[230px]"
+            />
+          ) : (
+            <div className="h-[400px] bg-stage" />
+          )}
+          <PictureRibbon
+            picture={detail.forward.ribbon}
+            size="marking"
+            isSquare
+            label={`Ribbon of ${detail.forward.title}: ${detail.run.description}`}
+          />
           {viewer && <Playing viewer={viewer} song={song} />}
         </>
       }
@@ -88,7 +122,11 @@ function Playing({ viewer: { player }, song }: { viewer: ShowViewer; song: Versi
   return <ViewerTransport player={player} song={song.beatMap} songTitle={`${song.song.title}, ${song.song.credit}`} />;
 }
 
-function Frame({ detail, isTeachers, ...parts }: ShowProps & Pick<React.ComponentProps<typeof ForwardPage>, "show" | "presentMoment" | "onShowMoment">) {
+function Frame({
+  detail,
+  isTeachers,
+  ...parts
+}: ShowProps & Pick<React.ComponentProps<typeof ForwardPage>, "show" | "presentMoment" | "onShowMoment">) {
   const timeZone = useEventZone();
   const now = useNow();
   const { forward, run, findings } = detail;
@@ -99,7 +137,13 @@ function Frame({ detail, isTeachers, ...parts }: ShowProps & Pick<React.Componen
       timeZone={timeZone}
       now={now}
       back={isTeachers ? { to: "/forwarded", label: "All forwarded" } : { to: "/event/shows", label: "All shows" }}
-      answer={isTeachers ? <TeachersAnswer detail={detail} /> : <AnswerPanel forward={forward} stopCount={stopCount} runs={run.isOk} />}
+      answer={
+        isTeachers ? (
+          <TeachersAnswer detail={detail} />
+        ) : (
+          <AnswerPanel forward={forward} stopCount={stopCount} runs={run.isOk} />
+        )
+      }
       {...parts}
     />
   );
@@ -119,7 +163,14 @@ function TeachersAnswer({ detail: { forward } }: { detail: ForwardDetail }) {
     );
   }
   return (
-    <Notice tone="ok" title={forward.state === "scheduled" ? `On ${forward.slotCount === 1 ? "1 slot" : `${forward.slotCount} slots`} of the lineup.` : "Approved. It waits for its nights."}>
+    <Notice
+      tone="ok"
+      title={
+        forward.state === "scheduled"
+          ? `On ${forward.slotCount === 1 ? "1 slot" : `${forward.slotCount} slots`} of the lineup.`
+          : "Approved. It waits for its nights."
+      }
+    >
       {forward.answer}
     </Notice>
   );
@@ -127,7 +178,10 @@ function TeachersAnswer({ detail: { forward } }: { detail: ForwardDetail }) {
 
 function ShowSkeleton() {
   return (
-    <SkeletonGroup label="Loading the show" className="grid grid-cols-[minmax(0,1fr)_396px] gap-4 p-6 max-wide:grid-cols-1">
+    <SkeletonGroup
+      label="Loading the show"
+      className="grid grid-cols-[minmax(0,1fr)_396px] gap-4 p-6 max-wide:grid-cols-1"
+    >
       <div className="h-[400px] skeleton bg-stage! [--sweep:var(--color-thread-lit)]" />
       <div className="space-y-4">
         <Skeleton shape="block" className="h-40" />

@@ -24,9 +24,20 @@ export function Component() {
   const view = INBOX_VIEWS.find((one) => one === search.get("view")) ?? "waiting";
   return (
     <Page title="Shows" density="staff" className="mx-auto max-w-page">
-      <PageHeader title="Shows" lead="Forwarded by the teachers. Watch each, then approve it for the lineup or send it back." />
+      <PageHeader
+        title="Shows"
+        lead="Forwarded by the teachers. Watch each, then approve it for the lineup or send it back."
+      />
       <QueryView query={forwards} skeleton={<ForwardsSkeleton />} errorTitle="The shows could not be loaded.">
-        {(list) => <ShowsInbox forwards={list} view={view} onView={(next) => setSearch({ view: next }, { replace: true })} timeZone={timeZone} now={now} />}
+        {(list) => (
+          <ShowsInbox
+            forwards={list}
+            view={view}
+            onView={(next) => setSearch({ view: next }, { replace: true })}
+            timeZone={timeZone}
+            now={now}
+          />
+        )}
       </QueryView>
     </Page>
   );

@@ -38,7 +38,14 @@ export function Component() {
         {(plan) => {
           const asked = search.get("week");
           const monday = asked !== null && listWeeks(plan.season).includes(asked) ? asked : findOpeningWeek(plan);
-          return <LineupBoard lineup={plan} monday={monday} now={now} onMonday={(week) => setSearch({ week }, { replace: true, preventScrollReset: true })} />;
+          return (
+            <LineupBoard
+              lineup={plan}
+              monday={monday}
+              now={now}
+              onMonday={(week) => setSearch({ week }, { replace: true, preventScrollReset: true })}
+            />
+          );
         }}
       </QueryView>
     </Page>
@@ -49,7 +56,10 @@ function BoardSkeleton() {
   return (
     <>
       <SubBand title="Lineup" />
-      <SkeletonGroup label="Loading the lineup" className="grid grid-cols-[214px_minmax(0,1fr)_248px] max-wide:grid-cols-1">
+      <SkeletonGroup
+        label="Loading the lineup"
+        className="grid grid-cols-[214px_minmax(0,1fr)_248px] max-wide:grid-cols-1"
+      >
         <div className="space-y-5 border-r border-line bg-card p-3 max-wide:hidden">
           {["a", "b", "c", "d", "e"].map((row) => (
             <div key={row} className="space-y-2">

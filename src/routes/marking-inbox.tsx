@@ -21,7 +21,18 @@ export function Component() {
   const waiting = inbox.data?.reduce((sum, assignment) => sum + assignment.toMark, 0);
   return (
     <Page title="Marking" density="staff" className="mx-auto max-w-page">
-      <PageHeader title="Marking" lead={waiting === undefined ? undefined : waiting === 0 ? "Nothing waits for a mark." : waiting === 1 ? "1 show waits for a mark." : `${waiting} shows wait for a mark.`} />
+      <PageHeader
+        title="Marking"
+        lead={
+          waiting === undefined
+            ? undefined
+            : waiting === 0
+              ? "Nothing waits for a mark."
+              : waiting === 1
+                ? "1 show waits for a mark."
+                : `${waiting} shows wait for a mark.`
+        }
+      />
       <QueryView query={inbox} skeleton={<InboxSkeleton />} errorTitle="The marking could not be loaded.">
         {(assignments) => <Inbox assignments={assignments} timeZone={timeZone} />}
       </QueryView>

@@ -45,13 +45,33 @@ export function Component() {
     </Page>
   );
   return (
-    <QueryView query={queue} skeleton={<DeskPage title="Marking"><DeskSkeleton /></DeskPage>} errorTitle="The queue could not be loaded." frame={frame}>
+    <QueryView
+      query={queue}
+      skeleton={
+        <DeskPage title="Marking">
+          <DeskSkeleton />
+        </DeskPage>
+      }
+      errorTitle="The queue could not be loaded."
+      frame={frame}
+    >
       {({ title, className, rows }) => {
         const ordered = orderQueue(rows);
-        if (submissionId !== undefined) return <Desk queue={{ title, className, rows: ordered }} assignmentId={assignmentId as AssignmentId} submissionId={submissionId as SubmissionId} />;
+        if (submissionId !== undefined)
+          return (
+            <Desk
+              queue={{ title, className, rows: ordered }}
+              assignmentId={assignmentId as AssignmentId}
+              submissionId={submissionId}
+            />
+          );
         const [first] = ordered;
         if (first) return <Navigate to={`/marking/${assignmentId}/${first.submissionId}`} replace />;
-        return frame(<EmptyState icon="sent" title="Nothing is handed in yet" headingLevel={2}>What the class hands in for “{title}” comes here.</EmptyState>);
+        return frame(
+          <EmptyState icon="sent" title="Nothing is handed in yet" headingLevel={2}>
+            What the class hands in for “{title}” comes here.
+          </EmptyState>,
+        );
       }}
     </QueryView>
   );
@@ -84,7 +104,12 @@ function Desk({ queue, assignmentId, submissionId }: DeskProps) {
   const title = detail.data ? `Marking: ${detail.data.submission.showTitle}` : "Marking";
   return (
     <DeskPage title={title}>
-      <QueryView query={detail} skeleton={<DeskSkeleton />} errorTitle="This submission could not be loaded." frame={(message) => <div className="p-6">{message}</div>}>
+      <QueryView
+        query={detail}
+        skeleton={<DeskSkeleton />}
+        errorTitle="This submission could not be loaded."
+        frame={(message) => <div className="p-6">{message}</div>}
+      >
         {(loaded) => <LoadedDesk key={submissionId} detail={loaded} {...common} />}
       </QueryView>
     </DeskPage>
@@ -99,7 +124,13 @@ function LoadedDesk({ detail, ...common }: Common & { detail: SubmissionDetail }
   const show = useVersionShow(submission.versionId);
   const scriptRef = useRef<ScriptViewHandle>(null);
   const viewer = useShowViewer(
-    show.data && { layout: show.data.layout, song: show.data.song.beatMap, score: show.data.song.score, timeline: show.data.version.timeline, findings: run.findings },
+    show.data && {
+      layout: show.data.layout,
+      song: show.data.song.beatMap,
+      score: show.data.song.score,
+      timeline: show.data.version.timeline,
+      findings: run.findings,
+    },
   );
   const player = viewer?.player ?? null;
   const timeline = viewer?.timeline ?? null;
@@ -134,17 +165,36 @@ function LoadedDesk({ detail, ...common }: Common & { detail: SubmissionDetail }
             You can still read the rubric and write the mark.
           </ErrorState>
         ) : viewer && show.data ? (
-          <ViewerStage viewer={viewer} layout={show.data.layout} description={run.description} onGoToLine={showLine} className={STAGE_HEIGHT} />
+          <ViewerStage
+            viewer={viewer}
+            layout={show.data.layout}
+            description={run.description}
+            onGoToLine={showLine}
+            className={STAGE_HEIGHT}
+          />
         ) : (
           <div role="status" className={`${STAGE_HEIGHT} skeleton bg-stage! [--sweep:var(--color-thread-lit)]`}>
             <span className="sr-only">Loading the show</span>
           </div>
         )
       }
-      transport={player && song && <ViewerTransport player={player} song={song.beatMap} songTitle={`${song.song.title}, ${song.song.credit}`} />}
+      transport={
+        player &&
+        song && (
+          <ViewerTransport player={player} song={song.beatMap} songTitle={`${song.song.title}, ${song.song.credit}`} />
+        )
+      }
       renderScript={({ notes, markedLines, onPickLine }) =>
         show.data && (
-          <ScriptView ref={scriptRef} source={show.data.version.source} label={`Script of version ${submission.versionNumber}`} actLines={actLines} markedLines={markedLines} notes={notes} onPickLine={onPickLine} />
+          <ScriptView
+            ref={scriptRef}
+            source={show.data.version.source}
+            label={`Script of version ${submission.versionNumber}`}
+            actLines={actLines}
+            markedLines={markedLines}
+            notes={notes}
+            onPickLine={onPickLine}
+          />
         )
       }
     />
@@ -162,5 +212,12 @@ function Forwarding({ detail: { submission, run, forward } }: { detail: Submissi
       : submission.state !== "marked"
         ? "Release the mark first."
         : null;
-  return <ForwardButton submissionId={submission.id} title={submission.showTitle} forwardState={forward?.state ?? null} obstacle={obstacle} />;
+  return (
+    <ForwardButton
+      submissionId={submission.id}
+      title={submission.showTitle}
+      forwardState={forward?.state ?? null}
+      obstacle={obstacle}
+    />
+  );
 }

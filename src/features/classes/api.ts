@@ -35,7 +35,8 @@ export function useMadeCards(classId: ClassId): readonly [cards: readonly SignIn
 export function useAddStudents(classId: ClassId) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (displayNames: string[]) => callApi(classesContract.addStudents, { params: { classId }, body: { displayNames } }),
+    mutationFn: (displayNames: string[]) =>
+      callApi(classesContract.addStudents, { params: { classId }, body: { displayNames } }),
     onSuccess: ({ cards }) => {
       client.setQueryData(madeCardsQuery(classId).queryKey, cards);
       return forgetClass(client, classId);
@@ -47,7 +48,8 @@ export function useAddStudents(classId: ClassId) {
 export function useMakeCards(classId: ClassId) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (studentIds: UserId[]) => callApi(classesContract.makeCards, { params: { classId }, body: { studentIds } }),
+    mutationFn: (studentIds: UserId[]) =>
+      callApi(classesContract.makeCards, { params: { classId }, body: { studentIds } }),
     onSuccess: ({ cards }) => client.setQueryData(madeCardsQuery(classId).queryKey, cards),
   });
 }
@@ -68,5 +70,8 @@ export function useRemoveStudent(classId: ClassId) {
 
 /** A class and the list it is in are old now; the made cards are not. */
 function forgetClass(client: QueryClient, classId: ClassId): Promise<unknown> {
-  return Promise.all([client.invalidateQueries({ queryKey: classesQuery.queryKey }), client.invalidateQueries({ queryKey: classQuery(classId).queryKey })]);
+  return Promise.all([
+    client.invalidateQueries({ queryKey: classesQuery.queryKey }),
+    client.invalidateQueries({ queryKey: classQuery(classId).queryKey }),
+  ]);
 }

@@ -30,7 +30,8 @@ export interface ForwardAnswer {
 export function useApprove() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(lineupContract.approve, { params: { forwardId }, body: { note } }),
+    mutationFn: ({ forwardId, note }: ForwardAnswer) =>
+      callApi(lineupContract.approve, { params: { forwardId }, body: { note } }),
     onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
   });
 }
@@ -38,7 +39,8 @@ export function useApprove() {
 export function useDecline() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ forwardId, note }: ForwardAnswer) => callApi(lineupContract.decline, { params: { forwardId }, body: { note } }),
+    mutationFn: ({ forwardId, note }: ForwardAnswer) =>
+      callApi(lineupContract.decline, { params: { forwardId }, body: { note } }),
     onSuccess: () => client.invalidateQueries({ queryKey: ["lineup"] }),
   });
 }
@@ -48,7 +50,11 @@ export function useForwardShow(submissionId: SubmissionId) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (note: string) => callApi(lineupContract.forward, { params: { submissionId }, body: { note } }),
-    onSuccess: () => Promise.all([client.invalidateQueries({ queryKey: ["lineup"] }), client.invalidateQueries({ queryKey: ["marking"] })]),
+    onSuccess: () =>
+      Promise.all([
+        client.invalidateQueries({ queryKey: ["lineup"] }),
+        client.invalidateQueries({ queryKey: ["marking"] }),
+      ]),
   });
 }
 

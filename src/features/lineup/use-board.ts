@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState, type KeyboardEvent } from "react";
+import { useEffect, useRef, useState, type KeyboardEvent, type RefObject } from "react";
 import type { Lineup } from "../../../shared/contracts/lineup.ts";
 import type { ForwardId, SlotId } from "../../../shared/ids.ts";
 import { presentDate } from "../../lib/zoned-time.ts";
@@ -8,11 +8,13 @@ import { findSlot, presentTitle } from "./model/change.ts";
 import type { LineupActs } from "./use-lineup-acts.ts";
 
 /** What is picked up, by keyboard or by mouse: a show of the tray, or a slot of the board. */
-export type Carried = { readonly kind: "show"; readonly forwardId: ForwardId } | { readonly kind: "slot"; readonly slotId: SlotId };
+export type Carried =
+  { readonly kind: "show"; readonly forwardId: ForwardId } | { readonly kind: "slot"; readonly slotId: SlotId };
 
 export interface BoardOptions {
   readonly lineup: Lineup;
   readonly board: Board;
+  readonly boardRef: RefObject<HTMLTableElement | null>;
   readonly acts: LineupActs;
   /** Opens what a slot or a free time offers besides being moved. */
   readonly onOpen: (cell: Exclude<Cell, { kind: "rest" }>) => void;
@@ -23,13 +25,12 @@ export interface BoardOptions {
 export type BoardControl = ReturnType<typeof useBoard>;
 
 /** The board under the hands: which place has the focus, what is carried, and what each key does. */
-export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) {
+export function useBoard({ lineup, board, boardRef, acts, onOpen, onWeek }: BoardOptions) {
   const [chosen, setChosen] = useState<Place | null>(null);
   const [carried, setCarried] = useState<Carried | null>(null);
   const [origin, setOrigin] = useState<Place | null>(null);
   const [isDragging, setIsDragging] = useState(false);
   const wantsFocus = useRef(false);
-  const boardRef = useRef<HTMLTableElement>(null);
 
   const isStanding = (place: Place | null) => place !== null && (findCell(board, place)?.kind ?? "rest") !== "rest";
   const place = isStanding(chosen) ? chosen : findFirstPlace(board);
@@ -46,14 +47,17 @@ export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) 
     wantsFocus.current = true;
     setChosen(to);
   };
-  const titleOf = (what: Carried) => presentTitle(lineup, what.kind === "show" ? what.forwardId : (findSlot(lineup, what.slotId)?.forwardId ?? ""));
+  const titleOf = (what: Carried) =>
+    presentTitle(lineup, what.kind === "show" ? what.forwardId : (findSlot(lineup, what.slotId)?.forwardId ?? ""));
 
   const presentTarget = (at: Place) => {
     const cell = findCell(board, at);
     const column = board.columns[at.column];
     const where = `${column ? presentDate(column.date, "full") : ""}, ${board.times[at.row] ?? ""}`;
     if (cell?.kind !== "slot") return `${where}, free.`;
-    return carried?.kind === "slot" && cell.slot.id === carried.slotId ? `${where}, where it was.` : `${where}, ${cell.show.title} is there.`;
+    return carried?.kind === "slot" && cell.slot.id === carried.slotId
+      ? `${where}, where it was.`
+      : `${where}, ${cell.show.title} is there.`;
   };
 
   const pickUpShow = (forwardId: ForwardId) => {
@@ -66,7 +70,9 @@ export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) 
     setCarried(what);
     setOrigin(null);
     go(first);
-    acts.announce(`${titleOf(what)} is picked up. Arrows choose a time, Space puts it down, Escape cancels. ${presentTarget(first)}`);
+    acts.announce(
+      `${titleOf(what)} is picked up. Arrows choose a time, Space puts it down, Escape cancels. ${presentTarget(first)}`,
+    );
   };
   const pickUpSlot = (at: Place, slotId: SlotId) => {
     const slot = findSlot(lineup, slotId);
@@ -76,14 +82,17 @@ export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) 
     }
     setCarried({ kind: "slot", slotId });
     setOrigin(at);
-    acts.announce(`${titleOf({ kind: "slot", slotId })} is picked up. Arrows move it, Space puts it down, Delete sends it back to the tray, Escape cancels.`);
+    acts.announce(
+      `${titleOf({ kind: "slot", slotId })} is picked up. Arrows move it, Space puts it down, Delete sends it back to the tray, Escape cancels.`,
+    );
   };
   const cancel = () => {
     if (!carried) return;
     acts.announce(`${titleOf(carried)} stays where it was.`);
     setCarried(null);
     if (origin) go(origin);
-    else if (carried.kind === "show") document.querySelector<HTMLElement>(`[data-tray="${carried.forwardId}"]`)?.focus();
+    else if (carried.kind === "show")
+      document.querySelector<HTMLElement>(`[data-tray="${carried.forwardId}"]`)?.focus();
   };
   /** Puts something down at a place, carried by keyboard or dropped by mouse. */
   const putDown = (what: Carried, at: Place) => {
@@ -91,7 +100,13 @@ export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) 
     if (!cell || cell.kind === "rest") return;
     const { nightId, startsAt } = cell.kind === "slot" ? cell.slot : cell;
     if (what.kind === "slot" && cell.kind === "slot" && cell.slot.id === what.slotId) return cancel();
-    if (acts.apply(what.kind === "show" ? { kind: "place", forwardId: what.forwardId, nightId, startsAt } : { kind: "move", slotId: what.slotId, nightId, startsAt })) {
+    if (
+      acts.apply(
+        what.kind === "show"
+          ? { kind: "place", forwardId: what.forwardId, nightId, startsAt }
+          : { kind: "move", slotId: what.slotId, nightId, startsAt },
+      )
+    ) {
       setCarried(null);
       go(at);
     }
@@ -118,7 +133,8 @@ export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) 
       if (carried) putDown(carried, at);
       else onOpen(cell);
     } else if (key === "Escape" && carried) cancel();
-    else if (key.toLowerCase() === "p" && slot && !carried) acts.apply({ kind: "pin", slotId: slot.id, isPinned: !slot.isPinned });
+    else if (key.toLowerCase() === "p" && slot && !carried)
+      acts.apply({ kind: "pin", slotId: slot.id, isPinned: !slot.isPinned });
     else if ((key === "Delete" || key === "Backspace") && carried?.kind === "slot") removeSlot(carried.slotId);
     else if ((key === "Delete" || key === "Backspace") && carried) cancel();
     else if ((key === "Delete" || key === "Backspace") && slot) removeSlot(slot.id);
@@ -129,7 +145,6 @@ export function useBoard({ lineup, board, acts, onOpen, onWeek }: BoardOptions) 
   };
 
   return {
-    boardRef,
     place,
     carried,
     carriedTitle: carried && titleOf(carried),

@@ -27,17 +27,27 @@ export const submissionQuery = (submissionId: SubmissionId) =>
 /** Every answer to a submission changes it, its queue, the inbox, and what the authors see. */
 function useForget() {
   const client = useQueryClient();
-  return () => Promise.all([client.invalidateQueries({ queryKey: ["marking"] }), client.invalidateQueries({ queryKey: ["assignments"] })]);
+  return () =>
+    Promise.all([
+      client.invalidateQueries({ queryKey: ["marking"] }),
+      client.invalidateQueries({ queryKey: ["assignments"] }),
+    ]);
 }
 
 /** The key is the caller's, so that a comment sent twice over a bad line is written once. */
 export function useComment(submissionId: SubmissionId) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ idempotencyKey, ...body }: EndpointCall<typeof markingContract.comment>["body"] & { idempotencyKey: string }) =>
+    mutationFn: ({
+      idempotencyKey,
+      ...body
+    }: EndpointCall<typeof markingContract.comment>["body"] & { idempotencyKey: string }) =>
       callApi(markingContract.comment, { params: { submissionId }, body, idempotencyKey }),
     onSuccess: ({ comment }) => {
-      client.setQueryData(submissionQuery(submissionId).queryKey, (detail) => detail && { ...detail, comments: [...detail.comments, comment] });
+      client.setQueryData(
+        submissionQuery(submissionId).queryKey,
+        (detail) => detail && { ...detail, comments: [...detail.comments, comment] },
+      );
     },
   });
 }
@@ -64,10 +74,17 @@ export function useSendBack(submissionId: SubmissionId) {
 }
 
 export function useRelease(submissionId: SubmissionId) {
+  const client = useQueryClient();
   const forget = useForget();
   return useMutation({
     mutationFn: () => callApi(markingContract.release, { params: { submissionId } }),
-    onSuccess: forget,
+    onSuccess: ({ state, mark }) => {
+      client.setQueryData(
+        submissionQuery(submissionId).queryKey,
+        (detail) => detail && { ...detail, mark, submission: { ...detail.submission, state } },
+      );
+      return forget();
+    },
   });
 }
 

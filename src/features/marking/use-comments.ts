@@ -37,7 +37,10 @@ export function useComments(submissionId: SubmissionId) {
       onSuccess: () =>
         showToast({
           title: "The comment is taken back.",
-          action: { label: "Undo", onPress: () => comment.mutate({ anchor, body, idempotencyKey: crypto.randomUUID() }) },
+          action: {
+            label: "Undo",
+            onPress: () => comment.mutate({ anchor, body, idempotencyKey: crypto.randomUUID() }),
+          },
         }),
       onError: (error) => showToast({ tone: "stop", title: "The comment was not taken back.", detail: error.message }),
     });

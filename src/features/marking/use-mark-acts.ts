@@ -1,4 +1,4 @@
-import { useRef, useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import type { SubmissionDetail } from "../../../shared/contracts/marking.ts";
 import type { SubmissionId } from "../../../shared/ids.ts";
 import { dismissToast, showToast } from "../../components/toast-queue.ts";
@@ -25,6 +25,9 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
   const reopen = useReopen();
   const [isFlushing, setIsFlushing] = useState(false);
   const isReleasing = useRef(false);
+  useEffect(() => {
+    if (submission.state !== "submitted") isReleasing.current = false;
+  }, [submission.state]);
   const authors = formatNames(submission.authors);
 
   const takeBack = (after?: () => void) =>
@@ -34,7 +37,11 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
     });
   const tell = (title: string, detail: string) => {
     if (lastToast !== null) dismissToast(lastToast);
-    lastToast = showToast({ title, detail, action: { label: "Undo", onPress: () => takeBack(() => onOpen(submission.id)) } });
+    lastToast = showToast({
+      title,
+      detail,
+      action: { label: "Undo", onPress: () => takeBack(() => onOpen(submission.id)) },
+    });
   };
 
   return {
@@ -51,7 +58,11 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
       setIsFlushing(false);
       if (!isSaved) {
         isReleasing.current = false;
-        showToast({ tone: "warn", title: "The mark is not released.", detail: "Its last change is not saved yet. Try again when it is." });
+        showToast({
+          tone: "warn",
+          title: "The mark is not released.",
+          detail: "Its last change is not saved yet. Try again when it is.",
+        });
         return;
       }
       release.mutate(undefined, {
@@ -59,9 +70,9 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
           tell(`The mark of ${authors} is released.`, `${mark.got} of ${mark.of}.`);
           onDone();
         },
-        onError: (error) => showToast({ tone: "stop", title: "The mark is not released.", detail: error.message }),
-        onSettled: () => {
+        onError: (error) => {
           isReleasing.current = false;
+          showToast({ tone: "stop", title: "The mark is not released.", detail: error.message });
         },
       });
     },

@@ -16,8 +16,14 @@ function openDraft(submissionId: SubmissionId, saved: MarkText, client: QueryCli
     storage: window.localStorage,
     storageKey: `duskbell:mark:${submissionId}`,
     send: async (text) =>
-      (await callApi(markingContract.saveMark, { params: { submissionId }, body: { levels: { ...text.levels }, note: text.note } })).mark,
-    onSaved: (mark) => client.setQueryData(submissionQuery(submissionId).queryKey, (detail) => detail && { ...detail, mark }),
+      (
+        await callApi(markingContract.saveMark, {
+          params: { submissionId },
+          body: { levels: { ...text.levels }, note: text.note },
+        })
+      ).mark,
+    onSaved: (mark) =>
+      client.setQueryData(submissionQuery(submissionId).queryKey, (detail) => detail && { ...detail, mark }),
   });
   drafts.set(submissionId, draft);
   return draft;

@@ -26,9 +26,14 @@ export function AddStaffDialog({ schools, onClose }: AddStaffDialogProps) {
   const [isTried, setIsTried] = useState(false);
   const addStaff = useAddStaff();
   const checked = checkStaffDraft(draft);
-  const errorOf = (field: string) => (isTried ? (checked.errors?.[field] ?? findFieldError(addStaff.error, `/${field}`)) : null);
+  const errorOf = (field: string) =>
+    isTried ? (checked.errors?.[field] ?? findFieldError(addStaff.error, `/${field}`)) : null;
   const set = (change: Partial<StaffDraft>) => setDraft((before) => ({ ...before, ...change }));
-  const isGeneralError = addStaff.error !== null && ["displayName", "email", "roles", "schoolId", "password"].every((field) => findFieldError(addStaff.error, `/${field}`) === null);
+  const isGeneralError =
+    addStaff.error !== null &&
+    ["displayName", "email", "roles", "schoolId", "password"].every(
+      (field) => findFieldError(addStaff.error, `/${field}`) === null,
+    );
 
   const add = () => {
     setIsTried(true);
@@ -56,13 +61,37 @@ export function AddStaffDialog({ schools, onClose }: AddStaffDialogProps) {
         </>
       }
     >
-      <TextField label="Name" hint="As students and colleagues see it: Ms Marlow." autoFocus value={draft.displayName} maxLength={80} onChange={(event) => set({ displayName: event.target.value })} error={errorOf("displayName")} />
-      <TextField label="E-mail address" type="email" autoComplete="off" value={draft.email} onChange={(event) => set({ email: event.target.value })} error={errorOf("email")} />
+      <TextField
+        label="Name"
+        hint="As students and colleagues see it: Ms Marlow."
+        autoFocus
+        value={draft.displayName}
+        maxLength={80}
+        onChange={(event) => set({ displayName: event.target.value })}
+        error={errorOf("displayName")}
+      />
+      <TextField
+        label="E-mail address"
+        type="email"
+        autoComplete="off"
+        value={draft.email}
+        onChange={(event) => set({ email: event.target.value })}
+        error={errorOf("email")}
+      />
       <fieldset aria-describedby={rolesError ? "roles-error" : undefined}>
         <legend className="mb-1.5 font-semibold">Roles</legend>
         <div className="flex flex-wrap gap-x-6">
           {STAFF_ROLES.map((role) => (
-            <Checkbox key={role} label={role} checked={draft.roles.includes(role)} onChange={(event) => set({ roles: event.target.checked ? [...draft.roles, role] : draft.roles.filter((one) => one !== role) })} />
+            <Checkbox
+              key={role}
+              label={role}
+              checked={draft.roles.includes(role)}
+              onChange={(event) =>
+                set({
+                  roles: event.target.checked ? [...draft.roles, role] : draft.roles.filter((one) => one !== role),
+                })
+              }
+            />
           ))}
         </div>
         {rolesError && (
@@ -71,8 +100,25 @@ export function AddStaffDialog({ schools, onClose }: AddStaffDialogProps) {
           </p>
         )}
       </fieldset>
-      <Select label="School" placeholder="No school: works for the event" value={draft.schoolId} onChange={(event) => set({ schoolId: event.target.value })} options={schools.map((school) => ({ value: school.id, label: school.name }))} error={errorOf("schoolId")} />
-      <TextField label="First password" hint="At least 15 characters; a sentence works well. The person changes it after the first sign-in." type="text" autoComplete="off" isMono value={draft.password} maxLength={256} onChange={(event) => set({ password: event.target.value })} error={errorOf("password")} />
+      <Select
+        label="School"
+        placeholder="No school: works for the event"
+        value={draft.schoolId}
+        onChange={(event) => set({ schoolId: event.target.value })}
+        options={schools.map((school) => ({ value: school.id, label: school.name }))}
+        error={errorOf("schoolId")}
+      />
+      <TextField
+        label="First password"
+        hint="At least 15 characters; a sentence works well. The person changes it after the first sign-in."
+        type="text"
+        autoComplete="off"
+        isMono
+        value={draft.password}
+        maxLength={256}
+        onChange={(event) => set({ password: event.target.value })}
+        error={errorOf("password")}
+      />
       {isGeneralError && (
         <Notice tone="stop" role="alert" title="The account was not added.">
           {addStaff.error?.message} What you typed is still here.

@@ -38,7 +38,9 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
               <td className="font-mono text-meta whitespace-nowrap">
                 {toLocalDate(row.at, timeZone)} {presentTime(row.at, timeZone)}
               </td>
-              <td className="whitespace-nowrap">{row.actorName ?? <span className="text-slate">nobody signed in</span>}</td>
+              <td className="whitespace-nowrap">
+                {row.actorName ?? <span className="text-slate">nobody signed in</span>}
+              </td>
               <td>{row.event}</td>
               <td className="font-mono text-meta text-slate">{row.subject ?? ""}</td>
             </tr>
@@ -51,7 +53,10 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
 
 export function AuditSkeleton() {
   return (
-    <SkeletonGroup label="Loading the audit log" className="divide-y divide-line rounded-sheet border border-line bg-card">
+    <SkeletonGroup
+      label="Loading the audit log"
+      className="divide-y divide-line rounded-sheet border border-line bg-card"
+    >
       {["a", "b", "c", "d", "e", "f"].map((row) => (
         <div key={row} className="flex gap-8 px-4 py-3.5">
           <Skeleton className="w-32" />

@@ -24,7 +24,8 @@ export function SchoolsSection({ schools }: SchoolsSectionProps) {
             <li key={school.id} className="flex flex-wrap items-baseline gap-x-4 px-4 py-2">
               <span className="font-[650]">{school.name}</span>
               <span className="ml-auto text-slate tabular-nums">
-                {school.classCount === 1 ? "1 class" : `${school.classCount} classes`}, {school.studentCount === 1 ? "1 student" : `${school.studentCount} students`}
+                {school.classCount === 1 ? "1 class" : `${school.classCount} classes`},{" "}
+                {school.studentCount === 1 ? "1 student" : `${school.studentCount} students`}
               </span>
             </li>
           ))}
@@ -56,7 +57,10 @@ export function DatabaseSection({ database, timeZone, now }: DatabaseSectionProp
           <dd>{lastBackupAt === null ? "never" : presentWhen(lastBackupAt, now, timeZone)}</dd>
         </dl>
         {isBackupOld(lastBackupAt, now) && (
-          <Notice tone="warn" title={lastBackupAt === null ? "There is no backup yet." : "The last backup is more than a day old."}>
+          <Notice
+            tone="warn"
+            title={lastBackupAt === null ? "There is no backup yet." : "The last backup is more than a day old."}
+          >
             Make one on the command line of the installation, and keep it on another computer.
           </Notice>
         )}

@@ -29,11 +29,16 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
       {
         onSuccess: () => {
           setDisabling(null);
-          if (isDisabled) showToast({ title: `${row.displayName} can no longer sign in.`, action: { label: "Undo", onPress: () => change(row, false) } });
+          if (isDisabled)
+            showToast({
+              title: `${row.displayName} can no longer sign in.`,
+              action: { label: "Undo", onPress: () => change(row, false) },
+            });
           else showToast({ title: `${row.displayName} can sign in again.` });
         },
         onError: (error) => {
-          if (!isDisabled) showToast({ tone: "stop", title: `${row.displayName} was not let in again.`, detail: error.message });
+          if (!isDisabled)
+            showToast({ tone: "stop", title: `${row.displayName} was not let in again.`, detail: error.message });
         },
       },
     );
@@ -68,19 +73,37 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
             {staff.map((row) => (
               <tr key={row.id} className="[&>*]:px-4 [&>*]:py-1.5">
                 <th scope="row" className="text-left font-[650] whitespace-nowrap">
-                  {row.displayName} {row.isDisabled && <Tag state="plain" icon="lock">Disabled</Tag>}
+                  {row.displayName}{" "}
+                  {row.isDisabled && (
+                    <Tag state="plain" icon="lock">
+                      Disabled
+                    </Tag>
+                  )}
                 </th>
                 <td className="font-mono text-meta">{row.email}</td>
                 <td>{row.roles.join(", ")}</td>
                 <td className="whitespace-nowrap">{row.schoolName ?? "the event"}</td>
-                <td className="whitespace-nowrap text-slate">{row.lastSeenAt === null ? "never" : presentWhen(row.lastSeenAt, now, timeZone)}</td>
+                <td className="whitespace-nowrap text-slate">
+                  {row.lastSeenAt === null ? "never" : presentWhen(row.lastSeenAt, now, timeZone)}
+                </td>
                 <td className="text-right">
                   {row.isDisabled ? (
-                    <Button size="small" icon="unlock" onPress={() => change(row, false)} aria-label={`Let ${row.displayName} in again`}>
+                    <Button
+                      size="small"
+                      icon="unlock"
+                      onPress={() => change(row, false)}
+                      aria-label={`Let ${row.displayName} in again`}
+                    >
                       Let in again
                     </Button>
                   ) : (
-                    <Button size="small" icon="lock" onPress={() => setDisabling(row)} disabledReason={row.id === ownId ? "This is your own account." : null} aria-label={`Disable ${row.displayName}`}>
+                    <Button
+                      size="small"
+                      icon="lock"
+                      onPress={() => setDisabling(row)}
+                      disabledReason={row.id === ownId ? "This is your own account." : null}
+                      aria-label={`Disable ${row.displayName}`}
+                    >
                       Disable
                     </Button>
                   )}
@@ -104,7 +127,10 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
         }}
         onConfirm={() => disabling && change(disabling, true)}
       >
-        <p>Every open session of this account ends at once and nobody can sign in with it. Classes, marks and shows stay. You can let the person in again at any time.</p>
+        <p>
+          Every open session of this account ends at once and nobody can sign in with it. Classes, marks and shows stay.
+          You can let the person in again at any time.
+        </p>
       </ConfirmDialog>
     </Card>
   );

@@ -23,19 +23,49 @@ describe("due dates", () => {
 describe("checkDraft", () => {
   it("gives the fields of a complete form, asked-for uses only", () => {
     const { fields } = checkDraft({ ...draft, uses: { ...draft.uses, loop: 2 } }, { zone: ZONE, now: NOW });
-    expect(fields).toMatchObject({ title: "A show with a chorus", requirements: [{ kind: "loop", atLeast: 2 }], dueAt: Date.parse("2026-12-08T20:30:00Z") });
+    expect(fields).toMatchObject({
+      title: "A show with a chorus",
+      requirements: [{ kind: "loop", atLeast: 2 }],
+      dueAt: Date.parse("2026-12-08T20:30:00Z"),
+    });
     expect(fields?.rubric).toHaveLength(4);
   });
 
   it("names every bad field in the order of the form", () => {
-    const bad = { ...toNewDraft(NOW, ZONE), due: "2026-11-01T10:00", rubric: [buildCriterion("one", ""), { ...buildCriterion("two", "Two"), levels: buildCriterion("two", "").levels.map((level, index) => (index === 2 ? { ...level, name: "" } : level)) }] };
+    const bad = {
+      ...toNewDraft(NOW, ZONE),
+      due: "2026-11-01T10:00",
+      rubric: [
+        buildCriterion("one", ""),
+        {
+          ...buildCriterion("two", "Two"),
+          levels: buildCriterion("two", "").levels.map((level, index) =>
+            index === 2 ? { ...level, name: "" } : level,
+          ),
+        },
+      ],
+    };
     const { errors } = checkDraft(bad, { zone: ZONE, now: NOW });
-    expect(errors?.map((error) => error.fieldId)).toEqual(["title", "songId", "due", "rubric-0-name", "rubric-1-levels-2-name"]);
-    expect(errors?.map((error) => presentField(error.fieldId))).toEqual(["Title", "Song", "Due", "Criterion 1, name", "Criterion 2, level 3"]);
+    expect(errors?.map((error) => error.fieldId)).toEqual([
+      "title",
+      "songId",
+      "due",
+      "rubric-0-name",
+      "rubric-1-levels-2-name",
+    ]);
+    expect(errors?.map((error) => presentField(error.fieldId))).toEqual([
+      "Title",
+      "Song",
+      "Due",
+      "Criterion 1, name",
+      "Criterion 2, level 3",
+    ]);
   });
 
   it("asks for at least one criterion", () => {
-    expect(checkDraft({ ...draft, rubric: [] }, { zone: ZONE, now: NOW }).errors).toEqual([{ fieldId: "rubric", message: "A rubric needs at least one criterion." }]);
+    expect(checkDraft({ ...draft, rubric: [] }, { zone: ZONE, now: NOW }).errors).toEqual([
+      { fieldId: "rubric", message: "A rubric needs at least one criterion." },
+    ]);
   });
 
   it("lets a due date that is over stay, but takes no new one", () => {
@@ -49,7 +79,16 @@ describe("toDraft", () => {
   it("takes an assignment there and back", () => {
     const { fields } = checkDraft({ ...draft, uses: { ...draft.uses, function: 1 } }, { zone: ZONE, now: NOW });
     if (!fields) throw new Error("The form is complete.");
-    const back = toDraft({ assignment: { ...fields, id: "a" as never, classId: "c" as never, className: "7B", songTitle: "", mine: null, counts: null }, brief: fields.brief, requirements: fields.requirements, rubric: fields.rubric, teacherName: "" }, ZONE);
+    const back = toDraft(
+      {
+        assignment: { ...fields, id: "a", classId: "c", className: "7B", songTitle: "", mine: null, counts: null },
+        brief: fields.brief,
+        requirements: fields.requirements,
+        rubric: fields.rubric,
+        teacherName: "",
+      },
+      ZONE,
+    );
     expect(checkDraft(back, { zone: ZONE, now: NOW }).fields).toEqual(fields);
   });
 });

@@ -1,4 +1,11 @@
-import { type AssignmentDetail, type AssignmentFields, AssignmentFieldsSchema, type Criterion, type Requirement, REQUIREMENT_NAMES } from "../../../../shared/contracts/assignments.ts";
+import {
+  type AssignmentDetail,
+  type AssignmentFields,
+  AssignmentFieldsSchema,
+  type Criterion,
+  type Requirement,
+  REQUIREMENT_NAMES,
+} from "../../../../shared/contracts/assignments.ts";
 import { parseDueText, toDueText, toFirstDue } from "./due-date.ts";
 import { STARTING_RUBRIC } from "./starting-rubric.ts";
 
@@ -27,7 +34,15 @@ const NO_USES = Object.fromEntries(REQUIREMENT_KINDS.map((kind) => [kind, 0])) a
 
 /** An empty form with a due date in a week and a rubric to begin with. */
 export function toNewDraft(now: number, zone: string): AssignmentDraft {
-  return { title: "", brief: "", songId: "", due: toFirstDue(now, zone), lateRule: "accept-late", uses: NO_USES, rubric: STARTING_RUBRIC };
+  return {
+    title: "",
+    brief: "",
+    songId: "",
+    due: toFirstDue(now, zone),
+    lateRule: "accept-late",
+    uses: NO_USES,
+    rubric: STARTING_RUBRIC,
+  };
 }
 
 export function toDraft(detail: AssignmentDetail, zone: string): AssignmentDraft {
@@ -38,7 +53,10 @@ export function toDraft(detail: AssignmentDetail, zone: string): AssignmentDraft
     songId: assignment.songId,
     due: toDueText(assignment.dueAt, zone),
     lateRule: assignment.lateRule,
-    uses: { ...NO_USES, ...Object.fromEntries(requirements.map((requirement) => [requirement.kind, requirement.atLeast])) },
+    uses: {
+      ...NO_USES,
+      ...Object.fromEntries(requirements.map((requirement) => [requirement.kind, requirement.atLeast])),
+    },
     rubric,
   };
 }
@@ -51,19 +69,33 @@ export interface CheckOptions {
 }
 
 /** The fields to send, or every bad field with what to do about it. */
-export function checkDraft(draft: AssignmentDraft, { zone, now, keptDue }: CheckOptions): { fields: AssignmentFields; errors: null } | { fields: null; errors: readonly DraftError[] } {
+export function checkDraft(
+  draft: AssignmentDraft,
+  { zone, now, keptDue }: CheckOptions,
+): { fields: AssignmentFields; errors: null } | { fields: null; errors: readonly DraftError[] } {
   const dueAt = parseDueText(draft.due, zone);
   const errors: DraftError[] = [];
   if (draft.songId === "") errors.push({ fieldId: "songId", message: "Choose a song." });
-  if (dueAt === null) errors.push({ fieldId: "due", message: draft.due === "" ? "Choose a date and a time." : "This time does not exist: the clocks change that night. Choose another." });
-  else if (dueAt <= now && dueAt !== keptDue) errors.push({ fieldId: "due", message: "Choose a time that is still to come." });
+  if (dueAt === null)
+    errors.push({
+      fieldId: "due",
+      message:
+        draft.due === ""
+          ? "Choose a date and a time."
+          : "This time does not exist: the clocks change that night. Choose another.",
+    });
+  else if (dueAt <= now && dueAt !== keptDue)
+    errors.push({ fieldId: "due", message: "Choose a time that is still to come." });
   const parsed = AssignmentFieldsSchema.safeParse({
     title: draft.title,
     brief: draft.brief,
     songId: draft.songId,
     dueAt: dueAt ?? 0,
     lateRule: draft.lateRule,
-    requirements: REQUIREMENT_KINDS.filter((kind) => draft.uses[kind] > 0).map((kind) => ({ kind, atLeast: draft.uses[kind] })),
+    requirements: REQUIREMENT_KINDS.filter((kind) => draft.uses[kind] > 0).map((kind) => ({
+      kind,
+      atLeast: draft.uses[kind],
+    })),
     rubric: draft.rubric,
   });
   for (const issue of parsed.error?.issues ?? []) {
@@ -82,7 +114,14 @@ export function toFieldId(path: readonly PropertyKey[]): string {
   return path[0] === "dueAt" ? "due" : path.map(String).join("-");
 }
 
-const LABELS: Readonly<Record<string, string>> = { title: "Title", songId: "Song", brief: "Brief", due: "Due", requirements: "What the script must use", rubric: "Rubric" };
+const LABELS: Readonly<Record<string, string>> = {
+  title: "Title",
+  songId: "Song",
+  brief: "Brief",
+  due: "Due",
+  requirements: "What the script must use",
+  rubric: "Rubric",
+};
 
 /** The name of a field for the list of what is to mend: "Criterion 2, level 3". */
 export function presentField(fieldId: string): string {

@@ -12,7 +12,14 @@ import { TextField } from "../../../components/text-field.tsx";
 import { UnsavedGuard } from "../../../components/unsaved-guard.tsx";
 import { ApiProblem } from "../../../lib/api-client.ts";
 import { presentDue, presentLength } from "../../../lib/zoned-time.ts";
-import { type AssignmentDraft, checkDraft, type CheckOptions, type DraftError, presentField, toFieldId } from "./assignment-form-model.ts";
+import {
+  type AssignmentDraft,
+  checkDraft,
+  type CheckOptions,
+  type DraftError,
+  presentField,
+  toFieldId,
+} from "./assignment-form-model.ts";
 import { RubricEditor } from "./rubric-editor.tsx";
 import { UsesEditor } from "./uses-editor.tsx";
 
@@ -33,7 +40,19 @@ export interface AssignmentFormProps {
 }
 
 /** Everything that an assignment is made of, checked as a whole: every bad field is named, nothing typed is lost. */
-export function AssignmentForm({ start, check, songs, saveLabel, backTo, isRubricFixed, isSongFixed, isPending, isSaved, error, onSave }: AssignmentFormProps) {
+export function AssignmentForm({
+  start,
+  check,
+  songs,
+  saveLabel,
+  backTo,
+  isRubricFixed,
+  isSongFixed,
+  isPending,
+  isSaved,
+  error,
+  onSave,
+}: AssignmentFormProps) {
   const [draft, setDraft] = useState(start);
   const [attempt, setAttempt] = useState(0);
   const set = (change: Partial<AssignmentDraft>) => setDraft((before) => ({ ...before, ...change }));
@@ -52,13 +71,26 @@ export function AssignmentForm({ start, check, songs, saveLabel, backTo, isRubri
   return (
     <form onSubmit={handleSubmit} noValidate className="max-w-[60rem] space-y-6">
       <UnsavedGuard isDirty={isDirty} what="What you wrote for this assignment is not saved." />
-      <ErrorSummary errors={errors.map((found) => ({ fieldId: found.fieldId, message: `${presentField(found.fieldId)}: ${found.message}` }))} attempt={attempt} />
+      <ErrorSummary
+        errors={errors.map((found) => ({
+          fieldId: found.fieldId,
+          message: `${presentField(found.fieldId)}: ${found.message}`,
+        }))}
+        attempt={attempt}
+      />
       {error && toServerErrors(error).length === 0 && (
         <Notice tone="stop" role="alert" title="The assignment was not saved.">
           {error.message} What you wrote is still here.
         </Notice>
       )}
-      <TextField id="title" label="Title" value={draft.title} maxLength={80} onChange={(event) => set({ title: event.target.value })} error={errorOf("title")} />
+      <TextField
+        id="title"
+        label="Title"
+        value={draft.title}
+        maxLength={80}
+        onChange={(event) => set({ title: event.target.value })}
+        error={errorOf("title")}
+      />
       <Select
         id="songId"
         label="Song"
@@ -70,9 +102,24 @@ export function AssignmentForm({ start, check, songs, saveLabel, backTo, isRubri
         options={songs.map((song) => ({ value: song.id, label: `${song.title} (${presentLength(song.seconds)})` }))}
         error={errorOf("songId")}
       />
-      <TextArea id="brief" label="Brief" hint="What to make, in words for the class. Leave an empty line between paragraphs." rows={6} value={draft.brief} maxLength={4000} onChange={(event) => set({ brief: event.target.value })} error={errorOf("brief")} />
+      <TextArea
+        id="brief"
+        label="Brief"
+        hint="What to make, in words for the class. Leave an empty line between paragraphs."
+        rows={6}
+        value={draft.brief}
+        maxLength={4000}
+        onChange={(event) => set({ brief: event.target.value })}
+        error={errorOf("brief")}
+      />
       <div className="grid grid-cols-2 gap-6 max-wide:grid-cols-1">
-        <DueField draft={draft} zone={check.zone} onChange={(due) => set({ due })} error={errorOf("due")} fields={checked.fields} />
+        <DueField
+          draft={draft}
+          zone={check.zone}
+          onChange={(due) => set({ due })}
+          error={errorOf("due")}
+          fields={checked.fields}
+        />
         <RadioRow
           legend="After the due date"
           options={[
@@ -85,7 +132,9 @@ export function AssignmentForm({ start, check, songs, saveLabel, backTo, isRubri
       </div>
       <UsesEditor uses={draft.uses} onChange={(uses) => set({ uses })} />
       {isRubricFixed ? (
-        <Notice title="The rubric stays as it is.">Something was marked with it. Set a new assignment for another rubric.</Notice>
+        <Notice title="The rubric stays as it is.">
+          Something was marked with it. Set a new assignment for another rubric.
+        </Notice>
       ) : (
         <RubricEditor rubric={draft.rubric} onChange={(rubric) => set({ rubric })} errorOf={errorOf} />
       )}
@@ -117,7 +166,11 @@ function DueField({ draft, zone, onChange, error, fields }: DueFieldProps) {
       label="Due"
       value={draft.due}
       onChange={(event) => onChange(event.target.value)}
-      hint={fields ? `${presentDue(fields.dueAt, zone)}, by the school's clock (${place} time).` : `By the school's clock (${place} time).`}
+      hint={
+        fields
+          ? `${presentDue(fields.dueAt, zone)}, by the school's clock (${place} time).`
+          : `By the school's clock (${place} time).`
+      }
       error={error}
     />
   );
@@ -126,5 +179,8 @@ function DueField({ draft, zone, onChange, error, fields }: DueFieldProps) {
 /** What the server found wrong, by field. */
 function toServerErrors(error: Error | null): DraftError[] {
   if (!(error instanceof ApiProblem)) return [];
-  return error.errors.map((field) => ({ fieldId: toFieldId(field.pointer.split("/").slice(1)), message: field.detail }));
+  return error.errors.map((field) => ({
+    fieldId: toFieldId(field.pointer.split("/").slice(1)),
+    message: field.detail,
+  }));
 }

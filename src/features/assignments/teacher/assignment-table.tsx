@@ -57,11 +57,20 @@ export function AssignmentTable({ assignments, classId, timeZone, now }: Assignm
               </div>
               {assignment.counts && <Counts counts={assignment.counts} />}
               <div className="flex gap-2">
-                <LinkButton to={`/assignments/${assignment.id}/edit`} icon="pencil" aria-label={`Change ${assignment.title}`}>
+                <LinkButton
+                  to={`/assignments/${assignment.id}/edit`}
+                  icon="pencil"
+                  aria-label={`Change ${assignment.title}`}
+                >
                   Change
                 </LinkButton>
                 {desk && (
-                  <LinkButton to={desk} look={submitted > 0 ? "main" : "plain"} icon="rubric" aria-label={`Mark ${assignment.title}`}>
+                  <LinkButton
+                    to={desk}
+                    look={submitted > 0 ? "main" : "plain"}
+                    icon="rubric"
+                    aria-label={`Mark ${assignment.title}`}
+                  >
                     Mark
                   </LinkButton>
                 )}
@@ -79,18 +88,43 @@ function Counts({ counts }: { counts: NonNullable<AssignmentSummary["counts"]> }
   const notBegun = Math.max(0, counts.students - begun);
   return (
     <ul aria-label="How far the class is" className="flex flex-wrap items-center gap-1.5">
-      {notBegun > 0 && <li><Tag state="plain" icon="moon">{notBegun} not begun</Tag></li>}
-      {counts.working > 0 && <li><Tag state="working">{counts.working} working</Tag></li>}
-      {counts.submitted > 0 && <li><Tag state="submitted">{counts.submitted} submitted</Tag></li>}
-      {counts.revise > 0 && <li><Tag state="revise">{counts.revise} revise</Tag></li>}
-      {counts.marked > 0 && <li><Tag state="marked">{counts.marked} marked</Tag></li>}
+      {notBegun > 0 && (
+        <li>
+          <Tag state="plain" icon="moon">
+            {notBegun} not begun
+          </Tag>
+        </li>
+      )}
+      {counts.working > 0 && (
+        <li>
+          <Tag state="working">{counts.working} working</Tag>
+        </li>
+      )}
+      {counts.submitted > 0 && (
+        <li>
+          <Tag state="submitted">{counts.submitted} submitted</Tag>
+        </li>
+      )}
+      {counts.revise > 0 && (
+        <li>
+          <Tag state="revise">{counts.revise} revise</Tag>
+        </li>
+      )}
+      {counts.marked > 0 && (
+        <li>
+          <Tag state="marked">{counts.marked} marked</Tag>
+        </li>
+      )}
     </ul>
   );
 }
 
 export function AssignmentTableSkeleton() {
   return (
-    <SkeletonGroup label="Loading the assignments" className="divide-y divide-line rounded-sheet border border-line bg-card">
+    <SkeletonGroup
+      label="Loading the assignments"
+      className="divide-y divide-line rounded-sheet border border-line bg-card"
+    >
       {["first", "second"].map((row) => (
         <div key={row} className="space-y-3 px-4 py-4">
           <Skeleton className="w-56 max-w-full" />

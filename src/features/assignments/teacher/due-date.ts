@@ -2,7 +2,10 @@ import { Temporal } from "temporal-polyfill";
 
 /** An instant (UTC milliseconds) as the value of a date-and-time field in a zone: "2026-12-04T15:30". */
 export function toDueText(instant: number, zone: string): string {
-  return Temporal.Instant.fromEpochMilliseconds(instant).toZonedDateTimeISO(zone).toPlainDateTime().toString({ smallestUnit: "minute" });
+  return Temporal.Instant.fromEpochMilliseconds(instant)
+    .toZonedDateTimeISO(zone)
+    .toPlainDateTime()
+    .toString({ smallestUnit: "minute" });
 }
 
 /**

@@ -16,7 +16,8 @@ export interface RubricEditorProps {
 
 /** Criteria with four levels each, weakest first; points are 1 to 4. */
 export function RubricEditor({ rubric, onChange, errorOf }: RubricEditorProps) {
-  const replace = (index: number, criterion: Criterion) => onChange(rubric.map((old, place) => (place === index ? criterion : old)));
+  const replace = (index: number, criterion: Criterion) =>
+    onChange(rubric.map((old, place) => (place === index ? criterion : old)));
   const move = (index: number, step: -1 | 1) => {
     const next = [...rubric];
     const [moved] = next.splice(index, 1);
@@ -27,7 +28,10 @@ export function RubricEditor({ rubric, onChange, errorOf }: RubricEditorProps) {
   return (
     <section aria-labelledby="rubric-heading" id="rubric" tabIndex={-1}>
       <h2 id="rubric-heading">Rubric</h2>
-      <p className="mt-1 mb-3 text-slate">Students see it with the brief. Each criterion has four levels, weakest first, worth 1 to 4 points: {rubric.length * 4} in all.</p>
+      <p className="mt-1 mb-3 text-slate">
+        Students see it with the brief. Each criterion has four levels, weakest first, worth 1 to 4 points:{" "}
+        {rubric.length * 4} in all.
+      </p>
       {rubricError && <p className="mb-3 font-semibold text-rowan">{rubricError}</p>}
       <ol className="space-y-4">
         {rubric.map((criterion, index) => (
@@ -44,13 +48,31 @@ export function RubricEditor({ rubric, onChange, errorOf }: RubricEditorProps) {
                   error={errorOf(`rubric-${index}-name`)}
                   className="flex-1"
                 />
-                <IconButton icon="chevron-up" label={`Move criterion ${index + 1} up`} disabledReason={index === 0 ? "This is the first." : null} onPress={() => move(index, -1)} />
-                <IconButton icon="chevron-down" label={`Move criterion ${index + 1} down`} disabledReason={index === rubric.length - 1 ? "This is the last." : null} onPress={() => move(index, 1)} />
-                <IconButton icon="trash" label={`Take criterion ${index + 1} out`} onPress={() => onChange(rubric.filter((_, place) => place !== index))} />
+                <IconButton
+                  icon="chevron-up"
+                  label={`Move criterion ${index + 1} up`}
+                  disabledReason={index === 0 ? "This is the first." : null}
+                  onPress={() => move(index, -1)}
+                />
+                <IconButton
+                  icon="chevron-down"
+                  label={`Move criterion ${index + 1} down`}
+                  disabledReason={index === rubric.length - 1 ? "This is the last." : null}
+                  onPress={() => move(index, 1)}
+                />
+                <IconButton
+                  icon="trash"
+                  label={`Take criterion ${index + 1} out`}
+                  onPress={() => onChange(rubric.filter((_, place) => place !== index))}
+                />
               </div>
               <div className="mt-3 grid grid-cols-4 gap-3 max-wide:grid-cols-1">
                 {criterion.levels.map((level, place) => {
-                  const change = (part: Partial<typeof level>) => replace(index, { ...criterion, levels: criterion.levels.map((old, at) => (at === place ? { ...old, ...part } : old)) });
+                  const change = (part: Partial<typeof level>) =>
+                    replace(index, {
+                      ...criterion,
+                      levels: criterion.levels.map((old, at) => (at === place ? { ...old, ...part } : old)),
+                    });
                   return (
                     <div key={place} className="space-y-2">
                       <TextField

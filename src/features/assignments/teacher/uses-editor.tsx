@@ -18,7 +18,11 @@ export function UsesEditor({ uses, onChange }: UsesEditorProps) {
       <div className="grid grid-cols-2 gap-x-8 gap-y-1 max-wide:grid-cols-1">
         {REQUIREMENT_KINDS.map((kind) => (
           <div key={kind} className="flex min-h-9 items-center gap-3">
-            <Checkbox label={REQUIREMENT_NAMES[kind]} checked={uses[kind] > 0} onChange={(event) => onChange({ ...uses, [kind]: event.target.checked ? 1 : 0 })} />
+            <Checkbox
+              label={REQUIREMENT_NAMES[kind]}
+              checked={uses[kind] > 0}
+              onChange={(event) => onChange({ ...uses, [kind]: event.target.checked ? 1 : 0 })}
+            />
             {uses[kind] > 0 && (
               <Select
                 label={`How often: ${REQUIREMENT_NAMES[kind]}`}
@@ -26,13 +30,20 @@ export function UsesEditor({ uses, onChange }: UsesEditorProps) {
                 className="ml-auto w-36"
                 value={String(uses[kind])}
                 onChange={(event) => onChange({ ...uses, [kind]: Number(event.target.value) })}
-                options={[...new Set([...COUNTS, uses[kind]])].sort((a, b) => a - b).map((count) => ({ value: String(count), label: count === 1 ? "at least once" : `at least ${count} times` }))}
+                options={[...new Set([...COUNTS, uses[kind]])]
+                  .sort((a, b) => a - b)
+                  .map((count) => ({
+                    value: String(count),
+                    label: count === 1 ? "at least once" : `at least ${count} times`,
+                  }))}
               />
             )}
           </div>
         ))}
       </div>
-      <p className="mt-1.5 text-meta text-slate">Found in the script by itself, shown to the student while writing and to you while marking.</p>
+      <p className="mt-1.5 text-meta text-slate">
+        Found in the script by itself, shown to the student while writing and to you while marking.
+      </p>
     </fieldset>
   );
 }

@@ -22,7 +22,15 @@ export function AddStudentsDialog({ classId, known, onAdded, onClose }: AddStude
   const addStudents = useAddStudents(classId);
   const { names, problems } = parseNameLines(text, known);
   const tooMany = names.length > MAX_NAMES;
-  const error = !isTried ? null : problems.length > 0 ? "Mend the lines named below, or take them out." : names.length === 0 ? "Write at least one name." : tooMany ? `Add at most ${MAX_NAMES} at a time; these are ${names.length}.` : null;
+  const error = !isTried
+    ? null
+    : problems.length > 0
+      ? "Mend the lines named below, or take them out."
+      : names.length === 0
+        ? "Write at least one name."
+        : tooMany
+          ? `Add at most ${MAX_NAMES} at a time; these are ${names.length}.`
+          : null;
 
   const handleAdd = () => {
     setIsTried(true);
@@ -40,7 +48,11 @@ export function AddStudentsDialog({ classId, known, onAdded, onClose }: AddStude
         <>
           <Button onPress={onClose}>Cancel</Button>
           <Button look="main" icon="plus" onPress={handleAdd} isPending={addStudents.isPending}>
-            {names.length === 0 ? "Add students" : names.length === 1 ? "Add 1 student" : `Add ${names.length} students`}
+            {names.length === 0
+              ? "Add students"
+              : names.length === 1
+                ? "Add 1 student"
+                : `Add ${names.length} students`}
           </Button>
         </>
       }
@@ -56,7 +68,10 @@ export function AddStudentsDialog({ classId, known, onAdded, onClose }: AddStude
         error={error}
       />
       {problems.length > 0 && (
-        <Notice tone="warn" title={problems.length === 1 ? "1 line can not be taken" : `${problems.length} lines can not be taken`}>
+        <Notice
+          tone="warn"
+          title={problems.length === 1 ? "1 line can not be taken" : `${problems.length} lines can not be taken`}
+        >
           <ul>
             {problems.map((problem) => (
               <li key={problem.line}>

@@ -24,7 +24,16 @@ export function CardMaker({ classSummary, students }: CardMakerProps) {
   if (cards.length > 0) return <CardSheet className={classSummary.name} cards={cards} onDone={dropCards} />;
   if (students.length === 0) {
     return (
-      <EmptyState icon="card" title="No cards to make yet" headingLevel={2} action={<LinkButton to={`/classes/${classSummary.id}`} look="main">Go to the students</LinkButton>}>
+      <EmptyState
+        icon="card"
+        title="No cards to make yet"
+        headingLevel={2}
+        action={
+          <LinkButton to={`/classes/${classSummary.id}`} look="main">
+            Go to the students
+          </LinkButton>
+        }
+      >
         Add students first. Each gets a card with the class code, a username and four words.
       </EmptyState>
     );
@@ -46,13 +55,24 @@ export function CardMaker({ classSummary, students }: CardMakerProps) {
       </div>
       <h2>Sign-in cards</h2>
       <p className="mt-1 max-w-[70ch] text-soft">
-        A card holds the class code, the username and four words. Words are kept only as a check value, so a lost card can not be printed again: making a card makes new words, and the old ones stop working.
+        A card holds the class code, the username and four words. Words are kept only as a check value, so a lost card
+        can not be printed again: making a card makes new words, and the old ones stop working.
       </p>
       <fieldset className="mt-4">
         <legend className="sr-only">Students who get a new card</legend>
         <div className="mb-2 flex flex-wrap items-center gap-4">
-          <Checkbox label={<strong>All {students.length}</strong>} checked={allChosen} onChange={(event) => setChosen(new Set(event.target.checked ? students.map((student) => student.id) : []))} />
-          <Button look="main" icon="card" className="ml-auto" disabledReason={chosen.size === 0 ? "Choose at least one student." : null} onPress={() => setIsAsking(true)}>
+          <Checkbox
+            label={<strong>All {students.length}</strong>}
+            checked={allChosen}
+            onChange={(event) => setChosen(new Set(event.target.checked ? students.map((student) => student.id) : []))}
+          />
+          <Button
+            look="main"
+            icon="card"
+            className="ml-auto"
+            disabledReason={chosen.size === 0 ? "Choose at least one student." : null}
+            onPress={() => setIsAsking(true)}
+          >
             {chosen.size === 0 ? "Make cards" : chosen.size === 1 ? "Make 1 card" : `Make ${chosen.size} cards`}
           </Button>
         </div>
@@ -81,7 +101,10 @@ export function CardMaker({ classSummary, students }: CardMakerProps) {
         onCancel={() => setIsAsking(false)}
         onConfirm={() => makeCards.mutate([...chosen], { onSuccess: () => setIsAsking(false) })}
       >
-        <p>The words that {chosen.size === 1 ? "this student has" : "these students have"} now stop working at once. The new ones are shown only until you close them, so print them right away.</p>
+        <p>
+          The words that {chosen.size === 1 ? "this student has" : "these students have"} now stop working at once. The
+          new ones are shown only until you close them, so print them right away.
+        </p>
       </ConfirmDialog>
     </>
   );

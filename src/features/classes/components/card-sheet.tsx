@@ -38,9 +38,15 @@ export function CardSheet({ className, cards, onDone }: CardSheetProps) {
           The words can not be shown again. A4, ten cards a page; cut along the dashed lines.
         </Notice>
       </div>
-      <ul aria-label={`Sign-in cards of ${className}`} className="mt-4 grid grid-cols-[repeat(auto-fill,minmax(19rem,1fr))] gap-3 print:mt-0 print:grid-cols-2 print:gap-0">
+      <ul
+        aria-label={`Sign-in cards of ${className}`}
+        className="mt-4 grid grid-cols-[repeat(auto-fill,minmax(19rem,1fr))] gap-3 print:mt-0 print:grid-cols-2 print:gap-0"
+      >
         {cards.map((card) => (
-          <li key={card.studentId} className="break-inside-avoid border-[1.5px] border-dashed border-rim bg-card px-4 py-3 print:min-h-[52mm] print:border-1">
+          <li
+            key={card.studentId}
+            className="break-inside-avoid border-[1.5px] border-dashed border-rim bg-card px-4 py-3 print:min-h-[52mm] print:border-1"
+          >
             <p className="flex items-center gap-2 font-head text-4 font-bold">
               <span className="rounded-cut bg-dusk p-1">
                 <Mark className="h-5 w-[18px]" />
@@ -62,7 +68,15 @@ export function CardSheet({ className, cards, onDone }: CardSheetProps) {
           </li>
         ))}
       </ul>
-      <ConfirmDialog isOpen={isAsking} tone="main" title="Close the cards?" confirmLabel="Close them" cancelLabel="Keep them open" onCancel={() => setIsAsking(false)} onConfirm={onDone}>
+      <ConfirmDialog
+        isOpen={isAsking}
+        tone="main"
+        title="Close the cards?"
+        confirmLabel="Close them"
+        cancelLabel="Keep them open"
+        onCancel={() => setIsAsking(false)}
+        onConfirm={onDone}
+      >
         <p>Nobody can read these words again after that. If a card is lost, you can make a new one.</p>
       </ConfirmDialog>
     </>

@@ -46,7 +46,10 @@ export function ClassList({ classes }: ClassListProps) {
 
 export function ClassListSkeleton() {
   return (
-    <SkeletonGroup label="Loading your classes" className="divide-y divide-line rounded-sheet border border-line bg-card">
+    <SkeletonGroup
+      label="Loading your classes"
+      className="divide-y divide-line rounded-sheet border border-line bg-card"
+    >
       {["first", "second"].map((row) => (
         <div key={row} className="space-y-3 px-4 py-4">
           <Skeleton className="w-24" />

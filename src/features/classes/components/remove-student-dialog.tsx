@@ -22,14 +22,20 @@ export function RemoveStudentDialog({ classSummary, student, onClose }: RemoveSt
       onConfirm={() =>
         remove.mutate(student.id, {
           onSuccess: () => {
-            showToast({ title: `${student.displayName} is no longer in ${classSummary.name}.`, detail: "The work that was handed in stays." });
+            showToast({
+              title: `${student.displayName} is no longer in ${classSummary.name}.`,
+              detail: "The work that was handed in stays.",
+            });
             onClose();
           },
         })
       }
       onCancel={onClose}
     >
-      <p>{student.displayName} can no longer sign in with the code of {classSummary.name}. What was handed in stays in the marking and on the square. This can not be undone here; the admin can help.</p>
+      <p>
+        {student.displayName} can no longer sign in with the code of {classSummary.name}. What was handed in stays in
+        the marking and on the square. This can not be undone here; the admin can help.
+      </p>
     </ConfirmDialog>
   );
 }

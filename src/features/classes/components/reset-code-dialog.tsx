@@ -32,7 +32,10 @@ export function ResetCodeDialog({ classId, student, timeZone, now, onClose }: Re
         onConfirm={() => reset.mutate(student.id)}
         onCancel={onClose}
       >
-        <p>With it, {student.displayName} chooses four new words. The old words stop working and every open session of {student.displayName} ends. Scripts are kept.</p>
+        <p>
+          With it, {student.displayName} chooses four new words. The old words stop working and every open session of{" "}
+          {student.displayName} ends. Scripts are kept.
+        </p>
       </ConfirmDialog>
     );
   }
@@ -59,11 +62,17 @@ export function ResetCodeDialog({ classId, student, timeZone, now, onClose }: Re
         </>
       }
     >
-      <p className="rounded-sheet border border-line bg-card py-4 text-center font-mono text-7 font-bold tracking-wider">{spaced}</p>
-      <p>
-        {student.displayName} opens the sign-in page, chooses “I have a code”, and types the class code, the username <code className="font-mono">{student.username}</code> and this code.
+      <p className="rounded-sheet border border-line bg-card py-4 text-center font-mono text-7 font-bold tracking-wider">
+        {spaced}
       </p>
-      <p className="text-soft">It works once, until {presentWhen(reset.data.expiresAt, now, timeZone)}. It can not be shown again; make another if it gets lost.</p>
+      <p>
+        {student.displayName} opens the sign-in page, chooses “I have a code”, and types the class code, the username{" "}
+        <code className="font-mono">{student.username}</code> and this code.
+      </p>
+      <p className="text-soft">
+        It works once, until {presentWhen(reset.data.expiresAt, now, timeZone)}. It can not be shown again; make another
+        if it gets lost.
+      </p>
     </Dialog>
   );
 }

@@ -31,13 +31,19 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
     <>
       <div className="mb-3 flex flex-wrap items-center gap-3">
         <h2>{students.length === 1 ? "1 student" : `${students.length} students`}</h2>
-        <Button className="ml-auto" icon="plus" look={students.length === 0 ? "main" : "plain"} onPress={() => setTask({ kind: "add" })}>
+        <Button
+          className="ml-auto"
+          icon="plus"
+          look={students.length === 0 ? "main" : "plain"}
+          onPress={() => setTask({ kind: "add" })}
+        >
           Add students
         </Button>
       </div>
       {students.length === 0 ? (
         <EmptyState icon="people" title="Nobody is in this class yet">
-          Paste the names of your class list, one a line. Every student gets a sign-in card to cut out; no e-mail address is needed.
+          Paste the names of your class list, one a line. Every student gets a sign-in card to cut out; no e-mail
+          address is needed.
         </EmptyState>
       ) : (
         <div className="overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1">
@@ -58,7 +64,10 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
             </thead>
             <tbody className="divide-y divide-line max-wide:block">
               {students.map((student) => (
-                <tr key={student.id} className="max-wide:relative max-wide:flex max-wide:flex-wrap max-wide:items-center max-wide:gap-x-4 max-wide:gap-y-1 max-wide:px-4 max-wide:py-3 wide:[&>*]:px-4 wide:[&>*]:py-1.5">
+                <tr
+                  key={student.id}
+                  className="max-wide:relative max-wide:flex max-wide:flex-wrap max-wide:items-center max-wide:gap-x-4 max-wide:gap-y-1 max-wide:px-4 max-wide:py-3 wide:[&>*]:px-4 wide:[&>*]:py-1.5"
+                >
                   <th scope="row" className="text-left font-[650] max-wide:w-[calc(100%-3rem)]">
                     {student.displayName}
                   </th>
@@ -70,7 +79,9 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
                     {student.showCount}
                     <span className="wide:sr-only">{student.showCount === 1 ? " show" : " shows"}</span>
                   </td>
-                  <td className="whitespace-nowrap text-slate">{student.lastSeenAt === null ? "never" : presentWhen(student.lastSeenAt, now, timeZone)}</td>
+                  <td className="whitespace-nowrap text-slate">
+                    {student.lastSeenAt === null ? "never" : presentWhen(student.lastSeenAt, now, timeZone)}
+                  </td>
                   <td className="text-right max-wide:absolute max-wide:top-2 max-wide:right-2">
                     <Menu
                       isIconOnly
@@ -78,8 +89,19 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
                       size="small"
                       label={`Acts for ${student.displayName}`}
                       actions={[
-                        { id: "reset", label: "One-time code for new words", icon: "key", onAction: () => setTask({ kind: "reset", student }) },
-                        { id: "remove", label: "Take out of the class", icon: "trash", tone: "stop", onAction: () => setTask({ kind: "remove", student }) },
+                        {
+                          id: "reset",
+                          label: "One-time code for new words",
+                          icon: "key",
+                          onAction: () => setTask({ kind: "reset", student }),
+                        },
+                        {
+                          id: "remove",
+                          label: "Take out of the class",
+                          icon: "trash",
+                          tone: "stop",
+                          onAction: () => setTask({ kind: "remove", student }),
+                        },
                       ]}
                     />
                   </td>
@@ -100,8 +122,12 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
           }}
         />
       )}
-      {task?.kind === "reset" && <ResetCodeDialog classId={classId} student={task.student} timeZone={timeZone} now={now} onClose={close} />}
-      {task?.kind === "remove" && <RemoveStudentDialog classSummary={classSummary} student={task.student} onClose={close} />}
+      {task?.kind === "reset" && (
+        <ResetCodeDialog classId={classId} student={task.student} timeZone={timeZone} now={now} onClose={close} />
+      )}
+      {task?.kind === "remove" && (
+        <RemoveStudentDialog classSummary={classSummary} student={task.student} onClose={close} />
+      )}
     </>
   );
 }

@@ -3,7 +3,10 @@ import { parseNameLines } from "./name-lines.ts";
 
 describe("parseNameLines", () => {
   it("takes one name a line, without numbers, spaces and empty lines", () => {
-    expect(parseNameLines("1. Ada\r\n\r\n  2) Oren   Vale \n3\tJune\n", [])).toEqual({ names: ["Ada", "Oren Vale", "June"], problems: [] });
+    expect(parseNameLines("1. Ada\r\n\r\n  2) Oren   Vale \n3\tJune\n", [])).toEqual({
+      names: ["Ada", "Oren Vale", "June"],
+      problems: [],
+    });
   });
 
   it("names every bad line by its number in the text", () => {

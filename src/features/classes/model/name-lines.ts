@@ -16,7 +16,10 @@ export function parseNameLines(text: string, known: readonly string[]): NameLine
   const names: string[] = [];
   const problems: { line: number; text: string; reason: string }[] = [];
   text.split(/\r\n|\r|\n/).forEach((raw, index) => {
-    const name = raw.replace(/^\s*\d+[.)\t ]\s*/, "").replace(/\s+/g, " ").trim();
+    const name = raw
+      .replace(/^\s*\d+[.)\t ]\s*/, "")
+      .replace(/\s+/g, " ")
+      .trim();
     if (name === "") return;
     const line = index + 1;
     const add = (reason: string) => problems.push({ line, text: name, reason });

@@ -34,7 +34,10 @@ export interface CellCarrying {
 
 /** One place of the board: a show, a free time, or time in which nothing runs. */
 export function BoardCell({ cell, label, isInTabOrder, onPress, carrying }: BoardCellProps) {
-  if (cell.kind === "rest") return <div className="grid h-[59px] place-items-center rounded-cut text-meta text-slate hatched">{cell.reason}</div>;
+  if (cell.kind === "rest")
+    return (
+      <div className="grid h-[59px] place-items-center rounded-cut text-meta text-slate hatched">{cell.reason}</div>
+    );
   const carried = carrying?.carried ?? null;
   const isLifted = cell.kind === "slot" && carried?.kind === "slot" && carried.slotId === cell.slot.id;
   return (
@@ -55,7 +58,9 @@ export function BoardCell({ cell, label, isInTabOrder, onPress, carrying }: Boar
       {...(carrying && listenToMouse(cell, carrying))}
       className={joinClasses(
         "relative block h-[59px] min-w-0 cursor-pointer rounded-cut focus-visible:z-10",
-        cell.kind === "free" ? "grid place-items-center border-[1.5px] border-dashed border-rim/60 text-slate hover:bg-card hover:text-ink" : slotClass(cell),
+        cell.kind === "free"
+          ? "grid place-items-center border-[1.5px] border-dashed border-rim/60 text-slate hover:bg-card hover:text-ink"
+          : slotClass(cell),
         cell.kind === "slot" && carrying?.isTonight && "bg-glow/25",
         isLifted && "opacity-55 outline-2 outline-dashed outline-rim",
         carried !== null && carrying?.isTarget && !isLifted && "bg-spruce-tint! outline-2 outline-spruce",
@@ -66,7 +71,10 @@ export function BoardCell({ cell, label, isInTabOrder, onPress, carrying }: Boar
   );
 }
 
-function listenToMouse(cell: Exclude<Cell, { kind: "rest" }>, { carried, onFocus, onDragStart, onDragOver, onDragLeave, onDragEnd, onDrop }: CellCarrying): HTMLAttributes<HTMLDivElement> {
+function listenToMouse(
+  cell: Exclude<Cell, { kind: "rest" }>,
+  { carried, onFocus, onDragStart, onDragOver, onDragLeave, onDragEnd, onDrop }: CellCarrying,
+): HTMLAttributes<HTMLDivElement> {
   return {
     draggable: cell.kind === "slot" && !cell.slot.isPinned,
     onFocus,
@@ -102,7 +110,11 @@ function SlotFace({ cell }: { cell: Extract<Cell, { kind: "slot" }> }) {
   const hasMark = slot.isPinned || finding !== null;
   return (
     <>
-      <span className={joinClasses("block truncate text-1 leading-[1.25] font-[650] tracking-[-0.01em]", hasMark && "pr-4")}>{show.title}</span>
+      <span
+        className={joinClasses("block truncate text-1 leading-[1.25] font-[650] tracking-[-0.01em]", hasMark && "pr-4")}
+      >
+        {show.title}
+      </span>
       <PictureRibbon picture={show.ribbon} size="row" label="" className="mt-[3px] mb-0.5" />
       <span className="flex justify-between gap-1 text-floor leading-[1.2] whitespace-nowrap text-slate">
         <span className="tabular-nums">{presentLength(show.seconds)}</span>

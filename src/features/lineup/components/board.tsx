@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { useState, type RefObject } from "react";
 import { Icon } from "../../../components/icon.tsx";
 import { joinClasses } from "../../../components/class-names.ts";
 import { presentDate } from "../../../lib/zoned-time.ts";
@@ -8,6 +8,7 @@ import { BoardCell } from "./board-cell.tsx";
 
 export interface BoardTableProps {
   board: Board;
+  boardRef: RefObject<HTMLTableElement | null>;
   control: BoardControl;
   /** Id of the line that explains the keys. */
   hintsId: string;
@@ -15,13 +16,18 @@ export interface BoardTableProps {
 }
 
 /** A week of the plan as a table: nights by start times. One place at a time is in the tab order; arrows go on from there. */
-export function BoardTable({ board, control, hintsId, onNight }: BoardTableProps) {
+export function BoardTable({ board, boardRef, control, hintsId, onNight }: BoardTableProps) {
   const [over, setOver] = useState<string | null>(null);
   const closed = (column: number) => board.cells.every((row) => row[column]?.kind === "rest");
   const first = board.columns[0];
   const last = board.columns.at(-1);
   return (
-    <table ref={control.boardRef} role="grid" aria-describedby={hintsId} className="-mx-[5px] w-full table-fixed border-separate border-spacing-x-[5px] border-spacing-y-[3px]">
+    <table
+      ref={boardRef}
+      role="grid"
+      aria-describedby={hintsId}
+      className="-mx-[5px] w-full table-fixed border-separate border-spacing-x-[5px] border-spacing-y-[3px]"
+    >
       <caption className="sr-only">
         Lineup, {first && presentDate(first.date, "full")} to {last && presentDate(last.date, "full")}
       </caption>
@@ -35,7 +41,14 @@ export function BoardTable({ board, control, hintsId, onNight }: BoardTableProps
         <tr>
           <td />
           {board.columns.map((column, index) => (
-            <th key={column.date} scope="col" className={joinClasses("border-b-2 px-1.5 pt-0.5 pb-1 text-left align-bottom font-head leading-tight font-[650]", closed(index) ? "border-line text-slate" : "border-ink")}>
+            <th
+              key={column.date}
+              scope="col"
+              className={joinClasses(
+                "border-b-2 px-1.5 pt-0.5 pb-1 text-left align-bottom font-head leading-tight font-[650]",
+                closed(index) ? "border-line text-slate" : "border-ink",
+              )}
+            >
               <ColumnHead column={column} isClosed={closed(index)} onNight={onNight} />
             </th>
           ))}
@@ -51,7 +64,9 @@ export function BoardTable({ board, control, hintsId, onNight }: BoardTableProps
               if (closed(column)) {
                 return row === 0 ? (
                   <td key={column} rowSpan={board.times.length} className="p-0">
-                    <div className="grid h-full min-h-[59px] place-items-center rounded-cut px-1 text-center text-meta text-slate hatched">{cell.kind === "rest" ? cell.reason : ""}</div>
+                    <div className="grid h-full min-h-[59px] place-items-center rounded-cut px-1 text-center text-meta text-slate hatched">
+                      {cell.kind === "rest" ? cell.reason : ""}
+                    </div>
                   </td>
                 ) : null;
               }
@@ -96,16 +111,37 @@ export function BoardTable({ board, control, hintsId, onNight }: BoardTableProps
   );
 }
 
-function ColumnHead({ column, isClosed, onNight }: { column: Column; isClosed: boolean; onNight: (column: Column) => void }) {
+function ColumnHead({
+  column,
+  isClosed,
+  onNight,
+}: {
+  column: Column;
+  isClosed: boolean;
+  onNight: (column: Column) => void;
+}) {
   const count = column.showCount === 1 ? "1 show" : `${column.showCount} shows`;
-  const line = isClosed ? (column.night?.closedReason ? "closed" : column.night ? "over" : "no night") : column.freeCount > 0 ? `${count}, ${column.freeCount} free` : count;
+  const line = isClosed
+    ? column.night?.closedReason
+      ? "closed"
+      : column.night
+        ? "over"
+        : "no night"
+    : column.freeCount > 0
+      ? `${count}, ${column.freeCount} free`
+      : count;
   return (
     <>
       <span className="flex items-center gap-1">
         {presentDate(column.date, "column")}
         {column.isTonight && <Icon name="moon" label="tonight" className="size-3.5" />}
         {column.night && (
-          <button type="button" onClick={() => onNight(column)} aria-label={`Hours of ${presentDate(column.date, "full")}`} className="-my-1 ml-auto grid size-6 place-items-center rounded-cut text-slate hover:bg-well hover:text-ink">
+          <button
+            type="button"
+            onClick={() => onNight(column)}
+            aria-label={`Hours of ${presentDate(column.date, "full")}`}
+            className="-my-1 ml-auto grid size-6 place-items-center rounded-cut text-slate hover:bg-well hover:text-ink"
+          >
             <Icon name="clock" className="size-4" />
           </button>
         )}

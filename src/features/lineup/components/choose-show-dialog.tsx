@@ -22,14 +22,26 @@ export function ChooseShowDialog({ lineup, nightId, startsAt, onChoose, onClose 
   const items = listTray(lineup, query, "fewest");
   return (
     <Dialog isOpen onClose={onClose} title={`${presentPlace(lineup, nightId, startsAt)}: which show?`}>
-      <TextField label="Find a show, a name or a school" type="search" autoFocus value={query} onChange={(event) => setQuery(event.target.value)} />
+      <TextField
+        label="Find a show, a name or a school"
+        type="search"
+        autoFocus
+        value={query}
+        onChange={(event) => setQuery(event.target.value)}
+      />
       {items.length === 0 ? (
-        <p className="text-slate">{lineup.shows.length === 0 ? "No show is approved yet." : `No show fits “${query}”.`}</p>
+        <p className="text-slate">
+          {lineup.shows.length === 0 ? "No show is approved yet." : `No show fits “${query}”.`}
+        </p>
       ) : (
         <ul className="divide-y divide-line rounded-sheet border border-line bg-card">
           {items.map(({ show, nightCount }) => (
             <li key={show.id}>
-              <button type="button" onClick={() => onChoose(show.id)} className="grid w-full grid-cols-[minmax(0,1fr)_auto] gap-x-3 gap-y-1 px-3 py-2 text-left -outline-offset-3! hover:bg-well">
+              <button
+                type="button"
+                onClick={() => onChoose(show.id)}
+                className="grid w-full grid-cols-[minmax(0,1fr)_auto] gap-x-3 gap-y-1 px-3 py-2 text-left -outline-offset-3! hover:bg-well"
+              >
                 <b className="font-[650]">{show.title}</b>
                 <span className="text-slate tabular-nums">{presentLength(show.seconds)}</span>
                 <span className="col-span-2">

@@ -27,9 +27,12 @@ const SIGNS: Record<LineupFinding["severity"], { icon: IconName; ink: string; wo
 /** What stands in the way of publishing, each with its smallest fix; and how the stage is shared. */
 export function FindingsColumn({ lineup, status, statusId, onFix, onShowSlot, onPlace }: FindingsColumnProps) {
   const findings = listFindings(lineup).filter((finding) => finding.rule !== "not-placed");
-  let mainGiven = false;
+  const firstStop = findings.findIndex((finding) => finding.severity === "stop" && finding.fix !== null);
   return (
-    <section aria-labelledby="findings-heading" className="min-h-0 overflow-y-auto border-line bg-card [scrollbar-width:thin] max-wide:border-t wide:border-l">
+    <section
+      aria-labelledby="findings-heading"
+      className="min-h-0 overflow-y-auto border-line bg-card [scrollbar-width:thin] max-wide:border-t wide:border-l"
+    >
       <div className="border-b border-line px-3 py-2.5">
         <h2 id="findings-heading">Before you publish</h2>
         <p id={statusId} className="text-meta text-slate">
@@ -43,10 +46,8 @@ export function FindingsColumn({ lineup, status, statusId, onFix, onShowSlot, on
         </p>
       ) : (
         <ul className="divide-y divide-line border-b border-line">
-          {findings.map((finding) => {
+          {findings.map((finding, index) => {
             const sign = SIGNS[finding.severity];
-            const isMain = finding.severity === "stop" && !mainGiven;
-            if (isMain) mainGiven = true;
             return (
               <li key={`${finding.rule} ${finding.slotId} ${finding.sentence}`} className="px-3 pt-2 pb-2.5">
                 <h3 className="flex gap-1.5 font-text text-body leading-[1.3] font-bold tracking-normal">
@@ -55,7 +56,12 @@ export function FindingsColumn({ lineup, status, statusId, onFix, onShowSlot, on
                 </h3>
                 <p className="mt-0.5 pl-6 text-soft">{finding.sentence}</p>
                 {finding.fix && (
-                  <Button size="small" look={isMain ? "main" : "plain"} className="mt-1.5 ml-6 max-w-[calc(100%-1.5rem)] py-1! whitespace-normal!" onPress={() => finding.fix && onFix(finding.fix)}>
+                  <Button
+                    size="small"
+                    look={index === firstStop ? "main" : "plain"}
+                    className="mt-1.5 ml-6 max-w-[calc(100%-1.5rem)] py-1! whitespace-normal!"
+                    onPress={() => finding.fix && onFix(finding.fix)}
+                  >
                     {finding.fix.label}
                   </Button>
                 )}
@@ -66,13 +72,22 @@ export function FindingsColumn({ lineup, status, statusId, onFix, onShowSlot, on
       )}
       <StageShare lineup={lineup} onPlace={onPlace} />
       <p className="px-3 pb-3 text-meta text-slate">
-        The plan is checked for times, nights and the show check of each show. It is a planning aid: local codes, the venue’s safety officer and a licensed electrician decide.
+        The plan is checked for times, nights and the show check of each show. It is a planning aid: local codes, the
+        venue’s safety officer and a licensed electrician decide.
       </p>
     </section>
   );
 }
 
-function FindingTitle({ lineup, finding, onShowSlot }: { lineup: Lineup; finding: LineupFinding; onShowSlot: (slotId: SlotId) => void }): ReactNode {
+function FindingTitle({
+  lineup,
+  finding,
+  onShowSlot,
+}: {
+  lineup: Lineup;
+  finding: LineupFinding;
+  onShowSlot: (slotId: SlotId) => void;
+}): ReactNode {
   const slot = finding.slotId && findSlot(lineup, finding.slotId);
   const night = slot && lineup.nights.find((candidate) => candidate.id === slot.nightId);
   if (!slot || !night) return finding.cause;
@@ -98,7 +113,8 @@ function StageShare({ lineup, onPlace }: Pick<FindingsColumnProps, "lineup" | "o
           <div key={share.schoolName} className="grid grid-cols-[1fr_auto] gap-x-2 gap-y-0.5">
             <dt>{share.schoolName}</dt>
             <dd className="tabular-nums">
-              {share.showCount === 1 ? "1 show" : `${share.showCount} shows`}, {share.slotCount === 1 ? "1 slot" : `${share.slotCount} slots`}
+              {share.showCount === 1 ? "1 show" : `${share.showCount} shows`},{" "}
+              {share.slotCount === 1 ? "1 slot" : `${share.slotCount} slots`}
             </dd>
             <dd aria-hidden="true" className="col-span-2 h-2.5 border border-rim bg-well">
               <span className="block h-full bg-blue-ink" style={{ width: `${share.share * 100}%` }} />
@@ -108,7 +124,9 @@ function StageShare({ lineup, onPlace }: Pick<FindingsColumnProps, "lineup" | "o
       </dl>
       {waiting.length > 0 && (
         <p className="mt-2 text-meta text-slate">
-          {waiting.length === 1 ? "1 approved show has no night yet: " : `${waiting.length} approved shows have no night yet: `}
+          {waiting.length === 1
+            ? "1 approved show has no night yet: "
+            : `${waiting.length} approved shows have no night yet: `}
           {waiting.map((show) => (
             <PlaceButton key={show.id} onPress={() => onPlace(show.id)}>
               {show.title}

@@ -16,19 +16,34 @@ const NOW = Date.parse("2026-12-07T15:00:00Z");
 function serve(plan: Lineup) {
   const requests: { method: string; path: string; body: Record<string, unknown> }[] = [];
   const state = { plan };
-  vi.stubGlobal("fetch", async (path: string, { method, body }: { method: string; body?: string }) => {
+  vi.stubGlobal("fetch", (path: string, { method, body }: { method: string; body?: string }) => {
     const sent = JSON.parse(body ?? "{}") as Record<string, unknown>;
     requests.push({ method, path, body: sent });
     const slotId = path.split("/").at(-1) as Lineup["slots"][number]["id"];
-    const { nightId, startsAt, isPinned, forwardId } = sent as { nightId: never; startsAt: string; isPinned?: boolean; forwardId: never };
+    const { nightId, startsAt, isPinned, forwardId } = sent as {
+      nightId: never;
+      startsAt: string;
+      isPinned?: boolean;
+      forwardId: never;
+    };
     if (method === "POST") {
       const placed = applyChange(state.plan, { kind: "place", forwardId, nightId, startsAt });
-      state.plan = { ...placed, slots: placed.slots.map((slot) => (slot.id === "placing" ? { ...slot, id: "slot-new-1" as typeof slot.id } : slot)) };
+      state.plan = {
+        ...placed,
+        slots: placed.slots.map((slot) => (slot.id === "placing" ? { ...slot, id: "slot-new-1" } : slot)),
+      };
     } else if (method !== "GET") {
-      const change: Change = method === "DELETE" ? { kind: "remove", slotId } : isPinned === undefined ? { kind: "move", slotId, nightId, startsAt } : { kind: "pin", slotId, isPinned };
+      const change: Change =
+        method === "DELETE"
+          ? { kind: "remove", slotId }
+          : isPinned === undefined
+            ? { kind: "move", slotId, nightId, startsAt }
+            : { kind: "pin", slotId, isPinned };
       state.plan = applyChange(state.plan, change);
     }
-    return new Response(JSON.stringify(state.plan), { headers: { "content-type": "application/json" } });
+    return Promise.resolve(
+      new Response(JSON.stringify(state.plan), { headers: { "content-type": "application/json" } }),
+    );
   });
   return { requests, state };
 }
@@ -53,12 +68,19 @@ function open(start: Lineup) {
 }
 
 beforeEach(() => {
-  vi.stubGlobal("matchMedia", () => ({ matches: false, addEventListener: () => undefined, removeEventListener: () => undefined }));
-  vi.stubGlobal("ResizeObserver", class {
-    observe() {}
-    disconnect() {}
-    unobserve() {}
-  });
+  vi.stubGlobal("matchMedia", () => ({
+    matches: false,
+    addEventListener: () => undefined,
+    removeEventListener: () => undefined,
+  }));
+  vi.stubGlobal(
+    "ResizeObserver",
+    class {
+      observe() {}
+      disconnect() {}
+      unobserve() {}
+    },
+  );
 });
 
 const monday1700 = buildSlot("07 17:00 foxes");
@@ -74,7 +96,15 @@ describe("the board by keyboard", () => {
     expect(news()).toBe("Tuesday 8 December, 17:20, free.");
     await user.keyboard(" ");
     expect(news()).toBe("Nine Foxes moved to Tuesday 8 December, 17:20.");
-    await waitFor(() => expect(requests).toEqual([{ method: "PATCH", path: `/api/lineup/slots/${monday1700.id}`, body: { nightId: "night-08", startsAt: "17:20", swap: false } }]));
+    await waitFor(() =>
+      expect(requests).toEqual([
+        {
+          method: "PATCH",
+          path: `/api/lineup/slots/${monday1700.id}`,
+          body: { nightId: "night-08", startsAt: "17:20", swap: false },
+        },
+      ]),
+    );
     expect(findSlotAt(state.plan, "night-08", "17:20")?.id).toBe(monday1700.id);
     expect(cell(/^Tuesday 8 December, 17:20: Nine Foxes/)).toBe(document.activeElement);
   });
@@ -127,7 +157,15 @@ describe("the board by keyboard", () => {
     await user.keyboard(" ");
     await waitFor(() => expect(cell(/^Monday 7 December, 17:20/)).toBe(document.activeElement));
     await user.keyboard("{ArrowDown} ");
-    await waitFor(() => expect(requests).toEqual([{ method: "POST", path: "/api/lineup/slots", body: { forwardId: "snow", nightId: "night-07", startsAt: "17:40" } }]));
+    await waitFor(() =>
+      expect(requests).toEqual([
+        {
+          method: "POST",
+          path: "/api/lineup/slots",
+          body: { forwardId: "snow", nightId: "night-07", startsAt: "17:40" },
+        },
+      ]),
+    );
   });
 
   it("refuses a taken time for a show of the tray and keeps it picked up", async () => {
@@ -141,7 +179,9 @@ describe("the board by keyboard", () => {
 
   it("has one place in the tab order at a time", () => {
     open(buildLineup({ slots: [monday1700, tuesday1700] }));
-    const stops = within(screen.getByRole("grid")).getAllByRole("button").filter((button) => button.dataset.place !== undefined && button.tabIndex === 0);
+    const stops = within(screen.getByRole("grid"))
+      .getAllByRole("button")
+      .filter((button) => button.dataset.place !== undefined && button.tabIndex === 0);
     expect(stops).toHaveLength(1);
   });
 });
@@ -154,11 +194,27 @@ describe("the board without dragging", () => {
     await user.selectOptions(dialog.getByLabelText("Night"), "Wednesday 9 December");
     await user.selectOptions(dialog.getByLabelText("Start time"), "17:40, free");
     await user.click(dialog.getByRole("button", { name: "Place it" }));
-    await waitFor(() => expect(requests[0]?.body).toEqual({ forwardId: "snow", nightId: "night-09", startsAt: "17:40" }));
+    await waitFor(() =>
+      expect(requests[0]?.body).toEqual({ forwardId: "snow", nightId: "night-09", startsAt: "17:40" }),
+    );
   });
 
   it("makes the smallest fix of a finding", async () => {
-    const stop = { rule: "overlap", severity: "stop", slotId: monday1700.id, forwardId: monday1700.forwardId, cause: "30 s too early", sentence: "The show before lasts longer.", fix: { kind: "move", slotId: monday1700.id, nightId: monday1700.nightId, startsAt: "17:40", label: "Move to 17:40" } } as const;
+    const stop = {
+      rule: "overlap",
+      severity: "stop",
+      slotId: monday1700.id,
+      forwardId: monday1700.forwardId,
+      cause: "30 s too early",
+      sentence: "The show before lasts longer.",
+      fix: {
+        kind: "move",
+        slotId: monday1700.id,
+        nightId: monday1700.nightId,
+        startsAt: "17:40",
+        label: "Move to 17:40",
+      },
+    } as const;
     const { user, requests } = open(buildLineup({ slots: [monday1700], findings: [stop] }));
     expect(screen.getByRole("button", { name: "Publish" }).getAttribute("aria-disabled")).toBe("true");
     await user.click(screen.getByRole("button", { name: "Move to 17:40" }));

@@ -1,6 +1,6 @@
-import { useId, useState } from "react";
+import { useId, useRef, useState } from "react";
 import type { Lineup, LineupFinding } from "../../../../shared/contracts/lineup.ts";
-import type { ForwardId, SlotId } from "../../../../shared/ids.ts";
+import type { SlotId } from "../../../../shared/ids.ts";
 import { Button } from "../../../components/button.tsx";
 import { EmptyState } from "../../../components/empty-state.tsx";
 import { IconButton } from "../../../components/icon-button.tsx";
@@ -57,14 +57,25 @@ export function LineupBoard({ lineup, monday, onMonday, now }: LineupBoardProps)
     acts.announce(`Week of ${presentDate(to, "full")}.`);
     return true;
   };
-  const open = (cell: Exclude<Cell, { kind: "rest" }>) => setTask(cell.kind === "slot" ? { kind: "slot", slotId: cell.slot.id } : { kind: "free", nightId: cell.nightId, startsAt: cell.startsAt });
-  const control = useBoard({ lineup, board, acts, onOpen: open, onWeek: week });
+  const open = (cell: Exclude<Cell, { kind: "rest" }>) =>
+    setTask(
+      cell.kind === "slot"
+        ? { kind: "slot", slotId: cell.slot.id }
+        : { kind: "free", nightId: cell.nightId, startsAt: cell.startsAt },
+    );
+  const boardRef = useRef<HTMLTableElement>(null);
+  const control = useBoard({ lineup, board, boardRef, acts, onOpen: open, onWeek: week });
   const obstacle = findPublishObstacle(lineup);
   const close = () => setTask(null);
   const apply = (change: Change) => {
     if (acts.apply(change)) close();
   };
-  const fix = (found: NonNullable<LineupFinding["fix"]>) => apply(found.kind === "remove" ? { kind: "remove", slotId: found.slotId } : { kind: "move", slotId: found.slotId, nightId: found.nightId, startsAt: found.startsAt });
+  const fix = (found: NonNullable<LineupFinding["fix"]>) =>
+    apply(
+      found.kind === "remove"
+        ? { kind: "remove", slotId: found.slotId }
+        : { kind: "move", slotId: found.slotId, nightId: found.nightId, startsAt: found.startsAt },
+    );
   const showSlot = (slotId: SlotId) => {
     const night = lineup.nights.find((candidate) => candidate.id === findSlot(lineup, slotId)?.nightId);
     if (!night) return;
@@ -80,38 +91,88 @@ export function LineupBoard({ lineup, monday, onMonday, now }: LineupBoardProps)
         detail={lineup.season.name}
         actions={
           <>
-            <Button icon="undo" onPress={() => acts.undo?.()} disabledReason={acts.undo ? null : "There is no move to undo."}>
+            <Button
+              icon="undo"
+              onPress={() => acts.undo?.()}
+              disabledReason={acts.undo ? null : "There is no move to undo."}
+            >
               Undo
             </Button>
-            <Button icon="send" look={obstacle ? "plain" : "main"} disabledReason={obstacle} reasonId={obstacle ? statusId : undefined} onPress={() => setTask({ kind: "publish" })}>
+            <Button
+              icon="send"
+              look={obstacle ? "plain" : "main"}
+              disabledReason={obstacle}
+              reasonId={obstacle ? statusId : undefined}
+              onPress={() => setTask({ kind: "publish" })}
+            >
               Publish
             </Button>
           </>
         }
       >
         <div className="flex items-center gap-0.5">
-          <IconButton icon="chevron-left" label="Week before" disabledReason={weeks.includes(addDays(monday, -7)) ? null : "The season begins this week."} onPress={() => void week(-1)} />
+          <IconButton
+            icon="chevron-left"
+            label="Week before"
+            disabledReason={weeks.includes(addDays(monday, -7)) ? null : "The season begins this week."}
+            onPress={() => void week(-1)}
+          />
           <strong className="min-w-40 text-center tabular-nums max-wide:min-w-0">{presentWeek(monday, last)}</strong>
-          <IconButton icon="chevron-right" label="Week after" disabledReason={weeks.includes(addDays(monday, 7)) ? null : "The season ends this week."} onPress={() => void week(1)} />
+          <IconButton
+            icon="chevron-right"
+            label="Week after"
+            disabledReason={weeks.includes(addDays(monday, 7)) ? null : "The season ends this week."}
+            onPress={() => void week(1)}
+          />
         </div>
         <DraftTag lineup={lineup} now={now} />
       </SubBand>
       <div className="grid flex-1 grid-cols-[214px_minmax(0,1fr)_248px] wide:h-[calc(100dvh-var(--band)-52px)] wide:flex-none max-wide:grid-cols-1">
-        {!isNarrow && <Tray lineup={lineup} carried={control.carried} hintsId={hintsId} onPickUp={control.pickUpShow} onDragStart={control.drag} onDragEnd={() => control.drag(null)} onDropSlot={({ slotId }) => { control.drag(null); control.removeSlot(slotId); }} onPlace={(forwardId) => setTask({ kind: "place", forwardId })} />}
-        <section aria-label="Week" className="min-h-0 min-w-0 overflow-auto px-3 py-2 [scrollbar-width:thin] max-wide:px-4 max-wide:pb-4">
+        {!isNarrow && (
+          <Tray
+            lineup={lineup}
+            carried={control.carried}
+            hintsId={hintsId}
+            onPickUp={control.pickUpShow}
+            onDragStart={control.drag}
+            onDragEnd={() => control.drag(null)}
+            onDropSlot={({ slotId }) => {
+              control.drag(null);
+              control.removeSlot(slotId);
+            }}
+            onPlace={(forwardId) => setTask({ kind: "place", forwardId })}
+          />
+        )}
+        <section
+          aria-label="Week"
+          className="min-h-0 min-w-0 overflow-auto px-3 py-2 [scrollbar-width:thin] max-wide:px-4 max-wide:pb-4"
+        >
           {lineup.nights.length === 0 ? (
             <EmptyState icon="calendar" title="The season has no night yet" headingLevel={2}>
               Nights are set up with the season. Ask the admin.
             </EmptyState>
           ) : isNarrow ? (
-            <NightList board={board} date={date} onDate={setDate} onOpen={open} onNight={(column) => setTask({ kind: "night", column })} />
+            <NightList
+              board={board}
+              date={date}
+              onDate={setDate}
+              onOpen={open}
+              onNight={(column) => setTask({ kind: "night", column })}
+            />
           ) : (
-            <BoardTable board={board} control={control} hintsId={hintsId} onNight={(column) => setTask({ kind: "night", column })} />
+            <BoardTable
+              board={board}
+              boardRef={boardRef}
+              control={control}
+              hintsId={hintsId}
+              onNight={(column) => setTask({ kind: "night", column })}
+            />
           )}
           <div id={hintsId} className="px-0.5 pt-2 wide:pl-12">
             {control.carriedTitle && !control.isDragging ? (
               <p className="flex flex-wrap items-center gap-2">
-                <strong>{control.carriedTitle}</strong> is picked up. Press a time, or move with the arrows and put it down with Space.
+                <strong>{control.carriedTitle}</strong> is picked up. Press a time, or move with the arrows and put it
+                down with Space.
                 <Button size="small" onPress={control.cancel}>
                   Cancel
                 </Button>
@@ -124,8 +185,26 @@ export function LineupBoard({ lineup, monday, onMonday, now }: LineupBoardProps)
             {acts.news}
           </p>
         </section>
-        <FindingsColumn lineup={lineup} status={obstacle ?? "Everything is clear. It can go out."} statusId={statusId} onFix={fix} onShowSlot={showSlot} onPlace={(forwardId) => setTask({ kind: "place", forwardId })} />
-        {isNarrow && <Tray lineup={lineup} carried={null} hintsId={hintsId} onPickUp={null} onDragStart={control.drag} onDragEnd={() => control.drag(null)} onDropSlot={() => undefined} onPlace={(forwardId) => setTask({ kind: "place", forwardId })} />}
+        <FindingsColumn
+          lineup={lineup}
+          status={obstacle ?? "Everything is clear. It can go out."}
+          statusId={statusId}
+          onFix={fix}
+          onShowSlot={showSlot}
+          onPlace={(forwardId) => setTask({ kind: "place", forwardId })}
+        />
+        {isNarrow && (
+          <Tray
+            lineup={lineup}
+            carried={null}
+            hintsId={hintsId}
+            onPickUp={null}
+            onDragStart={control.drag}
+            onDragEnd={() => control.drag(null)}
+            onDropSlot={() => undefined}
+            onPlace={(forwardId) => setTask({ kind: "place", forwardId })}
+          />
+        )}
       </div>
       <LineupDialogs task={task} setTask={setTask} lineup={lineup} monday={monday} onApply={apply} onFix={fix} />
     </>
@@ -144,5 +223,9 @@ function DraftTag({ lineup, now }: { lineup: Lineup; now: number }) {
   const today = toLocalDate(now, season.timeZone) === toLocalDate(publication.publishedAt, season.timeZone);
   const when = today ? "today" : (presentWhen(publication.publishedAt, now, season.timeZone).split(/ \d\d:/)[0] ?? "");
   if (changeCount === 0) return <Tag state="scheduled">Published {when}, nothing changed since</Tag>;
-  return <Tag state="working">Draft, {changeCount === 1 ? "1 change" : `${changeCount} changes`} since {when}</Tag>;
+  return (
+    <Tag state="working">
+      Draft, {changeCount === 1 ? "1 change" : `${changeCount} changes`} since {when}
+    </Tag>
+  );
 }

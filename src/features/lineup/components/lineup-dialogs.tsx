@@ -30,15 +30,36 @@ export interface LineupDialogsProps {
 export function LineupDialogs({ task, setTask, lineup, monday, onApply, onFix }: LineupDialogsProps) {
   const close = () => setTask(null);
   if (task?.kind === "publish") return <PublishDialog lineup={lineup} onClose={close} />;
-  if (task?.kind === "night" && task.column.night) return <NightDialog night={task.column.night} showCount={task.column.showCount} onClose={close} />;
-  if (task?.kind === "place") return <PlaceDialog lineup={lineup} what={{ kind: "show", forwardId: task.forwardId }} monday={monday} onPlace={onApply} onClose={close} />;
+  if (task?.kind === "night" && task.column.night)
+    return <NightDialog night={task.column.night} showCount={task.column.showCount} onClose={close} />;
+  if (task?.kind === "place")
+    return (
+      <PlaceDialog
+        lineup={lineup}
+        what={{ kind: "show", forwardId: task.forwardId }}
+        monday={monday}
+        onPlace={onApply}
+        onClose={close}
+      />
+    );
   if (task?.kind === "free")
-    return <ChooseShowDialog lineup={lineup} nightId={task.nightId} startsAt={task.startsAt} onClose={close} onChoose={(forwardId) => onApply({ kind: "place", forwardId, nightId: task.nightId, startsAt: task.startsAt })} />;
+    return (
+      <ChooseShowDialog
+        lineup={lineup}
+        nightId={task.nightId}
+        startsAt={task.startsAt}
+        onClose={close}
+        onChoose={(forwardId) => onApply({ kind: "place", forwardId, nightId: task.nightId, startsAt: task.startsAt })}
+      />
+    );
   if (task?.kind !== "slot" && task?.kind !== "move") return null;
   const slot = findSlot(lineup, task.slotId);
   const show = lineup.shows.find((candidate) => candidate.id === slot?.forwardId);
   if (!slot || !show) return null;
-  if (task.kind === "move") return <PlaceDialog lineup={lineup} what={{ kind: "slot", slot }} monday={monday} onPlace={onApply} onClose={close} />;
+  if (task.kind === "move")
+    return (
+      <PlaceDialog lineup={lineup} what={{ kind: "slot", slot }} monday={monday} onPlace={onApply} onClose={close} />
+    );
   return (
     <SlotDialog
       lineup={lineup}

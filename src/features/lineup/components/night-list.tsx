@@ -15,7 +15,10 @@ export interface NightListProps {
 
 /** The week on a narrow screen: one night at a time, its times under each other. */
 export function NightList({ board, date, onDate, onOpen, onNight }: NightListProps) {
-  const index = Math.max(0, board.columns.findIndex((column) => column.date === date));
+  const index = Math.max(
+    0,
+    board.columns.findIndex((column) => column.date === date),
+  );
   const column = board.columns[index];
   return (
     <div>
@@ -34,16 +37,26 @@ export function NightList({ board, date, onDate, onOpen, onNight }: NightListPro
               {weekday}
               <b className="block font-head text-4 font-[650]">{day}</b>
               <span className="flex h-4 justify-center">
-                {one.stopCount > 0 ? <Icon name="stop" className="size-3.5" /> : one.lookCount > 0 ? <Icon name="warn" className="size-3.5" /> : null}
+                {one.stopCount > 0 ? (
+                  <Icon name="stop" className="size-3.5" />
+                ) : one.lookCount > 0 ? (
+                  <Icon name="warn" className="size-3.5" />
+                ) : null}
               </span>
             </button>
           );
         })}
       </div>
       {column?.night && (
-        <button type="button" onClick={() => onNight(column)} className="mb-2 flex min-h-9 items-center gap-2 text-plum underline underline-offset-2">
+        <button
+          type="button"
+          onClick={() => onNight(column)}
+          className="mb-2 flex min-h-9 items-center gap-2 text-plum underline underline-offset-2"
+        >
           <Icon name="clock" />
-          {column.night.closedReason ? `Closed: ${column.night.closedReason}` : `First show from ${column.night.opensAt}, quiet from ${column.night.closesAt}`}
+          {column.night.closedReason
+            ? `Closed: ${column.night.closedReason}`
+            : `First show from ${column.night.opensAt}, quiet from ${column.night.closesAt}`}
         </button>
       )}
       <ul className="space-y-1.5">

@@ -1,5 +1,5 @@
 import { useState } from "react";
-import type { Lineup, Night, Slot } from "../../../../shared/contracts/lineup.ts";
+import type { Lineup, Slot } from "../../../../shared/contracts/lineup.ts";
 import { Button } from "../../../components/button.tsx";
 import { Dialog } from "../../../components/dialog.tsx";
 import { Select } from "../../../components/select.tsx";
@@ -20,7 +20,7 @@ export interface PlaceDialogProps {
 export function PlaceDialog({ lineup, what, monday, onPlace, onClose }: PlaceDialogProps) {
   const forwardId = what.kind === "show" ? what.forwardId : what.slot.forwardId;
   const nights = lineup.nights.filter((night) => night.closedReason === null && night.date >= lineup.tonight);
-  const [nightId, setNightId] = useState<Night["id"] | "">((nights.find((night) => night.date >= monday) ?? nights[0])?.id ?? "");
+  const [nightId, setNightId] = useState<string>((nights.find((night) => night.date >= monday) ?? nights[0])?.id ?? "");
   const [startsAt, setStartsAt] = useState("");
   const night = nights.find((candidate) => candidate.id === nightId);
   const times = night ? lineup.times.filter((time) => time >= night.opensAt && time < night.closesAt) : [];
@@ -44,7 +44,11 @@ export function PlaceDialog({ lineup, what, monday, onPlace, onClose }: PlaceDia
       actions={
         <>
           <Button onPress={onClose}>Cancel</Button>
-          <Button look="main" disabledReason={nights.length === 0 ? "No night is open." : change === null ? "Choose a time." : obstacle} onPress={() => change && onPlace(change)}>
+          <Button
+            look="main"
+            disabledReason={nights.length === 0 ? "No night is open." : change === null ? "Choose a time." : obstacle}
+            onPress={() => change && onPlace(change)}
+          >
             {isSwap ? "Change places" : what.kind === "show" ? "Place it" : "Move it"}
           </Button>
         </>
@@ -55,7 +59,7 @@ export function PlaceDialog({ lineup, what, monday, onPlace, onClose }: PlaceDia
         value={nightId}
         autoFocus
         onChange={(event) => {
-          setNightId(event.target.value as Night["id"]);
+          setNightId(event.target.value);
           setStartsAt("");
         }}
         options={nights.map((one) => ({ value: one.id, label: presentDate(one.date, "full") }))}
@@ -67,11 +71,20 @@ export function PlaceDialog({ lineup, what, monday, onPlace, onClose }: PlaceDia
         onChange={(event) => setStartsAt(event.target.value)}
         options={times.map((time) => {
           const there = night && findSlotAt(lineup, night.id, time);
-          return { value: time, label: there ? `${time}, ${presentTitle(lineup, there.forwardId)}${there.isPinned ? " (pinned)" : ""}` : `${time}, free` };
+          return {
+            value: time,
+            label: there
+              ? `${time}, ${presentTitle(lineup, there.forwardId)}${there.isPinned ? " (pinned)" : ""}`
+              : `${time}, free`,
+          };
         })}
         error={obstacle}
       />
-      {isSwap && taken && !obstacle && <p className="text-soft">{presentTitle(lineup, taken.forwardId)} takes the place that {title} has now.</p>}
+      {isSwap && taken && !obstacle && (
+        <p className="text-soft">
+          {presentTitle(lineup, taken.forwardId)} takes the place that {title} has now.
+        </p>
+      )}
     </Dialog>
   );
 }

@@ -44,7 +44,10 @@ export function PublishDialog({ lineup, onClose }: PublishDialogProps) {
             onPress={() =>
               publish.mutate(undefined, {
                 onSuccess: ({ number }) => {
-                  showToast({ title: `Lineup ${number} is published.`, detail: "Families see it in the programme now." });
+                  showToast({
+                    title: `Lineup ${number} is published.`,
+                    detail: "Families see it in the programme now.",
+                  });
                   onClose();
                 },
               })
@@ -55,7 +58,10 @@ export function PublishDialog({ lineup, onClose }: PublishDialogProps) {
         </>
       }
     >
-      <p>Families see it in the programme at once, and the handover is made from it. What was published can not be called back, but a new lineup can replace it at any time.</p>
+      <p>
+        Families see it in the programme at once, and the handover is made from it. What was published can not be called
+        back, but a new lineup can replace it at any time.
+      </p>
       {obstacle && <Notice tone="stop" title={obstacle} />}
       {publish.error && (
         <Notice tone="stop" role="alert" title="The lineup was not published.">
@@ -75,7 +81,10 @@ export function PublishDialog({ lineup, onClose }: PublishDialogProps) {
       >
         {({ shows }) => {
           const changes = listPublicationChanges(lineup, shows);
-          if (changes.length === 0) return <p className="text-soft">{lineup.changeCount > 0 ? "Only hours or closed nights change." : "Nothing."}</p>;
+          if (changes.length === 0)
+            return (
+              <p className="text-soft">{lineup.changeCount > 0 ? "Only hours or closed nights change." : "Nothing."}</p>
+            );
           return (
             <ul className="max-h-72 divide-y divide-line overflow-y-auto rounded-sheet border border-line bg-card">
               {changes.map((change) => (

@@ -11,7 +11,14 @@ import { PictureRibbon } from "../../../components/picture-ribbon.tsx";
 import { TextField } from "../../../components/text-field.tsx";
 import { formatNames } from "../../../lib/format.ts";
 import { presentLength } from "../../../lib/zoned-time.ts";
-import { listTray, presentNights, TRAY_ORDER_NAMES, TRAY_ORDERS, type TrayItem, type TrayOrder } from "../model/tray.ts";
+import {
+  listTray,
+  presentNights,
+  TRAY_ORDER_NAMES,
+  TRAY_ORDERS,
+  type TrayItem,
+  type TrayOrder,
+} from "../model/tray.ts";
 import type { Carried } from "../use-board.ts";
 import { toShortSchool } from "./board-cell.tsx";
 
@@ -38,7 +45,10 @@ export function Tray({ lineup, carried, hintsId, onPickUp, onDragStart, onDragEn
   return (
     <aside
       aria-labelledby="tray-heading"
-      className={joinClasses("flex min-h-0 flex-col border-line bg-card wide:border-r", isDropTarget && "outline-2 -outline-offset-2 outline-dashed outline-rim")}
+      className={joinClasses(
+        "flex min-h-0 flex-col border-line bg-card wide:border-r",
+        isDropTarget && "outline-2 -outline-offset-2 outline-dashed outline-rim",
+      )}
       onDragOver={(event) => {
         if (isDropTarget) event.preventDefault();
       }}
@@ -52,13 +62,36 @@ export function Tray({ lineup, carried, hintsId, onPickUp, onDragStart, onDragEn
           <span className="ml-auto text-meta text-slate">{lineup.shows.length}</span>
         </div>
         <div className="mt-1.5 flex items-start gap-1.5">
-          <TextField label="Find a show, a name or a school" isLabelHidden placeholder="Show, name or school" type="search" value={query} onChange={(event) => setQuery(event.target.value)} className="flex-1" />
-          <Menu isIconOnly icon="arrange" label={`Order: ${TRAY_ORDER_NAMES[order]}`} actions={TRAY_ORDERS.map((one) => ({ id: one, label: TRAY_ORDER_NAMES[one], icon: one === order ? "check" : undefined, onAction: () => setOrder(one) }))} />
+          <TextField
+            label="Find a show, a name or a school"
+            isLabelHidden
+            placeholder="Show, name or school"
+            type="search"
+            value={query}
+            onChange={(event) => setQuery(event.target.value)}
+            className="flex-1"
+          />
+          <Menu
+            isIconOnly
+            icon="arrange"
+            label={`Order: ${TRAY_ORDER_NAMES[order]}`}
+            actions={TRAY_ORDERS.map((one) => ({
+              id: one,
+              label: TRAY_ORDER_NAMES[one],
+              icon: one === order ? "check" : undefined,
+              onAction: () => setOrder(one),
+            }))}
+          />
         </div>
         <p className="mt-1 text-meta text-slate">{TRAY_ORDER_NAMES[order]}</p>
       </div>
       {lineup.shows.length === 0 ? (
-        <EmptyState className="m-3 flex-col" icon="ribbon" title="No approved show yet" action={<LinkButton to="/event/shows">Look at the shows</LinkButton>}>
+        <EmptyState
+          className="m-3 flex-col"
+          icon="ribbon"
+          title="No approved show yet"
+          action={<LinkButton to="/event/shows">Look at the shows</LinkButton>}
+        >
           Approve a forwarded show, and it waits here for its nights.
         </EmptyState>
       ) : items.length === 0 ? (
@@ -71,7 +104,16 @@ export function Tray({ lineup, carried, hintsId, onPickUp, onDragStart, onDragEn
       ) : (
         <ul className="min-h-0 flex-1 overflow-y-auto [scrollbar-width:thin]">
           {items.map((item) => (
-            <TrayRow key={item.show.id} item={item} isCarried={carried?.kind === "show" && carried.forwardId === item.show.id} hintsId={hintsId} onPickUp={onPickUp} onDragStart={onDragStart} onDragEnd={onDragEnd} onPlace={onPlace} />
+            <TrayRow
+              key={item.show.id}
+              item={item}
+              isCarried={carried?.kind === "show" && carried.forwardId === item.show.id}
+              hintsId={hintsId}
+              onPickUp={onPickUp}
+              onDragStart={onDragStart}
+              onDragEnd={onDragEnd}
+              onPlace={onPlace}
+            />
           ))}
         </ul>
       )}
@@ -84,7 +126,15 @@ interface TrayRowProps extends Pick<TrayProps, "hintsId" | "onPickUp" | "onDragS
   isCarried: boolean;
 }
 
-function TrayRow({ item: { show, nightCount }, isCarried, hintsId, onPickUp, onDragStart, onDragEnd, onPlace }: TrayRowProps) {
+function TrayRow({
+  item: { show, nightCount },
+  isCarried,
+  hintsId,
+  onPickUp,
+  onDragStart,
+  onDragEnd,
+  onPlace,
+}: TrayRowProps) {
   const act = () => (onPickUp ?? onPlace)(show.id);
   return (
     <li className={joinClasses("border-b border-line", isCarried && "bg-spruce-tint")}>
@@ -120,9 +170,16 @@ function TrayRow({ item: { show, nightCount }, isCarried, hintsId, onPickUp, onD
       </div>
       <div className="flex items-center gap-2 pr-1.5 pb-1 pl-[34px] text-meta text-slate">
         <span className="min-w-0 truncate" title={`${formatNames(show.authors)}, ${show.schoolName}`}>
-          {formatNames(show.authors)}, {toShortSchool(show.schoolName)} · {nightCount === 0 ? <strong>not placed yet</strong> : presentNights(nightCount)}
+          {formatNames(show.authors)}, {toShortSchool(show.schoolName)} ·{" "}
+          {nightCount === 0 ? <strong>not placed yet</strong> : presentNights(nightCount)}
         </span>
-        <Button size="small" look="quiet" className="ml-auto px-1.5!" aria-label={`Place ${show.title}…`} onPress={() => onPlace(show.id)}>
+        <Button
+          size="small"
+          look="quiet"
+          className="ml-auto px-1.5!"
+          aria-label={`Place ${show.title}…`}
+          onPress={() => onPlace(show.id)}
+        >
           Place…
         </Button>
       </div>

@@ -20,7 +20,13 @@ export function AnswerPanel({ forward, stopCount, runs }: AnswerPanelProps) {
   const [note, setNote] = useState("");
   const [isDeclining, setIsDeclining] = useState(false);
   const approve = useApprove();
-  const obstacle = !runs ? "It does not run." : stopCount > 0 ? (stopCount === 1 ? "1 stop is open." : `${stopCount} stops are open.`) : null;
+  const obstacle = !runs
+    ? "It does not run."
+    : stopCount > 0
+      ? stopCount === 1
+        ? "1 stop is open."
+        : `${stopCount} stops are open.`
+      : null;
 
   if (forward.state === "declined") {
     return (
@@ -33,9 +39,28 @@ export function AnswerPanel({ forward, stopCount, runs }: AnswerPanelProps) {
   return (
     <div className="space-y-3">
       {isWaiting ? (
-        <TextArea label="Note to the teacher" isOptional rows={2} maxLength={1000} value={note} onChange={(event) => setNote(event.target.value)} />
+        <TextArea
+          label="Note to the teacher"
+          isOptional
+          rows={2}
+          maxLength={1000}
+          value={note}
+          onChange={(event) => setNote(event.target.value)}
+        />
       ) : (
-        <Notice tone="ok" title={forward.state === "scheduled" ? `Approved, and on ${forward.slotCount === 1 ? "1 slot" : `${forward.slotCount} slots`} of the lineup.` : "Approved. It waits in the tray of the lineup."} actions={<LinkButton to="/lineup" icon="calendar">Open the lineup</LinkButton>}>
+        <Notice
+          tone="ok"
+          title={
+            forward.state === "scheduled"
+              ? `Approved, and on ${forward.slotCount === 1 ? "1 slot" : `${forward.slotCount} slots`} of the lineup.`
+              : "Approved. It waits in the tray of the lineup."
+          }
+          actions={
+            <LinkButton to="/lineup" icon="calendar">
+              Open the lineup
+            </LinkButton>
+          }
+        >
           {forward.answer}
         </Notice>
       )}
@@ -51,7 +76,18 @@ export function AnswerPanel({ forward, stopCount, runs }: AnswerPanelProps) {
             icon="tick"
             isPending={approve.isPending}
             disabledReason={obstacle}
-            onPress={() => approve.mutate({ forwardId: forward.id, note: note.trim() }, { onSuccess: () => showToast({ title: `${forward.title} is approved.`, detail: "It waits in the tray of the lineup." }) })}
+            onPress={() =>
+              approve.mutate(
+                { forwardId: forward.id, note: note.trim() },
+                {
+                  onSuccess: () =>
+                    showToast({
+                      title: `${forward.title} is approved.`,
+                      detail: "It waits in the tray of the lineup.",
+                    }),
+                },
+              )
+            }
           >
             Approve
           </Button>
@@ -91,18 +127,39 @@ function DeclineDialog({ forward, note, onClose }: { forward: ForwardSummary; no
       actions={
         <>
           <Button onPress={onClose}>Keep it</Button>
-          <Button look={forward.slotCount > 0 ? "stop" : "main"} icon="turn" isPending={decline.isPending} onPress={send}>
+          <Button
+            look={forward.slotCount > 0 ? "stop" : "main"}
+            icon="turn"
+            isPending={decline.isPending}
+            onPress={send}
+          >
             Send back
           </Button>
         </>
       }
     >
       {forward.slotCount > 0 && (
-        <Notice tone="warn" title={forward.slotCount === 1 ? "It loses its slot on the lineup." : `It loses its ${forward.slotCount} slots on the lineup.`}>
+        <Notice
+          tone="warn"
+          title={
+            forward.slotCount === 1
+              ? "It loses its slot on the lineup."
+              : `It loses its ${forward.slotCount} slots on the lineup.`
+          }
+        >
           The times become free. This can not be undone; the teacher has to forward the show again.
         </Notice>
       )}
-      <TextArea label={`Why, for ${forward.teacherName}`} hint="Say what has to change, so that they can mend it." rows={4} maxLength={1000} autoFocus value={text} onChange={(event) => setText(event.target.value)} error={isTried && text.trim() === "" ? "Say why, so that they can mend it." : null} />
+      <TextArea
+        label={`Why, for ${forward.teacherName}`}
+        hint="Say what has to change, so that they can mend it."
+        rows={4}
+        maxLength={1000}
+        autoFocus
+        value={text}
+        onChange={(event) => setText(event.target.value)}
+        error={isTried && text.trim() === "" ? "Say why, so that they can mend it." : null}
+      />
       {decline.error && (
         <Notice tone="stop" role="alert" title="The show was not sent back.">
           {decline.error.message}

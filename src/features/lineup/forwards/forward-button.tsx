@@ -23,7 +23,12 @@ export function ForwardButton({ submissionId, title, forwardState, obstacle }: F
   const [isOpen, setIsOpen] = useState(false);
   const [note, setNote] = useState("");
   const forward = useForwardShow(submissionId);
-  if (forwardState !== null && forwardState !== "declined") return <Tag state={forwardState}>{{ waiting: "Forwarded, waiting", approved: "Approved by the event", scheduled: "On the lineup" }[forwardState]}</Tag>;
+  if (forwardState !== null && forwardState !== "declined")
+    return (
+      <Tag state={forwardState}>
+        {{ waiting: "Forwarded, waiting", approved: "Approved by the event", scheduled: "On the lineup" }[forwardState]}
+      </Tag>
+    );
 
   return (
     <>
@@ -46,7 +51,10 @@ export function ForwardButton({ submissionId, title, forwardState, obstacle }: F
                 forward.mutate(note.trim(), {
                   onSuccess: () => {
                     setIsOpen(false);
-                    showToast({ title: `${title} is forwarded.`, detail: "The coordinator watches it; you read the answer under Forwarded." });
+                    showToast({
+                      title: `${title} is forwarded.`,
+                      detail: "The coordinator watches it; you read the answer under Forwarded.",
+                    });
                   },
                 })
               }
@@ -56,8 +64,19 @@ export function ForwardButton({ submissionId, title, forwardState, obstacle }: F
           </>
         }
       >
-        <p>The coordinator sees this version, its show check and your note. In the public programme the authors are named only as far as their families allowed.</p>
-        <TextArea label="Note to the coordinator" isOptional rows={3} maxLength={1000} autoFocus value={note} onChange={(event) => setNote(event.target.value)} />
+        <p>
+          The coordinator sees this version, its show check and your note. In the public programme the authors are named
+          only as far as their families allowed.
+        </p>
+        <TextArea
+          label="Note to the coordinator"
+          isOptional
+          rows={3}
+          maxLength={1000}
+          autoFocus
+          value={note}
+          onChange={(event) => setNote(event.target.value)}
+        />
         {forward.error && (
           <Notice tone="stop" role="alert" title="The show was not forwarded.">
             {forward.error.message}

@@ -29,7 +29,16 @@ export interface ForwardPageProps {
 }
 
 /** A forwarded show: watch it, read what the check on the real square found, and what the people said. */
-export function ForwardPage({ detail, back, timeZone, now, show, presentMoment, onShowMoment, answer }: ForwardPageProps) {
+export function ForwardPage({
+  detail,
+  back,
+  timeZone,
+  now,
+  show,
+  presentMoment,
+  onShowMoment,
+  answer,
+}: ForwardPageProps) {
   const { forward, run, findings } = detail;
   return (
     <>
@@ -58,7 +67,9 @@ export function ForwardPage({ detail, back, timeZone, now, show, presentMoment, 
             <CardHeader title="Show check" titleId="check-heading" detail="on the square as it is now" />
             <div className="p-4">
               <RunNotice run={run} />
-              {run.isOk && <FindingList findings={findings} presentMoment={presentMoment} onShowMoment={onShowMoment} />}
+              {run.isOk && (
+                <FindingList findings={findings} presentMoment={presentMoment} onShowMoment={onShowMoment} />
+              )}
             </div>
           </Card>
           <Card as="section" aria-labelledby="facts-heading">

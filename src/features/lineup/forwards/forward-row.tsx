@@ -25,7 +25,8 @@ export function ForwardRow({ forward, to, timeZone, now, words, actions }: Forwa
       to={to}
       line={
         <>
-          {formatNames(forward.authors)}, {forward.className}, {forward.schoolName} · {forward.songTitle}, {presentLength(forward.seconds)} · forwarded {presentWhen(forward.forwardedAt, now, timeZone)}
+          {formatNames(forward.authors)}, {forward.className}, {forward.schoolName} · {forward.songTitle},{" "}
+          {presentLength(forward.seconds)} · forwarded {presentWhen(forward.forwardedAt, now, timeZone)}
         </>
       }
       ribbon={
@@ -36,9 +37,17 @@ export function ForwardRow({ forward, to, timeZone, now, words, actions }: Forwa
       }
       tag={
         <span className="flex flex-wrap gap-1.5">
-          {forward.stopCount > 0 && <Tag state="stop">{forward.stopCount === 1 ? "1 stop" : `${forward.stopCount} stops`}</Tag>}
+          {forward.stopCount > 0 && (
+            <Tag state="stop">{forward.stopCount === 1 ? "1 stop" : `${forward.stopCount} stops`}</Tag>
+          )}
           {forward.stopCount === 0 && forward.warnCount > 0 && <Tag state="warn">{forward.warnCount} to look at</Tag>}
-          <Tag state={forward.state}>{forward.state === "scheduled" ? (forward.slotCount === 1 ? "On 1 slot" : `On ${forward.slotCount} slots`) : undefined}</Tag>
+          <Tag state={forward.state}>
+            {forward.state === "scheduled"
+              ? forward.slotCount === 1
+                ? "On 1 slot"
+                : `On ${forward.slotCount} slots`
+              : undefined}
+          </Tag>
         </span>
       }
       actions={actions}

@@ -16,8 +16,18 @@ const ORDER = { declined: 0, waiting: 1, approved: 2, scheduled: 3 };
 export function ForwardedList({ forwards, timeZone, now }: ForwardedListProps) {
   if (forwards.length === 0) {
     return (
-      <EmptyState icon="send" title="Nothing forwarded yet" headingLevel={2} action={<LinkButton to="/marking" look="main" icon="pencil">Go to the marking</LinkButton>}>
-        When a show is marked, forward it from the marking desk. The event’s coordinator watches it, and you read the answer here.
+      <EmptyState
+        icon="send"
+        title="Nothing forwarded yet"
+        headingLevel={2}
+        action={
+          <LinkButton to="/marking" look="main" icon="pencil">
+            Go to the marking
+          </LinkButton>
+        }
+      >
+        When a show is marked, forward it from the marking desk. The event’s coordinator watches it, and you read the
+        answer here.
       </EmptyState>
     );
   }

@@ -19,8 +19,14 @@ export interface ShowsInboxProps {
 
 const EMPTY: Record<InboxView, { title: string; text: string }> = {
   waiting: { title: "No show waits for you", text: "Shows come here when a teacher forwards them." },
-  approved: { title: "No show is approved yet", text: "Watch a waiting show and approve it; then it can be placed in the lineup." },
-  declined: { title: "No show was sent back", text: "A show that you send back to its teacher stays here with your note." },
+  approved: {
+    title: "No show is approved yet",
+    text: "Watch a waiting show and approve it; then it can be placed in the lineup.",
+  },
+  declined: {
+    title: "No show was sent back",
+    text: "A show that you send back to its teacher stays here with your note.",
+  },
 };
 
 /** The coordinator's shows: waiting (longest first), approved with those on the plan, sent back. */
@@ -28,7 +34,9 @@ export function ShowsInbox({ forwards, view, onView, timeZone, now }: ShowsInbox
   const listView = (one: InboxView) => {
     const states: readonly string[] = one === "approved" ? ["approved", "scheduled"] : [one];
     const sign = one === "waiting" ? 1 : -1;
-    return forwards.filter((forward) => states.includes(forward.state)).sort((a, b) => sign * (a.forwardedAt - b.forwardedAt));
+    return forwards
+      .filter((forward) => states.includes(forward.state))
+      .sort((a, b) => sign * (a.forwardedAt - b.forwardedAt));
   };
   return (
     <Tabs
@@ -63,7 +71,12 @@ export function ShowsInbox({ forwards, view, onView, timeZone, now }: ShowsInbox
                       </>
                     }
                     actions={
-                      <LinkButton to={`/event/shows/${forward.id}`} icon="eye" look={one === "waiting" ? "main" : "plain"} aria-label={`Watch ${forward.title}`}>
+                      <LinkButton
+                        to={`/event/shows/${forward.id}`}
+                        icon="eye"
+                        look={one === "waiting" ? "main" : "plain"}
+                        aria-label={`Watch ${forward.title}`}
+                      >
                         Watch
                       </LinkButton>
                     }

@@ -8,7 +8,13 @@ const MONDAY = "2026-12-07";
 
 describe("listWeeks", () => {
   it("begins with the Monday before the first night and ends with the week of the last", () => {
-    expect(listWeeks(buildLineup().season)).toEqual(["2026-11-30", "2026-12-07", "2026-12-14", "2026-12-21", "2026-12-28"]);
+    expect(listWeeks(buildLineup().season)).toEqual([
+      "2026-11-30",
+      "2026-12-07",
+      "2026-12-14",
+      "2026-12-21",
+      "2026-12-28",
+    ]);
     expect(toMonday("2026-12-13")).toBe("2026-12-07");
   });
   it("opens with tonight's week, or the first while the season is still ahead", () => {
@@ -71,9 +77,14 @@ describe("stepFrom", () => {
 });
 
 describe("listTray", () => {
-  const lineup = buildLineup({ slots: [buildSlot("07 17:00 foxes"), buildSlot("07 17:40 foxes"), buildSlot("09 17:00 foxes")] });
+  const lineup = buildLineup({
+    slots: [buildSlot("07 17:00 foxes"), buildSlot("07 17:40 foxes"), buildSlot("09 17:00 foxes")],
+  });
   it("puts the show with the fewest nights first and counts a night once", () => {
-    expect(listTray(lineup, "", "fewest").map(({ show, nightCount }) => [show.title, nightCount])).toEqual([["Slow Snow", 0], ["Nine Foxes", 2]]);
+    expect(listTray(lineup, "", "fewest").map(({ show, nightCount }) => [show.title, nightCount])).toEqual([
+      ["Slow Snow", 0],
+      ["Nine Foxes", 2],
+    ]);
   });
   it("finds by title, name or school, whatever the case and the order of the words", () => {
     expect(listTray(lineup, "INTERMEDIATE slow", "title").map(({ show }) => show.title)).toEqual(["Slow Snow"]);
@@ -84,7 +95,14 @@ describe("listTray", () => {
 
 describe("listShares", () => {
   it("counts shows and slots by school, most slots first", () => {
-    const lineup = buildLineup({ slots: [buildSlot("07 17:00 snow"), buildSlot("08 17:00 snow"), buildSlot("09 17:00 snow"), buildSlot("09 17:20 foxes")] });
+    const lineup = buildLineup({
+      slots: [
+        buildSlot("07 17:00 snow"),
+        buildSlot("08 17:00 snow"),
+        buildSlot("09 17:00 snow"),
+        buildSlot("09 17:20 foxes"),
+      ],
+    });
     expect(listShares(lineup)).toEqual([
       { schoolName: "Quillhaven Intermediate", showCount: 1, slotCount: 3, share: 0.75 },
       { schoolName: "Tarn Road Middle School", showCount: 1, slotCount: 1, share: 0.25 },

@@ -5,7 +5,12 @@ const DAYS = 7;
 
 /** One place of the board: a night's start time, and what is there. */
 export type Cell =
-  | { readonly kind: "slot"; readonly slot: Slot; readonly show: ForwardSummary; readonly finding: LineupFinding | null }
+  | {
+      readonly kind: "slot";
+      readonly slot: Slot;
+      readonly show: ForwardSummary;
+      readonly finding: LineupFinding | null;
+    }
   | { readonly kind: "free"; readonly nightId: Night["id"]; readonly startsAt: string }
   | { readonly kind: "rest"; readonly reason: string };
 
@@ -54,7 +59,14 @@ export function buildBoard(lineup: Lineup, monday: string): Board {
   const slots = lineup.slots.filter((slot) => ids.has(slot.nightId));
   const times = [...new Set([...lineup.times, ...slots.map((slot) => slot.startsAt)])].sort();
   const cells = times.map((time) => nights.map((night) => toCell(lineup, night, time)));
-  const columns = dates.map((date, column) => toColumn(date, nights[column] ?? null, date === lineup.tonight, cells.map((row) => row[column])));
+  const columns = dates.map((date, column) =>
+    toColumn(
+      date,
+      nights[column] ?? null,
+      date === lineup.tonight,
+      cells.map((row) => row[column]),
+    ),
+  );
   return { times, columns, cells };
 }
 
@@ -65,19 +77,24 @@ function toCell(lineup: Lineup, night: Night | null, startsAt: string): Cell {
   if (slot && show) return { kind: "slot", slot, show, finding: findWorst(lineup.findings, slot.id) };
   if (night.date < lineup.tonight) return { kind: "rest", reason: "over" };
   if (night.closedReason !== null) return { kind: "rest", reason: night.closedReason };
-  if (startsAt < night.opensAt || startsAt >= night.closesAt || !lineup.times.includes(startsAt)) return { kind: "rest", reason: "dark" };
+  if (startsAt < night.opensAt || startsAt >= night.closesAt || !lineup.times.includes(startsAt))
+    return { kind: "rest", reason: "dark" };
   return { kind: "free", nightId: night.id, startsAt };
 }
 
 const RANK = { stop: 0, warn: 1, note: 2 } as const;
 
 function findWorst(findings: readonly LineupFinding[], slotId: Slot["id"]): LineupFinding | null {
-  return findings.filter((finding) => finding.slotId === slotId).sort((a, b) => RANK[a.severity] - RANK[b.severity])[0] ?? null;
+  return (
+    findings.filter((finding) => finding.slotId === slotId).sort((a, b) => RANK[a.severity] - RANK[b.severity])[0] ??
+    null
+  );
 }
 
 function toColumn(date: string, night: Night | null, isTonight: boolean, cells: readonly (Cell | undefined)[]): Column {
   const slots = cells.filter((cell) => cell?.kind === "slot");
-  const count = (severity: LineupFinding["severity"]) => slots.filter((cell) => cell.finding?.severity === severity).length;
+  const count = (severity: LineupFinding["severity"]) =>
+    slots.filter((cell) => cell.finding?.severity === severity).length;
   return {
     date,
     night,
@@ -109,7 +126,12 @@ export function listShares(lineup: Lineup): readonly SchoolShare[] {
     .map((schoolName) => {
       const ids = new Set(lineup.shows.filter((show) => show.schoolName === schoolName).map((show) => show.id));
       const slotCount = lineup.slots.filter((slot) => ids.has(slot.forwardId)).length;
-      return { schoolName, showCount: ids.size, slotCount, share: lineup.slots.length === 0 ? 0 : slotCount / lineup.slots.length };
+      return {
+        schoolName,
+        showCount: ids.size,
+        slotCount,
+        share: lineup.slots.length === 0 ? 0 : slotCount / lineup.slots.length,
+      };
     })
     .sort((a, b) => b.slotCount - a.slotCount || a.schoolName.localeCompare(b.schoolName));
 }

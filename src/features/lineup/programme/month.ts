@@ -35,7 +35,9 @@ export function buildMonths(
       cells.push({ date, day, shows: counts.get(date) ?? 0, closedReason: closed.get(date) });
     }
     while (cells.length % DAYS_IN_WEEK !== 0) cells.push(null);
-    const weeks = Array.from({ length: cells.length / DAYS_IN_WEEK }, (_, w) => cells.slice(w * DAYS_IN_WEEK, (w + 1) * DAYS_IN_WEEK));
+    const weeks = Array.from({ length: cells.length / DAYS_IN_WEEK }, (_, w) =>
+      cells.slice(w * DAYS_IN_WEEK, (w + 1) * DAYS_IN_WEEK),
+    );
     return { name: NAME.format(first), weeks };
   });
 }

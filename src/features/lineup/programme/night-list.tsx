@@ -34,7 +34,12 @@ export function NightList({ shows, nowSlotId }: NightListProps) {
               <p className="text-soft">
                 {show.publicName} · “{show.songTitle}” · {presentLength(show.seconds)}
               </p>
-              <PictureRibbon className="mt-1.5" picture={show.ribbon} size="row" label={`${show.title}: ${show.description}`} />
+              <PictureRibbon
+                className="mt-1.5"
+                picture={show.ribbon}
+                size="row"
+                label={`${show.title}: ${show.description}`}
+              />
             </div>
           </li>
         );

@@ -3,7 +3,7 @@ import type { ProgrammeShow } from "../../../../shared/contracts/lineup.ts";
 import { findOnNow, searchShows } from "./on-now.ts";
 
 const show = (fields: Partial<ProgrammeShow>): ProgrammeShow => ({
-  slotId: "slot-1" as ProgrammeShow["slotId"],
+  slotId: "slot-1",
   date: "2026-12-11",
   startsAt: "18:20",
   title: "Nine Foxes",

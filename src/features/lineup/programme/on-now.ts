@@ -13,7 +13,10 @@ export function findOnNow(shows: readonly ProgrammeShow[], now: number, zone: st
   const date = toLocalDate(now, zone);
   const minutes = minutesOf(presentTime(now, zone));
   const on = shows.find(
-    (show) => show.date === date && minutes >= minutesOf(show.startsAt) && minutes < minutesOf(show.startsAt) + Math.ceil(show.seconds / MINUTE),
+    (show) =>
+      show.date === date &&
+      minutes >= minutesOf(show.startsAt) &&
+      minutes < minutesOf(show.startsAt) + Math.ceil(show.seconds / MINUTE),
   );
   return on?.slotId ?? null;
 }

@@ -37,7 +37,20 @@ export interface BenchProps extends Pick<DeskHeadProps, "timeZone" | "now" | "po
 }
 
 /** The show on the desk: stage, moments, transport, and the script with the comments below its lines. */
-export function Bench({ detail, picture, playback, timeline, song, stage, transport, renderScript, onShowLine, comments, foot, ...head }: BenchProps) {
+export function Bench({
+  detail,
+  picture,
+  playback,
+  timeline,
+  song,
+  stage,
+  transport,
+  renderScript,
+  onShowLine,
+  comments,
+  foot,
+  ...head
+}: BenchProps) {
   const { submission, run } = detail;
   const [hereId, setHereId] = useState<string | null>(null);
   const bars = song ?? { bars: [] };
@@ -56,8 +69,18 @@ export function Bench({ detail, picture, playback, timeline, song, stage, transp
     />
   );
   const composerLine = open && lineOf(open.anchor);
-  const noteOf = (one: PlacedComment) => <CommentNote key={one.comment.id} placed={one} isHere={one.comment.id === hereId} onDelete={() => comments.takeBack(one.comment)} />;
-  const lines = new Set([...placed.flatMap((one) => (one.line === null ? [] : [one.line])), ...(composerLine ? [composerLine] : [])]);
+  const noteOf = (one: PlacedComment) => (
+    <CommentNote
+      key={one.comment.id}
+      placed={one}
+      isHere={one.comment.id === hereId}
+      onDelete={() => comments.takeBack(one.comment)}
+    />
+  );
+  const lines = new Set([
+    ...placed.flatMap((one) => (one.line === null ? [] : [one.line])),
+    ...(composerLine ? [composerLine] : []),
+  ]);
   const notes = new Map(
     [...lines].map((line) => [
       line,
@@ -87,10 +110,18 @@ export function Bench({ detail, picture, playback, timeline, song, stage, transp
         onSelect={select}
       />
       {transport}
-      <div role="region" aria-label="Script and comments" className="min-h-0 flex-1 overflow-y-auto bg-card py-1.5 [scrollbar-width:thin]">
+      <div
+        role="region"
+        aria-label="Script and comments"
+        className="min-h-0 flex-1 overflow-y-auto bg-card py-1.5 [scrollbar-width:thin]"
+      >
         <RunNotices detail={detail} onShowLine={onShowLine} />
         {composerLine === null && composer && <div className="mx-3 mb-2">{composer}</div>}
-        {renderScript({ notes, markedLines: run.problem ? [run.problem.range.line] : [], onPickLine: (line) => comments.write({ kind: "lines", from: line, to: line }) })}
+        {renderScript({
+          notes,
+          markedLines: run.problem ? [run.problem.range.line] : [],
+          onPickLine: (line) => comments.write({ kind: "lines", from: line, to: line }),
+        })}
         <div className="mx-3 mt-3 space-y-1.5">
           {elsewhere.map(noteOf)}
           <Button size="small" look="quiet" icon="note" onPress={() => comments.write({ kind: "whole" })}>
@@ -98,9 +129,17 @@ export function Bench({ detail, picture, playback, timeline, song, stage, transp
           </Button>
         </div>
         {run.isOk && (
-          <details className="mx-3 mt-3 border-t border-line pt-2" open={run.findings.some((finding) => finding.severity === "stop")}>
+          <details
+            className="mx-3 mt-3 border-t border-line pt-2"
+            open={run.findings.some((finding) => finding.severity === "stop")}
+          >
             <summary className="min-h-7 cursor-pointer font-bold">Show check: {presentCount(run.findings)}</summary>
-            <FindingList findings={run.findings} presentMoment={(tick) => presentMoment(tick, bars)} onShowMoment={(tick) => playback?.seekTick(tick)} onShowLine={onShowLine} />
+            <FindingList
+              findings={run.findings}
+              presentMoment={(tick) => presentMoment(tick, bars)}
+              onShowMoment={(tick) => playback?.seekTick(tick)}
+              onShowLine={onShowLine}
+            />
           </details>
         )}
       </div>
@@ -118,7 +157,9 @@ function presentCount(findings: SubmissionDetail["run"]["findings"]): string {
   const stops = count("stop");
   const warns = count("warn");
   if (stops + warns === 0) return "nothing to mend";
-  return [stops > 0 && (stops === 1 ? "1 stop" : `${stops} stops`), warns > 0 && `${warns} to look at`].filter(Boolean).join(", ");
+  return [stops > 0 && (stops === 1 ? "1 stop" : `${stops} stops`), warns > 0 && `${warns} to look at`]
+    .filter(Boolean)
+    .join(", ");
 }
 
 /** What the teacher must know before marking: it did not run, or not as it did in the student's browser. */
@@ -145,10 +186,11 @@ function RunNotices({ detail, onShowLine }: { detail: SubmissionDetail; onShowLi
       )}
       {submission.hashesAgree === false && (
         <div className="mx-3 mb-2">
-          <Notice title="The server’s run came out different from the student’s screen.">What you see is the server’s run, and it is the one that counts.</Notice>
+          <Notice title="The server’s run came out different from the student’s screen.">
+            What you see is the server’s run, and it is the one that counts.
+          </Notice>
         </div>
       )}
     </>
   );
 }
-

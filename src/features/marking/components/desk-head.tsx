@@ -20,21 +20,36 @@ export function DeskHead({ submission, timeZone, now, position, onPrevious, onNe
   return (
     <div className="flex flex-wrap items-center gap-x-3 gap-y-1 border-b border-line bg-card px-4 py-2 max-wide:gap-x-1.5">
       <Tooltip text="Previous (K)">
-        <IconButton icon="chevron-left" label="Previous in the queue" disabledReason={onPrevious ? null : "This is the first."} onPress={() => onPrevious?.()} />
+        <IconButton
+          icon="chevron-left"
+          label="Previous in the queue"
+          disabledReason={onPrevious ? null : "This is the first."}
+          onPress={() => onPrevious?.()}
+        />
       </Tooltip>
       <h1 tabIndex={-1} className="text-5 max-wide:text-4">
         {submission.showTitle}
       </h1>
       <p className="text-slate max-wide:order-5 max-wide:w-full">
-        {formatNames(submission.authors)} · version {submission.versionNumber}, handed in {presentWhen(submission.handedInAt, now, timeZone)}
+        {formatNames(submission.authors)} · version {submission.versionNumber}, handed in{" "}
+        {presentWhen(submission.handedInAt, now, timeZone)}
       </p>
       <span className="ml-auto text-meta whitespace-nowrap text-slate wide:hidden">{position}</span>
       <span className="flex gap-2 max-wide:order-6 wide:ml-auto">
-        {submission.isLate && <Tag state="plain" icon="clock">Late</Tag>}
+        {submission.isLate && (
+          <Tag state="plain" icon="clock">
+            Late
+          </Tag>
+        )}
         <Tag state={submission.state} />
       </span>
       <Tooltip text="Next (J)">
-        <IconButton icon="chevron-right" label="Next in the queue" disabledReason={onNext ? null : "This is the last."} onPress={() => onNext?.()} />
+        <IconButton
+          icon="chevron-right"
+          label="Next in the queue"
+          disabledReason={onNext ? null : "This is the last."}
+          onPress={() => onNext?.()}
+        />
       </Tooltip>
     </div>
   );

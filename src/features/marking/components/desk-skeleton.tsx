@@ -3,7 +3,10 @@ import { Skeleton, SkeletonGroup } from "../../../components/skeleton.tsx";
 /** The desk's three columns while the queue or a submission is on its way. */
 export function DeskSkeleton() {
   return (
-    <SkeletonGroup label="Loading the marking desk" className="grid flex-1 grid-cols-[222px_minmax(0,1fr)_396px] bg-card max-wide:grid-cols-1">
+    <SkeletonGroup
+      label="Loading the marking desk"
+      className="grid flex-1 grid-cols-[222px_minmax(0,1fr)_396px] bg-card max-wide:grid-cols-1"
+    >
       <h1 className="sr-only" tabIndex={-1}>
         Loading the marking desk
       </h1>

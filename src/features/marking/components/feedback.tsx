@@ -28,7 +28,11 @@ export function Feedback({ detail }: FeedbackProps) {
         </Notice>
       )}
       {submission.state === "revise" && (
-        <Notice tone="warn" icon="turn" title={sentBack > 1 ? "Sent back for another pass." : "Your teacher sent it back for another pass."}>
+        <Notice
+          tone="warn"
+          icon="turn"
+          title={sentBack > 1 ? "Sent back for another pass." : "Your teacher sent it back for another pass."}
+        >
           Read the comments, mend the script in the studio, then hand it in again.
         </Notice>
       )}
@@ -48,22 +52,31 @@ export function Feedback({ detail }: FeedbackProps) {
               const chosen = level === undefined ? undefined : criterion.levels[level - 1];
               return (
                 <li key={criterion.id}>
-                  <span className="font-semibold">{criterion.name}:</span> {chosen ? `${chosen.name}. ${chosen.text}` : "not marked"}
+                  <span className="font-semibold">{criterion.name}:</span>{" "}
+                  {chosen ? `${chosen.name}. ${chosen.text}` : "not marked"}
                 </li>
               );
             })}
           </ul>
-          {mark.note !== "" && <p className="mt-3 max-w-[62ch] whitespace-pre-line border-l-4 border-blue-ink bg-blue-tint px-4 py-3">{mark.note}</p>}
+          {mark.note !== "" && (
+            <p className="mt-3 max-w-[62ch] whitespace-pre-line border-l-4 border-blue-ink bg-blue-tint px-4 py-3">
+              {mark.note}
+            </p>
+          )}
         </Card>
       )}
       {comments.length > 0 && (
         <ol className="space-y-3">
           {comments.map((comment) => (
-            <li key={comment.id} className={`max-w-[72ch] border-l-4 px-4 py-3 ${comment.isTeacher ? "border-blue-ink bg-blue-tint" : "border-rim bg-well"}`}>
+            <li
+              key={comment.id}
+              className={`max-w-[72ch] border-l-4 px-4 py-3 ${comment.isTeacher ? "border-blue-ink bg-blue-tint" : "border-rim bg-well"}`}
+            >
               <p>
                 <span className="font-semibold">{comment.isMine ? "You" : comment.authorName}</span>{" "}
                 <span className="text-soft">
-                  <Anchor comment={comment} showId={submission.showId} /> · version {comment.versionNumber} · {presentWhen(comment.createdAt, now, HERE)}
+                  <Anchor comment={comment} showId={submission.showId} /> · version {comment.versionNumber} ·{" "}
+                  {presentWhen(comment.createdAt, now, HERE)}
                 </span>
               </p>
               <p className="whitespace-pre-line">{comment.body}</p>
@@ -112,7 +125,12 @@ function Answer({ submissionId }: { submissionId: SubmissionDetail["submission"]
         onChange={(event) => setBody(event.target.value)}
         error={send.error ? `${send.error.message} Your answer is still here; try again.` : null}
       />
-      <Button type="submit" icon="send" isPending={send.isPending} disabledReason={body.trim() === "" ? "Write an answer first." : null}>
+      <Button
+        type="submit"
+        icon="send"
+        isPending={send.isPending}
+        disabledReason={body.trim() === "" ? "Write an answer first." : null}
+      >
         Send
       </Button>
     </form>

@@ -42,10 +42,23 @@ export function Inbox({ assignments, timeZone }: InboxProps) {
             title={assignment.title}
             to={desk ?? undefined}
             line={`${assignment.className} · due ${presentDue(assignment.dueAt, timeZone)} · ${presentCounts(assignment)}`}
-            tag={assignment.toMark > 0 ? <Tag state="submitted">{assignment.toMark} to mark</Tag> : desk ? <Tag state="ok">Nothing waits</Tag> : <Tag state="plain">Nothing handed in</Tag>}
+            tag={
+              assignment.toMark > 0 ? (
+                <Tag state="submitted">{assignment.toMark} to mark</Tag>
+              ) : desk ? (
+                <Tag state="ok">Nothing waits</Tag>
+              ) : (
+                <Tag state="plain">Nothing handed in</Tag>
+              )
+            }
             actions={
               desk && (
-                <LinkButton to={desk} look={assignment.toMark > 0 ? "main" : "plain"} icon="pencil" aria-label={`${assignment.toMark > 0 ? "Mark" : "Look at"} ${assignment.title}, ${assignment.className}`}>
+                <LinkButton
+                  to={desk}
+                  look={assignment.toMark > 0 ? "main" : "plain"}
+                  icon="pencil"
+                  aria-label={`${assignment.toMark > 0 ? "Mark" : "Look at"} ${assignment.title}, ${assignment.className}`}
+                >
                   {assignment.toMark > 0 ? "Mark" : "Look"}
                 </LinkButton>
               )
@@ -69,7 +82,10 @@ function presentCounts({ sentBack, marked }: MarkingInbox[number]): string {
 
 export function InboxSkeleton() {
   return (
-    <SkeletonGroup label="Loading what waits for a mark" className="divide-y divide-line rounded-sheet border border-line bg-card">
+    <SkeletonGroup
+      label="Loading what waits for a mark"
+      className="divide-y divide-line rounded-sheet border border-line bg-card"
+    >
       {["first", "second", "third"].map((row) => (
         <div key={row} className="space-y-3 px-4 py-4">
           <Skeleton className="w-64 max-w-full" />

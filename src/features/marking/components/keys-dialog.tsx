@@ -26,8 +26,15 @@ export function KeysDialog({ isOpen, onClose }: KeysDialogProps) {
           </div>
         ))}
       </dl>
-      <p className="text-soft">Inside a text field the keys write. In the comment box Ctrl and Enter save, Escape closes.</p>
-      <Checkbox label="Use single keys" hint="Turn them off if keys are pressed by chance or you speak to the computer. ? still opens this list." checked={areKeysOn} onChange={(event) => setKeysOn(event.target.checked)} />
+      <p className="text-soft">
+        Inside a text field the keys write. In the comment box Ctrl and Enter save, Escape closes.
+      </p>
+      <Checkbox
+        label="Use single keys"
+        hint="Turn them off if keys are pressed by chance or you speak to the computer. ? still opens this list."
+        checked={areKeysOn}
+        onChange={(event) => setKeysOn(event.target.checked)}
+      />
     </Dialog>
   );
 }

@@ -49,7 +49,22 @@ const HINTS = [
 ];
 
 /** Everything for one mark on one screen: queue, show with script and comments, rubric with evidence. */
-export function MarkingDesk({ queue, detail, timeZone, now, playback, timeline, song, stage, transport, renderScript, onShowLine, forwarding, toRow, onGo }: MarkingDeskProps) {
+export function MarkingDesk({
+  queue,
+  detail,
+  timeZone,
+  now,
+  playback,
+  timeline,
+  song,
+  stage,
+  transport,
+  renderScript,
+  onShowLine,
+  forwarding,
+  toRow,
+  onGo,
+}: MarkingDeskProps) {
   const { submission, rubric } = detail;
   const draft = useMarkDraft(submission.id, detail.mark);
   const comments = useComments(submission.id);
@@ -73,7 +88,8 @@ export function MarkingDesk({ queue, detail, timeZone, now, playback, timeline, 
     if (action.kind === "next" && next) onGo(next.submissionId);
     if (action.kind === "previous" && previous) onGo(previous.submissionId);
     if (action.kind === "play") playback?.toggle();
-    if (action.kind === "comment") comments.write(playback ? { kind: "moment", tick: Math.round(playback.getTick()) } : { kind: "whole" });
+    if (action.kind === "comment")
+      comments.write(playback ? { kind: "moment", tick: Math.round(playback.getTick()) } : { kind: "whole" });
     if (action.kind === "keys") setDialog("keys");
     if (action.kind === "release" && isOpen && obstacle === null) void acts.release();
     if (action.kind === "level" && isOpen && currentId !== null) {

@@ -40,7 +40,13 @@ export function MomentsStrip({ picture, label, comments, playback, hereId, onSel
         }}
       >
         <PictureRibbon picture={picture} size="marking" isSquare label={label} />
-        {playback && <span ref={lineRef} aria-hidden="true" className="pointer-events-none absolute inset-y-0 left-0 w-0.5 -translate-x-1/2 bg-[#fff7e6] shadow-[0_0_0_1.5px_rgb(10_12_24/0.55)]" />}
+        {playback && (
+          <span
+            ref={lineRef}
+            aria-hidden="true"
+            className="pointer-events-none absolute inset-y-0 left-0 w-0.5 -translate-x-1/2 bg-[#fff7e6] shadow-[0_0_0_1.5px_rgb(10_12_24/0.55)]"
+          />
+        )}
       </div>
       {flags.map((placed) => {
         const isHere = placed.comment.id === hereId;
@@ -51,10 +57,19 @@ export function MomentsStrip({ picture, label, comments, playback, hereId, onSel
             aria-pressed={isHere}
             aria-label={`Comment ${placed.number}, ${placed.place}`}
             onClick={() => onSelect(placed)}
-            style={{ left: `clamp(12px, ${((placed.tick ?? 0) / (playback?.endTick ?? 1)) * 100}%, calc(100% - 12px))` }}
+            style={{
+              left: `clamp(12px, ${((placed.tick ?? 0) / (playback?.endTick ?? 1)) * 100}%, calc(100% - 12px))`,
+            }}
             className="absolute top-[60px] grid h-6 min-w-6 -translate-x-1/2 place-items-center text-1 font-semibold before:absolute before:bottom-full before:left-1/2 before:h-[60px] before:border-l-[1.5px] before:border-dashed before:border-on-dusk"
           >
-            <span className={joinClasses("z-1 grid h-[18px] min-w-[19px] place-items-center rounded-[2px] text-on-lamp", isHere ? "bg-lamp" : "bg-on-dusk")}>{placed.number}</span>
+            <span
+              className={joinClasses(
+                "z-1 grid h-[18px] min-w-[19px] place-items-center rounded-[2px] text-on-lamp",
+                isHere ? "bg-lamp" : "bg-on-dusk",
+              )}
+            >
+              {placed.number}
+            </span>
           </button>
         );
       })}

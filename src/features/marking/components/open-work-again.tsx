@@ -15,8 +15,20 @@ export function OpenWorkAgain({ submissionId, title }: OpenWorkAgainProps) {
   const reopen = useReopenForDesk();
   return (
     <div className="space-y-3">
-      <p className="text-soft">Open the work again to send it back to its authors with this note. The released mark is hidden until you release it anew.</p>
-      <Button look="main" icon="turn" isPending={reopen.isPending} onPress={() => reopen.mutate(submissionId, { onSuccess: (assignmentId) => void navigate(`/marking/${assignmentId}/${submissionId}`) })}>
+      <p className="text-soft">
+        Open the work again to send it back to its authors with this note. The released mark is hidden until you release
+        it anew.
+      </p>
+      <Button
+        look="main"
+        icon="turn"
+        isPending={reopen.isPending}
+        onPress={() =>
+          reopen.mutate(submissionId, {
+            onSuccess: (assignmentId) => void navigate(`/marking/${assignmentId}/${submissionId}`),
+          })
+        }
+      >
         Open the work again
       </Button>
       {reopen.error && (

@@ -48,8 +48,17 @@ export function QueueList({ rows, hereId, timeZone, now, toRow }: QueueListProps
   );
 }
 
-function presentRow(row: QueueRow, now: number, timeZone: string): { icon: IconName; text: string; state: string | null } {
-  if (row.state === "marked") return { icon: "tick", text: row.points ? `${row.points.got} of ${row.points.of}` : "marked", state: row.points ? "marked" : null };
+function presentRow(
+  row: QueueRow,
+  now: number,
+  timeZone: string,
+): { icon: IconName; text: string; state: string | null } {
+  if (row.state === "marked")
+    return {
+      icon: "tick",
+      text: row.points ? `${row.points.got} of ${row.points.of}` : "marked",
+      state: row.points ? "marked" : null,
+    };
   if (row.state === "revise") return { icon: "turn", text: "sent back", state: null };
   if (!row.isOk) return { icon: "warn", text: "does not run", state: "submitted" };
   if (row.isLate) return { icon: "clock", text: "late", state: "submitted" };

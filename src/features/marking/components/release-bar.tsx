@@ -37,11 +37,33 @@ export function ReleaseBar(props: ReleaseBarProps) {
   );
 }
 
-function OpenMark({ authors, note, onNoteChange, noteError, points, save, onRetrySave, releaseObstacle, onRelease, onSendBack, pending, forwarding }: ReleaseBarProps) {
+function OpenMark({
+  authors,
+  note,
+  onNoteChange,
+  noteError,
+  points,
+  save,
+  onRetrySave,
+  releaseObstacle,
+  onRelease,
+  onSendBack,
+  pending,
+  forwarding,
+}: ReleaseBarProps) {
   const saved = presentSave(save);
   return (
     <>
-      <TextArea id="mark-note" label={`To ${authors}`} rows={2} value={note} maxLength={2000} onChange={(event) => onNoteChange(event.target.value)} error={noteError} className="[&_textarea]:max-h-32 [&_textarea]:min-h-14" />
+      <TextArea
+        id="mark-note"
+        label={`To ${authors}`}
+        rows={2}
+        value={note}
+        maxLength={2000}
+        onChange={(event) => onNoteChange(event.target.value)}
+        error={noteError}
+        className="[&_textarea]:max-h-32 [&_textarea]:min-h-14"
+      />
       <div className="mt-2 flex flex-wrap items-center gap-2">
         <strong className="mr-auto font-head text-[1.375rem]/none font-[650] whitespace-nowrap tabular-nums">
           {points.got} of {points.of}
@@ -49,12 +71,24 @@ function OpenMark({ authors, note, onNoteChange, noteError, points, save, onRetr
         <Button icon="turn" onPress={onSendBack} isPending={pending === "send-back"}>
           Send back
         </Button>
-        <Button look="main" icon="tick" onPress={onRelease} isPending={pending === "release"} disabledReason={releaseObstacle}>
+        <Button
+          look="main"
+          icon="tick"
+          onPress={onRelease}
+          isPending={pending === "release"}
+          disabledReason={releaseObstacle}
+        >
           Release mark
         </Button>
       </div>
       <div className="mt-2 flex flex-wrap items-center gap-x-3 gap-y-1 text-meta">
-        <p role="status" className={joinClasses("flex min-h-6 items-center gap-1.5", saved.isCareful ? "font-semibold text-lamp-ink" : "text-slate")}>
+        <p
+          role="status"
+          className={joinClasses(
+            "flex min-h-6 items-center gap-1.5",
+            saved.isCareful ? "font-semibold text-lamp-ink" : "text-slate",
+          )}
+        >
           {saved.isCareful && <Icon name="warn" className="size-4" />}
           {saved.text}
         </p>

@@ -21,7 +21,17 @@ export interface RubricPanelProps extends Omit<EvidenceListProps, "evidence"> {
 }
 
 /** The rubric with its evidence: the system counts, the teacher decides. No level is chosen beforehand. */
-export function RubricPanel({ rubric, levels, evidence, currentId, onCurrentChange, onLevelChange, isFixed, children, ...places }: RubricPanelProps) {
+export function RubricPanel({
+  rubric,
+  levels,
+  evidence,
+  currentId,
+  onCurrentChange,
+  onLevelChange,
+  isFixed,
+  children,
+  ...places
+}: RubricPanelProps) {
   const ofWhole = evidence[""] ?? [];
   return (
     <>
@@ -35,9 +45,17 @@ export function RubricPanel({ rubric, levels, evidence, currentId, onCurrentChan
           key={criterion.id}
           data-criterion={criterion.id}
           onFocus={() => onCurrentChange(criterion.id)}
-          className={joinClasses("border-b border-line px-4 pt-2 pb-2.5", !isFixed && currentId === criterion.id && "bg-card shadow-[inset_4px_0_0_var(--color-blue-ink)]")}
+          className={joinClasses(
+            "border-b border-line px-4 pt-2 pb-2.5",
+            !isFixed && currentId === criterion.id && "bg-card shadow-[inset_4px_0_0_var(--color-blue-ink)]",
+          )}
         >
-          <CriterionRow criterion={criterion} level={levels[criterion.id] ?? null} isFixed={isFixed} onLevelChange={(level) => onLevelChange(criterion.id, level)} />
+          <CriterionRow
+            criterion={criterion}
+            level={levels[criterion.id] ?? null}
+            isFixed={isFixed}
+            onLevelChange={(level) => onLevelChange(criterion.id, level)}
+          />
           <EvidenceList evidence={evidence[criterion.id] ?? []} {...places} />
         </div>
       ))}

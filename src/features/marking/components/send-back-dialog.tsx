@@ -42,7 +42,9 @@ function SendBackForm({ isOpen, authors, note, isPending, error, onSend, onClose
         </>
       }
     >
-      <p>They see your note and your comments, and can work on the show and hand it in again. Your levels stay with you.</p>
+      <p>
+        They see your note and your comments, and can work on the show and hand it in again. Your levels stay with you.
+      </p>
       <TextArea
         label="What should the next pass change?"
         autoFocus

@@ -16,16 +16,30 @@ export interface PlacedComment {
 }
 
 /** The comments in reading order: down the script, then those on the whole. `timeline` is null when the script did not run. */
-export function placeComments(comments: readonly Comment[], timeline: Timeline | null, song: Pick<BeatMap, "bars">): readonly PlacedComment[] {
+export function placeComments(
+  comments: readonly Comment[],
+  timeline: Timeline | null,
+  song: Pick<BeatMap, "bars">,
+): readonly PlacedComment[] {
   return comments
-    .map((comment) => ({ comment, ...placeAnchor(comment.anchor, timeline), place: presentAnchor(comment.anchor, song) }))
-    .sort((a, b) => (a.line ?? Infinity) - (b.line ?? Infinity) || (a.tick ?? Infinity) - (b.tick ?? Infinity) || a.comment.createdAt - b.comment.createdAt)
+    .map((comment) => ({
+      comment,
+      ...placeAnchor(comment.anchor, timeline),
+      place: presentAnchor(comment.anchor, song),
+    }))
+    .sort(
+      (a, b) =>
+        (a.line ?? Infinity) - (b.line ?? Infinity) ||
+        (a.tick ?? Infinity) - (b.tick ?? Infinity) ||
+        a.comment.createdAt - b.comment.createdAt,
+    )
     .map((placed, index) => ({ ...placed, number: index + 1 }));
 }
 
 function placeAnchor(anchor: CommentAnchor, timeline: Timeline | null): { line: number | null; tick: number | null } {
   if (anchor.kind === "whole") return { line: null, tick: null };
-  if (anchor.kind === "lines") return { line: anchor.to, tick: timeline && findFirstTick(timeline, anchor.from, anchor.to) };
+  if (anchor.kind === "lines")
+    return { line: anchor.to, tick: timeline && findFirstTick(timeline, anchor.from, anchor.to) };
   return { line: timeline && findLineAt(timeline, anchor.tick), tick: anchor.tick };
 }
 
@@ -41,7 +55,8 @@ function findFirstTick(timeline: Timeline, from: number, to: number): number | n
 function findLineAt(timeline: Timeline, tick: number): number | null {
   const { cues, chains } = timeline;
   let last: number | null = null;
-  for (let cue = 0; cue < cues.count && (cues.tick[cue] ?? 0) <= tick; cue += 1) last = chains[cues.chain[cue] ?? -1]?.at(-1) ?? last;
+  for (let cue = 0; cue < cues.count && (cues.tick[cue] ?? 0) <= tick; cue += 1)
+    last = chains[cues.chain[cue] ?? -1]?.at(-1) ?? last;
   return last;
 }
 

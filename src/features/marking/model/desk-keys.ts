@@ -4,7 +4,11 @@ export type DeskAction =
   | { readonly kind: "level"; readonly level: number };
 
 /** The keys as the desk explains them. */
-export const DESK_KEYS: readonly { readonly keys: readonly string[]; readonly does: string; readonly short: string | null }[] = [
+export const DESK_KEYS: readonly {
+  readonly keys: readonly string[];
+  readonly does: string;
+  readonly short: string | null;
+}[] = [
   { keys: ["J"], does: "Next in the queue", short: "next" },
   { keys: ["K"], does: "Previous in the queue", short: "previous" },
   { keys: ["1", "2", "3", "4"], does: "Level of the marked criterion, then on to the next criterion", short: "level" },
@@ -26,11 +30,14 @@ const ACTIONS: Readonly<Record<string, DeskAction>> = {
   "4": { kind: "level", level: 4 },
 };
 
-const WRITES = "input:not([type=radio]):not([type=checkbox]):not([type=range]), textarea, select, [contenteditable=true], [role=dialog], [role=alertdialog], [role=menu]";
+const WRITES =
+  "input:not([type=radio]):not([type=checkbox]):not([type=range]), textarea, select, [contenteditable=true], [role=dialog], [role=alertdialog], [role=menu]";
 const TAKES_SPACE = `${WRITES}, button, a, input, summary, [role=button]`;
 
 /** The act that a key press asks for, or null: keys are text inside fields, and Space belongs to a button that has the focus. */
-export function parseDeskKey(event: Pick<KeyboardEvent, "key" | "ctrlKey" | "metaKey" | "altKey" | "target">): DeskAction | null {
+export function parseDeskKey(
+  event: Pick<KeyboardEvent, "key" | "ctrlKey" | "metaKey" | "altKey" | "target">,
+): DeskAction | null {
   if (event.ctrlKey || event.metaKey || event.altKey) return null;
   const target = event.target instanceof Element ? event.target : null;
   if (event.key === " ") return target?.closest(TAKES_SPACE) ? null : { kind: "play" };

@@ -36,7 +36,10 @@ describe("pressLevel", () => {
   it("sets the current criterion and goes on to the next", () => {
     const first = pressLevel(rubric, { levels: {}, currentId: "song" }, 3);
     expect(first).toEqual({ levels: { song: 3 }, currentId: "loop" });
-    expect(pressLevel(rubric, { ...first, currentId: "square" }, 4)).toEqual({ levels: { song: 3, square: 4 }, currentId: "square" });
+    expect(pressLevel(rubric, { ...first, currentId: "square" }, 4)).toEqual({
+      levels: { song: 3, square: 4 },
+      currentId: "square",
+    });
   });
   it("ignores levels that the rubric does not have", () => {
     const state = { levels: {}, currentId: "song" };
@@ -56,7 +59,8 @@ describe("pressLevel", () => {
 });
 
 describe("parseDeskKey", () => {
-  const press = (key: string, target: EventTarget | null = document.body, more = {}) => parseDeskKey({ key, target, ctrlKey: false, metaKey: false, altKey: false, ...more });
+  const press = (key: string, target: EventTarget | null = document.body, more = {}) =>
+    parseDeskKey({ key, target, ctrlKey: false, metaKey: false, altKey: false, ...more });
   const buildElement = (html: string) => {
     const holder = document.createElement("div");
     holder.innerHTML = html;

@@ -9,9 +9,15 @@ class Refusal extends Error {
   readonly status = 409;
 }
 
+const accept = () => Promise.resolve();
+
 function buildStorage(): Pick<Storage, "getItem" | "setItem" | "removeItem"> {
   const kept = new Map<string, string>();
-  return { getItem: (key) => kept.get(key) ?? null, setItem: (key, value) => void kept.set(key, value), removeItem: (key) => void kept.delete(key) };
+  return {
+    getItem: (key) => kept.get(key) ?? null,
+    setItem: (key, value) => void kept.set(key, value),
+    removeItem: (key) => void kept.delete(key),
+  };
 }
 
 function buildDraft(send: (text: MarkText) => Promise<void>, saved = EMPTY, storage = buildStorage()) {
@@ -39,7 +45,7 @@ describe("MarkDraft", () => {
   });
 
   it("sends once when the typing rests, and then says saved", async () => {
-    const { draft, sent, onSaved, storage } = buildDraft(async () => {});
+    const { draft, sent, onSaved, storage } = buildDraft(accept);
     draft.setLevel("song", 3);
     draft.setNote("The foxes run.");
     expect(draft.getState().save.kind).toBe("waiting");
@@ -53,9 +59,7 @@ describe("MarkDraft", () => {
 
   it("keeps the text on this computer and tries again while the server does not answer", async () => {
     let isDown = true;
-    const { draft, sent, storage } = buildDraft(async () => {
-      if (isDown) throw new Error("offline");
-    });
+    const { draft, sent, storage } = buildDraft(() => (isDown ? Promise.reject(new Error("offline")) : accept()));
     draft.setLevel("song", 2);
     await vi.advanceTimersByTimeAsync(700);
     expect(draft.getState().save.kind).toBe("retrying");
@@ -67,9 +71,7 @@ describe("MarkDraft", () => {
   });
 
   it("says why when the server refuses, and does not ask again", async () => {
-    const { draft, sent } = buildDraft(async () => {
-      throw new Refusal("The mark is released.");
-    });
+    const { draft, sent } = buildDraft(() => Promise.reject(new Refusal("The mark is released.")));
     draft.setLevel("song", 2);
     await vi.advanceTimersByTimeAsync(60_000);
     expect(sent).toHaveLength(1);
@@ -93,25 +95,23 @@ describe("MarkDraft", () => {
   it("takes up text that was never sent", async () => {
     const storage = buildStorage();
     storage.setItem(KEY, JSON.stringify({ levels: { song: 4 }, note: "late" }));
-    const { draft, sent } = buildDraft(async () => {}, EMPTY, storage);
+    const { draft, sent } = buildDraft(accept, EMPTY, storage);
     expect(draft.getState().text.note).toBe("late");
     await vi.advanceTimersByTimeAsync(10);
     expect(sent).toHaveLength(1);
   });
 
   it("flushes at once and tells whether all is saved", async () => {
-    const { draft } = buildDraft(async () => {});
+    const { draft } = buildDraft(accept);
     draft.setNote("now");
     await expect(draft.flush()).resolves.toBe(true);
-    const down = buildDraft(async () => {
-      throw new Error("offline");
-    });
+    const down = buildDraft(() => Promise.reject(new Error("offline")));
     down.draft.setNote("now");
     await expect(down.draft.flush()).resolves.toBe(false);
   });
 
   it("adopts the server's mark only while nothing is unsent", () => {
-    const { draft } = buildDraft(async () => {});
+    const { draft } = buildDraft(accept);
     draft.adopt({ levels: { song: 1 }, note: "" });
     expect(draft.getState().text.levels).toEqual({ song: 1 });
     draft.setNote("mine");

@@ -44,7 +44,10 @@ export class MarkDraft {
   constructor(saved: MarkText, deps: MarkDraftDeps) {
     this.#deps = deps;
     const kept = readKept(deps);
-    this.#state = kept && !isSame(kept, saved) ? { text: kept, save: { kind: "waiting" } } : { text: saved, save: { kind: "saved" } };
+    this.#state =
+      kept && !isSame(kept, saved)
+        ? { text: kept, save: { kind: "waiting" } }
+        : { text: saved, save: { kind: "saved" } };
     if (this.#state.save.kind === "waiting") this.#sendAfter(0);
     else this.#forget();
   }
@@ -66,7 +69,8 @@ export class MarkDraft {
 
   /** Takes over what the server holds now, unless there is unsent text. */
   adopt(saved: MarkText): void {
-    if (this.#state.save.kind === "saved" && !isSame(saved, this.#state.text)) this.#set({ text: saved, save: { kind: "saved" } });
+    if (this.#state.save.kind === "saved" && !isSame(saved, this.#state.text))
+      this.#set({ text: saved, save: { kind: "saved" } });
   }
 
   /** Sends at once what is not sent; resolves to whether the server holds everything. */
@@ -157,13 +161,20 @@ function readKept({ storage, storageKey }: MarkDraftDeps): MarkText | null {
 function isMarkText(value: unknown): value is MarkText {
   if (typeof value !== "object" || value === null || !("note" in value) || !("levels" in value)) return false;
   const { note, levels } = value;
-  return typeof note === "string" && typeof levels === "object" && levels !== null && Object.values(levels).every((level) => typeof level === "number");
+  return (
+    typeof note === "string" &&
+    typeof levels === "object" &&
+    levels !== null &&
+    Object.values(levels).every((level) => typeof level === "number")
+  );
 }
 
 /** The server's reason when it refused (a retry would be refused again); null when it was not reached or broke. */
 function readRefusal(error: unknown): string | null {
   const status = error instanceof Error && "status" in error ? error.status : null;
-  return typeof status === "number" && status >= 400 && status < 500 && status !== 401 && status !== 429 ? (error as Error).message : null;
+  return typeof status === "number" && status >= 400 && status < 500 && status !== 401 && status !== 429
+    ? (error as Error).message
+    : null;
 }
 
 /** The save state in words, always shown. */
@@ -175,7 +186,10 @@ export function presentSave(save: MarkSave): { readonly text: string; readonly i
     case "sending":
       return { text: "Saving", isCareful: false };
     case "retrying":
-      return { text: "Only on this computer. The server does not answer; it is sent again by itself.", isCareful: true };
+      return {
+        text: "Only on this computer. The server does not answer; it is sent again by itself.",
+        isCareful: true,
+      };
     case "refused":
       return { text: `Not saved: ${save.reason}`, isCareful: true };
   }

@@ -1,10 +1,10 @@
 import type { Rubric } from "../../../../shared/contracts/assignments.ts";
-import type { QueueRow } from "../../../../shared/contracts/marking.ts";
+import type { QueueRow, SubmissionDetail } from "../../../../shared/contracts/marking.ts";
 
 /** A row of the queue; `overrides` names what the test is about. */
 export function buildQueueRow(id: string, overrides: Partial<QueueRow> = {}): QueueRow {
   return {
-    submissionId: id as QueueRow["submissionId"],
+    submissionId: id,
     authors: [id],
     showTitle: `Show of ${id}`,
     state: "submitted",
@@ -28,4 +28,42 @@ export function buildRubric(): Rubric {
     { id: "loop", name: "Uses a loop well", levels },
     { id: "square", name: "Uses the square", levels },
   ];
+}
+
+/** A submission that waits for a mark, with one piece of evidence; `overrides` names what the test is about. */
+export function buildSubmission(id: string, overrides: Partial<SubmissionDetail> = {}): SubmissionDetail {
+  return {
+    submission: {
+      id: id,
+      assignmentId: "chorus",
+      assignmentTitle: "A show with a chorus",
+      classId: "class-7b",
+      className: "7B",
+      showId: "show-foxes",
+      showTitle: "Nine Foxes",
+      authors: ["Wren", "Idris"],
+      state: "submitted",
+      versionId: "version-3",
+      versionNumber: 3,
+      handedInAt: Date.parse("2026-12-01T19:10:00Z"),
+      isLate: false,
+      hashesAgree: true,
+    },
+    run: {
+      isOk: true,
+      problem: null,
+      hash: null,
+      cueCount: 120,
+      findings: [],
+      seconds: 144,
+      description: "Starts dark.",
+    },
+    rubric: buildRubric(),
+    comments: [],
+    mark: null,
+    evidence: { loop: [{ kind: "tick", text: "A loop, run 9 times", lines: [12], moments: [] }] },
+    forward: null,
+    history: [],
+    ...overrides,
+  };
 }

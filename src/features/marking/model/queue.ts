@@ -5,7 +5,10 @@ const ORDER: Readonly<Record<WorkState, number>> = { submitted: 0, working: 1, r
 
 /** What waits for a mark first (the longest waiting at the top), then what was sent back, then what is marked. */
 export function orderQueue(rows: readonly QueueRow[]): readonly QueueRow[] {
-  return [...rows].sort((a, b) => ORDER[a.state] - ORDER[b.state] || a.handedInAt - b.handedInAt || a.submissionId.localeCompare(b.submissionId));
+  return [...rows].sort(
+    (a, b) =>
+      ORDER[a.state] - ORDER[b.state] || a.handedInAt - b.handedInAt || a.submissionId.localeCompare(b.submissionId),
+  );
 }
 
 /** The row so many steps on in the order shown; null at either end. */

@@ -13,7 +13,10 @@ export interface Points {
 
 /** Points so far: the levels chosen, of four for every criterion. */
 export function countPoints(rubric: Rubric, levels: Levels): Points {
-  return { got: rubric.reduce((sum, criterion) => sum + (levels[criterion.id] ?? 0), 0), of: rubric.length * LEVEL_COUNT };
+  return {
+    got: rubric.reduce((sum, criterion) => sum + (levels[criterion.id] ?? 0), 0),
+    of: rubric.length * LEVEL_COUNT,
+  };
 }
 
 /** The criteria that have no level yet, in the rubric's order. */

@@ -16,8 +16,21 @@ export interface ViewerStageProps {
 /** The window onto the square where a show is watched: the studio's, without its mount. */
 export function ViewerStage({ viewer, layout, description, onGoToLine, className }: ViewerStageProps) {
   return (
-    <div className={joinClasses("grid grid-cols-[minmax(0,1fr)] [&_.studio-window]:rounded-none [&_.studio-window]:border-0 [&_.studio-window]:shadow-none [&_.studio-window]:grid-rows-[minmax(0,1fr)_40px]!", className)}>
-      <StageWindow layout={layout} player={viewer.player} isGentle={viewer.isGentle} gentleReason={viewer.gentleReason} onGentle={viewer.setGentle} onGoToLine={onGoToLine} description={description} />
+    <div
+      className={joinClasses(
+        "grid grid-cols-[minmax(0,1fr)] [&_.studio-window]:rounded-none [&_.studio-window]:border-0 [&_.studio-window]:shadow-none [&_.studio-window]:grid-rows-[minmax(0,1fr)_40px]!",
+        className,
+      )}
+    >
+      <StageWindow
+        layout={layout}
+        player={viewer.player}
+        isGentle={viewer.isGentle}
+        gentleReason={viewer.gentleReason}
+        onGentle={viewer.setGentle}
+        onGoToLine={onGoToLine}
+        description={description}
+      />
     </div>
   );
 }

@@ -34,8 +34,18 @@ export function ViewerTransport({ player, song, songTitle }: ViewerTransportProp
     [player, song],
   );
   return (
-    <div role="group" aria-label="Play the show" className="flex items-center gap-3 on-dusk bg-transport px-3 py-1.5 text-[#d5daee]">
-      <IconButton look="lamp" icon={isOn ? "pause" : "play"} label={isOn ? "Pause" : "Play"} aria-keyshortcuts="Space" onPress={() => player.transport.toggle()} />
+    <div
+      role="group"
+      aria-label="Play the show"
+      className="flex items-center gap-3 on-dusk bg-transport px-3 py-1.5 text-[#d5daee]"
+    >
+      <IconButton
+        look="lamp"
+        icon={isOn ? "pause" : "play"}
+        label={isOn ? "Pause" : "Play"}
+        aria-keyshortcuts="Space"
+        onPress={() => player.transport.toggle()}
+      />
       <span ref={clockRef} className="min-w-40 whitespace-nowrap tabular-nums" />
       <input
         ref={sliderRef}
