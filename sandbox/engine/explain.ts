@@ -198,6 +198,8 @@ function explainThrown(compiled: CompiledScript, site: Site, failure: GuestFailu
   return createProblem("thrown", failure.message === undefined || failure.message === "" ? {} : { message: failure.message }, place);
 }
 
+const TOO_BIG = ["out of memory", "invalid array length", "string too long", "array too large", "too many arguments", "invalid repeat count"];
+
 /** An error of QuickJS itself, by its own words; those are pinned with the engine and covered by tests. */
 function explainEngine(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
   const message = failure.message ?? "";
@@ -205,8 +207,7 @@ function explainEngine(compiled: CompiledScript, site: Site, failure: GuestFailu
   const inStack = failure.stack === undefined ? null : placeInStack(compiled, failure.stack);
   const place = { ...(inStack ?? placeOfSite(compiled, site)), details };
   if (message.includes("stack overflow")) return createProblem("calls-itself", { name: functionName(compiled, site.node) }, { ...placeOfSite(compiled, site), details });
-  if (message.includes("out of memory") || message.includes("invalid array length") || message.includes("string too long") || message.includes("array too large"))
-    return createProblem("too-big", {}, place);
+  if (TOO_BIG.some((words) => message.includes(words))) return createProblem("too-big", {}, place);
   if (message.includes("is not initialized")) return createProblem("not-made-yet", { name: quoted(message) ?? place.excerpt }, place);
   if (failure.name === "ReferenceError") return createProblem("out-of-reach", { name: quoted(message) ?? place.excerpt }, place);
   if (message.includes("read-only") || message.includes("not extensible") || message.includes("no setter")) return createProblem("can-not-change", {}, place);

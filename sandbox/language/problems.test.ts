@@ -83,7 +83,7 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
   ["not-a-function", "2:1", "const x = 3;\nx();"],
   ["not-a-list", "1:17", "for (const x of 3) wait(1);"],
   ["can-not-change", "1:20", "song.hits(\"drums\").push(3);"],
-  ["thrown", "2:1", "wait(1);\nthrow new Error(\"no more\");", "Your script stopped itself here. It says: no more"],
+  ["thrown", "2:1", "wait(1);\nthrow new Error(\"no more\");", "Your script stopped itself here. It says \"no more\"."],
   ["thrown", "1:1", "throw 3;"],
   ["no-import", "1:1", "import x from \"y\";"],
   ["no-import", "1:1", "export const a = 1;"],

@@ -1,6 +1,7 @@
 import { Worker } from "node:worker_threads";
 import { createStoppedOutcome } from "../../sandbox/engine/stopped.ts";
 import type { ChildMessage, RunRequest, ThreadMessage } from "./messages.ts";
+import { bundleWorker } from "./worker-bundle.ts";
 
 /**
  * The child process of the pool: a few worker threads, one more than run at once, so that a thread
@@ -8,15 +9,7 @@ import type { ChildMessage, RunRequest, ThreadMessage } from "./messages.ts";
  * again. An abort of the engine takes this process down and not the server.
  */
 const THREADS = Number(process.env["DUSKBELL_RUN_THREADS"] ?? 2) + 1;
-/** tsx does not reach into worker threads by itself: each registers it before it loads the worker. */
-const BOOT = `
-  const { api, worker } = require("node:worker_threads").workerData;
-  import(api).then(({ register }) => { register(); return import(worker); });
-`;
-const WORKER_DATA = {
-  api: import.meta.resolve("tsx/esm/api"),
-  worker: new URL("./run.worker.ts", import.meta.url).href,
-};
+const code = await bundleWorker();
 /** Threads that may fail in a row before one is ready; then the process gives up and its parent decides. */
 const MAX_FAILED_STARTS = 3;
 let failedStarts = 0;
@@ -30,7 +23,7 @@ function send(message: ChildMessage): void {
 
 /** A worker thread and the run it is busy with. */
 class Thread {
-  readonly #worker = new Worker(BOOT, { eval: true, workerData: WORKER_DATA, resourceLimits: { maxOldGenerationSizeMb: 256 } });
+  readonly #worker = new Worker(code, { eval: true, execArgv: [], resourceLimits: { maxOldGenerationSizeMb: 256 } });
   #request: RunRequest | null = null;
   #timer: NodeJS.Timeout | undefined;
   #isReady = false;

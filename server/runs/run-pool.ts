@@ -63,7 +63,7 @@ interface Job {
 
 /** Gives a pool; its child process starts at once, so that the first run finds it warm. */
 export function createRunPool(options: RunPoolOptions = {}): RunPool {
-  return new ChildRunPool(options.threads ?? 2, options.deadlineMs ?? 3000, options.maxWaiting ?? 200);
+  return new ChildRunPool(options.threads ?? 2, options.deadlineMs ?? 5000, options.maxWaiting ?? 200);
 }
 
 class ChildRunPool implements RunPool {

@@ -4,6 +4,9 @@ import { rolldown } from "rolldown";
 
 const ENTRANCE = fileURLToPath(new URL("../../sandbox/engine/library/main.ts", import.meta.url));
 
+/** What the library keeps for itself before it takes it from the scripts' realm (see `library/harden.ts`). */
+const OWN_GLOBALS = ["Reflect", "Symbol", "Uint8Array", "Uint16Array", "Uint32Array"];
+
 /** Where the bundled library is kept. */
 export const GENERATED_LIBRARY = fileURLToPath(new URL("../../sandbox/engine/library.generated.ts", import.meta.url));
 
@@ -16,7 +19,7 @@ export async function bundleLibrary(): Promise<string> {
   const { output } = await build.generate({
     format: "iife",
     name: "library",
-    banner: "(() => {",
+    banner: `(() => { const { ${OWN_GLOBALS.join(", ")} } = globalThis;`,
     footer: "return library.library; })()",
     comments: false,
     minify: { compress: false, mangle: false, codegen: { removeWhitespace: true } },

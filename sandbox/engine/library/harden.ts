@@ -1,7 +1,8 @@
 /**
  * Closes the realm before a script runs: no way to compile text, no shared prototype that can be
  * changed, no clock and no second source of luck. The engine leaves out Date, Proxy, WeakRef and
- * promises when it makes the realm (see `engine.ts`).
+ * promises when it makes the realm (see `runtime.ts`). The bundle keeps the library's own copies of
+ * the globals that it goes on using.
  */
 
 /** Globals that stay: what the language has, and what the library itself was built on. */
@@ -28,8 +29,6 @@ const KEPT = new Set([
   "parseInt",
   "undefined",
 ]);
-
-const { ownKeys } = Reflect;
 
 /** Prototypes without a global name, by one of their values. */
 function hiddenPrototypes(): object[] {
@@ -82,7 +81,7 @@ function freezeDeep(root: unknown): void {
     seen.add(value);
     Object.freeze(value);
     waiting.push(Object.getPrototypeOf(value));
-    for (const key of ownKeys(value)) {
+    for (const key of Reflect.ownKeys(value)) {
       const held = Object.getOwnPropertyDescriptor(value, key);
       if (held !== undefined) waiting.push(held.value, held.get, held.set);
     }
@@ -104,12 +103,10 @@ export function harden(random: () => number, roots: readonly unknown[]): void {
   }
   for (const proto of hidden) freezeDeep(proto);
   const globals = globalThis as { [name: string]: unknown };
-  for (const key of ownKeys(globals)) {
-    if (typeof key === "string" && KEPT.has(key)) freezeDeep(globals[key]);
-    else {
-      freezeDeep(globals[key as string]);
-      delete globals[key as string];
-    }
+  for (const key of Reflect.ownKeys(globals)) {
+    // What goes is frozen too: a value of the library may still lead to it.
+    if (key !== "globalThis") freezeDeep(globals[key as string]);
+    if (typeof key !== "string" || !KEPT.has(key)) delete globals[key as string];
   }
   for (const root of roots) freezeDeep(root);
   Object.freeze(globalThis);

@@ -12,8 +12,6 @@ const FADE = 2;
 const PULSE = 3;
 const COLOUR = 4;
 const FULL = 100;
-/** Kept, since a script's realm has no `Symbol`. */
-const iterator: typeof Symbol.iterator = Symbol.iterator;
 const LONGEST_TICKS = 0xff_ff_ff_ff;
 /** Beats up to which a length needs no second look. */
 const LONGEST_PLAIN = 1_000_000;
@@ -81,8 +79,8 @@ export class Lights {
     return typeof value === "object" && value !== null && #indexes in value;
   }
 
-  [iterator](): IterableIterator<Lights> {
-    return this.#items[iterator]() as IterableIterator<Lights>;
+  [Symbol.iterator](): IterableIterator<Lights> {
+    return this.#items[Symbol.iterator]() as IterableIterator<Lights>;
   }
 
   #write(action: number, value: number, long: number, colour: number, isQuiet: boolean): this {

@@ -51,6 +51,11 @@ type Script = (given: typeof words, lent: typeof marks) => void;
 
 function describeThrown(thrown: unknown): void {
   if (state.failure !== null || thrown instanceof Stop) return;
+  if (thrown === null) {
+    // Without room for an error the engine throws null.
+    state.failure = { code: "engine", values: {}, name: "InternalError", message: "out of memory" };
+    return;
+  }
   if (thrown instanceof Error) {
     const { name, message, stack } = thrown;
     const isEngine = name === "InternalError" || name === "TypeError" || name === "ReferenceError" || name === "RangeError" || name === "SyntaxError";

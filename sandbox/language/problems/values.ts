@@ -23,5 +23,5 @@ export const VALUE_PROBLEMS = defineEntries({
   "not-a-function": { sentence: "`{name}` is not something you can run.", hint: "Only run a word or a function." },
   "not-a-list": { sentence: "This is not a list, so I can not go through it.", hint: "Use a list, as in `square.fronts`." },
   "can-not-change": { sentence: "You can not change this. It is fixed.", hint: "Make a new one, and keep it with `const`." },
-  thrown: { sentence: "Your script stopped itself here.[? It says: {message}?]", hint: "Take the `throw` out, or change when it runs." },
+  thrown: { sentence: 'Your script stopped itself here.[? It says "{message}".?]', hint: "Take the `throw` out, or change when it runs." },
 });

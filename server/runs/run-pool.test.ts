@@ -1,0 +1,100 @@
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import type { RunInput } from "../../sandbox/engine/model.ts";
+import { HOSTILE_SCRIPTS } from "../../tests/support/hostile-scripts.ts";
+import { SMALL_LAYOUT, SMALL_SONG, runWell } from "../../tests/support/run-script.ts";
+import { FairQueue } from "./fair-queue.ts";
+import { RunPoolClosedError, RunQueueFullError, createRunPool, type RunPool } from "./run-pool.ts";
+
+const HONEST = 'for (const front of square.fronts) {\n  front.pulse(1, "gold");\n  wait(roll(3));\n}\nsquare.all.shuffled().off();';
+
+/** A child process loads the compiler and the engine; on a busy machine that takes its time. */
+const SLOW_MS = 90_000;
+
+function inputOf(source: string): RunInput {
+  return { source, songId: "small", song: SMALL_SONG, layout: SMALL_LAYOUT, seed: 7 };
+}
+
+describe("createRunPool", () => {
+  let pool: RunPool;
+  /** The product's own deadline, for scripts that nothing else ends. The other waits as long as a busy machine needs. */
+  let hasty: RunPool;
+  let golden: string;
+
+  beforeAll(async () => {
+    pool = createRunPool({ deadlineMs: 30_000 });
+    hasty = createRunPool({ threads: 1 });
+    golden = (await runWell(HONEST)).hash;
+  });
+  afterAll(() => Promise.all([pool.close(), hasty.close()]));
+
+  it("gives the hash of a direct run", { timeout: SLOW_MS }, async () => {
+    const outcome = await pool.run(inputOf(HONEST));
+    expect(outcome).toMatchObject({ ok: true, hash: golden });
+    expect(outcome.engineMs).toBeGreaterThan(0);
+  });
+
+  it("carries the timeline across as typed arrays", async () => {
+    const outcome = await pool.run(inputOf("square.all.on(40);"));
+    expect(outcome.timeline?.cues.tick).toBeInstanceOf(Uint32Array);
+    expect(outcome.timeline?.selections[0]).toEqual(Uint16Array.from([0, 1, 2, 3, 4, 5, 6, 7, 8]));
+  });
+
+  it.each(HOSTILE_SCRIPTS.map((script) => [script.name, script] as const))("answers %s with one problem and runs the next script well", async (_, { source, codes, needsKill }) => {
+    const target = needsKill ? hasty : pool;
+    const outcome = await target.run(inputOf(source));
+    expect(codes).toContain(outcome.ok ? "it ran" : outcome.problem.code);
+    expect(await target.run(inputOf(HONEST))).toMatchObject({ ok: true, hash: golden });
+  }, SLOW_MS);
+
+  it("answers an honest run of another class while one class has many hostile ones waiting", { timeout: SLOW_MS }, async () => {
+    const order: string[] = [];
+    const hostile = Array.from({ length: 8 }, () => pool.run(inputOf("while (true) {}"), { classId: "loud" }).then(() => order.push("loud")));
+    const honest = pool.run(inputOf(HONEST), { classId: "quiet" }).then((outcome) => {
+      order.push("quiet");
+      return outcome;
+    });
+    expect(await honest).toMatchObject({ ok: true, hash: golden });
+    await Promise.all(hostile);
+    expect(order.indexOf("quiet")).toBeLessThanOrEqual(4);
+  });
+
+  it("refuses a run when too many wait, and takes the next one later", { timeout: SLOW_MS }, async () => {
+    const small = createRunPool({ threads: 1, maxWaiting: 1 });
+    try {
+      const waiting = small.run(inputOf(HONEST));
+      await expect(small.run(inputOf(HONEST))).rejects.toBeInstanceOf(RunQueueFullError);
+      expect(await waiting).toMatchObject({ ok: true, hash: golden });
+      expect(await small.run(inputOf(HONEST))).toMatchObject({ ok: true });
+    } finally {
+      await small.close();
+    }
+  });
+
+  it("rejects what is under way when it is closed, and everything after", { timeout: SLOW_MS }, async () => {
+    const short = createRunPool({ threads: 1 });
+    const running = short.run(inputOf("while (true) {}"));
+    const refused = expect(running).rejects.toBeInstanceOf(RunPoolClosedError);
+    await short.close();
+    await refused;
+    await expect(short.run(inputOf(HONEST))).rejects.toBeInstanceOf(RunPoolClosedError);
+  });
+});
+
+describe("FairQueue", () => {
+  it("serves groups in turn and each group in its order", () => {
+    const queue = new FairQueue<string>();
+    for (const item of ["a1", "a2", "a3"]) queue.add("a", item);
+    queue.add("b", "b1");
+    queue.add("b", "b2");
+    expect([queue.take(), queue.take(), queue.take(), queue.take(), queue.take(), queue.take()]).toEqual(["a1", "b1", "a2", "b2", "a3", undefined]);
+    expect(queue.size).toBe(0);
+  });
+
+  it("puts an item back at the very front", () => {
+    const queue = new FairQueue<string>();
+    queue.add("a", "a1");
+    queue.add("b", "b1");
+    queue.addFirst("b", "b0");
+    expect([queue.take(), queue.take(), queue.take()]).toEqual(["b0", "a1", "b1"]);
+  });
+});
