@@ -28,7 +28,7 @@ export function StepRail({ label, steps }: StepRailProps) {
     <nav aria-label={label} className="max-w-full">
       <ol className="flex max-wide:justify-between">
         {steps.map((step, index) => (
-          <li key={step.label} className="flex">
+          <li key={step.to ?? step.label} className="flex">
             {index > 0 && <span aria-hidden="true" className="w-3.5 self-center border-t-2 border-rim/60 max-wide:hidden" />}
             <StepEntry step={step} number={index + 1} />
           </li>

@@ -4,7 +4,7 @@ import { List, ListRow } from "../../../components/list.tsx";
 import { Tag } from "../../../components/tag.tsx";
 import { HERE } from "../../../lib/format.ts";
 import { presentDue } from "../../../lib/zoned-time.ts";
-import { nextStepOf } from "../model/next-step.ts";
+import { nextStepOf, sortByNextStep } from "../model/next-step.ts";
 
 export interface AssignmentRowsProps {
   assignments: readonly AssignmentSummary[];
@@ -15,7 +15,7 @@ export interface AssignmentRowsProps {
 export function AssignmentRows({ assignments, now }: AssignmentRowsProps) {
   return (
     <List>
-      {assignments.map((assignment) => {
+      {sortByNextStep(assignments, now).map((assignment) => {
         const step = nextStepOf(assignment, now);
         return (
           <ListRow

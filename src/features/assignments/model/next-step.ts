@@ -55,3 +55,14 @@ export function studioActionOf(assignment: AssignmentSummary, now: number): Stud
   }
   return { label: "Begin", to: `/shows/new?assignment=${assignment.id}`, reason: null };
 }
+
+const RANK = { revise: 0, working: 1, none: 2, submitted: 3, marked: 4 } as const;
+
+/** Assignments by what they ask: to mend, under way, not begun (closed ones last), handed in, marked; each by due date. */
+export function sortByNextStep(assignments: readonly AssignmentSummary[], now: number): AssignmentSummary[] {
+  const rank = (one: AssignmentSummary) => {
+    if (one.mine !== null) return RANK[one.mine.state];
+    return one.dueAt < now ? RANK.submitted + 0.5 : RANK.none;
+  };
+  return [...assignments].sort((a, b) => rank(a) - rank(b) || a.dueAt - b.dueAt);
+}

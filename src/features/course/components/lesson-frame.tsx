@@ -40,8 +40,8 @@ export function LessonFrame({ lesson, here, children, workbench }: LessonFramePr
           />
         </div>
       </div>
-      <div className="grid min-h-0 flex-1 grid-cols-[41fr_59fr] max-wide:block">
-        <div className="flex flex-col gap-4 border-r border-line px-8 py-5 max-wide:border-r-0 max-wide:px-4">
+      <div className="grid h-[calc(100dvh-8.25rem)] min-h-[34rem] grid-cols-[41fr_59fr] max-wide:block max-wide:h-auto">
+        <div className="flex flex-col gap-4 overflow-y-auto border-r border-line px-8 py-5 max-wide:border-r-0 max-wide:px-4">
           {children}
           <div className="mt-auto flex items-center justify-between gap-3 pt-4">
             {before ? (
@@ -64,7 +64,7 @@ export function LessonFrame({ lesson, here, children, workbench }: LessonFramePr
             )}
           </div>
         </div>
-        <div className="bg-well p-4 max-wide:p-2">{workbench}</div>
+        <div className="overflow-y-auto bg-well p-4 max-wide:p-2">{workbench}</div>
       </div>
     </Page>
   );

@@ -97,7 +97,7 @@ export function ScriptBench(props: ScriptBenchProps) {
   return (
     <div className="studio-bench flex h-full flex-col gap-3">
       <div className="on-dusk overflow-hidden rounded-sheet bg-dusk">
-        <div className="h-[21rem] max-wide:h-60">
+        <div className="grid h-[clamp(13rem,33vh,22rem)]">
           {player && (
             <StageWindow
               layout={layout}
@@ -110,13 +110,13 @@ export function ScriptBench(props: ScriptBenchProps) {
             />
           )}
         </div>
-        <dl className="grid grid-cols-[5.5rem_1fr] items-center gap-x-3 gap-y-1.5 px-3 py-3">
+        <dl className="grid grid-cols-[5.5rem_1fr] items-center gap-x-3 gap-y-1 px-3 py-2">
           <RibbonRow name="Your run" timeline={state.outcome?.timeline ?? null} layout={layout} />
           {aim && <RibbonRow name="The aim" timeline={aim.timeline} layout={layout} />}
         </dl>
       </div>
       {player && <TransportBar song={song} player={player} onToggle={() => void player.transport.toggle()} onToggleLoop={() => toggleLoop(player)} />}
-      <section aria-label="Script" className="flex min-h-72 flex-1 flex-col overflow-hidden rounded-sheet border border-line bg-card shadow-sheet-1">
+      <section aria-label="Script" className="flex min-h-52 flex-1 flex-col overflow-hidden rounded-sheet border border-line bg-card shadow-sheet-1">
         <div className="flex flex-wrap items-center gap-3 border-b border-line px-4 py-2">
           <h2 className="text-5">Script</h2>
           <p className="min-w-0 flex-1 text-meta text-soft" role="status">
@@ -134,7 +134,7 @@ export function ScriptBench(props: ScriptBenchProps) {
         <p id={hintId} className="sr-only">
           Control and Enter runs the script. Escape, then Tab leaves the editor.
         </p>
-        <div ref={editorBox} className="studio-code min-h-0 flex-1 overflow-auto" />
+        <div ref={editorBox} className="script-editor min-h-0 flex-1 overflow-auto" />
       </section>
     </div>
   );
@@ -155,7 +155,7 @@ function RibbonRow({ name, timeline, layout }: { name: string; timeline: Timelin
     <>
       <dt>{name}</dt>
       <dd>
-        <Ribbon ribbon={cells} size="strip" isSquare label={`${name}: ${timeline ? `${timeline.cues.count} cues` : "nothing yet"}`} />
+        <Ribbon ribbon={cells} size="row" isSquare label={`${name}: ${timeline ? `${timeline.cues.count} cues` : "nothing yet"}`} />
       </dd>
     </>
   );
