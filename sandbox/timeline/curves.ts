@@ -80,15 +80,15 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
     strongests.push(strongest);
     if (light.hasColour) colours.push(...rgb);
   };
-  const breaks = listBreaks(tracks, light);
+  const { breaks, moves } = listBreaks(tracks, light);
+  let nextMove = 0;
+  let movesUntil = 0;
   breaks.forEach((tick, index) => {
     if (tick > 0) add(tick - JUMP_TICKS);
     add(tick);
+    for (let move = moves[nextMove]; move !== undefined && move.start <= tick; move = moves[++nextMove]) movesUntil = Math.max(movesUntil, move.end);
     const next = breaks[index + 1];
-    if (next === undefined) return;
-    const samples = [tick, (tick + next) / 2, next - JUMP_TICKS].map(read);
-    const [first] = samples;
-    if (samples.every((sample) => sample.level === first?.level && sample.luminance === first.luminance && sample.strongest === first.strongest)) return;
+    if (next === undefined || movesUntil <= tick) return;
     for (let between = tick + CURVE_STEP_TICKS; between < next; between += CURVE_STEP_TICKS) add(between);
   });
   return {
@@ -100,20 +100,18 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
   };
 }
 
-/** Ticks at which a light may jump or bend, sorted; the last is the song's end. */
-function listBreaks({ level, colour, pulse, endTick }: Tracks, light: Light): number[] {
-  const ticks = new Set<number>();
+/** Ticks at which a light may jump or bend, sorted, the last the song's end; and the fades and pulses between them, by start. */
+function listBreaks({ level, colour, pulse, endTick }: Tracks, light: Light): { readonly breaks: readonly number[]; readonly moves: readonly { readonly start: number; readonly end: number }[] } {
+  const moves: { start: number; end: number }[] = [];
   const { index } = light;
   for (const track of light.hasColour ? [level, colour] : [level])
     for (let entry = track.first[index] ?? 0; entry < (track.first[index + 1] ?? 0); entry++) {
-      const tick = track.tick[entry] ?? 0;
-      ticks.add(tick);
-      ticks.add(tick + (track.length[entry] ?? 0));
+      const start = track.tick[entry] ?? 0;
+      moves.push({ start, end: start + (track.length[entry] ?? 0) });
     }
-  for (let entry = pulse.first[index] ?? 0; entry < (pulse.first[index + 1] ?? 0); entry++) {
-    ticks.add(pulse.tick[entry] ?? 0);
-    ticks.add(pulse.end[entry] ?? 0);
-  }
+  for (let entry = pulse.first[index] ?? 0; entry < (pulse.first[index + 1] ?? 0); entry++) moves.push({ start: pulse.tick[entry] ?? 0, end: pulse.end[entry] ?? 0 });
+  moves.sort((a, b) => a.start - b.start);
+  const ticks = new Set(moves.flatMap(({ start, end }) => [start, end]));
   if (ticks.size > 0) ticks.add(endTick);
-  return [...ticks].filter((tick) => tick <= endTick).sort((a, b) => a - b);
+  return { breaks: [...ticks].filter((tick) => tick <= endTick).sort((a, b) => a - b), moves };
 }
