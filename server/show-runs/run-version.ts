@@ -3,6 +3,7 @@ import type { Layout } from "../../shared/contracts/square.ts";
 import type { Finding, RunOutcome } from "../../sandbox/engine/model.ts";
 import { checkShow, mergeFindings } from "../../sandbox/checks/index.ts";
 import { encodeTimeline } from "../../sandbox/timeline/codec.ts";
+import { describeShow } from "../../sandbox/timeline/describe.ts";
 import { ribbonCells } from "../../sandbox/timeline/ribbon.ts";
 import { newId } from "../db/schema/columns.ts";
 import type { FeatureDeps } from "../deps.ts";
@@ -60,7 +61,7 @@ export function judgeOutcome(outcome: RunOutcome, layout: Layout, song: BeatMap)
       cueCount: outcome.cueCount,
       findings: mergeFindings([outcome.findings, checked]).map(presentFinding),
       seconds: songSeconds(song),
-      description: timeline && timeline.cues.count > 0 ? `${timeline.cues.count} cues.` : "Nothing lights up.",
+      description: timeline ? describeShow(timeline, layout, song).summary : "Nothing lights up.",
     },
     hash,
     timeline: timeline ? Buffer.from(encodeTimeline(timeline)) : null,

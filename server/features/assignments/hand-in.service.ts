@@ -1,6 +1,7 @@
 import type { HandInResult } from "../../../shared/contracts/assignments.ts";
 import { SubmissionIdSchema } from "../../../shared/ids.ts";
 import { ProblemError } from "../../../shared/problem.ts";
+import { listUnmet } from "../../../sandbox/checks/use.ts";
 import { LANGUAGE_VERSION } from "../../../sandbox/timeline/model.ts";
 import { type Db, inTransaction } from "../../db/connection.ts";
 import { newId } from "../../db/schema/columns.ts";
@@ -65,7 +66,7 @@ export async function handIn(deps: FeatureDeps, actor: Actor, assignmentId: stri
     isLate: kept.isLate,
     run: presentRunSummary(run, songSeconds(getSong(db, kept.version.songId).beatMap)),
     hashesAgree,
-    unmet: [],
+    unmet: listUnmet(kept.version.source, assignment.requirements),
   };
 }
 

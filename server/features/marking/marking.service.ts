@@ -9,6 +9,7 @@ import { findLatestRun, listLatestRuns } from "../../show-runs/runs.queries.ts";
 import { countPoints } from "../../work/points.ts";
 import { listClassRelations } from "../../work/relations.queries.ts";
 import { listAuthorNames, listLatestForwards } from "../../work/work.queries.ts";
+import { listEvidence } from "./evidence.ts";
 import { presentComment, presentMark } from "./marking.presenter.ts";
 import {
   findMark,
@@ -122,7 +123,7 @@ export function getSubmissionDetail(db: Db, actor: Actor, submissionId: string):
     rubric: assignment.rubric,
     comments: listComments(db, submission.id).map((comment) => presentComment(actor.userId, comment)),
     mark: mark && (isTeacher || mark.releasedAt !== null) ? presentMark(assignment.rubric, mark) : null,
-    evidence: {},
+    evidence: isTeacher ? listEvidence(db, version, run, assignment) : {},
     forward: forward ? { state: forward.shownState, note: isTeacher ? forward.note : "", answer: isTeacher ? forward.answer : null } : null,
     history: listEvents(db, submission.id),
   };
