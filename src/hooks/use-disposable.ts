@@ -9,6 +9,7 @@ export function useDisposable<T extends { dispose(): void }>(create: () => T, de
   const [made, setMade] = useState<T | null>(null);
   useEffect(() => {
     const object = create();
+    // eslint-disable-next-line react-hooks/set-state-in-effect -- the object needs what the first paint put on the page
     setMade(object);
     return () => {
       setMade(null);

@@ -54,12 +54,29 @@ export class DrumKit implements Player {
   readonly #lastAt = new Map<Drum, number>();
 
   constructor(context: Context, output: AudioNode) {
-    this.#kick = new MembraneSynth({ context, volume: -7, pitchDecay: 0.04, octaves: 5, envelope: { attack: 0.001, decay: 0.32, sustain: 0, release: 0.1 } });
-    this.#tom = new MembraneSynth({ context, volume: -13, pitchDecay: 0.06, octaves: 2, envelope: { attack: 0.001, decay: 0.28, sustain: 0, release: 0.1 } });
+    this.#kick = new MembraneSynth({
+      context,
+      volume: -7,
+      pitchDecay: 0.04,
+      octaves: 5,
+      envelope: { attack: 0.001, decay: 0.32, sustain: 0, release: 0.1 },
+    });
+    this.#tom = new MembraneSynth({
+      context,
+      volume: -13,
+      pitchDecay: 0.06,
+      octaves: 2,
+      envelope: { attack: 0.001, decay: 0.28, sustain: 0, release: 0.1 },
+    });
     this.#kick.connect(output);
     this.#tom.connect(output);
     for (const [drum, { colour, decay, volume }] of Object.entries(NOISES)) {
-      const noise = new NoiseSynth({ context, volume, noise: { type: colour }, envelope: { attack: 0.001, decay, sustain: 0, release: 0.03 } });
+      const noise = new NoiseSynth({
+        context,
+        volume,
+        noise: { type: colour },
+        envelope: { attack: 0.001, decay, sustain: 0, release: 0.03 },
+      });
       noise.connect(output);
       this.#noises.set(drum as Drum, noise);
     }

@@ -38,7 +38,9 @@ export class Ensemble {
     const players: Player[] = [];
     for (const track of score.tracks) {
       const family = findFamily(track);
-      players.push(family === "drums" ? new DrumKit(context, chain.input) : new TonePlayer(family, context, chain.input));
+      players.push(
+        family === "drums" ? new DrumKit(context, chain.input) : new TonePlayer(family, context, chain.input),
+      );
       await new Promise((resolve) => setTimeout(resolve, 0));
     }
     return new Ensemble(context.rawContext, chain, players);

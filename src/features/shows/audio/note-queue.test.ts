@@ -39,7 +39,8 @@ describe("findFamily", () => {
   });
 
   it("has a family for every General MIDI program", () => {
-    for (let program = 0; program < 128; program += 1) expect(findFamily({ name: "", program, isDrums: false })).not.toBe("drums");
+    for (let program = 0; program < 128; program += 1)
+      expect(findFamily({ name: "", program, isDrums: false })).not.toBe("drums");
   });
 });
 

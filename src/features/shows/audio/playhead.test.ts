@@ -32,17 +32,23 @@ describe("Playhead", () => {
   it("lays every second of a stretch once, in order, whatever the loop and the rate", () => {
     const seconds = fc.double({ min: 0, max: 40, noNaN: true });
     fc.assert(
-      fc.property(seconds, fc.double({ min: 0.1, max: 8, noNaN: true }), fc.constantFrom(0.5, 0.75, 1), seconds, (start, length, rate, song) => {
-        const playhead = new Playhead({ ...base, song, rate, loop: { start, end: start + length } });
-        const spans = playhead.listSpans(10, 40);
-        let clock = 10;
-        for (const span of spans) {
-          expect(span.clock).toBeCloseTo(clock, 3);
-          expect(span.from).toBeCloseTo(playhead.songAt(span.clock + 1e-7), 3);
-          clock = span.clock + (span.to - span.from) / rate;
-        }
-        if (!playhead.isOverAt(40)) expect(clock).toBeCloseTo(40, 3);
-      }),
+      fc.property(
+        seconds,
+        fc.double({ min: 0.1, max: 8, noNaN: true }),
+        fc.constantFrom(0.5, 0.75, 1),
+        seconds,
+        (start, length, rate, song) => {
+          const playhead = new Playhead({ ...base, song, rate, loop: { start, end: start + length } });
+          const spans = playhead.listSpans(10, 40);
+          let clock = 10;
+          for (const span of spans) {
+            expect(span.clock).toBeCloseTo(clock, 3);
+            expect(span.from).toBeCloseTo(playhead.songAt(span.clock + 1e-7), 3);
+            clock = span.clock + (span.to - span.from) / rate;
+          }
+          if (!playhead.isOverAt(40)) expect(clock).toBeCloseTo(40, 3);
+        },
+      ),
     );
   });
 });

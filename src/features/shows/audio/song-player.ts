@@ -1,6 +1,6 @@
 import type { Score } from "../../../../shared/contracts/songs.ts";
 import { Ensemble } from "./ensemble.ts";
-import { HeardClock, type AudioTime } from "./heard-clock.ts";
+import { HeardClock } from "./heard-clock.ts";
 import { NoteQueue } from "./note-queue.ts";
 import { Playhead, type LoopRange } from "./playhead.ts";
 import { createLiveContext, type Context } from "./tone.ts";
@@ -151,7 +151,7 @@ export class SongPlayer {
       this.#master = raw.createGain();
       this.#master.gain.value = this.#volume ** 2;
       this.#master.connect(raw.destination);
-      this.#clock = new HeardClock(raw as AudioTime);
+      this.#clock = new HeardClock(raw);
     }
     const context = this.#context;
     const isOpen = await Promise.race([

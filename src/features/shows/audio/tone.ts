@@ -4,7 +4,15 @@
  * node still asks for the global context, so `useContext` comes before the first node.
  */
 import "./silence-tone.ts";
-import { Context, FMSynth, MembraneSynth, MonoSynth, NoiseSynth, OfflineContext, Synth } from "tone/build/esm/classes.js";
+import {
+  Context,
+  FMSynth,
+  MembraneSynth,
+  MonoSynth,
+  NoiseSynth,
+  OfflineContext,
+  Synth,
+} from "tone/build/esm/classes.js";
 import { setContext } from "tone/build/esm/core/context/GlobalContext.js";
 
 export { FMSynth, MembraneSynth, MonoSynth, NoiseSynth, OfflineContext, Synth };

@@ -31,7 +31,12 @@ describe("reduceDraft", () => {
   });
 
   it("stays unsaved when the answer covers an older text", () => {
-    const state = play(edited("a"), sent("k1"), edited("ab"), { type: "saved", idempotencyKey: "k1", revision: 5, at: 9 });
+    const state = play(edited("a"), sent("k1"), edited("ab"), {
+      type: "saved",
+      idempotencyKey: "k1",
+      revision: 5,
+      at: 9,
+    });
     expect(state.base).toEqual({ revision: 5, source: "a" });
     expect(state.source).toBe("ab");
     expect(hasUnsavedText(state)).toBe(true);
@@ -110,7 +115,10 @@ describe("restoreDraftState", () => {
 
   it("shows two versions when the server moved on without us", () => {
     const theirs = { revision: 5, source: "other" };
-    expect(restoreDraftState({ source: "kept", base, request: null }, theirs).sync).toEqual({ kind: "two-versions", theirs });
+    expect(restoreDraftState({ source: "kept", base, request: null }, theirs).sync).toEqual({
+      kind: "two-versions",
+      theirs,
+    });
   });
 
   it("opens the kept text when the server does not answer", () => {
@@ -132,10 +140,22 @@ describe("presentSaveStatus", () => {
     ["Saving", "On its way", [edited("a")]],
     ["Saving", "On its way", [edited("a"), sent("k")]],
     ["Only on this computer", "I keep trying", [edited("a"), sent("k"), { type: "unanswered", idempotencyKey: "k" }]],
-    ["Only on this computer", "Sign in again", [edited("a"), sent("k"), { type: "session-ended", idempotencyKey: "k" }]],
-    ["Only on this computer", "Too long.", [edited("a"), sent("k"), { type: "refused", idempotencyKey: "k", reason: "Too long." }]],
+    [
+      "Only on this computer",
+      "Sign in again",
+      [edited("a"), sent("k"), { type: "session-ended", idempotencyKey: "k" }],
+    ],
+    [
+      "Only on this computer",
+      "Too long.",
+      [edited("a"), sent("k"), { type: "refused", idempotencyKey: "k", reason: "Too long." }],
+    ],
     ["Only in this tab", "Do not close", [edited("a"), { type: "keeping-failed" }]],
-    ["Two versions", "Choose one", [edited("a"), sent("k"), { type: "conflicted", idempotencyKey: "k", theirs: { revision: 9, source: "b" } }]],
+    [
+      "Two versions",
+      "Choose one",
+      [edited("a"), sent("k"), { type: "conflicted", idempotencyKey: "k", theirs: { revision: 9, source: "b" } }],
+    ],
   ])("says %s, %s", (label, detail, events) => {
     const status = presentSaveStatus(play(...events), 24_000);
     expect(status.label).toBe(label);

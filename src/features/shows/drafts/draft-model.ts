@@ -90,7 +90,10 @@ export function restoreDraftState(
   const resting: DraftSync = { kind: "resting" };
   const isOwnTextLeft = source !== base.source || request !== null;
   if (server && (server.source === source || !isOwnTextLeft)) return createDraftState(server);
-  if (server && (server.revision === base.revision || server.source === base.source || server.source === request?.source))
+  if (
+    server &&
+    (server.revision === base.revision || server.source === base.source || server.source === request?.source)
+  )
     return open(server, resting);
   // An unanswered save may be what moved the server on: asking again with its key tells.
   if (request) return open(base, { kind: "waiting", request, attempt: 0 });

@@ -46,12 +46,12 @@ function createMemoryStorage(): DraftStorage & { drafts: Map<string, KeptDraft>;
   return {
     drafts,
     copies,
-    putDraft: async (draft) => void drafts.set(draft.writer, draft),
-    deleteDraft: async (key) => void drafts.delete(key.writer),
-    listDrafts: async () => [...drafts.values()],
-    putCopy: async (copy) => void copies.set(copy.id, copy),
-    listCopies: async () => [...copies.values()],
-    deleteCopy: async (id) => void copies.delete(id),
+    putDraft: (draft) => Promise.resolve(void drafts.set(draft.writer, draft)),
+    deleteDraft: (key) => Promise.resolve(void drafts.delete(key.writer)),
+    listDrafts: () => Promise.resolve([...drafts.values()]),
+    putCopy: (copy) => Promise.resolve(void copies.set(copy.id, copy)),
+    listCopies: () => Promise.resolve([...copies.values()]),
+    deleteCopy: (id) => Promise.resolve(void copies.delete(id)),
   };
 }
 
@@ -64,13 +64,12 @@ class RuledServer implements DraftTransport {
   weather: Weather = "good";
   readonly #answered = new Map<string, SaveAnswer>();
 
-  async saveDraft(request: Parameters<DraftTransport["saveDraft"]>[0]): Promise<SaveAnswer> {
-    if (this.weather === "lost-before") throw new Error("no network");
-    if (this.weather === "signed-out") return { kind: "signed-out" };
+  saveDraft(request: Parameters<DraftTransport["saveDraft"]>[0]): Promise<SaveAnswer> {
+    if (this.weather === "lost-before") return Promise.reject(new Error("no network"));
+    if (this.weather === "signed-out") return Promise.resolve({ kind: "signed-out" });
     const answer = this.#answered.get(request.idempotencyKey) ?? this.#save(request.baseRevision, request.source);
     this.#answered.set(request.idempotencyKey, answer);
-    if (this.weather === "lost-after") throw new Error("answer lost");
-    return answer;
+    return this.weather === "lost-after" ? Promise.reject(new Error("answer lost")) : Promise.resolve(answer);
   }
 
   write(source: string): void {

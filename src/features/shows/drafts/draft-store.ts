@@ -92,8 +92,7 @@ export class DraftStore {
   async choose(source: string): Promise<void> {
     const { sync, source: mine } = this.#state;
     if (sync.kind !== "two-versions") return;
-    for (const text of [mine, sync.theirs.source])
-      if (text !== source) await this.#putAside(text);
+    for (const text of [mine, sync.theirs.source]) if (text !== source) await this.#putAside(text);
     this.#dispatch({ type: "chose", source });
   }
 
@@ -166,7 +165,8 @@ export class DraftStore {
       const answer = await transport.saveDraft({ ...request, showId: key.showId });
       if (answer.kind === "saved")
         this.#dispatch({ type: "saved", idempotencyKey, revision: answer.revision, at: host.now() });
-      else if (answer.kind === "conflict") this.#dispatch({ type: "conflicted", idempotencyKey, theirs: answer.theirs });
+      else if (answer.kind === "conflict")
+        this.#dispatch({ type: "conflicted", idempotencyKey, theirs: answer.theirs });
       else if (answer.kind === "signed-out") this.#dispatch({ type: "session-ended", idempotencyKey });
       else this.#dispatch({ type: "refused", idempotencyKey, reason: answer.reason });
     } catch {

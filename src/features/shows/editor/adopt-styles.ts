@@ -9,7 +9,11 @@ import { StyleModule } from "style-mod";
 export function adoptEditorStyles(target: Document = document): void {
   const key = findKeeperKey(target);
   if (!key || key in target) return;
-  Object.defineProperty(target, key, { value: Reflect.get(createKeeperRoot(target), key), configurable: true, writable: true });
+  Object.defineProperty(target, key, {
+    value: Reflect.get(createKeeperRoot(target), key),
+    configurable: true,
+    writable: true,
+  });
 }
 
 function createKeeperRoot(target: Document): ShadowRoot {

@@ -34,7 +34,8 @@ describe("findCompletionPlace", () => {
 });
 
 describe("word notes", () => {
-  const named = (notes: readonly { word: string }[]) => notes.map(({ word }) => (word === "console.log" ? "console" : word)).sort();
+  const named = (notes: readonly { word: string }[]) =>
+    notes.map(({ word }) => (word === "console.log" ? "console" : word)).sort();
 
   it("explain each word of the language, and no other", () => {
     expect(named(GLOBAL_WORD_NOTES)).toEqual([...GLOBAL_WORDS].sort());

@@ -55,7 +55,8 @@ function findMemberPlace(script: string, owner: string, from: number): Completio
   const name = /([A-Za-z_]\w*)$/.exec(trimmed)?.[1];
   if (name === "square" || name === "song") return { kind: "member", of: name, from };
   if (name && /^(Math|console|JSON|Object|Array|Number|String)$/.test(name)) return null;
-  if (/\.\s*(section\s*\([^()]*\)|sections\s*\[[^\]]*\])$/.test(trimmed)) return { kind: "member", of: "section", from };
+  if (/\.\s*(section\s*\([^()]*\)|sections\s*\[[^\]]*\])$/.test(trimmed))
+    return { kind: "member", of: "section", from };
   if (name && isSection(script, name)) return { kind: "member", of: "section", from };
   return { kind: "member", of: "lights", from };
 }

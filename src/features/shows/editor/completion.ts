@@ -1,4 +1,10 @@
-import { autocompletion, snippetCompletion, type Completion, type CompletionContext, type CompletionResult } from "@codemirror/autocomplete";
+import {
+  autocompletion,
+  snippetCompletion,
+  type Completion,
+  type CompletionContext,
+  type CompletionResult,
+} from "@codemirror/autocomplete";
 import type { Extension } from "@codemirror/state";
 import { getMiniFrontPath } from "../stage/mini-front-path.ts";
 import { findCompletionPlace, type CompletionPlace } from "./completion-place.ts";
@@ -34,7 +40,11 @@ function complete(context: CompletionContext, names: ScriptNames): CompletionRes
   const place = findCompletionPlace(context.state.sliceDoc(0, context.pos));
   if (!place && !context.explicit) return null;
   const at = place ?? ({ kind: "word", from: context.pos } as const);
-  return { from: at.from, options: listOptions(at, names, context), validFor: at.kind === "name" ? /^[^"'`]*$/ : /^\w*$/ };
+  return {
+    from: at.from,
+    options: listOptions(at, names, context),
+    validFor: at.kind === "name" ? /^[^"'`]*$/ : /^\w*$/,
+  };
 }
 
 function listOptions(place: CompletionPlace, names: ScriptNames, context: CompletionContext): Completion[] {
@@ -84,7 +94,10 @@ function renderPicture({ scriptName }: NameCompletion): Node | null {
   picture.setAttribute("class", "mini-front");
   picture.setAttribute("aria-hidden", "true");
   const { wall, openings } = getMiniFrontPath(scriptName.silhouette, PICTURE_SIZE);
-  for (const [d, name] of [[wall, "mini-front-wall"], [openings, "mini-front-openings"]] as const) {
+  for (const [d, name] of [
+    [wall, "mini-front-wall"],
+    [openings, "mini-front-openings"],
+  ] as const) {
     const path = document.createElementNS(SVG, "path");
     path.setAttribute("d", d);
     path.setAttribute("class", name);

@@ -1,5 +1,5 @@
 import { RangeSet, StateEffect, StateField, type EditorState, type Extension, type Range } from "@codemirror/state";
-import { EditorView, gutter, GutterMarker, layer, type LayerMarker } from "@codemirror/view";
+import { type EditorView, gutter, GutterMarker, layer, type LayerMarker } from "@codemirror/view";
 import { GlowBook } from "./glow-book.ts";
 
 const setActLines = StateEffect.define<readonly number[]>();
@@ -100,10 +100,17 @@ export function createGlowLines(): GlowLines {
     above: false,
     class: "glow-layer",
     update: (update) =>
-      update.docChanged || update.viewportChanged || update.geometryChanged || update.startState.field(beads) !== update.state.field(beads),
+      update.docChanged ||
+      update.viewportChanged ||
+      update.geometryChanged ||
+      update.startState.field(beads) !== update.state.field(beads),
     markers: (view) => listSheets(view, view.state.field(beads), book),
   });
-  const beadGutter = gutter({ class: "glow-gutter", markers: (view) => view.state.field(beads), initialSpacer: () => new BeadMarker(0, book) });
+  const beadGutter = gutter({
+    class: "glow-gutter",
+    markers: (view) => view.state.field(beads),
+    initialSpacer: () => new BeadMarker(0, book),
+  });
   return {
     extension: [beads, sheets, beadGutter],
     book,
@@ -126,7 +133,13 @@ function listSheets(view: EditorView, beads: RangeSet<BeadMarker>, book: GlowBoo
     const block = view.lineBlockAt(position);
     // A problem under the line belongs to its block; the glow is behind the text only.
     const text = view.elementAtHeight(block.top);
-    found.push(new GlowSheet(marker.line, { top: top + block.top, height: text.height, width: view.scrollDOM.clientWidth }, book));
+    found.push(
+      new GlowSheet(
+        marker.line,
+        { top: top + block.top, height: text.height, width: view.scrollDOM.clientWidth },
+        book,
+      ),
+    );
   });
   return found;
 }

@@ -9,7 +9,12 @@ export interface LanguageWord {
   readonly snippet?: string;
 }
 
-const word = (name: string, usage: string, meaning: string, snippet?: string): LanguageWord => ({ word: name, usage, meaning, snippet });
+const word = (name: string, usage: string, meaning: string, snippet?: string): LanguageWord => ({
+  word: name,
+  usage,
+  meaning,
+  snippet,
+});
 
 export const GLOBAL_WORD_NOTES: readonly LanguageWord[] = [
   word("square", "square", "The square: all fronts and lights."),
@@ -67,7 +72,12 @@ export const LIGHTS_WORD_NOTES: readonly LanguageWord[] = [
   word("and", "and(other)", "These and those.", "and(${other})"),
   word("except", "except(other)", "These without those.", "except(${other})"),
   word("lights", "lights", "Each single light of them."),
-  word("inTurn", "inTurn(step, action)", "Runs it for each, a step apart.", "inTurn(${0.5}, light => ${light.pulse(1)});"),
+  word(
+    "inTurn",
+    "inTurn(step, action)",
+    "Runs it for each, a step apart.",
+    "inTurn(${0.5}, light => ${light.pulse(1)});",
+  ),
   word("name", "name", "What it is called."),
   word("box", "box", "The kind of box it hangs on."),
   word("length", "length", "How many there are."),
@@ -78,8 +88,18 @@ export const LIGHTS_WORD_NOTES: readonly LanguageWord[] = [
 
 /** Shapes of code that beginners use again and again. */
 export const CODE_SHAPES: readonly LanguageWord[] = [
-  word("for of", "for (const front of square.fronts)", "Does it for each of a list.", "for (const ${front} of ${square.fronts}) {\n\t${}\n}"),
-  word("for count", "for (let turn = 0; turn < 4; turn += 1)", "Does it a number of times.", "for (let ${turn} = 0; ${turn} < ${4}; ${turn} += 1) {\n\t${}\n}"),
+  word(
+    "for of",
+    "for (const front of square.fronts)",
+    "Does it for each of a list.",
+    "for (const ${front} of ${square.fronts}) {\n\t${}\n}",
+  ),
+  word(
+    "for count",
+    "for (let turn = 0; turn < 4; turn += 1)",
+    "Does it a number of times.",
+    "for (let ${turn} = 0; ${turn} < ${4}; ${turn} += 1) {\n\t${}\n}",
+  ),
   word("if", "if (test)", "Does it only when the test is true.", "if (${test}) {\n\t${}\n}"),
   word("function", "function name()", "Gives steps a name.", "function ${name}(${}) {\n\t${}\n}"),
   word("const", "const name = value;", "Gives a value a name.", "const ${name} = ${value};"),

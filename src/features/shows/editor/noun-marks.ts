@@ -1,5 +1,12 @@
 import { syntaxTree } from "@codemirror/language";
-import { Decoration, MatchDecorator, ViewPlugin, type DecorationSet, type EditorView, type ViewUpdate } from "@codemirror/view";
+import {
+  Decoration,
+  MatchDecorator,
+  ViewPlugin,
+  type DecorationSet,
+  type EditorView,
+  type ViewUpdate,
+} from "@codemirror/view";
 
 /** Whether a name is one of the two nouns of the language; they stand out in every script. */
 export function isOurNoun(text: string): boolean {

@@ -74,7 +74,8 @@ const shownProblem = StateField.define<ShownProblem>({
   create: () => ({ problem: null, decorations: Decoration.none }),
   update(shown, transaction) {
     for (const effect of transaction.effects)
-      if (effect.is(setProblem)) return { problem: effect.value, decorations: decorate(transaction.state, effect.value) };
+      if (effect.is(setProblem))
+        return { problem: effect.value, decorations: decorate(transaction.state, effect.value) };
     return transaction.docChanged ? { ...shown, decorations: shown.decorations.map(transaction.changes) } : shown;
   },
   provide: (field) => EditorView.decorations.from(field, (shown) => shown.decorations),

@@ -4,7 +4,14 @@ import { javascript } from "@codemirror/lang-javascript";
 import { bracketMatching, indentOnInput, indentUnit, syntaxHighlighting } from "@codemirror/language";
 import { highlightSelectionMatches, search, searchKeymap } from "@codemirror/search";
 import { Annotation, EditorState, Prec, type Extension } from "@codemirror/state";
-import { drawSelection, EditorView, highlightActiveLine, highlightActiveLineGutter, keymap, lineNumbers } from "@codemirror/view";
+import {
+  drawSelection,
+  EditorView,
+  highlightActiveLine,
+  highlightActiveLineGutter,
+  keymap,
+  lineNumbers,
+} from "@codemirror/view";
 import type { Problem } from "../../../../sandbox/engine/model.ts";
 import { adoptEditorStyles } from "./adopt-styles.ts";
 import { completeScript } from "./completion.ts";
@@ -121,7 +128,14 @@ export class ScriptEditor {
     // Escape, then Tab leaves the editor: CodeMirror lets the next Tab through for two seconds.
     return [
       Prec.high(keymap.of(own)),
-      keymap.of([...closeBracketsKeymap, ...completionKeymap, ...searchKeymap, ...historyKeymap, ...defaultKeymap, indentWithTab]),
+      keymap.of([
+        ...closeBracketsKeymap,
+        ...completionKeymap,
+        ...searchKeymap,
+        ...historyKeymap,
+        ...defaultKeymap,
+        indentWithTab,
+      ]),
     ];
   }
 

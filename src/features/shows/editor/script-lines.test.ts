@@ -20,7 +20,9 @@ describe("listScriptLines", () => {
   });
 
   it("does not stumble over half a script", () => {
-    expect(listScriptLines('square.front("').map((pieces) => pieces.map((piece) => piece.text).join(""))).toEqual(['square.front("']);
+    expect(listScriptLines('square.front("').map((pieces) => pieces.map((piece) => piece.text).join(""))).toEqual([
+      'square.front("',
+    ]);
   });
 });
 

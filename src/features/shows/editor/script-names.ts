@@ -20,9 +20,11 @@ export type ScriptNames = { readonly [K in NameKind]: readonly ScriptName[] };
 /** The names that scripts may use on this square with this song. */
 export function listScriptNames(layout: Layout, song: BeatMap): ScriptNames {
   const fronts = listFronts(layout).map(({ front }) => front);
-  const partsOf = (boxes: (typeof fronts)[number]["boxes"]) => boxes.flatMap((box) => box.outlets.map((outlet) => outlet.part));
+  const partsOf = (boxes: (typeof fronts)[number]["boxes"]) =>
+    boxes.flatMap((box) => box.outlets.map((outlet) => outlet.part));
   const parts = new Map<string, number>();
-  for (const front of fronts) for (const part of new Set(partsOf(front.boxes))) parts.set(part, (parts.get(part) ?? 0) + 1);
+  for (const front of fronts)
+    for (const part of new Set(partsOf(front.boxes))) parts.set(part, (parts.get(part) ?? 0) + 1);
   const sections = new Map<string, number>();
   for (const section of song.sections) sections.set(section.name, (sections.get(section.name) ?? 0) + 1);
   return {
@@ -31,10 +33,21 @@ export function listScriptNames(layout: Layout, song: BeatMap): ScriptNames {
       note: `${front.side === null ? "in the middle" : `${front.side} side`} · ${partsOf(front.boxes).join(", ")}`,
       silhouette: front.silhouette,
     })),
-    side: SIDES.map((side) => ({ name: side, note: countOf(fronts.filter((front) => front.side === side).length, "front") })),
-    part: [...parts].sort((a, b) => b[1] - a[1]).map(([name, count]) => ({ name, note: `of ${countOf(count, "front")}` })),
-    section: [...sections].map(([name, count]) => ({ name, note: count === 1 ? "a section of the song" : `${count} times in the song` })),
-    instrument: song.instruments.map((instrument) => ({ name: instrument.name, note: countOf(instrument.hits.length, "hit") })),
+    side: SIDES.map((side) => ({
+      name: side,
+      note: countOf(fronts.filter((front) => front.side === side).length, "front"),
+    })),
+    part: [...parts]
+      .sort((a, b) => b[1] - a[1])
+      .map(([name, count]) => ({ name, note: `of ${countOf(count, "front")}` })),
+    section: [...sections].map(([name, count]) => ({
+      name,
+      note: count === 1 ? "a section of the song" : `${count} times in the song`,
+    })),
+    instrument: song.instruments.map((instrument) => ({
+      name: instrument.name,
+      note: countOf(instrument.hits.length, "hit"),
+    })),
     colour: Object.entries(COLOUR_NAMES).map(([name, value]) => ({ name, note: "", swatch: colourToHex(value) })),
   };
 }

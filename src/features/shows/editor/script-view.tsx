@@ -29,7 +29,16 @@ export interface ScriptViewProps {
 }
 
 /** A script to read: numbers, colours, glow lines, and what people said under its lines. */
-export function ScriptView({ source, label, actLines = [], markedLines = [], notes, onPickLine, ref, className }: ScriptViewProps) {
+export function ScriptView({
+  source,
+  label,
+  actLines = [],
+  markedLines = [],
+  notes,
+  onPickLine,
+  ref,
+  className,
+}: ScriptViewProps) {
   const lines = useMemo(() => listScriptLines(source), [source]);
   const listRef = useRef<HTMLOListElement>(null);
   const bookRef = useRef(new GlowBook());
@@ -59,7 +68,13 @@ export function ScriptView({ source, label, actLines = [], markedLines = [], not
     <ol ref={listRef} aria-label={label} className={joinClasses("script-editor script-reader", className)}>
       {lines.map((pieces, index) => (
         <li key={index}>
-          <ScriptLine number={index + 1} pieces={pieces} isActing={acting.has(index + 1)} isMarked={markedLines.includes(index + 1)} onPick={onPickLine} />
+          <ScriptLine
+            number={index + 1}
+            pieces={pieces}
+            isActing={acting.has(index + 1)}
+            isMarked={markedLines.includes(index + 1)}
+            onPick={onPickLine}
+          />
           {notes?.get(index + 1)}
         </li>
       ))}
@@ -81,7 +96,12 @@ function ScriptLine({ number, pieces, isActing, isMarked, onPick }: ScriptLinePr
     <div className={joinClasses("script-reader-line", isMarked && "is-marked")}>
       {isActing && <span className="glow-sheet" data-glow-line={number} aria-hidden="true" />}
       {onPick ? (
-        <button type="button" className="script-reader-number hover:text-ink hover:underline" aria-label={`Line ${number}`} onClick={() => onPick(number)}>
+        <button
+          type="button"
+          className="script-reader-number hover:text-ink hover:underline"
+          aria-label={`Line ${number}`}
+          onClick={() => onPick(number)}
+        >
           {number}
         </button>
       ) : (
@@ -93,7 +113,13 @@ function ScriptLine({ number, pieces, isActing, isMarked, onPick }: ScriptLinePr
         {isActing && <span className="glow-bead" data-glow-line={number} />}
       </span>
       <code className="script-reader-text" style={{ "--indent": `${indent}ch` } as React.CSSProperties}>
-        {pieces.length === 0 ? " " : pieces.map((piece, i) => <span key={i} className={piece.className || undefined}>{piece.text}</span>)}
+        {pieces.length === 0
+          ? " "
+          : pieces.map((piece, i) => (
+              <span key={i} className={piece.className || undefined}>
+                {piece.text}
+              </span>
+            ))}
       </code>
     </div>
   );

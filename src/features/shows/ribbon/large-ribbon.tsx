@@ -82,7 +82,12 @@ export function LargeRibbon(props: LargeRibbonProps) {
         ))}
       </div>
       <div ref={clothRef} className="large-ribbon-cloth" onPointerDown={handlePointer}>
-        <canvas ref={canvasRef} style={{ width, height }} role="img" aria-label={`Ribbon: ${rows} rows, one for each front, in the colours the lights have over ${song.bars.length} bars`} />
+        <canvas
+          ref={canvasRef}
+          style={{ width, height }}
+          role="img"
+          aria-label={`Ribbon: ${rows} rows, one for each front, in the colours the lights have over ${song.bars.length} bars`}
+        />
         {stoppedAt !== null && (
           <div className="large-ribbon-stopped" style={{ left: toX(scale, stoppedAt), right: TAIL }}>
             <span>not written yet</span>

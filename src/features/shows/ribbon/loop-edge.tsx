@@ -15,7 +15,9 @@ export interface LoopEdgeProps {
 
 /** One end of the loop, on a bar line; dragged, or moved bar by bar with the arrow keys. */
 export function LoopEdge({ end, song, scale, loop, onLoop }: LoopEdgeProps) {
-  const lines = [...song.bars.map((bar) => bar.start), song.beats.length - 1].map((beat) => Math.round(beat * TICKS_PER_BEAT));
+  const lines = [...song.bars.map((bar) => bar.start), song.beats.length - 1].map((beat) =>
+    Math.round(beat * TICKS_PER_BEAT),
+  );
   const at = end === "start" ? loop.start : loop.end;
   const index = lines.indexOf(nearestBarLine(song, at));
   const place = (tick: number | undefined) => {
@@ -25,7 +27,12 @@ export function LoopEdge({ end, song, scale, loop, onLoop }: LoopEdgeProps) {
   };
   const drag = useDragX((x) => place(nearestBarLine(song, toTick(scale, x))));
   const handleKey = (event: KeyboardEvent) => {
-    const step = event.key === "ArrowRight" || event.key === "ArrowUp" ? 1 : event.key === "ArrowLeft" || event.key === "ArrowDown" ? -1 : 0;
+    const step =
+      event.key === "ArrowRight" || event.key === "ArrowUp"
+        ? 1
+        : event.key === "ArrowLeft" || event.key === "ArrowDown"
+          ? -1
+          : 0;
     if (step === 0) return;
     place(lines[index + step]);
     event.preventDefault();

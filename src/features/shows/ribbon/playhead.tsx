@@ -37,7 +37,14 @@ export function Playhead({ song, scale, followTick, onSeek }: PlayheadProps) {
 
   const handleKey = (event: KeyboardEvent) => {
     const perBar = song.beatsPerBar;
-    const steps: Record<string, number> = { ArrowRight: 1, ArrowUp: 1, ArrowLeft: -1, ArrowDown: -1, PageUp: -perBar, PageDown: perBar };
+    const steps: Record<string, number> = {
+      ArrowRight: 1,
+      ArrowUp: 1,
+      ArrowLeft: -1,
+      ArrowDown: -1,
+      PageUp: -perBar,
+      PageDown: perBar,
+    };
     const step = steps[event.key];
     if (event.key === "Home") onSeek(0);
     else if (event.key === "End") onSeek(scale.endTick - TICKS_PER_BEAT);

@@ -22,7 +22,11 @@ export function RibbonBars({ song, scale, loop }: RibbonBarsProps) {
       {song.bars.map((bar) => {
         const isNumbered = bar.number > 0 && (bar.number - 1) % step === 0;
         return (
-          <span key={bar.number} className={isNumbered ? "is-numbered" : undefined} style={{ left: toX(scale, bar.start * TICKS_PER_BEAT) }}>
+          <span
+            key={bar.number}
+            className={isNumbered ? "is-numbered" : undefined}
+            style={{ left: toX(scale, bar.start * TICKS_PER_BEAT) }}
+          >
             {isNumbered ? bar.number : ""}
           </span>
         );

@@ -72,7 +72,9 @@ describe("weaveCloth", () => {
   const look: ClothLook = { width: 40, height: 17, tail: 4, gap: 1, bands: [3, 1], ratio: 1, theme: "light" };
   const cells = { rows: 4, columns: 2, cells: new Uint8Array(4 * 2 * 4) };
   cells.cells.set([255, 160, 40, 255], (1 * 2 + 1) * 4);
-  const pixelAt = (pixels: Uint8ClampedArray, x: number, y: number) => [...pixels.subarray((y * look.width + x) * 4, (y * look.width + x) * 4 + 4)];
+  const pixelAt = (pixels: Uint8ClampedArray, x: number, y: number) => [
+    ...pixels.subarray((y * look.width + x) * 4, (y * look.width + x) * 4 + 4),
+  ];
 
   it("gives every row a span, a gap between bands", () => {
     expect(listRowSpans(look)).toEqual([
@@ -89,6 +91,12 @@ describe("weaveCloth", () => {
     const bare = weaveCloth(null, look);
     expect(pixelAt(woven, 30, 5)).not.toEqual(pixelAt(bare, 30, 5));
     expect(pixelAt(woven, 30, 5)[0]).toBeGreaterThan(200);
-    for (const [x, y] of [[10, 5], [30, 1], [30, 9], [38, 5]] as const) expect(pixelAt(woven, x, y)).toEqual(pixelAt(bare, x, y));
+    for (const [x, y] of [
+      [10, 5],
+      [30, 1],
+      [30, 9],
+      [38, 5],
+    ] as const)
+      expect(pixelAt(woven, x, y)).toEqual(pixelAt(bare, x, y));
   });
 });

@@ -42,6 +42,8 @@ export function presentClock(seconds: number): string {
 
 /** The bar line nearest to a tick: bar starts and the song's end. */
 export function nearestBarLine(song: BeatMap, tick: number): number {
-  const lines = [...song.bars.map((bar) => bar.start), song.beats.length - 1].map((beat) => Math.round(beat * TICKS_PER_BEAT));
+  const lines = [...song.bars.map((bar) => bar.start), song.beats.length - 1].map((beat) =>
+    Math.round(beat * TICKS_PER_BEAT),
+  );
   return lines.reduce((best, line) => (Math.abs(line - tick) < Math.abs(best - tick) ? line : best), lines[0] ?? 0);
 }

@@ -20,7 +20,11 @@ export interface ClothLook {
 const THREADS = { light: [44, 52, 86], dark: [56, 66, 106] } as const;
 
 /** Where each row of the cloth lies: its first and past-the-last device pixel. */
-export function listRowSpans({ height, gap, bands }: Pick<ClothLook, "height" | "gap" | "bands">): { top: number; bottom: number }[] {
+export function listRowSpans({
+  height,
+  gap,
+  bands,
+}: Pick<ClothLook, "height" | "gap" | "bands">): { top: number; bottom: number }[] {
   const rows = bands.reduce((sum, band) => sum + band, 0);
   const thread = (height - gap * (bands.length - 1)) / Math.max(1, rows);
   let row = 0;
@@ -45,7 +49,8 @@ export function weaveCloth(ribbon: RibbonCells | null, look: ClothLook): Uint8Cl
   listRowSpans(look).forEach(({ top, bottom }, row) => {
     for (let x = 0; x < width; x += 1) {
       const share = (x - tail) / inner;
-      const cell = ribbon && share >= 0 && share < 1 ? (row * ribbon.columns + Math.floor(share * ribbon.columns)) * 4 : -1;
+      const cell =
+        ribbon && share >= 0 && share < 1 ? (row * ribbon.columns + Math.floor(share * ribbon.columns)) * 4 : -1;
       const strength = ribbon && cell >= 0 ? (ribbon.cells[cell + 3] ?? 0) / 255 : 0;
       const isOver = (Math.floor(x / (2 * ratio)) + row) % 2 === 1;
       for (let y = top; y < bottom; y += 1) {

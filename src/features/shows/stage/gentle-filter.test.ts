@@ -32,16 +32,22 @@ describe("GentleFilter", () => {
 
   it("lets no light flash more than three times a second, whatever the show does", () => {
     fc.assert(
-      fc.property(fc.array(fc.record({ level: fc.constantFrom(0, 0.3, 1), frames: fc.integer({ min: 1, max: 12 }) }), { minLength: 20, maxLength: 60 }), (parts) => {
-        const filter = new GentleFilter(1);
-        const shown: number[] = [];
-        for (const { level, frames } of parts)
-          for (let frame = 0; frame < frames; frame += 1) {
-            filter.follow(new Float32Array([level, level, level]), FRAME_SECONDS);
-            shown.push(filter.rgb[0] ?? 0);
-          }
-        expect(countFlashes(shown)).toBeLessThanOrEqual(MOST_FLASHES);
-      }),
+      fc.property(
+        fc.array(fc.record({ level: fc.constantFrom(0, 0.3, 1), frames: fc.integer({ min: 1, max: 12 }) }), {
+          minLength: 20,
+          maxLength: 60,
+        }),
+        (parts) => {
+          const filter = new GentleFilter(1);
+          const shown: number[] = [];
+          for (const { level, frames } of parts)
+            for (let frame = 0; frame < frames; frame += 1) {
+              filter.follow(new Float32Array([level, level, level]), FRAME_SECONDS);
+              shown.push(filter.rgb[0] ?? 0);
+            }
+          expect(countFlashes(shown)).toBeLessThanOrEqual(MOST_FLASHES);
+        },
+      ),
     );
   });
 

@@ -18,16 +18,32 @@ export function getGlowLayers(radius: number): GlowLayers {
   if (known) return known;
   const tint = createSurface(radius * 2, radius * 2);
   const halo = tint.context.createRadialGradient(radius, radius, 0, radius, radius, radius);
-  for (const [at, alpha] of [[0, 0.62], [0.16, 0.34], [0.36, 0.12], [0.66, 0.035], [1, 0]] as const)
+  for (const [at, alpha] of [
+    [0, 0.62],
+    [0.16, 0.34],
+    [0.36, 0.12],
+    [0.66, 0.035],
+    [1, 0],
+  ] as const)
     halo.addColorStop(at, `rgba(255,255,255,${alpha})`);
   fill(tint, halo, radius);
   const rim = tint.context.createRadialGradient(radius, radius, 0, radius, radius, radius * 0.17);
-  for (const [at, alpha] of [[0, 1], [0.5, 1], [0.8, 0.85], [1, 0]] as const)
+  for (const [at, alpha] of [
+    [0, 1],
+    [0.5, 1],
+    [0.8, 0.85],
+    [1, 0],
+  ] as const)
     rim.addColorStop(at, `rgba(255,255,255,${alpha})`);
   fill(tint, rim, radius);
   const hot = createSurface(radius * 2, radius * 2);
   const heart = hot.context.createRadialGradient(radius, radius, 0, radius, radius, radius * 0.17);
-  for (const [at, alpha] of [[0, 0.8], [0.5, 0.5], [0.8, 0.12], [1, 0]] as const)
+  for (const [at, alpha] of [
+    [0, 0.8],
+    [0.5, 0.5],
+    [0.8, 0.12],
+    [1, 0],
+  ] as const)
     heart.addColorStop(at, `rgba(255,255,255,${alpha})`);
   fill(hot, heart, radius);
   const made = { tint: tint.canvas, hot: hot.canvas };

@@ -46,7 +46,9 @@ describe("findHit", () => {
   it("gives the front without a light between its lights", () => {
     const [house] = fronts;
     if (!house?.facade) throw new Error("no house");
-    const gaps = Array.from({ length: 40 }, (_, i) => findHit(fronts, house.x + house.width / 2, house.groundY - i * 4));
+    const gaps = Array.from({ length: 40 }, (_, i) =>
+      findHit(fronts, house.x + house.width / 2, house.groundY - i * 4),
+    );
     expect(gaps.some((hit) => hit?.front.frontId === house.frontId && hit.light === null)).toBe(true);
   });
 

@@ -86,7 +86,12 @@ function bakeLayers(front: FrontGeometry, light: LightGeometry, box: Box, scale:
 const WASH: { readonly [part: string]: number } = { windows: 0.034, door: 0.085 };
 
 /** Light falling on the paper of the house, and no further. */
-function bakeWash(context: CanvasRenderingContext2D, front: FrontGeometry, light: LightGeometry, scale: LightScale): void {
+function bakeWash(
+  context: CanvasRenderingContext2D,
+  front: FrontGeometry,
+  light: LightGeometry,
+  scale: LightScale,
+): void {
   const clip = wallClip(front);
   if (!clip) return;
   const reach = haloRadius(scale) * 3.4;

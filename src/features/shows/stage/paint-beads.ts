@@ -1,7 +1,12 @@
 import type { FrontGeometry } from "../../../../sandbox/square/geometry.ts";
 
 /** Strings that are not lit: dull beads on a thin wire. */
-export function paintBeads(context: CanvasRenderingContext2D, front: FrontGeometry, unit: number, isSmall: boolean): void {
+export function paintBeads(
+  context: CanvasRenderingContext2D,
+  front: FrontGeometry,
+  unit: number,
+  isSmall: boolean,
+): void {
   const radius = isSmall ? 0.5 : Math.max(0.95, unit * 0.0036);
   const isTree = front.tree !== null;
   for (const light of front.lights) {
@@ -16,6 +21,7 @@ export function paintBeads(context: CanvasRenderingContext2D, front: FrontGeomet
     context.fill();
     if (isSmall || isTree) continue;
     context.fillStyle = "rgba(225,230,248,.55)";
-    for (const { x, y } of light.beads) context.fillRect(x - radius * 0.6, y - radius * 0.7, radius * 0.6, radius * 0.6);
+    for (const { x, y } of light.beads)
+      context.fillRect(x - radius * 0.6, y - radius * 0.7, radius * 0.6, radius * 0.6);
   }
 }

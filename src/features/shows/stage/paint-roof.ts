@@ -33,7 +33,12 @@ function paintClock(context: CanvasRenderingContext2D, { facade, ink, soft }: Ho
   const tip = Math.min(...facade.tower.cap.map((point) => point.y));
   context.fillStyle = shade(ink, 0.2);
   context.fillRect(x - 0.8, tip - facade.unit * 0.022, 1.6, facade.unit * 0.03);
-  const ledge = rectPath(body.x - body.width * 0.06, body.y + body.width * 1.02, body.width * 1.12, facade.unit * 0.009);
+  const ledge = rectPath(
+    body.x - body.width * 0.06,
+    body.y + body.width * 1.02,
+    body.width * 1.12,
+    facade.unit * 0.009,
+  );
   cutSheet(context, ledge, { fill: shade(ink, 0.14), blur: soft(4), drop: soft(2) });
   context.strokeStyle = "#2a3152";
   context.lineWidth = Math.max(1, radius * 0.1);

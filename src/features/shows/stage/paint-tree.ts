@@ -25,5 +25,11 @@ export function paintTree(context: CanvasRenderingContext2D, front: FrontGeometr
   const tip = new Path2D();
   tip.arc(x + width / 2, y + height / 2, width * 0.26, 0, 2 * Math.PI);
   cutSheet(context, tip, { fill: "#a9adbf", blur: 5 * scale.dpr * soft, drop: 2 * scale.dpr * soft });
-  if (!scale.isSmall) layGrain(context, "source-atop", 0.6, { x: tree.x - 40, y: tree.y - 40, width: tree.width + 80, height: tree.height + 80 });
+  if (!scale.isSmall)
+    layGrain(context, "source-atop", 0.6, {
+      x: tree.x - 40,
+      y: tree.y - 40,
+      width: tree.width + 80,
+      height: tree.height + 80,
+    });
 }

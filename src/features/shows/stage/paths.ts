@@ -66,7 +66,12 @@ export function listBars(opening: Opening, thickness: number): Rect[] {
   const arch = opening.shape === "arch" ? width / 2 : 0;
   const bars: Rect[] = [];
   for (let column = 1; column < columns; column += 1)
-    bars.push({ x: x + (width * column) / columns - thickness / 2, y: y + arch, width: thickness, height: height - arch });
+    bars.push({
+      x: x + (width * column) / columns - thickness / 2,
+      y: y + arch,
+      width: thickness,
+      height: height - arch,
+    });
   for (let row = 1; row < rows; row += 1)
     bars.push({ x, y: y + arch + ((height - arch) * row) / rows - thickness / 2, width, height: thickness });
   if (arch > 0) bars.push({ x, y: y + arch - thickness / 2, width, height: thickness });

@@ -18,7 +18,7 @@ describe("toShownColour", () => {
   it("keeps the colour whatever the level", () => {
     const full = shownAt(0xffa62a, 100).colour;
     expect(shownAt(0xffa62a, 30).colour).toBe(full);
-    expect(Math.abs((full >> 8 & 0xff) - 0xa6)).toBeLessThanOrEqual(4);
+    expect(Math.abs(((full >> 8) & 0xff) - 0xa6)).toBeLessThanOrEqual(4);
   });
 
   it("is dark where nothing is to be seen", () => {

@@ -18,6 +18,22 @@ export interface SideSpan {
   readonly width: number;
 }
 
+/** Width of what stands free, as a share of the height of the houses. */
+const FREE_WIDTH = 0.5;
+
+function gapOf(width: number): number {
+  return Math.max(5, width * 0.009);
+}
+
+/** Where the sides lie in a strip of this size; what stands free has a place at its right end. */
+export function listSideSpans(layout: Layout, size: { readonly width: number; readonly height: number }): SideSpan[] {
+  const gap = gapOf(size.width);
+  const hasFree = layout.fronts.some((front) => front.side === null);
+  const free = hasFree ? (size.height - GROUND) * FREE_WIDTH + gap : 0;
+  const width = Math.max(0, (size.width - gap * (SIDES.length + 1) - free) / SIDES.length);
+  return SIDES.map((side, i) => ({ side, x: gap + i * (width + gap), width }));
+}
+
 interface Block {
   /** Shift of the block's own view in the strip. */
   readonly x: number;
@@ -33,16 +49,11 @@ export class UnrolledStrip {
   #size = { width: 0, height: 0, dpr: 1 };
   #base: Surface | null = null;
   #blocks: Block[] = [];
-  #spans: SideSpan[] = [];
 
   constructor(canvas: HTMLCanvasElement, layout: Layout) {
     this.#canvas = canvas;
     this.#context = getContext(canvas, false);
     this.#layout = layout;
-  }
-
-  get spans(): readonly SideSpan[] {
-    return this.#spans;
   }
 
   setSize(size: { readonly width: number; readonly height: number; readonly dpr: number }): void {
@@ -84,21 +95,22 @@ export class UnrolledStrip {
   #build(): void {
     this.dispose();
     const { width, height, dpr } = this.#size;
-    const gap = Math.max(5, width * 0.009);
     // The sandbox leaves a share of every view to the paving; ask for one that ends at our ground.
     const ground = height - GROUND;
     const viewHeight = height * (ground / viewFrame({ width, height }, 1).groundY);
-    const free = this.#layout.fronts.some((front) => front.side === null) ? ground * 0.5 : 0;
-    const sideWidth = (width - gap * 5 - (free > 0 ? free + gap : 0)) / SIDES.length;
-    this.#spans = SIDES.map((side, i) => ({ side, x: gap + i * (sideWidth + gap), width: sideWidth }));
+    const spans = listSideSpans(this.#layout, this.#size);
     const base = createSurface(width * dpr, height * dpr);
     paintBackdrop(base, { width, height, ground, dpr });
-    for (const span of this.#spans) {
+    for (const span of spans) {
       const view = { width: span.width, height: viewHeight };
       const fronts = sideGeometry(this.#layout, span.side, view);
-      this.#addBlock(base, span.x, fronts.filter((front) => front.side !== null));
-      if (span.side !== "west" || free === 0) continue;
-      const middle = width - gap - free / 2;
+      this.#addBlock(
+        base,
+        span.x,
+        fronts.filter((front) => front.side !== null),
+      );
+      if (span.side !== "west") continue;
+      const middle = width - gapOf(width) - (ground * FREE_WIDTH) / 2;
       for (const tree of fronts.filter((front) => front.side === null))
         this.#addBlock(base, middle - tree.x - tree.width / 2, [tree], ground - tree.groundY);
     }

@@ -49,7 +49,9 @@ export function CheckPane({ song, run, onShow, onShowProblem }: CheckPaneProps) 
       </ul>
       {!problem && findings.length === 0 && <p className="studio-empty">{presentEmpty(run, isChecking)}</p>}
       {findings.length > 0 && isChecking && <p className="studio-empty">The flash check is still running.</p>}
-      <p className="studio-aid">A planning aid: flashing light can harm people. The safety officer decides. Handing in is always possible.</p>
+      <p className="studio-aid">
+        A planning aid: flashing light can harm people. The safety officer decides. Handing in is always possible.
+      </p>
     </>
   );
 }
@@ -94,12 +96,18 @@ function ProblemRow({ problem, onShow }: { problem: Problem; onShow: () => void 
 function presentPlaces(song: BeatMap, { lines, moments, lights }: Finding): string {
   const [moment] = moments;
   const pieces: string[] = [];
-  if (lines.length > 0) pieces.push(lines.length === 1 ? `line ${lines[0]}` : `lines ${lines.slice(0, 4).join(", ")}${lines.length > 4 ? " ..." : ""}`);
+  if (lines.length > 0)
+    pieces.push(
+      lines.length === 1
+        ? `line ${lines[0]}`
+        : `lines ${lines.slice(0, 4).join(", ")}${lines.length > 4 ? " ..." : ""}`,
+    );
   if (moment !== undefined) {
     const { bar, beat } = findSongPlace(song, moment);
     pieces.push(`bar ${bar}, beat ${beat}${moments.length > 1 ? ` and ${moments.length - 1} more` : ""}`);
   }
-  if (lights.length > 0) pieces.push(lights.length === 1 ? "1 light" : `${lights.length}${lights.length === 50 ? " or more" : ""} lights`);
+  if (lights.length > 0)
+    pieces.push(lights.length === 1 ? "1 light" : `${lights.length}${lights.length === 50 ? " or more" : ""} lights`);
   return pieces.join(" · ");
 }
 

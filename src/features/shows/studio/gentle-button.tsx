@@ -14,7 +14,13 @@ export function GentleButton({ isGentle, reason, onGentle }: GentleButtonProps) 
   const isOn = isGentle || reason !== null;
   return (
     <div className="studio-gentle">
-      <button type="button" aria-pressed={isOn} aria-disabled={reason !== null || undefined} aria-describedby={reason ? reasonId : undefined} onClick={() => reason === null && onGentle(!isGentle)}>
+      <button
+        type="button"
+        aria-pressed={isOn}
+        aria-disabled={reason !== null || undefined}
+        aria-describedby={reason ? reasonId : undefined}
+        onClick={() => reason === null && onGentle(!isGentle)}
+      >
         <Icon name="gentle" />
         Gentle preview <b>{isOn ? "on" : "off"}</b>
       </button>

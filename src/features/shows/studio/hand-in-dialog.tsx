@@ -57,8 +57,15 @@ export function HandInDialog({ title, run, isRunCurrent, onHandIn, onClose }: Ha
 
 function findWarning(run: RunState): { title: string; meaning: string } | null {
   const { outcome } = run;
-  if (outcome?.ok === false) return { title: "This script does not run.", meaning: `Line ${outcome.problem.range.line} has a problem. You can hand it in all the same: it is marked "does not run".` };
+  if (outcome?.ok === false)
+    return {
+      title: "This script does not run.",
+      meaning: `Line ${outcome.problem.range.line} has a problem. You can hand it in all the same: it is marked "does not run".`,
+    };
   const stops = listFindings(run).filter((finding) => finding.severity === "stop").length;
   if (stops === 0) return null;
-  return { title: stops === 1 ? "The check found 1 stop." : `The check found ${stops} stops.`, meaning: "You can hand it in all the same. It can not go to the square until that is mended." };
+  return {
+    title: stops === 1 ? "The check found 1 stop." : `The check found ${stops} stops.`,
+    meaning: "You can hand it in all the same. It can not go to the square until that is mended.",
+  };
 }

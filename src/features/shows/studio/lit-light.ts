@@ -19,7 +19,8 @@ export interface LitLight {
 /** The brightest of some lights at the frame's moment, or null when all of them are dark. */
 export function findLitLight(timeline: Timeline, frame: Frame, lights: readonly Light[]): LitLight | null {
   let best: Light | null = null;
-  for (const light of lights) if ((frame.level[light.index] ?? 0) > (best ? (frame.level[best.index] ?? 0) : 0.5)) best = light;
+  for (const light of lights)
+    if ((frame.level[light.index] ?? 0) > (best ? (frame.level[best.index] ?? 0) : 0.5)) best = light;
   if (!best) return null;
   return {
     part: best.pixel === null ? best.part : `${best.part}, light ${best.pixel}`,

@@ -37,7 +37,7 @@ const GROUPS = [
 
 function WordList({ label }: { label: string }) {
   return (
-    <div className="studio-words" role="region" aria-label={label} tabIndex={0}>
+    <div className="studio-words" role="group" aria-label={label}>
       {GROUPS.map(({ title, words }) => (
         <section key={title}>
           <h3>{title}</h3>

@@ -24,7 +24,15 @@ export function NamesMap({ layout, onInsert }: NamesMapProps) {
     setPart(null);
   };
   const cell = (front: Front) => (
-    <button key={front.id} type="button" className="studio-map-cell" aria-label={front.name} title={front.name} aria-pressed={front.id === picked.id} onClick={() => pick(front.id)}>
+    <button
+      key={front.id}
+      type="button"
+      className="studio-map-cell"
+      aria-label={front.name}
+      title={front.name}
+      aria-pressed={front.id === picked.id}
+      onClick={() => pick(front.id)}
+    >
       <MiniFront front={front} />
     </button>
   );
@@ -44,7 +52,9 @@ export function NamesMap({ layout, onInsert }: NamesMapProps) {
       <div className="studio-court">
         <p className="studio-court-side">
           <span>
-            <b>{picked.side ? `${picked.side.charAt(0).toUpperCase()}${picked.side.slice(1)} side` : "In the middle"}</b>
+            <b>
+              {picked.side ? `${picked.side.charAt(0).toUpperCase()}${picked.side.slice(1)} side` : "In the middle"}
+            </b>
             {picked.side ? ", in walking order" : ""}
           </span>
           {fronts.filter((front) => front.side === null).map(cell)}
@@ -54,7 +64,12 @@ export function NamesMap({ layout, onInsert }: NamesMapProps) {
             .filter((front) => front.side === picked.side)
             .map((front) => (
               <li key={front.id}>
-                <button type="button" className={joinClasses(front.id === picked.id && "is-on")} aria-pressed={front.id === picked.id} onClick={() => pick(front.id)}>
+                <button
+                  type="button"
+                  className={joinClasses(front.id === picked.id && "is-on")}
+                  aria-pressed={front.id === picked.id}
+                  onClick={() => pick(front.id)}
+                >
                   {front.name}
                 </button>
               </li>
@@ -65,7 +80,13 @@ export function NamesMap({ layout, onInsert }: NamesMapProps) {
           {picked.boxes
             .flatMap((box) => box.outlets)
             .map((outlet) => (
-              <button key={outlet.part} type="button" className="studio-chip" aria-pressed={part === outlet.part} onClick={() => setPart(part === outlet.part ? null : outlet.part)}>
+              <button
+                key={outlet.part}
+                type="button"
+                className="studio-chip"
+                aria-pressed={part === outlet.part}
+                onClick={() => setPart(part === outlet.part ? null : outlet.part)}
+              >
                 {outlet.part}
               </button>
             ))}

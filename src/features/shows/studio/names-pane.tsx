@@ -33,7 +33,14 @@ export function NamesPane({ layout, names, onInsert }: NamesPaneProps) {
       </div>
       {view === "fronts" && <NamesMap layout={layout} onInsert={onInsert} />}
       {view === "song" && <NamesList items={listSongNames(names)} label="Names of the song" onInsert={onInsert} />}
-      {view === "colours" && <NamesList items={names.colour.map((colour) => ({ ...colour, code: `"${colour.name}"` }))} label="Colours" onInsert={onInsert} isDense />}
+      {view === "colours" && (
+        <NamesList
+          items={names.colour.map((colour) => ({ ...colour, code: `"${colour.name}"` }))}
+          label="Colours"
+          onInsert={onInsert}
+          isDense
+        />
+      )}
       {view === "words" && <NamesList items={null} label="Words of the language" onInsert={onInsert} />}
     </div>
   );

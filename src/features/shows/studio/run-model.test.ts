@@ -2,7 +2,16 @@ import { describe, expect, it } from "vitest";
 import type { Finding, RunOutcome } from "../../../../sandbox/engine/model.ts";
 import { buildTimeline } from "../../../../sandbox/timeline/build.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
-import { findGentleReason, findRibbonTimeline, FIRST_RUN_STATE, listActLines, listFindings, presentRun, reduceRun, type RunEvent } from "./run-model.ts";
+import {
+  findGentleReason,
+  findRibbonTimeline,
+  FIRST_RUN_STATE,
+  listActLines,
+  listFindings,
+  presentRun,
+  reduceRun,
+  type RunEvent,
+} from "./run-model.ts";
 
 function build(isComplete: boolean): Timeline {
   const head = { language: 1, songId: "s", layoutHash: "h", seed: 1, lightCount: 4, endTick: 9600, isComplete };
@@ -21,7 +30,14 @@ const bad: RunOutcome = {
   timeline: build(false),
   ...report,
 };
-const flash: Finding = { rule: "street-flash", severity: "stop", sentence: "Too many flashes.", moments: [0], lights: [], lines: [2] };
+const flash: Finding = {
+  rule: "street-flash",
+  severity: "stop",
+  sentence: "Too many flashes.",
+  moments: [0],
+  lights: [],
+  lines: [2],
+};
 
 function play(...events: RunEvent[]) {
   return events.reduce(reduceRun, FIRST_RUN_STATE);
@@ -40,13 +56,21 @@ describe("reduceRun", () => {
   });
 
   it("drops the answer to a run that was overtaken", () => {
-    const state = play({ type: "started", run: 1 }, { type: "started", run: 2 }, { type: "finished", run: 1, source: "old", outcome: good });
+    const state = play(
+      { type: "started", run: 1 },
+      { type: "started", run: 2 },
+      { type: "finished", run: 1, source: "old", outcome: good },
+    );
     expect(state).toMatchObject({ isRunning: true, onStage: null });
   });
 
   it("drops findings about a show that is no longer on stage", () => {
     const other: RunOutcome = { ...good, timeline: build(true) };
-    const state = play(...finish(1, good), ...finish(2, other), { type: "checked", timeline: good.timeline, findings: [flash] });
+    const state = play(...finish(1, good), ...finish(2, other), {
+      type: "checked",
+      timeline: good.timeline,
+      findings: [flash],
+    });
     expect(state.checked).toBeNull();
   });
 
@@ -59,13 +83,19 @@ describe("findGentleReason", () => {
   it("is on by itself until the flash check has passed, and after a flash stop", () => {
     const unchecked = play(...finish(1, good));
     expect(findGentleReason(unchecked)).toContain("not done");
-    expect(findGentleReason(reduceRun(unchecked, { type: "checked", timeline: good.timeline, findings: [flash] }))).toContain("too often");
-    expect(findGentleReason(reduceRun(unchecked, { type: "checked", timeline: good.timeline, findings: [] }))).toBeNull();
+    expect(
+      findGentleReason(reduceRun(unchecked, { type: "checked", timeline: good.timeline, findings: [flash] })),
+    ).toContain("too often");
+    expect(
+      findGentleReason(reduceRun(unchecked, { type: "checked", timeline: good.timeline, findings: [] })),
+    ).toBeNull();
   });
 
   it("does not mind other stops", () => {
     const stop: Finding = { ...flash, rule: "circuit-overload" };
-    expect(findGentleReason(play(...finish(1, good), { type: "checked", timeline: good.timeline, findings: [stop] }))).toBeNull();
+    expect(
+      findGentleReason(play(...finish(1, good), { type: "checked", timeline: good.timeline, findings: [stop] })),
+    ).toBeNull();
   });
 });
 

@@ -51,7 +51,9 @@ export function findRibbonTimeline({ outcome, onStage }: RunState): Timeline | n
 
 /** All findings about the newest run: those of the run itself, then those of the show check. */
 export function listFindings({ outcome, checked }: RunState): readonly Finding[] {
-  return outcome?.ok ? [...outcome.findings, ...(checked ?? [])].sort((a, b) => RANK[a.severity] - RANK[b.severity]) : (outcome?.findings ?? []);
+  return outcome?.ok
+    ? [...outcome.findings, ...(checked ?? [])].sort((a, b) => RANK[a.severity] - RANK[b.severity])
+    : (outcome?.findings ?? []);
 }
 
 const RANK = { stop: 0, warn: 1, note: 2 } as const;

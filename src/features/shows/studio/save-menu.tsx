@@ -32,7 +32,7 @@ const AGE_MS = 5000;
 
 /** The save state, always in words; it opens to the reason and to earlier versions. */
 export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
-  const panel = useDisclosure();
+  const { isOpen, panelId, rootRef, toggle, close } = useDisclosure();
   const [now, setNow] = useState(() => Date.now());
   useEffect(() => {
     const timer = setInterval(() => setNow(Date.now()), AGE_MS);
@@ -41,8 +41,14 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
   const { label, detail, tone } = presentSaveStatus(draft, Math.max(now, draft.savedAt ?? 0));
   const isChoice = label === "Two versions";
   return (
-    <div ref={panel.rootRef} className="studio-save">
-      <button type="button" className={joinClasses("studio-save-button", `is-${tone}`)} aria-expanded={panel.isOpen} aria-controls={panel.panelId} onClick={panel.toggle}>
+    <div ref={rootRef} className="studio-save">
+      <button
+        type="button"
+        className={joinClasses("studio-save-button", `is-${tone}`)}
+        aria-expanded={isOpen}
+        aria-controls={panelId}
+        onClick={toggle}
+      >
         <Icon name={ICONS[tone]} />
         <span className="studio-save-words">
           {label}
@@ -53,8 +59,8 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
       <span className="sr-only" role="status">
         {tone === "careful" ? `${label}. ${detail}` : ""}
       </span>
-      {panel.isOpen && (
-        <div id={panel.panelId} className="studio-sheet">
+      {isOpen && (
+        <div id={panelId} className="studio-sheet">
           {tone !== "calm" && <p className="studio-sheet-detail">{detail}</p>}
           {isChoice && (
             <Button look="main" size="small" onPress={onChoose}>
@@ -77,7 +83,7 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
                     look="quiet"
                     size="small"
                     onPress={() => {
-                      panel.close();
+                      close();
                       onLook(version);
                     }}
                   >

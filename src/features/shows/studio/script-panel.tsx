@@ -82,15 +82,31 @@ export function ScriptPanel(props: ScriptPanelProps) {
           <Icon name="bulb" className="size-4" />
           <span>{stageNote}</span>
         </p>
-        <button type="button" className="studio-quiet-icon" aria-pressed={isLarge} aria-label="Large letters" onClick={toggleSize}>
+        <button
+          type="button"
+          className="studio-quiet-icon"
+          aria-pressed={isLarge}
+          aria-label="Large letters"
+          onClick={toggleSize}
+        >
           <Icon name="letters" />
         </button>
-        <button type="button" className="studio-run" aria-keyshortcuts="Control+Enter" aria-busy={isRunning} onClick={() => editor && onRun(editor.source)}>
+        <button
+          type="button"
+          className="studio-run"
+          aria-keyshortcuts="Control+Enter"
+          aria-busy={isRunning}
+          onClick={() => editor && onRun(editor.source)}
+        >
           <i aria-hidden="true" className={isRunning ? "is-running" : undefined} />
           Run <kbd>Ctrl Enter</kbd>
         </button>
       </div>
-      <div ref={hostRef} className="script-editor studio-script-text" style={isLarge ? ({ "--script-size": "1.3125rem" } as React.CSSProperties) : undefined} />
+      <div
+        ref={hostRef}
+        className="script-editor studio-script-text"
+        style={isLarge ? ({ "--script-size": "1.3125rem" } as React.CSSProperties) : undefined}
+      />
       <p id={hintId} className="sr-only">
         Press Escape, then Tab, to leave the script. Control and Enter runs it. Alt and Enter takes an offered fix.
       </p>

@@ -139,4 +139,3 @@ export class ShowPlayer {
     if (isMoving) this.redraw();
   }
 }
-

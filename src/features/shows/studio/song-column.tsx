@@ -31,7 +31,10 @@ export function SongColumn({ song, run, ...stage }: SongColumnProps) {
   const bands = useMemo(() => listBands(layout), [layout]);
   const section = usePlayingSection(player, song);
   const thread = useThread();
-  const followTick = useCallback((show: (tick: number) => void) => player.addView({ showMoment: ({ tick }) => show(tick) }), [player]);
+  const followTick = useCallback(
+    (show: (tick: number) => void) => player.addView({ showMoment: ({ tick }) => show(tick) }),
+    [player],
+  );
   const toggleLoop = () => {
     const { loop, isLooping } = player.transport.state;
     player.transport.setLoop(loop ?? loopAround(song, player.tick), !isLooping);
@@ -63,16 +66,21 @@ export function SongColumn({ song, run, ...stage }: SongColumnProps) {
 function useRibbonCells(timeline: Timeline | null, layout: Layout): RibbonCells | null {
   const [cells, setCells] = useState<RibbonCells | null>(null);
   useEffect(() => {
-    if (!timeline) return setCells(null);
-    return queueDrawing(() => setCells(ribbonCells(timeline, layout, { rows: layout.fronts.length, columns: RIBBON_COLUMNS })));
+    if (!timeline) return;
+    return queueDrawing(() =>
+      setCells(ribbonCells(timeline, layout, { rows: layout.fronts.length, columns: RIBBON_COLUMNS })),
+    );
   }, [timeline, layout]);
-  return cells;
+  return timeline ? cells : null;
 }
 
 /** Index of the section that is playing; renders again only when it changes. */
 function usePlayingSection(player: ShowPlayer, song: BeatMap): number {
   const [section, setSection] = useState(0);
-  useEffect(() => player.addView({ showMoment: ({ tick }) => setSection(findSongPlace(song, tick).section) }), [player, song]);
+  useEffect(
+    () => player.addView({ showMoment: ({ tick }) => setSection(findSongPlace(song, tick).section) }),
+    [player, song],
+  );
   return section;
 }
 
@@ -86,13 +94,17 @@ function useThread(): number {
 
 function listBands(layout: Layout): { name: string; rows: number }[] {
   const rowsOf = (side: string | null) => layout.fronts.filter((front) => front.side === side).length;
-  return [...SIDES.map((side) => ({ name: side.charAt(0).toUpperCase() + side.slice(1), rows: rowsOf(side) })), { name: "Tree", rows: rowsOf(null) }].filter((band) => band.rows > 0);
+  return [
+    ...SIDES.map((side) => ({ name: side.charAt(0).toUpperCase() + side.slice(1), rows: rowsOf(side) })),
+    { name: "Tree", rows: rowsOf(null) },
+  ].filter((band) => band.rows > 0);
 }
 
 /** The section that plays at a tick, else the eight bars around it. */
 function loopAround(song: BeatMap, tick: number): TickLoop {
   const section = song.sections[findSongPlace(song, tick).section];
-  if (section) return { start: Math.round(section.start * TICKS_PER_BEAT), end: Math.round(section.end * TICKS_PER_BEAT) };
+  if (section)
+    return { start: Math.round(section.start * TICKS_PER_BEAT), end: Math.round(section.end * TICKS_PER_BEAT) };
   const end = (song.beats.length - 1) * TICKS_PER_BEAT;
   const bars = 8 * song.beatsPerBar * TICKS_PER_BEAT;
   const start = nearestBarLine(song, Math.max(0, tick - bars / 2));

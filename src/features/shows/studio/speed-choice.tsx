@@ -14,7 +14,13 @@ export interface SpeedChoiceProps {
 /** How fast the song runs; the pitch stays. */
 export function SpeedChoice({ rate, onRate }: SpeedChoiceProps) {
   return (
-    <RadioGroup aria-label="Speed" orientation="horizontal" value={String(rate)} onChange={(value) => onRate(Number(value))} className="studio-speed">
+    <RadioGroup
+      aria-label="Speed"
+      orientation="horizontal"
+      value={String(rate)}
+      onChange={(value) => onRate(Number(value))}
+      className="studio-speed"
+    >
       {SPEEDS.map((speed) => (
         <Radio key={speed.rate} value={String(speed.rate)} aria-label={speed.word} className="studio-speed-step">
           {speed.sign}

@@ -5,7 +5,7 @@ import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { useElementSize } from "../../../hooks/use-element-size.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
 import { Stage } from "../stage/stage.ts";
-import { UnrolledStrip, type SideSpan } from "../stage/unrolled-strip.ts";
+import { listSideSpans, UnrolledStrip } from "../stage/unrolled-strip.ts";
 import { findLitLight, type LitLight } from "./lit-light.ts";
 import type { ShowPlayer } from "./show-player.ts";
 import { FrontButtons } from "./front-buttons.tsx";
@@ -25,12 +25,20 @@ export interface StageWindowProps {
   gentleReason: string | null;
   onGentle: (isGentle: boolean) => void;
   onGoToLine: (line: number) => void;
-  /** What the picture shows, for assistive technology. */
+  /** The whole show in words, for people who can not see it. */
   description: string;
 }
 
 /** The window onto the square: one side at dusk, all sides in a strip below, and what is lit by which line. */
-export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, onGoToLine, description }: StageWindowProps) {
+export function StageWindow({
+  layout,
+  player,
+  isGentle,
+  gentleReason,
+  onGentle,
+  onGoToLine,
+  description,
+}: StageWindowProps) {
   const stageRef = useRef<HTMLCanvasElement>(null);
   const stripRef = useRef<HTMLCanvasElement>(null);
   const stageBox = useRef<HTMLDivElement>(null);
@@ -39,7 +47,6 @@ export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, 
   const stripSize = useElementSize(stripBox);
   const [side, setSide] = useState<Side>("north");
   const [first, setFirst] = useState(0);
-  const [spans, setSpans] = useState<readonly SideSpan[]>([]);
   const [why, setWhy] = useState<WhyPlace | null>(null);
   const lights = useMemo(() => listLights(layout), [layout]);
   const fronts = useMemo(() => listFronts(layout), [layout]);
@@ -57,12 +64,10 @@ export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, 
   useEffect(() => {
     if (!strip || stripSize.width === 0) return;
     strip.setSize({ ...stripSize, dpr: window.devicePixelRatio || 1 });
-    setSpans(strip.spans);
     player.redraw();
   }, [strip, stripSize, player]);
   useEffect(() => {
     stage?.look(side, isPhone ? first : 0);
-    setWhy(null);
     player.redraw();
   }, [stage, side, first, isPhone, player]);
   useEffect(() => {
@@ -76,7 +81,8 @@ export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, 
   }, [stage, strip, player]);
 
   const readLight = useCallback(
-    (candidates: readonly Light[]): LitLight | null => player.timeline && findLitLight(player.timeline, player.readFrame(), candidates),
+    (candidates: readonly Light[]): LitLight | null =>
+      player.timeline && findLitLight(player.timeline, player.readFrame(), candidates),
     [player],
   );
   const showWhy = (frontIndex: number, light: Light | null) => {
@@ -100,21 +106,43 @@ export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, 
     // A finger first shows the card; its link goes to the line.
     if (lit?.line && event.pointerType !== "touch") onGoToLine(lit.line);
   };
+  const look = (next: Side, from: number) => {
+    setSide(next);
+    setFirst(from);
+    setWhy(null);
+  };
   const walk = (step: number) => {
     const next = first + step * PHONE_FRONTS;
     if (isPhone && next > -PHONE_FRONTS && next < sideLength && !(step < 0 && first === 0)) {
-      setFirst(Math.min(Math.max(0, next), Math.max(0, sideLength - PHONE_FRONTS)));
+      look(side, Math.min(Math.max(0, next), Math.max(0, sideLength - PHONE_FRONTS)));
       return;
     }
-    setSide(SIDES[(SIDES.indexOf(side) + step + SIDES.length) % SIDES.length] ?? "north");
-    setFirst(0);
+    look(SIDES[(SIDES.indexOf(side) + step + SIDES.length) % SIDES.length] ?? "north", 0);
   };
 
   return (
     <div className="studio-window" onPointerLeave={() => setWhy(null)}>
       <div ref={stageBox} className="studio-window-stage">
-        <canvas ref={stageRef} role="img" aria-label={`${sideName(side)} of the square at dusk. ${description}`} onPointerMove={handleMove} onPointerUp={handleUp} />
-        {stage && <FrontButtons fronts={stage.fronts} key={`${side}-${first}-${stageSize.width}`} onShow={(index) => showWhy(index, null)} onHide={() => setWhy(null)} onGo={() => why?.lit?.line && onGoToLine(why.lit.line)} />}
+        <canvas
+          ref={stageRef}
+          role="img"
+          aria-label={`${sideName(side)} of the square at dusk`}
+          aria-describedby="studio-description"
+          onPointerMove={handleMove}
+          onPointerUp={handleUp}
+        />
+        <p id="studio-description" className="sr-only">
+          {description}
+        </p>
+        {stage && (
+          <FrontButtons
+            fronts={stage.fronts}
+            key={`${side}-${first}-${stageSize.width}`}
+            onShow={(index) => showWhy(index, null)}
+            onHide={() => setWhy(null)}
+            onGo={() => why?.lit?.line && onGoToLine(why.lit.line)}
+          />
+        )}
         {why && <WhyCard place={why} width={stageSize.width} onGoToLine={onGoToLine} />}
       </div>
       <SideWalk side={side} onWalk={walk} />
@@ -122,12 +150,9 @@ export function StageWindow({ layout, player, isGentle, gentleReason, onGentle, 
       <div ref={stripBox} className="studio-window-strip">
         <canvas ref={stripRef} role="img" aria-label="All fronts of the square side by side" />
         <SideStrip
-          spans={spans}
+          spans={stripSize.width > 0 ? listSideSpans(layout, stripSize) : []}
           side={side}
-          onLook={(next) => {
-            setSide(next);
-            setFirst(0);
-          }}
+          onLook={(next) => look(next, 0)}
         />
       </div>
     </div>

@@ -17,13 +17,25 @@ export interface StudioHeaderProps {
 }
 
 /** The studio's own head: the way home, the show's name, the save state in words, Hand in. */
-export function StudioHeader({ title, context, homeHref, draft, versions, onLook, onChoose, onHandIn }: StudioHeaderProps) {
+export function StudioHeader({
+  title,
+  context,
+  homeHref,
+  draft,
+  versions,
+  onLook,
+  onChoose,
+  onHandIn,
+}: StudioHeaderProps) {
   return (
     <header className="studio-head">
       <Link to={homeHref} className="studio-brand" aria-label="Duskbell, home">
         <svg viewBox="0 0 32 32" width="30" height="30" aria-hidden="true">
           <path className="studio-brand-roof" d="M3 29V14.5h3V11h3V7.5h3.2V4h7.6v3.500H23V11h3v3.500h3V29Z" />
-          <path className="studio-brand-bell" d="M16 10.2c3.3 0 4.7 2.4 4.800 5.400.1 2.900.9 4.400 2.400 5.600H8.800c1.500-1.200 2.300-2.700 2.400-5.600.1-3 1.500-5.400 4.800-5.400Zm-2.100 12.300h4.200a2.100 2.100 0 0 1-4.200 0Z" />
+          <path
+            className="studio-brand-bell"
+            d="M16 10.2c3.3 0 4.7 2.4 4.800 5.400.1 2.900.9 4.400 2.400 5.600H8.800c1.500-1.200 2.300-2.700 2.400-5.600.1-3 1.500-5.400 4.800-5.400Zm-2.100 12.300h4.200a2.100 2.100 0 0 1-4.200 0Z"
+          />
         </svg>
         <span>Duskbell</span>
       </Link>

@@ -111,7 +111,11 @@ function OpenStudio(props: OpenStudioProps) {
     setTab("script");
     requestAnimationFrame(() => editor.current?.insert(code));
   };
-  const description = run.onStage && props.describeShow ? props.describeShow(run.onStage) : presentRun(run);
+  const { describeShow } = props;
+  const description = useMemo(
+    () => (run.onStage && describeShow ? describeShow(run.onStage) : "Nothing is on stage yet."),
+    [run.onStage, describeShow],
+  );
 
   return (
     <div className="studio" data-tab={selected}>
@@ -138,7 +142,11 @@ function OpenStudio(props: OpenStudioProps) {
           description={description}
         />
         <div className="studio-work">
-          <div id="studio-pane-script" className="studio-script-slot" {...(isPhone && { role: "tabpanel", "aria-labelledby": "studio-tab-script" })}>
+          <div
+            id="studio-pane-script"
+            className="studio-script-slot"
+            {...(isPhone && { role: "tabpanel", "aria-labelledby": "studio-tab-script" })}
+          >
             <ScriptPanel
               ref={editor}
               source={firstSource}
@@ -154,13 +162,35 @@ function OpenStudio(props: OpenStudioProps) {
             />
           </div>
           <div className="studio-tray studio-card">
-            <TrayTabs selected={selected} onSelect={setTab} counts={{ check: findings.length + (problem ? 1 : 0), notes: run.outcome?.notes.length ?? 0 }} hasScript={isPhone} />
+            <TrayTabs
+              selected={selected}
+              onSelect={setTab}
+              counts={{ check: findings.length + (problem ? 1 : 0), notes: run.outcome?.notes.length ?? 0 }}
+              hasScript={isPhone}
+            />
             {selected !== "script" && (
-              <div id={`studio-pane-${selected}`} className="studio-pane" role="tabpanel" aria-labelledby={`studio-tab-${selected}`} tabIndex={0}>
+              <div
+                id={`studio-pane-${selected}`}
+                className="studio-pane"
+                role="tabpanel"
+                aria-labelledby={`studio-tab-${selected}`}
+                tabIndex={0}
+              >
                 {selected === "check" && (
-                  <CheckPane song={song} run={run} onShow={(finding) => showMoment(finding.moments[0], finding.lines[0])} onShowProblem={({ range }) => goToLine(range.line)} />
+                  <CheckPane
+                    song={song}
+                    run={run}
+                    onShow={(finding) => showMoment(finding.moments[0], finding.lines[0])}
+                    onShowProblem={({ range }) => goToLine(range.line)}
+                  />
                 )}
-                {selected === "notes" && <NotesPane song={song} notes={run.outcome?.notes ?? []} onShow={(note) => showMoment(note.tick, note.line)} />}
+                {selected === "notes" && (
+                  <NotesPane
+                    song={song}
+                    notes={run.outcome?.notes ?? []}
+                    onShow={(note) => showMoment(note.tick, note.line)}
+                  />
+                )}
                 {selected === "names" && <NamesPane layout={layout} names={names} onInsert={insert} />}
               </div>
             )}
@@ -191,7 +221,12 @@ function OpenStudio(props: OpenStudioProps) {
         />
       )}
       {dialog?.kind === "versions" && draft.sync.kind === "two-versions" && (
-        <TwoVersionsDialog mine={draft.source} theirs={draft.sync.theirs.source} onChoose={choose} onClose={() => setDialog(null)} />
+        <TwoVersionsDialog
+          mine={draft.source}
+          theirs={draft.sync.theirs.source}
+          onChoose={choose}
+          onClose={() => setDialog(null)}
+        />
       )}
     </div>
   );

@@ -23,7 +23,8 @@ class FakeEngine implements PlaybackEngine {
     this.position = seconds;
     this.calls.push(`seek ${seconds}`);
   };
-  setLoop = (loop: { start: number; end: number } | null) => void this.calls.push(loop ? `loop ${loop.start}-${loop.end}` : "no loop");
+  setLoop = (loop: { start: number; end: number } | null) =>
+    void this.calls.push(loop ? `loop ${loop.start}-${loop.end}` : "no loop");
   setRate = (rate: number) => void this.calls.push(`rate ${rate}`);
   setVolume = (volume: number) => void this.calls.push(`volume ${volume}`);
   subscribe = (listener: () => void) => {
@@ -100,7 +101,9 @@ describe("Transport", () => {
   it("tries to load again after the sound did not come", async () => {
     let isOnline = false;
     const engine = new FakeEngine();
-    const { transport, countLoads } = setUp(() => (isOnline ? Promise.resolve(engine) : Promise.reject(new Error("no network"))));
+    const { transport, countLoads } = setUp(() =>
+      isOnline ? Promise.resolve(engine) : Promise.reject(new Error("no network")),
+    );
     await expect(transport.play()).rejects.toThrow("no network");
     expect(transport.state).toMatchObject({ isPlaying: false, isStarting: false });
     isOnline = true;

@@ -39,7 +39,15 @@ export interface TransportState {
 export class Transport {
   readonly #options: TransportOptions;
   readonly #listeners = new Set<() => void>();
-  #state: TransportState = { isPlaying: false, isStarting: false, hasSound: true, isLooping: false, loop: null, rate: 1, volume: 0.7 };
+  #state: TransportState = {
+    isPlaying: false,
+    isStarting: false,
+    hasSound: true,
+    isLooping: false,
+    loop: null,
+    rate: 1,
+    volume: 0.7,
+  };
   #engine: PlaybackEngine | null = null;
   #loading: Promise<PlaybackEngine> | null = null;
   #rest = 0;
@@ -70,7 +78,11 @@ export class Transport {
       // Pause may have been pressed while the sound was loading.
       if (this.#state.isStarting) await engine.play();
     } finally {
-      this.#set({ isStarting: false, isPlaying: this.#engine?.isPlaying ?? false, hasSound: this.#engine?.hasSound ?? true });
+      this.#set({
+        isStarting: false,
+        isPlaying: this.#engine?.isPlaying ?? false,
+        hasSound: this.#engine?.hasSound ?? true,
+      });
     }
   }
 
@@ -144,7 +156,9 @@ export class Transport {
 
   #readLoop(): LoopRange | null {
     const { isLooping, loop } = this.#state;
-    return isLooping && loop ? { start: this.#options.toSeconds(loop.start), end: this.#options.toSeconds(loop.end) } : null;
+    return isLooping && loop
+      ? { start: this.#options.toSeconds(loop.start), end: this.#options.toSeconds(loop.end) }
+      : null;
   }
 
   #set(change: Partial<TransportState>): void {

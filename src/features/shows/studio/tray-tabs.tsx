@@ -27,7 +27,12 @@ export function TrayTabs({ selected, onSelect, counts, hasScript }: TrayTabsProp
   const tabs = TRAY_TABS.filter((tab) => hasScript || tab !== "script");
   const handleKey = (event: KeyboardEvent) => {
     const place = tabs.indexOf(selected);
-    const steps: Record<string, number> = { ArrowRight: place + 1, ArrowLeft: place - 1, Home: 0, End: tabs.length - 1 };
+    const steps: Record<string, number> = {
+      ArrowRight: place + 1,
+      ArrowLeft: place - 1,
+      Home: 0,
+      End: tabs.length - 1,
+    };
     const next = steps[event.key];
     if (next === undefined) return;
     const tab = tabs[(next + tabs.length) % tabs.length] ?? selected;
@@ -36,7 +41,7 @@ export function TrayTabs({ selected, onSelect, counts, hasScript }: TrayTabsProp
     event.preventDefault();
   };
   return (
-    <div ref={ref} className="studio-tabs" role="tablist" aria-label="Help for this script" onKeyDown={handleKey}>
+    <div ref={ref} className="studio-tabs" role="tablist" aria-label="Help for this script">
       {tabs.map((tab) => (
         <button
           key={tab}
@@ -48,6 +53,7 @@ export function TrayTabs({ selected, onSelect, counts, hasScript }: TrayTabsProp
           tabIndex={tab === selected ? 0 : -1}
           className={joinClasses("studio-tab", tab === selected && "is-selected")}
           onClick={() => onSelect(tab)}
+          onKeyDown={handleKey}
         >
           <Icon name={LOOKS[tab].icon} />
           {LOOKS[tab].word}

@@ -30,15 +30,28 @@ export function TwoVersionsDialog({ mine, theirs, onChoose, onClose }: TwoVersio
         </>
       }
     >
-      <p>It was changed here and somewhere else: in another tab, on another computer, or by your partner. Nothing is lost: the text you do not choose is put aside.</p>
+      <p>
+        It was changed here and somewhere else: in another tab, on another computer, or by your partner. Nothing is
+        lost: the text you do not choose is put aside.
+      </p>
       <div className="grid gap-4 wide:grid-cols-2">
         <section>
           <h3>Mine, on this computer</h3>
-          <ScriptView source={mine} label="My script" markedLines={listOwnLines(mine, theirs)} className="max-h-80 overflow-auto rounded-cut border border-line" />
+          <ScriptView
+            source={mine}
+            label="My script"
+            markedLines={listOwnLines(mine, theirs)}
+            className="max-h-80 overflow-auto rounded-cut border border-line"
+          />
         </section>
         <section>
           <h3>The other, on the server</h3>
-          <ScriptView source={theirs} label="The other script" markedLines={listOwnLines(theirs, mine)} className="max-h-80 overflow-auto rounded-cut border border-line" />
+          <ScriptView
+            source={theirs}
+            label="The other script"
+            markedLines={listOwnLines(theirs, mine)}
+            className="max-h-80 overflow-auto rounded-cut border border-line"
+          />
         </section>
       </div>
     </Dialog>

@@ -39,7 +39,13 @@ function getWriter(): string {
 /** Opens a show's draft and keeps it saved as long as the caller is on screen. */
 export function useDraft({ userId, showId, server, savedAt, transport, signedInAt }: DraftSource): OpenDraft {
   const store = useDisposable(
-    () => new DraftStore({ key: { userId, showId, writer: getWriter() }, storage, transport, host: createBrowserDraftHost() }),
+    () =>
+      new DraftStore({
+        key: { userId, showId, writer: getWriter() },
+        storage,
+        transport,
+        host: createBrowserDraftHost(),
+      }),
     [userId, showId, transport],
   );
   const [opened, setOpened] = useState<DraftStore | null>(null);

@@ -2,7 +2,8 @@ import { useEffect } from "react";
 import type { ShowPlayer } from "./show-player.ts";
 
 /** What takes the Space key for itself. */
-const OWN_SPACE = "input, textarea, select, button, a, summary, [contenteditable=true], [role=slider], [role=tab], [role=radio], [role=dialog]";
+const OWN_SPACE =
+  "input, textarea, select, button, a, summary, [contenteditable=true], [role=slider], [role=tab], [role=radio], [role=dialog]";
 
 /**
  * Space plays and pauses anywhere but where it writes or presses; Escape stops from anywhere but the
@@ -17,7 +18,8 @@ export function usePlayKeys(player: ShowPlayer): void {
         event.preventDefault();
         player.transport.toggle();
       }
-      if (event.key === "Escape" && !target?.closest("[contenteditable=true], [role=dialog], [aria-expanded=true]")) player.transport.pause();
+      if (event.key === "Escape" && !target?.closest("[contenteditable=true], [role=dialog], [aria-expanded=true]"))
+        player.transport.pause();
     };
     document.addEventListener("keydown", handleKey);
     return () => document.removeEventListener("keydown", handleKey);

@@ -53,7 +53,10 @@ export function useScriptRun({ runScript, checkShow }: ScriptRunOptions): Script
     let isOvertaken = false;
     const afterPaint = setTimeout(() => {
       // A check that fails leaves the preview gentle: the safe side.
-      checkShow(timeline).then((findings) => isOvertaken || dispatch({ type: "checked", timeline, findings }), () => undefined);
+      checkShow(timeline).then(
+        (findings) => isOvertaken || dispatch({ type: "checked", timeline, findings }),
+        () => undefined,
+      );
     }, 0);
     return () => {
       isOvertaken = true;

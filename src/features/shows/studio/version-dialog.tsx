@@ -36,7 +36,11 @@ export function VersionDialog({ version, readSource, onUse, onClose }: VersionDi
       actions={
         <>
           <Button onPress={onClose}>Close</Button>
-          <Button look="main" disabledReason={source === null ? "The version is still being read." : null} onPress={() => source !== null && onUse(source)}>
+          <Button
+            look="main"
+            disabledReason={source === null ? "The version is still being read." : null}
+            onPress={() => source !== null && onUse(source)}
+          >
             Use this script
           </Button>
         </>

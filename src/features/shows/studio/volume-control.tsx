@@ -11,7 +11,7 @@ export interface VolumeControlProps {
 
 /** The volume: a slider, or on narrow screens a button that opens one. */
 export function VolumeControl({ volume, hasSound, onVolume }: VolumeControlProps) {
-  const panel = useDisclosure();
+  const { isOpen, panelId, rootRef, toggle } = useDisclosure();
   const slider = (
     <input
       type="range"
@@ -29,16 +29,23 @@ export function VolumeControl({ volume, hasSound, onVolume }: VolumeControlProps
       </p>
     );
   return (
-    <div ref={panel.rootRef} className="studio-volume">
+    <div ref={rootRef} className="studio-volume">
       <div className="studio-volume-wide">
         <Icon name="volume" />
         {slider}
       </div>
-      <button type="button" className="studio-quiet-icon studio-volume-narrow" aria-label="Volume" aria-expanded={panel.isOpen} aria-controls={panel.panelId} onClick={panel.toggle}>
+      <button
+        type="button"
+        className="studio-quiet-icon studio-volume-narrow"
+        aria-label="Volume"
+        aria-expanded={isOpen}
+        aria-controls={panelId}
+        onClick={toggle}
+      >
         <Icon name={volume === 0 ? "mute" : "volume"} />
       </button>
-      {panel.isOpen && (
-        <div id={panel.panelId} className="studio-volume-panel">
+      {isOpen && (
+        <div id={panelId} className="studio-volume-panel">
           {slider}
         </div>
       )}

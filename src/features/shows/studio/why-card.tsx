@@ -21,7 +21,11 @@ export function WhyCard({ place, width, onGoToLine }: WhyCardProps) {
   const { name, lit, x, y } = place;
   const line = lit?.line ?? null;
   return (
-    <div id="studio-why" className="studio-why" style={{ left: Math.min(Math.max(100, x), width - 100), top: Math.max(96, y - 4) }}>
+    <div
+      id="studio-why"
+      className="studio-why"
+      style={{ left: Math.min(Math.max(100, x), width - 100), top: Math.max(96, y - 4) }}
+    >
       <b>{name}</b>
       <span>
         {lit ? presentLitLight(lit) : "all dark"}
