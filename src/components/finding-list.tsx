@@ -2,6 +2,7 @@ import type { z } from "zod";
 import type { FindingSchema } from "../../shared/contracts/common.ts";
 import { Icon, type IconName } from "./icon.tsx";
 import { PlaceButton } from "./place-button.tsx";
+import { Sentence } from "./sentence.tsx";
 
 export type FindingOnPage = z.infer<typeof FindingSchema>;
 
@@ -40,8 +41,14 @@ export function FindingList({ findings, presentMoment, onShowMoment, onShowLine 
               <li key={`${finding.rule} ${finding.sentence}`} className="grid grid-cols-[20px_1fr] gap-x-2 py-2">
                 <Icon name={sign.icon} label={sign.word} className={`mt-0.5 size-[1.15em] ${sign.ink}`} />
                 <div className="min-w-0">
-                  <p>{finding.sentence}</p>
-                  {finding.hint && <p className="text-slate">{finding.hint}</p>}
+                  <p>
+                    <Sentence text={finding.sentence} />
+                  </p>
+                  {finding.hint && (
+                    <p className="text-slate">
+                      <Sentence text={finding.hint} />
+                    </p>
+                  )}
                   <p className="flex flex-wrap gap-x-3 text-meta">
                     {finding.moments.slice(0, MAX_PLACES).map((tick) => (
                       <PlaceButton key={`moment-${tick}`} onPress={() => onShowMoment(tick)}>

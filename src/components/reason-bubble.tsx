@@ -22,7 +22,7 @@ export function ReasonBubble({ id, reason, children }: ReasonBubbleProps) {
       <span
         id={id}
         data-side={side}
-        className="invisible absolute top-full z-30 mt-1.5 w-max max-w-68 rounded-cut border border-line bg-card px-3 py-2 text-meta leading-snug font-normal whitespace-normal text-ink shadow-sheet-2 data-[side=end]:right-0 data-[side=start]:left-0 group-focus-within/reason:visible group-hover/reason:visible"
+        className="hidden absolute top-full z-30 mt-1.5 w-max max-w-68 rounded-cut border border-line bg-card px-3 py-2 text-meta leading-snug font-normal whitespace-normal text-ink shadow-sheet-2 data-[side=end]:right-0 data-[side=start]:left-0 group-focus-within/reason:block group-hover/reason:block"
       >
         {reason}
       </span>

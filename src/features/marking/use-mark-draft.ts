@@ -41,7 +41,9 @@ export function useMarkDraft(submissionId: SubmissionId, mark: Mark | null): Mar
   const [draft] = useState(() => openDraft(submissionId, toText(mark), client));
   const state = useSyncExternalStore(draft.subscribe, draft.getState);
 
-  useEffect(() => draft.adopt(toText(mark)), [draft, mark]);
+  useEffect(() => {
+    draft.adopt(toText(mark));
+  }, [draft, mark]);
   useEffect(() => {
     // A tab that is closed or put away sends first; what does not arrive is kept on this computer.
     const handleHide = () => {

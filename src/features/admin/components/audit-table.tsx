@@ -18,7 +18,7 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
     );
   }
   return (
-    <div className="overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1">
+    <div className="relative overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1">
       <table className="w-full border-collapse">
         <thead>
           <tr className="border-b-[1.5px] border-line text-left text-meta text-slate [&>th]:px-4 [&>th]:py-2 [&>th]:font-semibold">

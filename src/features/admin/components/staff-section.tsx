@@ -55,7 +55,7 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
           </Button>
         }
       />
-      <div className="overflow-x-auto">
+      <div className="relative overflow-x-auto">
         <table className="w-full border-collapse">
           <thead>
             <tr className="border-b-[1.5px] border-line text-left text-meta text-slate [&>th]:px-4 [&>th]:py-2 [&>th]:font-semibold">

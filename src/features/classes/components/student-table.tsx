@@ -46,7 +46,7 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
           address is needed.
         </EmptyState>
       ) : (
-        <div className="overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1">
+        <div className="relative overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1">
           <table className="w-full border-collapse max-wide:block">
             <thead className="max-wide:sr-only">
               <tr className="border-b-[1.5px] border-line text-left text-meta text-slate [&>th]:px-4 [&>th]:py-2 [&>th]:font-semibold">

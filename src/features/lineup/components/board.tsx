@@ -34,7 +34,7 @@ export function BoardTable({ board, boardRef, control, hintsId, onNight }: Board
       <colgroup>
         <col className="w-12" />
         {board.columns.map((column, index) => (
-          <col key={column.date} className={closed(index) ? "w-[62px]" : undefined} />
+          <col key={column.date} className={closed(index) ? "w-20" : undefined} />
         ))}
       </colgroup>
       <thead>
@@ -63,10 +63,12 @@ export function BoardTable({ board, boardRef, control, hintsId, onNight }: Board
             {board.cells[row]?.map((cell, column) => {
               if (closed(column)) {
                 return row === 0 ? (
-                  <td key={column} rowSpan={board.times.length} className="p-0">
-                    <div className="grid h-full min-h-[59px] place-items-center rounded-cut px-1 text-center text-meta text-slate hatched">
-                      {cell.kind === "rest" ? cell.reason : ""}
-                    </div>
+                  <td
+                    key={column}
+                    rowSpan={board.times.length}
+                    className="rounded-cut px-1 text-center align-middle text-meta text-slate hatched"
+                  >
+                    {cell.kind === "rest" ? cell.reason : ""}
                   </td>
                 ) : null;
               }
@@ -121,18 +123,11 @@ function ColumnHead({
   onNight: (column: Column) => void;
 }) {
   const count = column.showCount === 1 ? "1 show" : `${column.showCount} shows`;
-  const line = isClosed
-    ? column.night?.closedReason
-      ? "closed"
-      : column.night
-        ? "over"
-        : "no night"
-    : column.freeCount > 0
-      ? `${count}, ${column.freeCount} free`
-      : count;
+  const open = column.freeCount > 0 ? `${count}, ${column.freeCount} free` : count;
+  const line = isClosed ? (column.night?.closedReason ? "closed" : column.night ? "over" : "no night") : open;
   return (
     <>
-      <span className="flex items-center gap-1">
+      <span className="flex items-center gap-1 whitespace-nowrap">
         {presentDate(column.date, "column")}
         {column.isTonight && <Icon name="moon" label="tonight" className="size-3.5" />}
         {column.night && (

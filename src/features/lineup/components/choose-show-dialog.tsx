@@ -3,7 +3,6 @@ import type { Lineup, Slot } from "../../../../shared/contracts/lineup.ts";
 import { Dialog } from "../../../components/dialog.tsx";
 import { PictureRibbon } from "../../../components/picture-ribbon.tsx";
 import { TextField } from "../../../components/text-field.tsx";
-import { formatNames } from "../../../lib/format.ts";
 import { presentLength } from "../../../lib/zoned-time.ts";
 import { presentPlace } from "../model/change.ts";
 import { listTray, presentNights } from "../model/tray.ts";
@@ -48,7 +47,7 @@ export function ChooseShowDialog({ lineup, nightId, startsAt, onChoose, onClose 
                   <PictureRibbon picture={show.ribbon} size="row" label="" />
                 </span>
                 <span className="col-span-2 text-meta text-slate">
-                  {formatNames(show.authors)}, {show.schoolName} · {presentNights(nightCount)}
+                  {show.publicName} · {presentNights(nightCount)}
                 </span>
               </button>
             </li>

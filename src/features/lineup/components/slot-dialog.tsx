@@ -4,7 +4,6 @@ import { Dialog } from "../../../components/dialog.tsx";
 import { LinkButton } from "../../../components/link-button.tsx";
 import { Notice } from "../../../components/notice.tsx";
 import { PictureRibbon } from "../../../components/picture-ribbon.tsx";
-import { formatNames } from "../../../lib/format.ts";
 import { presentLength } from "../../../lib/zoned-time.ts";
 import { presentPlace } from "../model/change.ts";
 
@@ -29,7 +28,7 @@ export function SlotDialog({ lineup, slot, show, finding, onPin, onMove, onRemov
       <p>
         {presentPlace(lineup, slot.nightId, slot.startsAt)} · {presentLength(show.seconds)}
         <span className="block text-slate">
-          {formatNames(show.authors)}, {show.schoolName}, {show.className}
+          {show.publicName}, {show.className}, {show.schoolName}
         </span>
       </p>
       {finding && (

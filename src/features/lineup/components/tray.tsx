@@ -9,7 +9,6 @@ import { LinkButton } from "../../../components/link-button.tsx";
 import { Menu } from "../../../components/menu.tsx";
 import { PictureRibbon } from "../../../components/picture-ribbon.tsx";
 import { TextField } from "../../../components/text-field.tsx";
-import { formatNames } from "../../../lib/format.ts";
 import { presentLength } from "../../../lib/zoned-time.ts";
 import {
   listTray,
@@ -20,7 +19,6 @@ import {
   type TrayOrder,
 } from "../model/tray.ts";
 import type { Carried } from "../use-board.ts";
-import { toShortSchool } from "./board-cell.tsx";
 
 export interface TrayProps {
   lineup: Lineup;
@@ -69,7 +67,7 @@ export function Tray({ lineup, carried, hintsId, onPickUp, onDragStart, onDragEn
             type="search"
             value={query}
             onChange={(event) => setQuery(event.target.value)}
-            className="flex-1"
+            className="flex-1 [&_input]:px-2 [&_input]:text-meta"
           />
           <Menu
             isIconOnly
@@ -145,7 +143,7 @@ function TrayRow({
         data-tray={show.id}
         aria-pressed={isCarried}
         aria-describedby={hintsId}
-        aria-label={`${show.title}, ${presentLength(show.seconds)}, ${formatNames(show.authors)}, ${show.schoolName}, ${presentNights(nightCount)}`}
+        aria-label={`${show.title}, ${presentLength(show.seconds)}, ${show.publicName}, ${presentNights(nightCount)}`}
         draggable={onPickUp !== null}
         onClick={act}
         onKeyDown={(event) => {
@@ -168,15 +166,14 @@ function TrayRow({
           <PictureRibbon picture={show.ribbon} size="row" label="" />
         </span>
       </div>
-      <div className="flex items-center gap-2 pr-1.5 pb-1 pl-[34px] text-meta text-slate">
-        <span className="min-w-0 truncate" title={`${formatNames(show.authors)}, ${show.schoolName}`}>
-          {formatNames(show.authors)}, {toShortSchool(show.schoolName)} ·{" "}
-          {nightCount === 0 ? <strong>not placed yet</strong> : presentNights(nightCount)}
+      <div className="flex items-start gap-1 pr-1.5 pb-1.5 pl-[34px] text-meta leading-tight text-slate">
+        <span className="min-w-0 flex-1 pt-0.5 wrap-anywhere">
+          {show.publicName} · {nightCount === 0 ? <strong>not placed yet</strong> : presentNights(nightCount)}
         </span>
         <Button
           size="small"
           look="quiet"
-          className="ml-auto px-1.5!"
+          className="min-h-6! px-1.5!"
           aria-label={`Place ${show.title}…`}
           onPress={() => onPlace(show.id)}
         >

@@ -9,9 +9,8 @@ import { LinkButton } from "../../../components/link-button.tsx";
 import { Notice } from "../../../components/notice.tsx";
 import { SubBand } from "../../../components/sub-band.tsx";
 import { Tag } from "../../../components/tag.tsx";
-import { formatNames } from "../../../lib/format.ts";
 import { presentLength, presentWhen } from "../../../lib/zoned-time.ts";
-import { Words } from "./forward-row.tsx";
+import { presentMakers, Words } from "./forward-row.tsx";
 
 export type ForwardDetail = z.output<(typeof lineupContract)["forwardDetail"]["response"]>;
 
@@ -44,7 +43,7 @@ export function ForwardPage({
     <>
       <SubBand
         title={forward.title}
-        detail={`${formatNames(forward.authors)}, ${forward.className}, ${forward.schoolName}`}
+        detail={`${presentMakers(forward)}, ${forward.className}, ${forward.schoolName}`}
         actions={
           <LinkButton to={back.to} look="quiet" icon="arrow-left">
             {back.label}

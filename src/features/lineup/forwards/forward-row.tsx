@@ -25,7 +25,7 @@ export function ForwardRow({ forward, to, timeZone, now, words, actions }: Forwa
       to={to}
       line={
         <>
-          {formatNames(forward.authors)}, {forward.className}, {forward.schoolName} · {forward.songTitle},{" "}
+          {presentMakers(forward)}, {forward.className}, {forward.schoolName} · {forward.songTitle},{" "}
           {presentLength(forward.seconds)} · forwarded {presentWhen(forward.forwardedAt, now, timeZone)}
         </>
       }
@@ -53,6 +53,11 @@ export function ForwardRow({ forward, to, timeZone, now, words, actions }: Forwa
       actions={actions}
     />
   );
+}
+
+/** Who made a show: by name where the reader may know it, else as the programme says it. */
+export function presentMakers({ authors, publicName }: ForwardSummary): string {
+  return authors.length > 0 ? formatNames(authors) : publicName;
 }
 
 /** Words of a person under a row: who said it, and what. */

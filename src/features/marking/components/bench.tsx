@@ -6,6 +6,7 @@ import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 import { Button } from "../../../components/button.tsx";
 import { FindingList } from "../../../components/finding-list.tsx";
 import { Notice } from "../../../components/notice.tsx";
+import { Sentence } from "../../../components/sentence.tsx";
 import { presentLength } from "../../../lib/zoned-time.ts";
 import { type PlacedComment, placeComments, presentAnchor, presentMoment } from "../model/comment-place.ts";
 import type { DeskPlayback } from "../playback.ts";
@@ -180,7 +181,7 @@ function RunNotices({ detail, onShowLine }: { detail: SubmissionDetail; onShowLi
               )
             }
           >
-            {run.problem ? `${run.problem.sentence} ${run.problem.hint}` : run.description}
+            <Sentence text={run.problem ? `${run.problem.sentence} ${run.problem.hint}` : run.description} />
           </Notice>
         </div>
       )}

@@ -18,7 +18,7 @@ export interface DeskHeadProps {
 /** Title, authors, version and state of the show on the desk, and the way along the queue. */
 export function DeskHead({ submission, timeZone, now, position, onPrevious, onNext }: DeskHeadProps) {
   return (
-    <div className="flex flex-wrap items-center gap-x-3 gap-y-1 border-b border-line bg-card px-4 py-2 max-wide:gap-x-1.5">
+    <div className="flex items-center gap-x-3 max-wide:flex-wrap gap-y-1 border-b border-line bg-card px-4 py-2 max-wide:gap-x-1.5">
       <Tooltip text="Previous (K)">
         <IconButton
           icon="chevron-left"
@@ -27,10 +27,10 @@ export function DeskHead({ submission, timeZone, now, position, onPrevious, onNe
           onPress={() => onPrevious?.()}
         />
       </Tooltip>
-      <h1 tabIndex={-1} className="text-5 max-wide:text-4">
+      <h1 tabIndex={-1} className="max-w-[50%] shrink-0 truncate py-0.5 text-5 max-wide:max-w-[60%] max-wide:text-4">
         {submission.showTitle}
       </h1>
-      <p className="text-slate max-wide:order-5 max-wide:w-full">
+      <p className="min-w-0 truncate text-slate max-wide:order-5 max-wide:w-full">
         {formatNames(submission.authors)} · version {submission.versionNumber}, handed in{" "}
         {presentWhen(submission.handedInAt, now, timeZone)}
       </p>

@@ -1,6 +1,7 @@
 import type { Evidence } from "../../../../shared/contracts/marking.ts";
 import { Icon, type IconName } from "../../../components/icon.tsx";
 import { PlaceButton } from "../../../components/place-button.tsx";
+import { Sentence } from "../../../components/sentence.tsx";
 
 export interface EvidenceListProps {
   evidence: readonly Evidence[];
@@ -28,7 +29,7 @@ export function EvidenceList({ evidence, presentMoment, onShowLine, onShowMoment
           <li key={fact.text} className="grid grid-cols-[17px_1fr] gap-1.5">
             <Icon name={sign.icon} label={sign.label} className={`mt-0.5 size-3.5 ${sign.ink}`} />
             <span>
-              {fact.text}{" "}
+              <Sentence text={fact.text} />{" "}
               <span className="whitespace-nowrap">
                 {fact.lines.slice(0, MAX_PLACES).map((line) => (
                   <PlaceButton key={`line-${line}`} onPress={() => onShowLine(line)}>

@@ -42,7 +42,7 @@ export interface MarkingDeskProps {
 
 const HINTS = [
   { keys: ["J", "K"], does: "next, previous" },
-  { keys: ["1", "2", "3", "4"], does: "level" },
+  { keys: ["1–4"], does: "level" },
   { keys: ["C"], does: "comment here" },
   { keys: ["Space"], does: "play" },
   { keys: ["G"], does: "release" },

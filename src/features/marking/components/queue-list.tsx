@@ -17,7 +17,9 @@ export interface QueueListProps {
 export function QueueList({ rows, hereId, timeZone, now, toRow }: QueueListProps) {
   const hereRef = useRef<HTMLAnchorElement>(null);
   // Keys can go past the part in sight.
-  useEffect(() => hereRef.current?.scrollIntoView({ block: "nearest" }), [hereId]);
+  useEffect(() => {
+    hereRef.current?.scrollIntoView({ block: "nearest" });
+  }, [hereId]);
   return (
     <ol>
       {rows.map((row) => {

@@ -31,7 +31,7 @@ export interface ReleaseBarProps {
 export function ReleaseBar(props: ReleaseBarProps) {
   const isOpen = props.state === "submitted";
   return (
-    <div className="border-t border-line bg-card px-4 pt-2.5 pb-3 max-wide:sticky max-wide:bottom-0 max-wide:z-10">
+    <div className="border-t border-line bg-card px-4 pt-2.5 pb-3">
       {isOpen ? <OpenMark {...props} /> : <FixedMark {...props} />}
     </div>
   );

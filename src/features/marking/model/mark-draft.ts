@@ -181,7 +181,7 @@ function readRefusal(error: unknown): string | null {
 export function presentSave(save: MarkSave): { readonly text: string; readonly isCareful: boolean } {
   switch (save.kind) {
     case "saved":
-      return { text: "Saved. Nobody sees it before you release it.", isCareful: false };
+      return { text: "Saved. Only you see it.", isCareful: false };
     case "waiting":
     case "sending":
       return { text: "Saving", isCareful: false };

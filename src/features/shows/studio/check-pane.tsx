@@ -4,7 +4,7 @@ import { Button } from "../../../components/button.tsx";
 import { Icon, type IconName } from "../../../components/icon.tsx";
 import { findSongPlace } from "../ribbon/song-place.ts";
 import { listFindings, type RunState } from "./run-model.ts";
-import { Sentence } from "./sentence.tsx";
+import { Sentence } from "../../../components/sentence.tsx";
 
 export interface CheckPaneProps {
   song: BeatMap;

@@ -18,7 +18,7 @@ export function ViewerStage({ viewer, layout, description, onGoToLine, className
   return (
     <div
       className={joinClasses(
-        "grid grid-cols-[minmax(0,1fr)] [&_.studio-window]:rounded-none [&_.studio-window]:border-0 [&_.studio-window]:shadow-none [&_.studio-window]:grid-rows-[minmax(0,1fr)_40px]!",
+        "grid grid-cols-[minmax(0,1fr)] [&_.studio-window]:grid-rows-[minmax(0,1fr)_40px]! [&_.studio-window]:rounded-none! [&_.studio-window]:border-0! [&_.studio-window]:shadow-none!",
         className,
       )}
     >
