@@ -14,7 +14,7 @@ const TOPIC_WORDS: readonly (readonly [EvidenceTopic, RegExp])[] = [
   ["code", /code|loop|function|script|program|condition|list/i],
   ["coverage", /square|front|cover|street|everywhere|space/i],
   ["dynamics", /dynamic|build|shape|grow|contrast|light|colour|mood|idea/i],
-  ["safety", /safe|fit|box|load|check/i],
+  ["safety", /safe|ready|box|load|check/i],
 ];
 
 /** Under this key stand the facts that belong to no one criterion. */
