@@ -16,6 +16,8 @@ import { getRetryDelayMs } from "./retry-delay.ts";
 const KEEP_DELAY_MS = 200;
 /** Edits are gathered this long before they go to the server. */
 const SEND_DELAY_MS = 1500;
+/** Texts put aside for one show; the oldest go first. */
+const MOST_COPIES = 20;
 
 /** What the store needs from its host; tests pass a clock of their own. */
 export interface DraftHost {
@@ -194,7 +196,9 @@ export class DraftStore {
 
   async #putAside(source: string): Promise<void> {
     const { key, storage, host } = this.#options;
-    await storage.putCopy({ id: host.createKey(), userId: key.userId, showId: key.showId, source, keptAt: host.now() });
+    const { userId, showId } = key;
+    await storage.putCopy({ id: host.createKey(), userId, showId, source, keptAt: host.now() });
+    for (const copy of (await this.listCopies()).slice(MOST_COPIES)) await storage.deleteCopy(copy.id);
   }
 
   #start(name: "keep" | "send" | "retry", ms: number, run: () => void): void {

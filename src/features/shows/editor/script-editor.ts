@@ -163,6 +163,8 @@ export class ScriptEditor {
       EditorView.contentAttributes.of({
         "aria-label": "Script",
         "aria-describedby": hintId,
+        // It takes the focus anyway; checkers of accessibility look for the attribute.
+        tabindex: "0",
         autocapitalize: "off",
         autocorrect: "off",
         spellcheck: "false",

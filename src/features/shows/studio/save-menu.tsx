@@ -21,6 +21,10 @@ export interface StudioVersion {
 export interface SaveMenuProps {
   draft: DraftState;
   versions: readonly StudioVersion[];
+  /** Texts that were put aside when another was chosen; on this computer only. */
+  asides: readonly StudioVersion[];
+  /** The menu is opening: time to read what it shows. */
+  onOpen: () => void;
   onLook: (version: StudioVersion) => void;
   /** Opens the choice between two versions. */
   onChoose: () => void;
@@ -31,7 +35,7 @@ const ICONS: { readonly [T in SaveStatus["tone"]]: IconName } = { calm: "check",
 const AGE_MS = 5000;
 
 /** The save state, always in words; it opens to the reason and to earlier versions. */
-export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
+export function SaveMenu({ draft, versions, asides, onOpen, onLook, onChoose }: SaveMenuProps) {
   const { isOpen, panelId, rootRef, toggle, close } = useDisclosure();
   const [now, setNow] = useState(() => Date.now());
   useEffect(() => {
@@ -40,6 +44,14 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
   }, []);
   const { label, detail, tone } = presentSaveStatus(draft, Math.max(now, draft.savedAt ?? 0));
   const isChoice = label === "Two versions";
+  const look = (version: StudioVersion) => {
+    close();
+    onLook(version);
+  };
+  const handleToggle = () => {
+    if (!isOpen) onOpen();
+    toggle();
+  };
   return (
     <div ref={rootRef} className="studio-save">
       <button
@@ -47,7 +59,7 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
         className={joinClasses("studio-save-button", `is-${tone}`)}
         aria-expanded={isOpen}
         aria-controls={panelId}
-        onClick={toggle}
+        onClick={handleToggle}
       >
         <Icon name={ICONS[tone]} />
         <span className="studio-save-words">
@@ -63,7 +75,14 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
         <div id={panelId} className="studio-sheet">
           {tone !== "calm" && <p className="studio-sheet-detail">{detail}</p>}
           {isChoice && (
-            <Button look="main" size="small" onPress={onChoose}>
+            <Button
+              look="main"
+              size="small"
+              onPress={() => {
+                close();
+                onChoose();
+              }}
+            >
               Choose
             </Button>
           )}
@@ -71,30 +90,41 @@ export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
           {versions.length === 0 ? (
             <p className="studio-empty">None yet. Each time you hand in, a version is kept here.</p>
           ) : (
-            <ul>
-              {versions.map((version) => (
-                <li key={version.id}>
-                  <Ribbon ribbon={version.ribbon} label="" size="strip" className="studio-sheet-ribbon" />
-                  <div>
-                    <b>{version.title}</b>
-                    <span>{version.when}</span>
-                  </div>
-                  <Button
-                    look="quiet"
-                    size="small"
-                    onPress={() => {
-                      close();
-                      onLook(version);
-                    }}
-                  >
-                    Look
-                  </Button>
-                </li>
-              ))}
-            </ul>
+            <VersionList versions={versions} onLook={look} />
+          )}
+          {asides.length > 0 && (
+            <>
+              <h2>Put aside on this computer</h2>
+              <VersionList versions={asides} onLook={look} />
+            </>
           )}
         </div>
       )}
     </div>
+  );
+}
+
+function VersionList({
+  versions,
+  onLook,
+}: {
+  versions: readonly StudioVersion[];
+  onLook: (version: StudioVersion) => void;
+}) {
+  return (
+    <ul>
+      {versions.map((version) => (
+        <li key={version.id}>
+          <Ribbon ribbon={version.ribbon} label="" size="strip" />
+          <div>
+            <b>{version.title}</b>
+            <span>{version.when}</span>
+          </div>
+          <Button look="quiet" size="small" onPress={() => onLook(version)}>
+            Look
+          </Button>
+        </li>
+      ))}
+    </ul>
   );
 }

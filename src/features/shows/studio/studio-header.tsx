@@ -10,6 +10,8 @@ export interface StudioHeaderProps {
   homeHref: string;
   draft: DraftState;
   versions: readonly StudioVersion[];
+  asides: readonly StudioVersion[];
+  onOpenSaves: () => void;
   onLook: (version: StudioVersion) => void;
   onChoose: () => void;
   /** Null where there is nobody to hand it to. */
@@ -23,6 +25,8 @@ export function StudioHeader({
   homeHref,
   draft,
   versions,
+  asides,
+  onOpenSaves,
   onLook,
   onChoose,
   onHandIn,
@@ -43,7 +47,14 @@ export function StudioHeader({
         <h1>{title}</h1>
         <p>{context}</p>
       </div>
-      <SaveMenu draft={draft} versions={versions} onLook={onLook} onChoose={onChoose} />
+      <SaveMenu
+        draft={draft}
+        versions={versions}
+        asides={asides}
+        onOpen={onOpenSaves}
+        onLook={onLook}
+        onChoose={onChoose}
+      />
       <ThemeToggle className="studio-theme" />
       {onHandIn && (
         <Button icon="sent" onPress={onHandIn}>

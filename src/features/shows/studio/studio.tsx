@@ -18,6 +18,7 @@ import { StudioHeader } from "./studio-header.tsx";
 import { StudioLoading } from "./studio-loading.tsx";
 import { TrayTabs, type TrayTab } from "./tray-tabs.tsx";
 import { TwoVersionsDialog } from "./two-versions-dialog.tsx";
+import { useAsides } from "./use-asides.ts";
 import { useDraft, type DraftSource } from "./use-draft.ts";
 import { usePlayKeys } from "./use-play-keys.ts";
 import { useScriptRun, type ScriptRunOptions } from "./use-script-run.ts";
@@ -111,6 +112,7 @@ function OpenStudio(props: OpenStudioProps) {
     setTab("script");
     requestAnimationFrame(() => editor.current?.insert(code));
   };
+  const asides = useAsides(store, props.readVersion);
   const { describeShow } = props;
   const description = useMemo(
     () => (run.onStage && describeShow ? describeShow(run.onStage) : "Nothing is on stage yet."),
@@ -125,6 +127,8 @@ function OpenStudio(props: OpenStudioProps) {
         homeHref={props.homeHref}
         draft={draft}
         versions={versions}
+        asides={asides.versions}
+        onOpenSaves={asides.load}
         onLook={(version) => setDialog({ kind: "version", version })}
         onChoose={() => setDialog({ kind: "versions" })}
         onHandIn={props.onHandIn && (() => setDialog({ kind: "hand-in" }))}
@@ -212,7 +216,7 @@ function OpenStudio(props: OpenStudioProps) {
       {dialog?.kind === "version" && (
         <VersionDialog
           version={dialog.version}
-          readSource={props.readVersion}
+          readSource={asides.readSource}
           onUse={(source) => {
             setDialog(null);
             store?.edit(source);

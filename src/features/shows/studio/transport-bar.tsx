@@ -39,13 +39,7 @@ export function TransportBar({ song, player, onToggle, onToggleLoop }: Transport
         <Icon name={isOn ? "pause" : "play"} className="size-6" />
       </button>
       <SongClock song={song} player={player} />
-      <button
-        type="button"
-        className="studio-toggle"
-        aria-pressed={state.isLooping}
-        aria-label="Loop"
-        onClick={onToggleLoop}
-      >
+      <button type="button" className="studio-toggle" aria-pressed={state.isLooping} onClick={onToggleLoop}>
         <Icon name="loop" />
         <span className="studio-toggle-word">Loop</span> <b>{state.isLooping ? "on" : "off"}</b>
       </button>
