@@ -7,10 +7,13 @@ import { systemClock } from "./clock.ts";
 import type { Config } from "./config.ts";
 import { type Connection, migrateDatabase, openDatabase } from "./db/connection.ts";
 import { createRunPool, type RunPool } from "./runs/run-pool.ts";
+import { runUnfinishedVersions } from "./show-runs/run-version.ts";
 import { tidyDatabase } from "./upkeep.ts";
 
 const CLIENT_DIR = resolve(import.meta.dirname, "../dist/client");
 const TIDY_EVERY_MS = 60 * 60 * 1000;
+/** A version whose run got lost (a crash, a full pool) waits no longer than this. */
+const CATCH_UP_EVERY_MS = 60 * 1000;
 /** A run at its deadline, and a bit; whoever still waits then asks again. */
 const FINISH_MS = 10_000;
 
@@ -60,6 +63,11 @@ export async function startServer(
     const app = createApp({ config, connection, clock: systemClock, runs, log, clientDir, checkResponses });
     const http = createServer(app);
     const address = await listen(http, config);
+    const catchUp = () => {
+      runUnfinishedVersions({ db: connection.db, clock: systemClock, runs, log }).catch((error: unknown) => log.error({ err: error }, "catching up on runs failed"));
+    };
+    catchUp();
+    const catchingUp = setInterval(catchUp, CATCH_UP_EVERY_MS);
     const tidying = setInterval(() => void tidyDatabase(connection.db, systemClock), TIDY_EVERY_MS);
     return {
       address,
@@ -67,6 +75,7 @@ export async function startServer(
       runs,
       stop: async () => {
         clearInterval(tidying);
+        clearInterval(catchingUp);
         await finish(http);
         await close();
       },

@@ -17,14 +17,22 @@ import { findLatestRun, insertRun, listVersionsWithoutRun, type RunRow, type Ver
 /** What a run of a version came to, as its row keeps it. */
 export type RunResult = Pick<RunRow, "summary" | "hash" | "timeline" | "ribbon">;
 
+/** Versions being run now: a hand-in and the pass for unfinished ones never run the same twice. */
+const underWay = new Map<string, Promise<RunRow | null>>();
+
 /**
  * Runs a version on its own layout and beat map, checks it and keeps the run. Gives null when the pool
  * could not take it (it is full or closing); the version is then run by the next start-up pass.
  */
 export async function runVersion(deps: FeatureDeps, version: VersionRow, classId: string | null): Promise<RunRow | null> {
-  const { db, clock, runs, log } = deps;
-  const known = findLatestRun(db, version.id);
+  const known = findLatestRun(deps.db, version.id);
   if (known) return known;
+  const running = underWay.get(version.id) ?? runNow(deps, version, classId).finally(() => underWay.delete(version.id));
+  underWay.set(version.id, running);
+  return running;
+}
+
+async function runNow({ db, clock, runs, log }: FeatureDeps, version: VersionRow, classId: string | null): Promise<RunRow | null> {
   const { layout } = getLayout(db, version.layoutId);
   const song = getBeatMap(db, version.beatMapId);
   try {
@@ -71,14 +79,14 @@ export function judgeOutcome(outcome: RunOutcome, layout: Layout, song: BeatMap)
 
 /**
  * Runs every version that was handed in and never ran, oldest first, one after another: the process
- * ended between the two. Call it once at start-up, after the pool is there; resolves with how many
- * were run.
+ * ended between the two, or the pool was full. Called at start-up and again every minute; resolves with
+ * how many were run.
  */
 export async function runUnfinishedVersions(deps: FeatureDeps): Promise<number> {
   let count = 0;
   for (const version of listVersionsWithoutRun(deps.db)) {
     if ((await runVersion(deps, version, null)) !== null) count++;
   }
-  if (count > 0) deps.log.info({ count }, "ran versions that were handed in before the server stopped");
+  if (count > 0) deps.log.info({ count }, "ran versions that were handed in and had not run");
   return count;
 }

@@ -11,6 +11,7 @@ import type { DemoWork } from "./world/work.ts";
 
 const MARKING_TIME = "19:20";
 const COORDINATOR = "holm";
+const SENT_BACK_AFTER_MS = 7 * 60 * 60 * 1000;
 
 /** Adds the assignments of the classes; gives their ids by key. */
 export function seedAssignments({ db }: FeatureDeps, day: SeedDay, people: SeededPeople): Map<string, string> {
@@ -75,6 +76,9 @@ function seedHistory(tx: Db, day: SeedDay, people: SeededPeople, { script, versi
   const markedAt = day.before((work.handedInDay ?? 0) + 1, MARKING_TIME);
   for (const version of versions) {
     tx.insert(submissionEvents).values({ submissionId, versionId: version.id, state: "submitted", by: version.createdBy, at: version.createdAt }).run();
+    if (version === last) continue;
+    // An earlier version was sent back that evening.
+    tx.insert(submissionEvents).values({ submissionId, versionId: version.id, state: "revise", by: teacher, at: version.createdAt + SENT_BACK_AFTER_MS }).run();
   }
   if (work.state === "revise" || work.state === "marked") {
     tx.insert(submissionEvents).values({ submissionId, versionId: last.id, state: work.state, by: teacher, at: markedAt, note: work.mark?.note ?? null }).run();
@@ -86,7 +90,7 @@ function seedHistory(tx: Db, day: SeedDay, people: SeededPeople, { script, versi
     const { levels, note } = work.mark;
     const rubric = tx.select({ rubric: assignments.rubric }).from(assignments).innerJoin(submissions, eq(submissions.assignmentId, assignments.id)).where(eq(submissions.id, submissionId)).get()?.rubric ?? [];
     const byCriterion = Object.fromEntries(rubric.map((criterion, n) => [criterion.id, levels[n] ?? 1]));
-    tx.insert(marks).values({ submissionId, levels: byCriterion, note, markedBy: teacher, savedAt: markedAt, releasedAt: markedAt }).run();
+    tx.insert(marks).values({ submissionId, levels: byCriterion, note, markedBy: teacher, savedAt: markedAt, releasedAt: work.state === "marked" ? markedAt : null }).run();
   }
 }
 
