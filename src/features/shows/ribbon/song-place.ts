@@ -29,11 +29,6 @@ export function findSongPlace(song: BeatMap, tick: number): SongPlace {
   return { bar: bar.number, beat: Math.max(1, beat), beats: bar.beats, section };
 }
 
-/** The tick at which a bar starts; the song's start for a bar that is not there. */
-export function tickOfBar(song: BeatMap, number: number): number {
-  return Math.round((song.bars.find((bar) => bar.number === number)?.start ?? 0) * TICKS_PER_BEAT);
-}
-
 /** "1:05" */
 export function presentClock(seconds: number): string {
   const whole = Math.max(0, Math.floor(seconds + 1e-6));
