@@ -47,6 +47,7 @@ export function TransportBar({ song, player, onToggle, onToggleLoop }: Transport
       <VolumeControl
         volume={state.volume}
         hasSound={state.hasSound}
+        hasFailed={state.hasFailed}
         onVolume={(volume) => player.transport.setVolume(volume)}
       />
     </div>

@@ -106,9 +106,12 @@ describe("Transport", () => {
     );
     await expect(transport.play()).rejects.toThrow("no network");
     expect(transport.state).toMatchObject({ isPlaying: false, isStarting: false });
+    transport.toggle();
+    await expect.poll(() => transport.state.hasFailed).toBe(true);
     isOnline = true;
     await transport.play();
-    expect(countLoads()).toBe(2);
+    expect(countLoads()).toBe(3);
+    expect(transport.state.hasFailed).toBe(false);
     expect(transport.isPlaying).toBe(true);
   });
 

@@ -29,6 +29,8 @@ export interface TransportState {
   /** Play was pressed and the instruments are being made ready. */
   readonly isStarting: boolean;
   readonly hasSound: boolean;
+  /** The sound did not load at the last press of play (no network). */
+  readonly hasFailed: boolean;
   readonly isLooping: boolean;
   readonly loop: TickLoop | null;
   readonly rate: number;
@@ -43,6 +45,7 @@ export class Transport {
     isPlaying: false,
     isStarting: false,
     hasSound: true,
+    hasFailed: false,
     isLooping: false,
     loop: null,
     rate: 1,
@@ -72,7 +75,7 @@ export class Transport {
   /** Call from the person's own act, else the browser stays silent. */
   async play(): Promise<void> {
     if (this.#state.isPlaying || this.#state.isStarting) return;
-    this.#set({ isStarting: true });
+    this.#set({ isStarting: true, hasFailed: false });
     try {
       const engine = await this.#load();
       // Pause may have been pressed while the sound was loading.
@@ -93,7 +96,7 @@ export class Transport {
 
   toggle(): void {
     if (this.#state.isPlaying || this.#state.isStarting) this.pause();
-    else void this.play();
+    else this.play().catch(() => this.#set({ hasFailed: true }));
   }
 
   seek(seconds: number): void {

@@ -6,11 +6,13 @@ export interface VolumeControlProps {
   volume: number;
   /** False: this device plays no sound. */
   hasSound: boolean;
+  /** The sound did not load; the next press of play tries again. */
+  hasFailed: boolean;
   onVolume: (volume: number) => void;
 }
 
 /** The volume: a slider, or on narrow screens a button that opens one. */
-export function VolumeControl({ volume, hasSound, onVolume }: VolumeControlProps) {
+export function VolumeControl({ volume, hasSound, hasFailed, onVolume }: VolumeControlProps) {
   const { isOpen, panelId, rootRef, toggle } = useDisclosure();
   const slider = (
     <input
@@ -22,10 +24,10 @@ export function VolumeControl({ volume, hasSound, onVolume }: VolumeControlProps
       onChange={(event) => onVolume(Number(event.target.value) / 100)}
     />
   );
-  if (!hasSound)
+  if (!hasSound || hasFailed)
     return (
       <p className="studio-volume" role="status">
-        <Icon name="mute" /> No sound here
+        <Icon name="mute" /> {hasFailed ? "No sound came. Press play again." : "No sound here"}
       </p>
     );
   return (
