@@ -11,7 +11,7 @@ export interface Disclosure {
 
 /**
  * State of a panel that a button shows and hides. Escape closes it and gives the focus back to the
- * button (the first one in the root); a press outside closes it; the focus may leave freely.
+ * button, which names the panel in aria-controls; a press outside closes it; the focus may leave freely.
  */
 export function useDisclosure(): Disclosure {
   const [isOpen, setIsOpen] = useState(false);
@@ -23,7 +23,7 @@ export function useDisclosure(): Disclosure {
     const handleKey = (event: KeyboardEvent) => {
       if (event.key !== "Escape") return;
       setIsOpen(false);
-      rootRef.current?.querySelector("button")?.focus();
+      rootRef.current?.querySelector<HTMLElement>(`[aria-controls="${panelId}"]`)?.focus();
     };
     const handleOutside = (event: Event) => {
       if (event.target instanceof Node && !rootRef.current?.contains(event.target)) setIsOpen(false);
@@ -36,7 +36,7 @@ export function useDisclosure(): Disclosure {
       document.removeEventListener("pointerdown", handleOutside);
       document.removeEventListener("focusin", handleOutside);
     };
-  }, [isOpen]);
+  }, [isOpen, panelId]);
 
   return { isOpen, panelId, rootRef, toggle: () => setIsOpen((open) => !open), close: () => setIsOpen(false) };
 }
