@@ -1,15 +1,18 @@
 import { useQuery } from "@tanstack/react-query";
+import { lazy, Suspense } from "react";
 import { Outlet, useMatches, useNavigate } from "react-router";
 import type { Session } from "../../shared/contracts/auth.ts";
 import { AppShell } from "../components/app-shell.tsx";
 import type { BandAccountLink } from "../components/band-account.tsx";
 import type { BandProps } from "../components/band.tsx";
 import { sessionQuery, useSignOut } from "../features/auth/api.ts";
-import { SignInAgain } from "../features/auth/components/sign-in-again.tsx";
 import { homeOf } from "../features/auth/model/home-of.ts";
 import { useSessionEnd } from "../features/auth/use-session-end.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { bandItems } from "./navigation.ts";
+
+/** Seldom needed, and its forms weigh as much as a page. */
+const SignInAgain = lazy(() => import("../features/auth/components/sign-in-again.tsx").then((module) => ({ default: module.SignInAgain })));
 
 /** What a route may say of itself in `handle`. */
 export interface RouteHandle {
@@ -32,7 +35,7 @@ export function Root() {
   return (
     <AppShell {...(!hasOwnHead && { band })}>
       <Outlet />
-      {end.endedSession && <SignInAgain session={end.endedSession} onDone={end.clear} />}
+      <Suspense>{end.endedSession && <SignInAgain session={end.endedSession} onDone={end.clear} />}</Suspense>
     </AppShell>
   );
 }
