@@ -30,13 +30,13 @@ export interface ListRowProps {
   tag?: ReactNode;
   /** Buttons at the end. */
   actions?: ReactNode;
-  level?: 3 | 4;
+  level?: 2 | 3 | 4;
   className?: string;
 }
 
 /** One row of a list: lead, title and line, ribbon, tag, actions. Narrow, tag and actions go under the text. */
 export function ListRow({ lead, title, to, isWholeRow, isHere, line, ribbon, tag, actions, level = 3, className }: ListRowProps) {
-  const Heading = level === 3 ? "h3" : "h4";
+  const Heading = `h${level}` as const;
   return (
     <li
       aria-current={isHere || undefined}

@@ -11,7 +11,7 @@ export function ToastRegion() {
   return (
     <section
       aria-label="Messages"
-      className="pointer-events-none fixed inset-x-4 bottom-4 z-50 flex flex-col items-end gap-2 print:hidden"
+      className="pointer-events-none fixed inset-x-4 bottom-4 z-50 flex flex-col items-end gap-2 in-data-[toast-side=start]:items-start print:hidden"
       onPointerEnter={() => setIsHeld(true)}
       onPointerLeave={() => setIsHeld(false)}
       onFocus={() => setIsHeld(true)}

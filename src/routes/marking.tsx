@@ -194,6 +194,8 @@ function LoadedDesk({ detail, ...common }: Common & { detail: SubmissionDetail }
             markedLines={markedLines}
             notes={notes}
             onPickLine={onPickLine}
+            // Line numbers are buttons here: 24 px from one to the next.
+            className="[&_.script-reader-line]:min-h-6"
           />
         )
       }

@@ -24,10 +24,13 @@ const ITEMS: Readonly<Record<Role, readonly BandItem[]>> = {
   ],
 };
 
+/** What waits behind a link, by its address. */
+export type BandCounts = Readonly<Record<string, Pick<BandItem, "count" | "countLabel">>>;
+
 /** The band's links for all roles a person holds, each page once, the public programme last. */
-export function bandItems(user: SignedInUser): BandItem[] {
+export function bandItems(user: SignedInUser, counts: BandCounts = {}): BandItem[] {
   const items = new Map<string, BandItem>();
-  for (const role of user.roles) for (const item of ITEMS[role]) items.set(item.to, item);
+  for (const role of user.roles) for (const item of ITEMS[role]) items.set(item.to, { ...item, ...counts[item.to] });
   items.set("/programme", { to: "/programme", label: "On the square", icon: "street" });
   return [...items.values()];
 }

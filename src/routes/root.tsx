@@ -10,6 +10,7 @@ import { homeOf } from "../features/auth/model/home-of.ts";
 import { useSessionEnd } from "../features/auth/use-session-end.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { bandItems } from "./navigation.ts";
+import { useBandCounts } from "./use-band-counts.ts";
 
 /** Seldom needed, and its forms weigh as much as a page. */
 const SignInAgain = lazy(() => import("../features/auth/components/sign-in-again.tsx").then((module) => ({ default: module.SignInAgain })));
@@ -41,6 +42,7 @@ export function Root() {
 }
 
 function useBand(session: Session | null, forgetSession: () => void): BandProps {
+  const counts = useBandCounts(session?.user ?? null);
   const navigate = useNavigate();
   const signOut = useSignOut();
   if (session === null) {
@@ -71,7 +73,7 @@ function useBand(session: Session | null, forgetSession: () => void): BandProps 
   ];
   return {
     home: homeOf(user.roles),
-    items: bandItems(user),
+    items: bandItems(user, counts),
     account: { name: user.displayName, ...(isStudent && user.classes[0] && { detail: user.classes[0].name }), links },
     isWide: !isStudent,
   };

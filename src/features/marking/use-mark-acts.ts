@@ -12,7 +12,7 @@ let lastToast: number | null = null;
 export interface MarkActsOptions {
   readonly submission: SubmissionDetail["submission"];
   readonly draft: MarkDraftView;
-  /** The submission is dealt with: on to the next. */
+  /** The submission was sent back: on to the next. */
   readonly onDone: () => void;
   /** Opens a submission again after an undo. */
   readonly onOpen: (submissionId: SubmissionId) => void;
@@ -45,6 +45,8 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
   };
 
   return {
+    /** The mark was released on this visit: next is what waits, not the neighbour among the marked. */
+    hasReleased: release.isSuccess,
     isReleasing: isFlushing || release.isPending,
     isSendingBack: sendBack.isPending,
     isReopening: reopen.isPending,
@@ -66,10 +68,8 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
         return;
       }
       release.mutate(undefined, {
-        onSuccess: ({ mark }) => {
-          tell(`The mark of ${authors} is released.`, `${mark.got} of ${mark.of}.`);
-          onDone();
-        },
+        // The desk stays: what is marked is often forwarded next. J goes on.
+        onSuccess: ({ mark }) => tell(`The mark of ${authors} is released.`, `${mark.got} of ${mark.of}.`),
         onError: (error) => {
           isReleasing.current = false;
           showToast({ tone: "stop", title: "The mark is not released.", detail: error.message });

@@ -18,7 +18,14 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
     );
   }
   return (
-    <div className="relative overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1">
+    <div
+      // Wider than a phone: the keyboard must be able to scroll it.
+      // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
+      tabIndex={0}
+      role="region"
+      aria-label="Rows of the audit log"
+      className="relative overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1"
+    >
       <table className="w-full border-collapse">
         <thead>
           <tr className="border-b-[1.5px] border-line text-left text-meta text-slate [&>th]:px-4 [&>th]:py-2 [&>th]:font-semibold">

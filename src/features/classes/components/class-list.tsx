@@ -23,6 +23,7 @@ export function ClassList({ classes }: ClassListProps) {
       {classes.map((one) => (
         <ListRow
           key={one.id}
+          level={2}
           className="px-4"
           title={one.name}
           to={`/classes/${one.id}`}

@@ -46,7 +46,6 @@ export function BoardCell({ cell, label, isInTabOrder, onPress, carrying }: Boar
       role="button"
       data-place={carrying?.placeKey}
       tabIndex={isInTabOrder ? 0 : -1}
-      aria-label={`${label}: ${presentCell(cell)}${isLifted ? ", picked up" : ""}`}
       onClick={onPress}
       onKeyDown={(event) => {
         if (carrying) carrying.onKeyDown(event);
@@ -66,7 +65,16 @@ export function BoardCell({ cell, label, isInTabOrder, onPress, carrying }: Boar
         carried !== null && carrying?.isTarget && !isLifted && "bg-spruce-tint! outline-2 outline-spruce",
       )}
     >
-      {cell.kind === "free" ? <Icon name="plus" className="size-4" /> : <SlotFace cell={cell} />}
+      <span className="sr-only">{label}: </span>
+      {cell.kind === "free" ? (
+        <>
+          <span className="sr-only">free, place a show</span>
+          <Icon name="plus" className="size-4" />
+        </>
+      ) : (
+        <SlotFace cell={cell} />
+      )}
+      {isLifted && <span className="sr-only">, picked up</span>}
     </div>
   );
 }
@@ -115,15 +123,31 @@ function SlotFace({ cell }: { cell: Extract<Cell, { kind: "slot" }> }) {
       >
         {show.title}
       </span>
+      <span className="sr-only">, </span>
       <PictureRibbon picture={show.ribbon} size="row" label="" className="mt-[3px] mb-0.5" />
       <span className="flex justify-between gap-1 text-floor leading-[1.2] whitespace-nowrap text-slate">
         <span className="tabular-nums">{presentLength(show.seconds)}</span>
         <span className="truncate">{toShortSchool(show.schoolName)}</span>
       </span>
       <span className="absolute top-1 right-1 flex">
-        {finding?.severity === "stop" && <Icon name="stop" className="size-3.5 text-rowan" />}
-        {finding?.severity === "warn" && <Icon name="warn" className="size-3.5 text-lamp-ink" />}
-        {slot.isPinned && <Icon name="pin" className="size-3.5 text-slate" />}
+        {finding?.severity === "stop" && (
+          <>
+            <Icon name="stop" className="size-3.5 text-rowan" />
+            <span className="sr-only">, stop: {finding.cause}</span>
+          </>
+        )}
+        {finding?.severity === "warn" && (
+          <>
+            <Icon name="warn" className="size-3.5 text-lamp-ink" />
+            <span className="sr-only">, look here: {finding.cause}</span>
+          </>
+        )}
+        {slot.isPinned && (
+          <>
+            <Icon name="pin" className="size-3.5 text-slate" />
+            <span className="sr-only">, pinned</span>
+          </>
+        )}
       </span>
     </>
   );
@@ -132,18 +156,4 @@ function SlotFace({ cell }: { cell: Extract<Cell, { kind: "slot" }> }) {
 /** "Tarn Road Middle School" is "Tarn Road" where there is little room. */
 export function toShortSchool(name: string): string {
   return name.replace(/ (Middle School|School|Academy)$/, "").replace(/^Quillhaven /, "");
-}
-
-/** A place in words for assistive technology. */
-function presentCell(cell: Exclude<Cell, { kind: "rest" }>): string {
-  if (cell.kind === "free") return "free, place a show";
-  const { show, slot, finding } = cell;
-  return [
-    `${show.title}, ${presentLength(show.seconds)}, ${show.schoolName}`,
-    slot.isPinned && "pinned",
-    finding?.severity === "stop" && `stop: ${finding.cause}`,
-    finding?.severity === "warn" && `look here: ${finding.cause}`,
-  ]
-    .filter(Boolean)
-    .join(", ");
 }

@@ -153,7 +153,7 @@ describe("the board by keyboard", () => {
 
   it("carries a show from the tray to the first free time, and on by arrows", async () => {
     const { cell, user, requests } = open(buildLineup({ slots: [monday1700] }));
-    screen.getByRole("button", { name: /^Slow Snow, 2:40/ }).focus();
+    screen.getByRole("button", { name: /^Slow Snow\s*, 2:40/ }).focus();
     await user.keyboard(" ");
     await waitFor(() => expect(cell(/^Monday 7 December, 17:20/)).toBe(document.activeElement));
     await user.keyboard("{ArrowDown} ");
@@ -170,7 +170,7 @@ describe("the board by keyboard", () => {
 
   it("refuses a taken time for a show of the tray and keeps it picked up", async () => {
     const { user, requests, news } = open(buildLineup({ slots: [monday1700] }));
-    screen.getByRole("button", { name: /^Slow Snow, 2:40/ }).focus();
+    screen.getByRole("button", { name: /^Slow Snow\s*, 2:40/ }).focus();
     await user.keyboard(" {ArrowUp} ");
     expect(news()).toMatch(/Nine Foxes is there. Move it first/);
     expect(screen.getByText(/is picked up. Press a time/)).toBeTruthy();

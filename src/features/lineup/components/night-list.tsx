@@ -30,17 +30,15 @@ export function NightList({ board, date, onDate, onOpen, onNight }: NightListPro
               key={one.date}
               type="button"
               aria-pressed={one.date === column?.date}
-              aria-label={`${presentDate(one.date, "full")}${one.stopCount > 0 ? ", with stops" : one.lookCount > 0 ? ", with something to look at" : ""}`}
               onClick={() => onDate(one.date)}
               className="min-w-[46px] flex-1 rounded-[2px] border border-line bg-card pt-1.5 pb-1 text-center leading-tight aria-pressed:bg-main aria-pressed:text-on-main"
             >
-              {weekday}
-              <b className="block font-head text-4 font-[650]">{day}</b>
+              {weekday} <b className="block font-head text-4 font-[650]">{day}</b>
               <span className="flex h-4 justify-center">
                 {one.stopCount > 0 ? (
-                  <Icon name="stop" className="size-3.5" />
+                  <Icon name="stop" label="with stops" className="size-3.5" />
                 ) : one.lookCount > 0 ? (
-                  <Icon name="warn" className="size-3.5" />
+                  <Icon name="warn" label="with something to look at" className="size-3.5" />
                 ) : null}
               </span>
             </button>

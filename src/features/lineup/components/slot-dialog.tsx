@@ -28,7 +28,7 @@ export function SlotDialog({ lineup, slot, show, finding, onPin, onMove, onRemov
       <p>
         {presentPlace(lineup, slot.nightId, slot.startsAt)} · {presentLength(show.seconds)}
         <span className="block text-slate">
-          {show.publicName}, {show.className}, {show.schoolName}
+          {show.publicName} · forwarded by {show.teacherName}
         </span>
       </p>
       {finding && (

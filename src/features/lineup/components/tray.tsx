@@ -143,7 +143,6 @@ function TrayRow({
         data-tray={show.id}
         aria-pressed={isCarried}
         aria-describedby={hintsId}
-        aria-label={`${show.title}, ${presentLength(show.seconds)}, ${show.publicName}, ${presentNights(nightCount)}`}
         draggable={onPickUp !== null}
         onClick={act}
         onKeyDown={(event) => {
@@ -161,7 +160,13 @@ function TrayRow({
       >
         <Icon name="grip" className="size-4 text-rim" />
         <b className="truncate font-[650]">{show.title}</b>
-        <span className="text-meta text-slate tabular-nums">{presentLength(show.seconds)}</span>
+        <span className="text-meta text-slate tabular-nums">
+          <span className="sr-only">, </span>
+          {presentLength(show.seconds)}
+          <span className="sr-only">
+            , {show.publicName}, {presentNights(nightCount)}
+          </span>
+        </span>
         <span className="col-span-2 col-start-2">
           <PictureRibbon picture={show.ribbon} size="row" label="" />
         </span>

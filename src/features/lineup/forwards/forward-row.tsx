@@ -20,6 +20,7 @@ export interface ForwardRowProps {
 export function ForwardRow({ forward, to, timeZone, now, words, actions }: ForwardRowProps) {
   return (
     <ListRow
+      level={2}
       className="px-4"
       title={forward.title}
       to={to}

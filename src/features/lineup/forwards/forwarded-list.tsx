@@ -51,7 +51,7 @@ export function ForwardedList({ forwards, timeZone, now }: ForwardedListProps) {
             }
             actions={
               forward.state === "declined" && (
-                <LinkButton to={desk} icon="turn" look="main" aria-label={`Open the work on ${forward.title} again`}>
+                <LinkButton to={desk} icon="turn" look="main" aria-label={`Open the work again: ${forward.title}`}>
                   Open the work again
                 </LinkButton>
               )

@@ -37,7 +37,7 @@ export function Inbox({ assignments, timeZone }: InboxProps) {
         return (
           <ListRow
             key={assignment.id}
-            level={3}
+            level={2}
             className="px-4"
             title={assignment.title}
             to={desk ?? undefined}

@@ -4,6 +4,7 @@ import userEvent from "@testing-library/user-event";
 import { MemoryRouter } from "react-router";
 import { beforeEach, describe, expect, it, vi } from "vitest";
 import type { SubmissionDetail } from "../../../../shared/contracts/marking.ts";
+import { listToasts } from "../../../components/toast-queue.ts";
 import { submissionQuery } from "../api.ts";
 import { buildQueueRow, buildSubmission } from "../model/marking.fixture.ts";
 import { MarkingDesk } from "./marking-desk.tsx";
@@ -211,14 +212,18 @@ describe("releasing", () => {
     expect(requests.some((request) => request.path.endsWith("/release"))).toBe(false);
   });
 
-  it("sends what is unsaved first, releases once, and goes on to what waits", async () => {
+  it("sends what is unsaved first, releases once, stays for the forwarding, and goes on with J to what waits", async () => {
     const { user, requests, onGo } = open();
+    const listPosts = () =>
+      requests.filter((request) => request.method !== "GET").map((request) => request.path.split("/").at(-1));
     await user.keyboard("333gg");
-    await waitFor(() => expect(onGo).toHaveBeenCalledWith("june"));
-    const posts = requests
-      .filter((request) => request.method !== "GET")
-      .map((request) => request.path.split("/").at(-1));
-    expect(posts).toEqual(["mark", "release"]);
+    await waitFor(() => expect(listPosts()).toEqual(["mark", "release"]));
+    await waitFor(() =>
+      expect(listToasts().map((toast) => toast.title)).toContain("The mark of Wren and Idris is released."),
+    );
+    await user.keyboard("j");
+    expect(listPosts()).toEqual(["mark", "release"]);
+    expect(onGo.mock.calls).toEqual([["june"]]);
   });
 
   it("shows a released mark fixed, with the way to take it back", () => {

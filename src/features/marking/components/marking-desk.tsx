@@ -1,4 +1,4 @@
-import { useState, type ReactNode } from "react";
+import { useEffect, useState, type ReactNode } from "react";
 import type { QueueRow, SubmissionDetail } from "../../../../shared/contracts/marking.ts";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
@@ -73,7 +73,6 @@ export function MarkingDesk({
   const isOpen = submission.state === "submitted";
   const obstacle = findReleaseObstacle(rubric, draft.text.levels);
   const previous = findNeighbour(queue.rows, submission.id, -1);
-  const next = findNeighbour(queue.rows, submission.id, 1);
   const acts = useMarkActs({
     submission,
     draft,
@@ -83,6 +82,10 @@ export function MarkingDesk({
       if (following) onGo(following.submissionId);
     },
   });
+
+  const next =
+    (acts.hasReleased && !isOpen ? findNextToMark(queue.rows, submission.id) : null) ??
+    findNeighbour(queue.rows, submission.id, 1);
 
   const handleAction = (action: DeskAction) => {
     if (action.kind === "next" && next) onGo(next.submissionId);
@@ -100,6 +103,13 @@ export function MarkingDesk({
     }
   };
   useDeskKeys(handleAction);
+  useEffect(() => {
+    // At the end of the window lies the release bar of the next show: messages go to the other side.
+    document.documentElement.dataset.toastSide = "start";
+    return () => {
+      delete document.documentElement.dataset.toastSide;
+    };
+  }, []);
 
   const position = queue.rows.findIndex((row) => row.submissionId === submission.id) + 1;
   const presentTick = (tick: number) => (song ? presentMoment(tick, song) : "there");
