@@ -11,10 +11,11 @@ export default defineConfig({
     testTimeout: 30_000,
     hookTimeout: 120_000,
     projects: [
-      { test: { name: "sandbox", include: ["sandbox/**/*.test.ts"], environment: "node" } },
-      { test: { name: "shared", include: ["shared/**/*.test.ts", "lessons/**/*.test.ts"], environment: "node" } },
-      { test: { name: "server", include: ["server/**/*.test.ts"], environment: "node" } },
+      { extends: true, test: { name: "sandbox", include: ["sandbox/**/*.test.ts"], environment: "node" } },
+      { extends: true, test: { name: "shared", include: ["shared/**/*.test.ts", "lessons/**/*.test.ts"], environment: "node" } },
+      { extends: true, test: { name: "server", include: ["server/**/*.test.ts"], environment: "node" } },
       {
+        extends: true,
         test: {
           name: "src",
           include: ["src/**/*.test.{ts,tsx}"],
@@ -24,8 +25,9 @@ export default defineConfig({
           css: { include: [/tokens\.css/] },
         },
       },
-      { test: { name: "tests", include: ["tests/**/*.test.ts"], environment: "node" } },
+      { extends: true, test: { name: "tests", include: ["tests/**/*.test.ts"], environment: "node" } },
       {
+        extends: true,
         test: {
           name: "journeys",
           include: ["tests/journeys/**/*.spec.ts"],

@@ -1,3 +1,6 @@
+import { mkdirSync } from "node:fs";
+import { tmpdir } from "node:os";
+import path from "node:path";
 import { type Browser, type BrowserContext, chromium, type Page } from "playwright-core";
 import { ensureChromium } from "../../support/chromium.ts";
 
@@ -55,4 +58,15 @@ export async function openPerson(browser: Browser, address: string, options: Per
     if (url.protocol.startsWith("http") && url.origin !== address) note(`off origin: ${request.url()}`);
   });
   return { context, page, faults, close: () => context.close() };
+}
+
+/** Keeps a picture of what everybody had on screen when a journey failed, and says where. */
+export async function keepPictures(people: readonly Person[], name: string): Promise<void> {
+  const folder = path.join(tmpdir(), "duskbell-journeys");
+  mkdirSync(folder, { recursive: true });
+  for (const [i, { page, faults }] of people.entries()) {
+    const file = path.join(folder, `${name.replaceAll(/[^a-z]+/g, "-")}-${i + 1}.png`);
+    await page.screenshot({ path: file }).catch(() => undefined);
+    console.error(`${file} shows ${page.url()}`, faults);
+  }
 }
