@@ -68,7 +68,7 @@ export function StudentTable({ classSummary, students, lessons, timeZone, now, o
                   key={student.id}
                   className="max-wide:relative max-wide:flex max-wide:flex-wrap max-wide:items-center max-wide:gap-x-4 max-wide:gap-y-1 max-wide:px-4 max-wide:py-3 wide:[&>*]:px-4 wide:[&>*]:py-1.5"
                 >
-                  <th scope="row" className="text-left font-[650] max-wide:w-[calc(100%-3rem)]">
+                  <th scope="row" className="text-left font-[650] max-wide:w-full max-wide:pr-12">
                     {student.displayName}
                   </th>
                   <td className="font-mono text-meta">{student.username}</td>

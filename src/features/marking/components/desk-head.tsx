@@ -31,8 +31,9 @@ export function DeskHead({ submission, timeZone, now, position, onPrevious, onNe
         {submission.showTitle}
       </h1>
       <p className="min-w-0 truncate text-slate max-wide:order-5 max-wide:w-full">
-        {formatNames(submission.authors)} · version {submission.versionNumber}
-        <span className="wide:sr-only">, handed in</span> {presentWhen(submission.handedInAt, now, timeZone)}
+        {formatNames(submission.authors)} · version {submission.versionNumber},{" "}
+        <span className="wide:sr-only">handed in </span>
+        {presentWhen(submission.handedInAt, now, timeZone)}
       </p>
       <span className="ml-auto text-meta whitespace-nowrap text-slate wide:hidden">{position}</span>
       <span className="flex gap-2 max-wide:order-6 wide:ml-auto">

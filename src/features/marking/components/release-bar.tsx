@@ -64,16 +64,17 @@ function OpenMark({
         error={noteError}
         className="[&_textarea]:max-h-32 [&_textarea]:min-h-14"
       />
-      <div className="mt-2 flex flex-wrap items-center gap-2">
-        <strong className="mr-auto font-head text-[1.375rem]/none font-[650] whitespace-nowrap tabular-nums">
+      <div className="mt-2 flex flex-wrap items-center gap-1.5">
+        <strong className="mr-auto font-head text-[1.25rem]/none font-[650] whitespace-nowrap tabular-nums">
           {points.got} of {points.of}
         </strong>
-        <Button icon="turn" onPress={onSendBack} isPending={pending === "send-back"}>
+        <Button icon="turn" className="px-2.5!" onPress={onSendBack} isPending={pending === "send-back"}>
           Send back
         </Button>
         <Button
           look="main"
           icon="tick"
+          className="px-2.5!"
           onPress={onRelease}
           isPending={pending === "release"}
           disabledReason={releaseObstacle}
@@ -110,7 +111,7 @@ function FixedMark({ state, authors, note, points, onReopen, pending, forwarding
       <h3 className="font-text text-body font-bold tracking-normal">To {authors}</h3>
       <p className="mt-0.5 max-h-28 overflow-y-auto whitespace-pre-wrap text-soft">{note || "No note was written."}</p>
       <div className="mt-2.5 flex flex-wrap items-center gap-2">
-        <strong className="mr-auto font-head text-[1.375rem]/none font-[650] whitespace-nowrap tabular-nums">
+        <strong className="mr-auto font-head text-[1.25rem]/none font-[650] whitespace-nowrap tabular-nums">
           {isMarked ? `${points.got} of ${points.of}` : "Sent back"}
         </strong>
         <Button icon="undo" onPress={onReopen} isPending={pending === "reopen"}>
