@@ -19,7 +19,14 @@ function countWords(text: string): number {
 }
 
 /** Four words, with a bar that fills for each, so that a pupil sees what is missing. Hidden like any password until shown. */
-export function FourWordsField({ name, value, onChange, label = "Your four words", error, autoComplete = "current-password" }: FourWordsFieldProps) {
+export function FourWordsField({
+  name,
+  value,
+  onChange,
+  label = "Your four words",
+  error,
+  autoComplete = "current-password",
+}: FourWordsFieldProps) {
   const [isShown, setIsShown] = useState(false);
   const count = Math.min(WORDS, countWords(value));
   return (

@@ -3,9 +3,10 @@ import { useState, type FormEvent } from "react";
 import type { Session } from "../../../../shared/contracts/auth.ts";
 import { Button } from "../../../components/button.tsx";
 import { TextField } from "../../../components/text-field.tsx";
+import { findFieldError } from "../../../lib/field-error.ts";
 import { passphrasesQuery, useRedeemReset } from "../api.ts";
 import { FourWordsField } from "./four-words-field.tsx";
-import { fieldError, SignInProblem } from "./sign-in-problem.tsx";
+import { SignInProblem } from "./sign-in-problem.tsx";
 
 export interface NewWordsFormProps {
   onSignedIn: (session: Session) => void;
@@ -25,14 +26,53 @@ export function NewWordsForm({ onSignedIn }: NewWordsFormProps) {
 
   return (
     <form onSubmit={handleSubmit} className="space-y-5" noValidate>
-      <SignInProblem error={redeem.error} wrongHint="Check the class code, your username and the code from your teacher. A code works once, for an hour." />
+      <SignInProblem
+        error={redeem.error}
+        wrongHint="Check the class code, your username and the code from your teacher. A code works once, for an hour."
+      />
       <div className="grid grid-cols-2 gap-4 max-wide:grid-cols-1">
-        <TextField name="classCode" label="Class code" isMono value={fields.classCode} onChange={(event) => set("classCode")(event.target.value)} autoCapitalize="characters" spellCheck={false} error={fieldError(redeem.error, "/classCode")} />
-        <TextField name="username" label="Username" value={fields.username} onChange={(event) => set("username")(event.target.value)} autoComplete="username" autoCapitalize="none" spellCheck={false} error={fieldError(redeem.error, "/username")} />
+        <TextField
+          name="classCode"
+          label="Class code"
+          isMono
+          value={fields.classCode}
+          onChange={(event) => set("classCode")(event.target.value)}
+          autoCapitalize="characters"
+          spellCheck={false}
+          error={findFieldError(redeem.error, "/classCode")}
+        />
+        <TextField
+          name="username"
+          label="Username"
+          value={fields.username}
+          onChange={(event) => set("username")(event.target.value)}
+          autoComplete="username"
+          autoCapitalize="none"
+          spellCheck={false}
+          error={findFieldError(redeem.error, "/username")}
+        />
       </div>
-      <TextField name="code" label="Code from your teacher" hint="8 letters and numbers, like K7P2-M9QX" isMono value={fields.code} onChange={(event) => set("code")(event.target.value)} autoComplete="one-time-code" autoCapitalize="characters" spellCheck={false} error={fieldError(redeem.error, "/code")} />
+      <TextField
+        name="code"
+        label="Code from your teacher"
+        hint="8 letters and numbers, like K7P2-M9QX"
+        isMono
+        value={fields.code}
+        onChange={(event) => set("code")(event.target.value)}
+        autoComplete="one-time-code"
+        autoCapitalize="characters"
+        spellCheck={false}
+        error={findFieldError(redeem.error, "/code")}
+      />
       <div>
-        <FourWordsField name="passphrase" label="Your new four words" autoComplete="new-password" value={fields.passphrase} onChange={set("passphrase")} error={fieldError(redeem.error, "/passphrase")} />
+        <FourWordsField
+          name="passphrase"
+          label="Your new four words"
+          autoComplete="new-password"
+          value={fields.passphrase}
+          onChange={set("passphrase")}
+          error={findFieldError(redeem.error, "/passphrase")}
+        />
         {suggestions.data && (
           <div className="mt-3">
             <p className="text-meta text-slate">Take one of these, or make up four words of your own:</p>
@@ -48,7 +88,13 @@ export function NewWordsForm({ onSignedIn }: NewWordsFormProps) {
           </div>
         )}
       </div>
-      <Button type="submit" look="main" iconEnd="arrow-right" isPending={redeem.isPending} className="w-full justify-center">
+      <Button
+        type="submit"
+        look="main"
+        iconEnd="arrow-right"
+        isPending={redeem.isPending}
+        className="w-full justify-center"
+      >
         Use these words
       </Button>
     </form>

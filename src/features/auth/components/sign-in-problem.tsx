@@ -34,13 +34,9 @@ export function SignInProblem({ error, wrongHint }: SignInProblemProps) {
   }
   return (
     <Notice tone="stop" role="alert" title={error.message}>
-      {error instanceof ApiProblem && error.requestId !== null && <>If it happens again, tell your teacher this number: {error.requestId}</>}
+      {error instanceof ApiProblem && error.requestId !== null && (
+        <>If it happens again, tell your teacher this number: {error.requestId}</>
+      )}
     </Notice>
   );
-}
-
-/** The message of one field of a refused form, by its JSON pointer. */
-export function fieldError(error: Error | null, pointer: string): string | null {
-  if (!(error instanceof ApiProblem)) return null;
-  return error.errors.find((field) => field.pointer === pointer)?.detail ?? null;
 }

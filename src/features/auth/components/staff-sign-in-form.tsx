@@ -2,8 +2,9 @@ import { useState, type FormEvent } from "react";
 import type { Session } from "../../../../shared/contracts/auth.ts";
 import { Button } from "../../../components/button.tsx";
 import { TextField } from "../../../components/text-field.tsx";
+import { findFieldError } from "../../../lib/field-error.ts";
 import { useStaffSignIn } from "../api.ts";
-import { fieldError, SignInProblem } from "./sign-in-problem.tsx";
+import { SignInProblem } from "./sign-in-problem.tsx";
 
 export interface StaffSignInFormProps {
   onSignedIn: (session: Session) => void;
@@ -31,7 +32,7 @@ export function StaffSignInForm({ onSignedIn }: StaffSignInFormProps) {
         onChange={(event) => setEmail(event.target.value)}
         autoComplete="username"
         spellCheck={false}
-        error={fieldError(signIn.error, "/email")}
+        error={findFieldError(signIn.error, "/email")}
       />
       <TextField
         name="password"
@@ -40,9 +41,15 @@ export function StaffSignInForm({ onSignedIn }: StaffSignInFormProps) {
         value={password}
         onChange={(event) => setPassword(event.target.value)}
         autoComplete="current-password"
-        error={fieldError(signIn.error, "/password")}
+        error={findFieldError(signIn.error, "/password")}
       />
-      <Button type="submit" look="main" iconEnd="arrow-right" isPending={signIn.isPending} className="w-full justify-center">
+      <Button
+        type="submit"
+        look="main"
+        iconEnd="arrow-right"
+        isPending={signIn.isPending}
+        className="w-full justify-center"
+      >
         Sign in
       </Button>
     </form>

@@ -2,9 +2,10 @@ import { useState, type FormEvent } from "react";
 import type { Session } from "../../../../shared/contracts/auth.ts";
 import { Button } from "../../../components/button.tsx";
 import { TextField } from "../../../components/text-field.tsx";
+import { findFieldError } from "../../../lib/field-error.ts";
 import { useStudentSignIn } from "../api.ts";
 import { FourWordsField } from "./four-words-field.tsx";
-import { fieldError, SignInProblem } from "./sign-in-problem.tsx";
+import { SignInProblem } from "./sign-in-problem.tsx";
 
 const CLASS_CODE_KEY = "duskbell.class-code";
 
@@ -50,7 +51,7 @@ export function StudentSignInForm({ onSignedIn, username: knownUsername = "" }: 
           autoComplete="organization"
           autoCapitalize="characters"
           spellCheck={false}
-          error={fieldError(signIn.error, "/classCode")}
+          error={findFieldError(signIn.error, "/classCode")}
         />
         <TextField
           name="username"
@@ -60,11 +61,22 @@ export function StudentSignInForm({ onSignedIn, username: knownUsername = "" }: 
           autoComplete="username"
           autoCapitalize="none"
           spellCheck={false}
-          error={fieldError(signIn.error, "/username")}
+          error={findFieldError(signIn.error, "/username")}
         />
       </div>
-      <FourWordsField name="passphrase" value={passphrase} onChange={setPassphrase} error={fieldError(signIn.error, "/passphrase")} />
-      <Button type="submit" look="main" iconEnd="arrow-right" isPending={signIn.isPending} className="w-full justify-center">
+      <FourWordsField
+        name="passphrase"
+        value={passphrase}
+        onChange={setPassphrase}
+        error={findFieldError(signIn.error, "/passphrase")}
+      />
+      <Button
+        type="submit"
+        look="main"
+        iconEnd="arrow-right"
+        isPending={signIn.isPending}
+        className="w-full justify-center"
+      >
         Sign in
       </Button>
     </form>

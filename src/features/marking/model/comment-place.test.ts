@@ -22,7 +22,7 @@ const TIMELINE = buildTimeline(
 
 function buildComment(id: string, anchor: CommentAnchor, createdAt = 0): Comment {
   return {
-    id: id as Comment["id"],
+    id: id,
     authorName: "Ms Marlow",
     isMine: true,
     isTeacher: true,
