@@ -79,7 +79,8 @@ export default {
     },
     {
       name: "virtual-machine-only-in-workers",
-      comment: "An endless loop must never freeze a tab or the server: the engine runs behind a thread that can be ended.",
+      comment:
+        "An endless loop must never freeze a tab or the server: the engine runs behind a thread that can be ended.",
       severity: "error",
       from: { path: "^(src|server)/", pathNot: `\\.worker\\.ts$|^server/runs/node-host\\.ts$|${testFiles}` },
       to: { path: "^node_modules/(quickjs-emscripten-core|@jitl)/" },

@@ -7,7 +7,16 @@ const bannedGlobals = (...entries) => ({ "no-restricted-globals": ["error", ...e
 
 export default tseslint.config(
   {
-    ignores: ["dist/", "var/", "node_modules/", "drizzle/", "coverage/", "tests/samples/", "**/*.generated.ts", "server/db/seed/world/scripts/**/*.show.ts"],
+    ignores: [
+      "dist/",
+      "var/",
+      "node_modules/",
+      "drizzle/",
+      "coverage/",
+      "tests/samples/",
+      "**/*.generated.ts",
+      "server/db/seed/world/scripts/**/*.show.ts",
+    ],
   },
   ...tseslint.configs.recommendedTypeChecked,
   {
@@ -47,10 +56,30 @@ export default tseslint.config(
     },
   },
   {
+    files: ["sandbox/language/**/*.ts", "sandbox/checks/**/*.ts", "sandbox/course/**/*.ts"],
+    rules: {
+      // The compiler's node guards (ts.isCallExpression) and kinds are typed as methods and enums; both are plain values.
+      "@typescript-eslint/unbound-method": "off",
+      "@typescript-eslint/no-unsafe-enum-comparison": "off",
+    },
+  },
+  {
+    files: ["sandbox/engine/library/**/*.ts"],
+    rules: {
+      // The library takes built-ins apart, replaces Math.random by the show's luck, and throws a mark that no script can catch or read.
+      "@typescript-eslint/unbound-method": "off",
+      "@typescript-eslint/only-throw-error": "off",
+      "no-restricted-properties": "off",
+    },
+  },
+  {
     files: ["server/features/**/*.ts", "server/http/**/*.ts", "server/show-runs/**/*.ts"],
     ignores: ["**/*.test.ts"],
     rules: {
-      "no-restricted-properties": ["error", { object: "Date", property: "now", message: "Use the injected clock (deps.clock.now())." }],
+      "no-restricted-properties": [
+        "error",
+        { object: "Date", property: "now", message: "Use the injected clock (deps.clock.now())." },
+      ],
     },
   },
   {
@@ -77,10 +106,12 @@ export default tseslint.config(
       "@typescript-eslint/no-unsafe-assignment": "off",
       "@typescript-eslint/no-unsafe-member-access": "off",
       "@typescript-eslint/no-unsafe-argument": "off",
+      "@typescript-eslint/no-unsafe-call": "off",
+      "@typescript-eslint/no-unsafe-return": "off",
       "@typescript-eslint/no-non-null-assertion": "off",
       "@typescript-eslint/unbound-method": "off",
       "no-restricted-globals": "off",
     },
   },
-  { files: ["eslint.config.js", ".dependency-cruiser.mjs"], ...tseslint.configs.disableTypeChecked },
+  { files: ["eslint.config.js", ".dependency-cruiser.mjs", "src/public/*.js"], ...tseslint.configs.disableTypeChecked },
 );

@@ -5,7 +5,8 @@ import { defineConfig } from "vite";
 const apiOrigin = process.env.DUSKBELL_API_ORIGIN ?? "http://127.0.0.1:8120";
 
 /** What nearly every page needs and what changes only with an upgrade: one chunk, so that a release leaves it in the browser's cache. */
-const FRAMEWORK = /node_modules\/(react|react-dom|scheduler|react-router|@tanstack\/react-query|@tanstack\/query-core|zod)\//;
+const FRAMEWORK =
+  /node_modules\/(react|react-dom|scheduler|react-router|@tanstack\/react-query|@tanstack\/query-core|zod)\//;
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],

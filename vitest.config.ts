@@ -12,7 +12,10 @@ export default defineConfig({
     hookTimeout: 120_000,
     projects: [
       { extends: true, test: { name: "sandbox", include: ["sandbox/**/*.test.ts"], environment: "node" } },
-      { extends: true, test: { name: "shared", include: ["shared/**/*.test.ts", "lessons/**/*.test.ts"], environment: "node" } },
+      {
+        extends: true,
+        test: { name: "shared", include: ["shared/**/*.test.ts", "lessons/**/*.test.ts"], environment: "node" },
+      },
       { extends: true, test: { name: "server", include: ["server/**/*.test.ts"], environment: "node" } },
       {
         extends: true,

@@ -1,8 +1,6 @@
 import { z } from "zod";
 
-const flag = z
-  .enum(["true", "false"])
-  .transform((value) => value === "true");
+const flag = z.enum(["true", "false"]).transform((value) => value === "true");
 
 /** Every setting of the server, read from the environment once. README's table lists the same names. */
 const ConfigSchema = z.object({

@@ -1,3 +1,4 @@
+import { rmSync } from "node:fs";
 import { join } from "node:path";
 import { destination } from "pino";
 import { systemClock } from "./clock.ts";
@@ -14,6 +15,7 @@ const config = readConfig();
 // The terminal's standard output is for people; machines read the log from standard error.
 const log = createLog(config.logLevel, destination(2));
 let welcome: string[] = [];
+let isSeeding = false;
 
 try {
   const server = await startServer(config, log, async ({ connection, runs }) => {
@@ -21,7 +23,9 @@ try {
     console.log("Seeding the demo world, once ...");
     // Loaded only here: a server with its own world never needs it.
     const { seedDemoWorld } = await import("./db/seed/index.ts");
+    isSeeding = true;
     welcome = await seedDemoWorld({ db: connection.db, clock: systemClock, runs, log });
+    isSeeding = false;
   });
   printAddress(server.address);
   stopOnSignals(() => server.stop());
@@ -68,6 +72,9 @@ function fail(error: unknown): never {
     console.error(`Port ${config.port} on ${config.host} is taken. Stop the other program, or set PORT to a free one.`);
     process.exit(EXIT_PORT_TAKEN);
   }
+  // Half a demo world would be taken for a world of one's own at the next start.
+  if (isSeeding)
+    for (const end of ["", "-wal", "-shm"]) rmSync(join(config.dataDir, DATABASE_FILE + end), { force: true });
   console.error(`Duskbell could not start: ${error instanceof Error ? error.message : String(error)}`);
   log.fatal({ err: error }, "start failed");
   process.exit(EXIT_FAILED);

@@ -64,7 +64,9 @@ export async function startServer(
     const http = createServer(app);
     const address = await listen(http, config);
     const catchUp = () => {
-      runUnfinishedVersions({ db: connection.db, clock: systemClock, runs, log }).catch((error: unknown) => log.error({ err: error }, "catching up on runs failed"));
+      runUnfinishedVersions({ db: connection.db, clock: systemClock, runs, log }).catch((error: unknown) =>
+        log.error({ err: error }, "catching up on runs failed"),
+      );
     };
     catchUp();
     const catchingUp = setInterval(catchUp, CATCH_UP_EVERY_MS);

@@ -54,7 +54,12 @@ export type EndpointResponse<E extends Endpoint> = z.output<E["response"]>;
 export type EndpointResult<E extends Endpoint> = z.input<E["response"]>;
 
 /** Problems that any endpoint may answer. */
-export const COMMON_PROBLEMS = ["malformed-request", "slow-down", "internal", "busy"] as const satisfies readonly ProblemSlug[];
+export const COMMON_PROBLEMS = [
+  "malformed-request",
+  "slow-down",
+  "internal",
+  "busy",
+] as const satisfies readonly ProblemSlug[];
 
 /** Fills `:name` parameters and the query into an endpoint's path. */
 export function buildPath(endpoint: Endpoint, input: { params?: object; query?: object }): string {
@@ -62,7 +67,8 @@ export function buildPath(endpoint: Endpoint, input: { params?: object; query?: 
   const path = endpoint.path.replace(/:([A-Za-z]+)/g, (_, name: string) => encodeURIComponent(String(params[name])));
   const search = new Array<string>();
   for (const [key, value] of Object.entries(input.query ?? {})) {
-    if (value !== undefined && value !== null) search.push(`${encodeURIComponent(key)}=${encodeURIComponent(String(value))}`);
+    if (value !== undefined && value !== null)
+      search.push(`${encodeURIComponent(key)}=${encodeURIComponent(String(value))}`);
   }
   return search.length > 0 ? `${path}?${search.join("&")}` : path;
 }

@@ -22,8 +22,8 @@ export const PROBLEMS = {
   "key-reused": { status: 422, title: "The idempotency key was used for something else." },
   "too-large": { status: 413, title: "This is too large." },
   "slow-down": { status: 429, title: "Too many tries. Please wait." },
-  "busy": { status: 503, title: "The server is busy. Your work is safe, please try again." },
-  "internal": { status: 500, title: "Something broke on our side." },
+  busy: { status: 503, title: "The server is busy. Your work is safe, please try again." },
+  internal: { status: 500, title: "Something broke on our side." },
 } as const satisfies Record<string, { status: number; title: string }>;
 
 export type ProblemSlug = keyof typeof PROBLEMS;
@@ -65,7 +65,12 @@ export class ProblemError extends Error {
 
   constructor(
     slug: ProblemSlug,
-    options: { detail?: string; errors?: readonly FieldError[]; extensions?: Readonly<Record<string, unknown>>; cause?: unknown } = {},
+    options: {
+      detail?: string;
+      errors?: readonly FieldError[];
+      extensions?: Readonly<Record<string, unknown>>;
+      cause?: unknown;
+    } = {},
   ) {
     super(options.detail ?? PROBLEMS[slug].title, { cause: options.cause });
     this.name = "ProblemError";

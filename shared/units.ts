@@ -1,13 +1,9 @@
 /**
  * Branded units of time. A bare `number` for a time does not say what it counts; these do.
  *
- * - `Beats`: a length in beats of the song (may be fractional).
- * - `Moment`: a place in the song, in beats from its beat 0.
  * - `Ticks`: 1/960 of a beat, whole; what a timeline stores.
  * - `Seconds`: seconds from the start of the song's audio.
  */
-export type Beats = number & { readonly __unit: "beats" };
-export type Moment = number & { readonly __unit: "moment" };
 export type Ticks = number & { readonly __unit: "ticks" };
 export type Seconds = number & { readonly __unit: "seconds" };
 

@@ -46,7 +46,14 @@ function vitest(name: string, args: readonly string[]): void {
   const start = performance.now();
   const folder = mkdtempSync(path.join(tmpdir(), "duskbell-test-"));
   const file = path.join(folder, "report.json");
-  const isOk = node(["node_modules/vitest/vitest.mjs", "run", "--reporter=default", "--reporter=json", `--outputFile.json=${file}`, ...args]);
+  const isOk = node([
+    "node_modules/vitest/vitest.mjs",
+    "run",
+    "--reporter=default",
+    "--reporter=json",
+    `--outputFile.json=${file}`,
+    ...args,
+  ]);
   const outcome = { name, passed: 0, failed: 1, seconds: (performance.now() - start) / 1000 };
   try {
     const report = JSON.parse(readFileSync(file, "utf8")) as VitestReport;
@@ -78,11 +85,26 @@ for (const project of ["sandbox", "src", "server", "tests"]) {
 }
 check("lint", () => node(["node_modules/eslint/bin/eslint.js", ".", "--max-warnings=0"]));
 check("arrows", () =>
-  node(["node_modules/dependency-cruiser/bin/dependency-cruise.mjs", "src", "server", "sandbox", "shared", "lessons", "--config", ".dependency-cruiser.mjs"]),
+  node([
+    "node_modules/dependency-cruiser/bin/dependency-cruise.mjs",
+    "src",
+    "server",
+    "sandbox",
+    "shared",
+    "lessons",
+    "--config",
+    ".dependency-cruiser.mjs",
+  ]),
 );
 check("unused code", () => node(["node_modules/knip/bin/knip.js"]));
 check("migrations match the schema", () => node(["node_modules/drizzle-kit/bin.cjs", "check"]));
-vitest("unit, property and HTTP tests", ["--project=sandbox", "--project=shared", "--project=server", "--project=src", "--project=tests"]);
+vitest("unit, property and HTTP tests", [
+  "--project=sandbox",
+  "--project=shared",
+  "--project=server",
+  "--project=src",
+  "--project=tests",
+]);
 vitest("browser journeys", ["--project=journeys"]);
 
 say("");

@@ -22,15 +22,31 @@ export function listFunctionCalls(source: string): readonly FunctionCalls[] {
     const made: { name: string; parameters: number; node: ts.Node }[] = [];
     const calls: ts.CallExpression[] = [];
     walk(file, (node) => {
-      if (ts.isFunctionDeclaration(node) && node.name !== undefined) made.push({ name: node.name.text, parameters: node.parameters.length, node });
-      else if (ts.isVariableDeclaration(node) && ts.isIdentifier(node.name) && node.initializer !== undefined && (ts.isArrowFunction(node.initializer) || ts.isFunctionExpression(node.initializer)))
+      if (ts.isFunctionDeclaration(node) && node.name !== undefined)
+        made.push({ name: node.name.text, parameters: node.parameters.length, node });
+      else if (
+        ts.isVariableDeclaration(node) &&
+        ts.isIdentifier(node.name) &&
+        node.initializer !== undefined &&
+        (ts.isArrowFunction(node.initializer) || ts.isFunctionExpression(node.initializer))
+      )
         made.push({ name: node.name.text, parameters: node.initializer.parameters.length, node });
       if (ts.isCallExpression(node)) calls.push(node);
     });
     return made.map(({ name, parameters, node }) => {
-      const its = calls.filter((call) => ts.isIdentifier(call.expression) && call.expression.text === name && !isInside(call, node));
-      const values = its.map((call) => call.arguments.map((argument) => argument.getText(file).replace(/\s+/g, " ")).join(", "));
-      return { name, parameters, line: lineOf(node), callLines: its.map(lineOf), differentValues: new Set(values).size };
+      const its = calls.filter(
+        (call) => ts.isIdentifier(call.expression) && call.expression.text === name && !isInside(call, node),
+      );
+      const values = its.map((call) =>
+        call.arguments.map((argument) => argument.getText(file).replace(/\s+/g, " ")).join(", "),
+      );
+      return {
+        name,
+        parameters,
+        line: lineOf(node),
+        callLines: its.map(lineOf),
+        differentValues: new Set(values).size,
+      };
     });
   } catch (error) {
     if (!(error instanceof RangeError)) throw error;

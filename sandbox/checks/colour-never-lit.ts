@@ -49,7 +49,11 @@ function isLitBetween(tracks: Tracks, light: number, start: number, end: number)
     if (to > from && (levelAt(level, entry, from) > 0 || levelAt(level, entry, to) > 0)) return true;
   }
   const firstPulse = pulse.first[light] ?? 0;
-  for (let entry = findEntry(pulse, light, end - 1); entry >= firstPulse && (pulse.latestEnd[entry] ?? 0) > start; entry--)
+  for (
+    let entry = findEntry(pulse, light, end - 1);
+    entry >= firstPulse && (pulse.latestEnd[entry] ?? 0) > start;
+    entry--
+  )
     if (Math.max(start, pulse.tick[entry] ?? 0) < (pulse.end[entry] ?? 0)) return true;
   return false;
 }

@@ -10,14 +10,21 @@ import { findOffGrid } from "./off-grid.ts";
 
 /** 0 relay, 1 dimmer, 2 and 3 colour. */
 const layout = buildFront("relay", "dimmer", { kind: "colour" }, { kind: "colour" });
-const context = (cues: readonly WrittenCue[], song = buildSong()): CheckContext => createCheckContext({ timeline: buildShow(layout, cues), layout, song });
+const context = (cues: readonly WrittenCue[], song = buildSong()): CheckContext =>
+  createCheckContext({ timeline: buildShow(layout, cues), layout, song });
 
 describe("rule 31: never seen", () => {
   const lines = (cues: readonly WrittenCue[]) => findNeverSeen(context(cues)).map((finding) => finding.lines[0]);
 
   it("finds a level cue that is replaced at the same tick on all its lights", () => {
     const [finding, ...more] = findNeverSeen(context([on(1, [1, 2], 100, 2), off(1, [1, 2, 3], 3)]));
-    expect(finding).toMatchObject({ rule: "never-seen", severity: "warn", lines: [2], moments: [960], lights: ["front-a/windows", "front-a/door"] });
+    expect(finding).toMatchObject({
+      rule: "never-seen",
+      severity: "warn",
+      lines: [2],
+      moments: [960],
+      lights: ["front-a/windows", "front-a/door"],
+    });
     expect(finding?.sentence).toBe("Nobody sees this. Line 3 changes the same lights at the same time.");
     expect(more).toEqual([]);
   });
@@ -48,7 +55,9 @@ describe("rule 31: never seen", () => {
     expect(lines([pulse(1, 1, 1, undefined, 2), pulse(1, 1, 2, undefined, 3)])).toEqual([]);
   });
   it("finds a pulse of no beats", () => {
-    expect(findNeverSeen(context([pulse(1, 1, 0, undefined, 2)])).map(({ sentence }) => sentence)).toEqual(["Nobody sees this pulse. It lasts for 0 beats."]);
+    expect(findNeverSeen(context([pulse(1, 1, 0, undefined, 2)])).map(({ sentence }) => sentence)).toEqual([
+      "Nobody sees this pulse. It lasts for 0 beats.",
+    ]);
   });
   it("gives one finding for a loop", () => {
     const turns = Array.from({ length: 20 }, (_, turn) => [on(turn, 1, 100, 4), off(turn, 1, 4)]).flat();
@@ -60,11 +69,16 @@ describe("rule 31: never seen", () => {
 });
 
 describe("rule 32: fade cut", () => {
-  const cut = (cues: readonly WrittenCue[]) => findFadeCut(context(cues)).map(({ lines, sentence }) => [lines[0], sentence]);
+  const cut = (cues: readonly WrittenCue[]) =>
+    findFadeCut(context(cues)).map(({ lines, sentence }) => [lines[0], sentence]);
 
   it("finds a fade that is replaced before its end", () => {
-    expect(cut([fadeTo(0, 1, 80, 4, 2), on(2, 1, 10, 4)])).toEqual([[2, "This fade stops half way. Line 4 cuts it off."]]);
-    expect(cut([colour(0, 2, 0xff, 4, 2), colour(2, 2, 0xff_00, 0, 5)])).toEqual([[2, "This fade stops half way. Line 5 cuts it off."]]);
+    expect(cut([fadeTo(0, 1, 80, 4, 2), on(2, 1, 10, 4)])).toEqual([
+      [2, "This fade stops half way. Line 4 cuts it off."],
+    ]);
+    expect(cut([colour(0, 2, 0xff, 4, 2), colour(2, 2, 0xff_00, 0, 5)])).toEqual([
+      [2, "This fade stops half way. Line 5 cuts it off."],
+    ]);
   });
   it("leaves a fade alone that ends as the next begins, within the rounding of ticks", () => {
     expect(cut([fadeTo(0, 1, 80, 2), fadeTo(2, 1, 20, 2)])).toEqual([]);
@@ -109,7 +123,8 @@ describe("rule 33: colour never lit", () => {
 });
 
 describe("never switches", () => {
-  const stays = (cues: readonly WrittenCue[]) => findNeverSwitches(context(cues)).map(({ lines, lights }) => [lines[0], ...lights]);
+  const stays = (cues: readonly WrittenCue[]) =>
+    findNeverSwitches(context(cues)).map(({ lines, lights }) => [lines[0], ...lights]);
 
   it("finds levels and fades that stay below 50 on a box that is on or off", () => {
     expect(stays([on(0, [0, 1], 49.99, 2)])).toEqual([[2, "front-a/roof"]]);
@@ -125,10 +140,25 @@ describe("never switches", () => {
 
 describe("off the grid", () => {
   it("counts steps that are neither on eighths, sixths nor a sound of the song", () => {
-    const song = buildSong({ instruments: [{ name: "bells", hits: [2.03], notes: [{ start: 3.07, beats: 1, pitch: 60 }] }] });
-    const cues = [on(0, 1, 1, 1), on(0.125, 1, 2, 2), on(1 / 3, 1, 3, 3), on(2.03, 1, 4, 4), on(3.07, 1, 5, 5), on(4.1, 1, 6, 6), on(5.6, 1, 7, 7)];
+    const song = buildSong({
+      instruments: [{ name: "bells", hits: [2.03], notes: [{ start: 3.07, beats: 1, pitch: 60 }] }],
+    });
+    const cues = [
+      on(0, 1, 1, 1),
+      on(0.125, 1, 2, 2),
+      on(1 / 3, 1, 3, 3),
+      on(2.03, 1, 4, 4),
+      on(3.07, 1, 5, 5),
+      on(4.1, 1, 6, 6),
+      on(5.6, 1, 7, 7),
+    ];
     const [finding] = findOffGrid(context(cues, song));
-    expect(finding).toMatchObject({ severity: "note", sentence: "2 of 7 steps are off the beat.", lines: [6, 7], moments: [3936, 5376] });
+    expect(finding).toMatchObject({
+      severity: "note",
+      sentence: "2 of 7 steps are off the beat.",
+      lines: [6, 7],
+      moments: [3936, 5376],
+    });
     expect(findOffGrid(context(cues.slice(0, 5), song))).toEqual([]);
   });
 });

@@ -20,32 +20,63 @@ const song = buildSong({
     { name: "bells", hits: [5], notes: [] },
   ],
 });
-const gather = (cues: readonly WrittenCue[], source = "") => gatherEvidence({ timeline: buildShow(layout, cues), layout, song, source });
-const facts = (topic: EvidenceTopic, cues: readonly WrittenCue[], source?: string) => gather(cues, source).filter((fact) => fact.topic === topic).map(({ kind, text }) => `${kind}: ${text}`);
+const gather = (cues: readonly WrittenCue[], source = "") =>
+  gatherEvidence({ timeline: buildShow(layout, cues), layout, song, source });
+const facts = (topic: EvidenceTopic, cues: readonly WrittenCue[], source?: string) =>
+  gather(cues, source)
+    .filter((fact) => fact.topic === topic)
+    .map(({ kind, text }) => `${kind}: ${text}`);
 
 describe("gatherEvidence", () => {
   it("counts fronts and sides that light up", () => {
-    expect(facts("coverage", [on(0, [0, 1, 2])])).toEqual(["tick: 3 of 3 fronts light up.", "tick: All 2 sides light up."]);
-    expect(facts("coverage", [on(0, 1)])).toEqual(["triangle: 1 of 3 fronts light up. Dark: front a and front c.", "triangle: 1 side stays dark: south."]);
+    expect(facts("coverage", [on(0, [0, 1, 2])])).toEqual([
+      "tick: 3 of 3 fronts light up.",
+      "tick: All 2 sides light up.",
+    ]);
+    expect(facts("coverage", [on(0, 1)])).toEqual([
+      "triangle: 1 of 3 fronts light up. Dark: front a and front c.",
+      "triangle: 1 side stays dark: south.",
+    ]);
   });
   it("counts pulses within 20 ms of a hit of the instrument that fits best", () => {
     // 20 ms are 0.04 beats at 120 a minute.
-    const cues = [pulse(0, [1, 2], 1, undefined, 3), pulse(1.039, 1, 1, undefined, 4), pulse(2.05, 1, 1, undefined, 5), pulse(16, 1, 1, undefined, 6)];
+    const cues = [
+      pulse(0, [1, 2], 1, undefined, 3),
+      pulse(1.039, 1, 1, undefined, 4),
+      pulse(2.05, 1, 1, undefined, 5),
+      pulse(16, 1, 1, undefined, 6),
+    ];
     const [hits] = gather(cues).filter(({ text }) => text.includes("hit"));
-    expect(hits).toMatchObject({ kind: "tick", text: "3 of 4 pulse moments are on a hit of the drums.", lines: [5], moments: [1968] });
+    expect(hits).toMatchObject({
+      kind: "tick",
+      text: "3 of 4 pulse moments are on a hit of the drums.",
+      lines: [5],
+      moments: [1968],
+    });
   });
   it("counts bars in which nothing changes; a running fade is a change", () => {
     expect(facts("music", [fadeTo(0, 1, 100, 32)])[1]).toBe("tick: Something changes in every bar.");
-    expect(facts("music", [on(0, 1), off(16, 1)])[1]).toBe("triangle: Nothing changes in 6 of 8 bars: 2, 3, 4, 6, 7 and 8.");
+    expect(facts("music", [on(0, 1), off(16, 1)])[1]).toBe(
+      "triangle: Nothing changes in 6 of 8 bars: 2, 3, 4, 6, 7 and 8.",
+    );
   });
   it("compares the light of chorus and verse", () => {
-    expect(facts("dynamics", [on(0, 1, 30), on(16, [1, 2], 90)])).toEqual(["tick: The chorus has 60 % of the light that the square can give, the verse 10 %."]);
+    expect(facts("dynamics", [on(0, 1, 30), on(16, [1, 2], 90)])).toEqual([
+      "tick: The chorus has 60 % of the light that the square can give, the verse 10 %.",
+    ]);
     expect(facts("dynamics", [on(0, 1, 90)])[0]).toContain("info:");
   });
   it("counts calls with different values, loops and conditions", () => {
-    const source = "function sweep(lights, step) {\n  for (const f of lights) { for (const p of f) p.pulse(1); wait(step); }\n}\nsweep(square.all, 1);\nsweep(square.all, 2);\nif (now() > 4) sweep(square.all, 1);";
-    expect(facts("code", [], source)).toEqual(["tick: `sweep` is called on 3 lines with 2 different sets of values.", "tick: 2 loops, 1 of them inside another, 1 condition."]);
-    expect(facts("code", [], "square.all.on();")).toEqual(["info: The script has no function of its own.", "info: 0 loops, 0 of them inside another, 0 conditions."]);
+    const source =
+      "function sweep(lights, step) {\n  for (const f of lights) { for (const p of f) p.pulse(1); wait(step); }\n}\nsweep(square.all, 1);\nsweep(square.all, 2);\nif (now() > 4) sweep(square.all, 1);";
+    expect(facts("code", [], source)).toEqual([
+      "tick: `sweep` is called on 3 lines with 2 different sets of values.",
+      "tick: 2 loops, 1 of them inside another, 1 condition.",
+    ]);
+    expect(facts("code", [], "square.all.on();")).toEqual([
+      "info: The script has no function of its own.",
+      "info: 0 loops, 0 of them inside another, 0 conditions.",
+    ]);
   });
   it("tells peak load, flashes and relay clicks", () => {
     // 760 W of the 1440 W that 15 A at 120 V may carry for hours.
@@ -56,7 +87,8 @@ describe("gatherEvidence", () => {
     ]);
   });
   it("fits what travels to the person who marks", () => {
-    for (const fact of gather([on(0, 1), pulse(2.3, 2, 1)], "repeat(4, () => {});")) expect(EvidenceSchema.safeParse(fact).success).toBe(true);
+    for (const fact of gather([on(0, 1), pulse(2.3, 2, 1)], "repeat(4, () => {});"))
+      expect(EvidenceSchema.safeParse(fact).success).toBe(true);
   });
 });
 

@@ -29,7 +29,12 @@ export function findFit(context: CheckContext): Finding[] {
   const first = lit.indexOf(1);
   const last = lit.lastIndexOf(1);
   if (first < 0) {
-    findings.push(buildFinding(context, "nothing-lit", { sentence: "No light comes on in this show.", hint: "Start with `square.all.on();`." }));
+    findings.push(
+      buildFinding(context, "nothing-lit", {
+        sentence: "No light comes on in this show.",
+        hint: "Start with `square.all.on();`.",
+      }),
+    );
     return findings;
   }
   return [...findings, ...findDarkness(context, lit, first, last), ...findDarkFronts(context)];
@@ -46,7 +51,11 @@ function findDarkness(context: CheckContext, lit: Uint8Array, first: number, las
       buildFinding(context, "ends-early", {
         sentence: `The square is dark after ${nameBar(context.song, last * BIN_TICKS)}, but the song plays on.`,
         hint: "Use `song.end` or `song.bars` to fill the song.",
-        measured: { value: Math.round(share * 100), limit: Math.round(rules.leastLengthShare * 100), unit: "% of the song" },
+        measured: {
+          value: Math.round(share * 100),
+          limit: Math.round(rules.leastLengthShare * 100),
+          unit: "% of the song",
+        },
         moments: [(last + 1) * BIN_TICKS],
       }),
     );
@@ -55,7 +64,8 @@ function findDarkness(context: CheckContext, lit: Uint8Array, first: number, las
   const [longestDark] = dark.toSorted((a, b) => lengthOf(b) - lengthOf(a));
   if (longestDark !== undefined) {
     const longest = lengthOf(longestDark);
-    const where = longestDark[0] === 0 ? "at the start" : `after ${nameBar(context.song, (longestDark[0] - 1) * BIN_TICKS)}`;
+    const where =
+      longestDark[0] === 0 ? "at the start" : `after ${nameBar(context.song, (longestDark[0] - 1) * BIN_TICKS)}`;
     findings.push(
       buildFinding(context, "long-dark", {
         sentence: `The square is dark for ${Math.round(longest)} seconds ${where}.`,

@@ -10,7 +10,10 @@ import { chromaticityDistance, countFlashes, countRedFlashes, isSaturatedRed } f
  */
 const FPS = 30;
 const grey = (code: number) => relativeLuminance(...colourToLinear(code * 0x01_01_01));
-const series = (...codes: (number | readonly [number, number])[]) => codes.flatMap((code) => (typeof code === "number" ? [grey(code)] : Array.from({ length: code[1] }, () => grey(code[0]))));
+const series = (...codes: (number | readonly [number, number])[]) =>
+  codes.flatMap((code) =>
+    typeof code === "number" ? [grey(code)] : Array.from({ length: code[1] }, () => grey(code[0])),
+  );
 const isPass = (luminances: readonly number[]) => countFlashes(luminances, FPS).isPass;
 
 describe("countFlashes", () => {
@@ -60,29 +63,49 @@ describe("countFlashes", () => {
     expect(grey(89)).toBeCloseTo(wcagLuminance("#595959"), 6);
   });
   it("counts eighths of 180 beats a minute as the limit, of 181 as too many (6 intervals are 0.9945 s)", () => {
-    const toggles = (tempo: number) => Array.from({ length: 3000 }, (_, millis) => Math.floor((millis * tempo * 2) / 60_000) % 2);
+    const toggles = (tempo: number) =>
+      Array.from({ length: 3000 }, (_, millis) => Math.floor((millis * tempo * 2) / 60_000) % 2);
     expect(countFlashes(toggles(180), 1000).worst).toBe(6);
     expect(countFlashes(toggles(181), 1000).worst).toBe(7);
   });
   it("never finds fewer transitions when the swing grows", () => {
     fc.assert(
-      fc.property(fc.array(fc.double({ min: 0, max: 0.7, noNaN: true }), { minLength: 2, maxLength: 60 }), (luminances) => {
-        const calmer = luminances.map((value) => value * 0.5);
-        expect(countFlashes(calmer, FPS).transitions.length).toBeLessThanOrEqual(countFlashes(luminances, FPS).transitions.length);
-      }),
+      fc.property(
+        fc.array(fc.double({ min: 0, max: 0.7, noNaN: true }), { minLength: 2, maxLength: 60 }),
+        (luminances) => {
+          const calmer = luminances.map((value) => value * 0.5);
+          expect(countFlashes(calmer, FPS).transitions.length).toBeLessThanOrEqual(
+            countFlashes(luminances, FPS).transitions.length,
+          );
+        },
+      ),
     );
   });
 });
 
 describe("countRedFlashes", () => {
   const rgb = (red: number, green: number, blue: number) => colourToLinear((red << 16) | (green << 8) | blue);
-  const alternate = (a: readonly [number, number, number], b: readonly [number, number, number]) => [a, b, a, b, a, b, a, ...Array.from({ length: 25 }, () => b)];
+  const alternate = (a: readonly [number, number, number], b: readonly [number, number, number]) => [
+    a,
+    b,
+    a,
+    b,
+    a,
+    b,
+    a,
+    ...Array.from({ length: 25 }, () => b),
+  ];
   const red = rgb(101, 34, 34);
 
   it("red f001: saturated red against a colour 0.2058 away, with hardly any change in luminance", () => {
     const other = rgb(9, 63, 63);
     expect(chromaticityDistance(red, other)).toBeCloseTo(0.2058, 4);
-    expect(countFlashes(alternate(red, other).map((colour) => relativeLuminance(...colour)), FPS).worst).toBe(0);
+    expect(
+      countFlashes(
+        alternate(red, other).map((colour) => relativeLuminance(...colour)),
+        FPS,
+      ).worst,
+    ).toBe(0);
     expect(countRedFlashes(alternate(red, other), FPS, "current")).toMatchObject({ worst: 7, isPass: false });
   });
   it("red s001: a red of 0.7993 is not saturated", () => {
@@ -100,11 +123,20 @@ describe("countRedFlashes", () => {
     expect(countRedFlashes(alternate(pure, rgb(0, 0, 0)), FPS, "current").worst).toBe(0);
     expect(countRedFlashes(alternate(pure, rgb(0, 0, 0)), FPS, "former").worst).toBe(7);
     // Flagged once linear red is above 20 / 320 = 0.0625.
-    expect([0.0624, 0.0626].map((value) => countRedFlashes(alternate([value, 0, 0], [0, 0, 0]), FPS, "former").worst)).toEqual([0, 7]);
+    expect(
+      [0.0624, 0.0626].map((value) => countRedFlashes(alternate([value, 0, 0], [0, 0, 0]), FPS, "former").worst),
+    ).toEqual([0, 7]);
   });
   it("has the published distances from pure red", () => {
     const pure = rgb(255, 0, 0);
-    const known = [[rgb(255, 255, 255), 0.2587], [rgb(0, 255, 0), 0.3281], [rgb(0, 0, 255), 0.4572], [rgb(255, 0, 255), 0.2419], [rgb(255, 128, 0), 0.1322], [rgb(180, 0, 0), 0]] as const;
+    const known = [
+      [rgb(255, 255, 255), 0.2587],
+      [rgb(0, 255, 0), 0.3281],
+      [rgb(0, 0, 255), 0.4572],
+      [rgb(255, 0, 255), 0.2419],
+      [rgb(255, 128, 0), 0.1322],
+      [rgb(180, 0, 0), 0],
+    ] as const;
     for (const [colour, distance] of known) expect(chromaticityDistance(pure, colour)).toBeCloseTo(distance, 4);
   });
 });

@@ -23,6 +23,16 @@ export function energyKilowattHours(watts: number, hours: number): number {
 }
 
 /** Share of its electrical life (switchings at rated load) that a relay uses up in a season, 1 is all of it. */
-export function relayWearShare({ cyclesPerShow, showsPerNight, nights, lifeCycles = 100_000 }: { readonly cyclesPerShow: number; readonly showsPerNight: number; readonly nights: number; readonly lifeCycles?: number }): number {
+export function relayWearShare({
+  cyclesPerShow,
+  showsPerNight,
+  nights,
+  lifeCycles = 100_000,
+}: {
+  readonly cyclesPerShow: number;
+  readonly showsPerNight: number;
+  readonly nights: number;
+  readonly lifeCycles?: number;
+}): number {
   return (cyclesPerShow * showsPerNight * nights) / lifeCycles;
 }

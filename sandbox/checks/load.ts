@@ -92,7 +92,10 @@ export function findLoads(context: CheckContext): Finding[] {
   });
 }
 
-function lightsAt(context: CheckContext, { peakTick, lights }: CircuitLoad): { readonly lights: number[]; readonly lines: number[] } {
+function lightsAt(
+  context: CheckContext,
+  { peakTick, lights }: CircuitLoad,
+): { readonly lights: number[]; readonly lines: number[] } {
   const frame = createLightsCursor(context.timeline, context.lights, context.tracks).seek(peakTick + BIN_TICKS / 2);
   const lit = lights.filter((light) => (frame.cue[light] ?? -1) >= 0);
   return { lights: lit, lines: lit.map((light) => lineOfCue(context, frame.cue[light] ?? 0)) };

@@ -48,10 +48,15 @@ export function findNeverSeen(context: CheckContext): Finding[] {
 }
 
 /** Of the level entries of one tick the last is seen, and the level from which it fades. */
-function lookAtLevels({ tracks, timeline }: CheckContext, light: number, isSeen: Uint8Array, replacedBy: Int32Array): void {
+function lookAtLevels(
+  { tracks, timeline }: CheckContext,
+  light: number,
+  isSeen: Uint8Array,
+  replacedBy: Int32Array,
+): void {
   const { level } = tracks;
   const until = level.first[light + 1] ?? 0;
-  for (let start = level.first[light] ?? 0; start < until; ) {
+  for (let start = level.first[light] ?? 0; start < until;) {
     const tick = level.tick[start] ?? 0;
     let end = start + 1;
     while (end < until && level.tick[end] === tick) end++;
@@ -80,7 +85,12 @@ function endsRunningPulse({ pulse }: CheckContext["tracks"], light: number, tick
   return false;
 }
 
-function lookAtPulses({ tracks, timeline }: CheckContext, light: number, isSeen: Uint8Array, replacedBy: Int32Array): void {
+function lookAtPulses(
+  { tracks, timeline }: CheckContext,
+  light: number,
+  isSeen: Uint8Array,
+  replacedBy: Int32Array,
+): void {
   const { pulse, level } = tracks;
   for (let entry = pulse.first[light] ?? 0; entry < (pulse.first[light + 1] ?? 0); entry++) {
     const cue = pulse.cue[entry] ?? 0;

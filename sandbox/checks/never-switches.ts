@@ -36,7 +36,11 @@ export function findNeverSwitches(context: CheckContext): Finding[] {
   );
 }
 
-function highestLevel({ tracks: { level } }: CheckContext, ticks: ReadonlySet<number>, lights: ReadonlySet<number>): number {
+function highestLevel(
+  { tracks: { level } }: CheckContext,
+  ticks: ReadonlySet<number>,
+  lights: ReadonlySet<number>,
+): number {
   let highest = 0;
   for (const light of lights)
     for (let entry = level.first[light] ?? 0; entry < (level.first[light + 1] ?? 0); entry++) {

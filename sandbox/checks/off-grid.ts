@@ -38,6 +38,7 @@ function listSounds({ song }: CheckContext): ReadonlySet<number> {
   const ticks = new Set<number>();
   for (const { hits, notes } of song.instruments)
     for (const moment of [...hits, ...notes.map((note) => note.start)])
-      for (let near = -ROUNDING_TICKS; near <= ROUNDING_TICKS; near++) ticks.add(Math.round(moment * TICKS_PER_BEAT) + near);
+      for (let near = -ROUNDING_TICKS; near <= ROUNDING_TICKS; near++)
+        ticks.add(Math.round(moment * TICKS_PER_BEAT) + near);
   return ticks;
 }

@@ -51,19 +51,27 @@ export function sumBlocks(areas: PictureAreas, lights: Iterable<number>): Float6
   const cells = new Float64Array(COLUMNS * ROWS);
   for (const light of lights)
     // Lights that overlap do not light a pixel twice.
-    for (const [cell, pixels] of areas.get(light) ?? []) cells[cell] = Math.min(CELL * CELL, (cells[cell] ?? 0) + pixels);
+    for (const [cell, pixels] of areas.get(light) ?? [])
+      cells[cell] = Math.min(CELL * CELL, (cells[cell] ?? 0) + pixels);
   const wide = COLUMNS + 1;
   const sums = new Float64Array(wide * (ROWS + 1));
   for (let row = 0; row < ROWS; row++)
     for (let column = 0; column < COLUMNS; column++)
       sums[(row + 1) * wide + column + 1] =
-        (cells[row * COLUMNS + column] ?? 0) + (sums[row * wide + column + 1] ?? 0) + (sums[(row + 1) * wide + column] ?? 0) - (sums[row * wide + column] ?? 0);
+        (cells[row * COLUMNS + column] ?? 0) +
+        (sums[row * wide + column + 1] ?? 0) +
+        (sums[(row + 1) * wide + column] ?? 0) -
+        (sums[row * wide + column] ?? 0);
   const blocks = new Float64Array(BLOCK_COUNT);
   let block = 0;
   for (let row = 0; row + BLOCK_ROWS <= ROWS; row++)
     for (let column = 0; column + BLOCK_COLUMNS <= COLUMNS; column++) {
       const at = (y: number, x: number) => sums[y * wide + x] ?? 0;
-      blocks[block++] = at(row + BLOCK_ROWS, column + BLOCK_COLUMNS) - at(row, column + BLOCK_COLUMNS) - at(row + BLOCK_ROWS, column) + at(row, column);
+      blocks[block++] =
+        at(row + BLOCK_ROWS, column + BLOCK_COLUMNS) -
+        at(row, column + BLOCK_COLUMNS) -
+        at(row + BLOCK_ROWS, column) +
+        at(row, column);
     }
   return blocks;
 }

@@ -7,7 +7,14 @@ import { nameBar } from "../timeline/words.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, linesAt } from "./finding.ts";
 import { FORMER_STEP, formerRed, isRedChange, isSaturatedRed, type LinearColour } from "./flash-series.ts";
-import { BLOCK_COUNT, FLASH_AREA_PIXELS, listPictureAreas, sumAll, sumBlocks, type PictureAreas } from "./picture-area.ts";
+import {
+  BLOCK_COUNT,
+  FLASH_AREA_PIXELS,
+  listPictureAreas,
+  sumAll,
+  sumBlocks,
+  type PictureAreas,
+} from "./picture-area.ts";
 import { isWithinSecond, sortRises, type Rise } from "./rises.ts";
 import { countStreetFlashes } from "./street-flash.ts";
 import { findTransitions } from "./transitions.ts";
@@ -80,13 +87,22 @@ function currentRedRises({ tick, rgb }: LightCurve): readonly number[] {
   return times;
 }
 
-function risingTimes(tick: Float64Array, values: ArrayLike<number>, step: number, darkerBelow: number): readonly number[] {
+function risingTimes(
+  tick: Float64Array,
+  values: ArrayLike<number>,
+  step: number,
+  darkerBelow: number,
+): readonly number[] {
   return findTransitions(tick, values, { step, darkerBelow }, 0)
     .filter((transition) => transition.isRising)
     .map((transition) => transition.time);
 }
 
-const colourAt = (rgb: Float32Array, point: number): LinearColour => [rgb[point * 3] ?? 0, rgb[point * 3 + 1] ?? 0, rgb[point * 3 + 2] ?? 0];
+const colourAt = (rgb: Float32Array, point: number): LinearColour => [
+  rgb[point * 3] ?? 0,
+  rgb[point * 3 + 1] ?? 0,
+  rgb[point * 3 + 2] ?? 0,
+];
 
 function listRises(context: CheckContext, measure: RiseTimes): readonly Rise[] {
   const known = new Map<LightCurve, readonly number[]>();
@@ -102,16 +118,27 @@ function listRises(context: CheckContext, measure: RiseTimes): readonly Rise[] {
   );
 }
 
-function countBlocks({ rules }: CheckContext, side: Side, kind: PictureCount["kind"], areas: PictureAreas, rises: readonly Rise[]): PictureCount {
+function countBlocks(
+  { rules }: CheckContext,
+  side: Side,
+  kind: PictureCount["kind"],
+  areas: PictureAreas,
+  rises: readonly Rise[],
+): PictureCount {
   const inView = rises.filter(({ light }) => areas.has(light));
   const times: number[][] = Array.from({ length: BLOCK_COUNT }, () => []);
   let most: PictureCount = { side, kind, worst: 0, tick: 0, lights: [] };
-  for (let start = 0; start < inView.length; ) {
+  for (let start = 0; start < inView.length;) {
     const first = inView[start];
     if (first === undefined) break;
     let end = start;
     const lights = new Set<number>();
-    for (let rise = inView[end]; rise !== undefined && rise.seconds - first.seconds <= rules.flashTogetherSeconds; rise = inView[++end]) lights.add(rise.light);
+    for (
+      let rise = inView[end];
+      rise !== undefined && rise.seconds - first.seconds <= rules.flashTogetherSeconds;
+      rise = inView[++end]
+    )
+      lights.add(rise.light);
     let isEvent = false;
     if (sumAll(areas, lights) >= FLASH_AREA_PIXELS)
       sumBlocks(areas, lights).forEach((pixels, block) => {
@@ -120,7 +147,8 @@ function countBlocks({ rules }: CheckContext, side: Side, kind: PictureCount["ki
         const earlier = (times[block] ?? []).filter((time) => isWithinSecond(time, first.seconds));
         earlier.push(first.seconds);
         times[block] = earlier;
-        if (earlier.length > most.worst) most = { side, kind, worst: earlier.length, tick: first.tick, lights: [...lights] };
+        if (earlier.length > most.worst)
+          most = { side, kind, worst: earlier.length, tick: first.tick, lights: [...lights] };
       });
     start = isEvent ? end : start + 1;
   }
@@ -130,7 +158,11 @@ function countBlocks({ rules }: CheckContext, side: Side, kind: PictureCount["ki
 /** Finds sides whose picture flashes too often, where the street rule did not stop them already. */
 export function findPictureFlashes(context: CheckContext): Finding[] {
   const limit = context.rules.flashesPerSecond;
-  const stopped = new Set(countStreetFlashes(context).filter(({ worst }) => worst > limit).map(({ side }) => side));
+  const stopped = new Set(
+    countStreetFlashes(context)
+      .filter(({ worst }) => worst > limit)
+      .map(({ side }) => side),
+  );
   return countPictureFlashes(context)
     .filter(({ side, worst }) => worst > limit && !stopped.has(side))
     .map(({ side, kind, worst, tick, lights }) =>

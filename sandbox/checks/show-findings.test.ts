@@ -1,5 +1,15 @@
 import { describe, expect, it } from "vitest";
-import { buildFront, buildLayout, buildShow, buildSong, fadeTo, off, on, pulse, type OutletSketch } from "../../tests/factories/small-show.ts";
+import {
+  buildFront,
+  buildLayout,
+  buildShow,
+  buildSong,
+  fadeTo,
+  off,
+  on,
+  pulse,
+  type OutletSketch,
+} from "../../tests/factories/small-show.ts";
 import type { Finding } from "../engine/model.ts";
 import type { WrittenCue } from "../timeline/build.ts";
 import { createCheckContext } from "./context.ts";
@@ -19,7 +29,12 @@ describe("electrical sums (NEC 210.20(A), as restated in trade publications)", (
   });
   it("meets a published table of lamps a circuit (15 A, 20 A)", () => {
     // A lamp seller's table of 0.6, 1, 2.5 and 3.7 W lamps; it rounds to the nearest lamp.
-    for (const [watts, on15, on20] of [[0.6, 2400, 3200], [1, 1440, 1920], [2.5, 576, 768], [3.7, 389, 519]] as const)
+    for (const [watts, on15, on20] of [
+      [0.6, 2400, 3200],
+      [1, 1440, 1920],
+      [2.5, 576, 768],
+      [3.7, 389, 519],
+    ] as const)
       expect([15, 20].map((amps) => Math.round(continuousLimitWatts(120, amps) / watts))).toEqual([on15, on20]);
   });
   it("adds 125 % of the continuous load to the rest: 6 A and 5 A fit 15 A, 11 A and 2 A do not", () => {
@@ -36,13 +51,21 @@ describe("electrical sums (NEC 210.20(A), as restated in trade publications)", (
 });
 
 describe("load", () => {
-  const dimmers = (...watts: number[]) => buildFront(...watts.map((value): OutletSketch => ({ kind: "dimmer", watts: value })));
-  const check = (layout: ReturnType<typeof dimmers>, cues: readonly WrittenCue[]) => createCheckContext({ timeline: buildShow(layout, cues), layout, song: buildSong() });
+  const dimmers = (...watts: number[]) =>
+    buildFront(...watts.map((value): OutletSketch => ({ kind: "dimmer", watts: value })));
+  const check = (layout: ReturnType<typeof dimmers>, cues: readonly WrittenCue[]) =>
+    createCheckContext({ timeline: buildShow(layout, cues), layout, song: buildSong() });
 
   it("stops four boxes of 400 W at once on 15 A: 1600 W is below the breaker and above 80 % of it", () => {
     const layout = dimmers(400, 400, 400, 400);
     const [finding] = findLoads(check(layout, [on(4, [0, 1, 2, 3], 100, 6), off(8, [0, 1, 2, 3])]));
-    expect(finding).toMatchObject({ rule: "circuit-overload", severity: "stop", measured: { value: 13.3, limit: 12, unit: "A" }, moments: [4 * 960], lines: [6] });
+    expect(finding).toMatchObject({
+      rule: "circuit-overload",
+      severity: "stop",
+      measured: { value: 13.3, limit: 12, unit: "A" },
+      moments: [4 * 960],
+      lines: [6],
+    });
     expect(finding?.sentence).toBe('The circuit "a" takes 13.3 A in bar 2. It may take 12 A.');
     expect(finding?.hint).toContain("a licensed electrician decide");
   });
@@ -68,27 +91,43 @@ describe("load", () => {
   it("keeps circuits apart", () => {
     const layout = buildFront({ kind: "dimmer", watts: 1400 }, { kind: "dimmer", watts: 1900, circuit: "b" });
     const loads = listCircuitLoads(check(layout, [on(0, [0, 1])]));
-    expect(loads.map(({ circuit, limitAmps, peakAmps }) => [circuit.id, limitAmps, Math.round(peakAmps * 100) / 100])).toEqual([
+    expect(
+      loads.map(({ circuit, limitAmps, peakAmps }) => [circuit.id, limitAmps, Math.round(peakAmps * 100) / 100]),
+    ).toEqual([
       ["a", 12, 11.67],
       ["b", 16, 15.83],
     ]);
   });
   it("takes the mains of the layout: 2990 W of a 13 A plug at 230 V are 13 A", () => {
-    const layout = { ...buildFront({ kind: "dimmer", watts: 2990 }), circuits: [{ id: "a", volts: 230, breakerAmps: 13 }] };
+    const layout = {
+      ...buildFront({ kind: "dimmer", watts: 2990 }),
+      circuits: [{ id: "a", volts: 230, breakerAmps: 13 }],
+    };
     expect(listCircuitLoads(check(layout, [on(0, 0)]))[0]?.peakAmps).toBeCloseTo(13, 9);
   });
 });
 
 describe("switching", () => {
   const layout = buildFront("relay", "solid-state", "dimmer");
-  const check = (cues: readonly WrittenCue[], { tempo = 120, hertz = 60 }: { readonly tempo?: number; readonly hertz?: 50 | 60 } = {}) => {
+  const check = (
+    cues: readonly WrittenCue[],
+    { tempo = 120, hertz = 60 }: { readonly tempo?: number; readonly hertz?: 50 | 60 } = {},
+  ) => {
     const square = { ...layout, mains: { volts: 120, hertz } };
     return createCheckContext({ timeline: buildShow(square, cues), layout: square, song: buildSong({}, { tempo }) });
   };
 
   it("warns of a relay that is on or off for less than 500 ms (common practice)", () => {
-    const [finding, ...more] = findRelayDwell(check([pulse(0, [0, 1], 0.5, undefined, 3), pulse(4, 0, 1, undefined, 4)]));
-    expect(finding).toMatchObject({ rule: "relay-dwell", severity: "warn", measured: { value: 250, limit: 500, unit: "ms" }, lights: ["front-a/roof"], lines: [3] });
+    const [finding, ...more] = findRelayDwell(
+      check([pulse(0, [0, 1], 0.5, undefined, 3), pulse(4, 0, 1, undefined, 4)]),
+    );
+    expect(finding).toMatchObject({
+      rule: "relay-dwell",
+      severity: "warn",
+      measured: { value: 250, limit: 500, unit: "ms" },
+      lights: ["front-a/roof"],
+      lines: [3],
+    });
     expect(more).toEqual([]);
     expect(findRelayDwell(check([on(0, 0), off(4, 0), on(4.5, 0), off(8, 0)]))[0]?.measured?.value).toBe(250);
   });
@@ -105,14 +144,28 @@ describe("switching", () => {
     // 0.018 beats at 120 a minute are 8.85 ms with ticks rounded (17 ticks).
     const cues = [pulse(0, 1, 0.018, undefined, 2)];
     expect(findHalfCycle(check(cues))).toEqual([]);
-    expect(findHalfCycle(check(cues, { hertz: 50 }))[0]).toMatchObject({ rule: "half-cycle", severity: "note", measured: { value: 8.9, limit: 10, unit: "ms" }, lines: [2] });
+    expect(findHalfCycle(check(cues, { hertz: 50 }))[0]).toMatchObject({
+      rule: "half-cycle",
+      severity: "note",
+      measured: { value: 8.9, limit: 10, unit: "ms" },
+      lines: [2],
+    });
   });
   it("warns of a relay that comes on more often than once in two seconds for half a minute (1800 an hour, relay datasheets)", () => {
-    const every = (step: number) => Array.from({ length: Math.floor(32 / step) }, (_, turn) => [on(turn * step, 0, 100, 2), off((turn + 0.5) * step, 0)]).flat();
+    const every = (step: number) =>
+      Array.from({ length: Math.floor(32 / step) }, (_, turn) => [
+        on(turn * step, 0, 100, 2),
+        off((turn + 0.5) * step, 0),
+      ]).flat();
     // At 60 beats a minute 32 beats are 32 seconds.
     expect(findRelayRate(check(every(2), { tempo: 60 }))).toEqual([]);
     const [finding] = findRelayRate(check(every(1), { tempo: 60 }));
-    expect(finding).toMatchObject({ rule: "relay-rate", measured: { value: 30, limit: 15 }, lights: ["front-a/roof"], lines: [2] });
+    expect(finding).toMatchObject({
+      rule: "relay-rate",
+      measured: { value: 30, limit: 15 },
+      lights: ["front-a/roof"],
+      lines: [2],
+    });
   });
   it("counts how often each relay comes on", () => {
     expect([...countRelayCycles(check([pulse(0, [0, 1], 1), pulse(1, 0, 1), pulse(4, 0, 1)]))]).toEqual([[0, 2]]);
@@ -124,7 +177,8 @@ describe("fit", () => {
     { side: "north", outlets: ["dimmer"] },
     { side: "south", outlets: ["dimmer"] },
   ]);
-  const fit = (cues: readonly WrittenCue[], overrides = {}, song = buildSong()) => findFit(createCheckContext({ timeline: buildShow(layout, cues, overrides), layout, song }));
+  const fit = (cues: readonly WrittenCue[], overrides = {}, song = buildSong()) =>
+    findFit(createCheckContext({ timeline: buildShow(layout, cues, overrides), layout, song }));
 
   it("is content with a show that fills its song", () => {
     expect(fit([on(0, [0, 1])])).toEqual([]);
@@ -133,34 +187,62 @@ describe("fit", () => {
     expect(rulesOf(fit([]))).toEqual(["nothing-lit"]);
     expect(rulesOf(fit([on(0, [0, 1])], { isComplete: false }))).toEqual(["incomplete"]);
     const [finding] = fit([on(0, [0, 1])], {}, buildSong({}, { bars: 9 }));
-    expect(finding).toMatchObject({ rule: "wrong-length", severity: "stop", sentence: "The show is made for 32 beats, but the song has 36." });
+    expect(finding).toMatchObject({
+      rule: "wrong-length",
+      severity: "stop",
+      sentence: "The show is made for 32 beats, but the song has 36.",
+    });
   });
   it("notes a song that plays on over a dark square", () => {
     const [finding] = fit([on(0, [0, 1]), off(16, [0, 1])]);
-    expect(finding).toMatchObject({ rule: "ends-early", severity: "note", measured: { value: 50, limit: 90 }, moments: [16 * 960] });
+    expect(finding).toMatchObject({
+      rule: "ends-early",
+      severity: "note",
+      measured: { value: 50, limit: 90 },
+      moments: [16 * 960],
+    });
     expect(finding?.sentence).toBe("The square is dark after bar 4, but the song plays on.");
     expect(fit([on(0, [0, 1]), off(29, [0, 1])])).toEqual([]);
   });
   it("notes a long dark stretch, at the start too", () => {
     // At 60 beats a minute: 16 seconds of darkness.
     const slow = buildSong({}, { tempo: 60 });
-    expect(fit([on(16, [0, 1])], {}, slow)[0]).toMatchObject({ rule: "long-dark", measured: { value: 16, limit: 15, unit: "s" }, moments: [0] });
+    expect(fit([on(16, [0, 1])], {}, slow)[0]).toMatchObject({
+      rule: "long-dark",
+      measured: { value: 16, limit: 15, unit: "s" },
+      moments: [0],
+    });
     expect(fit([on(16, [0, 1])], {}, slow)[0]?.sentence).toBe("The square is dark for 16 seconds at the start.");
-    expect(fit([on(0, [0, 1]), off(8, [0, 1]), on(24, [0, 1])], {}, slow)[0]?.sentence).toBe("The square is dark for 16 seconds after bar 2.");
+    expect(fit([on(0, [0, 1]), off(8, [0, 1]), on(24, [0, 1])], {}, slow)[0]?.sentence).toBe(
+      "The square is dark for 16 seconds after bar 2.",
+    );
     expect(fit([on(0, [0, 1]), off(8, [0, 1]), on(20, [0, 1])], {}, slow)).toEqual([]);
   });
   it("notes fronts that stay dark", () => {
     const [finding] = fit([on(0, 1)]);
-    expect(finding).toMatchObject({ rule: "dark-fronts", sentence: 'The front "front a" stays dark all the time.', lights: ["front-a/roof"] });
+    expect(finding).toMatchObject({
+      rule: "dark-fronts",
+      sentence: 'The front "front a" stays dark all the time.',
+      lights: ["front-a/roof"],
+    });
   });
 });
 
 describe("checkShow", () => {
   const layout = buildFront("relay", "dimmer", { kind: "colour" });
   it("puts stops first, then warnings, then notes", () => {
-    const cues = Array.from({ length: 64 }, (_, turn) => pulse(turn / 2, [0, 1, 2], 0.5, undefined, 4)).concat(fadeTo(0, 1, 50, 8, 5), on(2, 1, 0, 6), on(3, 1, 20, 7), off(3, 1, 8));
+    const cues = Array.from({ length: 64 }, (_, turn) => pulse(turn / 2, [0, 1, 2], 0.5, undefined, 4)).concat(
+      fadeTo(0, 1, 50, 8, 5),
+      on(2, 1, 0, 6),
+      on(3, 1, 20, 7),
+      off(3, 1, 8),
+    );
     const findings = checkShow({ timeline: buildShow(layout, cues), layout, song: buildSong() });
-    expect(findings.map(({ severity, rule }) => `${severity} ${rule}`)).toEqual(["stop street-flash", "warn never-seen", "note fade-cut"]);
+    expect(findings.map(({ severity, rule }) => `${severity} ${rule}`)).toEqual([
+      "stop street-flash",
+      "warn never-seen",
+      "note fade-cut",
+    ]);
     expect(hasStop(findings)).toBe(true);
   });
   it("takes stricter rules from the event", () => {
@@ -170,7 +252,9 @@ describe("checkShow", () => {
     expect(rulesOf(checkShow({ ...input, rules: { flashesPerSecond: 1 } }))[0]).toBe("street-flash");
   });
   it("refuses a timeline for another layout", () => {
-    expect(() => checkShow({ timeline: buildShow(layout, []), layout: buildFront("relay"), song: buildSong() })).toThrow(RangeError);
+    expect(() =>
+      checkShow({ timeline: buildShow(layout, []), layout: buildFront("relay"), song: buildSong() }),
+    ).toThrow(RangeError);
   });
   it("gives a reason for every severity", () => {
     for (const { reason } of Object.values(SEVERITIES)) expect(reason).toMatch(/^[A-Z].*\.$/);
@@ -178,9 +262,19 @@ describe("checkShow", () => {
 });
 
 describe("mergeFindings", () => {
-  const finding = (rule: string, severity: Finding["severity"], lines: number[]): Finding => ({ rule, severity, sentence: rule, moments: lines, lights: [], lines });
+  const finding = (rule: string, severity: Finding["severity"], lines: number[]): Finding => ({
+    rule,
+    severity,
+    sentence: rule,
+    moments: lines,
+    lights: [],
+    lines,
+  });
   it("sorts by severity and joins what is the same", () => {
-    const merged = mergeFindings([[finding("a", "note", [3]), finding("b", "warn", [1])], [finding("a", "note", [2]), finding("c", "stop", [])]]);
+    const merged = mergeFindings([
+      [finding("a", "note", [3]), finding("b", "warn", [1])],
+      [finding("a", "note", [2]), finding("c", "stop", [])],
+    ]);
     expect(merged.map(({ rule, lines }) => [rule, ...lines])).toEqual([["c"], ["b", 1], ["a", 2, 3]]);
   });
 });

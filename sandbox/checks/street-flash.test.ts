@@ -15,10 +15,14 @@ const SOUTH = NORTH.map((light) => light + 10);
 const ALL = Array.from({ length: 21 }, (_, light) => light);
 
 /** At 120 beats a minute unless said otherwise. */
-const context = (cues: readonly WrittenCue[], tempo = 120) => createCheckContext({ timeline: buildShow(layout, cues), layout, song: buildSong({}, { tempo }) });
-const findings = (cues: readonly WrittenCue[], tempo?: number) => findStreetFlashes(context(cues, tempo)).map(({ rule }) => rule);
-const worst = (cues: readonly WrittenCue[], tempo?: number) => countStreetFlashes(context(cues, tempo)).map((count) => count.worst);
-const every = (step: number, action: (beat: number, turn: number) => WrittenCue | WrittenCue[]) => Array.from({ length: Math.floor(32 / step) }, (_, turn) => action(turn * step, turn)).flat();
+const context = (cues: readonly WrittenCue[], tempo = 120) =>
+  createCheckContext({ timeline: buildShow(layout, cues), layout, song: buildSong({}, { tempo }) });
+const findings = (cues: readonly WrittenCue[], tempo?: number) =>
+  findStreetFlashes(context(cues, tempo)).map(({ rule }) => rule);
+const worst = (cues: readonly WrittenCue[], tempo?: number) =>
+  countStreetFlashes(context(cues, tempo)).map((count) => count.worst);
+const every = (step: number, action: (beat: number, turn: number) => WrittenCue | WrittenCue[]) =>
+  Array.from({ length: Math.floor(32 / step) }, (_, turn) => action(turn * step, turn)).flat();
 
 describe("shows that do not flash", () => {
   it("passes a sweep of single fronts, however fast", () => {
@@ -54,29 +58,46 @@ describe("shows that flash", () => {
       ["street-flash", "stop"],
     ]);
     expect(found[0]).toMatchObject({ measured: { value: 4, limit: 3, unit: "flashes a second" }, lines: [7] });
-    expect(found[0]?.sentence).toBe("The north side flashes 4 times in one second in bar 1. More than 3 can harm people.");
+    expect(found[0]?.sentence).toBe(
+      "The north side flashes 4 times in one second in bar 1. More than 3 can harm people.",
+    );
   });
   it("stops two halves of a side that each pulse on the beat, half a beat apart", () => {
     const cues = every(1, (beat) => [pulse(beat, NORTH.slice(0, 5), 1), pulse(beat + 0.5, NORTH.slice(5), 1)]);
     expect(findings(cues)).toEqual(["street-flash"]);
   });
   it("stops different quarters that take turns on half beats", () => {
-    expect(findings(every(0.5, (beat, turn) => pulse(beat, [0, 1, 2].map((light) => ((turn % 3) * 3 + light) % 10), 0.5)))).toEqual(["street-flash"]);
+    expect(
+      findings(
+        every(0.5, (beat, turn) =>
+          pulse(
+            beat,
+            [0, 1, 2].map((light) => ((turn % 3) * 3 + light) % 10),
+            0.5,
+          ),
+        ),
+      ),
+    ).toEqual(["street-flash"]);
   });
   it("adds up lights within 20 ms, and not beyond (TRACE, 2024)", () => {
     // 20 ms are 0.04 beats at 120 a minute.
-    const staggered = (gap: number) => every(0.5, (beat) => NORTH.slice(0, 3).map((light) => pulse(beat + light * gap, light, 0.3)));
+    const staggered = (gap: number) =>
+      every(0.5, (beat) => NORTH.slice(0, 3).map((light) => pulse(beat + light * gap, light, 0.3)));
     expect(findings(staggered(0.019))).toEqual(["street-flash"]);
     expect(findings(staggered(0.06))).toEqual([]);
   });
   it("counts fades that go up and down four times a second", () => {
-    expect(findings(every(0.5, (beat) => [fadeTo(beat, NORTH, 90, 0.25), fadeTo(beat + 0.25, NORTH, 10, 0.25)]))).toEqual(["street-flash"]);
+    expect(
+      findings(every(0.5, (beat) => [fadeTo(beat, NORTH, 90, 0.25), fadeTo(beat + 0.25, NORTH, 10, 0.25)])),
+    ).toEqual(["street-flash"]);
   });
   it("counts flashes of a saturated blue, which has little luminance", () => {
     expect(findings(every(0.5, (beat) => pulse(beat, NORTH, 0.5, 0x00_00_ff)))).toEqual(["street-flash"]);
   });
   it("counts a change between a bright and a dark colour", () => {
-    expect(findings([on(0, NORTH), ...every(0.25, (beat, turn) => colour(beat, NORTH, turn % 2 ? 0xff_ff_00 : 0x00_00_ff))])).toEqual(["street-flash"]);
+    expect(
+      findings([on(0, NORTH), ...every(0.25, (beat, turn) => colour(beat, NORTH, turn % 2 ? 0xff_ff_00 : 0x00_00_ff))]),
+    ).toEqual(["street-flash"]);
   });
   it("warns of sides that each keep the limit and exceed it together", () => {
     const cues = every(1, (beat) => [pulse(beat, NORTH, 1), pulse(beat + 0.5, SOUTH, 1)]);
@@ -108,15 +129,31 @@ describe("the limit", () => {
     expect(findings(cues)).toEqual(["street-flash"]);
   });
   it("lets the pixels of a strip weigh as much as one light", () => {
-    const strip = buildLayout([{ side: "north", outlets: [40, ...Array.from({ length: 7 }, () => ({ kind: "colour" as const }))] }]);
+    const strip = buildLayout([
+      { side: "north", outlets: [40, ...Array.from({ length: 7 }, () => ({ kind: "colour" as const }))] },
+    ]);
     const pixels = Array.from({ length: 40 }, (_, pixel) => pixel);
     const count = (lights: number[]) =>
-      countStreetFlashes(createCheckContext({ timeline: buildShow(strip, every(0.5, (beat) => pulse(beat, lights, 0.5))), layout: strip, song: buildSong() }))[0]?.worst;
+      countStreetFlashes(
+        createCheckContext({
+          timeline: buildShow(
+            strip,
+            every(0.5, (beat) => pulse(beat, lights, 0.5)),
+          ),
+          layout: strip,
+          song: buildSong(),
+        }),
+      )[0]?.worst;
     expect(count(pixels)).toBe(0);
     expect(count([...pixels, 40])).toBe(4);
   });
   it("reports a long run at the limit", () => {
-    const found = findStreetFlashes(context(every(1, (beat) => pulse(beat, NORTH, 1)), 179));
+    const found = findStreetFlashes(
+      context(
+        every(1, (beat) => pulse(beat, NORTH, 1)),
+        179,
+      ),
+    );
     expect(found.map(({ rule }) => rule)).toEqual(["street-flash-long-run"]);
     expect(found[0]?.measured?.value).toBeCloseTo((31 * 60) / 179, 1);
   });

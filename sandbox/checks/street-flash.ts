@@ -65,7 +65,9 @@ function countViews(context: CheckContext): readonly FlashCount[] {
   return views.map((side) => {
     const weights = listWeights(context, side, areas);
     const counts = rises.map((measure) => countView(context, side, weights, measure));
-    return counts.reduce((worse, count) => (count.worst > worse.worst || (count.worst === worse.worst && count.longestRun > worse.longestRun) ? count : worse));
+    return counts.reduce((worse, count) =>
+      count.worst > worse.worst || (count.worst === worse.worst && count.longestRun > worse.longestRun) ? count : worse,
+    );
   });
 }
 
@@ -74,7 +76,13 @@ type Weights = ReadonlyMap<number, { readonly area: number; readonly number: num
 
 /** Luminous area of every light in the reference picture of its side, in square pixels. */
 function measureAreas({ layout }: CheckContext, sides: readonly Side[]): ReadonlyMap<number, number> {
-  return new Map(sides.flatMap((side) => sideGeometry(layout, side).flatMap((front) => front.lights.map((light) => [light.lightIndex, light.area] as const))));
+  return new Map(
+    sides.flatMap((side) =>
+      sideGeometry(layout, side).flatMap((front) =>
+        front.lights.map((light) => [light.lightIndex, light.area] as const),
+      ),
+    ),
+  );
 }
 
 /** What stands on no side is in every view. */
@@ -84,7 +92,9 @@ function listWeights({ lights }: CheckContext, side: Side | null, areas: Readonl
   const numberOf = (light: Light) => 1 / (light.pixels ?? 1);
   const sum = (measure: (light: Light) => number) => inView.reduce((total, light) => total + measure(light), 0) || 1;
   const [area, number] = [sum(areaOf), sum(numberOf)];
-  return new Map(inView.map((light) => [light.index, { area: areaOf(light) / area, number: numberOf(light) / number }]));
+  return new Map(
+    inView.map((light) => [light.index, { area: areaOf(light) / area, number: numberOf(light) / number }]),
+  );
 }
 
 /** Rising transitions of all lights by time: once by luminance, once by the strongest channel. */
@@ -92,7 +102,9 @@ function listRises(context: CheckContext): readonly (readonly Rise[])[] {
   const { rules, tempo, lights } = context;
   const rule = { step: rules.flashStep, darkerBelow: rules.flashDarkerBelow };
   const curves = context.curves();
-  const measures = lights.some((light) => light.hasColour) ? (["luminance", "strongest"] as const) : (["luminance"] as const);
+  const measures = lights.some((light) => light.hasColour)
+    ? (["luminance", "strongest"] as const)
+    : (["luminance"] as const);
   return measures.map((measure) => {
     const known = new Map<LightCurve, readonly number[]>();
     const rises = curves.flatMap((curve, light) => {
@@ -120,11 +132,10 @@ function countView({ rules }: CheckContext, side: Side | null, weights: Weights,
   return { side, events, worst, longestRun: longestRunAtLimit(events, rules.flashesPerSecond) };
 }
 
-
 /** From the earliest on: rises within 20 ms are one event when their lights weigh enough. */
 function groupRises(rises: readonly Rise[], weights: Weights, needed: number, together: number): FlashEvent[] {
   const events: FlashEvent[] = [];
-  for (let start = 0; start < rises.length; ) {
+  for (let start = 0; start < rises.length;) {
     const first = rises[start];
     if (first === undefined) break;
     const lights = new Set<number>();

@@ -84,11 +84,21 @@ export function findRelayRate(context: CheckContext): Finding[] {
 }
 
 /** Gives how often each relay comes on in the show, by light index: what wear is worked out from. */
-export function countRelayCycles({ lights, tracks }: Pick<CheckContext, "lights" | "tracks">): ReadonlyMap<number, number> {
-  return new Map(lights.filter(({ boxKind }) => boxKind === "relay").map(({ index }) => [index, listOnSpans(tracks, index).length]));
+export function countRelayCycles({
+  lights,
+  tracks,
+}: Pick<CheckContext, "lights" | "tracks">): ReadonlyMap<number, number> {
+  return new Map(
+    lights.filter(({ boxKind }) => boxKind === "relay").map(({ index }) => [index, listOnSpans(tracks, index).length]),
+  );
 }
 
-function listShort({ lights, tracks, tempo }: CheckContext, kind: "relay" | "solid-state", limit: number, rounding = ROUNDING_SECONDS): ShortSpan[] {
+function listShort(
+  { lights, tracks, tempo }: CheckContext,
+  kind: "relay" | "solid-state",
+  limit: number,
+  rounding = ROUNDING_SECONDS,
+): ShortSpan[] {
   const short: ShortSpan[] = [];
   const add = (light: number, start: number, end: number, cue: number) => {
     const seconds = tempo.toSeconds(end) - tempo.toSeconds(start);

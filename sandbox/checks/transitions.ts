@@ -25,7 +25,12 @@ const ROUNDING = 1e-9;
  * steps is one transition (WCAG 2.2, note to "general flash and red flash thresholds"). The series
  * starts from `before`; without it from its own first value.
  */
-export function findTransitions(times: ArrayLike<number>, values: ArrayLike<number>, rule: TransitionRule, before?: number): Transition[] {
+export function findTransitions(
+  times: ArrayLike<number>,
+  values: ArrayLike<number>,
+  rule: TransitionRule,
+  before?: number,
+): Transition[] {
   const transitions: Transition[] = [];
   let low = before ?? values[0] ?? 0;
   let high = low;
@@ -44,7 +49,10 @@ export function findTransitions(times: ArrayLike<number>, values: ArrayLike<numb
     if (isRising !== false) {
       const isStep = high - value >= rule.step - ROUNDING && value < rule.darkerBelow;
       if (isStep) {
-        transitions.push({ time: crossing(times, values, point, Math.min(high - rule.step, rule.darkerBelow)), isRising: false });
+        transitions.push({
+          time: crossing(times, values, point, Math.min(high - rule.step, rule.darkerBelow)),
+          isRising: false,
+        });
         isRising = false;
         low = value;
         continue;

@@ -2,7 +2,10 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { listUnmet, listUses, type UseKind } from "./use.ts";
 
-const lines = (source: string, kind: UseKind) => listUses(source).filter((use) => use.kind === kind).map(({ name, line }) => `${line} ${name}`);
+const lines = (source: string, kind: UseKind) =>
+  listUses(source)
+    .filter((use) => use.kind === kind)
+    .map(({ name, line }) => `${line} ${name}`);
 
 const SCRIPT = `// for every front, if you like
 const north = square.side("north");
@@ -27,7 +30,9 @@ describe("listUses", () => {
     expect(lines(SCRIPT, "nested-loop")).toEqual(["8 for", "15 inTurn"]);
   });
   it("does not take a loop's head for its body, nor two loops in a row for nested ones", () => {
-    expect(lines("for (const f of square.fronts.map(x => x)) f.on();\nwhile (now() < 4) wait(1);", "nested-loop")).toEqual([]);
+    expect(
+      lines("for (const f of square.fronts.map(x => x)) f.on();\nwhile (now() < 4) wait(1);", "nested-loop"),
+    ).toEqual([]);
   });
   it("finds functions of the script's own, with and without parameters", () => {
     expect(lines(SCRIPT, "function")).toEqual(["3 flash", "6 rest"]);
@@ -40,7 +45,12 @@ describe("listUses", () => {
     expect(lines(SCRIPT, "song-data")).toEqual(["13 song.section"]);
   });
   it("finds words of the language, but not in comments, texts or names that the script gives", () => {
-    expect(lines("// wait(1)\nlet bar = 'repeat';\nsquare.all.on();\nbar.length;", "word")).toEqual(["3 on", "3 all", "3 square", "4 length"]);
+    expect(lines("// wait(1)\nlet bar = 'repeat';\nsquare.all.on();\nbar.length;", "word")).toEqual([
+      "3 on",
+      "3 all",
+      "3 square",
+      "4 length",
+    ]);
   });
   it("reads what it can of a script with a mistake, and never throws", () => {
     expect(lines("for (const f of square.fronts) {\n  f.on();", "loop")).toEqual(["1 for"]);
@@ -51,7 +61,13 @@ describe("listUses", () => {
 
 describe("listUnmet", () => {
   it("keeps what is asked for and not there, or not often enough", () => {
-    expect(listUnmet(SCRIPT, [{ kind: "loop", atLeast: 4 }, { kind: "function", atLeast: 3 }, { kind: "song-data", atLeast: 1 }])).toEqual([{ kind: "function", atLeast: 3 }]);
+    expect(
+      listUnmet(SCRIPT, [
+        { kind: "loop", atLeast: 4 },
+        { kind: "function", atLeast: 3 },
+        { kind: "song-data", atLeast: 1 },
+      ]),
+    ).toEqual([{ kind: "function", atLeast: 3 }]);
     expect(listUnmet("", [{ kind: "loop", atLeast: 1 }])).toHaveLength(1);
   });
 });

@@ -77,7 +77,11 @@ function isLoopBody(loop: ts.Node, child: ts.Node): boolean {
 
 function calledName(call: ts.CallExpression): string {
   const { expression } = call;
-  return ts.isIdentifier(expression) ? expression.text : ts.isPropertyAccessExpression(expression) ? expression.name.text : "";
+  return ts.isIdentifier(expression)
+    ? expression.text
+    : ts.isPropertyAccessExpression(expression)
+      ? expression.name.text
+      : "";
 }
 
 function functionUses(node: ts.Node): (readonly [UseKind, string])[] {
@@ -89,7 +93,8 @@ function functionUses(node: ts.Node): (readonly [UseKind, string])[] {
 
 /** A function that the script gives a name: `function f() {}` or `const f = () => {}`. */
 function ownFunction(node: ts.Node): { readonly name: string; readonly parameters: number } | null {
-  if (ts.isFunctionDeclaration(node) && node.name !== undefined) return { name: node.name.text, parameters: node.parameters.length };
+  if (ts.isFunctionDeclaration(node) && node.name !== undefined)
+    return { name: node.name.text, parameters: node.parameters.length };
   if (!ts.isVariableDeclaration(node) || !ts.isIdentifier(node.name) || node.initializer === undefined) return null;
   const { initializer } = node;
   if (!ts.isArrowFunction(initializer) && !ts.isFunctionExpression(initializer)) return null;
@@ -100,11 +105,15 @@ function otherUses(node: ts.Node): (readonly [UseKind, string])[] {
   if (ts.isIfStatement(node)) return [["condition", "if"]];
   if (ts.isSwitchStatement(node)) return [["condition", "switch"]];
   if (ts.isConditionalExpression(node)) return [["condition", "? :"]];
-  if (ts.isArrayLiteralExpression(node) || ts.isElementAccessExpression(node) || ts.isArrayBindingPattern(node)) return [["list", "[ ]"]];
+  if (ts.isArrayLiteralExpression(node) || ts.isElementAccessExpression(node) || ts.isArrayBindingPattern(node))
+    return [["list", "[ ]"]];
   if (ts.isPropertyAccessExpression(node)) {
     const { expression, name } = node;
     const isSong = ts.isIdentifier(expression) && expression.text === "song";
-    return [...(isSong ? [["song-data", `song.${name.text}`] as const] : []), ...(MEMBERS.has(name.text) ? [["word", name.text] as const] : [])];
+    return [
+      ...(isSong ? [["song-data", `song.${name.text}`] as const] : []),
+      ...(MEMBERS.has(name.text) ? [["word", name.text] as const] : []),
+    ];
   }
   if (ts.isIdentifier(node) && GLOBALS.has(node.text) && standsAlone(node)) return [["word", node.text]];
   return [];
@@ -114,6 +123,13 @@ function otherUses(node: ts.Node): (readonly [UseKind, string])[] {
 function standsAlone(node: ts.Identifier): boolean {
   const { parent } = node;
   if (ts.isPropertyAccessExpression(parent)) return parent.expression === node;
-  if (ts.isVariableDeclaration(parent) || ts.isParameter(parent) || ts.isFunctionDeclaration(parent) || ts.isBindingElement(parent) || ts.isPropertyAssignment(parent)) return "initializer" in parent && parent.initializer === node;
+  if (
+    ts.isVariableDeclaration(parent) ||
+    ts.isParameter(parent) ||
+    ts.isFunctionDeclaration(parent) ||
+    ts.isBindingElement(parent) ||
+    ts.isPropertyAssignment(parent)
+  )
+    return "initializer" in parent && parent.initializer === node;
   return true;
 }

@@ -17,12 +17,14 @@ interface Parts {
 }
 
 function split(bytes: Uint8Array, lineOf: (site: number) => number): Parts {
-  if (bytes.byteLength % 4 !== 0 || bytes.byteLength < HEAD_WORDS * 4) throw new DamagedResultError("The buffer has no head.");
+  if (bytes.byteLength % 4 !== 0 || bytes.byteLength < HEAD_WORDS * 4)
+    throw new DamagedResultError("The buffer has no head.");
   // A copy: the guest's memory goes away with the engine, and may not be aligned.
   const words = new Uint32Array(bytes.slice().buffer);
   const [mark, cueCount = 0, selectionCount = 0, lightTotal = 0, chainCount = 0] = words;
   if (mark !== BUFFER_MARK) throw new DamagedResultError("The buffer has a wrong mark.");
-  if (cueCount > MAX_CUES || lightTotal > MAX_CHANGES) throw new DamagedResultError("The buffer holds more than a run can write.");
+  if (cueCount > MAX_CUES || lightTotal > MAX_CHANGES)
+    throw new DamagedResultError("The buffer holds more than a run can write.");
   const size = HEAD_WORDS + cueCount * CUE_WORDS + selectionCount + lightTotal + 2 * chainCount;
   if (words.length !== size) throw new DamagedResultError(`The buffer has ${words.length} words, not ${size}.`);
   const lengthsAt = HEAD_WORDS + cueCount * CUE_WORDS;
@@ -98,7 +100,10 @@ export function decodeTimelineBuffer(bytes: Uint8Array, head: DecodedHead, lineO
   const chains = new Renumbering(parts.chains, (lines) => lines.join(","));
   const cues = emptyCues(count);
   order.forEach((cue, index) => {
-    const [tick = 0, action = 0, selection = 0, level = 0, length = 0, colour = 0, chain = 0] = parts.cues.subarray(cue * CUE_WORDS, (cue + 1) * CUE_WORDS);
+    const [tick = 0, action = 0, selection = 0, level = 0, length = 0, colour = 0, chain = 0] = parts.cues.subarray(
+      cue * CUE_WORDS,
+      (cue + 1) * CUE_WORDS,
+    );
     cues.tick[index] = tick;
     cues.action[index] = action;
     cues.selection[index] = selections.indexOf(selection);

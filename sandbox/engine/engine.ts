@@ -62,7 +62,13 @@ function runGuarded(module: QuickJSWASMModule, compiled: CompiledScript, tables:
   }
 }
 
-async function finish(host: EngineHost, input: RunInput, compiled: CompiledScript, tables: GuestTables, result: RuntimeResult): Promise<RunOutcome> {
+async function finish(
+  host: EngineHost,
+  input: RunInput,
+  compiled: CompiledScript,
+  tables: GuestTables,
+  result: RuntimeResult,
+): Promise<RunOutcome> {
   const hash = await layoutHash(input.layout, async (text) => host.sha256(host.encodeText(text)));
   const problem = explainFailure(compiled, result);
   const head: DecodedHead = {
@@ -78,8 +84,18 @@ async function finish(host: EngineHost, input: RunInput, compiled: CompiledScrip
   const report = readReport(compiled, result, decoded.timeline);
   const stopped = problem ?? decoded.problem;
   if (stopped !== null || decoded.timeline === null)
-    return { ok: false, problem: stopped ?? wholeScriptProblem(compiled, "No result."), timeline: decoded.timeline, ...report };
-  return { ok: true, timeline: decoded.timeline, hash: await host.sha256(encodeCanonical(decoded.timeline)), ...report };
+    return {
+      ok: false,
+      problem: stopped ?? wholeScriptProblem(compiled, "No result."),
+      timeline: decoded.timeline,
+      ...report,
+    };
+  return {
+    ok: true,
+    timeline: decoded.timeline,
+    hash: await host.sha256(encodeCanonical(decoded.timeline)),
+    ...report,
+  };
 }
 
 interface Decoded {
@@ -91,7 +107,10 @@ interface Decoded {
 function readTimeline(result: RuntimeResult, head: DecodedHead, compiled: CompiledScript): Decoded {
   if (result.buffer === null) return { timeline: null, problem: null };
   try {
-    return { timeline: decodeTimelineBuffer(result.buffer, head, (site) => compiled.marked.sites[site]?.line ?? 1), problem: null };
+    return {
+      timeline: decodeTimelineBuffer(result.buffer, head, (site) => compiled.marked.sites[site]?.line ?? 1),
+      problem: null,
+    };
   } catch (error) {
     const details = error instanceof Error ? `${error.name}: ${error.message}` : String(error);
     return { timeline: null, problem: wholeScriptProblem(compiled, details) };
@@ -100,7 +119,11 @@ function readTimeline(result: RuntimeResult, head: DecodedHead, compiled: Compil
 
 function wholeScriptProblem(compiled: CompiledScript, details: string): Problem {
   const [excerpt = ""] = compiled.text.split("\n");
-  return createProblem("could-not-run", {}, { range: { line: 1, column: 1, endLine: 1, endColumn: 1 }, excerpt: excerpt.slice(0, 60), details });
+  return createProblem(
+    "could-not-run",
+    {},
+    { range: { line: 1, column: 1, endLine: 1, endColumn: 1 }, excerpt: excerpt.slice(0, 60), details },
+  );
 }
 
 function readReport(compiled: CompiledScript, result: RuntimeResult, timeline: Timeline | null): RunReport {

@@ -48,15 +48,22 @@ function loopAround(node: ts.Node): ts.Node | null {
 /** A statement's first line only: a loop as far as its body. */
 function headOf(compiled: CompiledScript, node: ts.Node): ProblemPlace {
   const start = node.getStart(compiled.file);
-  const body = ts.isIterationStatement(node, false) && !ts.isDoStatement(node) ? node.statement.getStart(compiled.file) : node.end;
+  const body =
+    ts.isIterationStatement(node, false) && !ts.isDoStatement(node) ? node.statement.getStart(compiled.file) : node.end;
   const lineEnd = compiled.text.indexOf("\n", start);
   const end = Math.min(body, lineEnd < 0 ? node.end : lineEnd);
   const text = compiled.text.slice(start, end).trimEnd();
-  return { range: toRange(compiled.file, start, start + text.length), excerpt: toExcerpt(compiled.text, start, start + text.length) };
+  return {
+    range: toRange(compiled.file, start, start + text.length),
+    excerpt: toExcerpt(compiled.text, start, start + text.length),
+  };
 }
 
 function explainUnreadable(compiled: CompiledScript, details: string): Problem {
-  const place = placeInStack(compiled, details) ?? { range: { line: 1, column: 1, endLine: 1, endColumn: 1 }, excerpt: "" };
+  const place = placeInStack(compiled, details) ?? {
+    range: { line: 1, column: 1, endLine: 1, endColumn: 1 },
+    excerpt: "",
+  };
   if (details.includes("stack overflow")) return createProblem("too-deep", {}, { ...place, details });
   return createProblem("unreadable", {}, { ...place, details });
 }
@@ -96,7 +103,10 @@ function placeInStack(compiled: CompiledScript, stack: string): ProblemPlace | n
   // The engine points at the bracket of a call; its name says more.
   if (compiled.text.charAt(start) === "(" && ts.isCallExpression(node)) return placeOfCall(compiled, node);
   const word = /^[\w$.]+/.exec(compiled.text.slice(start))?.[0] ?? compiled.text.slice(start, start + 1);
-  return { range: toRange(compiled.file, start, start + word.length), excerpt: toExcerpt(compiled.text, start, start + word.length) };
+  return {
+    range: toRange(compiled.file, start, start + word.length),
+    excerpt: toExcerpt(compiled.text, start, start + word.length),
+  };
 }
 
 /** Where a call site is shown: the name of what is called, up to the end of the call when it is on one line. */
@@ -135,10 +145,15 @@ function functionName(compiled: CompiledScript, node: ts.Node): string {
 function explainLibrary(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
   const argument = failure.argument === undefined ? undefined : argumentOf(site, failure.argument);
   const place = argument === undefined ? placeOfSite(compiled, site) : placeOf(compiled.file, argument);
-  if (failure.code === "calls-itself") return createProblem("calls-itself", { name: functionName(compiled, site.node) }, place);
+  if (failure.code === "calls-itself")
+    return createProblem("calls-itself", { name: functionName(compiled, site.node) }, place);
   if (failure.code === "not-an-action") return explainAction(compiled, failure, argument, place);
   const code: ProblemCode = isProblemCode(failure.code) ? failure.code : "could-not-run";
-  return createProblem(code, { ...failure.values, ...extraValues(compiled, failure, argument) }, { ...place, ...fixOf(compiled, failure, argument) });
+  return createProblem(
+    code,
+    { ...failure.values, ...extraValues(compiled, failure, argument) },
+    { ...place, ...fixOf(compiled, failure, argument) },
+  );
 }
 
 function argumentOf(site: Site, index: number): ts.Node | undefined {
@@ -148,15 +163,28 @@ function argumentOf(site: Site, index: number): ts.Node | undefined {
 }
 
 /** Something ran where steps were wanted: `at(8, all.off())`. */
-function explainAction(compiled: CompiledScript, failure: GuestFailure, argument: ts.Node | undefined, place: ProblemPlace): Problem {
+function explainAction(
+  compiled: CompiledScript,
+  failure: GuestFailure,
+  argument: ts.Node | undefined,
+  place: ProblemPlace,
+): Problem {
   const word = String(failure.values["word"] ?? "at");
   if (argument !== undefined && ts.isCallExpression(argument)) {
     const start = argument.getStart(compiled.file);
     const range = toRange(compiled.file, start, start);
     const when = failure.values["when"] === undefined ? "later" : `at beat ${failure.values["when"]}`;
-    return createProblem("ran-too-early", { when }, { ...place, fix: { range, text: "() => ", label: "Put `() =>` in front" } });
+    return createProblem(
+      "ran-too-early",
+      { when },
+      { ...place, fix: { range, text: "() => ", label: "Put `() =>` in front" } },
+    );
   }
-  return createProblem("not-an-action", { word, got: String(failure.values["got"] ?? ""), example: ACTION_EXAMPLES[word] ?? `${word}(() => { ... })` }, place);
+  return createProblem(
+    "not-an-action",
+    { word, got: String(failure.values["got"] ?? ""), example: ACTION_EXAMPLES[word] ?? `${word}(() => { ... })` },
+    place,
+  );
 }
 
 const ACTION_EXAMPLES: { readonly [word: string]: string } = {
@@ -195,10 +223,21 @@ function explainThrown(compiled: CompiledScript, site: Site, failure: GuestFailu
   let thrower: ts.Node | undefined = offset < 0 ? undefined : nodeAt(compiled.file, offset);
   while (thrower !== undefined && !ts.isThrowStatement(thrower)) thrower = thrower.parent;
   const place = thrower === undefined ? placeOfSite(compiled, site) : placeOf(compiled.file, thrower);
-  return createProblem("thrown", failure.message === undefined || failure.message === "" ? {} : { message: failure.message }, place);
+  return createProblem(
+    "thrown",
+    failure.message === undefined || failure.message === "" ? {} : { message: failure.message },
+    place,
+  );
 }
 
-const TOO_BIG = ["out of memory", "invalid array length", "string too long", "array too large", "too many arguments", "invalid repeat count"];
+const TOO_BIG = [
+  "out of memory",
+  "invalid array length",
+  "string too long",
+  "array too large",
+  "too many arguments",
+  "invalid repeat count",
+];
 
 /** An error of QuickJS itself, by its own words; those are pinned with the engine and covered by tests. */
 function explainEngine(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
@@ -206,16 +245,25 @@ function explainEngine(compiled: CompiledScript, site: Site, failure: GuestFailu
   const details = `${failure.name ?? "Error"}: ${message}`;
   const inStack = failure.stack === undefined ? null : placeInStack(compiled, failure.stack);
   const place = { ...(inStack ?? placeOfSite(compiled, site)), details };
-  if (message.includes("stack overflow")) return createProblem("calls-itself", { name: functionName(compiled, site.node) }, { ...placeOfSite(compiled, site), details });
+  if (message.includes("stack overflow"))
+    return createProblem(
+      "calls-itself",
+      { name: functionName(compiled, site.node) },
+      { ...placeOfSite(compiled, site), details },
+    );
   if (TOO_BIG.some((words) => message.includes(words))) return createProblem("too-big", {}, place);
-  if (message.includes("is not initialized")) return createProblem("not-made-yet", { name: quoted(message) ?? place.excerpt }, place);
-  if (failure.name === "ReferenceError") return createProblem("out-of-reach", { name: quoted(message) ?? place.excerpt }, place);
-  if (message.includes("read-only") || message.includes("not extensible") || message.includes("no setter")) return createProblem("can-not-change", {}, place);
+  if (message.includes("is not initialized"))
+    return createProblem("not-made-yet", { name: quoted(message) ?? place.excerpt }, place);
+  if (failure.name === "ReferenceError")
+    return createProblem("out-of-reach", { name: quoted(message) ?? place.excerpt }, place);
+  if (message.includes("read-only") || message.includes("not extensible") || message.includes("no setter"))
+    return createProblem("can-not-change", {}, place);
   if (message.includes("cannot read property") || message.includes("cannot set property")) {
     return explainNothing(compiled, failure, quoted(message) ?? "", place);
   }
   if (message.includes("not iterable")) return createProblem("not-a-list", {}, place);
-  if (message.includes("not a function")) return explainSkill(compiled, site, { ...placeOfSite(compiled, site), details });
+  if (message.includes("not a function"))
+    return explainSkill(compiled, site, { ...placeOfSite(compiled, site), details });
   return createProblem("could-not-run", {}, place);
 }
 
@@ -226,7 +274,11 @@ function explainNothing(compiled: CompiledScript, failure: GuestFailure, name: s
   const access = ts.isPropertyAccessExpression(node.parent ?? node) ? node.parent : node;
   if (!ts.isPropertyAccessExpression(access)) return createProblem("nothing-there", { name }, place);
   const exact = { ...placeOf(compiled.file, access), details: place.details };
-  return createProblem("nothing-there", ts.isIdentifier(access.expression) ? { name, owner: access.expression.text } : { name }, exact);
+  return createProblem(
+    "nothing-there",
+    ts.isIdentifier(access.expression) ? { name, owner: access.expression.text } : { name },
+    exact,
+  );
 }
 
 function quoted(message: string): string | null {
@@ -237,8 +289,17 @@ function quoted(message: string): string | null {
 function explainSkill(compiled: CompiledScript, site: Site, place: ProblemPlace): Problem {
   if (!ts.isCallExpression(site.node)) return createProblem("not-a-function", { name: "This" }, place);
   const callee = site.node.expression;
-  if (!ts.isPropertyAccessExpression(callee)) return createProblem("not-a-function", { name: callee.getText(compiled.file) }, place);
+  if (!ts.isPropertyAccessExpression(callee))
+    return createProblem("not-a-function", { name: callee.getText(compiled.file) }, place);
   const owner = callee.expression.getText(compiled.file);
   const isShort = owner.length <= 20 && !owner.includes("\n");
-  return createProblem("unknown-skill", { owner: isShort ? `\`${owner}\`` : "This", name: callee.name.text, skills: "Check what it is, and what it can do." }, place);
+  return createProblem(
+    "unknown-skill",
+    {
+      owner: isShort ? `\`${owner}\`` : "This",
+      name: callee.name.text,
+      skills: "Check what it is, and what it can do.",
+    },
+    place,
+  );
 }

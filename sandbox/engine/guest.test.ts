@@ -30,7 +30,37 @@ async function say(expression: string): Promise<string | undefined> {
 
 describe("the guest's realm", () => {
   it("has none of the globals that tell time, watch memory or reach outside", async () => {
-    const names = ["Date", "Proxy", "Reflect", "Promise", "WeakRef", "WeakMap", "FinalizationRegistry", "Intl", "Symbol", "BigInt", "eval", "Function", "SharedArrayBuffer", "Atomics", "ArrayBuffer", "Uint8Array", "DataView", "setTimeout", "queueMicrotask", "performance", "console", "print", "std", "os", "require", "process", "WebAssembly", "escape", "encodeURIComponent"];
+    const names = [
+      "Date",
+      "Proxy",
+      "Reflect",
+      "Promise",
+      "WeakRef",
+      "WeakMap",
+      "FinalizationRegistry",
+      "Intl",
+      "Symbol",
+      "BigInt",
+      "eval",
+      "Function",
+      "SharedArrayBuffer",
+      "Atomics",
+      "ArrayBuffer",
+      "Uint8Array",
+      "DataView",
+      "setTimeout",
+      "queueMicrotask",
+      "performance",
+      "console",
+      "print",
+      "std",
+      "os",
+      "require",
+      "process",
+      "WebAssembly",
+      "escape",
+      "encodeURIComponent",
+    ];
     const kinds = names.map((name) => `["${name}", typeof ${name}]`).join(",");
     expect(await say(`[${kinds}].filter(entry => entry[1] !== "undefined").map(entry => entry[0]).join(" ")`)).toBe("");
   });

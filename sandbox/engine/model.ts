@@ -74,5 +74,9 @@ export interface RunReport {
  * before the problem (or null when the script never started).
  */
 export type RunOutcome =
-  | ({ readonly ok: true; readonly timeline: Timeline; /** SHA-256 hex of the canonical light section. */ readonly hash: string } & RunReport)
+  | ({
+      readonly ok: true;
+      readonly timeline: Timeline;
+      /** SHA-256 hex of the canonical light section. */ readonly hash: string;
+    } & RunReport)
   | ({ readonly ok: false; readonly problem: Problem; readonly timeline: Timeline | null } & RunReport);

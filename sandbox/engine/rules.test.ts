@@ -34,18 +34,24 @@ function referenceSfc32(key: readonly [number, number, number]): () => number {
 
 describe("evaluation rules", () => {
   it("1: only wait and waitUntil move the clock", async () => {
-    expect(await printed(`
+    expect(
+      await printed(`
       square.all.fadeTo(50, 8); square.all.colour("red", 4); square.side("north").pulse(2);
       console.log(now()); wait(1.5); console.log(now()); waitUntil(4); console.log(now());
-    `)).toEqual(["0", "1.5", "4"]);
+    `),
+    ).toEqual(["0", "1.5", "4"]);
   });
 
   it("2: moment 0 is the last beat at or before the first sound; bar 1 is the first whole bar", async () => {
-    expect(await printed("console.log(song.start, song.bar(0), song.bar(1), song.end, song.beats.length);")).toEqual(["0 0 1 17 17"]);
+    expect(await printed("console.log(song.start, song.bar(0), song.bar(1), song.end, song.beats.length);")).toEqual([
+      "0 0 1 17 17",
+    ]);
   });
 
   it("3: a cue is stamped on the nearest tick and the clock is not rounded", async () => {
-    const outcome = await runWell("for (let i = 0; i < 3; i++) { square.all.on(); wait(1 / 7); }\nconsole.log(now() * 960);");
+    const outcome = await runWell(
+      "for (let i = 0; i < 3; i++) { square.all.on(); wait(1 / 7); }\nconsole.log(now() * 960);",
+    );
     expect([...outcome.timeline.cues.tick]).toEqual([0, 137, 274]);
     // Three sevenths of a beat are 411.43 ticks; three rounded steps of 137 would be 411 too, seven tell them apart.
     expect(await printed("for (let i = 0; i < 7; i++) wait(1 / 7);\nconsole.log(now());")).toEqual(["1"]);
@@ -61,7 +67,11 @@ describe("evaluation rules", () => {
   });
 
   it("5: together starts all at once and ends with the longest", async () => {
-    expect(await printed("wait(1);\ntogether(() => wait(2), () => { console.log(now()); wait(5); }, () => wait(1));\nconsole.log(now());")).toEqual(["1", "6"]);
+    expect(
+      await printed(
+        "wait(1);\ntogether(() => wait(2), () => { console.log(now()); wait(5); }, () => wait(1));\nconsole.log(now());",
+      ),
+    ).toEqual(["1", "6"]);
   });
 
   it("6: repeat counts from 0 with the clock running on, rounds down with a note, and refuses less than 0", async () => {
@@ -69,41 +79,62 @@ describe("evaluation rules", () => {
     expect(outcome.notes.map((note) => note.text)).toEqual(["0 0", "1 1"]);
     expect(outcome.findings).toMatchObject([{ rule: "count-rounded", severity: "note", lines: [1] }]);
     expect(await problemOf("repeat(-1, () => wait(1));")).toBe("wants-whole");
-    expect(await printed('wait(2); square.side("north").inTurn(0.5, front => console.log(front.name, now())); console.log(now());')).toEqual(["bakery 2", "library 2.5", "2"]);
+    expect(
+      await printed(
+        'wait(2); square.side("north").inTurn(0.5, front => console.log(front.name, now())); console.log(now());',
+      ),
+    ).toEqual(["bakery 2", "library 2.5", "2"]);
   });
 
   it("7: an action gets only the arguments it names without a default", async () => {
-    expect(await cuesOf("function flash(beats = 1) { square.all.pulse(beats); wait(1); }\nrepeat(2, flash);")).toEqual(["0 pulse +1 all @2>1", "1 pulse +1 all @2>1"]);
-    expect(await printed('square.side("north").inTurn(1, (front, i) => console.log(front.name, i));')).toEqual(["bakery 0", "library 1"]);
+    expect(await cuesOf("function flash(beats = 1) { square.all.pulse(beats); wait(1); }\nrepeat(2, flash);")).toEqual([
+      "0 pulse +1 all @2>1",
+      "1 pulse +1 all @2>1",
+    ]);
+    expect(await printed('square.side("north").inTurn(1, (front, i) => console.log(front.name, i));')).toEqual([
+      "bakery 0",
+      "library 1",
+    ]);
     expect(await printed("repeat(1, (...all) => console.log(all.length));")).toEqual(["0"]);
   });
 
   it("8: lights are a frozen list in walking order, an item is lights, single lights come once", async () => {
-    expect(await cuesOf('const both = square.side("north").and(square.parts("windows"));\nboth.on();')).toEqual(["0 on 100 [0 1 2 3] @2"]);
+    expect(await cuesOf('const both = square.side("north").and(square.parts("windows"));\nboth.on();')).toEqual([
+      "0 on 100 [0 1 2 3] @2",
+    ]);
     expect(await problemOf("square.all[0] = square.all[1];")).toBe("can-not-change");
-    expect(await printed("const one = square.all[3];\nconsole.log(one.length, one[0] === one, [...one].length);")).toEqual(["1 true 1"]);
+    expect(
+      await printed("const one = square.all[3];\nconsole.log(one.length, one[0] === one, [...one].length);"),
+    ).toEqual(["1 true 1"]);
   });
 
   it("9: items of all and lights are lights, of a side fronts, of parts that part of each front, of a front its lights", async () => {
-    expect(await printed(`console.log(square.all.length, square.fronts.length, square.side("north").length, square.parts("roof").length);
+    expect(
+      await printed(`console.log(square.all.length, square.fronts.length, square.side("north").length, square.parts("roof").length);
       console.log(square.front("tea room").length, square.front("tea room").part("strip").length, square.fronts.lights.length);
-      console.log(square.parts("strip").length, square.parts("strip").lights.length);`)).toEqual(["9 4 2 2", "4 3 9", "1 3"]);
+      console.log(square.parts("strip").length, square.parts("strip").lights.length);`),
+    ).toEqual(["9 4 2 2", "4 3 9", "1 3"]);
   });
 
   it("10: walking order goes round the sides and ends with the tree", async () => {
-    expect(await printed("for (const front of square.fronts) console.log(front.name);")).toEqual(["bakery", "library", "tea room", "tree"]);
+    expect(await printed("for (const front of square.fronts) console.log(front.name);")).toEqual([
+      "bakery",
+      "library",
+      "tea room",
+      "tree",
+    ]);
     expect(await cuesOf('square.parts("strip").on();')).toEqual(["0 on 100 [5 6 7] @1"]);
   });
 
   it("11: split makes the first runs longer, everyNth starts at k, except and and go by single lights", async () => {
-    expect(await printed(`console.log(square.all.split(4).map(run => run.length));
+    expect(
+      await printed(`console.log(square.all.split(4).map(run => run.length));
       console.log(square.all.everyNth(4, 1).map(light => light.name));
-      console.log(square.all.except(square.side("north")), square.side("north").and(square.front("bakery")), square.side("north").first(1));`)).toEqual([
-      "[3, 2, 2, 2]",
-      '["windows", "strip"]',
-      "5 lights 4 lights 2 lights",
-    ]);
-    const mixed = (await printed("console.log(square.all.shuffled().map(light => light.name).length, square.all.shuffled());"))[0];
+      console.log(square.all.except(square.side("north")), square.side("north").and(square.front("bakery")), square.side("north").first(1));`),
+    ).toEqual(["[3, 2, 2, 2]", '["windows", "strip"]', "5 lights 4 lights 2 lights"]);
+    const mixed = (
+      await printed("console.log(square.all.shuffled().map(light => light.name).length, square.all.shuffled());")
+    )[0];
     expect(mixed).toBe("9 9 lights");
   });
 
@@ -114,16 +145,19 @@ describe("evaluation rules", () => {
   });
 
   it("13: cues are sorted by moment and then as written", async () => {
-    expect(await cuesOf("at(2, () => square.all.on(1));\nsquare.all.on(2);\nsquare.all.on(3);\nat(2, () => square.all.on(4));")).toEqual([
-      "0 on 2 all @2",
-      "0 on 3 all @3",
-      "2 on 1 all @1",
-      "2 on 4 all @4",
-    ]);
+    expect(
+      await cuesOf(
+        "at(2, () => square.all.on(1));\nsquare.all.on(2);\nsquare.all.on(3);\nat(2, () => square.all.on(4));",
+      ),
+    ).toEqual(["0 on 2 all @2", "0 on 3 all @3", "2 on 1 all @1", "2 on 4 all @4"]);
   });
 
   it("14, 15 and 16: every act is written with its own fields, fadeTo without beats as a fade of 0", async () => {
-    expect(await cuesOf('square.all.on(0).off().fadeTo(50, 2).fadeTo(60, 0).colour("red").colour("#00ff00", 1.5).pulse(1).pulse(2, "blue");')).toEqual([
+    expect(
+      await cuesOf(
+        'square.all.on(0).off().fadeTo(50, 2).fadeTo(60, 0).colour("red").colour("#00ff00", 1.5).pulse(1).pulse(2, "blue");',
+      ),
+    ).toEqual([
       "0 on 0 all @1",
       "0 off all @1",
       "0 fadeTo 50 +2 all @1",
@@ -147,12 +181,18 @@ describe("evaluation rules", () => {
   });
 
   it("18: a pulse keeps its length and its colour or none", async () => {
-    expect(await cuesOf("square.all.pulse(0.25, hue(240));\nsquare.all.pulse(1);")).toEqual(["0 pulse #0000ff +0.25 all @1", "0 pulse +1 all @2"]);
+    expect(await cuesOf("square.all.pulse(0.25, hue(240));\nsquare.all.pulse(1);")).toEqual([
+      "0 pulse #0000ff +0.25 all @1",
+      "0 pulse +1 all @2",
+    ]);
     expect(await problemOf("square.all.pulse(-1);")).toBe("negative-time");
   });
 
   it("19 and 20: acts on lights without colour and on switched ones are written all the same", async () => {
-    expect(await cuesOf('square.front("bakery").colour("gold").fadeTo(30, 1);')).toEqual(["0 colour #ffd700 [0 1] @1", "0 fadeTo 30 +1 [0 1] @1"]);
+    expect(await cuesOf('square.front("bakery").colour("gold").fadeTo(30, 1);')).toEqual([
+      "0 colour #ffd700 [0 1] @1",
+      "0 fadeTo 30 +1 [0 1] @1",
+    ]);
   });
 
   it("21: cues at or after the end are dropped with a warning, switching off right at the end is silent", async () => {
@@ -161,12 +201,17 @@ describe("evaluation rules", () => {
     expect(outcome.findings).toEqual([]);
     const late = await runWell("at(song.end, () => square.all.on());\nat(40, () => square.all.off());");
     expect(late.cueCount).toBe(0);
-    expect(late.findings.map((finding) => [finding.rule, finding.lines[0]])).toEqual([["after-the-end", 1], ["after-the-end", 2]]);
+    expect(late.findings.map((finding) => [finding.rule, finding.lines[0]])).toEqual([
+      ["after-the-end", 1],
+      ["after-the-end", 2],
+    ]);
     expect(late.timeline.endTick).toBe(17 * 960);
   });
 
   it("22: bars begin with bar 1; bar 0 is the pick-up; after the last bar only beat 1", async () => {
-    expect(await printed("console.log(song.bars, song.bar(0), song.bar(2, 3), song.bar(1, 4.5), song.bar(5));")).toEqual(["[1, 5, 9, 13] 0 7 4.5 17"]);
+    expect(
+      await printed("console.log(song.bars, song.bar(0), song.bar(2, 3), song.bar(1, 4.5), song.bar(5));"),
+    ).toEqual(["[1, 5, 9, 13] 0 7 4.5 17"]);
     expect(await problemOf("song.bar(6);")).toBe("no-such-bar");
     expect(await problemOf("song.bar(5, 2);")).toBe("no-such-bar");
     expect(await problemOf("song.bar(1.5);")).toBe("no-such-bar");
@@ -175,9 +220,11 @@ describe("evaluation rules", () => {
   });
 
   it("23: bars, beats, hits and notes of a section are those that begin in it", async () => {
-    expect(await printed(`const chorus = song.section("chorus");
+    expect(
+      await printed(`const chorus = song.section("chorus");
       console.log(chorus.start, chorus.end, chorus.bars, chorus.beats, song.hits("drums", chorus), song.notes("bells", chorus));
-      console.log(song.section("chorus", 2).start, song.sections.map(s => s.name), song.beatsPerBar, song.hits("drums").length);`)).toEqual([
+      console.log(song.section("chorus", 2).start, song.sections.map(s => s.name), song.beatsPerBar, song.hits("drums").length);`),
+    ).toEqual([
       "5 9 [5] [5, 6, 7, 8] [5, 7] [{ start: 5, beats: 1, pitch: 60 }, { start: 6, beats: 0.5, pitch: 64 }]",
       '13 ["verse", "chorus", "verse", "chorus"] 4 8',
     ]);
@@ -185,18 +232,26 @@ describe("evaluation rules", () => {
 
   it("24: waitUntil does not go back, but half a tick is no time", async () => {
     expect(await problemOf("wait(8);\nwaitUntil(4);")).toBe("already-passed");
-    expect(await printed("for (let i = 0; i < 10; i++) wait(0.1);\nwaitUntil(1); console.log(now());\nwait(1 / 3); wait(1 / 3); wait(1 / 3); waitUntil(2); console.log(now());")).toEqual(["1", "2"]);
+    expect(
+      await printed(
+        "for (let i = 0; i < 10; i++) wait(0.1);\nwaitUntil(1); console.log(now());\nwait(1 / 3); wait(1 / 3); wait(1 / 3); waitUntil(2); console.log(now());",
+      ),
+    ).toEqual(["1", "2"]);
   });
 
   it("25: names match exactly and the nearest is offered", async () => {
     const outcome = await runScript('const name = "Bakery"; square.front(name).on();');
-    expect(outcome).toMatchObject({ ok: false, problem: { code: "unknown-front", sentence: 'No front has the name "Bakery". Did you mean "bakery"?' } });
+    expect(outcome).toMatchObject({
+      ok: false,
+      problem: { code: "unknown-front", sentence: 'No front has the name "Bakery". Did you mean "bakery"?' },
+    });
     const far = await runScript('const name = "zeppelin"; square.front(name).on();');
     expect(far).toMatchObject({ ok: false, problem: { sentence: 'No front has the name "zeppelin".' } });
   });
 
   it("26: equal seeds give equal luck, other seeds other luck, equal statements other draws", async () => {
-    const source = "console.log(roll(1000), roll(1000));\nconsole.log(roll(1000), roll(1000));\nconsole.log([1, 2, 3].map(() => Math.floor(Math.random() * 1000)));";
+    const source =
+      "console.log(roll(1000), roll(1000));\nconsole.log(roll(1000), roll(1000));\nconsole.log([1, 2, 3].map(() => Math.floor(Math.random() * 1000)));";
     const once = await printed(source);
     expect(await printed(source)).toEqual(once);
     expect(await printed(source, { seed: 8 })).not.toEqual(once);
@@ -205,7 +260,11 @@ describe("evaluation rules", () => {
 
   it("27: another statement, a comment, a type or other spacing leaves a stream as it is", async () => {
     const [alone] = await printed("const a = roll(1000); console.log(a);");
-    expect(await printed("const b = roll(6);\nif (chance(50)) { wait(1); }\nconst a: number = roll( 1000 ) /* dice */; console.log(a);")).toEqual([alone]);
+    expect(
+      await printed(
+        "const b = roll(6);\nif (chance(50)) { wait(1); }\nconst a: number = roll( 1000 ) /* dice */; console.log(a);",
+      ),
+    ).toEqual([alone]);
     const body = "repeat(3, () => { console.log(roll(1000)); });";
     const edited = "repeat(3, () => { square.all.on(); console.log(roll(1000)); });";
     expect(await printed(edited)).toEqual(await printed(body));
@@ -223,12 +282,15 @@ describe("evaluation rules", () => {
   });
 
   it("28: the same front, part, light or side is the same object", async () => {
-    expect(await printed(`console.log(square.front("bakery") === square.side("north")[0], square.side("north") === square.side("north"));
-      console.log(square.parts("roof")[0] === square.front("bakery").part("roof"), square.all[0] === square.front("bakery")[0], square.all === square.all);`)).toEqual(["true true", "true true true"]);
+    expect(
+      await printed(`console.log(square.front("bakery") === square.side("north")[0], square.side("north") === square.side("north"));
+      console.log(square.parts("roof")[0] === square.front("bakery").part("roof"), square.all[0] === square.front("bakery")[0], square.all === square.all);`),
+    ).toEqual(["true true", "true true true"]);
   });
 
   it("29: a cue records the calling lines through helpers, loops, callbacks and recursion", async () => {
-    expect(await cuesOf(`function inner() {
+    expect(
+      await cuesOf(`function inner() {
   square.all.on();
 }
 function outer() {
@@ -247,7 +309,8 @@ function down(n) {
   square.all.pulse(n);
 }
 at(5, () => down(2));
-[3].forEach(beat => { wait(beat); outer(); });`)).toEqual([
+[3].forEach(beat => { wait(beat); outer(); });`),
+    ).toEqual([
       "0 on 100 all @8>5>2",
       "0 off all @8>6",
       "1 on 100 all @10>11>2",
@@ -261,12 +324,14 @@ at(5, () => down(2));
   });
 
   it("29: a call over several lines names the line of its own word, after arguments that call something", async () => {
-    expect(await cuesOf(`function level() { wait(0); return 50; }
+    expect(
+      await cuesOf(`function level() { wait(0); return 50; }
 square.all
   .on(
     level()
   )
-  .pulse(1);`)).toEqual(["0 on 50 all @3", "0 pulse +1 all @6"]);
+  .pulse(1);`),
+    ).toEqual(["0 on 50 all @3", "0 pulse +1 all @6"]);
   });
 
   it("30: a problem keeps what was written before it, marked incomplete", async () => {
@@ -286,17 +351,21 @@ square.all
     const plain = (depth: number): string => `function down(n) { if (n > 1) down(n - 1); }\ndown(${depth});`;
     expect(await problemOf(plain(100))).toBe("none");
     expect(await problemOf(plain(101))).toBe("calls-itself");
-    const through = (depth: number): string => `function down(n) { if (n > 1) repeat(1, () => down(n - 1)); }\ndown(${depth});`;
+    const through = (depth: number): string =>
+      `function down(n) { if (n > 1) repeat(1, () => down(n - 1)); }\ndown(${depth});`;
     expect(await problemOf(through(26))).toBe("none");
     expect(await problemOf(through(27))).toBe("calls-itself");
-    const native = (depth: number): string => `function down(n) { if (n > 1) [n].forEach(() => down(n - 1)); }\ndown(${depth});`;
+    const native = (depth: number): string =>
+      `function down(n) { if (n > 1) [n].forEach(() => down(n - 1)); }\ndown(${depth});`;
     expect(await problemOf(native(20))).toBe("none");
   });
 
   it("prints lights, fronts, sections, lists and objects as a reader expects", async () => {
-    expect(await printed(`console.log(square.all, square.front("bakery"), square.side("north"), square.all[0], song.section("verse"));
+    expect(
+      await printed(`console.log(square.all, square.front("bakery"), square.side("north"), square.all[0], song.section("verse"));
       console.log(0.1 + 0.2, [1, "two", [3]], { level: 50, on: true }, undefined, null, "text");
-      console.log(new Map([["a", 1]]), new Set([1, 2]), () => 1);`)).toEqual([
+      console.log(new Map([["a", 1]]), new Set([1, 2]), () => 1);`),
+    ).toEqual([
       '9 lights front "bakery" 4 lights 1 light section "verse"',
       '0.3 [1, "two", [3]] { level: 50, on: true } undefined null text',
       "{ a: 1 } [1, 2] a function",
@@ -304,7 +373,9 @@ square.all
   });
 
   it("findings of the text are told beside a good run", async () => {
-    expect(await findingsOf("for (const front of square.fronts) {\n  at(2, () => front.on());\n}")).toEqual(["same-each-turn"]);
+    expect(await findingsOf("for (const front of square.fronts) {\n  at(2, () => front.on());\n}")).toEqual([
+      "same-each-turn",
+    ]);
     expect(await findingsOf("at(song.bars, () => {\n  square.all.on();\n  wait(2);\n});")).toEqual(["last-wait"]);
     expect(await findingsOf("wait(500);")).toEqual(["long-wait"]);
   });

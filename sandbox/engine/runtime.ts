@@ -1,5 +1,12 @@
 import type { QuickJSContext, QuickJSHandle, QuickJSRuntime, QuickJSWASMModule } from "quickjs-emscripten-core";
-import { FUEL_LIMIT, GUEST_MEMORY_BYTES, GUEST_STACK_BYTES, JOBS_PER_SLICE, MAX_REPORT_LENGTH, REPORT_FUEL } from "./limits.ts";
+import {
+  FUEL_LIMIT,
+  GUEST_MEMORY_BYTES,
+  GUEST_STACK_BYTES,
+  JOBS_PER_SLICE,
+  MAX_REPORT_LENGTH,
+  REPORT_FUEL,
+} from "./limits.ts";
 import type { GuestReport, GuestTables } from "./guest.ts";
 import { LIBRARY } from "./library.generated.ts";
 
@@ -66,9 +73,14 @@ export class GuestRuntime {
     const text = this.#context.newString(JSON.stringify(tables));
     this.#must(this.#context.callFunction(this.#context.getProp(library, "open"), this.#context.undefined, text));
     const compiled = this.#context.evalCode(code, "script.js");
-    if (compiled.error) return { end: "unreadable", details: this.#describe(compiled.error), report: null, buffer: null, fuel: 0 };
+    if (compiled.error)
+      return { end: "unreadable", details: this.#describe(compiled.error), report: null, buffer: null, fuel: 0 };
     this.#startFuel(FUEL_LIMIT);
-    const ran = this.#context.callFunction(this.#context.getProp(library, "run"), this.#context.undefined, compiled.value);
+    const ran = this.#context.callFunction(
+      this.#context.getProp(library, "run"),
+      this.#context.undefined,
+      compiled.value,
+    );
     const jobsDone = !ran.error && this.#drainJobs();
     const fuel = Math.min(this.#polls, FUEL_LIMIT);
     const isOut = this.#polls > FUEL_LIMIT;

@@ -7,7 +7,11 @@ import type { RunOutcome } from "./model.ts";
  * it names no line and holds no timeline. `code`: "too-much-work" when time was up, "could-not-run"
  * when the worker itself failed.
  */
-export function createStoppedOutcome(source: string, code: Extract<ProblemCode, "too-much-work" | "could-not-run">, details: string): RunOutcome {
+export function createStoppedOutcome(
+  source: string,
+  code: Extract<ProblemCode, "too-much-work" | "could-not-run">,
+  details: string,
+): RunOutcome {
   const [firstLine = ""] = source.split("\n");
   const range = { line: 1, column: 1, endLine: 1, endColumn: 1 };
   const problem = createProblem(code, {}, { range, excerpt: firstLine.slice(0, 60), details });

@@ -70,7 +70,13 @@ function whatEnds(text: string, { at, open }: Opener): string {
 }
 
 function missing(text: string, opener: Opener): BracketFault {
-  return { kind: "missing", at: opener.at, open: opener.open, close: CLOSERS[opener.open] ?? "", what: whatEnds(text, opener) };
+  return {
+    kind: "missing",
+    at: opener.at,
+    open: opener.open,
+    close: CLOSERS[opener.open] ?? "",
+    what: whatEnds(text, opener),
+  };
 }
 
 /** Of braces left open, the one whose lines step back without a `}`: that is the one that was forgotten. */
@@ -83,7 +89,9 @@ function forgottenBrace(text: string, tokens: readonly Token[]): Opener | null {
     previousLine = line;
     if (isFirst && token.text !== "}" && token.text !== ")" && token.text !== "]") {
       const indent = indentOf(text, token.at);
-      const stale = stack.findLast((opener) => opener.open === "{" && indentOf(text, opener.at) >= indent && lineStart(text, opener.at) < line);
+      const stale = stack.findLast(
+        (opener) => opener.open === "{" && indentOf(text, opener.at) >= indent && lineStart(text, opener.at) < line,
+      );
       if (stale !== undefined) return stale;
     }
     if (token.text === "{") stack.push({ at: token.at, open: "{", isForHead: false });
@@ -104,11 +112,13 @@ export function findBracketFault(text: string): BracketFault | null {
   let previous = "";
   for (const token of tokens) {
     const top = stack.at(-1);
-    if (Object.hasOwn(CLOSERS, token.text)) stack.push({ at: token.at, open: token.text, isForHead: token.text === "(" && previous === "for" });
+    if (Object.hasOwn(CLOSERS, token.text))
+      stack.push({ at: token.at, open: token.text, isForHead: token.text === "(" && previous === "for" });
     else if (token.text === ";" && top !== undefined && top.open !== "{" && !top.isForHead) return missing(text, top);
     else if (Object.hasOwn(OPENERS, token.text)) {
       if (top === undefined) return extra(token);
-      if (top.open !== OPENERS[token.text]) return missing(text, top.open === "{" ? (forgottenBrace(text, tokens) ?? top) : top);
+      if (top.open !== OPENERS[token.text])
+        return missing(text, top.open === "{" ? (forgottenBrace(text, tokens) ?? top) : top);
       stack.pop();
     }
     previous = token.text;

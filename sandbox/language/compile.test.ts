@@ -7,7 +7,9 @@ import { letterDistance, near } from "./near-name.ts";
 import { normaliseSource, utf8Length } from "./source.ts";
 
 const SAMPLES = new URL("../../tests/samples/", import.meta.url);
-const sources = readdirSync(SAMPLES).filter((file) => file.endsWith(".ts") && !file.endsWith(".test.ts")).map((file) => readFileSync(new URL(file, SAMPLES), "utf8"));
+const sources = readdirSync(SAMPLES)
+  .filter((file) => file.endsWith(".ts") && !file.endsWith(".test.ts"))
+  .map((file) => readFileSync(new URL(file, SAMPLES), "utf8"));
 
 /** A sample with a stretch taken out, doubled, or replaced by signs that scripts are made of. */
 const mutated = fc
@@ -15,14 +17,48 @@ const mutated = fc
     source: fc.constantFrom(...sources),
     at: fc.double({ min: 0, max: 1, noNaN: true }),
     length: fc.nat(12),
-    put: fc.array(fc.constantFrom("(", ")", "{", "}", "[", "]", ";", ",", "=>", "=", " ", "\n", '"', "`", "${", "wait", "square", ".on", "1", "/", "//", "async ", "@", "?.", "...", "🎄"), { maxLength: 4 }),
+    put: fc.array(
+      fc.constantFrom(
+        "(",
+        ")",
+        "{",
+        "}",
+        "[",
+        "]",
+        ";",
+        ",",
+        "=>",
+        "=",
+        " ",
+        "\n",
+        '"',
+        "`",
+        "${",
+        "wait",
+        "square",
+        ".on",
+        "1",
+        "/",
+        "//",
+        "async ",
+        "@",
+        "?.",
+        "...",
+        "🎄",
+      ),
+      { maxLength: 4 },
+    ),
   })
   .map(({ source, at, length, put }) => {
     const start = Math.floor(at * source.length);
     return source.slice(0, start) + put.join("") + source.slice(start + length);
   });
 
-const anything = fc.oneof(fc.string({ unit: "binary", maxLength: 200 }), fc.string({ unit: "grapheme", maxLength: 200 }), mutated);
+const anything = fc.oneof(
+  fc.string({ unit: "binary", maxLength: 200 }),
+  fc.string({ unit: "grapheme", maxLength: 200 }),
+  mutated,
+);
 
 describe("compileScript", () => {
   it("never throws, and a problem lies inside the script", () => {
@@ -77,11 +113,18 @@ describe("normaliseSource", () => {
   });
 
   it("is settled after one time", () => {
-    fc.assert(fc.property(fc.string({ unit: "binary" }), (text) => normaliseSource(normaliseSource(text)) === normaliseSource(text)));
+    fc.assert(
+      fc.property(
+        fc.string({ unit: "binary" }),
+        (text) => normaliseSource(normaliseSource(text)) === normaliseSource(text),
+      ),
+    );
   });
 
   it("counts bytes as an encoder does", () => {
-    fc.assert(fc.property(fc.string({ unit: "binary" }), (text) => utf8Length(text) === new TextEncoder().encode(text).length));
+    fc.assert(
+      fc.property(fc.string({ unit: "binary" }), (text) => utf8Length(text) === new TextEncoder().encode(text).length),
+    );
   });
 });
 

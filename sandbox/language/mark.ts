@@ -279,7 +279,8 @@ class Marker {
 }
 
 function isTypeOnly(node: ts.Node): boolean {
-  if (ts.isInterfaceDeclaration(node) || ts.isTypeAliasDeclaration(node) || ts.isTypeParameterDeclaration(node)) return true;
+  if (ts.isInterfaceDeclaration(node) || ts.isTypeAliasDeclaration(node) || ts.isTypeParameterDeclaration(node))
+    return true;
   return ts.isTypeNode(node) && !ts.isExpressionWithTypeArguments(node);
 }
 
@@ -294,7 +295,11 @@ function ownerOf(node: ts.CallExpression): ts.Expression | null {
 }
 
 /** The statement that begins with this call's owner, or null. */
-function statementAt(node: ts.CallExpression, owner: ts.Expression, file: ts.SourceFile): ts.ExpressionStatement | null {
+function statementAt(
+  node: ts.CallExpression,
+  owner: ts.Expression,
+  file: ts.SourceFile,
+): ts.ExpressionStatement | null {
   let top: ts.Node = node;
   while (!ts.isStatement(top) && !ts.isFunctionLike(top)) {
     if (ts.isElementAccessExpression(top) && isUsedItem(top)) return null;
@@ -307,7 +312,8 @@ function statementAt(node: ts.CallExpression, owner: ts.Expression, file: ts.Sou
 /** Whether the script goes on to use what it finds at a place of a list. */
 function isUsedItem(node: ts.ElementAccessExpression): boolean {
   const { parent } = node;
-  const isOwner = (ts.isPropertyAccessExpression(parent) || ts.isElementAccessExpression(parent)) && parent.expression === node;
+  const isOwner =
+    (ts.isPropertyAccessExpression(parent) || ts.isElementAccessExpression(parent)) && parent.expression === node;
   if (!isOwner || parent.questionDotToken !== undefined || ts.isOptionalChain(node)) return false;
   return node.expression.kind !== ts.SyntaxKind.SuperKeyword && !ts.isStringLiteralLike(node.argumentExpression);
 }
@@ -321,7 +327,8 @@ function bracketOf(node: ts.ElementAccessExpression, file: ts.SourceFile): numbe
 function findSign(sign: string, from: number, file: ts.SourceFile): number {
   const scanner = ts.createScanner(ts.ScriptTarget.ES2022, true, ts.LanguageVariant.Standard, file.text);
   scanner.setTextPos(from);
-  while (scanner.scan() !== ts.SyntaxKind.EndOfFileToken) if (scanner.getTokenText() === sign) return scanner.getTokenStart();
+  while (scanner.scan() !== ts.SyntaxKind.EndOfFileToken)
+    if (scanner.getTokenText() === sign) return scanner.getTokenStart();
   return from;
 }
 

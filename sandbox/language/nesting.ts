@@ -81,8 +81,10 @@ function weightOf(node: ts.Node): number {
 
 /** The operand at which a chain goes on to the left: parsed in a loop, not by nesting. */
 function leftOperand(node: ts.Node): ts.Node | undefined {
-  if (ts.isPropertyAccessExpression(node) || ts.isCallExpression(node) || ts.isElementAccessExpression(node)) return node.expression;
-  if (ts.isNonNullExpression(node) || ts.isAsExpression(node) || ts.isPostfixUnaryExpression(node)) return leftOfPostfix(node);
+  if (ts.isPropertyAccessExpression(node) || ts.isCallExpression(node) || ts.isElementAccessExpression(node))
+    return node.expression;
+  if (ts.isNonNullExpression(node) || ts.isAsExpression(node) || ts.isPostfixUnaryExpression(node))
+    return leftOfPostfix(node);
   if (ts.isBinaryExpression(node)) return node.left;
   return undefined;
 }

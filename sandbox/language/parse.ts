@@ -8,7 +8,9 @@ export function parseScript(text: string): ts.SourceFile {
 
 /** What the parser could not read. The compiler keeps these in a field that its types do not name. */
 export function parserDiagnostics(file: ts.SourceFile): readonly ts.DiagnosticWithLocation[] {
-  return (file as unknown as { readonly parseDiagnostics?: readonly ts.DiagnosticWithLocation[] }).parseDiagnostics ?? [];
+  return (
+    (file as unknown as { readonly parseDiagnostics?: readonly ts.DiagnosticWithLocation[] }).parseDiagnostics ?? []
+  );
 }
 
 /** The text without types: blanks stand in their place, so that lines and columns stay exact. */

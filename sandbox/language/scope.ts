@@ -61,9 +61,15 @@ export function readScopes(file: ts.SourceFile): Scopes {
     else same.push(declaration);
   };
 
-  const addBinding = (name: ts.BindingName, kind: DeclarationKind, scope: ts.Node, value: ts.Node | undefined): void => {
+  const addBinding = (
+    name: ts.BindingName,
+    kind: DeclarationKind,
+    scope: ts.Node,
+    value: ts.Node | undefined,
+  ): void => {
     if (ts.isIdentifier(name)) return add(name, kind, scope, value);
-    for (const element of name.elements) if (ts.isBindingElement(element)) addBinding(element.name, kind, scope, undefined);
+    for (const element of name.elements)
+      if (ts.isBindingElement(element)) addBinding(element.name, kind, scope, undefined);
   };
 
   const visit = (node: ts.Node): void => {
@@ -72,11 +78,14 @@ export function readScopes(file: ts.SourceFile): Scopes {
       const kind = flags === ts.NodeFlags.Let ? "let" : flags === 0 ? "var" : "const";
       addBinding(node.name, kind, kind === "var" ? functionScopeOf(node) : scopeOf(node.parent), node.initializer);
     } else if (ts.isParameter(node)) addBinding(node.name, "parameter", scopeOf(node.parent), undefined);
-    else if (ts.isFunctionDeclaration(node) && node.name !== undefined) add(node.name, "function", scopeOf(node.parent), node);
+    else if (ts.isFunctionDeclaration(node) && node.name !== undefined)
+      add(node.name, "function", scopeOf(node.parent), node);
     else if (ts.isFunctionExpression(node) && node.name !== undefined) add(node.name, "other", node, node);
-    else if (ts.isClassDeclaration(node) && node.name !== undefined) add(node.name, "class", scopeOf(node.parent), node);
+    else if (ts.isClassDeclaration(node) && node.name !== undefined)
+      add(node.name, "class", scopeOf(node.parent), node);
     else if (ts.isClassExpression(node) && node.name !== undefined) add(node.name, "other", node, node);
-    else if (ts.isTypeAliasDeclaration(node) || ts.isInterfaceDeclaration(node)) add(node.name, "type", scopeOf(node.parent), undefined);
+    else if (ts.isTypeAliasDeclaration(node) || ts.isInterfaceDeclaration(node))
+      add(node.name, "type", scopeOf(node.parent), undefined);
     else if (ts.isTypeParameterDeclaration(node)) add(node.name, "type", scopeOf(node.parent), undefined);
     ts.forEachChild(node, visit);
   };
@@ -111,8 +120,15 @@ export function isVariableUse(node: ts.Identifier): boolean {
   if (ts.isEnumMember(parent)) return parent.initializer === node;
   if (ts.isClassLike(parent) || ts.isInterfaceDeclaration(parent) || ts.isTypeAliasDeclaration(parent)) return false;
   if (ts.isLabeledStatement(parent) || ts.isBreakOrContinueStatement(parent)) return false;
-  if (ts.isExpressionWithTypeArguments(parent)) return ts.isHeritageClause(parent.parent) && ts.isClassLike(parent.parent.parent);
+  if (ts.isExpressionWithTypeArguments(parent))
+    return ts.isHeritageClause(parent.parent) && ts.isClassLike(parent.parent.parent);
   if (ts.isTypeNode(parent) || ts.isTypeParameterDeclaration(parent) || ts.isTypeElement(parent)) return false;
   if (ts.isQualifiedName(parent) || ts.isModuleDeclaration(parent) || ts.isEnumDeclaration(parent)) return false;
-  return !ts.isImportSpecifier(parent) && !ts.isImportClause(parent) && !ts.isExportSpecifier(parent) && !ts.isNamespaceImport(parent) && !ts.isMetaProperty(parent);
+  return (
+    !ts.isImportSpecifier(parent) &&
+    !ts.isImportClause(parent) &&
+    !ts.isExportSpecifier(parent) &&
+    !ts.isNamespaceImport(parent) &&
+    !ts.isMetaProperty(parent)
+  );
 }

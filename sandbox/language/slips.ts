@@ -20,7 +20,13 @@ function isRepeated(node: ts.Node): boolean {
 /** `at(2, ...)` in a loop: beat 2 of the song each time. */
 function isSameEachTurn(node: ts.CallExpression): boolean {
   const [when] = node.arguments;
-  return ts.isIdentifier(node.expression) && node.expression.text === "at" && when !== undefined && ts.isNumericLiteral(when) && isRepeated(node);
+  return (
+    ts.isIdentifier(node.expression) &&
+    node.expression.text === "at" &&
+    when !== undefined &&
+    ts.isNumericLiteral(when) &&
+    isRepeated(node)
+  );
 }
 
 /** The last statement of an action, when it is a plain `wait(...)`. */
@@ -29,13 +35,22 @@ function lastWait(action: ts.Expression | undefined): ts.Node | null {
   const { body } = action;
   const last = ts.isBlock(body) ? body.statements.at(-1) : body;
   const call = last !== undefined && ts.isExpressionStatement(last) ? last.expression : last;
-  return call !== undefined && ts.isCallExpression(call) && ts.isIdentifier(call.expression) && call.expression.text === "wait" ? call : null;
+  return call !== undefined &&
+    ts.isCallExpression(call) &&
+    ts.isIdentifier(call.expression) &&
+    call.expression.text === "wait"
+    ? call
+    : null;
 }
 
 /** What the text alone gives away: likely slips that stop nothing, in the order of their lines. */
 export function findSlips(file: ts.SourceFile): readonly Finding[] {
   const findings: Finding[] = [];
-  const add = (rule: "same-each-turn" | "last-wait", node: ts.Node, values: { readonly [name: string]: string }): void => {
+  const add = (
+    rule: "same-each-turn" | "last-wait",
+    node: ts.Node,
+    values: { readonly [name: string]: string },
+  ): void => {
     const line = file.getLineAndCharacterOfPosition(node.getStart(file)).line + 1;
     findings.push(createFinding(rule, values, { lines: [line] }));
   };

@@ -89,7 +89,9 @@ export class StreamTable {
       counts.set(tokens, count);
       const text = `${count} ${tokens}`;
       this.#indexOf.set(statement, this.streams.length);
-      this.streams.push({ key: [hash32(text, 0x81_1c_9d_c5), hash32(text, 0x9e_37_79_b9), hash32(text, 0x7f_4a_7c_15)] });
+      this.streams.push({
+        key: [hash32(text, 0x81_1c_9d_c5), hash32(text, 0x9e_37_79_b9), hash32(text, 0x7f_4a_7c_15)],
+      });
     }
   }
 

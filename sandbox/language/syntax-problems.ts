@@ -21,11 +21,30 @@ const RESERVED_VARIABLE = 1389;
 const UNEXPECTED_WORD = 1434;
 const UNKNOWN_KEYWORD = 1435;
 
-const KEYWORDS = ["let", "const", "function", "for", "if", "else", "while", "return", "switch", "case", "break", "class", "new", "throw", "continue", "default"];
+const KEYWORDS = [
+  "let",
+  "const",
+  "function",
+  "for",
+  "if",
+  "else",
+  "while",
+  "return",
+  "switch",
+  "case",
+  "break",
+  "class",
+  "new",
+  "throw",
+  "continue",
+  "default",
+];
 
 /** Words of TypeScript that can not be names. */
 const RESERVED: ReadonlySet<string> = new Set(
-  "break case catch class const continue debugger default delete do else enum export extends false finally for function if import in instanceof new null return super switch this throw true try typeof var void while with".split(" "),
+  "break case catch class const continue debugger default delete do else enum export extends false finally for function if import in instanceof new null return super switch this throw true try typeof var void while with".split(
+    " ",
+  ),
 );
 
 interface Explanation {
@@ -55,7 +74,8 @@ function here(fault: Fault, code: ProblemCode, values: SentenceValues = {}): Exp
   return { code, values, start: fault.start, end: fault.end };
 }
 
-const curlyQuotes: Explain = (fault) => (fault.code === INVALID_CHARACTER && /^[“”‘’„«»`]/.test(fault.after) ? here(fault, "curly-quotes") : null);
+const curlyQuotes: Explain = (fault) =>
+  fault.code === INVALID_CHARACTER && /^[“”‘’„«»`]/.test(fault.after) ? here(fault, "curly-quotes") : null;
 
 const missingQuote: Explain = (fault) => {
   if (fault.code !== UNTERMINATED_TEXT && fault.code !== UNTERMINATED_TEMPLATE) return null;
@@ -67,7 +87,12 @@ const missingQuote: Explain = (fault) => {
     return { code: "missing-quote", values: { quote: "`" }, start: Math.max(0, start), end: fault.start };
   }
   const quoteAt = Math.max(openQuote(line), 0);
-  return { code: "missing-quote", values: { quote: line.charAt(quoteAt) || '"' }, start: lineStart + quoteAt, end: fault.start };
+  return {
+    code: "missing-quote",
+    values: { quote: line.charAt(quoteAt) || '"' },
+    start: lineStart + quoteAt,
+    end: fault.start,
+  };
 };
 
 /** Offset of the quote that is still open at the end of a line, or -1. */
@@ -82,7 +107,8 @@ function openQuote(line: string): number {
   return open;
 }
 
-const elseAlone: Explain = (fault) => (fault.code === STATEMENT_EXPECTED && fault.token === "else" ? here(fault, "else-alone") : null);
+const elseAlone: Explain = (fault) =>
+  fault.code === STATEMENT_EXPECTED && fault.token === "else" ? here(fault, "else-alone") : null;
 
 const numberFirst: Explain = (fault) => {
   const made = madeName(fault);
@@ -99,10 +125,13 @@ function madeName({ before, after, start }: Fault): { readonly text: string; rea
 }
 
 const reservedName: Explain = (fault) => {
-  if (fault.code === RESERVED_WORD || fault.code === RESERVED_VARIABLE) return here(fault, "taken-word", { name: fault.token });
+  if (fault.code === RESERVED_WORD || fault.code === RESERVED_VARIABLE)
+    return here(fault, "taken-word", { name: fault.token });
   const made = madeName(fault);
   const name = /^\w+/.exec(made.text)?.[0] ?? "";
-  return RESERVED.has(name) ? { code: "taken-word", values: { name }, start: made.at, end: made.at + name.length } : null;
+  return RESERVED.has(name)
+    ? { code: "taken-word", values: { name }, start: made.at, end: made.at + name.length }
+    : null;
 };
 
 const unquotedName: Explain = ({ text, start }) => {
@@ -121,7 +150,9 @@ const unquotedName: Explain = ({ text, start }) => {
 const splitName: Explain = (fault) => {
   if (fault.code !== SIGN_EXPECTED) return null;
   const made = /\b(?:let|const|function)\s+([\w$]+)\s*$/.exec(fault.before);
-  return made !== null && /^[-\w]/.test(fault.after) ? { ...here(fault, "name-with-space"), start: fault.start - (made[0].length - made[0].indexOf(made[1] ?? "")) } : null;
+  return made !== null && /^[-\w]/.test(fault.after)
+    ? { ...here(fault, "name-with-space"), start: fault.start - (made[0].length - made[0].indexOf(made[1] ?? "")) }
+    : null;
 };
 
 const misspeltKeyword: Explain = (fault) => {
@@ -132,17 +163,27 @@ const misspeltKeyword: Explain = (fault) => {
     if (candidate === undefined || KEYWORDS.includes(candidate)) continue;
     const meant = near(candidate, KEYWORDS);
     if (meant === null) continue;
-    const start = candidate === fault.token ? fault.start : fault.start - (/([A-Za-z]+)\s*$/.exec(fault.before)?.[0].length ?? 0);
+    const start =
+      candidate === fault.token ? fault.start : fault.start - (/([A-Za-z]+)\s*$/.exec(fault.before)?.[0].length ?? 0);
     return { code: "unknown-word", values: { name: candidate, meant }, start, end: start + candidate.length };
   }
   return null;
 };
 
-const missingName: Explain = (fault) => (fault.code === IDENTIFIER_EXPECTED && /\b(let|const|function|class)\s*$|\.\s*$/.test(fault.before) ? here(fault, "missing-name") : null);
+const missingName: Explain = (fault) =>
+  fault.code === IDENTIFIER_EXPECTED && /\b(let|const|function|class)\s*$|\.\s*$/.test(fault.before)
+    ? here(fault, "missing-name")
+    : null;
 
-const twoSteps: Explain = (fault) => (fault.code === SIGN_EXPECTED && fault.message.startsWith("';'") && fault.before.trim() !== "" ? here(fault, "two-steps") : null);
+const twoSteps: Explain = (fault) =>
+  fault.code === SIGN_EXPECTED && fault.message.startsWith("';'") && fault.before.trim() !== ""
+    ? here(fault, "two-steps")
+    : null;
 
-const missingComma: Explain = (fault) => (fault.code === SIGN_EXPECTED && /^["'`\w]/.test(fault.after) && /["'\w)\]}]\s*$/.test(fault.before) ? here(fault, "missing-comma") : null);
+const missingComma: Explain = (fault) =>
+  fault.code === SIGN_EXPECTED && /^["'`\w]/.test(fault.after) && /["'\w)\]}]\s*$/.test(fault.before)
+    ? here(fault, "missing-comma")
+    : null;
 
 const EXPLAINERS: readonly Explain[] = [curlyQuotes, missingQuote, elseAlone, numberFirst, reservedName, unquotedName];
 const AFTER_BRACKETS: readonly Explain[] = [splitName, misspeltKeyword, missingName, twoSteps, missingComma];
@@ -157,7 +198,12 @@ function explain(fault: Fault): Explanation {
   if (bracket !== null) {
     const { open, close, what, at } = bracket;
     const line = fault.text.slice(0, at).split("\n").length;
-    return { code: bracket.kind === "missing" ? "missing-bracket" : "extra-bracket", values: { open, close, what, line }, start: at, end: at + 1 };
+    return {
+      code: bracket.kind === "missing" ? "missing-bracket" : "extra-bracket",
+      values: { open, close, what, line },
+      start: at,
+      end: at + 1,
+    };
   }
   for (const attempt of AFTER_BRACKETS) {
     const found = attempt(fault);

@@ -54,7 +54,19 @@ export const LIGHTS_MEMBERS = [
 ] as const;
 
 export const SQUARE_MEMBERS = ["all", "fronts", "front", "side", "parts"] as const;
-export const SONG_MEMBERS = ["start", "end", "bars", "beats", "beatsPerBar", "bar", "section", "sections", "hits", "notes", "howLoud"] as const;
+export const SONG_MEMBERS = [
+  "start",
+  "end",
+  "bars",
+  "beats",
+  "beatsPerBar",
+  "bar",
+  "section",
+  "sections",
+  "hits",
+  "notes",
+  "howLoud",
+] as const;
 
 /** Globals of TypeScript that are in; `null`, `true` and the like are not names. */
 export const ALLOWED_GLOBALS: ReadonlySet<string> = new Set([
@@ -111,7 +123,14 @@ export const FOREIGN_GLOBALS: { readonly [name: string]: string } = {
 };
 
 /** Real-time waits of other places. */
-export const TIMERS: ReadonlySet<string> = new Set(["setTimeout", "setInterval", "requestAnimationFrame", "queueMicrotask", "clearTimeout", "clearInterval"]);
+export const TIMERS: ReadonlySet<string> = new Set([
+  "setTimeout",
+  "setInterval",
+  "requestAnimationFrame",
+  "queueMicrotask",
+  "clearTimeout",
+  "clearInterval",
+]);
 
 /** The parameters that take a name, and what it is the name of. */
 export const NAME_PARAMETERS: { readonly [word: string]: { readonly argument: number; readonly kind: NameKind } } = {

@@ -35,7 +35,12 @@ const LOOKS_PER_BEAT = 4;
 const LONG_FADE_TICKS = TICKS_PER_BEAT / 2;
 
 /** Gives what happens in each span of ticks (start, end outside). Spans may be in any order. */
-export function measureSpans(timeline: Timeline, lights: readonly Light[], tracks: Tracks, spans: readonly (readonly [number, number])[]): readonly Activity[] {
+export function measureSpans(
+  timeline: Timeline,
+  lights: readonly Light[],
+  tracks: Tracks,
+  spans: readonly (readonly [number, number])[],
+): readonly Activity[] {
   const cursor = createLightsCursor(timeline, lights, tracks);
   const shares = lights.map((light) => 1 / (light.pixels ?? 1));
   const total = shares.reduce((sum, share) => sum + share, 0) || 1;
@@ -60,7 +65,8 @@ export function measureSpans(timeline: Timeline, lights: readonly Light[], track
       }
       perLook.push(sum / total);
     }
-    const mean = (values: readonly number[]) => values.reduce((sum, value) => sum + value, 0) / Math.max(1, values.length);
+    const mean = (values: readonly number[]) =>
+      values.reduce((sum, value) => sum + value, 0) / Math.max(1, values.length);
     const all = [...sides.values()].reduce((sum, value) => sum + value, 0) || 1;
     const lightFirst = mean(perLook.slice(0, LOOKS_PER_BEAT));
     const lightLast = mean(perLook.slice(-LOOKS_PER_BEAT));
@@ -85,7 +91,14 @@ interface Step {
   readonly fronts: Set<number>;
 }
 
-function findMovement(timeline: Timeline, lights: readonly Light[], start: number, end: number, isLit: boolean, perLook: readonly number[]): { readonly movement: Movement; readonly steps: number } {
+function findMovement(
+  timeline: Timeline,
+  lights: readonly Light[],
+  start: number,
+  end: number,
+  isLit: boolean,
+  perLook: readonly number[],
+): { readonly movement: Movement; readonly steps: number } {
   const { cues, selections } = timeline;
   const steps: Step[] = [];
   let faded = 0;
@@ -93,7 +106,9 @@ function findMovement(timeline: Timeline, lights: readonly Light[], start: numbe
   for (let cue = firstCueAt(cues.tick, cues.count, start); cue < cues.count && (cues.tick[cue] ?? 0) < end; cue++) {
     const action = cues.action[cue];
     const isFade = action === ACTION_CODE.fadeTo && (cues.length[cue] ?? 0) >= LONG_FADE_TICKS;
-    const isLighting = action === ACTION_CODE.pulse || ((action === ACTION_CODE.on || action === ACTION_CODE.fadeTo) && (cues.level[cue] ?? 0) > 0);
+    const isLighting =
+      action === ACTION_CODE.pulse ||
+      ((action === ACTION_CODE.on || action === ACTION_CODE.fadeTo) && (cues.level[cue] ?? 0) > 0);
     if (!isLighting && !isFade) continue;
     const selected = selections[cues.selection[cue] ?? 0] ?? [];
     changed += selected.length;
@@ -109,7 +124,13 @@ function findMovement(timeline: Timeline, lights: readonly Light[], start: numbe
   return { movement: nameMovement(steps, isLit, faded > changed / 2, lights, perLook), steps: steps.length };
 }
 
-function nameMovement(steps: readonly Step[], isLit: boolean, isFading: boolean, lights: readonly Light[], perLook: readonly number[]): Movement {
+function nameMovement(
+  steps: readonly Step[],
+  isLit: boolean,
+  isFading: boolean,
+  lights: readonly Light[],
+  perLook: readonly number[],
+): Movement {
   if (!isLit) return "dark";
   if (steps.length === 0) return Math.max(...perLook) - Math.min(...perLook) > 0.03 ? "fading" : "steady";
   const frontCount = new Set(lights.map((light) => light.frontIndex)).size;
@@ -117,7 +138,8 @@ function nameMovement(steps: readonly Step[], isLit: boolean, isFading: boolean,
   const small = steps.filter(isSmall);
   if (small.length < 2 || small.length < steps.length * 0.6) return isFading ? "fading" : "together";
   let neighbours = 0;
-  for (let step = 1; step < small.length; step++) if (areNeighbours(small[step - 1], small[step], frontCount)) neighbours++;
+  for (let step = 1; step < small.length; step++)
+    if (areNeighbours(small[step - 1], small[step], frontCount)) neighbours++;
   return neighbours >= (small.length - 1) * 0.6 ? "in-turn" : "scattered";
 }
 

@@ -61,12 +61,19 @@ export function buildTimeline(head: TimelineHead, written: Iterable<WrittenCue>)
 /** Typed arrays wrap numbers that do not fit without a word, so they are looked at before. */
 function assertWritten({ tick, lights, level = 0, length = 0, colour = 0 }: WrittenCue, index: number): void {
   const isWhole = (value: number, most: number) => Number.isInteger(value) && value >= 0 && value <= most;
-  if (!isWhole(tick, 0xff_ff_ff_ff)) throw new TimelineFormatError(`Cue ${index} has the tick ${tick}; it has to be a whole number of 32 bits.`);
-  if (!isWhole(level, FULL_LEVEL)) throw new TimelineFormatError(`Cue ${index} has the level ${level}; it has to be a whole number up to ${FULL_LEVEL}.`);
-  if (!isWhole(length, 0xff_ff_ff_ff)) throw new TimelineFormatError(`Cue ${index} has the length ${length}; it has to be a whole number of 32 bits.`);
-  if (!isWhole(colour, 0xff_ff_ff) && colour !== NO_COLOUR) throw new TimelineFormatError(`Cue ${index} has a colour of more than 24 bits.`);
+  if (!isWhole(tick, 0xff_ff_ff_ff))
+    throw new TimelineFormatError(`Cue ${index} has the tick ${tick}; it has to be a whole number of 32 bits.`);
+  if (!isWhole(level, FULL_LEVEL))
+    throw new TimelineFormatError(
+      `Cue ${index} has the level ${level}; it has to be a whole number up to ${FULL_LEVEL}.`,
+    );
+  if (!isWhole(length, 0xff_ff_ff_ff))
+    throw new TimelineFormatError(`Cue ${index} has the length ${length}; it has to be a whole number of 32 bits.`);
+  if (!isWhole(colour, 0xff_ff_ff) && colour !== NO_COLOUR)
+    throw new TimelineFormatError(`Cue ${index} has a colour of more than 24 bits.`);
   for (let i = 0; i < lights.length; i++)
-    if (!isWhole(lights[i] ?? -1, MAX_LIGHTS - 1)) throw new TimelineFormatError(`Cue ${index} names the light ${lights[i]}; light indexes have 16 bits.`);
+    if (!isWhole(lights[i] ?? -1, MAX_LIGHTS - 1))
+      throw new TimelineFormatError(`Cue ${index} names the light ${lights[i]}; light indexes have 16 bits.`);
 }
 
 /** Keeps each distinct list of numbers once and gives its index. */

@@ -11,7 +11,15 @@ import { parseTimelineJson, timelineToJson } from "./json.ts";
 import type { Timeline } from "./model.ts";
 
 const layout = buildFront("relay", "dimmer", { kind: "colour" }, 4);
-const head = { language: 1, songId: "song-a", layoutHash: "0f", seed: 0xff_ff_ff_ff, lightCount: 7, endTick: 30_720, isComplete: true };
+const head = {
+  language: 1,
+  songId: "song-a",
+  layoutHash: "0f",
+  seed: 0xff_ff_ff_ff,
+  lightCount: 7,
+  endTick: 30_720,
+  isComplete: true,
+};
 
 const lights = fc.shuffledSubarray([0, 1, 2, 3, 4, 5, 6], { minLength: 1 });
 const line = fc.array(fc.integer({ min: 1, max: 400 }), { minLength: 1, maxLength: 4 });
@@ -23,14 +31,32 @@ const written: fc.Arbitrary<WrittenCue> = fc.oneof(
   fc.record({ tick, action: fc.constant("on" as const), lights, level, chain: line }),
   fc.record({ tick, action: fc.constant("off" as const), lights, chain: line }),
   fc.record({ tick, action: fc.constant("fadeTo" as const), lights, level, length, chain: line }),
-  fc.record({ tick, action: fc.constant("pulse" as const), lights, length, colour: fc.option(rgb, { nil: undefined }), chain: line }),
+  fc.record({
+    tick,
+    action: fc.constant("pulse" as const),
+    lights,
+    length,
+    colour: fc.option(rgb, { nil: undefined }),
+    chain: line,
+  }),
   fc.record({ tick, action: fc.constant("colour" as const), lights, length, colour: rgb, chain: line }),
 );
 const timelines = fc
-  .record({ cues: fc.array(written, { maxLength: 60 }), isComplete: fc.boolean(), seed: fc.integer({ min: 0, max: 0xff_ff_ff_ff }) })
+  .record({
+    cues: fc.array(written, { maxLength: 60 }),
+    isComplete: fc.boolean(),
+    seed: fc.integer({ min: 0, max: 0xff_ff_ff_ff }),
+  })
   .map(({ cues, ...rest }) => buildTimeline({ ...head, ...rest }, cues));
 
-const sample = buildShow(layout, [on(0, [0, 1, 2], 50, 3), pulse(1, [2, 1], 0.5, 0xff_d7_00, [2, 9]), pulse(1, [1, 2], 0.5, undefined, [2, 9]), fadeTo(2, 3, 12.5, 4, 5), colour(3, [4, 5], 0, 1, 6), off(4, [0, 1, 2], 3)]);
+const sample = buildShow(layout, [
+  on(0, [0, 1, 2], 50, 3),
+  pulse(1, [2, 1], 0.5, 0xff_d7_00, [2, 9]),
+  pulse(1, [1, 2], 0.5, undefined, [2, 9]),
+  fadeTo(2, 3, 12.5, 4, 5),
+  colour(3, [4, 5], 0, 1, 6),
+  off(4, [0, 1, 2], 3),
+]);
 
 describe("buildTimeline", () => {
   it("sorts by tick and keeps the order written within one", () => {
@@ -53,7 +79,9 @@ describe("buildTimeline", () => {
     ["a level above 100", { level: 10_001 }, "level 10001"],
     ["line 0", { chain: [0] }, "A line of chain 0 is 0"],
   ])("refuses %s", (_, change, message) => {
-    expect(() => buildTimeline(head, [{ tick: 0, action: "on", lights: [0], level: 1, chain: [1], ...change }])).toThrow(message);
+    expect(() =>
+      buildTimeline(head, [{ tick: 0, action: "on", lights: [0], level: 1, chain: [1], ...change }]),
+    ).toThrow(message);
   });
 });
 
@@ -125,11 +153,29 @@ describe("the JSON twin", () => {
     [null, "The timeline has to be an object."],
     [{}, '"format" has to be "duskbell-timeline".'],
     [{ ...timelineToJson(sample), version: 2 }, '"version" has to be 1.'],
-    [{ ...timelineToJson(sample), selections: [[-1]] }, '"selections[0][0]" has to be a whole number of at most 32 bits.'],
-    [{ ...timelineToJson(sample), cues: [{ tick: 0, action: "glow" }] }, '"cues[0].action" has to be one of on, off, fadeTo, pulse, colour.'],
-    [{ ...timelineToJson(sample), cues: [{ tick: 0, action: "on", selection: 99, chain: 0, level: 1 }] }, '"cues[0].selection" is not in "selections".'],
-    [{ ...timelineToJson(sample), cues: [{ tick: 0, action: "on", selection: 0, chain: 0, level: 101 }] }, '"cues[0].level" has to be a number from 0 to 100.'],
-    [{ ...timelineToJson(sample), cues: [{ tick: 0, action: "colour", selection: 0, chain: 0, length: 0, colour: "gold" }] }, '"cues[0].colour" has to be a colour like "#ffd700".'],
+    [
+      { ...timelineToJson(sample), selections: [[-1]] },
+      '"selections[0][0]" has to be a whole number of at most 32 bits.',
+    ],
+    [
+      { ...timelineToJson(sample), cues: [{ tick: 0, action: "glow" }] },
+      '"cues[0].action" has to be one of on, off, fadeTo, pulse, colour.',
+    ],
+    [
+      { ...timelineToJson(sample), cues: [{ tick: 0, action: "on", selection: 99, chain: 0, level: 1 }] },
+      '"cues[0].selection" is not in "selections".',
+    ],
+    [
+      { ...timelineToJson(sample), cues: [{ tick: 0, action: "on", selection: 0, chain: 0, level: 101 }] },
+      '"cues[0].level" has to be a number from 0 to 100.',
+    ],
+    [
+      {
+        ...timelineToJson(sample),
+        cues: [{ tick: 0, action: "colour", selection: 0, chain: 0, length: 0, colour: "gold" }],
+      },
+      '"cues[0].colour" has to be a colour like "#ffd700".',
+    ],
   ])("names the field that is wrong (%#)", (json, message) => {
     expect(() => parseTimelineJson(json)).toThrow(message);
   });
@@ -173,7 +219,19 @@ describe("encodeCanonical", () => {
     expect(encodeCanonical({ ...sample, ...change })).not.toEqual(encodeCanonical(sample));
   });
   it("changes with every cue", () => {
-    const shows = [[on(0, 0, 50)], [on(0, 0, 50.01)], [on(1, 0, 50)], [on(0, 1, 50)], [off(0, 0)], [fadeTo(0, 0, 50, 1)], [fadeTo(0, 0, 50, 2)], [pulse(0, 0, 1)], [pulse(0, 0, 1, 0)], [colour(0, 0, 0, 1)], [on(0, 0, 50), off(1, 0)]];
+    const shows = [
+      [on(0, 0, 50)],
+      [on(0, 0, 50.01)],
+      [on(1, 0, 50)],
+      [on(0, 1, 50)],
+      [off(0, 0)],
+      [fadeTo(0, 0, 50, 1)],
+      [fadeTo(0, 0, 50, 2)],
+      [pulse(0, 0, 1)],
+      [pulse(0, 0, 1, 0)],
+      [colour(0, 0, 0, 1)],
+      [on(0, 0, 50), off(1, 0)],
+    ];
     const hexes = shows.map((cues) => Buffer.from(encodeCanonical(buildShow(layout, cues))).toString("hex"));
     expect(new Set(hexes).size).toBe(shows.length);
   });
@@ -201,7 +259,11 @@ describe("whole numbers in bytes", () => {
     );
   });
   it("are refused in a longer form, so that equal shows have equal bytes", () => {
-    expect(() => new ByteReader(Uint8Array.of(0x80, 0x00)).whole("The level")).toThrow("The level is not a whole number of 32 bits");
-    expect(() => new ByteReader(Uint8Array.of(0xff, 0xff, 0xff, 0xff, 0x7f)).whole("The level")).toThrow(TimelineFormatError);
+    expect(() => new ByteReader(Uint8Array.of(0x80, 0x00)).whole("The level")).toThrow(
+      "The level is not a whole number of 32 bits",
+    );
+    expect(() => new ByteReader(Uint8Array.of(0xff, 0xff, 0xff, 0xff, 0x7f)).whole("The level")).toThrow(
+      TimelineFormatError,
+    );
   });
 });

@@ -44,7 +44,8 @@ export function decodeTimeline(bytes: Uint8Array): Timeline {
     if (bytes[index] !== byte) throw new TimelineFormatError("These bytes are not a timeline.");
   });
   const format = bytes[MARK.length];
-  if (format !== FORMAT) throw new TimelineFormatError(`This timeline has the format ${format}; this build reads format ${FORMAT}.`);
+  if (format !== FORMAT)
+    throw new TimelineFormatError(`This timeline has the format ${format}; this build reads format ${FORMAT}.`);
   if (bytes.length < MARK.length + 2 + CRC_BYTES) throw new TimelineFormatError("The timeline is cut short.");
   const body = bytes.subarray(0, bytes.length - CRC_BYTES);
   const stored = new ByteReader(bytes.subarray(bytes.length - CRC_BYTES)).fixed32("the check sum");
@@ -69,7 +70,8 @@ function readTimeline(input: ByteReader): Timeline {
   };
   const selections = readLists(input, "a selection").map((lights) => {
     for (const light of lights)
-      if (light > 0xff_ff) throw new TimelineFormatError(`A selection names light ${light}; light indexes have 16 bits.`);
+      if (light > 0xff_ff)
+        throw new TimelineFormatError(`A selection names light ${light}; light indexes have 16 bits.`);
     return Uint16Array.from(lights);
   });
   const chains = readLists(input, "a chain");

@@ -27,6 +27,11 @@ const HUES: readonly (readonly [number, string])[] = [
 
 function hueOf(red: number, green: number, blue: number, strongest: number, weakest: number): number {
   const range = strongest - weakest;
-  const sixth = strongest === red ? (green - blue) / range : strongest === green ? 2 + (blue - red) / range : 4 + (red - green) / range;
+  const sixth =
+    strongest === red
+      ? (green - blue) / range
+      : strongest === green
+        ? 2 + (blue - red) / range
+        : 4 + (red - green) / range;
   return ((sixth + 6) % 6) * 60;
 }

@@ -1,13 +1,29 @@
 import { converter, parse, wcagLuminance } from "culori";
 import { describe, expect, it } from "vitest";
-import { colourToHex, colourToLinear, levelToY, linearToColour, linearToSrgb, relativeLuminance, srgbToLinear, yToLevel } from "./colour.ts";
+import {
+  colourToHex,
+  colourToLinear,
+  levelToY,
+  linearToColour,
+  linearToSrgb,
+  relativeLuminance,
+  srgbToLinear,
+  yToLevel,
+} from "./colour.ts";
 
 const toLinear = converter("lrgb");
 const toLab = converter("lab65");
 
 describe("level and light", () => {
   it("meets the points of CIE 15 (L* from Y), as computed from the formula", () => {
-    for (const [level, y] of [[25, 0.04415], [50, 0.18419], [75, 0.48278], [100, 1], [0, 0]] as const) expect(levelToY(level)).toBeCloseTo(y, 5);
+    for (const [level, y] of [
+      [25, 0.04415],
+      [50, 0.18419],
+      [75, 0.48278],
+      [100, 1],
+      [0, 0],
+    ] as const)
+      expect(levelToY(level)).toBeCloseTo(y, 5);
     expect(yToLevel(0.18)).toBeCloseTo(49.496, 3);
     expect(yToLevel(0.5)).toBeCloseTo(76.069, 3);
     // The line and the curve meet at Y = 0.008856, L* = 8.
@@ -33,7 +49,15 @@ describe("sRGB", () => {
     }
   });
   it("agrees with culori 4.0.2 and the definition in WCAG 2.2 on relative luminance", () => {
-    const known = { "#808080": 0.2158605, "#7f7f7f": 0.2122308, "#777777": 0.184475, "#bcbcbc": 0.5028865, "#ff0000": 0.2126, "#00ff00": 0.7152, "#0000ff": 0.0722 };
+    const known = {
+      "#808080": 0.2158605,
+      "#7f7f7f": 0.2122308,
+      "#777777": 0.184475,
+      "#bcbcbc": 0.5028865,
+      "#ff0000": 0.2126,
+      "#00ff00": 0.7152,
+      "#0000ff": 0.0722,
+    };
     for (const [hex, luminance] of Object.entries(known)) {
       const [red, green, blue] = colourToLinear(Number.parseInt(hex.slice(1), 16));
       expect(relativeLuminance(red, green, blue)).toBeCloseTo(luminance, 6);

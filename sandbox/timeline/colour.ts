@@ -58,7 +58,9 @@ export function colourToLinear(colour: number): readonly [number, number, number
 
 /** Gives the colour 0xRRGGBB nearest to three linear channels (0 to 1; clamped). */
 export function linearToColour(red: number, green: number, blue: number): number {
-  return (Math.round(linearToSrgb(red)) << 16) | (Math.round(linearToSrgb(green)) << 8) | Math.round(linearToSrgb(blue));
+  return (
+    (Math.round(linearToSrgb(red)) << 16) | (Math.round(linearToSrgb(green)) << 8) | Math.round(linearToSrgb(blue))
+  );
 }
 
 /** Gives `#rrggbb` of a colour 0xRRGGBB. */

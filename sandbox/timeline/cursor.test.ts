@@ -18,8 +18,11 @@ function sample(cues: readonly WrittenCue[], beat: number): Frame {
   return createCursor(buildShow(layout, cues), layout).seek(beat * TICKS_PER_BEAT);
 }
 const levelOf = (cues: readonly WrittenCue[], beat: number, light = DIMMER) => sample(cues, beat).level[light];
-const rgbOf = (cues: readonly WrittenCue[], beat: number, light = COLOUR) => [...sample(cues, beat).rgb.slice(light * 3, light * 3 + 3)];
-const scaled = (hex: number, level: number) => colourToLinear(hex).map((channel) => Math.fround(channel * levelToY(level)));
+const rgbOf = (cues: readonly WrittenCue[], beat: number, light = COLOUR) => [
+  ...sample(cues, beat).rgb.slice(light * 3, light * 3 + 3),
+];
+const scaled = (hex: number, level: number) =>
+  colourToLinear(hex).map((channel) => Math.fround(channel * levelToY(level)));
 
 describe("rule 12: a cue stands for one change of each of its lights", () => {
   it("changes every light of the selection and no other", () => {
@@ -114,7 +117,12 @@ describe("rule 18: pulses", () => {
 
 describe("rule 19: what a colour light shows", () => {
   it("takes per channel the largest of the level and every pulse", () => {
-    const cues = [colour(0, COLOUR, BLUE), on(0, COLOUR, 60), pulse(0, COLOUR, 4, RED), pulse(0, COLOUR, 2, 0x80_00_00)];
+    const cues = [
+      colour(0, COLOUR, BLUE),
+      on(0, COLOUR, 60),
+      pulse(0, COLOUR, 4, RED),
+      pulse(0, COLOUR, 2, 0x80_00_00),
+    ];
     const [red, green, blue] = rgbOf(cues, 1);
     expect(red).toBeCloseTo(levelToY(75), 6);
     expect(green).toBe(0);
@@ -159,7 +167,12 @@ describe("rule 21: the end", () => {
 
 describe("which cue lights a light", () => {
   it("names the brightest, and the later of two that are equal", () => {
-    const cues = [on(0, DIMMER, 60, 1), pulse(0, DIMMER, 2, undefined, 2), on(8, DIMMER, 100, 3), pulse(8, DIMMER, 1, undefined, 4)];
+    const cues = [
+      on(0, DIMMER, 60, 1),
+      pulse(0, DIMMER, 2, undefined, 2),
+      on(8, DIMMER, 100, 3),
+      pulse(8, DIMMER, 1, undefined, 4),
+    ];
     expect(sample(cues, 0.5).cue[DIMMER]).toBe(1);
     expect(sample(cues, 1).cue[DIMMER]).toBe(0);
     expect(sample(cues, 8).cue[DIMMER]).toBe(3);
@@ -173,7 +186,12 @@ describe("which cue lights a light", () => {
 });
 
 /** Works a light out from the rules alone, cue by cue, without tracks or cursors. */
-function workOut(cues: readonly WrittenCue[], light: number, tick: number, endTick: number): { level: number; rgb: number[] } {
+function workOut(
+  cues: readonly WrittenCue[],
+  light: number,
+  tick: number,
+  endTick: number,
+): { level: number; rgb: number[] } {
   const past = cues
     .filter((cue) => cue.tick <= tick && [...(cue.lights as number[])].includes(light))
     .sort((a, b) => a.tick - b.tick);
@@ -186,7 +204,12 @@ function workOut(cues: readonly WrittenCue[], light: number, tick: number, endTi
     if (action === "pulse") pulses.push({ start, length, colour: cue.colour });
     else if (action === "colour") tint = line(tint(start), [...colourToLinear(cue.colour ?? 0)], start, length);
     else {
-      const ramp = line([level(start)], [action === "off" ? 0 : (cue.level ?? 0) / 100], start, action === "fadeTo" ? length : 0);
+      const ramp = line(
+        [level(start)],
+        [action === "off" ? 0 : (cue.level ?? 0) / 100],
+        start,
+        action === "fadeTo" ? length : 0,
+      );
       level = (at) => ramp(at)[0] ?? 0;
       if (action === "off") pulses = [];
     }
@@ -197,15 +220,21 @@ function workOut(cues: readonly WrittenCue[], light: number, tick: number, endTi
     .map(({ start, length, colour: own }) => ({ envelope: 100 * (1 - (tick - start) / length), own }));
   if (light !== COLOUR) {
     const isOn = level(tick) >= 50 || running.length > 0;
-    const shown = light === RELAY ? (isOn ? 100 : 0) : Math.max(level(tick), ...running.map(({ envelope }) => envelope));
+    const shown =
+      light === RELAY ? (isOn ? 100 : 0) : Math.max(level(tick), ...running.map(({ envelope }) => envelope));
     return { level: shown, rgb: colourToLinear(WARM_WHITE).map((channel) => channel * levelToY(shown)) };
   }
-  const sources = [{ envelope: level(tick), own: undefined as number | undefined }, ...running].map(({ envelope, own }) => ({
-    envelope,
-    rgb: (own === undefined ? tint(tick) : [...colourToLinear(own)]).map((channel) => channel * levelToY(envelope)),
-  }));
+  const sources = [{ envelope: level(tick), own: undefined as number | undefined }, ...running].map(
+    ({ envelope, own }) => ({
+      envelope,
+      rgb: (own === undefined ? tint(tick) : [...colourToLinear(own)]).map((channel) => channel * levelToY(envelope)),
+    }),
+  );
   const rgb = [0, 1, 2].map((channel) => Math.max(...sources.map((source) => source.rgb[channel] ?? 0)));
-  return { level: Math.max(0, ...sources.filter((source) => source.rgb.some((c) => c > 0)).map(({ envelope }) => envelope)), rgb };
+  return {
+    level: Math.max(0, ...sources.filter((source) => source.rgb.some((c) => c > 0)).map(({ envelope }) => envelope)),
+    rgb,
+  };
 }
 
 const END = 32 * TICKS_PER_BEAT;
@@ -273,6 +302,8 @@ describe("sampling", () => {
   });
 
   it("refuses a layout with another number of lights", () => {
-    expect(() => createCursor(buildShow(layout, []), buildFront("relay"))).toThrow("The timeline is for 3 lights, the layout has 1.");
+    expect(() => createCursor(buildShow(layout, []), buildFront("relay"))).toThrow(
+      "The timeline is for 3 lights, the layout has 1.",
+    );
   });
 });

@@ -122,7 +122,12 @@ class TrackCursor implements Cursor {
   #advance(light: number, tick: number): void {
     const { level, colour, pulse } = this.#tracks;
     this.#levelEntry[light] = nextEntry(level.tick, this.#levelEntry[light] ?? 0, level.first[light + 1] ?? 0, tick);
-    this.#colourEntry[light] = nextEntry(colour.tick, this.#colourEntry[light] ?? 0, colour.first[light + 1] ?? 0, tick);
+    this.#colourEntry[light] = nextEntry(
+      colour.tick,
+      this.#colourEntry[light] ?? 0,
+      colour.first[light + 1] ?? 0,
+      tick,
+    );
     const running = this.#running[light] ?? [];
     let kept = 0;
     for (const entry of running) if ((pulse.end[entry] ?? 0) > tick) running[kept++] = entry;
@@ -199,7 +204,15 @@ class TrackCursor implements Cursor {
     let brightest = 0;
     let cue = -1;
     let colourCue = -1;
-    const add = (level: number, r: number, g: number, b: number, luminance: number, from: number, colourFrom: number) => {
+    const add = (
+      level: number,
+      r: number,
+      g: number,
+      b: number,
+      luminance: number,
+      from: number,
+      colourFrom: number,
+    ) => {
       const y = levelToY(level);
       if (y * luminance <= 0) return;
       frame.rgb[at] = Math.max(frame.rgb[at] ?? 0, y * r);

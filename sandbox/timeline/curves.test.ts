@@ -17,7 +17,9 @@ const trace = (cues: Parameters<typeof buildShow>[1]) => {
 describe("traceLights", () => {
   it("has two points where a light jumps and none where it rests", () => {
     const { curves } = trace([on(1, 1, 80), off(9, 1)]);
-    expect([...(curves[1]?.tick ?? [])].map((tick) => Math.round(tick * 1000) / 1000)).toEqual([959.999, 960, 8639.999, 8640, 30_719.999, 30_720]);
+    expect([...(curves[1]?.tick ?? [])].map((tick) => Math.round(tick * 1000) / 1000)).toEqual([
+      959.999, 960, 8639.999, 8640, 30_719.999, 30_720,
+    ]);
     expect([...(curves[1]?.level ?? [])]).toEqual([0, 80, 80, 0, 0, 0]);
   });
   it("gives equal lights one curve", () => {
@@ -38,23 +40,29 @@ describe("traceLights", () => {
       fc.tuple(beat, lights, fc.constantFrom(0xff_00_00, 0x00_ff_00), length).map((a) => colour(...a)),
     );
     fc.assert(
-      fc.property(fc.array(someCue, { maxLength: 25 }), fc.array(fc.integer({ min: 0, max: 30_719 }), { minLength: 20, maxLength: 20 }), (cues, ticks) => {
-        const { timeline, curves } = trace(cues);
-        const cursor = createCursor(timeline, layout);
-        for (const tick of ticks) {
-          const frame = cursor.seek(tick);
-          for (const light of [1, 3]) {
-            const curve = curves[light];
-            if (curve === undefined) continue;
-            const rgb = [0, 1, 2].map((channel) => frame.rgb[light * 3 + channel] ?? 0) as [number, number, number];
-            const shown = light === 3 ? relativeLuminance(...rgb) : rgb[0];
-            // A pulse of a quarter beat loses half its light between two points; where it meets a level there
-            // is a bend that the straight line cuts by at most a quarter of that.
-            expect(Math.abs(valueAt(curve.tick, curve.luminance, tick) - shown)).toBeLessThan(0.14);
+      fc.property(
+        fc.array(someCue, { maxLength: 25 }),
+        fc.array(fc.integer({ min: 0, max: 30_719 }), { minLength: 20, maxLength: 20 }),
+        (cues, ticks) => {
+          const { timeline, curves } = trace(cues);
+          const cursor = createCursor(timeline, layout);
+          for (const tick of ticks) {
+            const frame = cursor.seek(tick);
+            for (const light of [1, 3]) {
+              const curve = curves[light];
+              if (curve === undefined) continue;
+              const rgb = [0, 1, 2].map((channel) => frame.rgb[light * 3 + channel] ?? 0) as [number, number, number];
+              const shown = light === 3 ? relativeLuminance(...rgb) : rgb[0];
+              // A pulse of a quarter beat loses half its light between two points; where it meets a level there
+              // is a bend that the straight line cuts by at most a quarter of that.
+              expect(Math.abs(valueAt(curve.tick, curve.luminance, tick) - shown)).toBeLessThan(0.14);
+            }
+            expect(valueAt(curves[0]?.tick ?? new Float64Array(0), curves[0]?.luminance ?? [], tick) > 0.5).toBe(
+              (frame.level[0] ?? 0) > 0,
+            );
           }
-          expect(valueAt(curves[0]?.tick ?? new Float64Array(0), curves[0]?.luminance ?? [], tick) > 0.5).toBe((frame.level[0] ?? 0) > 0);
-        }
-      }),
+        },
+      ),
       { numRuns: 100 },
     );
   });

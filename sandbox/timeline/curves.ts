@@ -56,7 +56,13 @@ function traceSwitched(tracks: Tracks, light: number): LightCurve {
     [end, 0],
   ]);
   const on = Float32Array.from(points, ([, value]) => value ?? 0);
-  return { tick: Float64Array.from(points, ([tick]) => tick ?? 0), level: on.map((value) => value * 100), luminance: on, strongest: on, rgb: new Float32Array(0) };
+  return {
+    tick: Float64Array.from(points, ([tick]) => tick ?? 0),
+    level: on.map((value) => value * 100),
+    luminance: on,
+    strongest: on,
+    rgb: new Float32Array(0),
+  };
 }
 
 function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
@@ -70,7 +76,12 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
     const at = light.index * 3;
     const [red, green, blue] = [rgb[at] ?? 0, rgb[at + 1] ?? 0, rgb[at + 2] ?? 0];
     // Red is the full channel of the warm white that plain strings have.
-    return { level: level[light.index] ?? 0, luminance: light.hasColour ? relativeLuminance(red, green, blue) : red, strongest: Math.max(red, green, blue), rgb: [red, green, blue] };
+    return {
+      level: level[light.index] ?? 0,
+      luminance: light.hasColour ? relativeLuminance(red, green, blue) : red,
+      strongest: Math.max(red, green, blue),
+      rgb: [red, green, blue],
+    };
   };
   const add = (tick: number) => {
     const { level, luminance, strongest, rgb } = read(tick);
@@ -86,7 +97,8 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
   breaks.forEach((tick, index) => {
     if (tick > 0) add(tick - JUMP_TICKS);
     add(tick);
-    for (let move = moves[nextMove]; move !== undefined && move.start <= tick; move = moves[++nextMove]) movesUntil = Math.max(movesUntil, move.end);
+    for (let move = moves[nextMove]; move !== undefined && move.start <= tick; move = moves[++nextMove])
+      movesUntil = Math.max(movesUntil, move.end);
     const next = breaks[index + 1];
     if (next === undefined || movesUntil <= tick) return;
     for (let between = tick + CURVE_STEP_TICKS; between < next; between += CURVE_STEP_TICKS) add(between);
@@ -101,7 +113,10 @@ function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
 }
 
 /** Ticks at which a light may jump or bend, sorted, the last the song's end; and the fades and pulses between them, by start. */
-function listBreaks({ level, colour, pulse, endTick }: Tracks, light: Light): { readonly breaks: readonly number[]; readonly moves: readonly { readonly start: number; readonly end: number }[] } {
+function listBreaks(
+  { level, colour, pulse, endTick }: Tracks,
+  light: Light,
+): { readonly breaks: readonly number[]; readonly moves: readonly { readonly start: number; readonly end: number }[] } {
   const moves: { start: number; end: number }[] = [];
   const { index } = light;
   for (const track of light.hasColour ? [level, colour] : [level])
@@ -109,7 +124,8 @@ function listBreaks({ level, colour, pulse, endTick }: Tracks, light: Light): { 
       const start = track.tick[entry] ?? 0;
       moves.push({ start, end: start + (track.length[entry] ?? 0) });
     }
-  for (let entry = pulse.first[index] ?? 0; entry < (pulse.first[index + 1] ?? 0); entry++) moves.push({ start: pulse.tick[entry] ?? 0, end: pulse.end[entry] ?? 0 });
+  for (let entry = pulse.first[index] ?? 0; entry < (pulse.first[index + 1] ?? 0); entry++)
+    moves.push({ start: pulse.tick[entry] ?? 0, end: pulse.end[entry] ?? 0 });
   moves.sort((a, b) => a.start - b.start);
   const ticks = new Set(moves.flatMap(({ start, end }) => [start, end]));
   if (ticks.size > 0) ticks.add(endTick);

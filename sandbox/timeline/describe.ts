@@ -25,10 +25,17 @@ export function describeShow(timeline: Timeline, layout: Layout, song: BeatMap):
   const fronts = listFronts(layout).map(({ front }) => front);
   const sides = SIDES.filter((side) => fronts.some((front) => front.side === side));
   const spans = listSongSpans(song).filter((span) => span.start < timeline.endTick);
-  const activities = measureSpans(timeline, lights, buildTracks(timeline), spans.map(({ start, end }) => [start, Math.min(end, timeline.endTick)] as const));
+  const activities = measureSpans(
+    timeline,
+    lights,
+    buildTracks(timeline),
+    spans.map(({ start, end }) => [start, Math.min(end, timeline.endTick)] as const),
+  );
   const parts = spans.flatMap((span, index) => {
     const activity = activities[index];
-    return activity === undefined ? [] : [{ span, activity, words: describeActivity(activity, sides, (front) => fronts[front]?.name ?? "") }];
+    return activity === undefined
+      ? []
+      : [{ span, activity, words: describeActivity(activity, sides, (front) => fronts[front]?.name ?? "") }];
   });
   const steps = joinParts(parts).map(({ spans: joined, words }) => `${nameSpans(joined)}: ${words}.`);
   const ending = timeline.isComplete ? [] : ["The script stopped here, so the show is not whole."];
@@ -86,25 +93,38 @@ function describeActivity(activity: Activity, sides: readonly Side[], nameFront:
 }
 
 /** Half the light again, or half of it gone, is seen as growing or dimming. */
-function describeMove({ light, lightFirst, lightLast, fronts }: Activity, movement: Exclude<Movement, "dark">): readonly [string, string] {
+function describeMove(
+  { light, lightFirst, lightLast, fronts }: Activity,
+  movement: Exclude<Movement, "dark">,
+): readonly [string, string] {
   if (movement === "steady" && light < 0.3) return ["stays dimly lit", "stay dimly lit"];
   if (movement === "together" && fronts.size === 1) return ["lights up", "light up"];
   if (movement === "scattered" && fronts.size <= FEW_FRONTS) return ["lights up now and then", "light up one by one"];
-  if (movement === "fading" && lightLast > lightFirst * 1.5 + 0.05) return ["slowly grows brighter", "slowly grow brighter"];
+  if (movement === "fading" && lightLast > lightFirst * 1.5 + 0.05)
+    return ["slowly grows brighter", "slowly grow brighter"];
   if (movement === "fading" && lightLast * 1.5 + 0.05 < lightFirst) return ["slowly goes dim", "slowly go dim"];
   return MOVES[movement];
 }
 
 /** A side counts when it gives a good share of the light. */
-function nameWho({ fronts, sides: shares }: Activity, sides: readonly Side[], nameFront: (front: number) => string): { readonly who: string; readonly isSeveral: boolean } {
+function nameWho(
+  { fronts, sides: shares }: Activity,
+  sides: readonly Side[],
+  nameFront: (front: number) => string,
+): { readonly who: string; readonly isSeveral: boolean } {
   if (fronts.size <= FEW_FRONTS) {
     const names = joinWords([...fronts].sort((a, b) => a - b).map((front) => `"${nameFront(front)}"`));
-    return { who: fronts.size === 1 ? `only the front ${names}` : `only the fronts ${names}`, isSeveral: fronts.size > 1 };
+    return {
+      who: fronts.size === 1 ? `only the front ${names}` : `only the fronts ${names}`,
+      isSeveral: fronts.size > 1,
+    };
   }
   const lit = sides.filter((side) => (shares.get(side) ?? 0) > 0.4 / Math.max(1, sides.length));
   if (lit.length === 0) return { who: "a part of the square", isSeveral: false };
   if (lit.length === sides.length && sides.length > 1) return { who: "the whole square", isSeveral: false };
-  return lit.length === 1 ? { who: `the ${lit[0]} side`, isSeveral: false } : { who: `the ${joinWords(lit)} sides`, isSeveral: true };
+  return lit.length === 1
+    ? { who: `the ${lit[0]} side`, isSeveral: false }
+    : { who: `the ${joinWords(lit)} sides`, isSeveral: true };
 }
 
 function describeColours({ colours }: Activity): string {
@@ -127,13 +147,21 @@ const MOSTLY: Readonly<Record<Movement, string>> = {
 function summarise(parts: readonly Part[], isComplete: boolean): string {
   const [first] = parts;
   const last = parts.at(-1);
-  if (first === undefined || last === undefined || parts.every(({ activity }) => activity.movement === "dark")) return "All is dark.";
+  if (first === undefined || last === undefined || parts.every(({ activity }) => activity.movement === "dark"))
+    return "All is dark.";
   const lengths = new Map<Movement, number>();
-  for (const { activity } of parts) lengths.set(activity.movement, (lengths.get(activity.movement) ?? 0) + activity.end - activity.start);
+  for (const { activity } of parts)
+    lengths.set(activity.movement, (lengths.get(activity.movement) ?? 0) + activity.end - activity.start);
   const [mostly] = [...lengths].sort((a, b) => b[1] - a[1])[0] ?? ["steady"];
-  const words = [first.activity.lightFirst < 0.02 ? "starts dark" : first.activity.lightFirst < 0.4 ? "starts dim" : "starts bright", MOSTLY[mostly]];
+  const words = [
+    first.activity.lightFirst < 0.02 ? "starts dark" : first.activity.lightFirst < 0.4 ? "starts dim" : "starts bright",
+    MOSTLY[mostly],
+  ];
   const busiest = parts.reduce((most, part) => (pace(part) > pace(most) ? part : most));
-  if (parts.length > 1 && pace(busiest) > 0) words.push(`busiest in ${busiest.span.name === null ? nameSpans([busiest.span]).replace("B", "b") : `the ${busiest.span.name}`}`);
+  if (parts.length > 1 && pace(busiest) > 0)
+    words.push(
+      `busiest in ${busiest.span.name === null ? nameSpans([busiest.span]).replace("B", "b") : `the ${busiest.span.name}`}`,
+    );
   if (!isComplete) words.push("then the script stops");
   else words.push(last.activity.lightLast < 0.02 ? "dark at the end" : "lit until the end");
   const sentence = words.join(", ");

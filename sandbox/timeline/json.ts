@@ -67,7 +67,9 @@ export function parseTimelineJson(json: unknown): Timeline {
   const selections = toLists(root.selections, "selections");
   const chains = toLists(root.chains, "chains");
   if (typeof root.isComplete !== "boolean") throw new TimelineFormatError('"isComplete" has to be true or false.');
-  const written = toList(root.cues, "cues").map((cue, index): WrittenCue => parseCue(cue, `cues[${index}]`, selections, chains));
+  const written = toList(root.cues, "cues").map((cue, index): WrittenCue =>
+    parseCue(cue, `cues[${index}]`, selections, chains),
+  );
   let previous = 0;
   written.forEach(({ tick }, index) => {
     if (tick < previous) throw new TimelineFormatError(`"cues[${index}].tick" is before the cue in front of it.`);
@@ -87,7 +89,12 @@ export function parseTimelineJson(json: unknown): Timeline {
   );
 }
 
-function parseCue(json: unknown, path: string, selections: readonly number[][], chains: readonly number[][]): WrittenCue {
+function parseCue(
+  json: unknown,
+  path: string,
+  selections: readonly number[][],
+  chains: readonly number[][],
+): WrittenCue {
   const cue = toRecord(json, `"${path}"`);
   const action = ACTIONS.find((name) => name === cue.action);
   if (action === undefined) throw new TimelineFormatError(`"${path}.action" has to be one of ${ACTIONS.join(", ")}.`);
@@ -107,7 +114,8 @@ function parseCue(json: unknown, path: string, selections: readonly number[][], 
 }
 
 function toRecord(value: unknown, what: string): Readonly<Record<string, unknown>> {
-  if (typeof value !== "object" || value === null || Array.isArray(value)) throw new TimelineFormatError(`${what} has to be an object.`);
+  if (typeof value !== "object" || value === null || Array.isArray(value))
+    throw new TimelineFormatError(`${what} has to be an object.`);
   return value as Readonly<Record<string, unknown>>;
 }
 
@@ -129,7 +137,8 @@ function toWhole(value: unknown, path: string): number {
 }
 
 function toLevel(value: unknown, path: string): number {
-  if (typeof value !== "number" || !(value >= 0 && value <= 100)) throw new TimelineFormatError(`"${path}" has to be a number from 0 to 100.`);
+  if (typeof value !== "number" || !(value >= 0 && value <= 100))
+    throw new TimelineFormatError(`"${path}" has to be a number from 0 to 100.`);
   return Math.round(value * 100);
 }
 
@@ -139,6 +148,7 @@ function toText(value: unknown, path: string): string {
 }
 
 function toColour(value: unknown, path: string): number {
-  if (typeof value !== "string" || !/^#[0-9a-f]{6}$/.test(value)) throw new TimelineFormatError(`"${path}" has to be a colour like "#ffd700".`);
+  if (typeof value !== "string" || !/^#[0-9a-f]{6}$/.test(value))
+    throw new TimelineFormatError(`"${path}" has to be a colour like "#ffd700".`);
   return Number.parseInt(value.slice(1), 16);
 }

@@ -6,10 +6,20 @@ import { createLinesLit, linesOfCue } from "./lines.ts";
 const layout = buildFront("relay", "dimmer", "dimmer");
 
 describe("createLinesLit", () => {
-  const timeline = buildShow(layout, [on(0, 0, 100, 2), on(0, 1, 40, [9, 4]), fadeTo(2, 2, 80, 4, [9, 5]), pulse(8, [1, 2], 2, undefined, 12)]);
+  const timeline = buildShow(layout, [
+    on(0, 0, 100, 2),
+    on(0, 1, 40, [9, 4]),
+    fadeTo(2, 2, 80, 4, [9, 5]),
+    pulse(8, [1, 2], 2, undefined, 12),
+  ]);
   const cursor = createCursor(timeline, layout);
   const linesLit = createLinesLit(timeline);
-  const at = (beat: number) => Object.fromEntries([...linesLit(cursor.seek(beat * 960)).entries()].filter(([, share]) => share > 0).map(([line, share]) => [line, Math.round(share * 100)]));
+  const at = (beat: number) =>
+    Object.fromEntries(
+      [...linesLit(cursor.seek(beat * 960)).entries()]
+        .filter(([, share]) => share > 0)
+        .map(([line, share]) => [line, Math.round(share * 100)]),
+    );
 
   it("counts every line of the chain with the brightest light it lights", () => {
     expect(at(0)).toEqual({ 2: 100, 4: 40, 9: 40 });

@@ -48,7 +48,9 @@ describe("createOutputSampler", () => {
 describe("listSwitchings", () => {
   it("gives each time on with how long it is on, and off after it", () => {
     const timeline = buildShow(layout, [on(0, 0), off(2, 0), pulse(3, 0, 1), fadeTo(8, 1, 100, 4), off(16, 1)]);
-    expect(listSwitchings(timeline, layout, song).map(({ lightId, onAt, onFor, offFor }) => [lightId, onAt, onFor, offFor])).toEqual([
+    expect(
+      listSwitchings(timeline, layout, song).map(({ lightId, onAt, onFor, offFor }) => [lightId, onAt, onFor, offFor]),
+    ).toEqual([
       ["front-a/roof", 0, 1, 0.5],
       ["front-a/roof", 1.5, 0.5, null],
       ["front-a/windows", 5, 3, null],
@@ -68,17 +70,25 @@ describe("listOnSpans", () => {
       fc.tuple(beat, length).map(([at, beats]) => pulse(at, 0, beats)),
     );
     fc.assert(
-      fc.property(fc.array(someCue, { maxLength: 25 }), fc.array(fc.integer({ min: 0, max: 31_000 }), { minLength: 30, maxLength: 30 }), (cues, ticks) => {
-        const timeline = buildShow(layout, cues);
-        const spans = listOnSpans(buildTracks(timeline), 0);
-        const cursor = createCursor(timeline, layout);
-        for (const tick of ticks) {
-          const near = spans.some(({ start, end }) => Math.abs(start - tick) < 1e-6 || Math.abs(end - tick) < 1e-6);
-          // At the very crossing of a fade the last digit decides; everywhere else there is one answer.
-          if (!near) expect(spans.some(({ start, end }) => start <= tick && tick < end)).toBe(cursor.seek(tick).level[0] === 100);
-        }
-        for (let index = 1; index < spans.length; index++) expect(spans[index]?.start).toBeGreaterThan(spans[index - 1]?.end ?? 0);
-      }),
+      fc.property(
+        fc.array(someCue, { maxLength: 25 }),
+        fc.array(fc.integer({ min: 0, max: 31_000 }), { minLength: 30, maxLength: 30 }),
+        (cues, ticks) => {
+          const timeline = buildShow(layout, cues);
+          const spans = listOnSpans(buildTracks(timeline), 0);
+          const cursor = createCursor(timeline, layout);
+          for (const tick of ticks) {
+            const near = spans.some(({ start, end }) => Math.abs(start - tick) < 1e-6 || Math.abs(end - tick) < 1e-6);
+            // At the very crossing of a fade the last digit decides; everywhere else there is one answer.
+            if (!near)
+              expect(spans.some(({ start, end }) => start <= tick && tick < end)).toBe(
+                cursor.seek(tick).level[0] === 100,
+              );
+          }
+          for (let index = 1; index < spans.length; index++)
+            expect(spans[index]?.start).toBeGreaterThan(spans[index - 1]?.end ?? 0);
+        },
+      ),
       { numRuns: 200 },
     );
   });

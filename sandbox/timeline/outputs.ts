@@ -43,8 +43,14 @@ export interface OutputSampler {
 export const FRAMES_PER_SECOND = 40;
 
 /** Gives the output values of a timeline at a fixed rate (1 to 1000 a second). They are what the script says: nothing is lengthened or smoothed. */
-export function createOutputSampler(timeline: Timeline, layout: Layout, song: Pick<BeatMap, "beats">, framesPerSecond = FRAMES_PER_SECOND): OutputSampler {
-  if (!(framesPerSecond >= 1 && framesPerSecond <= 1000)) throw new RangeError(`${framesPerSecond} frames a second: it has to be 1 to 1000.`);
+export function createOutputSampler(
+  timeline: Timeline,
+  layout: Layout,
+  song: Pick<BeatMap, "beats">,
+  framesPerSecond = FRAMES_PER_SECOND,
+): OutputSampler {
+  if (!(framesPerSecond >= 1 && framesPerSecond <= 1000))
+    throw new RangeError(`${framesPerSecond} frames a second: it has to be 1 to 1000.`);
   const lights = listLights(layout);
   const cursor = createLightsCursor(timeline, lights, buildTracks(timeline));
   const tempo = createTempo(song);
@@ -66,7 +72,11 @@ export function createOutputSampler(timeline: Timeline, layout: Layout, song: Pi
 
 /** Gives the channels of one light: three for a colour light, else one. */
 export function listChannels(light: Light): readonly OutputChannel[] {
-  const uses: readonly ChannelUse[] = light.hasColour ? ["red", "green", "blue"] : light.isSwitched ? ["switch"] : ["level"];
+  const uses: readonly ChannelUse[] = light.hasColour
+    ? ["red", "green", "blue"]
+    : light.isSwitched
+      ? ["switch"]
+      : ["level"];
   return uses.map((use) => ({
     frontId: light.frontId,
     boxId: light.boxId,
@@ -120,7 +130,15 @@ export function listSwitchings(timeline: Timeline, layout: Layout, song: Pick<Be
       return spans.map(({ start, end, cue }, index) => {
         const next = spans[index + 1];
         const [onAt, offAt] = [tempo.toSeconds(start), tempo.toSeconds(end)];
-        return { lightId: light.id, light: light.index, onAt, offAt, onFor: offAt - onAt, offFor: next === undefined ? null : tempo.toSeconds(next.start) - offAt, cue };
+        return {
+          lightId: light.id,
+          light: light.index,
+          onAt,
+          offAt,
+          onFor: offAt - onAt,
+          offFor: next === undefined ? null : tempo.toSeconds(next.start) - offAt,
+          cue,
+        };
       });
     });
 }

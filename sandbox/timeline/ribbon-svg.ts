@@ -46,7 +46,9 @@ export function ribbonSvg(ribbon: RibbonCells, drawing: RibbonDrawing): string {
     `<svg xmlns="http://www.w3.org/2000/svg" ${size} viewBox="0 0 ${number(width)} ${number(height)}" preserveAspectRatio="none" ${label}>`,
     "<defs>",
     isPinked ? `<clipPath id="${id}-cut"><path d="${pinkedEdge(width, height)}"/></clipPath>` : "",
-    pattern(`${id}-bare`, cell, gap, (x, y, isOver) => square(x, y, cell.width, cell.height - gap, isOver ? weave.over : weave.under)),
+    pattern(`${id}-bare`, cell, gap, (x, y, isOver) =>
+      square(x, y, cell.width, cell.height - gap, isOver ? weave.over : weave.under),
+    ),
     pattern(`${id}-over`, cell, gap, (x, y, isOver) => thread(x, y, isOver)),
     "</defs>",
     `<g${clip}>`,
@@ -59,7 +61,10 @@ export function ribbonSvg(ribbon: RibbonCells, drawing: RibbonDrawing): string {
 
   function thread(x: number, y: number, isOver: boolean): string {
     const tall = cell.height - gap;
-    if (isOver) return tall > 4 ? `<rect x="${number(x)}" y="${number(y)}" width="${number(cell.width)}" height="1" fill="#fff" fill-opacity=".07"/>` : "";
+    if (isOver)
+      return tall > 4
+        ? `<rect x="${number(x)}" y="${number(y)}" width="${number(cell.width)}" height="1" fill="#fff" fill-opacity=".07"/>`
+        : "";
     const edge = cell.height * 0.06;
     const wide = `x="${number(x)}" width="${number(cell.width)}" fill="${weave.under}"`;
     return (
@@ -70,17 +75,28 @@ export function ribbonSvg(ribbon: RibbonCells, drawing: RibbonDrawing): string {
 }
 
 /** Two by two cells that repeat: every second thread lies over. */
-function pattern(id: string, cell: { readonly width: number; readonly height: number }, gap: number, draw: (x: number, y: number, isOver: boolean) => string): string {
-  const drawn = [0, 1].flatMap((row) => [0, 1].map((column) => draw(column * cell.width, row * cell.height + gap / 2, (row + column) % 2 === 1)));
+function pattern(
+  id: string,
+  cell: { readonly width: number; readonly height: number },
+  gap: number,
+  draw: (x: number, y: number, isOver: boolean) => string,
+): string {
+  const drawn = [0, 1].flatMap((row) =>
+    [0, 1].map((column) => draw(column * cell.width, row * cell.height + gap / 2, (row + column) % 2 === 1)),
+  );
   return `<pattern id="${id}" patternUnits="userSpaceOnUse" width="${number(2 * cell.width)}" height="${number(2 * cell.height)}">${drawn.join("")}</pattern>`;
 }
 
 /** One path for all cells of one colour and strength: the text is a fifth as long as with shapes of their own. */
-function litCells(ribbon: RibbonCells, cell: { readonly width: number; readonly height: number }, gap: number): string[] {
+function litCells(
+  ribbon: RibbonCells,
+  cell: { readonly width: number; readonly height: number },
+  gap: number,
+): string[] {
   const paths = new Map<string, string>();
   const tall = number(cell.height - gap);
   for (let row = 0; row < ribbon.rows; row++)
-    for (let column = 0; column < ribbon.columns; ) {
+    for (let column = 0; column < ribbon.columns;) {
       const fill = fillOf(ribbon, row * ribbon.columns + column);
       let end = column + 1;
       while (end < ribbon.columns && fillOf(ribbon, row * ribbon.columns + end) === fill) end++;
@@ -98,7 +114,11 @@ function fillOf(ribbon: RibbonCells, cell: number): string {
   const at = cell * 4;
   const strength = ribbon.cells[at + 3] ?? 0;
   if (strength < 4) return "";
-  const channels = [0, 1, 2].map((channel) => Math.min(255, Math.round((ribbon.cells[at + channel] ?? 0) / 8) * 8).toString(16).padStart(2, "0"));
+  const channels = [0, 1, 2].map((channel) =>
+    Math.min(255, Math.round((ribbon.cells[at + channel] ?? 0) / 8) * 8)
+      .toString(16)
+      .padStart(2, "0"),
+  );
   return `fill="#${channels.join("")}" fill-opacity="${number(Math.min(1, Math.max(1, Math.round(strength / 8)) / 32))}"`;
 }
 
@@ -108,10 +128,16 @@ function pinkedEdge(width: number, height: number): string {
   const teeth = Math.max(2, Math.round(height / (depth * 2)));
   const points: string[] = ["M0 0", `L${number(width)} 0`];
   for (let tooth = 0; tooth < teeth; tooth++)
-    points.push(`L${number(width - depth)} ${number(((tooth + 0.5) * height) / teeth)}`, `L${number(width)} ${number(((tooth + 1) * height) / teeth)}`);
+    points.push(
+      `L${number(width - depth)} ${number(((tooth + 0.5) * height) / teeth)}`,
+      `L${number(width)} ${number(((tooth + 1) * height) / teeth)}`,
+    );
   points.push(`L0 ${number(height)}`);
   for (let tooth = teeth - 1; tooth >= 0; tooth--)
-    points.push(`L${number(depth)} ${number(((tooth + 0.5) * height) / teeth)}`, `L0 ${number((tooth * height) / teeth)}`);
+    points.push(
+      `L${number(depth)} ${number(((tooth + 0.5) * height) / teeth)}`,
+      `L0 ${number((tooth * height) / teeth)}`,
+    );
   return `${points.join("")}Z`;
 }
 
@@ -121,4 +147,5 @@ const square = (x: number, y: number, width: number, height: number, fill: strin
 /** At most two places after the point, no needless zeros. */
 const number = (value: number) => String(Math.round(value * 100) / 100);
 
-const escapeText = (text: string) => text.replace(/&/g, "&amp;").replace(/"/g, "&quot;").replace(/</g, "&lt;").replace(/>/g, "&gt;");
+const escapeText = (text: string) =>
+  text.replace(/&/g, "&amp;").replace(/"/g, "&quot;").replace(/</g, "&lt;").replace(/>/g, "&gt;");

@@ -33,7 +33,11 @@ const LOOKS_PER_CELL = 4;
  * Gives the ribbon's cells of a timeline; at most one row a front. An incomplete timeline has bare
  * weave after its last cue. About 1300 frames are sampled.
  */
-export function ribbonCells(timeline: Timeline, layout: Layout, size: { readonly rows: number; readonly columns: number } = { rows: RIBBON_ROWS, columns: RIBBON_COLUMNS }): RibbonCells {
+export function ribbonCells(
+  timeline: Timeline,
+  layout: Layout,
+  size: { readonly rows: number; readonly columns: number } = { rows: RIBBON_ROWS, columns: RIBBON_COLUMNS },
+): RibbonCells {
   const lights = listLights(layout);
   const cursor = createLightsCursor(timeline, lights, buildTracks(timeline));
   const fronts = listFronts(layout);
@@ -52,7 +56,13 @@ export function ribbonCells(timeline: Timeline, layout: Layout, size: { readonly
       for (let light = 0; light < lights.length; light++) {
         const level = frame.level[light] ?? 0;
         if (level <= 0) continue;
-        addLight(sums, ((rowOfLight[light] ?? 0) * columns + column) * 4, frame, light, (level / 100) * ((shares[light] ?? 0) / LOOKS_PER_CELL));
+        addLight(
+          sums,
+          ((rowOfLight[light] ?? 0) * columns + column) * 4,
+          frame,
+          light,
+          (level / 100) * ((shares[light] ?? 0) / LOOKS_PER_CELL),
+        );
       }
     }
   }
@@ -89,7 +99,8 @@ function toCells(sums: Float64Array, count: number): Uint8Array {
   for (let cell = 0; cell < count * 4; cell += 4) {
     const level = sums[cell + 3] ?? 0;
     if (level <= 0) continue;
-    for (let channel = 0; channel < 3; channel++) cells[cell + channel] = Math.round((sums[cell + channel] ?? 0) / level);
+    for (let channel = 0; channel < 3; channel++)
+      cells[cell + channel] = Math.round((sums[cell + channel] ?? 0) / level);
     cells[cell + 3] = Math.max(1, Math.round(255 * Math.min(1, level) ** STRENGTH_POWER));
   }
   return cells;
@@ -99,7 +110,10 @@ function toCells(sums: Float64Array, count: number): Uint8Array {
  * Gives a smaller ribbon of a ribbon: each new cell is the mean of the cells it covers, in levels,
  * not in strengths. Sizes that are not smaller are kept. Fresh.
  */
-export function shrinkRibbon(ribbon: RibbonCells, size: { readonly rows: number; readonly columns: number }): RibbonCells {
+export function shrinkRibbon(
+  ribbon: RibbonCells,
+  size: { readonly rows: number; readonly columns: number },
+): RibbonCells {
   const rows = Math.min(size.rows, ribbon.rows);
   const columns = Math.min(size.columns, ribbon.columns);
   const sums = new Float64Array(rows * columns * 4);
@@ -117,7 +131,8 @@ export function shrinkRibbon(ribbon: RibbonCells, size: { readonly rows: number;
         for (let x = left; x < right; x++) {
           const from = (y * ribbon.columns + x) * 4;
           const weight = share * ((ribbon.cells[from + 3] ?? 0) / 255) ** (1 / STRENGTH_POWER);
-          for (let channel = 0; channel < 3; channel++) sums[to + channel] = (sums[to + channel] ?? 0) + weight * (ribbon.cells[from + channel] ?? 0);
+          for (let channel = 0; channel < 3; channel++)
+            sums[to + channel] = (sums[to + channel] ?? 0) + weight * (ribbon.cells[from + channel] ?? 0);
           sums[to + 3] = (sums[to + 3] ?? 0) + weight;
         }
     }
@@ -134,6 +149,9 @@ export function toRibbonPicture(ribbon: RibbonCells): RibbonPicture {
 export function decodeRibbon(picture: RibbonPicture): RibbonCells {
   const cells = fromBase64(picture.cells);
   const wanted = picture.rows * picture.columns * 4;
-  if (cells.length !== wanted) throw new RangeError(`The ribbon has ${cells.length} bytes; ${picture.rows} rows of ${picture.columns} cells have ${wanted}.`);
+  if (cells.length !== wanted)
+    throw new RangeError(
+      `The ribbon has ${cells.length} bytes; ${picture.rows} rows of ${picture.columns} cells have ${wanted}.`,
+    );
   return { rows: picture.rows, columns: picture.columns, cells };
 }

@@ -38,11 +38,17 @@ export function listSongSpans(song: BeatMap): readonly SongSpan[] {
 }
 
 /** Gives the bars of a song in ticks, the pick-up included. */
-export function listBarSpans(song: BeatMap): readonly { readonly number: number; readonly start: number; readonly end: number }[] {
+export function listBarSpans(
+  song: BeatMap,
+): readonly { readonly number: number; readonly start: number; readonly end: number }[] {
   const endTick = (song.beats.length - 1) * TICKS_PER_BEAT;
   return song.bars.map(({ number, start }, index) => {
     const next = song.bars[index + 1];
-    return { number, start: Math.round(start * TICKS_PER_BEAT), end: next === undefined ? endTick : Math.round(next.start * TICKS_PER_BEAT) };
+    return {
+      number,
+      start: Math.round(start * TICKS_PER_BEAT),
+      end: next === undefined ? endTick : Math.round(next.start * TICKS_PER_BEAT),
+    };
   });
 }
 
@@ -67,7 +73,11 @@ function splitBars(song: BeatMap, start: number, end: number): { start: number; 
   const groups: { start: number; end: number; name: null }[] = [];
   for (let first = 0; first < bars.length; first += GROUP_BARS) {
     const last = bars[Math.min(first + GROUP_BARS, bars.length) - 1];
-    groups.push({ start: Math.max(start, bars[first]?.start ?? start), end: Math.min(end, last?.end ?? end), name: null });
+    groups.push({
+      start: Math.max(start, bars[first]?.start ?? start),
+      end: Math.min(end, last?.end ?? end),
+      name: null,
+    });
   }
   return groups;
 }

@@ -14,13 +14,16 @@ export interface OnSpan {
  * a pulse running; sorted, with a gap between any two, cut at the song's end. Exact, not sampled.
  */
 export function listOnSpans(tracks: Tracks, light: number): readonly OnSpan[] {
-  const spans = [...levelSpans(tracks, light), ...pulseSpans(tracks, light)].sort((a, b) => a.start - b.start || a.cue - b.cue);
+  const spans = [...levelSpans(tracks, light), ...pulseSpans(tracks, light)].sort(
+    (a, b) => a.start - b.start || a.cue - b.cue,
+  );
   const merged: OnSpan[] = [];
   for (const span of spans) {
     const end = Math.min(span.end, tracks.endTick);
     if (span.start >= end) continue;
     const last = merged.at(-1);
-    if (last !== undefined && span.start <= last.end) merged[merged.length - 1] = { ...last, end: Math.max(last.end, end) };
+    if (last !== undefined && span.start <= last.end)
+      merged[merged.length - 1] = { ...last, end: Math.max(last.end, end) };
     else merged.push({ ...span, end });
   }
   return merged;

@@ -51,9 +51,24 @@ export interface PulseTrack extends Track {
 export function buildTracks(timeline: Timeline): Tracks {
   const { lightCount, endTick } = timeline;
   const { levels, colours, pulses } = countEntries(timeline);
-  const level: LevelTrack = { ...newTrack(levels), from: newFloats(levels), to: newFloats(levels), length: newWholes(levels) };
-  const colour: ColourTrack = { ...newTrack(colours), from: newFloats(colours, 3), to: newFloats(colours, 3), length: newWholes(colours) };
-  const pulse: PulseTrack = { ...newTrack(pulses), length: newWholes(pulses), end: newFloats(pulses), latestEnd: newFloats(pulses) };
+  const level: LevelTrack = {
+    ...newTrack(levels),
+    from: newFloats(levels),
+    to: newFloats(levels),
+    length: newWholes(levels),
+  };
+  const colour: ColourTrack = {
+    ...newTrack(colours),
+    from: newFloats(colours, 3),
+    to: newFloats(colours, 3),
+    length: newWholes(colours),
+  };
+  const pulse: PulseTrack = {
+    ...newTrack(pulses),
+    length: newWholes(pulses),
+    end: newFloats(pulses),
+    latestEnd: newFloats(pulses),
+  };
   fillTracks(timeline, level, colour, pulse);
   return { lightCount, endTick, level, colour, pulse };
 }
@@ -106,7 +121,8 @@ function countEntries({ cues, selections, lightCount }: Timeline) {
     for (const light of selections[cues.selection[cue] ?? 0] ?? []) counts[light + 1] = (counts[light + 1] ?? 0) + 1;
   }
   for (const counts of [levels, colours, pulses])
-    for (let light = 0; light < lightCount; light++) counts[light + 1] = (counts[light + 1] ?? 0) + (counts[light] ?? 0);
+    for (let light = 0; light < lightCount; light++)
+      counts[light + 1] = (counts[light + 1] ?? 0) + (counts[light] ?? 0);
   return { levels, colours, pulses };
 }
 
@@ -115,7 +131,12 @@ const newWholes = (first: Uint32Array) => new Uint32Array(entriesIn(first));
 const newFloats = (first: Uint32Array, each = 1) => new Float64Array(entriesIn(first) * each);
 const newTrack = (first: Uint32Array): Track => ({ first, tick: newWholes(first), cue: newWholes(first) });
 
-function fillTracks({ cues, selections, lightCount }: Timeline, level: LevelTrack, colour: ColourTrack, pulse: PulseTrack): void {
+function fillTracks(
+  { cues, selections, lightCount }: Timeline,
+  level: LevelTrack,
+  colour: ColourTrack,
+  pulse: PulseTrack,
+): void {
   const nextLevel = level.first.slice();
   const nextColour = colour.first.slice();
   const nextPulse = pulse.first.slice();
@@ -140,7 +161,9 @@ function fillTracks({ cues, selections, lightCount }: Timeline, level: LevelTrac
         const hasBefore = entry > (colour.first[light] ?? 0);
         colour.length[entry] = length;
         for (let channel = 0; channel < 3; channel++) {
-          colour.from[entry * 3 + channel] = hasBefore ? channelAt(colour, entry - 1, channel, tick) : (white[channel] ?? 1);
+          colour.from[entry * 3 + channel] = hasBefore
+            ? channelAt(colour, entry - 1, channel, tick)
+            : (white[channel] ?? 1);
           colour.to[entry * 3 + channel] = target[channel] ?? 0;
         }
       }
@@ -172,8 +195,15 @@ function addEntry(track: Track, next: Uint32Array, light: number, tick: number, 
   return entry;
 }
 
-function endPulses(pulse: PulseTrack, runningFrom: Uint32Array, nextPulse: Uint32Array, light: number, tick: number): void {
+function endPulses(
+  pulse: PulseTrack,
+  runningFrom: Uint32Array,
+  nextPulse: Uint32Array,
+  light: number,
+  tick: number,
+): void {
   const until = nextPulse[light] ?? 0;
-  for (let entry = runningFrom[light] ?? 0; entry < until; entry++) pulse.end[entry] = Math.min(pulse.end[entry] ?? 0, tick);
+  for (let entry = runningFrom[light] ?? 0; entry < until; entry++)
+    pulse.end[entry] = Math.min(pulse.end[entry] ?? 0, tick);
   runningFrom[light] = until;
 }

@@ -34,7 +34,8 @@ export function ensureNativeModule(log: (line: string) => void): void {
 function installCompilers(missing: readonly string[], log: (line: string) => void): void {
   const command = `apt-get update && apt-get install -y ${APT_PACKAGES}`;
   const needs = `The database driver is compiled on this machine and needs ${missing.join(", ")}.`;
-  if (process.getuid?.() !== 0 || !isOnPath("apt-get")) throw new Error(`${needs} Install them first:\n  sudo sh -c "${command}"`);
+  if (process.getuid?.() !== 0 || !isOnPath("apt-get"))
+    throw new Error(`${needs} Install them first:\n  sudo sh -c "${command}"`);
   log(`${needs} Installing them with apt-get ...`);
   const installed = spawnSync("sh", ["-c", command], { encoding: "utf8" });
   if (installed.status !== 0) throw new Error(`${needs} This failed:\n  ${command}\n${installed.stderr}`);

@@ -50,7 +50,8 @@ function assertSqliteVersion(version: string): void {
   for (const [i, least] of SQLITE_MIN_VERSION.entries()) {
     const part = parts[i] ?? 0;
     if (part > least) return;
-    if (part < least) throw new Error(`SQLite ${version} is too old: ${SQLITE_MIN_VERSION.join(".")} or newer is needed.`);
+    if (part < least)
+      throw new Error(`SQLite ${version} is too old: ${SQLITE_MIN_VERSION.join(".")} or newer is needed.`);
   }
 }
 

@@ -13,17 +13,33 @@ export interface SongRow {
   readonly beatMap: BeatMap;
 }
 
-const songColumns = { id: songs.id, title: songs.title, credit: songs.credit, beatMapId: beatMaps.id, beatMap: beatMaps.beatMap };
+const songColumns = {
+  id: songs.id,
+  title: songs.title,
+  credit: songs.credit,
+  beatMapId: beatMaps.id,
+  beatMap: beatMaps.beatMap,
+};
 
 /** The songs that can be used, by title. */
 export function listSongs(db: Db): SongRow[] {
-  return db.select(songColumns).from(songs).innerJoin(beatMaps, eq(beatMaps.id, songs.currentBeatMapId)).orderBy(asc(songs.title)).all();
+  return db
+    .select(songColumns)
+    .from(songs)
+    .innerJoin(beatMaps, eq(beatMaps.id, songs.currentBeatMapId))
+    .orderBy(asc(songs.title))
+    .all();
 }
 
 /** One song, or null when there is none with a beat map. */
 export function findSong(db: Db, songId: string): SongRow | null {
   return (
-    db.select(songColumns).from(songs).innerJoin(beatMaps, eq(beatMaps.id, songs.currentBeatMapId)).where(eq(songs.id, songId)).get() ?? null
+    db
+      .select(songColumns)
+      .from(songs)
+      .innerJoin(beatMaps, eq(beatMaps.id, songs.currentBeatMapId))
+      .where(eq(songs.id, songId))
+      .get() ?? null
   );
 }
 
@@ -43,7 +59,11 @@ export function getBeatMap(db: Db, beatMapId: string): BeatMap {
 
 /** The score file of a song. Throws `not-found`. */
 export function getSongFile(db: Db, songId: string): { mediaType: string; bytes: Buffer } {
-  const row = db.select({ mediaType: songFiles.mediaType, bytes: songFiles.bytes }).from(songFiles).where(eq(songFiles.songId, songId)).get();
+  const row = db
+    .select({ mediaType: songFiles.mediaType, bytes: songFiles.bytes })
+    .from(songFiles)
+    .where(eq(songFiles.songId, songId))
+    .get();
   if (!row) throw new ProblemError("not-found");
   return row;
 }
@@ -51,7 +71,11 @@ export function getSongFile(db: Db, songId: string): { mediaType: string; bytes:
 /** Title and length in seconds of every song by id; the database reads the length, so that no beat map is parsed. */
 export function listSongFacts(db: Db): Map<string, { title: string; seconds: number }> {
   const rows = db
-    .select({ id: songs.id, title: songs.title, micros: sql<number>`json_extract(${beatMaps.beatMap}, '$.beats[#-1]')` })
+    .select({
+      id: songs.id,
+      title: songs.title,
+      micros: sql<number>`json_extract(${beatMaps.beatMap}, '$.beats[#-1]')`,
+    })
     .from(songs)
     .innerJoin(beatMaps, eq(beatMaps.id, songs.currentBeatMapId))
     .all();

@@ -14,7 +14,8 @@ export function findSquare(db: Db): SquareRow | null {
 /** The layout that drafts follow now. Throws `not-found` when no square was described yet. */
 export function getCurrentLayout(db: Db): LayoutRow {
   const layoutId = findSquare(db)?.currentLayoutId;
-  if (layoutId === null || layoutId === undefined) throw new ProblemError("not-found", { detail: "The square is not described yet." });
+  if (layoutId === null || layoutId === undefined)
+    throw new ProblemError("not-found", { detail: "The square is not described yet." });
   return getLayout(db, layoutId);
 }
 
@@ -27,7 +28,12 @@ export function getLayout(db: Db, layoutId: string): LayoutRow {
 
 /** A layout is frozen once a version was made on it or a lineup was published. */
 export function isLayoutFrozen(db: Db, layoutId: string): boolean {
-  const version = db.select({ id: showVersions.id }).from(showVersions).where(eq(showVersions.layoutId, layoutId)).limit(1).get();
+  const version = db
+    .select({ id: showVersions.id })
+    .from(showVersions)
+    .where(eq(showVersions.layoutId, layoutId))
+    .limit(1)
+    .get();
   if (version) return true;
   const isCurrent = findSquare(db)?.currentLayoutId === layoutId;
   return isCurrent && db.select({ id: lineupPublications.id }).from(lineupPublications).limit(1).get() !== undefined;

@@ -13,8 +13,7 @@ export interface RunRequest {
 
 /** Child process to pool. */
 export type ChildMessage =
-  | { readonly kind: "ready" }
-  | { readonly kind: "done"; readonly id: number; readonly outcome: TimedOutcome };
+  { readonly kind: "ready" } | { readonly kind: "done"; readonly id: number; readonly outcome: TimedOutcome };
 
 /** Worker thread to child process. `isSpent`: the run ended in a way after which the thread is not used again. */
 export type ThreadMessage =

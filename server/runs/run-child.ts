@@ -35,13 +35,16 @@ class Thread {
 
   start(request: RunRequest): void {
     this.#request = request;
-    this.#timer = setTimeout(() => this.#end("too-much-work", `Stopped after ${request.deadlineMs} ms.`), request.deadlineMs);
+    this.#timer = setTimeout(
+      () => this.#end("too-much-work", `Stopped after ${request.deadlineMs} ms.`),
+      request.deadlineMs,
+    );
     this.#worker.postMessage(request);
   }
 
   #fail(error: Error): void {
     if (!this.#isReady && ++failedStarts >= MAX_FAILED_STARTS) {
-      console.error(error);
+      process.stderr.write(`${error.stack ?? error.message}\n`);
       process.exit(1);
     }
     this.#end("could-not-run", `${error.name}: ${error.message}`);
@@ -67,7 +70,10 @@ class Thread {
     const request = this.#request;
     this.#request = null;
     if (request !== null) {
-      const outcome = { ...createStoppedOutcome(request.input.source, code, details), engineMs: code === "too-much-work" ? request.deadlineMs : 0 };
+      const outcome = {
+        ...createStoppedOutcome(request.input.source, code, details),
+        engineMs: code === "too-much-work" ? request.deadlineMs : 0,
+      };
       send({ kind: "done", id: request.id, outcome });
     }
     this.#replace();

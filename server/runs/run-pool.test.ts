@@ -5,7 +5,8 @@ import { SMALL_LAYOUT, SMALL_SONG, runWell } from "../../tests/support/run-scrip
 import { FairQueue } from "./fair-queue.ts";
 import { RunPoolClosedError, RunQueueFullError, createRunPool, type RunPool } from "./run-pool.ts";
 
-const HONEST = 'for (const front of square.fronts) {\n  front.pulse(1, "gold");\n  wait(roll(3));\n}\nsquare.all.shuffled().off();';
+const HONEST =
+  'for (const front of square.fronts) {\n  front.pulse(1, "gold");\n  wait(roll(3));\n}\nsquare.all.shuffled().off();';
 
 /** A child process loads the compiler and the engine; on a busy machine that takes its time. */
 const SLOW_MS = 90_000;
@@ -39,24 +40,34 @@ describe("createRunPool", () => {
     expect(outcome.timeline?.selections[0]).toEqual(Uint16Array.from([0, 1, 2, 3, 4, 5, 6, 7, 8]));
   });
 
-  it.each(HOSTILE_SCRIPTS.map((script) => [script.name, script] as const))("answers %s with one problem and runs the next script well", async (_, { source, codes, needsKill }) => {
-    const target = needsKill ? hasty : pool;
-    const outcome = await target.run(inputOf(source));
-    expect(codes).toContain(outcome.ok ? "it ran" : outcome.problem.code);
-    expect(await target.run(inputOf(HONEST))).toMatchObject({ ok: true, hash: golden });
-  }, SLOW_MS);
+  it.each(HOSTILE_SCRIPTS.map((script) => [script.name, script] as const))(
+    "answers %s with one problem and runs the next script well",
+    async (_, { source, codes, needsKill }) => {
+      const target = needsKill ? hasty : pool;
+      const outcome = await target.run(inputOf(source));
+      expect(codes).toContain(outcome.ok ? "it ran" : outcome.problem.code);
+      expect(await target.run(inputOf(HONEST))).toMatchObject({ ok: true, hash: golden });
+    },
+    SLOW_MS,
+  );
 
-  it("answers an honest run of another class while one class has many hostile ones waiting", { timeout: SLOW_MS }, async () => {
-    const order: string[] = [];
-    const hostile = Array.from({ length: 8 }, () => pool.run(inputOf("while (true) {}"), { classId: "loud" }).then(() => order.push("loud")));
-    const honest = pool.run(inputOf(HONEST), { classId: "quiet" }).then((outcome) => {
-      order.push("quiet");
-      return outcome;
-    });
-    expect(await honest).toMatchObject({ ok: true, hash: golden });
-    await Promise.all(hostile);
-    expect(order.indexOf("quiet")).toBeLessThanOrEqual(4);
-  });
+  it(
+    "answers an honest run of another class while one class has many hostile ones waiting",
+    { timeout: SLOW_MS },
+    async () => {
+      const order: string[] = [];
+      const hostile = Array.from({ length: 8 }, () =>
+        pool.run(inputOf("while (true) {}"), { classId: "loud" }).then(() => order.push("loud")),
+      );
+      const honest = pool.run(inputOf(HONEST), { classId: "quiet" }).then((outcome) => {
+        order.push("quiet");
+        return outcome;
+      });
+      expect(await honest).toMatchObject({ ok: true, hash: golden });
+      await Promise.all(hostile);
+      expect(order.indexOf("quiet")).toBeLessThanOrEqual(4);
+    },
+  );
 
   it("refuses a run when too many wait, and takes the next one later", { timeout: SLOW_MS }, async () => {
     const small = createRunPool({ threads: 1, maxWaiting: 1 });
@@ -86,7 +97,14 @@ describe("FairQueue", () => {
     for (const item of ["a1", "a2", "a3"]) queue.add("a", item);
     queue.add("b", "b1");
     queue.add("b", "b2");
-    expect([queue.take(), queue.take(), queue.take(), queue.take(), queue.take(), queue.take()]).toEqual(["a1", "b1", "a2", "b2", "a3", undefined]);
+    expect([queue.take(), queue.take(), queue.take(), queue.take(), queue.take(), queue.take()]).toEqual([
+      "a1",
+      "b1",
+      "a2",
+      "b2",
+      "a3",
+      undefined,
+    ]);
     expect(queue.size).toBe(0);
   });
 

@@ -89,7 +89,8 @@ class ChildRunPool implements RunPool {
 
   run(input: RunInput, options: { readonly classId?: string } = {}): Promise<TimedOutcome> {
     if (this.#isClosed) return Promise.reject(new RunPoolClosedError("The run pool is closed."));
-    if (this.#queue.size >= this.#maxWaiting) return Promise.reject(new RunQueueFullError(`${this.#queue.size} runs wait already.`));
+    if (this.#queue.size >= this.#maxWaiting)
+      return Promise.reject(new RunQueueFullError(`${this.#queue.size} runs wait already.`));
     return new Promise((resolve, reject) => {
       const group = options.classId ?? NO_CLASS;
       this.#queue.add(group, { group, input, resolve, reject, tries: 0 });
@@ -123,7 +124,11 @@ class ChildRunPool implements RunPool {
     const child = fork(CHILD, [], {
       serialization: "advanced",
       execArgv: ["--import", "tsx"],
-      env: { NODE_ENV: process.env["NODE_ENV"] ?? "production", PATH: process.env["PATH"] ?? "", DUSKBELL_RUN_THREADS: String(this.#threads) },
+      env: {
+        NODE_ENV: process.env["NODE_ENV"] ?? "production",
+        PATH: process.env["PATH"] ?? "",
+        DUSKBELL_RUN_THREADS: String(this.#threads),
+      },
     });
     child.on("message", (message: ChildMessage) => this.#hear(child, message));
     child.on("error", () => this.#replaceChild(child));
@@ -154,7 +159,12 @@ class ChildRunPool implements RunPool {
   }
 
   #advance(): void {
-    while (this.#isReady && !this.#isClosed && this.#running.size < this.#threads && this.#runsOfChild < RUNS_PER_CHILD) {
+    while (
+      this.#isReady &&
+      !this.#isClosed &&
+      this.#running.size < this.#threads &&
+      this.#runsOfChild < RUNS_PER_CHILD
+    ) {
       const job = this.#queue.take();
       if (job === undefined) return;
       this.#start(job);
@@ -183,7 +193,9 @@ class ChildRunPool implements RunPool {
     clearTimeout(this.#startTimer);
     if (!this.#isReady && ++this.#failedStarts >= MAX_FAILED_STARTS) {
       this.#failedStarts = 0;
-      this.#rejectAll(new RunPoolBrokenError(`The process that runs scripts failed to start ${MAX_FAILED_STARTS} times.`));
+      this.#rejectAll(
+        new RunPoolBrokenError(`The process that runs scripts failed to start ${MAX_FAILED_STARTS} times.`),
+      );
     }
     const lost = [...this.#running.values()];
     this.#running.clear();
@@ -191,7 +203,11 @@ class ChildRunPool implements RunPool {
     for (const { job, timer } of lost) {
       clearTimeout(timer);
       if (job.tries < MAX_TRIES) this.#queue.addFirst(job.group, job);
-      else job.resolve({ ...createStoppedOutcome(job.input.source, "could-not-run", "The process that ran it ended."), engineMs: 0 });
+      else
+        job.resolve({
+          ...createStoppedOutcome(job.input.source, "could-not-run", "The process that ran it ended."),
+          engineMs: 0,
+        });
     }
     this.#advance();
   }

@@ -17,7 +17,11 @@ function start(engine: Engine): void {
     try {
       outcome = await engine.run(input);
     } catch (error) {
-      outcome = createStoppedOutcome(input.source, "could-not-run", error instanceof Error ? `${error.name}: ${error.message}` : String(error));
+      outcome = createStoppedOutcome(
+        input.source,
+        "could-not-run",
+        error instanceof Error ? `${error.name}: ${error.message}` : String(error),
+      );
     }
     const timed: TimedOutcome = { ...outcome, engineMs: performance.now() - started };
     send({ kind: "done", id, outcome: timed, isSpent: !outcome.ok && outcome.problem.code === "could-not-run" });

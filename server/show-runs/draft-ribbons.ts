@@ -32,9 +32,15 @@ export function createDraftRibbons({ db, runs, log }: FeatureDeps): DraftRibbons
     if (!draft || !song) return;
     const { layout } = getCurrentLayout(db);
     const [classId] = listShowClassIds(db, { id: showId, assignmentId: draft.assignmentId });
-    const outcome = await runs.run({ source: draft.source, songId: song.id, song: song.beatMap, layout, seed: draft.seed }, classId === undefined ? {} : { classId });
+    const outcome = await runs.run(
+      { source: draft.source, songId: song.id, song: song.beatMap, layout, seed: draft.seed },
+      classId === undefined ? {} : { classId },
+    );
     if (!outcome.ok) return;
-    db.update(drafts).set({ ribbon: encodeRibbon(ribbonCells(outcome.timeline, layout)) }).where(eq(drafts.showId, showId)).run();
+    db.update(drafts)
+      .set({ ribbon: encodeRibbon(ribbonCells(outcome.timeline, layout)) })
+      .where(eq(drafts.showId, showId))
+      .run();
   }
 
   async function runUntilSettled(showId: string): Promise<void> {

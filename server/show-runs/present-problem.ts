@@ -3,9 +3,23 @@ import type { FindingSchema, ScriptProblemSchema } from "../../shared/contracts/
 import type { Finding, Problem } from "../../sandbox/engine/model.ts";
 
 /** A script's problem for the wire; its certain fix is the editor's business and stays behind. */
-export function presentProblem({ code, sentence, hint, range, excerpt, details }: Problem): z.infer<typeof ScriptProblemSchema> {
+export function presentProblem({
+  code,
+  sentence,
+  hint,
+  range,
+  excerpt,
+  details,
+}: Problem): z.infer<typeof ScriptProblemSchema> {
   const { line, column, endLine, endColumn } = range;
-  return { code, sentence, hint, range: { line, column, endLine, endColumn }, excerpt, ...(details === undefined ? {} : { details }) };
+  return {
+    code,
+    sentence,
+    hint,
+    range: { line, column, endLine, endColumn },
+    excerpt,
+    ...(details === undefined ? {} : { details }),
+  };
 }
 
 /** A finding for the wire. */
@@ -16,7 +30,9 @@ export function presentFinding(finding: Finding): z.infer<typeof FindingSchema> 
     severity,
     sentence,
     ...(hint === undefined ? {} : { hint }),
-    ...(measured === undefined ? {} : { measured: { value: measured.value, limit: measured.limit, unit: measured.unit } }),
+    ...(measured === undefined
+      ? {}
+      : { measured: { value: measured.value, limit: measured.limit, unit: measured.unit } }),
     moments: [...finding.moments],
     lights: [...finding.lights],
     lines: [...finding.lines],

@@ -8,7 +8,11 @@ export async function runOrSayBusy({ runs }: Pick<FeatureDeps, "runs">, input: R
   try {
     return await runs.run(input, classId === null ? {} : { classId });
   } catch (error) {
-    if (error instanceof RunQueueFullError) throw new ProblemError("busy", { detail: "Many scripts are running. Yours is safe. Please try again in a moment.", cause: error });
+    if (error instanceof RunQueueFullError)
+      throw new ProblemError("busy", {
+        detail: "Many scripts are running. Yours is safe. Please try again in a moment.",
+        cause: error,
+      });
     throw error;
   }
 }

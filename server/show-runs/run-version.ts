@@ -24,7 +24,11 @@ const underWay = new Map<string, Promise<RunRow | null>>();
  * Runs a version on its own layout and beat map, checks it and keeps the run. Gives null when the pool
  * could not take it (it is full or closing); the version is then run by the next start-up pass.
  */
-export async function runVersion(deps: FeatureDeps, version: VersionRow, classId: string | null): Promise<RunRow | null> {
+export async function runVersion(
+  deps: FeatureDeps,
+  version: VersionRow,
+  classId: string | null,
+): Promise<RunRow | null> {
   const known = findLatestRun(deps.db, version.id);
   if (known) return known;
   const running = underWay.get(version.id) ?? runNow(deps, version, classId).finally(() => underWay.delete(version.id));
@@ -32,7 +36,11 @@ export async function runVersion(deps: FeatureDeps, version: VersionRow, classId
   return running;
 }
 
-async function runNow({ db, clock, runs, log }: FeatureDeps, version: VersionRow, classId: string | null): Promise<RunRow | null> {
+async function runNow(
+  { db, clock, runs, log }: FeatureDeps,
+  version: VersionRow,
+  classId: string | null,
+): Promise<RunRow | null> {
   const { layout } = getLayout(db, version.layoutId);
   const song = getBeatMap(db, version.beatMapId);
   try {
@@ -51,7 +59,10 @@ async function runNow({ db, clock, runs, log }: FeatureDeps, version: VersionRow
     insertRun(db, row);
     return row;
   } catch (error) {
-    log.error({ err: error, versionId: version.id }, "a version that was handed in was not run; it waits for the next pass");
+    log.error(
+      { err: error, versionId: version.id },
+      "a version that was handed in was not run; it waits for the next pass",
+    );
     return null;
   }
 }

@@ -28,20 +28,37 @@ export function findVersion(db: Db, versionId: string): VersionRow | null {
 /** The latest run of each of these versions. */
 export function listLatestRuns(db: Db, versionIds: readonly string[]): Map<string, RunFace> {
   if (versionIds.length === 0) return new Map();
-  const rows = db.select(faceColumns).from(runs).where(inArray(runs.versionId, [...versionIds])).orderBy(asc(runs.createdAt), asc(sql`runs.rowid`)).all();
+  const rows = db
+    .select(faceColumns)
+    .from(runs)
+    .where(inArray(runs.versionId, [...versionIds]))
+    .orderBy(asc(runs.createdAt), asc(sql`runs.rowid`))
+    .all();
   return new Map(rows.map((row) => [row.versionId, row]));
 }
 
 /** The runs with these ids. */
 export function listRuns(db: Db, runIds: readonly string[]): Map<string, RunFace> {
   if (runIds.length === 0) return new Map();
-  const rows = db.select(faceColumns).from(runs).where(inArray(runs.id, [...runIds])).all();
+  const rows = db
+    .select(faceColumns)
+    .from(runs)
+    .where(inArray(runs.id, [...runIds]))
+    .all();
   return new Map(rows.map((row) => [row.id, row]));
 }
 
 /** The latest run of a version with its timeline, or null while the server has not run it. */
 export function findLatestRun(db: Db, versionId: string): RunRow | null {
-  return db.select().from(runs).where(eq(runs.versionId, versionId)).orderBy(desc(runs.createdAt), desc(sql`runs.rowid`)).limit(1).get() ?? null;
+  return (
+    db
+      .select()
+      .from(runs)
+      .where(eq(runs.versionId, versionId))
+      .orderBy(desc(runs.createdAt), desc(sql`runs.rowid`))
+      .limit(1)
+      .get() ?? null
+  );
 }
 
 /** Versions that were handed in and never ran: the process ended between the two. Oldest first. */

@@ -5,14 +5,21 @@ import { assignments, classTeachers, enrolments, forwards, showAuthors, shows } 
 
 /** How a person stands to a class. */
 export function listClassRelations(db: Db, userId: string, classId: string): Relation[] {
-  return [...(isEnrolled(db, userId, classId) ? ["class-member" as const] : []), ...(teaches(db, userId, [classId]) ? ["class-teacher" as const] : [])];
+  return [
+    ...(isEnrolled(db, userId, classId) ? ["class-member" as const] : []),
+    ...(teaches(db, userId, [classId]) ? ["class-teacher" as const] : []),
+  ];
 }
 
 /**
  * How a person stands to a show. Its teachers are those of the assignment's class; a show for no
  * assignment belongs to every class that an author is enrolled in.
  */
-export function listShowRelations(db: Db, userId: string, show: { readonly id: string; readonly assignmentId: string | null }): Relation[] {
+export function listShowRelations(
+  db: Db,
+  userId: string,
+  show: { readonly id: string; readonly assignmentId: string | null },
+): Relation[] {
   const relations: Relation[] = [];
   if (isAuthor(db, userId, show.id)) relations.push("author");
   if (teaches(db, userId, listShowClassIds(db, show))) relations.push("class-teacher");
@@ -25,7 +32,11 @@ export function listVersionRelations(
   userId: string,
   version: { readonly id: string; readonly showId: string },
 ): Relation[] {
-  const show = db.select({ id: shows.id, assignmentId: shows.assignmentId }).from(shows).where(eq(shows.id, version.showId)).get();
+  const show = db
+    .select({ id: shows.id, assignmentId: shows.assignmentId })
+    .from(shows)
+    .where(eq(shows.id, version.showId))
+    .get();
   const relations = show ? listShowRelations(db, userId, show) : [];
   const forward = db
     .select({ id: forwards.id })
@@ -37,9 +48,17 @@ export function listVersionRelations(
 }
 
 /** Classes that a show belongs to: its assignment's, else those its authors are enrolled in. */
-export function listShowClassIds(db: Db, show: { readonly id: string; readonly assignmentId: string | null }): string[] {
+export function listShowClassIds(
+  db: Db,
+  show: { readonly id: string; readonly assignmentId: string | null },
+): string[] {
   if (show.assignmentId !== null) {
-    return db.select({ id: assignments.classId }).from(assignments).where(eq(assignments.id, show.assignmentId)).all().map((row) => row.id);
+    return db
+      .select({ id: assignments.classId })
+      .from(assignments)
+      .where(eq(assignments.id, show.assignmentId))
+      .all()
+      .map((row) => row.id);
   }
   return db
     .selectDistinct({ id: enrolments.classId })
@@ -52,12 +71,20 @@ export function listShowClassIds(db: Db, show: { readonly id: string; readonly a
 
 /** Tells whether the person wrote the show. */
 export function isAuthor(db: Db, userId: string, showId: string): boolean {
-  const row = db.select({ id: showAuthors.showId }).from(showAuthors).where(and(eq(showAuthors.showId, showId), eq(showAuthors.userId, userId))).get();
+  const row = db
+    .select({ id: showAuthors.showId })
+    .from(showAuthors)
+    .where(and(eq(showAuthors.showId, showId), eq(showAuthors.userId, userId)))
+    .get();
   return row !== undefined;
 }
 
 function isEnrolled(db: Db, userId: string, classId: string): boolean {
-  const row = db.select({ id: enrolments.classId }).from(enrolments).where(and(eq(enrolments.classId, classId), eq(enrolments.userId, userId))).get();
+  const row = db
+    .select({ id: enrolments.classId })
+    .from(enrolments)
+    .where(and(eq(enrolments.classId, classId), eq(enrolments.userId, userId)))
+    .get();
   return row !== undefined;
 }
 

@@ -72,7 +72,9 @@ export const AssignmentSummarySchema = z.object({
     })
     .nullable(),
   /** For the teacher; null for students. */
-  counts: z.object({ students: z.int(), working: z.int(), submitted: z.int(), revise: z.int(), marked: z.int() }).nullable(),
+  counts: z
+    .object({ students: z.int(), working: z.int(), submitted: z.int(), revise: z.int(), marked: z.int() })
+    .nullable(),
 });
 export type AssignmentSummary = z.infer<typeof AssignmentSummarySchema>;
 

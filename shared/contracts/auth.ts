@@ -2,7 +2,7 @@ import { z } from "zod";
 import { defineContract } from "../contract.ts";
 import { ClassIdSchema, SchoolIdSchema, UserIdSchema } from "../ids.ts";
 import { RoleSchema } from "../roles.ts";
-import { InstantSchema, lineText } from "./common.ts";
+import { InstantSchema } from "./common.ts";
 
 /** A class code names a class and is no secret: `7B-TARN`. Case and spaces are forgiven. */
 export const ClassCodeSchema = z
@@ -21,7 +21,13 @@ export const UsernameSchema = z
 export const PassphraseSchema = z
   .string()
   .max(200, "That is too long.")
-  .transform((text) => text.toLowerCase().trim().split(/[\s-]+/).join("-"))
+  .transform((text) =>
+    text
+      .toLowerCase()
+      .trim()
+      .split(/[\s-]+/)
+      .join("-"),
+  )
   .pipe(z.string().min(1, "Type your four words."));
 
 export const PASSWORD_MIN_LENGTH = 15;
@@ -65,7 +71,10 @@ export const authContract = defineContract({
     path: "/api/auth/staff-sign-in",
     summary: "Signs a teacher, coordinator or admin in with e-mail and password.",
     access: "anyone",
-    body: z.object({ email: z.email("An e-mail address looks like name@school.example.").max(200), password: z.string().min(1, "Type your password.").max(256) }),
+    body: z.object({
+      email: z.email("An e-mail address looks like name@school.example.").max(200),
+      password: z.string().min(1, "Type your password.").max(256),
+    }),
     response: SessionSchema,
     problems: ["invalid-request", "wrong-sign-in"],
   },
@@ -117,12 +126,14 @@ export const authContract = defineContract({
     body: z.object({
       classCode: ClassCodeSchema,
       username: UsernameSchema,
-      code: z.string().trim().transform((code) => code.toUpperCase().replace(/[\s-]/g, "")).pipe(z.string().length(8, "The code has 8 letters and numbers.")),
+      code: z
+        .string()
+        .trim()
+        .transform((code) => code.toUpperCase().replace(/[\s-]/g, ""))
+        .pipe(z.string().length(8, "The code has 8 letters and numbers.")),
       passphrase: PassphraseSchema,
     }),
     response: SessionSchema,
     problems: ["invalid-request", "wrong-sign-in"],
   },
 });
-
-export const StaffNameSchema = lineText(80);

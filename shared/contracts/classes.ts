@@ -65,7 +65,9 @@ export const classesContract = defineContract({
     summary: "Adds students by display name and gives their sign-in cards, once.",
     access: ofTeacher,
     params,
-    body: z.object({ displayNames: z.array(lineText(40)).min(1, "Write at least one name.").max(40, "Add at most 40 at a time.") }),
+    body: z.object({
+      displayNames: z.array(lineText(40)).min(1, "Write at least one name.").max(40, "Add at most 40 at a time."),
+    }),
     status: 201,
     response: z.object({ cards: z.array(SignInCardSchema) }),
     problems: ["invalid-request", "not-found"],

@@ -19,7 +19,11 @@ export const lineText = (max: number) =>
     .regex(/^[^\p{Cc}]*$/u, "Leave out line breaks and control characters.");
 
 export const paragraphText = (max: number) =>
-  z.string().trim().max(max, `Use at most ${max} characters.`).regex(/^[^\u0000-\u0008\u000b\u000c\u000e-\u001f]*$/, "Leave out control characters.");
+  z
+    .string()
+    .trim()
+    .max(max, `Use at most ${max} characters.`)
+    .regex(/^[^\u0000-\u0008\u000b\u000c\u000e-\u001f]*$/, "Leave out control characters.");
 
 /** The largest script: 64 KiB of UTF-8. Length in characters is checked here, bytes by the engine. */
 export const SCRIPT_LIMIT_BYTES = 65_536;

@@ -9,7 +9,6 @@ const StepIdSchema = z.string().regex(/^[a-z0-9][a-z0-9-]{1,60}$/, "This is not 
 /** The order of a lesson: predict what happens, run it, find out why, change it, make your own. */
 export const STEP_KINDS = ["predict", "run", "investigate", "change", "make"] as const;
 export const StepKindSchema = z.enum(STEP_KINDS);
-export type StepKind = z.infer<typeof StepKindSchema>;
 
 export const StepProgressSchema = z.object({
   stepId: z.string(),
@@ -41,7 +40,13 @@ export const LessonStepSchema = z.object({
   text: z.array(z.string()),
   starter: z.string().nullable(),
   question: z
-    .object({ ask: z.string(), choices: z.array(z.object({ text: z.string(), isRight: z.boolean(), answer: z.string() })).min(2).max(5) })
+    .object({
+      ask: z.string(),
+      choices: z
+        .array(z.object({ text: z.string(), isRight: z.boolean(), answer: z.string() }))
+        .min(2)
+        .max(5),
+    })
     .nullable(),
   /** The script whose ribbon is "the aim". */
   aim: z.string().nullable(),

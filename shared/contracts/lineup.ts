@@ -1,8 +1,25 @@
 import { z } from "zod";
 import { defineContract } from "../contract.ts";
-import { ForwardIdSchema, LayoutIdSchema, NightIdSchema, SlotIdSchema, SongIdSchema, SubmissionIdSchema, VersionIdSchema } from "../ids.ts";
+import {
+  ForwardIdSchema,
+  LayoutIdSchema,
+  NightIdSchema,
+  SlotIdSchema,
+  SongIdSchema,
+  SubmissionIdSchema,
+  VersionIdSchema,
+} from "../ids.ts";
 import type { Grant } from "../roles.ts";
-import { FindingSchema, InstantSchema, LocalDateSchema, LocalTimeSchema, paragraphText, RibbonSchema, RunSummarySchema, SeveritySchema } from "./common.ts";
+import {
+  FindingSchema,
+  InstantSchema,
+  LocalDateSchema,
+  LocalTimeSchema,
+  paragraphText,
+  RibbonSchema,
+  RunSummarySchema,
+  SeveritySchema,
+} from "./common.ts";
 import { ForwardStateSchema } from "./shows.ts";
 
 const coordinator: readonly Grant[] = [{ role: "coordinator" }];
@@ -57,17 +74,34 @@ export type Night = z.infer<typeof NightSchema>;
 
 /** Something about the plan, not about one show's script. */
 export const LineupFindingSchema = z.object({
-  rule: z.enum(["overlap", "past-quiet-hour", "closed-night", "show-has-stop", "same-class-twice", "not-placed", "layout-changed", "does-not-run"]),
+  rule: z.enum([
+    "overlap",
+    "past-quiet-hour",
+    "closed-night",
+    "show-has-stop",
+    "same-class-twice",
+    "not-placed",
+    "layout-changed",
+    "does-not-run",
+  ]),
   severity: SeveritySchema,
   slotId: SlotIdSchema.nullable(),
   forwardId: ForwardIdSchema.nullable(),
   cause: z.string(),
   sentence: z.string(),
   /** The smallest fix, as one move: to another time, or off the plan. */
-  fix: z.discriminatedUnion("kind", [
-    z.object({ kind: z.literal("move"), slotId: SlotIdSchema, nightId: NightIdSchema, startsAt: LocalTimeSchema, label: z.string() }),
-    z.object({ kind: z.literal("remove"), slotId: SlotIdSchema, label: z.string() }),
-  ]).nullable(),
+  fix: z
+    .discriminatedUnion("kind", [
+      z.object({
+        kind: z.literal("move"),
+        slotId: SlotIdSchema,
+        nightId: NightIdSchema,
+        startsAt: LocalTimeSchema,
+        label: z.string(),
+      }),
+      z.object({ kind: z.literal("remove"), slotId: SlotIdSchema, label: z.string() }),
+    ])
+    .nullable(),
 });
 export type LineupFinding = z.infer<typeof LineupFindingSchema>;
 
@@ -125,9 +159,17 @@ export const lineupContract = defineContract({
     method: "GET",
     path: "/api/forwards/:forwardId",
     summary: "Gives a forwarded show with its check.",
-    access: [{ role: "coordinator", relation: "forwarded" }, { role: "teacher", relation: "class-teacher" }],
+    access: [
+      { role: "coordinator", relation: "forwarded" },
+      { role: "teacher", relation: "class-teacher" },
+    ],
     params: forwardParams,
-    response: z.object({ forward: ForwardSummarySchema, run: RunSummarySchema, layoutId: LayoutIdSchema, findings: z.array(FindingSchema) }),
+    response: z.object({
+      forward: ForwardSummarySchema,
+      run: RunSummarySchema,
+      layoutId: LayoutIdSchema,
+      findings: z.array(FindingSchema),
+    }),
     problems: ["not-found"],
   },
   approve: {
@@ -173,7 +215,12 @@ export const lineupContract = defineContract({
     summary: "Moves or pins a slot; moving onto a taken time swaps when asked to.",
     access: coordinator,
     params: slotParams,
-    body: z.object({ nightId: NightIdSchema.optional(), startsAt: LocalTimeSchema.optional(), isPinned: z.boolean().optional(), swap: z.boolean().default(false) }),
+    body: z.object({
+      nightId: NightIdSchema.optional(),
+      startsAt: LocalTimeSchema.optional(),
+      isPinned: z.boolean().optional(),
+      swap: z.boolean().default(false),
+    }),
     response: LineupSchema,
     problems: ["invalid-request", "not-found", "slot-taken", "wrong-state"],
   },
@@ -192,7 +239,11 @@ export const lineupContract = defineContract({
     summary: "Changes a night's hours, or closes it with a reason.",
     access: coordinator,
     params: z.object({ nightId: NightIdSchema }),
-    body: z.object({ opensAt: LocalTimeSchema.optional(), closesAt: LocalTimeSchema.optional(), closedReason: paragraphText(80).nullable().optional() }),
+    body: z.object({
+      opensAt: LocalTimeSchema.optional(),
+      closesAt: LocalTimeSchema.optional(),
+      closedReason: paragraphText(80).nullable().optional(),
+    }),
     response: LineupSchema,
     problems: ["invalid-request", "not-found"],
   },

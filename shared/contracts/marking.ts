@@ -1,6 +1,13 @@
 import { z } from "zod";
 import { defineContract } from "../contract.ts";
-import { AssignmentIdSchema, ClassIdSchema, CommentIdSchema, ShowIdSchema, SubmissionIdSchema, VersionIdSchema } from "../ids.ts";
+import {
+  AssignmentIdSchema,
+  ClassIdSchema,
+  CommentIdSchema,
+  ShowIdSchema,
+  SubmissionIdSchema,
+  VersionIdSchema,
+} from "../ids.ts";
 import type { Grant } from "../roles.ts";
 import { RubricSchema } from "./assignments.ts";
 import { InstantSchema, paragraphText, RibbonSchema, RunSummarySchema } from "./common.ts";
@@ -103,7 +110,16 @@ export const markingContract = defineContract({
     access: [{ role: "teacher" }],
     response: z.object({
       assignments: z.array(
-        z.object({ id: AssignmentIdSchema, title: z.string(), className: z.string(), dueAt: InstantSchema, toMark: z.int(), sentBack: z.int(), marked: z.int(), firstSubmissionId: SubmissionIdSchema.nullable() }),
+        z.object({
+          id: AssignmentIdSchema,
+          title: z.string(),
+          className: z.string(),
+          dueAt: InstantSchema,
+          toMark: z.int(),
+          sentBack: z.int(),
+          marked: z.int(),
+          firstSubmissionId: SubmissionIdSchema.nullable(),
+        }),
       ),
     }),
   },
@@ -131,7 +147,10 @@ export const markingContract = defineContract({
     summary: "Comments on lines, on a moment or on the whole.",
     access: ofAuthorOrTeacher,
     params,
-    body: z.object({ anchor: CommentAnchorSchema, body: paragraphText(2000).pipe(z.string().min(1, "Write the comment first.")) }),
+    body: z.object({
+      anchor: CommentAnchorSchema,
+      body: paragraphText(2000).pipe(z.string().min(1, "Write the comment first.")),
+    }),
     status: 201,
     response: z.object({ comment: CommentSchema }),
     problems: ["invalid-request", "not-found"],

@@ -94,7 +94,11 @@ export const showsContract = defineContract({
     path: "/api/shows",
     summary: "Starts a show from a song, for an assignment or for oneself.",
     access: [{ role: "student" }],
-    body: z.object({ title: lineText(60), songId: SongIdSchema, assignmentId: AssignmentIdSchema.nullable().default(null) }),
+    body: z.object({
+      title: lineText(60),
+      songId: SongIdSchema,
+      assignmentId: AssignmentIdSchema.nullable().default(null),
+    }),
     status: 201,
     response: z.object({ show: ShowSummarySchema }),
     problems: ["invalid-request", "not-found"],

@@ -106,7 +106,11 @@ export const LayoutSchema = z
       if (ids.has(front.id))
         ctx.addIssue({ code: "custom", path: ["fronts", f, "id"], message: `Two fronts have the id "${front.id}".` });
       if (names.has(front.name))
-        ctx.addIssue({ code: "custom", path: ["fronts", f, "name"], message: `Two fronts have the name "${front.name}".` });
+        ctx.addIssue({
+          code: "custom",
+          path: ["fronts", f, "name"],
+          message: `Two fronts have the name "${front.name}".`,
+        });
       ids.add(front.id);
       names.add(front.name);
       const parts = new Set<string>();
@@ -114,10 +118,18 @@ export const LayoutSchema = z
         box.outlets.forEach((outlet, o) => {
           const path = ["fronts", f, "boxes", b, "outlets", o];
           if (parts.has(outlet.part))
-            ctx.addIssue({ code: "custom", path: [...path, "part"], message: `"${outlet.part}" hangs on two outlets of ${front.name}.` });
+            ctx.addIssue({
+              code: "custom",
+              path: [...path, "part"],
+              message: `"${outlet.part}" hangs on two outlets of ${front.name}.`,
+            });
           parts.add(outlet.part);
           if (!circuits.has(outlet.circuit))
-            ctx.addIssue({ code: "custom", path: [...path, "circuit"], message: `There is no circuit "${outlet.circuit}".` });
+            ctx.addIssue({
+              code: "custom",
+              path: [...path, "circuit"],
+              message: `There is no circuit "${outlet.circuit}".`,
+            });
           if (outlet.pixels !== undefined && box.kind !== "colour")
             ctx.addIssue({ code: "custom", path: [...path, "pixels"], message: "Only a colour box has pixels." });
         }),

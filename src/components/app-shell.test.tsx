@@ -44,7 +44,11 @@ function renderShell() {
 
 beforeEach(() => {
   // jsdom draws nothing: it has no media queries and no scrolling.
-  vi.stubGlobal("matchMedia", () => ({ matches: false, addEventListener: () => undefined, removeEventListener: () => undefined }));
+  vi.stubGlobal("matchMedia", () => ({
+    matches: false,
+    addEventListener: () => undefined,
+    removeEventListener: () => undefined,
+  }));
   vi.stubGlobal("scrollTo", () => undefined);
 });
 afterEach(() => vi.unstubAllGlobals());

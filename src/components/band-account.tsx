@@ -21,9 +21,9 @@ export interface BandAccountProps {
 
 /** The name at the end of the band, with its menu under it. Wide only: narrow, the band's own menu holds the same links. */
 export function BandAccount({ name, detail, links }: BandAccountProps) {
-  const menu = useDisclosure();
+  const { rootRef, ...menu } = useDisclosure();
   return (
-    <div ref={menu.rootRef} className="relative max-wide:hidden">
+    <div ref={rootRef} className="relative max-wide:hidden">
       <PressButton
         onPress={menu.toggle}
         aria-expanded={menu.isOpen}
@@ -34,7 +34,10 @@ export function BandAccount({ name, detail, links }: BandAccountProps) {
         <Icon name="chevron-down" className={joinClasses("size-[0.9em]", menu.isOpen && "rotate-180")} />
       </PressButton>
       {menu.isOpen && (
-        <div id={menu.panelId} className="absolute top-full right-0 mt-1 w-max min-w-56 rounded-sheet border border-dusk-line bg-dusk p-2 shadow-sheet-2">
+        <div
+          id={menu.panelId}
+          className="absolute top-full right-0 mt-1 w-max min-w-56 rounded-sheet border border-dusk-line bg-dusk p-2 shadow-sheet-2"
+        >
           <BandAccountPanel name={name} detail={detail} links={links} isNameHidden onDone={menu.close} />
         </div>
       )}
@@ -49,7 +52,8 @@ interface BandAccountPanelProps extends BandAccountProps {
 
 /** The account's links as a list; closes its holder through `onDone` when one is used. */
 export function BandAccountPanel({ name, detail, links, isNameHidden, onDone }: BandAccountPanelProps) {
-  const row = "flex min-h-11 w-full items-center gap-2.5 rounded-cut px-3 text-left text-3 text-on-dusk-soft no-underline hover:bg-dusk-hover hover:text-on-dusk";
+  const row =
+    "flex min-h-11 w-full items-center gap-2.5 rounded-cut px-3 text-left text-3 text-on-dusk-soft no-underline hover:bg-dusk-hover hover:text-on-dusk";
   return (
     <>
       {!isNameHidden && <p className="px-3 pb-1 font-semibold">{detail ? `${name} · ${detail}` : name}</p>}

@@ -30,7 +30,9 @@ export function BandLink({ item, isInMenu, onFollow }: BandLinkProps) {
       className={({ isActive }) =>
         joinClasses(
           "flex items-center gap-[7px] no-underline hover:text-on-dusk",
-          isInMenu ? "min-h-12 flex-1 border-l-4 pl-3 text-4" : "relative px-[13px] text-[max(0.96875rem,var(--text-meta))] [--bar-inset:13px]",
+          isInMenu
+            ? "min-h-12 flex-1 border-l-4 pl-3 text-4"
+            : "relative px-[13px] text-[max(0.96875rem,var(--text-meta))] [--bar-inset:13px]",
           isActive ? "font-semibold text-on-dusk" : "text-on-dusk-soft",
           isActive && (isInMenu ? "border-lamp" : "lamp-bar"),
           !isActive && isInMenu && "border-transparent",

@@ -21,13 +21,16 @@ export interface BandProps {
 
 /** The dusk band at the top of every page but the sign-in: mark, navigation, theme, account. Narrow, the last two fold into one menu. */
 export function Band({ home, items, account, isWide }: BandProps) {
-  const menu = useDisclosure();
+  const { rootRef, ...menu } = useDisclosure();
   const hasMenu = items.length > 0 || account !== undefined;
   return (
     <header className="z-20 on-dusk bg-dusk pinked-bottom print:hidden">
-      <div ref={menu.rootRef} className={isWide ? "" : "mx-auto max-w-page"}>
+      <div ref={rootRef} className={isWide ? "" : "mx-auto max-w-page"}>
         <div className="flex min-h-(--band) items-stretch gap-6 px-6 max-wide:gap-2 max-wide:px-3.5">
-          <Link to={home} className="flex items-center gap-2.5 py-1 font-head text-[1.1875rem]/none font-bold tracking-[-0.02em] text-on-dusk no-underline">
+          <Link
+            to={home}
+            className="flex items-center gap-2.5 py-1 font-head text-[1.1875rem]/none font-bold tracking-[-0.02em] text-on-dusk no-underline"
+          >
             <Mark />
             Duskbell
           </Link>

@@ -33,7 +33,7 @@ describe("Button", () => {
   it("with a reason does not send its form", async () => {
     const onSubmit = vi.fn((event: SubmitEvent) => event.preventDefault());
     render(
-      <form onSubmit={(event) => onSubmit(event.nativeEvent as SubmitEvent)}>
+      <form onSubmit={(event) => onSubmit(event.nativeEvent)}>
         <Button type="submit" disabledReason="Choose a song first.">
           Hand in
         </Button>
@@ -50,7 +50,11 @@ describe("Button", () => {
         <Button reasonId="why">Publish</Button>
       </>,
     );
-    expect(screen.getByRole("button", { name: "Publish", description: "The due date is missing." }).getAttribute("aria-disabled")).toBe("true");
+    expect(
+      screen
+        .getByRole("button", { name: "Publish", description: "The due date is missing." })
+        .getAttribute("aria-disabled"),
+    ).toBe("true");
     expect(screen.getAllByText("The due date is missing.")).toHaveLength(1);
   });
 

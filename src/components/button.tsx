@@ -25,17 +25,40 @@ export interface ButtonProps extends Omit<PressButtonProps, "children" | "classN
  * A button with a word on it. `onPress` for the act, `type="submit"` inside a form. Looks and sizes: button-styles.ts.
  * Never disable without a reason; where the work of a press takes time, pass `isPending`.
  */
-export function Button({ look = "plain", size = "normal", icon, iconEnd, disabledReason, reasonId, className, children, ...press }: ButtonProps) {
+export function Button({
+  look = "plain",
+  size = "normal",
+  icon,
+  iconEnd,
+  disabledReason,
+  reasonId,
+  className,
+  children,
+  ...press
+}: ButtonProps) {
   const ownReasonId = useId();
   const isRefused = Boolean(disabledReason ?? reasonId);
   const shown = press.isPending ? "turn" : icon;
   const button = (
     <PressButton
       {...press}
-      {...(isRefused && { onPress: undefined, onPressStart: undefined, onPressEnd: undefined, onClick: undefined, type: "button" as const })}
+      {...(isRefused && {
+        onPress: undefined,
+        onPressStart: undefined,
+        onPressEnd: undefined,
+        onClick: undefined,
+        type: "button" as const,
+      })}
       aria-disabled={isRefused || undefined}
-      aria-describedby={joinClasses(press["aria-describedby"], reasonId ?? (disabledReason ? ownReasonId : null)) || undefined}
-      className={buttonClass({ look, size, isRefused, className: joinClasses(press.isPending && "cursor-progress", className) })}
+      aria-describedby={
+        joinClasses(press["aria-describedby"], reasonId ?? (disabledReason ? ownReasonId : null)) || undefined
+      }
+      className={buttonClass({
+        look,
+        size,
+        isRefused,
+        className: joinClasses(press.isPending && "cursor-progress", className),
+      })}
     >
       {shown && <Icon name={shown} className={joinClasses("size-[1.25em]", press.isPending && "animate-turn")} />}
       {children}

@@ -14,7 +14,17 @@ export interface CardProps extends Omit<ComponentPropsWithRef<"div">, "style"> {
 export function Card({ as = "div", isLifted, isPadded, className, ...rest }: CardProps) {
   // One tag's props fit all of these elements; TypeScript cannot see that through a union.
   const Sheet = as as "div";
-  return <Sheet {...rest} className={joinClasses("rounded-sheet border border-line bg-card", isLifted ? "shadow-sheet-2" : "shadow-sheet-1", isPadded && "p-4", className)} />;
+  return (
+    <Sheet
+      {...rest}
+      className={joinClasses(
+        "rounded-sheet border border-line bg-card",
+        isLifted ? "shadow-sheet-2" : "shadow-sheet-1",
+        isPadded && "p-4",
+        className,
+      )}
+    />
+  );
 }
 
 export interface CardHeaderProps {

@@ -3,7 +3,10 @@ import { describedBy, FieldNotes } from "./field-frame.tsx";
 import { Icon } from "./icon.tsx";
 import { joinClasses } from "./class-names.ts";
 
-export interface CheckboxProps extends Omit<ComponentPropsWithRef<"input">, "className" | "style" | "children" | "type"> {
+export interface CheckboxProps extends Omit<
+  ComponentPropsWithRef<"input">,
+  "className" | "style" | "children" | "type"
+> {
   label: ReactNode;
   hint?: ReactNode;
   error?: string | null;
@@ -29,7 +32,10 @@ export function Checkbox({ label, hint, error, className, id, ...input }: Checkb
               error ? "border-rowan" : "border-rim",
             )}
           />
-          <Icon name="check" className="pointer-events-none relative size-5 text-on-main opacity-0 peer-checked:opacity-100 peer-disabled:text-slate" />
+          <Icon
+            name="check"
+            className="pointer-events-none relative size-5 text-on-main opacity-0 peer-checked:opacity-100 peer-disabled:text-slate"
+          />
         </span>
         <span>{label}</span>
       </label>

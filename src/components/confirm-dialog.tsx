@@ -23,7 +23,18 @@ export interface ConfirmDialogProps {
 }
 
 /** Asks before what cannot be undone. The way back has the focus first, so that a hasty Enter harms nothing. */
-export function ConfirmDialog({ isOpen, title, children, confirmLabel, cancelLabel = "Cancel", tone = "stop", onConfirm, onCancel, isPending = false, error }: ConfirmDialogProps) {
+export function ConfirmDialog({
+  isOpen,
+  title,
+  children,
+  confirmLabel,
+  cancelLabel = "Cancel",
+  tone = "stop",
+  onConfirm,
+  onCancel,
+  isPending = false,
+  error,
+}: ConfirmDialogProps) {
   return (
     <Dialog
       isOpen={isOpen}

@@ -14,7 +14,10 @@ export interface DateLeafProps {
 /** One leaf of a tear-off calendar: weekday on dusk, day below. */
 export function DateLeaf({ dateTime, weekday, day, month, label }: DateLeafProps) {
   return (
-    <time dateTime={dateTime} className="block w-14 rounded-[2px] border border-line bg-card pb-1.5 text-center leading-none shadow-sheet-1">
+    <time
+      dateTime={dateTime}
+      className="block w-14 rounded-[2px] border border-line bg-card pb-1.5 text-center leading-none shadow-sheet-1"
+    >
       <span aria-hidden="true" className="block bg-leaf pt-1 pb-[5px] text-meta leading-none text-on-dusk">
         {weekday}
       </span>

@@ -46,7 +46,15 @@ function renderQuestion(extra: { isPending?: boolean; error?: string } = {}) {
   const onConfirm = vi.fn();
   const onCancel = vi.fn();
   render(
-    <ConfirmDialog isOpen title="Delete Nine Foxes?" confirmLabel="Delete the show" cancelLabel="Keep it" onConfirm={onConfirm} onCancel={onCancel} {...extra}>
+    <ConfirmDialog
+      isOpen
+      title="Delete Nine Foxes?"
+      confirmLabel="Delete the show"
+      cancelLabel="Keep it"
+      onConfirm={onConfirm}
+      onCancel={onCancel}
+      {...extra}
+    >
       <p>This cannot be undone.</p>
     </ConfirmDialog>,
   );

@@ -23,7 +23,16 @@ export interface DialogProps {
 const SIZES = { small: "max-w-[28rem]", normal: "max-w-[36rem]", wide: "max-w-[56rem]" };
 
 /** A sheet over the page for one task. Keeps the focus inside, Escape closes; on a phone it comes from below. */
-export function Dialog({ isOpen, onClose, title, children, actions, size = "normal", role = "dialog", isBusy = false }: DialogProps) {
+export function Dialog({
+  isOpen,
+  onClose,
+  title,
+  children,
+  actions,
+  size = "normal",
+  role = "dialog",
+  isBusy = false,
+}: DialogProps) {
   return (
     <ModalOverlay
       isOpen={isOpen}
@@ -43,11 +52,15 @@ export function Dialog({ isOpen, onClose, title, children, actions, size = "norm
             <Heading slot="title" level={2} className="flex-1 pt-1 text-5">
               {title}
             </Heading>
-            {!isBusy && role === "dialog" && <IconButton icon="cross" label="Close" size="small" onPress={onClose} className="-mr-2" />}
+            {!isBusy && role === "dialog" && (
+              <IconButton icon="cross" label="Close" size="small" onPress={onClose} className="-mr-2" />
+            )}
           </div>
           <div className="min-h-0 flex-1 space-y-4 overflow-y-auto px-6 pt-2 pb-5 max-wide:px-4">{children}</div>
           {actions && (
-            <div className="flex flex-wrap justify-end gap-2 border-t border-line bg-card px-6 py-3 max-wide:px-4 max-wide:*:flex-1">{actions}</div>
+            <div className="flex flex-wrap justify-end gap-2 border-t border-line bg-card px-6 py-3 max-wide:px-4 max-wide:*:flex-1">
+              {actions}
+            </div>
           )}
         </DialogPanel>
       </Modal>

@@ -17,11 +17,28 @@ export interface EmptyStateProps {
 }
 
 /** A place that has nothing in it yet, saying what will be here and how it comes to be. */
-export function EmptyState({ title, children, action, picture, icon = "ribbon", headingLevel = 3, className }: EmptyStateProps) {
+export function EmptyState({
+  title,
+  children,
+  action,
+  picture,
+  icon = "ribbon",
+  headingLevel = 3,
+  className,
+}: EmptyStateProps) {
   const Heading = headingLevel === 2 ? "h2" : "h3";
   return (
-    <div className={joinClasses("flex items-center gap-6 rounded-sheet border-2 border-dashed border-rim px-7 py-6 max-wide:flex-col max-wide:items-stretch max-wide:gap-4 max-wide:p-4", className)}>
-      {picture ? <div className="w-52 shrink-0 max-wide:w-full">{picture}</div> : <Icon name={icon} className="size-9 text-slate" />}
+    <div
+      className={joinClasses(
+        "flex items-center gap-6 rounded-sheet border-2 border-dashed border-rim px-7 py-6 max-wide:flex-col max-wide:items-stretch max-wide:gap-4 max-wide:p-4",
+        className,
+      )}
+    >
+      {picture ? (
+        <div className="w-52 shrink-0 max-wide:w-full">{picture}</div>
+      ) : (
+        <Icon name={icon} className="size-9 text-slate" />
+      )}
       <div className="min-w-0 flex-1">
         <Heading>{title}</Heading>
         {children && <div className="mt-1 max-w-[58ch] text-soft">{children}</div>}

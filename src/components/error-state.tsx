@@ -41,7 +41,8 @@ export function ErrorState({ title, children, onRetry, isRetrying, actions, requ
       {children}
       {requestId && (
         <p className="text-meta text-soft">
-          If it happens again, give this number to whoever looks after Duskbell: <code className="font-mono">{requestId}</code>
+          If it happens again, give this number to whoever looks after Duskbell:{" "}
+          <code className="font-mono">{requestId}</code>
         </p>
       )}
     </Notice>

@@ -26,7 +26,16 @@ export interface FieldFrameProps extends FieldText {
 }
 
 /** Label above, field, then error and hint below: shared by all fields of a form. */
-export function FieldFrame({ id, label, isLabelHidden, hint, error, isOptional, className, children }: FieldFrameProps) {
+export function FieldFrame({
+  id,
+  label,
+  isLabelHidden,
+  hint,
+  error,
+  isOptional,
+  className,
+  children,
+}: FieldFrameProps) {
   return (
     <div className={className}>
       <label htmlFor={id} className={isLabelHidden ? "sr-only" : "mb-1.5 block font-semibold"}>

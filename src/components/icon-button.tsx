@@ -4,7 +4,10 @@ import { joinClasses } from "./class-names.ts";
 import { Icon, type IconName } from "./icon.tsx";
 import { ReasonBubble } from "./reason-bubble.tsx";
 
-export interface IconButtonProps extends Omit<PressButtonProps, "children" | "className" | "style" | "isDisabled" | "aria-label" | "ref"> {
+export interface IconButtonProps extends Omit<
+  PressButtonProps,
+  "children" | "className" | "style" | "isDisabled" | "aria-label" | "ref"
+> {
   icon: IconName;
   /** The word for it, always: assistive technology reads it. */
   label: string;
@@ -25,7 +28,16 @@ const LOOKS = {
 };
 
 /** A button that is only an icon: for acts everybody knows from their place (play, close, previous). Put a Tooltip round the rarer ones. */
-export function IconButton({ icon, label, look = "bare", size = "normal", isPressed, disabledReason, className, ...press }: IconButtonProps) {
+export function IconButton({
+  icon,
+  label,
+  look = "bare",
+  size = "normal",
+  isPressed,
+  disabledReason,
+  className,
+  ...press
+}: IconButtonProps) {
   const reasonId = useId();
   const isRefused = Boolean(disabledReason);
   const button = (

@@ -14,7 +14,15 @@ export interface LinkButtonProps extends Omit<LinkProps, "className" | "style" |
 }
 
 /** A link to a page that looks like a button. Where several on a page read the same ("Look"), give each an `aria-label` that names its thing. */
-export function LinkButton({ look = "plain", size = "normal", icon, iconEnd, className, children, ...link }: LinkButtonProps) {
+export function LinkButton({
+  look = "plain",
+  size = "normal",
+  icon,
+  iconEnd,
+  className,
+  children,
+  ...link
+}: LinkButtonProps) {
   return (
     <Link {...link} className={buttonClass({ look, size, className })}>
       {icon && <Icon name={icon} />}

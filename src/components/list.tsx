@@ -35,7 +35,19 @@ export interface ListRowProps {
 }
 
 /** One row of a list: lead, title and line, ribbon, tag, actions. Narrow, tag and actions go under the text. */
-export function ListRow({ lead, title, to, isWholeRow, isHere, line, ribbon, tag, actions, level = 3, className }: ListRowProps) {
+export function ListRow({
+  lead,
+  title,
+  to,
+  isWholeRow,
+  isHere,
+  line,
+  ribbon,
+  tag,
+  actions,
+  level = 3,
+  className,
+}: ListRowProps) {
   const Heading = `h${level}` as const;
   return (
     <li
@@ -52,7 +64,13 @@ export function ListRow({ lead, title, to, isWholeRow, isHere, line, ribbon, tag
       <div className="min-w-0 flex-1 max-wide:min-w-[60%]">
         <Heading className="text-h3">
           {to ? (
-            <Link to={to} className={joinClasses("text-ink no-underline hover:underline", isWholeRow && "after:absolute after:inset-0 hover:no-underline")}>
+            <Link
+              to={to}
+              className={joinClasses(
+                "text-ink no-underline hover:underline",
+                isWholeRow && "after:absolute after:inset-0 hover:no-underline",
+              )}
+            >
               {title}
             </Link>
           ) : (

@@ -34,14 +34,26 @@ export function Menu({ label, icon, isIconOnly, look = "plain", size = "normal",
   return (
     <MenuTrigger>
       {isIconOnly ? (
-        <IconButton icon={icon ?? "more"} label={label} size={size === "small" ? "small" : "normal"} className={className} />
+        <IconButton
+          icon={icon ?? "more"}
+          label={label}
+          size={size === "small" ? "small" : "normal"}
+          className={className}
+        />
       ) : (
         <Button look={look} size={size} icon={icon} iconEnd="chevron-down" className={className}>
           {label}
         </Button>
       )}
-      <Popover placement="bottom start" offset={4} className="min-w-(--trigger-width) rounded-sheet border border-line bg-card p-1.5 text-body text-ink shadow-sheet-2">
-        <MenuList className="max-h-80 overflow-y-auto outline-none" disabledKeys={actions.filter((action) => action.disabledReason).map((action) => action.id)}>
+      <Popover
+        placement="bottom start"
+        offset={4}
+        className="min-w-(--trigger-width) rounded-sheet border border-line bg-card p-1.5 text-body text-ink shadow-sheet-2"
+      >
+        <MenuList
+          className="max-h-80 overflow-y-auto outline-none"
+          disabledKeys={actions.filter((action) => action.disabledReason).map((action) => action.id)}
+        >
           {actions.map((action) => (
             <MenuItem
               key={action.id}

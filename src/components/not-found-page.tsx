@@ -12,8 +12,16 @@ export interface NotFoundPageProps {
 export function NotFoundPage({ thing = "This page", home = "/" }: NotFoundPageProps) {
   return (
     <Page title="Not found">
-      <PageHeader title={`${thing} is not here`} lead="The address may be mistyped, it may have been deleted, or it may belong to another class." />
-      <StreetScene fronts={9} seed={21} lighting="one" className="mb-6 h-44 overflow-hidden rounded-sheet shadow-sheet-2" />
+      <PageHeader
+        title={`${thing} is not here`}
+        lead="The address may be mistyped, it may have been deleted, or it may belong to another class."
+      />
+      <StreetScene
+        fronts={9}
+        seed={21}
+        lighting="one"
+        className="mb-6 h-44 overflow-hidden rounded-sheet shadow-sheet-2"
+      />
       <LinkButton to={home} look="main" icon="home">
         Go to the start
       </LinkButton>

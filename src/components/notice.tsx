@@ -31,7 +31,10 @@ export interface NoticeProps {
 export function Notice({ tone = "info", icon, title, children, actions, end, role, className }: NoticeProps) {
   const look = TONES[tone];
   return (
-    <div role={role} className={joinClasses("flex gap-3 rounded-r-sheet border-l-4 px-4 py-3 text-ink", look.box, className)}>
+    <div
+      role={role}
+      className={joinClasses("flex gap-3 rounded-r-sheet border-l-4 px-4 py-3 text-ink", look.box, className)}
+    >
       <Icon name={icon ?? look.icon} className={`mt-[0.1em] size-[1.3em] ${look.ink}`} />
       <div className="min-w-0 flex-1">
         <p className="font-bold">{title}</p>

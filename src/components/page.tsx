@@ -26,7 +26,13 @@ const LAYOUTS = {
  * The frame of every page inside the shell: sets the document's title and the density, and gives the margins.
  * Exactly one h1 goes inside: `PageHeader`, `SubBand`, or the page's own.
  */
-export function Page({ title, density = "student", layout = density === "staff" ? "staff" : "column", className, children }: PageProps) {
+export function Page({
+  title,
+  density = "student",
+  layout = density === "staff" ? "staff" : "column",
+  className,
+  children,
+}: PageProps) {
   useDocumentTitle(title);
   // On <html>, not on a wrapper: the band and the dialogs, which live outside the page, follow it too.
   useLayoutEffect(() => {

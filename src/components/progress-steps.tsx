@@ -26,7 +26,11 @@ export function ProgressSteps({ total, done, label, ground = "dusk", isWide, cla
       {Array.from({ length: total }, (_, index) => (
         <span
           key={index}
-          className={joinClasses("h-2", isWide ? "flex-1" : "w-[34px] shrink", index < done ? bars.done : index === done && !isWide ? bars.here : bars.rest)}
+          className={joinClasses(
+            "h-2",
+            isWide ? "flex-1" : "w-[34px] shrink",
+            index < done ? bars.done : index === done && !isWide ? bars.here : bars.rest,
+          )}
         />
       ))}
     </div>

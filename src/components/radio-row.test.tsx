@@ -20,7 +20,7 @@ function Criterion() {
   );
 }
 
-const isChosen = (name: string) => (screen.getByRole("radio", { name }) as HTMLInputElement).checked;
+const isChosen = (name: string) => screen.getByRole<HTMLInputElement>("radio", { name }).checked;
 
 describe("RadioRow", () => {
   it("has nothing chosen until somebody chooses", async () => {

@@ -28,15 +28,36 @@ export interface RadioRowProps<Value extends string> {
  * One of a few, side by side in one cut strip, with a tick on the chosen one: the levels of a criterion,
  * a view switch. Arrow keys move the choice. Never chosen for the person beforehand where it is a judgement.
  */
-export function RadioRow<Value extends string>({ legend, isLegendHidden, legendEnd, options, value, onChange, hint, error, className }: RadioRowProps<Value>) {
+export function RadioRow<Value extends string>({
+  legend,
+  isLegendHidden,
+  legendEnd,
+  options,
+  value,
+  onChange,
+  hint,
+  error,
+  className,
+}: RadioRowProps<Value>) {
   const id = useId();
   return (
-    <fieldset className={joinClasses("min-w-0", className)} aria-invalid={error ? true : undefined} aria-describedby={describedBy(id, { hint, error })}>
-      <legend className={isLegendHidden ? "sr-only" : "float-left mb-1.5 flex w-full items-baseline gap-2 p-0 font-bold"}>
+    <fieldset
+      className={joinClasses("min-w-0", className)}
+      aria-invalid={error ? true : undefined}
+      aria-describedby={describedBy(id, { hint, error })}
+    >
+      <legend
+        className={isLegendHidden ? "sr-only" : "float-left mb-1.5 flex w-full items-baseline gap-2 p-0 font-bold"}
+      >
         {legend}
         {legendEnd && <span className="ml-auto text-meta font-normal text-slate tabular-nums">{legendEnd}</span>}
       </legend>
-      <div className={joinClasses("clear-both grid auto-cols-fr grid-flow-col rounded-cut border-[1.5px]", error ? "border-rowan" : "border-rim")}>
+      <div
+        className={joinClasses(
+          "clear-both grid auto-cols-fr grid-flow-col rounded-cut border-[1.5px]",
+          error ? "border-rowan" : "border-rim",
+        )}
+      >
         {options.map((option, index) => (
           <label
             key={option.value}

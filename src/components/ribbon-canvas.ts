@@ -34,7 +34,11 @@ function tracePinked(pen: CanvasRenderingContext2D, width: number, height: numbe
 }
 
 /** Draws a ribbon over the whole canvas at the screen's own resolution and cuts its ends. */
-export function drawRibbon(canvas: HTMLCanvasElement, ribbon: RibbonCells | null, { width, height, theme, isSquare }: RibbonDrawing) {
+export function drawRibbon(
+  canvas: HTMLCanvasElement,
+  ribbon: RibbonCells | null,
+  { width, height, theme, isSquare }: RibbonDrawing,
+) {
   const ratio = Math.min(MAX_PIXEL_RATIO, window.devicePixelRatio || 1);
   canvas.width = Math.max(1, Math.round(width * ratio));
   canvas.height = Math.max(1, Math.round(height * ratio));

@@ -57,7 +57,12 @@ describe("weaveRibbon", () => {
   const look = { width: 200, height: 58, ratio: 1, theme: "light" } as const;
 
   it("fills every pixel, at any size and ratio", () => {
-    for (const [width, height, ratio] of [[200, 58, 1], [333, 29, 2], [7, 3, 1], [412, 174, 3]] as const) {
+    for (const [width, height, ratio] of [
+      [200, 58, 1],
+      [333, 29, 2],
+      [7, 3, 1],
+      [412, 174, 3],
+    ] as const) {
       const pixels = weaveRibbon(null, { width, height, ratio, theme: "dark" });
       expect(pixels).toHaveLength(width * height * 4);
       for (let at = 3; at < pixels.length; at += 4) expect(pixels[at]).toBe(255);
@@ -72,7 +77,8 @@ describe("weaveRibbon", () => {
     const pixels = weaveRibbon(buildRibbon("rr..", "rr.."), look);
     const half = (from: number) => {
       const side = new Uint8ClampedArray(100 * 58 * 4);
-      for (let y = 0; y < 58; y++) side.set(pixels.subarray((y * 200 + from) * 4, (y * 200 + from + 100) * 4), y * 100 * 4);
+      for (let y = 0; y < 58; y++)
+        side.set(pixels.subarray((y * 200 + from) * 4, (y * 200 + from + 100) * 4), y * 100 * 4);
       return countRed(side);
     };
     expect(half(0)).toBeGreaterThan(3000);

@@ -39,7 +39,11 @@ export function threadsFor(heightPx: number): number {
 }
 
 /** The mean of the cells from one row and column up to another (cells partly covered count whole), colour weighted by strength. */
-export function meanCell(ribbon: RibbonCells, from: { row: number; column: number }, to: { row: number; column: number }): Stitch {
+export function meanCell(
+  ribbon: RibbonCells,
+  from: { row: number; column: number },
+  to: { row: number; column: number },
+): Stitch {
   const top = Math.floor(from.row);
   const left = Math.floor(from.column);
   const bottom = Math.min(ribbon.rows, Math.max(top + 1, Math.ceil(to.row)));
@@ -70,7 +74,10 @@ function layOver(base: Rgb, top: Rgb, strength: number): Rgb {
  * falls on a device pixel. Straight ends: the teeth are cut on the canvas. Written pixel by pixel,
  * since thousands of fill calls a ribbon cost ten times as much.
  */
-export function weaveRibbon(ribbon: RibbonCells | null, { width, height, ratio, theme }: RibbonLook): Uint8ClampedArray<ArrayBuffer> {
+export function weaveRibbon(
+  ribbon: RibbonCells | null,
+  { width, height, ratio, theme }: RibbonLook,
+): Uint8ClampedArray<ArrayBuffer> {
   const pixels = new Uint8ClampedArray(width * height * 4);
   const heightPx = height / ratio;
   const threads = Math.min(threadsFor(heightPx), height);
@@ -110,7 +117,8 @@ export function weaveRibbon(ribbon: RibbonCells | null, { width, height, ratio, 
       fill(left, bottom, right, end, isThick || ratio > 1 ? GROUND : layOver(GROUND, lit, 0.5));
       fill(left, top, right, bottom, isOver ? lit : bareThread);
       if (!isOver) fill(left, top + inset, right, bottom - inset, lit);
-      if (isOver && (bottom - top) / ratio > LIP_FROM_PX) fill(left, top, right, top + Math.max(1, Math.round(ratio)), layOver(lit, [255, 255, 255], LIP_STRENGTH));
+      if (isOver && (bottom - top) / ratio > LIP_FROM_PX)
+        fill(left, top, right, top + Math.max(1, Math.round(ratio)), layOver(lit, [255, 255, 255], LIP_STRENGTH));
     }
   }
   return pixels;

@@ -45,9 +45,19 @@ export function Ribbon({ ribbon, label, size = "card", isSquare = false, now = n
 
   return (
     <div className={joinClasses("relative", HEIGHTS[size], className)}>
-      <canvas ref={canvasRef} className="block size-full" role={label ? "img" : undefined} aria-label={label || undefined} aria-hidden={label ? undefined : true} />
+      <canvas
+        ref={canvasRef}
+        className="block size-full"
+        role={label ? "img" : undefined}
+        aria-label={label || undefined}
+        aria-hidden={label ? undefined : true}
+      />
       {now !== null && (
-        <span aria-hidden="true" className="pointer-events-none absolute inset-y-0 w-0.5 -translate-x-1/2 bg-[#fff7e6] shadow-[0_0_0_1.5px_rgb(10_12_24/0.55)]" style={{ left: `${now * 100}%` }} />
+        <span
+          aria-hidden="true"
+          className="pointer-events-none absolute inset-y-0 w-0.5 -translate-x-1/2 bg-[#fff7e6] shadow-[0_0_0_1.5px_rgb(10_12_24/0.55)]"
+          style={{ left: `${now * 100}%` }}
+        />
       )}
     </div>
   );

@@ -20,7 +20,11 @@ function renderFailure(thrown: unknown) {
 }
 
 beforeEach(() => {
-  vi.stubGlobal("matchMedia", () => ({ matches: true, addEventListener: () => undefined, removeEventListener: () => undefined }));
+  vi.stubGlobal("matchMedia", () => ({
+    matches: true,
+    addEventListener: () => undefined,
+    removeEventListener: () => undefined,
+  }));
   vi.stubGlobal(
     "ResizeObserver",
     class {
@@ -55,7 +59,9 @@ describe("RouteError", () => {
   });
 
   it("quotes the request's id at a fault of the server", async () => {
-    renderFailure(new ApiProblem("unknown", 500, { type: "about:blank", title: "Fault", status: 500, instance: "req-7f3a21" }));
+    renderFailure(
+      new ApiProblem("unknown", 500, { type: "about:blank", title: "Fault", status: 500, instance: "req-7f3a21" }),
+    );
     expect((await screen.findByRole("alert")).textContent).toContain("req-7f3a21");
   });
 

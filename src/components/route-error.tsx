@@ -21,7 +21,11 @@ interface Failure {
 function toFailure(error: unknown): Failure {
   if (isRouteErrorResponse(error)) return { status: error.status, requestId: null, isMissingPart: false };
   if (error instanceof ApiProblem) return { status: error.status, requestId: error.requestId, isMissingPart: false };
-  return { status: null, requestId: null, isMissingPart: error instanceof TypeError && /module|import/i.test(error.message) };
+  return {
+    status: null,
+    requestId: null,
+    isMissingPart: error instanceof TypeError && /module|import/i.test(error.message),
+  };
 }
 
 function describeFailure({ isMissingPart, status }: Failure): string {
@@ -38,7 +42,10 @@ export function RouteError({ area = "This page" }: RouteErrorProps) {
   if (failure.status === 403) {
     return (
       <Page title="Not allowed">
-        <PageHeader title={`${area} is not open to you`} lead="Your account has no role that may see it. Ask the person who gave you the account." />
+        <PageHeader
+          title={`${area} is not open to you`}
+          lead="Your account has no role that may see it. Ask the person who gave you the account."
+        />
         <LinkButton to="/" look="main" icon="home">
           Go to the start
         </LinkButton>

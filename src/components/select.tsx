@@ -13,7 +13,8 @@ export interface SelectGroup {
   options: SelectOption[];
 }
 
-export interface SelectProps extends FieldText, Omit<ComponentPropsWithRef<"select">, "className" | "style" | "children"> {
+export interface SelectProps
+  extends FieldText, Omit<ComponentPropsWithRef<"select">, "className" | "style" | "children"> {
   options: (SelectOption | SelectGroup)[];
   /** A first entry with an empty value: "Choose a song". */
   placeholder?: string;
@@ -21,11 +22,30 @@ export interface SelectProps extends FieldText, Omit<ComponentPropsWithRef<"sele
 }
 
 /** One of a list. The browser's own select: the phone's wheel, the keyboard's first letters and forms all work. `{...register("name")}` fits. */
-export function Select({ label, isLabelHidden, hint, error, isOptional, options, placeholder, className, id, ...select }: SelectProps) {
+export function Select({
+  label,
+  isLabelHidden,
+  hint,
+  error,
+  isOptional,
+  options,
+  placeholder,
+  className,
+  id,
+  ...select
+}: SelectProps) {
   const ownId = useId();
   const fieldId = id ?? ownId;
   return (
-    <FieldFrame id={fieldId} label={label} isLabelHidden={isLabelHidden} hint={hint} error={error} isOptional={isOptional} className={className}>
+    <FieldFrame
+      id={fieldId}
+      label={label}
+      isLabelHidden={isLabelHidden}
+      hint={hint}
+      error={error}
+      isOptional={isOptional}
+      className={className}
+    >
       <div className="relative">
         <select
           {...select}

@@ -19,7 +19,12 @@ export interface ShowCardProps {
 export function ShowCard({ ribbon, title, to, line, tag, level = 3, className }: ShowCardProps) {
   const Heading = level === 2 ? "h2" : "h3";
   return (
-    <article className={joinClasses("box-link flex h-full flex-col rounded-sheet border border-line bg-card shadow-sheet-1 hover:shadow-sheet-2", className)}>
+    <article
+      className={joinClasses(
+        "box-link flex h-full flex-col rounded-sheet border border-line bg-card shadow-sheet-1 hover:shadow-sheet-2",
+        className,
+      )}
+    >
       <div className="px-2.5 pt-2.5 max-wide:px-2 max-wide:pt-2">{ribbon}</div>
       <div className="flex flex-1 flex-col items-start gap-1.5 px-3.5 pt-2.5 pb-3 max-wide:px-2.5">
         <Heading className="text-h3">

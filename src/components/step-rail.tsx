@@ -29,7 +29,9 @@ export function StepRail({ label, steps }: StepRailProps) {
       <ol className="flex max-wide:justify-between">
         {steps.map((step, index) => (
           <li key={step.to ?? step.label} className="flex">
-            {index > 0 && <span aria-hidden="true" className="w-3.5 self-center border-t-2 border-rim/60 max-wide:hidden" />}
+            {index > 0 && (
+              <span aria-hidden="true" className="w-3.5 self-center border-t-2 border-rim/60 max-wide:hidden" />
+            )}
             <StepEntry step={step} number={index + 1} />
           </li>
         ))}
@@ -41,12 +43,16 @@ export function StepRail({ label, steps }: StepRailProps) {
 function StepEntry({ step, number }: { step: RailStep; number: number }) {
   const className = joinClasses(
     "relative flex min-h-14 items-center gap-2 px-3.5 text-[max(1rem,var(--text-meta))] no-underline max-wide:min-h-0 max-wide:flex-col max-wide:gap-1 max-wide:px-0 max-wide:pt-1 max-wide:pb-2.5",
-    step.state === "here" ? "lamp-bar font-bold text-ink [--bar-drop:-1px] [--bar-height:4px] [--bar-inset:10px] max-wide:[--bar-inset:0px]" : "text-soft",
+    step.state === "here"
+      ? "lamp-bar font-bold text-ink [--bar-drop:-1px] [--bar-height:4px] [--bar-inset:10px] max-wide:[--bar-inset:0px]"
+      : "text-soft",
     step.to && "hover:text-ink",
   );
   const content = (
     <>
-      <span className={`grid size-[26px] shrink-0 place-items-center rounded-full border-2 text-2 leading-none font-bold tabular-nums ${DOTS[step.state]}`}>
+      <span
+        className={`grid size-[26px] shrink-0 place-items-center rounded-full border-2 text-2 leading-none font-bold tabular-nums ${DOTS[step.state]}`}
+      >
         {step.state === "done" ? <Icon name="check" className="size-4" /> : number}
       </span>
       {step.label}

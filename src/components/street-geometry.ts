@@ -59,15 +59,59 @@ export function hashUnit(a: number, b: number): number {
 
 /** Roof outlines in units of the roof: x over the front's width, y from 0 (ridge) to 1 (eaves). */
 const ROOFS: readonly (readonly Point[])[] = [
-  [[0, 1], [0.5, 0], [1, 1]],
-  [[0, 0.5], [1, 0.5]],
-  [[0, 1], [0.16, 1], [0.16, 0.62], [0.33, 0.62], [0.33, 0.25], [0.67, 0.25], [0.67, 0.62], [0.84, 0.62], [0.84, 1], [1, 1]],
-  [[0, 1], [0.18, 0.2], [0.82, 0.2], [1, 1]],
-  [[0, 0.8], [0.12, 0.62], [0.28, 0.52], [0.38, 0.22], [0.5, 0.08], [0.62, 0.22], [0.72, 0.52], [0.88, 0.62], [1, 0.8]],
-  [[0, 0.7], [0.5, 0.2], [1, 0.7]],
+  [
+    [0, 1],
+    [0.5, 0],
+    [1, 1],
+  ],
+  [
+    [0, 0.5],
+    [1, 0.5],
+  ],
+  [
+    [0, 1],
+    [0.16, 1],
+    [0.16, 0.62],
+    [0.33, 0.62],
+    [0.33, 0.25],
+    [0.67, 0.25],
+    [0.67, 0.62],
+    [0.84, 0.62],
+    [0.84, 1],
+    [1, 1],
+  ],
+  [
+    [0, 1],
+    [0.18, 0.2],
+    [0.82, 0.2],
+    [1, 1],
+  ],
+  [
+    [0, 0.8],
+    [0.12, 0.62],
+    [0.28, 0.52],
+    [0.38, 0.22],
+    [0.5, 0.08],
+    [0.62, 0.22],
+    [0.72, 0.52],
+    [0.88, 0.62],
+    [1, 0.8],
+  ],
+  [
+    [0, 0.7],
+    [0.5, 0.2],
+    [1, 0.7],
+  ],
 ];
 
-function buildFront(x: number, width: number, base: number, ground: number, seed: number, isSmall: boolean): StreetFront {
+function buildFront(
+  x: number,
+  width: number,
+  base: number,
+  ground: number,
+  seed: number,
+  isSmall: boolean,
+): StreetFront {
   const height = base * (0.52 + hashUnit(seed, 2) * 0.4);
   const top = ground - height;
   const roofHeight = Math.min(width * 0.45, height * 0.28);
@@ -87,8 +131,15 @@ function buildFront(x: number, width: number, base: number, ground: number, seed
       const isGround = floor === floors - 1;
       const left = x + (width * (bay + 0.5)) / bays - paneWidth / 2;
       const y = wallTop + floor * storey + storey * 0.17;
-      if (isGround && bay === doorBay) door = { x: left, y: y + storey * 0.08, width: paneWidth, height: ground - y - storey * 0.08 };
-      else windows.push({ x: left, y: isGround && hasAwning ? y + storey * 0.1 : y, width: paneWidth, height: storey * (isGround ? 0.56 : 0.5) });
+      if (isGround && bay === doorBay)
+        door = { x: left, y: y + storey * 0.08, width: paneWidth, height: ground - y - storey * 0.08 };
+      else
+        windows.push({
+          x: left,
+          y: isGround && hasAwning ? y + storey * 0.1 : y,
+          width: paneWidth,
+          height: storey * (isGround ? 0.56 : 0.5),
+        });
     }
   }
   const chimneyAt = x + width * (hashUnit(seed, 8) > 0.5 ? 0.72 : 0.16);
@@ -100,8 +151,18 @@ function buildFront(x: number, width: number, base: number, ground: number, seed
     roof,
     windows,
     door,
-    chimney: !isSmall && hashUnit(seed, 9) > 0.45 ? { x: chimneyAt, y: top + roofHeight * 0.02, width: width * 0.1, height: roofHeight } : null,
-    awning: hasAwning ? { left: x + width * 0.06, right: x + width * 0.94, y: wallTop + (floors - 1) * storey + storey * 0.06, depth: storey * 0.17 } : null,
+    chimney:
+      !isSmall && hashUnit(seed, 9) > 0.45
+        ? { x: chimneyAt, y: top + roofHeight * 0.02, width: width * 0.1, height: roofHeight }
+        : null,
+    awning: hasAwning
+      ? {
+          left: x + width * 0.06,
+          right: x + width * 0.94,
+          y: wallTop + (floors - 1) * storey + storey * 0.06,
+          depth: storey * 0.17,
+        }
+      : null,
   };
 }
 
@@ -124,7 +185,13 @@ export function buildStreet({ width, height, fronts, seed, isTall }: StreetOptio
     const top = ground - base * (0.72 + hashUnit(index + seed, 51) * 0.5);
     const left = index * farWidth + (hashUnit(index, 53) - 0.5) * farWidth * 0.4;
     const pitch = farWidth * (index % 2 ? 0.5 : 0.22);
-    return [[left, ground], [left, top + pitch], [left + farWidth * 0.45, top], [left + farWidth * 0.9, top + pitch], [left + farWidth * 0.9, ground]] satisfies Point[];
+    return [
+      [left, ground],
+      [left, top + pitch],
+      [left + farWidth * 0.45, top],
+      [left + farWidth * 0.9, top + pitch],
+      [left + farWidth * 0.9, ground],
+    ] satisfies Point[];
   });
   return { width, height, ground, base, isSmall, isTall, seed, fronts: built, farRoofs };
 }

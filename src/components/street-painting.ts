@@ -59,7 +59,14 @@ function paintSky(pen: Pen, street: Street) {
 function paintMoon(pen: Pen, x: number, y: number, radius: number) {
   paintSheet(pen, "#f3e7cc", true, () => {
     pen.arc(x, y, radius, -1.25, 2.8);
-    pen.bezierCurveTo(x + radius * 0.07, y + radius * 0.74, x + radius * 0.81, y + radius * 0.07, x + radius * Math.cos(-1.25), y + radius * Math.sin(-1.25));
+    pen.bezierCurveTo(
+      x + radius * 0.07,
+      y + radius * 0.74,
+      x + radius * 0.81,
+      y + radius * 0.07,
+      x + radius * Math.cos(-1.25),
+      y + radius * Math.sin(-1.25),
+    );
   });
 }
 
@@ -96,7 +103,12 @@ function paintHouse(pen: Pen, front: StreetFront, street: Street) {
   }
   if (awning) {
     paintSheet(pen, "#35416f", true, () =>
-      trace(pen, [[awning.left + 3, awning.y], [awning.right - 3, awning.y], [awning.right, awning.y + awning.depth], [awning.left, awning.y + awning.depth]]),
+      trace(pen, [
+        [awning.left + 3, awning.y],
+        [awning.right - 3, awning.y],
+        [awning.right, awning.y + awning.depth],
+        [awning.left, awning.y + awning.depth],
+      ]),
     );
   }
 }
@@ -105,7 +117,9 @@ function paintHouse(pen: Pen, front: StreetFront, street: Street) {
 export function paintBackdrop(pen: Pen, street: Street) {
   const { width, height, ground } = street;
   paintSky(pen, street);
-  street.farRoofs.forEach((outline, index) => paintSheet(pen, index % 2 ? "#3b487a" : "#34406f", true, () => trace(pen, outline)));
+  street.farRoofs.forEach((outline, index) =>
+    paintSheet(pen, index % 2 ? "#3b487a" : "#34406f", true, () => trace(pen, outline)),
+  );
   street.fronts.forEach((front) => paintHouse(pen, front, street));
   pen.fillStyle = PAVING;
   pen.fillRect(0, ground, width, height - ground);
@@ -122,7 +136,11 @@ function dot(pen: Pen, x: number, y: number, radius: number) {
 }
 
 /** Walks the string of beads along the roof's cut edge. */
-function forEachBead(front: StreetFront, { isSmall, base }: Street, visit: (x: number, y: number, radius: number) => void) {
+function forEachBead(
+  front: StreetFront,
+  { isSmall, base }: Street,
+  visit: (x: number, y: number, radius: number) => void,
+) {
   const spacing = isSmall ? 3.4 : Math.max(6, base / 26);
   const radius = isSmall ? 0.9 : Math.max(1.3, base / 130);
   front.roof.slice(1).forEach(([toX, toY], index) => {
@@ -140,11 +158,23 @@ export function paintFrontLight(pen: Pen, front: StreetFront, street: Street, co
   const { ground, height, isSmall, base } = street;
   const centre = front.x + front.width / 2;
   const reach = Math.max(front.width, front.height) * 0.85;
-  const wash = pen.createRadialGradient(centre, ground - front.height * 0.5, 0, centre, ground - front.height * 0.5, reach);
+  const wash = pen.createRadialGradient(
+    centre,
+    ground - front.height * 0.5,
+    0,
+    centre,
+    ground - front.height * 0.5,
+    reach,
+  );
   wash.addColorStop(0, `rgb(${colour} / ${isSmall ? 0.2 : 0.13})`);
   wash.addColorStop(1, `rgb(${colour} / 0)`);
   pen.fillStyle = wash;
-  pen.fillRect(centre - reach, ground - front.height * 0.5 - reach, reach * 2, Math.min(reach * 2, front.height * 0.5 + reach));
+  pen.fillRect(
+    centre - reach,
+    ground - front.height * 0.5 - reach,
+    reach * 2,
+    Math.min(reach * 2, front.height * 0.5 + reach),
+  );
 
   front.windows.forEach((pane, index) => {
     const strength = index % 3 === 1 ? 0.72 : 1;

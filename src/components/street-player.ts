@@ -51,7 +51,9 @@ export class StreetPlayer {
     this.#lights = this.#street.fronts.map((front, index) => {
       const reach = Math.max(front.width, front.height);
       const colour = COLOURS[Math.floor(hashUnit(index + options.seed, 12) * COLOURS.length)] ?? "246 177 61";
-      return this.#layer(front.x + front.width / 2 - reach, reach * 2, (pen) => paintFrontLight(pen, front, this.#street, colour));
+      return this.#layer(front.x + front.width / 2 - reach, reach * 2, (pen) =>
+        paintFrontLight(pen, front, this.#street, colour),
+      );
     });
   }
 

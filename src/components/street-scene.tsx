@@ -23,7 +23,15 @@ export interface StreetSceneProps {
 const NARROW_PX = 460;
 
 /** The street of cut-paper houses in the blue hour. Decoration; stands still under reduced motion and outside the window. */
-export function StreetScene({ fronts = 10, narrowFronts = 6, seed = 3, isTall = false, lighting = "slow", label, className }: StreetSceneProps) {
+export function StreetScene({
+  fronts = 10,
+  narrowFronts = 6,
+  seed = 3,
+  isTall = false,
+  lighting = "slow",
+  label,
+  className,
+}: StreetSceneProps) {
   const canvasRef = useRef<HTMLCanvasElement>(null);
   const { width, height } = useElementSize(canvasRef);
   const isStill = usePrefersReducedMotion();
@@ -40,7 +48,13 @@ export function StreetScene({ fronts = 10, narrowFronts = 6, seed = 3, isTall = 
 
   return (
     <div className={joinClasses("bg-sky", className)}>
-      <canvas ref={canvasRef} className="block size-full" role={label ? "img" : undefined} aria-label={label} aria-hidden={label ? undefined : true} />
+      <canvas
+        ref={canvasRef}
+        className="block size-full"
+        role={label ? "img" : undefined}
+        aria-label={label}
+        aria-hidden={label ? undefined : true}
+      />
     </div>
   );
 }

@@ -42,13 +42,18 @@ describe("streetLevel", () => {
   // WCAG 2.2, success criterion 2.3.1: nothing flashes more than three times a second. This is far slower.
   it("never moves by more than a sixth in a tenth of a second", () => {
     fc.assert(
-      fc.property(fc.integer({ min: 0, max: 19 }), fc.integer({ min: 1, max: 20 }), fc.double({ min: 0, max: 1000, noNaN: true }), (house, houses, seconds) => {
-        const before = streetLevel(house % houses, houses, seconds);
-        const after = streetLevel(house % houses, houses, seconds + 0.1);
-        expect(before).toBeGreaterThanOrEqual(0);
-        expect(before).toBeLessThanOrEqual(1);
-        expect(Math.abs(after - before)).toBeLessThan(1 / 6);
-      }),
+      fc.property(
+        fc.integer({ min: 0, max: 19 }),
+        fc.integer({ min: 1, max: 20 }),
+        fc.double({ min: 0, max: 1000, noNaN: true }),
+        (house, houses, seconds) => {
+          const before = streetLevel(house % houses, houses, seconds);
+          const after = streetLevel(house % houses, houses, seconds + 0.1);
+          expect(before).toBeGreaterThanOrEqual(0);
+          expect(before).toBeLessThanOrEqual(1);
+          expect(Math.abs(after - before)).toBeLessThan(1 / 6);
+        },
+      ),
     );
   });
 

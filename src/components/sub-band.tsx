@@ -29,7 +29,12 @@ export interface SubBandProps {
 export function SubBand({ title, detail, sections, sectionsLabel = "Sections", children, actions }: SubBandProps) {
   return (
     <div className="flex flex-wrap items-stretch gap-x-6 gap-y-1 border-b border-line bg-card px-6 pt-1.5 max-wide:gap-x-4 max-wide:px-4 max-wide:pt-2 print:hidden">
-      <div className={joinClasses("flex items-baseline gap-2 self-center py-2 max-wide:w-full", sections && "border-line pr-4 wide:border-r")}>
+      <div
+        className={joinClasses(
+          "flex items-baseline gap-2 self-center py-2 max-wide:w-full",
+          sections && "border-line pr-4 wide:border-r",
+        )}
+      >
         <h1 tabIndex={-1} className="text-5">
           {title}
         </h1>
@@ -52,7 +57,9 @@ export function SubBand({ title, detail, sections, sectionsLabel = "Sections", c
                 >
                   {section.icon && <Icon name={section.icon} />}
                   {section.label}
-                  {section.count ? <span className="rounded-cut bg-well px-1.5 text-meta tabular-nums">{section.count}</span> : null}
+                  {section.count ? (
+                    <span className="rounded-cut bg-well px-1.5 text-meta tabular-nums">{section.count}</span>
+                  ) : null}
                 </NavLink>
               </li>
             ))}
@@ -60,7 +67,11 @@ export function SubBand({ title, detail, sections, sectionsLabel = "Sections", c
         </nav>
       )}
       {children && <div className="flex min-w-0 flex-wrap items-center gap-3 self-center py-1">{children}</div>}
-      {actions && <div className="ml-auto flex flex-wrap items-center gap-2 self-center py-1.5 max-wide:ml-0 max-wide:pb-2.5">{actions}</div>}
+      {actions && (
+        <div className="ml-auto flex flex-wrap items-center gap-2 self-center py-1.5 max-wide:ml-0 max-wide:pb-2.5">
+          {actions}
+        </div>
+      )}
     </div>
   );
 }

@@ -43,7 +43,13 @@ export interface TagProps {
 export function Tag({ state, icon, className, children }: TagProps) {
   const look = STATES[state];
   return (
-    <span className={joinClasses("inline-flex w-max max-w-full items-center gap-1.5 py-1 pr-3.5 pl-2 text-meta leading-tight font-semibold whitespace-nowrap arrow-cut", TONES[look.tone], className)}>
+    <span
+      className={joinClasses(
+        "inline-flex w-max max-w-full items-center gap-1.5 py-1 pr-3.5 pl-2 text-meta leading-tight font-semibold whitespace-nowrap arrow-cut",
+        TONES[look.tone],
+        className,
+      )}
+    >
       <Icon name={icon ?? look.icon} className="size-[1.1em]" />
       {children ?? look.word}
     </span>

@@ -32,7 +32,10 @@ describe("TextField", () => {
 
   it("with an error is invalid and described by the error before the hint", () => {
     render(<TextField label="Class code" hint="On your card." error="Write the code of your class." />);
-    const field = screen.getByRole("textbox", { name: "Class code", description: "Write the code of your class. On your card." });
+    const field = screen.getByRole("textbox", {
+      name: "Class code",
+      description: "Write the code of your class. On your card.",
+    });
     expect(field.getAttribute("aria-invalid")).toBe("true");
   });
 });

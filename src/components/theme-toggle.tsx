@@ -10,5 +10,13 @@ export interface ThemeToggleProps {
 export function ThemeToggle({ className }: ThemeToggleProps) {
   const theme = useTheme();
   const next = theme === "dark" ? "light" : "dark";
-  return <IconButton icon="half" label="Dark theme" isPressed={theme === "dark"} onPress={() => updateThemeChoice(next)} className={className} />;
+  return (
+    <IconButton
+      icon="half"
+      label="Dark theme"
+      isPressed={theme === "dark"}
+      onPress={() => updateThemeChoice(next)}
+      className={className}
+    />
+  );
 }

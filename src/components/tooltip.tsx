@@ -13,7 +13,11 @@ export function Tooltip({ text, placement = "bottom", children }: TooltipProps) 
   return (
     <TooltipTrigger delay={500} closeDelay={80}>
       {children}
-      <TooltipSlip placement={placement} offset={6} className="max-w-64 rounded-cut bg-main px-2.5 py-1 text-meta leading-snug text-on-main shadow-sheet-1">
+      <TooltipSlip
+        placement={placement}
+        offset={6}
+        className="max-w-64 rounded-cut bg-main px-2.5 py-1 text-meta leading-snug text-on-main shadow-sheet-1"
+      >
         {text}
       </TooltipSlip>
     </TooltipTrigger>

@@ -1,5 +1,11 @@
 import { buildPath, type Endpoint, type EndpointCall, type EndpointResponse } from "../../shared/contract.ts";
-import { type FieldError, type ProblemDocument, ProblemDocumentSchema, type ProblemSlug, problemSlug } from "../../shared/problem.ts";
+import {
+  type FieldError,
+  type ProblemDocument,
+  ProblemDocumentSchema,
+  type ProblemSlug,
+  problemSlug,
+} from "../../shared/problem.ts";
 
 /** A refusal of the API, or no answer at all (`slug` is "offline"). Shows nothing by itself. */
 export class ApiProblem extends Error {
@@ -8,7 +14,12 @@ export class ApiProblem extends Error {
   readonly document: ProblemDocument | null;
 
   constructor(slug: ApiProblem["slug"], status: number, document: ProblemDocument | null, cause?: unknown) {
-    super(document?.detail ?? document?.title ?? (slug === "offline" ? "The server can not be reached." : "Something went wrong."), { cause });
+    super(
+      document?.detail ??
+        document?.title ??
+        (slug === "offline" ? "The server can not be reached." : "Something went wrong."),
+      { cause },
+    );
     this.name = "ApiProblem";
     this.slug = slug;
     this.status = status;

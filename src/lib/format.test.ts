@@ -22,7 +22,12 @@ describe("formatNames", () => {
 describe("formatLocalDate", () => {
   // Checked against the perpetual calendar: 11 December 2026 is a Friday, 29 February 2028 a Tuesday.
   it("names the weekday of the date itself, in any zone", () => {
-    expect(formatLocalDate("2026-12-11")).toEqual({ weekday: "Fri", day: "11", month: "Dec", full: "Friday 11 December" });
+    expect(formatLocalDate("2026-12-11")).toEqual({
+      weekday: "Fri",
+      day: "11",
+      month: "Dec",
+      full: "Friday 11 December",
+    });
     expect(formatLocalDate("2028-02-29").weekday).toBe("Tue");
   });
 });

@@ -24,7 +24,8 @@ export function formatNames(names: readonly string[]): string {
 /** A local calendar date ("2026-12-11") in parts for a leaf and in full. No zone moves it. */
 export function formatLocalDate(date: string): { weekday: string; day: string; month: string; full: string } {
   const at = Date.parse(`${date}T12:00:00Z`);
-  const part = (options: Intl.DateTimeFormatOptions) => new Intl.DateTimeFormat("en-GB", { ...options, timeZone: "UTC" }).format(at);
+  const part = (options: Intl.DateTimeFormatOptions) =>
+    new Intl.DateTimeFormat("en-GB", { ...options, timeZone: "UTC" }).format(at);
   return {
     weekday: part({ weekday: "short" }),
     day: part({ day: "numeric" }),

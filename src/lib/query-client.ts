@@ -5,7 +5,14 @@ const READ_ATTEMPTS = 3;
 
 /** A failure with a status below 500 is an answer (not found, not allowed): asking again changes nothing. */
 function isAnswer(error: unknown): boolean {
-  return typeof error === "object" && error !== null && "status" in error && typeof error.status === "number" && error.status > 0 && error.status < 500;
+  return (
+    typeof error === "object" &&
+    error !== null &&
+    "status" in error &&
+    typeof error.status === "number" &&
+    error.status > 0 &&
+    error.status < 500
+  );
 }
 
 /** A fresh client: reads are tried three times unless the server answered, writes once. */

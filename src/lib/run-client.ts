@@ -17,7 +17,8 @@ interface Seat {
 /** How a client gets its workers; tests pass their own. */
 export type WorkerMaker = () => Worker;
 
-const makeRunWorker: WorkerMaker = () => new Worker(new URL("../workers/run.worker.ts", import.meta.url), { type: "module", name: "run" });
+const makeRunWorker: WorkerMaker = () =>
+  new Worker(new URL("../workers/run.worker.ts", import.meta.url), { type: "module", name: "run" });
 
 /** A run that a newer one took the place of. */
 export class RunReplacedError extends Error {

@@ -10,12 +10,17 @@ beforeEach(() => {
   localStorage.clear();
   delete root.dataset.theme;
   // jsdom has no matchMedia.
-  vi.stubGlobal("matchMedia", () => ({ matches: systemIsDark, addEventListener: () => undefined, removeEventListener: () => undefined }));
+  vi.stubGlobal("matchMedia", () => ({
+    matches: systemIsDark,
+    addEventListener: () => undefined,
+    removeEventListener: () => undefined,
+  }));
 });
 afterEach(() => vi.unstubAllGlobals());
 
 /** Runs the script that the page runs before its first paint. */
 function runEarlyScript() {
+  // eslint-disable-next-line @typescript-eslint/no-implied-eval -- the page runs this very text, outside any module
   new Function(earlyScript)();
 }
 

@@ -43,7 +43,11 @@ export function Component() {
         <Page title={detail.assignment.title}>
           <AssignmentBrief
             detail={detail}
-            feedback={detail.assignment.mine?.submissionId ? <CameBack submissionId={detail.assignment.mine.submissionId} /> : null}
+            feedback={
+              detail.assignment.mine?.submissionId ? (
+                <CameBack submissionId={detail.assignment.mine.submissionId} />
+              ) : null
+            }
           />
         </Page>
       )}

@@ -21,7 +21,16 @@ export function Component() {
       <PageHeader
         title="Design"
         lead="Every part in its states. The theme switch is in the band."
-        actions={<RadioRow legend="Density" isLegendHidden options={[...DENSITIES]} value={density} onChange={(value) => setSearch({ density: value }, { replace: true })} className="w-56" />}
+        actions={
+          <RadioRow
+            legend="Density"
+            isLegendHidden
+            options={[...DENSITIES]}
+            value={density}
+            onChange={(value) => setSearch({ density: value }, { replace: true })}
+            className="w-56"
+          />
+        }
       />
       <Pictures />
       <Controls />

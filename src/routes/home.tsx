@@ -76,7 +76,11 @@ function MyShows({ reader }: { reader: string }) {
           New show
         </LinkButton>
       </div>
-      <QueryView query={useQuery(showsQuery())} errorTitle="Your shows could not be loaded." skeleton={<ShowGridSkeleton />}>
+      <QueryView
+        query={useQuery(showsQuery())}
+        errorTitle="Your shows could not be loaded."
+        skeleton={<ShowGridSkeleton />}
+      >
         {(shows) =>
           shows.length === 0 ? (
             <EmptyState title="No show yet" picture={<Ribbon ribbon={null} label="" />}>
@@ -147,7 +151,8 @@ function Coming() {
       >
         {({ shows, tonight }) => {
           const coming = shows.filter((show) => show.date >= tonight).slice(0, COMING_HERE);
-          if (coming.length === 0) return <p className="py-2 text-soft">No night is published yet. When one is, the shows stand here.</p>;
+          if (coming.length === 0)
+            return <p className="py-2 text-soft">No night is published yet. When one is, the shows stand here.</p>;
           return <ComingShows shows={coming} />;
         }}
       </QueryView>

@@ -24,7 +24,9 @@ import { queryClient } from "../lib/query-client.ts";
 import { requireSession } from "./guards.ts";
 
 /** The editor, the stage and the sound come after the text of the lesson. */
-const ScriptBench = lazy(async () => ({ default: (await import("../features/shows/workbench/script-bench.tsx")).ScriptBench }));
+const ScriptBench = lazy(async () => ({
+  default: (await import("../features/shows/workbench/script-bench.tsx")).ScriptBench,
+}));
 
 export async function loader({ request, params }: LoaderFunctionArgs) {
   await requireSession(request, "student", "teacher");
@@ -82,7 +84,12 @@ function StepPage({ detail, step, here }: { detail: LessonDetail; step: LessonSt
       here={here}
       workbench={
         step.starter === null ? null : (
-          <Workbench detail={detail} step={step} source={progress?.source ?? step.starter} onReady={(handle) => (bench.current = handle)} />
+          <Workbench
+            detail={detail}
+            step={step}
+            source={progress?.source ?? step.starter}
+            onReady={(handle) => (bench.current = handle)}
+          />
         )
       }
     >
@@ -137,7 +144,15 @@ function Workbench({ detail, step, source, onReady }: WorkbenchProps) {
       {(square) => (
         <QueryView query={song} errorTitle="The song could not be loaded." skeleton={<BenchSkeleton />}>
           {({ beatMap, score }) => (
-            <LoadedBench detail={detail} step={step} source={source} onReady={onReady} layout={square.layout} beatMap={beatMap} score={score} />
+            <LoadedBench
+              detail={detail}
+              step={step}
+              source={source}
+              onReady={onReady}
+              layout={square.layout}
+              beatMap={beatMap}
+              score={score}
+            />
           )}
         </QueryView>
       )}

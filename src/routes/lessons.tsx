@@ -41,7 +41,11 @@ export function Component() {
               The course comes with Duskbell. If this stays empty, whoever looks after the installation can help.
             </EmptyState>
           ) : (
-            <LessonList lessons={lessons} isTeacher={isTeacher} nextLessonId={isTeacher ? null : (findNextLesson(lessons)?.id ?? null)} />
+            <LessonList
+              lessons={lessons}
+              isTeacher={isTeacher}
+              nextLessonId={isTeacher ? null : (findNextLesson(lessons)?.id ?? null)}
+            />
           )
         }
       </QueryView>

@@ -21,13 +21,16 @@ export async function loader({ request }: LoaderFunctionArgs) {
 export function Component() {
   const [search] = useSearchParams();
   const wanted = AssignmentIdSchema.safeParse(search.get("assignment"));
-  const assignment = useQuery({ ...assignmentQuery(wanted.data ?? ("none" as AssignmentId)), enabled: wanted.success });
+  const assignment = useQuery({ ...assignmentQuery(wanted.data ?? "none"), enabled: wanted.success });
   const songs = useQuery(songsQuery);
   const navigate = useNavigate();
   const forAssignment = assignment.data?.assignment;
   return (
     <Page title="New show">
-      <PageHeader title="New show" lead={forAssignment ? `For “${forAssignment.title}”` : "Pick a song. Your script will light the square to it."} />
+      <PageHeader
+        title="New show"
+        lead={forAssignment ? `For “${forAssignment.title}”` : "Pick a song. Your script will light the square to it."}
+      />
       <QueryView query={songs} errorTitle="The songs could not be loaded." skeleton={<SongsSkeleton />}>
         {(list) =>
           list.length === 0 ? (
@@ -36,7 +39,13 @@ export function Component() {
             </EmptyState>
           ) : wanted.success ? (
             <QueryView query={assignment} errorTitle="The assignment could not be loaded." skeleton={<SongsSkeleton />}>
-              {({ assignment: { id, songId } }) => <NewShowForm songs={list} assignment={{ id, songId }} onCreated={(show) => void navigate(`/shows/${show.id}`)} />}
+              {({ assignment: { id, songId } }) => (
+                <NewShowForm
+                  songs={list}
+                  assignment={{ id, songId }}
+                  onCreated={(show) => void navigate(`/shows/${show.id}`)}
+                />
+              )}
             </QueryView>
           ) : (
             <NewShowForm songs={list} onCreated={(show) => void navigate(`/shows/${show.id}`)} />

@@ -77,8 +77,16 @@ export function Component() {
               shows.length > 0 ? (
                 <NightList shows={shows} nowSlotId={findOnNow(shows, now, timeZone)} />
               ) : (
-                <EmptyState title={closedReason ?? (publishedAt === null ? "Nothing is published yet" : "The square stays dark this night")} icon="moon">
-                  {publishedAt === null ? "When the lineup is published, every show stands here with its time." : "Pick another night in the calendar."}
+                <EmptyState
+                  title={
+                    closedReason ??
+                    (publishedAt === null ? "Nothing is published yet" : "The square stays dark this night")
+                  }
+                  icon="moon"
+                >
+                  {publishedAt === null
+                    ? "When the lineup is published, every show stands here with its time."
+                    : "Pick another night in the calendar."}
                 </EmptyState>
               )
             }
@@ -89,9 +97,16 @@ export function Component() {
           {data && data.nights.length > 0 && (
             <section aria-label="All nights">
               {buildMonths(data.nights, data.shows).map((month) => (
-                <MonthPage key={month.name} month={month} chosen={night} hrefOf={(date) => `/programme?night=${date}`} />
+                <MonthPage
+                  key={month.name}
+                  month={month}
+                  chosen={night}
+                  hrefOf={(date) => `/programme?night=${date}`}
+                />
               ))}
-              <p className="mt-1 text-meta text-soft">Each lit window is one show. Dark nights are for market, rest and holidays.</p>
+              <p className="mt-1 text-meta text-soft">
+                Each lit window is one show. Dark nights are for market, rest and holidays.
+              </p>
             </section>
           )}
           <section aria-labelledby="good-to-know">
@@ -99,8 +114,9 @@ export function Component() {
               Good to know
             </h2>
             <Notice tone="warn" title="Light that changes quickly">
-              Every show is checked by calculation against three flashes a second. A calculation can not promise that a place is safe for
-              everybody: if flashing light can harm you, ask the stewards for the calmest spot. The venue’s safety officer decides.
+              Every show is checked by calculation against three flashes a second. A calculation can not promise that a
+              place is safe for everybody: if flashing light can harm you, ask the stewards for the calmest spot. The
+              venue’s safety officer decides.
             </Notice>
           </section>
         </div>

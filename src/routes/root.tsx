@@ -13,7 +13,9 @@ import { bandItems } from "./navigation.ts";
 import { useBandCounts } from "./use-band-counts.ts";
 
 /** Seldom needed, and its forms weigh as much as a page. */
-const SignInAgain = lazy(() => import("../features/auth/components/sign-in-again.tsx").then((module) => ({ default: module.SignInAgain })));
+const SignInAgain = lazy(() =>
+  import("../features/auth/components/sign-in-again.tsx").then((module) => ({ default: module.SignInAgain })),
+);
 
 /** What a route may say of itself in `handle`. */
 export interface RouteHandle {

@@ -8,6 +8,7 @@ import { Ribbon } from "../components/ribbon.tsx";
 import { sessionQuery } from "../features/auth/api.ts";
 import { showsQuery } from "../features/shows/api.ts";
 import { ShowGrid, ShowGridSkeleton } from "../features/shows/components/show-grid.tsx";
+import { ShowMenu } from "../features/shows/components/show-menu.tsx";
 import { useNow } from "../hooks/use-now.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { requireSession } from "./guards.ts";
@@ -44,16 +45,29 @@ export function Component() {
           </>
         }
       />
-      <QueryView query={useQuery(showsQuery(archived))} errorTitle="Your shows could not be loaded." skeleton={<ShowGridSkeleton />}>
+      <QueryView
+        query={useQuery(showsQuery(archived))}
+        errorTitle="Your shows could not be loaded."
+        skeleton={<ShowGridSkeleton />}
+      >
         {(shows) =>
           shows.length === 0 ? (
-            <EmptyState title={isArchive ? "Nothing is archived" : "No show yet"} headingLevel={2} picture={<Ribbon ribbon={null} label="" />}>
+            <EmptyState
+              title={isArchive ? "Nothing is archived" : "No show yet"}
+              headingLevel={2}
+              picture={<Ribbon ribbon={null} label="" />}
+            >
               {isArchive
-                ? "A show that you archive in the studio waits here. You can bring it back at any time."
+                ? "A show that you archive waits here. You can bring it back at any time."
                 : "Pick a song and write the first line. The ribbon of your show will be here."}
             </EmptyState>
           ) : (
-            <ShowGrid shows={shows} reader={session?.user.displayName ?? ""} now={now} />
+            <ShowGrid
+              shows={shows}
+              reader={session?.user.displayName ?? ""}
+              now={now}
+              actionsOf={(show) => <ShowMenu show={show} />}
+            />
           )
         }
       </QueryView>

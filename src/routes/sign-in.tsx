@@ -53,13 +53,25 @@ export function Component() {
             selectedId={tab}
             onSelect={(as) => setSearch((before) => ({ ...Object.fromEntries(before), as }), { replace: true })}
             tabs={[
-              { id: "student", label: "Student", icon: "book", content: <StudentSignInForm onSignedIn={handleSignedIn} /> },
+              {
+                id: "student",
+                label: "Student",
+                icon: "book",
+                content: <StudentSignInForm onSignedIn={handleSignedIn} />,
+              },
               { id: "staff", label: "Staff", icon: "people", content: <StaffSignInForm onSignedIn={handleSignedIn} /> },
-              { id: "code", label: "I have a code", icon: "key", content: <NewWordsForm onSignedIn={handleSignedIn} /> },
+              {
+                id: "code",
+                label: "I have a code",
+                icon: "key",
+                content: <NewWordsForm onSignedIn={handleSignedIn} />,
+              },
             ]}
           />
           {tab === "student" && (
-            <p className="mt-6 text-slate">Words lost? Your teacher can give you a code or print you a new card. You do not need an e-mail address.</p>
+            <p className="mt-6 text-slate">
+              Words lost? Your teacher can give you a code or print you a new card. You do not need an e-mail address.
+            </p>
           )}
           <p className="mt-6 border-t border-line pt-5 text-slate">
             Just here for the lights? <Link to="/programme">Tonight’s programme</Link>

@@ -48,7 +48,12 @@ export function Component() {
   const { showId } = useParams();
   const show = useQuery(showQuery(parseId(showId)));
   return (
-    <QueryView query={show} errorTitle="The show could not be loaded." skeleton={<StudioLoading title="Loading" />} frame={(message) => <StudioMessage>{message}</StudioMessage>}>
+    <QueryView
+      query={show}
+      errorTitle="The show could not be loaded."
+      skeleton={<StudioLoading title="Loading" />}
+      frame={(message) => <StudioMessage>{message}</StudioMessage>}
+    >
       {(detail) => <ShowStudio key={detail.show.id} detail={detail} />}
     </QueryView>
   );
@@ -91,9 +96,15 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
   const { data: session, dataUpdatedAt } = useSuspenseQuery(sessionQuery);
   const navigate = useNavigate();
   const now = useNow();
-  const assignment = useQuery({ ...assignmentQuery(show.assignmentId ?? ("none" as AssignmentId)), enabled: show.assignmentId !== null });
-  const handIn = useHandIn(show.assignmentId ?? ("none" as AssignmentId));
-  const runner = useDisposable(() => new ShowRunner({ songId: show.songId, song: beatMap, layout, seed }), [show.songId, beatMap, layout, seed]);
+  const assignment = useQuery({
+    ...assignmentQuery(show.assignmentId ?? "none"),
+    enabled: show.assignmentId !== null,
+  });
+  const handIn = useHandIn(show.assignmentId ?? "none");
+  const runner = useDisposable(
+    () => new ShowRunner({ songId: show.songId, song: beatMap, layout, seed }),
+    [show.songId, beatMap, layout, seed],
+  );
   // What the server held at opening: later revisions come as answers to saves.
   // eslint-disable-next-line react-hooks/exhaustive-deps
   const saver = useMemo(() => new DraftSaver(show.id, { revision: draft.revision, source: draft.source }), [show.id]);
@@ -142,7 +153,7 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
           signedInAt: dataUpdatedAt,
         }}
         versions={versions}
-        readVersion={async (versionId) => (await queryClient.fetchQuery(versionQuery(versionId as VersionId))).source}
+        readVersion={async (versionId) => (await queryClient.fetchQuery(versionQuery(versionId))).source}
         onHandIn={show.assignmentId === null ? null : handleHandIn}
       />
     </Suspense>

@@ -14,7 +14,9 @@ describe("class names", () => {
   });
 
   it("name only what the tokens define", () => {
-    const found = Object.entries(sources).flatMap(([path, source]) => (source.match(SWITCHED_OFF) ?? []).map((name) => `${path}: ${name}`));
+    const found = Object.entries(sources).flatMap(([path, source]) =>
+      (source.match(SWITCHED_OFF) ?? []).map((name) => `${path}: ${name}`),
+    );
     expect(Object.keys(sources).length).toBeGreaterThan(30);
     expect(found).toEqual([]);
   });

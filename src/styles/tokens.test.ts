@@ -12,7 +12,9 @@ const SIGN_MINIMUM = 3;
 type Themes = readonly [light: string, dark: string];
 
 const colours = new Map<string, Themes>();
-for (const [, name, light, dark] of tokensCss.matchAll(/--color-([a-z-]+):\s*light-dark\((#[0-9a-f]{6}), (#[0-9a-f]{6})\);/g)) {
+for (const [, name, light, dark] of tokensCss.matchAll(
+  /--color-([a-z-]+):\s*light-dark\((#[0-9a-f]{6}), (#[0-9a-f]{6})\);/g,
+)) {
   if (name && light && dark) colours.set(name, [light, dark]);
 }
 
@@ -55,7 +57,9 @@ const SIGN_PAIRS: Readonly<Record<string, readonly string[]>> = {
 };
 
 const listPairs = (pairs: Readonly<Record<string, readonly string[]>>) =>
-  Object.entries(pairs).flatMap(([front, grounds]) => grounds.flatMap((ground) => (["light", "dark"] as const).map((theme) => ({ front, ground, theme }))));
+  Object.entries(pairs).flatMap(([front, grounds]) =>
+    grounds.flatMap((ground) => (["light", "dark"] as const).map((theme) => ({ front, ground, theme }))),
+  );
 
 function contrast(front: string, ground: string, theme: "light" | "dark"): number {
   const side = theme === "light" ? 0 : 1;
@@ -81,7 +85,10 @@ describe("colour tokens", () => {
     expect(contrast(front, ground, theme)).toBeGreaterThanOrEqual(TEXT_MINIMUM);
   });
 
-  it.each(listPairs(SIGN_PAIRS))("keep borders and signs visible: $front on $ground, $theme", ({ front, ground, theme }) => {
-    expect(contrast(front, ground, theme)).toBeGreaterThanOrEqual(SIGN_MINIMUM);
-  });
+  it.each(listPairs(SIGN_PAIRS))(
+    "keep borders and signs visible: $front on $ground, $theme",
+    ({ front, ground, theme }) => {
+      expect(contrast(front, ground, theme)).toBeGreaterThanOrEqual(SIGN_MINIMUM);
+    },
+  );
 });

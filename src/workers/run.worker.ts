@@ -17,6 +17,7 @@ let compiling: Promise<WebAssembly.Module> | null = null;
 
 function compiledModule(): Promise<WebAssembly.Module> {
   // Not `compileStreaming`: a server that sends another content type would fail it.
+  // eslint-disable-next-line no-restricted-globals -- an asset of the build, no endpoint
   compiling ??= fetch(wasmUrl)
     .then((response) => {
       if (!response.ok) throw new Error(`The engine did not load: ${response.status}.`);

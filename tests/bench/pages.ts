@@ -33,14 +33,23 @@ export async function benchPages(): Promise<Figure[]> {
       });
       await page.goto(route, { waitUntil: "networkidle" });
       const bytes = [...scripts].reduce((sum, name) => sum + gzipSync(readFileSync(path.join(CLIENT, name))).length, 0);
-      figures.push({ name: `scripts and styles of ${route}`, value: bytes / KIB, unit: "KiB gzip", against: `the aim of ${LIMIT_KIB} KiB`, ratio: bytes / KIB / LIMIT_KIB });
+      figures.push({
+        name: `scripts and styles of ${route}`,
+        value: bytes / KIB,
+        unit: "KiB gzip",
+        against: `the aim of ${LIMIT_KIB} KiB`,
+        ratio: bytes / KIB / LIMIT_KIB,
+      });
       await context.close();
     }
   } finally {
     await browser.close();
     await product.stop();
   }
-  const total = readdirSync(path.join(CLIENT, "assets")).reduce((sum, name) => sum + readFileSync(path.join(CLIENT, "assets", name)).length, 0);
+  const total = readdirSync(path.join(CLIENT, "assets")).reduce(
+    (sum, name) => sum + readFileSync(path.join(CLIENT, "assets", name)).length,
+    0,
+  );
   figures.push({ name: "everything built", value: total / KIB, unit: "KiB", against: null, ratio: null });
   return figures;
 }

@@ -30,20 +30,36 @@ export async function benchRequests(): Promise<Figure[]> {
   const folder = mkdtempSync(path.join(tmpdir(), "duskbell-bench-"));
   const bare = createBareServer(path.join(folder, "bare.db"));
   const servers = [await listen(portal.app), await listen(bare.app)] as const;
-  const [ours, theirs] = servers.map((server) => `http://127.0.0.1:${(server.address() as AddressInfo).port}`) as [string, string];
+  const [ours, theirs] = servers.map((server) => `http://127.0.0.1:${(server.address() as AddressInfo).port}`) as [
+    string,
+    string,
+  ];
 
   let revision = 1;
   const headers = { cookie, "sec-fetch-site": "same-origin", "content-type": "application/json" };
   const save = async (): Promise<void> => {
     const body = JSON.stringify({ baseRevision: revision, source: `${SCRIPT}// ${revision}` });
     const key = `bench-save-${revision}`;
-    await send(`${ours}/api/shows/${show.id}/draft`, { method: "PUT", headers: { ...headers, "idempotency-key": key }, body });
+    await send(`${ours}/api/shows/${show.id}/draft`, {
+      method: "PUT",
+      headers: { ...headers, "idempotency-key": key },
+      body,
+    });
     revision += 1;
   };
   const bareSave = (): Promise<void> =>
-    send(`${theirs}/draft`, { method: "PUT", headers: { "content-type": "application/json" }, body: JSON.stringify({ source: SCRIPT }) });
+    send(`${theirs}/draft`, {
+      method: "PUT",
+      headers: { "content-type": "application/json" },
+      body: JSON.stringify({ source: SCRIPT }),
+    });
 
-  const reads = await inTurns(READS, () => send(`${ours}/api/shows/${show.id}`, { headers }), () => send(`${theirs}/show`, {}), WRITERS);
+  const reads = await inTurns(
+    READS,
+    () => send(`${ours}/api/shows/${show.id}`, { headers }),
+    () => send(`${theirs}/show`, {}),
+    WRITERS,
+  );
   // Saves of one draft follow each other: each names the revision before it.
   const saves = await inTurns(SAVES, save, bareSave, 1);
   for (const server of servers) server.close();
@@ -51,8 +67,20 @@ export async function benchRequests(): Promise<Figure[]> {
   bare.close();
   rmSync(folder, { recursive: true, force: true });
   return [
-    { name: "reading a show", value: reads.ours, unit: "requests a second", against: "bare Express and better-sqlite3", ratio: reads.ours / reads.theirs },
-    { name: "saving a draft of 6 kB", value: saves.ours, unit: "saves a second", against: "bare Express and better-sqlite3", ratio: saves.ours / saves.theirs },
+    {
+      name: "reading a show",
+      value: reads.ours,
+      unit: "requests a second",
+      against: "bare Express and better-sqlite3",
+      ratio: reads.ours / reads.theirs,
+    },
+    {
+      name: "saving a draft of 6 kB",
+      value: saves.ours,
+      unit: "saves a second",
+      against: "bare Express and better-sqlite3",
+      ratio: saves.ours / saves.theirs,
+    },
   ];
 }
 
@@ -63,7 +91,12 @@ async function send(url: string, init: RequestInit): Promise<void> {
 }
 
 /** Requests a second of both, in alternating rounds. */
-async function inTurns(count: number, ours: () => Promise<void>, theirs: () => Promise<void>, atOnce: number): Promise<{ ours: number; theirs: number }> {
+async function inTurns(
+  count: number,
+  ours: () => Promise<void>,
+  theirs: () => Promise<void>,
+  atOnce: number,
+): Promise<{ ours: number; theirs: number }> {
   const rates = { ours: new Array<number>(), theirs: new Array<number>() };
   for (let round = 0; round < ROUNDS; round += 1) {
     rates.ours.push(await rate(count, ours, atOnce));

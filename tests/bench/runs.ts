@@ -63,8 +63,20 @@ export async function benchRuns(): Promise<Figure[]> {
     },
   });
   return [
-    { name: "run of a three-minute show", value: times.engine, unit: "ms", against: "bare QuickJS on the same code", ratio: times.engine / times.bare },
-    { name: "run of a three-minute show", value: times.engine, unit: "ms", against: "node:vm on the same code", ratio: times.engine / times.vm },
+    {
+      name: "run of a three-minute show",
+      value: times.engine,
+      unit: "ms",
+      against: "bare QuickJS on the same code",
+      ratio: times.engine / times.bare,
+    },
+    {
+      name: "run of a three-minute show",
+      value: times.engine,
+      unit: "ms",
+      against: "node:vm on the same code",
+      ratio: times.engine / times.vm,
+    },
     { name: "fuel of a three-minute show", value: outcome.fuel, unit: "polls", against: null, ratio: null },
     { name: "cues of a three-minute show", value: outcome.cueCount, unit: "cues", against: null, ratio: null },
   ];

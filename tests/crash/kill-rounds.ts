@@ -9,7 +9,6 @@ import { type Connection, openDatabase } from "../../server/db/connection.ts";
 import { drafts } from "../../server/db/schema/index.ts";
 import { createSessions } from "../../server/identity/sessions.ts";
 import { DATABASE_FILE, openDataDir } from "../../server/start-server.ts";
-import type { UserId } from "../../shared/ids.ts";
 import { buildShow, buildSquare, buildUser } from "../support/factories.ts";
 import { SAME_ORIGIN } from "../support/test-server.ts";
 
@@ -99,7 +98,7 @@ async function buildWriters(folder: string): Promise<Writer[]> {
     const userId = buildUser(db).id;
     const source = `// writer ${number}, save 0\n`;
     const showId = buildShow(db, { authorIds: [userId], source, revision: 0 }).id;
-    const { cookie } = await sessions.open(userId as UserId);
+    const { cookie } = await sessions.open(userId);
     writers.push({
       number,
       showId,

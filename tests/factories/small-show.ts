@@ -6,7 +6,16 @@ import { buildTimeline, type TimelineHead, type WrittenCue } from "../../sandbox
 import type { Timeline } from "../../sandbox/timeline/model.ts";
 
 /** One outlet of a front: a kind of box, or a colour strip of so many pixels. */
-export type OutletSketch = BoxKind | number | { readonly kind: BoxKind; readonly part?: string; readonly watts?: number; readonly circuit?: string; readonly pixels?: number };
+export type OutletSketch =
+  | BoxKind
+  | number
+  | {
+      readonly kind: BoxKind;
+      readonly part?: string;
+      readonly watts?: number;
+      readonly circuit?: string;
+      readonly pixels?: number;
+    };
 
 export interface FrontSketch {
   readonly side: Side | null;
@@ -34,11 +43,32 @@ export function buildLayout(fronts: readonly FrontSketch[], overrides: Partial<L
         name: `front ${letters(index)}`,
         side,
         order,
-        silhouette: { width: 1, eave: 0.5, top: 0.8, roof: "gable", floors: 2, bays: 3, window: "sash", ground: "shop", awning: 0, chimney: 0, sign: false },
+        silhouette: {
+          width: 1,
+          eave: 0.5,
+          top: 0.8,
+          roof: "gable",
+          floors: 2,
+          bays: 3,
+          window: "sash",
+          ground: "shop",
+          awning: 0,
+          chimney: 0,
+          sign: false,
+        },
         boxes: outlets.map((sketch, place) => {
-          const outlet = typeof sketch === "number" ? { kind: "colour" as const, pixels: sketch } : typeof sketch === "string" ? { kind: sketch } : sketch;
+          const outlet =
+            typeof sketch === "number"
+              ? { kind: "colour" as const, pixels: sketch }
+              : typeof sketch === "string"
+                ? { kind: sketch }
+                : sketch;
           const { kind, part = PARTS[place] ?? `part-${letters(place)}`, watts = 40, circuit = "a", pixels } = outlet;
-          return { id: `box-${letters(place)}`, kind, outlets: [{ number: 1, part, watts, circuit, ...(pixels === undefined ? {} : { pixels }) }] };
+          return {
+            id: `box-${letters(place)}`,
+            kind,
+            outlets: [{ number: 1, part, watts, circuit, ...(pixels === undefined ? {} : { pixels }) }],
+          };
         }),
       };
     }),
@@ -53,10 +83,18 @@ export function buildFront(...outlets: readonly OutletSketch[]): Layout {
 
 /** Seven fronts on the north side whose windows dim, the first broad: a fifth of the side, yet a quarter of any screen's middle. */
 export function buildBroadStreet(): Layout {
-  const street = buildLayout(Array.from({ length: 7 }, () => ({ side: "north" as const, outlets: [{ kind: "dimmer" as const, part: "windows" }] })));
+  const street = buildLayout(
+    Array.from({ length: 7 }, () => ({
+      side: "north" as const,
+      outlets: [{ kind: "dimmer" as const, part: "windows" }],
+    })),
+  );
   return {
     ...street,
-    fronts: street.fronts.map((front, index) => ({ ...front, silhouette: { ...front.silhouette, floors: 3, bays: index === 0 ? 6 : 4, width: index === 0 ? 1.6 : 1 } })),
+    fronts: street.fronts.map((front, index) => ({
+      ...front,
+      silhouette: { ...front.silhouette, floors: 3, bays: index === 0 ? 6 : 4, width: index === 0 ? 1.6 : 1 },
+    })),
   };
 }
 
@@ -65,7 +103,10 @@ function letters(index: number): string {
 }
 
 /** A song of so many bars of four beats at a steady tempo, silent but for what `overrides` says. */
-export function buildSong(overrides: Partial<BeatMap> = {}, { bars = 8, tempo = 120 }: { readonly bars?: number; readonly tempo?: number } = {}): BeatMap {
+export function buildSong(
+  overrides: Partial<BeatMap> = {},
+  { bars = 8, tempo = 120 }: { readonly bars?: number; readonly tempo?: number } = {},
+): BeatMap {
   const { beatsPerBar = 4 } = overrides;
   const count = bars * beatsPerBar;
   return {
@@ -90,20 +131,41 @@ export const on = (beat: number, lights: Lights, level = 100, line: number | rea
   action: "on",
   level: Math.round(level * 100),
 });
-export const off = (beat: number, lights: Lights, line: number | readonly number[] = 1): WrittenCue => ({ ...cueHead(beat, lights, line), action: "off" });
-export const fadeTo = (beat: number, lights: Lights, level: number, beats: number, line: number | readonly number[] = 1): WrittenCue => ({
+export const off = (beat: number, lights: Lights, line: number | readonly number[] = 1): WrittenCue => ({
+  ...cueHead(beat, lights, line),
+  action: "off",
+});
+export const fadeTo = (
+  beat: number,
+  lights: Lights,
+  level: number,
+  beats: number,
+  line: number | readonly number[] = 1,
+): WrittenCue => ({
   ...cueHead(beat, lights, line),
   action: "fadeTo",
   level: Math.round(level * 100),
   length: toTicks(beats),
 });
-export const pulse = (beat: number, lights: Lights, beats: number, colour?: number, line: number | readonly number[] = 1): WrittenCue => ({
+export const pulse = (
+  beat: number,
+  lights: Lights,
+  beats: number,
+  colour?: number,
+  line: number | readonly number[] = 1,
+): WrittenCue => ({
   ...cueHead(beat, lights, line),
   action: "pulse",
   length: toTicks(beats),
   ...(colour === undefined ? {} : { colour }),
 });
-export const colour = (beat: number, lights: Lights, value: number, beats = 0, line: number | readonly number[] = 1): WrittenCue => ({
+export const colour = (
+  beat: number,
+  lights: Lights,
+  value: number,
+  beats = 0,
+  line: number | readonly number[] = 1,
+): WrittenCue => ({
   ...cueHead(beat, lights, line),
   action: "colour",
   colour: value,
@@ -115,7 +177,11 @@ function cueHead(beat: number, lights: Lights, line: number | readonly number[])
 }
 
 /** A timeline of cues on a layout; 8 bars of 4 beats unless `overrides` says otherwise. */
-export function buildShow(layout: Layout, cues: readonly WrittenCue[], overrides: Partial<TimelineHead> = {}): Timeline {
+export function buildShow(
+  layout: Layout,
+  cues: readonly WrittenCue[],
+  overrides: Partial<TimelineHead> = {},
+): Timeline {
   return buildTimeline(
     {
       language: 1,

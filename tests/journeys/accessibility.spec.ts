@@ -39,7 +39,9 @@ async function listViolations(page: Page): Promise<string[]> {
     (tags) => (window as unknown as { axe: typeof axe }).axe.run({ runOnly: { type: "tag", values: tags } }),
     TAGS,
   );
-  return results.violations.map((violation) => `${violation.id}: ${violation.nodes.map((node) => node.target.join(" ")).join(" | ")}`);
+  return results.violations.map(
+    (violation) => `${violation.id}: ${violation.nodes.map((node) => node.target.join(" ")).join(" | ")}`,
+  );
 }
 
 async function visit(person: Person, check: PageCheck): Promise<void> {
@@ -58,7 +60,12 @@ describe("every page of the route table", () => {
     describe(`in the ${theme} theme`, () => {
       for (const [path, check] of Object.entries(PAGES)) {
         it(`${path} passes as it is, empty, failed, and with something open over it`, async () => {
-          const person = await openPerson(browser, address, { colorScheme: theme, width: 1280, height: 800, expectedErrors: /500|Failed to load resource/ });
+          const person = await openPerson(browser, address, {
+            colorScheme: theme,
+            width: 1280,
+            height: 800,
+            expectedErrors: /500|Failed to load resource/,
+          });
           try {
             await signIn(person.page, check.as);
             await visit(person, check);
@@ -70,7 +77,9 @@ describe("every page of the route table", () => {
             }
             if (!("none" in check.empty)) {
               for (const fake of check.empty) {
-                await person.page.route(`**${fake.url}`, (route) => route.fulfill({ status: fake.status ?? 200, json: fake.body }));
+                await person.page.route(`**${fake.url}`, (route) =>
+                  route.fulfill({ status: fake.status ?? 200, json: fake.body }),
+                );
               }
               await visit(person, check);
               expect(await listViolations(person.page), "empty").toEqual([]);
@@ -78,7 +87,16 @@ describe("every page of the route table", () => {
             }
             if (typeof check.error === "string") {
               await person.page.route(`**${check.error}`, (route) =>
-                route.fulfill({ status: 500, contentType: "application/problem+json", json: { type: "/problems/internal", title: "Something broke on our side.", status: 500, instance: "test-request" } }),
+                route.fulfill({
+                  status: 500,
+                  contentType: "application/problem+json",
+                  json: {
+                    type: "/problems/internal",
+                    title: "Something broke on our side.",
+                    status: 500,
+                    instance: "test-request",
+                  },
+                }),
               );
               await visit(person, check);
               expect(await listViolations(person.page), "failed").toEqual([]);

@@ -21,8 +21,8 @@ const SCRIPT = [
   "function wake(lights, level) { lights.on(level); }",
   "wake(north, 90);",
   "wait(4);",
-  "const colours = [\"gold\", \"skyblue\"];",
-  "for (const bar of song.section(\"chorus\").bars) { at(bar, () => square.all.colour(colours[0]).fadeTo(60, 2)); }",
+  'const colours = ["gold", "skyblue"];',
+  'for (const bar of song.section("chorus").bars) { at(bar, () => square.all.colour(colours[0]).fadeTo(60, 2)); }',
 ].join("\n");
 const DARK = "square.all.off();";
 
@@ -44,13 +44,18 @@ function readStage(page: Page): Promise<number> {
     pen.drawImage(element as HTMLCanvasElement, 0, 0, copy.width, copy.height);
     const { data } = pen.getImageData(0, 0, copy.width, copy.height);
     let sum = 0;
-    for (let i = 0; i < data.length; i += 4) sum += 0.2126 * (data[i] ?? 0) + 0.7152 * (data[i + 1] ?? 0) + 0.0722 * (data[i + 2] ?? 0);
+    for (let i = 0; i < data.length; i += 4)
+      sum += 0.2126 * (data[i] ?? 0) + 0.7152 * (data[i + 1] ?? 0) + 0.0722 * (data[i + 2] ?? 0);
     return sum / (data.length / 4);
   });
 }
 
 async function untilRan(page: Page): Promise<void> {
-  await page.getByRole("status").filter({ hasText: /^Ran: \d+ cues?\./ }).first().waitFor({ timeout: 60_000, state: "attached" });
+  await page
+    .getByRole("status")
+    .filter({ hasText: /^Ran: \d+ cues?\./ })
+    .first()
+    .waitFor({ timeout: 60_000, state: "attached" });
 }
 
 async function writeShow(person: Person, hands: Hands, title: string): Promise<void> {
@@ -67,7 +72,10 @@ async function writeShow(person: Person, hands: Hands, title: string): Promise<v
 async function seeAndHear(page: Page, hands: Hands): Promise<void> {
   await hands.writeScript(page, DARK);
   await hands.press(page.getByRole("button", { name: /^Run/ }));
-  await page.getByText(/^Saved/).first().waitFor({ timeout: 30_000 });
+  await page
+    .getByText(/^Saved/)
+    .first()
+    .waitFor({ timeout: 30_000 });
   await page.waitForTimeout(1500);
   const dark = await readStage(page);
   await hands.writeScript(page, SCRIPT);
@@ -85,11 +93,19 @@ async function seeAndHear(page: Page, hands: Hands): Promise<void> {
 
 async function handIn(page: Page, hands: Hands): Promise<void> {
   await hands.press(page.getByRole("button", { name: "Hand in" }));
-  const answered = page.waitForResponse((response) => response.url().endsWith("/submissions") && response.request().method() === "POST", { timeout: 60_000 });
+  const answered = page.waitForResponse(
+    (response) => response.url().endsWith("/submissions") && response.request().method() === "POST",
+    { timeout: 60_000 },
+  );
   await hands.press(page.getByRole("dialog").getByRole("button", { name: "Hand in", exact: true }));
   const response = await answered;
   const sent = response.request().postDataJSON() as { hash: string | null };
-  const result = (await response.json()) as { run: { hash: string | null; isOk: boolean }; hashesAgree: boolean; unmet: unknown[]; isLate: boolean };
+  const result = (await response.json()) as {
+    run: { hash: string | null; isOk: boolean };
+    hashesAgree: boolean;
+    unmet: unknown[];
+    isLate: boolean;
+  };
   expect(result.run.isOk).toBe(true);
   expect(sent.hash).toMatch(/^[0-9a-f]{64}$/);
   // The server's own run came to the very same bytes.

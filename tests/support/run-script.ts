@@ -7,17 +7,42 @@ import { BeatMapSchema, type BeatMap } from "../../shared/contracts/songs.ts";
 import { LayoutSchema, type Front, type Layout } from "../../shared/contracts/square.ts";
 
 const SILHOUETTE: Front["silhouette"] = {
-  width: 1, eave: 0.5, top: 0.8, roof: "gable", floors: 2, bays: 3, window: "sash", ground: "shop", awning: 0, chimney: 0, sign: false,
+  width: 1,
+  eave: 0.5,
+  top: 0.8,
+  roof: "gable",
+  floors: 2,
+  bays: 3,
+  window: "sash",
+  ground: "shop",
+  awning: 0,
+  chimney: 0,
+  sign: false,
 };
 
-function front(name: string, side: Front["side"], order: number, boxes: readonly { kind: Front["boxes"][number]["kind"]; parts: readonly string[]; pixels?: number }[]): Front {
+function front(
+  name: string,
+  side: Front["side"],
+  order: number,
+  boxes: readonly { kind: Front["boxes"][number]["kind"]; parts: readonly string[]; pixels?: number }[],
+): Front {
   const id = name.replaceAll(" ", "-");
   return {
-    id, name, side, order, silhouette: SILHOUETTE,
+    id,
+    name,
+    side,
+    order,
+    silhouette: SILHOUETTE,
     boxes: boxes.map(({ kind, parts, pixels }, b) => ({
       id: `${id}-${b + 1}`,
       kind,
-      outlets: parts.map((part, n) => ({ number: n + 1, part, watts: 40, circuit: "a", ...(pixels === undefined ? {} : { pixels }) })),
+      outlets: parts.map((part, n) => ({
+        number: n + 1,
+        part,
+        watts: 40,
+        circuit: "a",
+        ...(pixels === undefined ? {} : { pixels }),
+      })),
     })),
   };
 }
@@ -33,7 +58,10 @@ export const SMALL_LAYOUT: Layout = LayoutSchema.parse({
   circuits: [{ id: "a", volts: 120, breakerAmps: 20 }],
   fronts: [
     front("tree", null, 0, [{ kind: "dimmer", parts: ["lamps"] }]),
-    front("tea room", "east", 0, [{ kind: "relay", parts: ["roof"] }, { kind: "colour", parts: ["strip"], pixels: 3 }]),
+    front("tea room", "east", 0, [
+      { kind: "relay", parts: ["roof"] },
+      { kind: "colour", parts: ["strip"], pixels: 3 },
+    ]),
     front("library", "north", 1, [{ kind: "dimmer", parts: ["windows", "door"] }]),
     front("bakery", "north", 0, [{ kind: "relay", parts: ["roof", "windows"] }]),
   ],
@@ -44,7 +72,10 @@ export const SMALL_SONG: BeatMap = BeatMapSchema.parse({
   version: 1,
   beats: Array.from({ length: 18 }, (_, beat) => beat * 500_000),
   beatsPerBar: 4,
-  bars: [{ number: 0, start: 0, beats: 1 }, ...[1, 2, 3, 4].map((number) => ({ number, start: number * 4 - 3, beats: 4 }))],
+  bars: [
+    { number: 0, start: 0, beats: 1 },
+    ...[1, 2, 3, 4].map((number) => ({ number, start: number * 4 - 3, beats: 4 })),
+  ],
   sections: [
     { name: "verse", start: 1, end: 5 },
     { name: "chorus", start: 5, end: 9 },
@@ -53,7 +84,14 @@ export const SMALL_SONG: BeatMap = BeatMapSchema.parse({
   ],
   instruments: [
     { name: "drums", hits: [1, 3, 5, 7, 9, 11, 13, 15], notes: [] },
-    { name: "bells", hits: [5, 6], notes: [{ start: 5, beats: 1, pitch: 60 }, { start: 6, beats: 0.5, pitch: 64 }] },
+    {
+      name: "bells",
+      hits: [5, 6],
+      notes: [
+        { start: 5, beats: 1, pitch: 60 },
+        { start: 6, beats: 0.5, pitch: 64 },
+      ],
+    },
   ],
   loudness: Array.from({ length: 68 }, (_, quarter) => (quarter < 20 ? 20 : 80)),
 });
@@ -67,9 +105,15 @@ export async function runScript(source: string, input: Partial<Omit<RunInput, "s
 }
 
 /** Runs a script that has to run; throws its problem otherwise. */
-export async function runWell(source: string, input: Partial<Omit<RunInput, "source">> = {}): Promise<Extract<RunOutcome, { ok: true }>> {
+export async function runWell(
+  source: string,
+  input: Partial<Omit<RunInput, "source">> = {},
+): Promise<Extract<RunOutcome, { ok: true }>> {
   const outcome = await runScript(source, input);
-  if (!outcome.ok) throw new Error(`${outcome.problem.code} in line ${outcome.problem.range.line}: ${outcome.problem.sentence} (${outcome.problem.details ?? ""})`);
+  if (!outcome.ok)
+    throw new Error(
+      `${outcome.problem.code} in line ${outcome.problem.range.line}: ${outcome.problem.sentence} (${outcome.problem.details ?? ""})`,
+    );
   return outcome;
 }
 
@@ -95,7 +139,9 @@ export function listCues(timeline: Timeline): string[] {
       (cues.length[cue] ?? 0) > 0 ? `+${(cues.length[cue] ?? 0) / 960}` : "",
       lights.length === LAYOUT_LIGHTS && lights.every((light, i) => light === i) ? "all" : `[${lights.join(" ")}]`,
       `@${(timeline.chains[cues.chain[cue] ?? 0] ?? []).join(">")}`,
-    ].filter((part) => part !== "").join(" ");
+    ]
+      .filter((part) => part !== "")
+      .join(" ");
   });
 }
 

@@ -6,7 +6,6 @@ import type { Db } from "../../server/db/connection.ts";
 import type { AppDeps } from "../../server/deps.ts";
 import { createSessions } from "../../server/identity/sessions.ts";
 import { buildPath, type Endpoint, type EndpointCall } from "../../shared/contract.ts";
-import type { UserId } from "../../shared/ids.ts";
 import { createFakeRuns } from "./fake-runs.ts";
 import { createTestClock, type TestClock } from "./test-clock.ts";
 import { createTestDatabase } from "./test-database.ts";

@@ -40,7 +40,8 @@ export function moment(word: string, value: unknown, argument: number): number {
 /** A whole number of at least `least`. */
 export function whole(word: string, value: unknown, argument: number, least: number): number {
   const count = number(word, value, argument);
-  if (!Number.isInteger(count) || count < least) return fail("wants-whole", { word, least, got: tidy(count) }, argument);
+  if (!Number.isInteger(count) || count < least)
+    return fail("wants-whole", { word, least, got: tidy(count) }, argument);
   return count;
 }
 
@@ -64,7 +65,8 @@ export function unknownName(code: string, name: string, names: readonly string[]
 
 /** Runs an action of the script with as many of `first` and `second` as it names without a default (rule 7). */
 export function call(callback: Callback, first: unknown, second: unknown): unknown {
-  if (state.callbackDepth >= MAX_CALLBACK_DEPTH) return fail("calls-itself", { name: callback.name || "This function" });
+  if (state.callbackDepth >= MAX_CALLBACK_DEPTH)
+    return fail("calls-itself", { name: callback.name || "This function" });
   state.callbackDepth++;
   const run = callback as (...values: unknown[]) => unknown;
   const named = callback.length;

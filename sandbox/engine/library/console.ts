@@ -41,7 +41,8 @@ function write(out: NoteText, value: unknown, depth: number): void {
   else if (value === square) out.add("square");
   else if (value instanceof Error) out.add(String(value.message));
   else if (depth >= MAX_DEPTH) out.add("...");
-  else if (Array.isArray(value) || value instanceof Set) writeList(out, value instanceof Set ? [...value] : value, depth);
+  else if (Array.isArray(value) || value instanceof Set)
+    writeList(out, value instanceof Set ? [...value] : value, depth);
   else if (value instanceof Map) writeFields(out, [...value], depth);
   else writeFields(out, Object.entries(value), depth);
 }

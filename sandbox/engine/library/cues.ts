@@ -89,7 +89,15 @@ function failTooMuch(code: "too-many-cues" | "too-many-changes", limit: number):
  * `isQuiet`: nobody needs to hear that it came at the very end. Flat and without objects, since its
  * steps count on every script's fuel.
  */
-export function writeCue(selection: number, lights: number, action: number, level: number, length: number, colour: number, isQuiet: boolean): void {
+export function writeCue(
+  selection: number,
+  lights: number,
+  action: number,
+  level: number,
+  length: number,
+  colour: number,
+  isQuiet: boolean,
+): void {
   if (lights === 0) {
     notice("nothing-to-light");
     return;

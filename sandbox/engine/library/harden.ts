@@ -44,7 +44,7 @@ function hiddenPrototypes(): object[] {
     function* () {},
     async function () {},
     async function* () {},
-    (async function* () {}).prototype as object,
+    async function* () {}.prototype as object,
     new Uint8Array(0),
     new Uint16Array(0),
     new Uint32Array(0),
@@ -53,7 +53,11 @@ function hiddenPrototypes(): object[] {
     new ArrayBuffer(0),
   ];
   for (const sample of samples) {
-    for (let proto = Object.getPrototypeOf(sample) as object | null; proto !== null; proto = Object.getPrototypeOf(proto) as object | null)
+    for (
+      let proto = Object.getPrototypeOf(sample) as object | null;
+      proto !== null;
+      proto = Object.getPrototypeOf(proto) as object | null
+    )
       found.push(proto);
   }
   return found;
@@ -95,7 +99,8 @@ export function harden(random: () => number, roots: readonly unknown[]): void {
   for (const proto of [...hidden, Function.prototype]) {
     // What a function's `constructor` gives can compile text.
     const made = Object.getOwnPropertyDescriptor(proto, "constructor")?.value as unknown;
-    if (typeof made === "function" && made.name.endsWith("Function")) Object.defineProperty(proto, "constructor", { value: undefined });
+    if (typeof made === "function" && made.name.endsWith("Function"))
+      Object.defineProperty(proto, "constructor", { value: undefined });
   }
   for (const kind of [Error, TypeError, RangeError, ReferenceError, SyntaxError, EvalError, URIError]) {
     allowOwn(kind.prototype, "name");

@@ -66,7 +66,6 @@ export class Lights {
     Object.freeze(this);
   }
 
-
   static indexesOf(lights: Lights): Uint16Array {
     return lights.#indexes;
   }
@@ -99,19 +98,27 @@ export class Lights {
   }
 
   fadeTo(asked: number, length: number): this {
-    if (arguments.length < 2) fail("missing-value", { word: "fadeTo", count: 2, what: "a level and the beats", example: `fadeTo(${typeof asked === "number" ? tidy(asked) : 50}, 2)` });
+    if (arguments.length < 2)
+      fail("missing-value", {
+        word: "fadeTo",
+        count: 2,
+        what: "a level and the beats",
+        example: `fadeTo(${typeof asked === "number" ? tidy(asked) : 50}, 2)`,
+      });
     const value = level("fadeTo", asked);
     return this.#write(FADE, value, ticks("fadeTo", length, 1), NO_COLOUR, value === 0);
   }
 
   pulse(length: number, colour?: string): this {
-    if (arguments.length < 1) fail("missing-value", { word: "pulse", count: 1, what: "the beats", example: "pulse(1)" });
+    if (arguments.length < 1)
+      fail("missing-value", { word: "pulse", count: 1, what: "the beats", example: "pulse(1)" });
     const long = ticks("pulse", length, 0);
     return this.#write(PULSE, 0, long, colour === undefined ? NO_COLOUR : parseColour("pulse", colour, 1), false);
   }
 
   colour(colour: string, length: number = 0): this {
-    if (arguments.length < 1) fail("missing-value", { word: "colour", count: 1, what: "a colour", example: 'colour("gold")' });
+    if (arguments.length < 1)
+      fail("missing-value", { word: "colour", count: 1, what: "a colour", example: 'colour("gold")' });
     return this.#write(COLOUR, 0, ticks("colour", length, 1), parseColour("colour", colour, 0), false);
   }
 
@@ -126,7 +133,8 @@ export class Lights {
   everyNth(step: number, from: number = 0): Lights {
     const stride = whole("everyNth", step, 0, 1);
     const picked: Lights[] = [];
-    for (let i = whole("everyNth", from, 1, 0); i < this.#items.length; i += stride) picked.push(this.#items[i] as Lights);
+    for (let i = whole("everyNth", from, 1, 0); i < this.#items.length; i += stride)
+      picked.push(this.#items[i] as Lights);
     return this.pick(picked);
   }
 
@@ -265,5 +273,10 @@ export function listOf(name: string, items: readonly Lights[]): Lights {
       indexes.push(index);
     }
   }
-  return new Lights({ name, box: commonBox(items), indexes: Uint16Array.from(indexes), items: Object.freeze(items.slice()) });
+  return new Lights({
+    name,
+    box: commonBox(items),
+    indexes: Uint16Array.from(indexes),
+    items: Object.freeze(items.slice()),
+  });
 }

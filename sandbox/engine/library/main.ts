@@ -58,7 +58,12 @@ function describeThrown(thrown: unknown): void {
   }
   if (thrown instanceof Error) {
     const { name, message, stack } = thrown;
-    const isEngine = name === "InternalError" || name === "TypeError" || name === "ReferenceError" || name === "RangeError" || name === "SyntaxError";
+    const isEngine =
+      name === "InternalError" ||
+      name === "TypeError" ||
+      name === "ReferenceError" ||
+      name === "RangeError" ||
+      name === "SyntaxError";
     state.failure = {
       code: isEngine ? "engine" : "thrown",
       values: {},

@@ -28,7 +28,8 @@ export class Section {
 /** Starts of the bars from bar 1 on; a pick-up is bar 0 and not among them (rule 22). */
 function barsWithin(start: number, end: number): readonly number[] {
   const bars: number[] = [];
-  for (const bar of state.tables.song.bars) if (bar.number > 0 && bar.start >= start && bar.start < end) bars.push(bar.start);
+  for (const bar of state.tables.song.bars)
+    if (bar.number > 0 && bar.start >= start && bar.start < end) bars.push(bar.start);
   return Object.freeze(bars);
 }
 
@@ -120,7 +121,8 @@ export const song = Object.freeze({
     }
     const found = Number.isInteger(asked) ? bars[asked - first.number] : undefined;
     if (found === undefined) return fail("no-such-bar", { bar: tidy(asked), last: last.number }, 0);
-    if (!(place >= 1 && place < found.beats + 1)) return fail("no-such-beat", { bar: asked, beats: found.beats, beat: tidy(place), next: asked + 1 }, 1);
+    if (!(place >= 1 && place < found.beats + 1))
+      return fail("no-such-beat", { bar: asked, beats: found.beats, beat: tidy(place), next: asked + 1 }, 1);
     return found.start + place - 1;
   },
 
@@ -129,7 +131,12 @@ export const song = Object.freeze({
     const turn = whole("section", nth, 1, 1);
     let count = 0;
     for (const section of sections()) if (section.name === wanted && ++count === turn) return section;
-    if (count > 0) return fail("no-such-section", { name: wanted, count, nth: turn, plural: count === 1 ? "section" : "sections" }, 1);
+    if (count > 0)
+      return fail(
+        "no-such-section",
+        { name: wanted, count, nth: turn, plural: count === 1 ? "section" : "sections" },
+        1,
+      );
     const names: string[] = [];
     for (const section of sections()) names.push(section.name);
     return unknownName("unknown-section", wanted, names);

@@ -17,7 +17,12 @@ function partOf(table: PartTable): Lights {
   if (part === undefined) {
     const items: Lights[] = [];
     for (const index of table.lights) items.push(singleLight(index));
-    part = new Lights({ name: table.name, box: table.box, indexes: Uint16Array.from(table.lights), items: Object.freeze(items) });
+    part = new Lights({
+      name: table.name,
+      box: table.box,
+      indexes: Uint16Array.from(table.lights),
+      items: Object.freeze(items),
+    });
     partLights.set(table, part);
   }
   return part;

@@ -54,7 +54,11 @@ export const state: RunState = {
 export class Stop {}
 
 /** Stops the script with a problem of the catalogue. */
-export function fail(code: string, values: { readonly [name: string]: string | number } = {}, argument?: number): never {
+export function fail(
+  code: string,
+  values: { readonly [name: string]: string | number } = {},
+  argument?: number,
+): never {
   state.failure ??= argument === undefined ? { code, values } : { code, values, argument };
   throw new Stop();
 }

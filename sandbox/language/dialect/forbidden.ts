@@ -18,7 +18,8 @@ function isThisInClass(node: ts.Node): boolean {
 /** `const level;`: only the head of a `for..of` gives a `const` its value in another way. */
 function isBareConst(node: ts.VariableDeclaration): boolean {
   const list = node.parent;
-  if (!ts.isVariableDeclarationList(list) || ts.isForOfStatement(list.parent) || ts.isForInStatement(list.parent)) return false;
+  if (!ts.isVariableDeclarationList(list) || ts.isForOfStatement(list.parent) || ts.isForInStatement(list.parent))
+    return false;
   return (list.flags & ts.NodeFlags.BlockScoped) === ts.NodeFlags.Const;
 }
 
@@ -26,7 +27,8 @@ function isBareConst(node: ts.VariableDeclaration): boolean {
 function isStrayComma(node: ts.Node): boolean {
   if (!ts.isBinaryExpression(node) || node.operatorToken.kind !== ts.SyntaxKind.CommaToken) return false;
   let top: ts.Node = node;
-  while (ts.isBinaryExpression(top.parent) && top.parent.operatorToken.kind === ts.SyntaxKind.CommaToken) top = top.parent;
+  while (ts.isBinaryExpression(top.parent) && top.parent.operatorToken.kind === ts.SyntaxKind.CommaToken)
+    top = top.parent;
   return !(ts.isForStatement(top.parent) && (top.parent.incrementor === top || top.parent.initializer === top));
 }
 
@@ -93,10 +95,14 @@ function checkShapes(node: ts.Node, { report }: Pick<Parameters<DialectCheck>[1]
   if (declared !== undefined) return report("not-here", declared, { word: "declare", try: "Take it out." });
   const asynchronous = hasModifier(node, ts.SyntaxKind.AsyncKeyword);
   if (asynchronous !== undefined) return report("no-async", asynchronous);
-  if (ts.isFunctionLike(node) && (node as ts.FunctionDeclaration).asteriskToken !== undefined) return report("no-generator", node);
+  if (ts.isFunctionLike(node) && (node as ts.FunctionDeclaration).asteriskToken !== undefined)
+    return report("no-generator", node);
   if (ts.isForOfStatement(node) && node.awaitModifier !== undefined) return report("no-async", node.awaitModifier);
   if (ts.isParameter(node) && ts.isParameterPropertyDeclaration(node, node.parent))
-    return report("not-here", node, { word: node.modifiers?.[0]?.getText() ?? "public", try: "Name the field in the class." });
+    return report("not-here", node, {
+      word: node.modifiers?.[0]?.getText() ?? "public",
+      try: "Name the field in the class.",
+    });
   if (ts.isVariableDeclarationList(node)) return checkDeclarationList(node, report);
   if (ts.isVariableDeclaration(node) && node.initializer === undefined && isBareConst(node))
     return report("const-without-value", node, { name: node.name.getText() });
@@ -106,6 +112,12 @@ function checkShapes(node: ts.Node, { report }: Pick<Parameters<DialectCheck>[1]
 function checkDeclarationList(node: ts.VariableDeclarationList, report: Parameters<DialectCheck>[1]["report"]): void {
   const blockScoped = node.flags & ts.NodeFlags.BlockScoped;
   if (blockScoped === 0)
-    return report("no-var", node.parent, {}, { node: node.getFirstToken() ?? node, at: "instead", text: "let", label: "Write `let`" });
-  if (blockScoped !== ts.NodeFlags.Let && blockScoped !== ts.NodeFlags.Const) report("no-using", node.parent, { word: "using" });
+    return report(
+      "no-var",
+      node.parent,
+      {},
+      { node: node.getFirstToken() ?? node, at: "instead", text: "let", label: "Write `let`" },
+    );
+  if (blockScoped !== ts.NodeFlags.Let && blockScoped !== ts.NodeFlags.Const)
+    report("no-using", node.parent, { word: "using" });
 }

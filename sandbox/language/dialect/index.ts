@@ -14,5 +14,11 @@ import { checkVariables } from "./variables.ts";
  * without, words that are not known, and slips that would run and do nothing.
  */
 export function checkDialect(file: ts.SourceFile, names: NameTable | null): Problem | null {
-  return runChecks(file, readScopes(file), names, [checkForbidden, checkVariables, checkMembers, checkNames, checkSlips]);
+  return runChecks(file, readScopes(file), names, [
+    checkForbidden,
+    checkVariables,
+    checkMembers,
+    checkNames,
+    checkSlips,
+  ]);
 }

@@ -16,10 +16,29 @@ const TYPESCRIPT_MEMBERS: ReadonlySet<string> = new Set(
 );
 
 /** Words of the language that hang on something. */
-const LANGUAGE_MEMBERS: ReadonlySet<string> = new Set<string>([...LIGHTS_MEMBERS, "color", ...SQUARE_MEMBERS, ...SONG_MEMBERS, "beats", "pitch"]);
+const LANGUAGE_MEMBERS: ReadonlySet<string> = new Set<string>([
+  ...LIGHTS_MEMBERS,
+  "color",
+  ...SQUARE_MEMBERS,
+  ...SONG_MEMBERS,
+  "beats",
+  "pitch",
+]);
 
 /** What people ask lights for. */
-const READINGS: ReadonlySet<string> = new Set(["level", "brightness", "isOn", "isLit", "isOff", "value", "state", "getLevel", "getColour", "getColor", "currentLevel"]);
+const READINGS: ReadonlySet<string> = new Set([
+  "level",
+  "brightness",
+  "isOn",
+  "isLit",
+  "isOff",
+  "value",
+  "state",
+  "getLevel",
+  "getColour",
+  "getColor",
+  "currentLevel",
+]);
 
 const WAITS: ReadonlySet<string> = new Set(["wait", "waitUntil", "sleep", "delay"]);
 
@@ -64,24 +83,49 @@ function ownerMembers(owner: ts.Expression, context: DialectContext): OwnerMembe
 }
 
 const GIVES_LIGHTS: ReadonlySet<string> = new Set(["front", "side", "parts"]);
-const KEEPS_LIGHTS: ReadonlySet<string> = new Set<string>([...ACT_WORDS, "color", "first", "everyNth", "reversed", "shuffled", "and", "except", "inTurn", "part"]);
+const KEEPS_LIGHTS: ReadonlySet<string> = new Set<string>([
+  ...ACT_WORDS,
+  "color",
+  "first",
+  "everyNth",
+  "reversed",
+  "shuffled",
+  "and",
+  "except",
+  "inTurn",
+  "part",
+]);
 
 function isSquare(node: ts.Expression): boolean {
   return ts.isIdentifier(node) && node.text === "square";
 }
 
 function isLights(node: ts.Expression): boolean {
-  if (ts.isPropertyAccessExpression(node)) return isSquare(node.expression) && (node.name.text === "all" || node.name.text === "fronts");
+  if (ts.isPropertyAccessExpression(node))
+    return isSquare(node.expression) && (node.name.text === "all" || node.name.text === "fronts");
   if (!ts.isCallExpression(node) || !ts.isPropertyAccessExpression(node.expression)) return false;
   const { expression, name } = node.expression;
   if (isSquare(expression)) return GIVES_LIGHTS.has(name.text);
   return KEEPS_LIGHTS.has(name.text) && isLights(expression);
 }
 
-function reportSkill(node: ts.PropertyAccessExpression, owner: string, members: readonly string[], { report }: DialectContext): void {
+function reportSkill(
+  node: ts.PropertyAccessExpression,
+  owner: string,
+  members: readonly string[],
+  { report }: DialectContext,
+): void {
   const name = node.name.text;
   const meant = near(name, members);
-  const skills = owner === "Lights" ? ACT_WORDS.map((word) => `\`${word}\``).join(", ") : members.map((word) => `\`${word}\``).join(", ");
+  const skills =
+    owner === "Lights"
+      ? ACT_WORDS.map((word) => `\`${word}\``).join(", ")
+      : members.map((word) => `\`${word}\``).join(", ");
   if (meant === null) return report("unknown-skill", node.name, { owner, name, skills });
-  report("unknown-skill", node.name, { owner, name, meant, skills }, { node: node.name, at: "instead", text: meant, label: `Write \`${meant}\`` });
+  report(
+    "unknown-skill",
+    node.name,
+    { owner, name, meant, skills },
+    { node: node.name, at: "instead", text: meant, label: `Write \`${meant}\`` },
+  );
 }

@@ -28,5 +28,10 @@ export const checkNames: DialectCheck = (node, { names, ownFields, report }) => 
   const meant = near(name, known);
   const code = CODES[parameter.kind];
   if (meant === null) return report(code, argument, { name, names: known.slice(0, MAX_OFFERED).join(", ") });
-  report(code, argument, { name, meant }, { node: argument, at: "instead", text: JSON.stringify(meant), label: `Write "${meant}"` });
+  report(
+    code,
+    argument,
+    { name, meant },
+    { node: argument, at: "instead", text: JSON.stringify(meant), label: `Write "${meant}"` },
+  );
 };

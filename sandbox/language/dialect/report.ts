@@ -48,7 +48,11 @@ function readOwnFields(file: ts.SourceFile): Set<string> {
       (ts.isIdentifier(node.name) || ts.isStringLiteral(node.name))
     )
       fields.add(node.name.text);
-    if (ts.isBinaryExpression(node) && node.operatorToken.kind === ts.SyntaxKind.EqualsToken && ts.isPropertyAccessExpression(node.left))
+    if (
+      ts.isBinaryExpression(node) &&
+      node.operatorToken.kind === ts.SyntaxKind.EqualsToken &&
+      ts.isPropertyAccessExpression(node.left)
+    )
       if (node.left.expression.kind === ts.SyntaxKind.ThisKeyword) fields.add(node.left.name.text);
     ts.forEachChild(node, visit);
   };
@@ -57,7 +61,12 @@ function readOwnFields(file: ts.SourceFile): Set<string> {
 }
 
 /** Runs checks over every node of a script; gives the problem that stands first, or null. */
-export function runChecks(file: ts.SourceFile, scopes: Scopes, names: NameTable | null, checks: readonly DialectCheck[]): Problem | null {
+export function runChecks(
+  file: ts.SourceFile,
+  scopes: Scopes,
+  names: NameTable | null,
+  checks: readonly DialectCheck[],
+): Problem | null {
   let first: Problem | null = null;
   let firstAt = Infinity;
   const context: DialectContext = {

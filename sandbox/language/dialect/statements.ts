@@ -3,7 +3,14 @@ import { ACT_WORDS, CHOOSE_WORDS, GLOBAL_FUNCTIONS, LIGHTS_MEMBERS, SONG_MEMBERS
 import type { DialectCheck, DialectContext } from "./report.ts";
 
 /** Lists that are made anew and kept by nobody. */
-const NEW_LISTS: ReadonlySet<string> = new Set<string>([...CHOOSE_WORDS, "filter", "slice", "concat", "toSorted", "toReversed"]);
+const NEW_LISTS: ReadonlySet<string> = new Set<string>([
+  ...CHOOSE_WORDS,
+  "filter",
+  "slice",
+  "concat",
+  "toSorted",
+  "toReversed",
+]);
 /** Methods that were named and not run. */
 const METHODS: ReadonlySet<string> = new Set<string>([
   ...LIGHTS_MEMBERS.filter((word) => !["lights", "name", "box", "length"].includes(word)),
@@ -22,7 +29,8 @@ export const checkSlips: DialectCheck = (node, context) => {
   if (ts.isExpressionStatement(node)) return checkStatement(node.expression, context);
   if (ts.isIfStatement(node) || ts.isWhileStatement(node) || ts.isDoStatement(node)) {
     checkCondition(node.expression, context);
-    if (!ts.isDoStatement(node)) checkEmptyBody(node, ts.isIfStatement(node) ? node.thenStatement : node.statement, context);
+    if (!ts.isDoStatement(node))
+      checkEmptyBody(node, ts.isIfStatement(node) ? node.thenStatement : node.statement, context);
   } else if (ts.isForStatement(node)) {
     if (node.condition !== undefined) checkCondition(node.condition, context);
     checkEmptyBody(node, node.statement, context);
@@ -40,8 +48,15 @@ function checkStatement(expression: ts.Expression, context: DialectContext): voi
   if (ts.isIdentifier(expression)) {
     const declaration = context.scopes.resolve(expression.text, expression);
     const value = declaration?.value;
-    const isFunction = declaration === null ? GLOBAL_FUNCTIONS.has(expression.text) : value !== undefined && ts.isFunctionLike(value);
-    if (isFunction) return report("not-run", expression, { name: expression.text }, { node: expression, at: "after", text: "()", label: "Add `()`" });
+    const isFunction =
+      declaration === null ? GLOBAL_FUNCTIONS.has(expression.text) : value !== undefined && ts.isFunctionLike(value);
+    if (isFunction)
+      return report(
+        "not-run",
+        expression,
+        { name: expression.text },
+        { node: expression, at: "after", text: "()", label: "Add `()`" },
+      );
     if (declaration !== null) report("unused-name", expression, { name: expression.text });
     return;
   }
@@ -53,7 +68,8 @@ function checkStatement(expression: ts.Expression, context: DialectContext): voi
   }
   if (ts.isCallExpression(expression) && ts.isPropertyAccessExpression(expression.expression)) {
     const name = expression.expression.name.text;
-    if (NEW_LISTS.has(name) && !context.ownFields.has(name)) report("unused-list", expression, { name, example: `const group = ${shorten(expression.getText(file))};` });
+    if (NEW_LISTS.has(name) && !context.ownFields.has(name))
+      report("unused-list", expression, { name, example: `const group = ${shorten(expression.getText(file))};` });
     return;
   }
   if (ts.isBinaryExpression(expression) && isCalculation(expression.operatorToken.kind)) {
@@ -86,32 +102,54 @@ function checkCondition(condition: ts.Expression, context: DialectContext): void
   if (!ts.isBinaryExpression(inner)) return;
   const operator = inner.operatorToken.kind;
   if (operator === ts.SyntaxKind.EqualsToken)
-    return context.report("one-equals", inner, {}, { node: inner.operatorToken, at: "instead", text: "===", label: "Write `===`" });
+    return context.report(
+      "one-equals",
+      inner,
+      {},
+      { node: inner.operatorToken, at: "instead", text: "===", label: "Write `===`" },
+    );
   if (operator !== ts.SyntaxKind.AmpersandAmpersandToken && operator !== ts.SyntaxKind.BarBarToken) return;
   checkCondition(inner.left, context);
   checkCondition(inner.right, context);
 }
 
 function isGlobalCall(node: ts.CallExpression, word: string, context: DialectContext): boolean {
-  return ts.isIdentifier(node.expression) && node.expression.text === word && context.scopes.resolve(word, node) === null;
+  return (
+    ts.isIdentifier(node.expression) && node.expression.text === word && context.scopes.resolve(word, node) === null
+  );
 }
 
 function checkCall(node: ts.CallExpression, context: DialectContext): void {
   const [first] = node.arguments;
   if (isGlobalCall(node, "wait", context) && first !== undefined && isPlace(first, context))
-    context.report("wait-for-place", node, {}, { node: node.expression, at: "instead", text: "waitUntil", label: "Use `waitUntil`" });
-  const word = ts.isIdentifier(node.expression) ? node.expression.text : ts.isPropertyAccessExpression(node.expression) ? node.expression.name.text : "";
+    context.report(
+      "wait-for-place",
+      node,
+      {},
+      { node: node.expression, at: "instead", text: "waitUntil", label: "Use `waitUntil`" },
+    );
+  const word = ts.isIdentifier(node.expression)
+    ? node.expression.text
+    : ts.isPropertyAccessExpression(node.expression)
+      ? node.expression.name.text
+      : "";
   const place = Object.hasOwn(TAKES_ACTION, word) ? TAKES_ACTION[word] : undefined;
   const action = place === undefined ? undefined : node.arguments[place];
   if (action !== undefined && runsNow(action)) {
     const when = word === "at" && first !== undefined && ts.isNumericLiteral(first) ? `at beat ${first.text}` : "later";
-    context.report("ran-too-early", action, { when }, { node: action, at: "before", text: "() => ", label: "Put `() =>` in front" });
+    context.report(
+      "ran-too-early",
+      action,
+      { when },
+      { node: action, at: "before", text: "() => ", label: "Put `() =>` in front" },
+    );
   }
 }
 
 /** A moment of the song where a number of beats is wanted: `wait(chorus.start)`, `wait(song.bar(3))`. */
 function isPlace(node: ts.Expression, { ownFields }: DialectContext): boolean {
-  if (ts.isPropertyAccessExpression(node)) return (node.name.text === "start" || node.name.text === "end") && !ownFields.has(node.name.text);
+  if (ts.isPropertyAccessExpression(node))
+    return (node.name.text === "start" || node.name.text === "end") && !ownFields.has(node.name.text);
   if (!ts.isCallExpression(node) || !ts.isPropertyAccessExpression(node.expression)) return false;
   const { expression, name } = node.expression;
   return name.text === "bar" && ts.isIdentifier(expression) && expression.text === "song";

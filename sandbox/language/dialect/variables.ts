@@ -23,9 +23,13 @@ export const checkVariables: DialectCheck = (node, context) => {
 
 function checkMaking(declaration: Declaration, { scopes, report }: DialectContext): void {
   const { name, identifier, kind, scope } = declaration;
-  if (name.startsWith(MARK_PREFIX) || (kind !== "type" && KNOWN.has(name))) return report("taken-word", identifier, { name });
-  const twin = scopes.named(name).find((other) => other.scope === scope && other.kind !== "type" && other.kind !== "var" && other !== declaration);
-  if (twin !== undefined && kind !== "type" && kind !== "var" && twin.identifier.pos < identifier.pos) report("made-twice", identifier, { name });
+  if (name.startsWith(MARK_PREFIX) || (kind !== "type" && KNOWN.has(name)))
+    return report("taken-word", identifier, { name });
+  const twin = scopes
+    .named(name)
+    .find((other) => other.scope === scope && other.kind !== "type" && other.kind !== "var" && other !== declaration);
+  if (twin !== undefined && kind !== "type" && kind !== "var" && twin.identifier.pos < identifier.pos)
+    report("made-twice", identifier, { name });
 }
 
 const ASSIGNMENTS = { first: ts.SyntaxKind.FirstAssignment, last: ts.SyntaxKind.LastAssignment };
@@ -47,7 +51,8 @@ function checkWriting(node: ts.Identifier, declaration: Declaration | null, cont
   if (declaration.kind !== "const") return;
   const list = declaration.identifier.parent.parent;
   const word = ts.isVariableDeclarationList(list) ? list.getFirstToken() : undefined;
-  const fix = word === undefined ? undefined : ({ node: word, at: "instead", text: "let", label: "Use `let`" } as const);
+  const fix =
+    word === undefined ? undefined : ({ node: word, at: "instead", text: "let", label: "Use `let`" } as const);
   context.report("constant", node.parent, { name }, fix);
 }
 
@@ -68,12 +73,23 @@ function checkUnknown(node: ts.Identifier, context: DialectContext): void {
   if (MAKES_CODE.has(name)) return report("no-eval", node);
   if (TIMERS.has(name)) return report("no-timer", node, { word: name });
   const kind = nameKindOf(node);
-  if (kind !== null) return report("needs-quotes", node, { kind, name }, { node, at: "instead", text: JSON.stringify(name), label: "Put it in quotes" });
+  if (kind !== null)
+    return report(
+      "needs-quotes",
+      node,
+      { kind, name },
+      { node, at: "instead", text: JSON.stringify(name), label: "Put it in quotes" },
+    );
   if (name === "Promise") return report("no-async", node);
   const instead = Object.hasOwn(FOREIGN_GLOBALS, name) ? FOREIGN_GLOBALS[name] : undefined;
   if (instead !== undefined) return report("not-here", node, { word: name, try: instead });
-  if (scopes.named(name).some((declaration) => declaration.kind !== "type")) return report("out-of-reach", node, { name });
-  const candidates = [...GLOBAL_WORDS, ...scopes.declarations.map((declaration) => declaration.name), ...ALLOWED_GLOBALS];
+  if (scopes.named(name).some((declaration) => declaration.kind !== "type"))
+    return report("out-of-reach", node, { name });
+  const candidates = [
+    ...GLOBAL_WORDS,
+    ...scopes.declarations.map((declaration) => declaration.name),
+    ...ALLOWED_GLOBALS,
+  ];
   const meant = near(name, candidates);
   if (meant === null) return report("unknown-word", node, { name });
   report("unknown-word", node, { name, meant }, { node, at: "instead", text: meant, label: `Write \`${meant}\`` });

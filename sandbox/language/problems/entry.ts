@@ -8,6 +8,8 @@ export interface Entry {
 }
 
 /** Keeps the codes of a group as a type. */
-export function defineEntries<Code extends string>(entries: { readonly [C in Code]: Entry }): { readonly [C in Code]: Entry } {
+export function defineEntries<Code extends string>(entries: { readonly [C in Code]: Entry }): {
+  readonly [C in Code]: Entry;
+} {
   return entries;
 }

@@ -2,7 +2,10 @@ import { defineEntries } from "./entry.ts";
 
 /** What can not be read at all, and slips that can be read but are never meant. */
 export const SYNTAX_PROBLEMS = defineEntries({
-  "missing-bracket": { sentence: "The `{open}` in line {line} has no `{close}`.", hint: "Put `{close}` where {what} ends." },
+  "missing-bracket": {
+    sentence: "The `{open}` in line {line} has no `{close}`.",
+    hint: "Put `{close}` where {what} ends.",
+  },
   "extra-bracket": { sentence: "This `{close}` closes nothing.", hint: "Take it out, or add `{open}` before it." },
   "missing-quote": { sentence: "This text has no quote at its end.", hint: "Put `{quote}` where the text ends." },
   "missing-comma": { sentence: "I can not read this. Is a comma missing?", hint: "Put `,` between two things." },
@@ -18,5 +21,8 @@ export const SYNTAX_PROBLEMS = defineEntries({
   "unused-answer": { sentence: "You work out a sum here, but nothing keeps the answer.", hint: "`{example}`" },
   "unused-name": { sentence: "`{name}` stands here alone and does nothing.", hint: "Use it, or take it out." },
   "two-steps": { sentence: "Two steps stand on one line.", hint: "Put `;` between them, or a new line." },
-  "empty-loop": { sentence: "The `;` ends this {what}, so it does nothing.", hint: "Take out the `;` before the braces." },
+  "empty-loop": {
+    sentence: "The `;` ends this {what}, so it does nothing.",
+    hint: "Take out the `;` before the braces.",
+  },
 });

@@ -6,7 +6,9 @@ import { songs } from "./event.ts";
 
 export const classes = sqliteTable("classes", {
   id: id(),
-  schoolId: text("school_id").notNull().references(() => schools.id),
+  schoolId: text("school_id")
+    .notNull()
+    .references(() => schools.id),
   name: text("name").notNull(),
   /** The class code: no secret. */
   code: text("code").notNull().unique(),
@@ -15,8 +17,12 @@ export const classes = sqliteTable("classes", {
 export const classTeachers = sqliteTable(
   "class_teachers",
   {
-    classId: text("class_id").notNull().references(() => classes.id, { onDelete: "cascade" }),
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    classId: text("class_id")
+      .notNull()
+      .references(() => classes.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
   },
   (table) => [primaryKey({ columns: [table.classId, table.userId] }), index("class_teachers_user").on(table.userId)],
 );
@@ -24,8 +30,12 @@ export const classTeachers = sqliteTable(
 export const enrolments = sqliteTable(
   "enrolments",
   {
-    classId: text("class_id").notNull().references(() => classes.id, { onDelete: "cascade" }),
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    classId: text("class_id")
+      .notNull()
+      .references(() => classes.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
   },
   (table) => [primaryKey({ columns: [table.classId, table.userId] }), index("enrolments_user").on(table.userId)],
 );
@@ -34,7 +44,9 @@ export const enrolments = sqliteTable(
 export const lessonProgress = sqliteTable(
   "lesson_progress",
   {
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
     lessonId: text("lesson_id").notNull(),
     /** Content version of the lesson that was worked on. */
     lessonVersion: integer("lesson_version").notNull(),
@@ -53,7 +65,9 @@ export const exerciseAttempts = sqliteTable(
   "exercise_attempts",
   {
     id: id(),
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
     lessonId: text("lesson_id").notNull(),
     stepId: text("step_id").notNull(),
     at: instant("at").notNull(),
@@ -67,15 +81,21 @@ export const assignments = sqliteTable(
   "assignments",
   {
     id: id(),
-    classId: text("class_id").notNull().references(() => classes.id),
+    classId: text("class_id")
+      .notNull()
+      .references(() => classes.id),
     title: text("title").notNull(),
     brief: text("brief").notNull(),
-    songId: text("song_id").notNull().references(() => songs.id),
+    songId: text("song_id")
+      .notNull()
+      .references(() => songs.id),
     dueAt: instant("due_at").notNull(),
     lateRule: text("late_rule", { enum: ["accept-late", "closed"] }).notNull(),
     requirements: text("requirements", { mode: "json" }).$type<Requirement[]>().notNull(),
     rubric: text("rubric", { mode: "json" }).$type<Rubric>().notNull(),
-    createdBy: text("created_by").notNull().references(() => users.id),
+    createdBy: text("created_by")
+      .notNull()
+      .references(() => users.id),
     createdAt: instant("created_at").notNull(),
   },
   (table) => [index("assignments_class").on(table.classId)],

@@ -20,7 +20,9 @@ export const squareLayouts = sqliteTable(
   "square_layouts",
   {
     id: id(),
-    squareId: text("square_id").notNull().references(() => squares.id),
+    squareId: text("square_id")
+      .notNull()
+      .references(() => squares.id),
     number: integer("number").notNull(),
     hash: text("hash").notNull(),
     layout: text("layout", { mode: "json" }).$type<Layout>().notNull(),
@@ -38,7 +40,9 @@ export const songs = sqliteTable("songs", {
 
 export const songFiles = sqliteTable("song_files", {
   id: id(),
-  songId: text("song_id").notNull().references(() => songs.id),
+  songId: text("song_id")
+    .notNull()
+    .references(() => songs.id),
   mediaType: text("media_type").notNull(),
   bytes: blob("bytes", { mode: "buffer" }).notNull(),
 });
@@ -46,7 +50,9 @@ export const songFiles = sqliteTable("song_files", {
 /** Immutable; a correction adds a row and moves `songs.currentBeatMapId`. */
 export const beatMaps = sqliteTable("beat_maps", {
   id: id(),
-  songId: text("song_id").notNull().references(() => songs.id),
+  songId: text("song_id")
+    .notNull()
+    .references(() => songs.id),
   number: integer("number").notNull(),
   beatMap: text("beat_map", { mode: "json" }).$type<BeatMap>().notNull(),
   createdAt: instant("created_at").notNull(),
@@ -54,7 +60,9 @@ export const beatMaps = sqliteTable("beat_maps", {
 
 export const seasons = sqliteTable("seasons", {
   id: id(),
-  squareId: text("square_id").notNull().references(() => squares.id),
+  squareId: text("square_id")
+    .notNull()
+    .references(() => squares.id),
   name: text("name").notNull(),
   /** Local calendar dates of the event's zone. */
   firstDate: text("first_date").notNull(),
@@ -66,7 +74,9 @@ export const nights = sqliteTable(
   "nights",
   {
     id: id(),
-    seasonId: text("season_id").notNull().references(() => seasons.id),
+    seasonId: text("season_id")
+      .notNull()
+      .references(() => seasons.id),
     date: text("date").notNull(),
     opensAt: text("opens_at").notNull(),
     closesAt: text("closes_at").notNull(),
@@ -83,7 +93,9 @@ export const forwards = sqliteTable(
     submissionId: text("submission_id").notNull(),
     versionId: text("version_id").notNull(),
     note: text("note").notNull(),
-    forwardedBy: text("forwarded_by").notNull().references(() => users.id),
+    forwardedBy: text("forwarded_by")
+      .notNull()
+      .references(() => users.id),
     forwardedAt: instant("forwarded_at").notNull(),
     /** `scheduled` is derived: approved and placed in a night. */
     state: text("state").$type<Exclude<ForwardState, "scheduled">>().notNull(),
@@ -98,9 +110,13 @@ export const slots = sqliteTable(
   "slots",
   {
     id: id(),
-    nightId: text("night_id").notNull().references(() => nights.id),
+    nightId: text("night_id")
+      .notNull()
+      .references(() => nights.id),
     startsAt: text("starts_at").notNull(),
-    forwardId: text("forward_id").notNull().references(() => forwards.id),
+    forwardId: text("forward_id")
+      .notNull()
+      .references(() => forwards.id),
     isPinned: integer("is_pinned", { mode: "boolean" }).notNull().default(false),
   },
   // One show at one time: the database itself refuses double booking.
@@ -127,17 +143,23 @@ export interface PublishedSlot {
 /** Immutable: each publication is a whole plan. */
 export const lineupPublications = sqliteTable("lineup_publications", {
   id: id(),
-  seasonId: text("season_id").notNull().references(() => seasons.id),
+  seasonId: text("season_id")
+    .notNull()
+    .references(() => seasons.id),
   number: integer("number").notNull(),
   nights: text("nights", { mode: "json" }).$type<{ date: string; closedReason: string | null }[]>().notNull(),
   slots: text("slots", { mode: "json" }).$type<PublishedSlot[]>().notNull(),
-  publishedBy: text("published_by").notNull().references(() => users.id),
+  publishedBy: text("published_by")
+    .notNull()
+    .references(() => users.id),
   publishedAt: instant("published_at").notNull(),
 });
 
 /** Whether a student's display name may be public. No row: the class is named instead. */
 export const consents = sqliteTable("consents", {
-  userId: text("user_id").primaryKey().references(() => users.id, { onDelete: "cascade" }),
+  userId: text("user_id")
+    .primaryKey()
+    .references(() => users.id, { onDelete: "cascade" }),
   isNamePublic: integer("is_name_public", { mode: "boolean" }).notNull(),
   recordedBy: text("recorded_by").references(() => users.id),
   recordedAt: instant("recorded_at").notNull(),

@@ -31,7 +31,9 @@ export const users = sqliteTable(
 export const userRoles = sqliteTable(
   "user_roles",
   {
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
     role: text("role").$type<Role>().notNull(),
   },
   (table) => [primaryKey({ columns: [table.userId, table.role] })],
@@ -45,7 +47,9 @@ export const sessions = sqliteTable(
   "sessions",
   {
     id: text("id").primaryKey(),
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
     expiresAt: integer("expires_at").notNull(),
     endsAt: instant("ends_at").notNull(),
     createdAt: instant("created_at").notNull(),
@@ -56,11 +60,15 @@ export const sessions = sqliteTable(
 /** One-time codes with which a student chooses new words. Only the hash is kept. */
 export const signInResets = sqliteTable("sign_in_resets", {
   id: id(),
-  userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+  userId: text("user_id")
+    .notNull()
+    .references(() => users.id, { onDelete: "cascade" }),
   codeHash: text("code_hash").notNull(),
   expiresAt: instant("expires_at").notNull(),
   usedAt: instant("used_at"),
-  madeBy: text("made_by").notNull().references(() => users.id),
+  madeBy: text("made_by")
+    .notNull()
+    .references(() => users.id),
 });
 
 /** Failed sign-ins by account, for growing waits; cleared by a success. */

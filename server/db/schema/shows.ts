@@ -13,7 +13,9 @@ export const shows = sqliteTable(
   {
     id: id(),
     title: text("title").notNull(),
-    songId: text("song_id").notNull().references(() => songs.id),
+    songId: text("song_id")
+      .notNull()
+      .references(() => songs.id),
     assignmentId: text("assignment_id").references(() => assignments.id),
     /** 32 bits, unsigned. */
     seed: integer("seed").notNull(),
@@ -26,15 +28,21 @@ export const shows = sqliteTable(
 export const showAuthors = sqliteTable(
   "show_authors",
   {
-    showId: text("show_id").notNull().references(() => shows.id, { onDelete: "cascade" }),
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    showId: text("show_id")
+      .notNull()
+      .references(() => shows.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
   },
   (table) => [primaryKey({ columns: [table.showId, table.userId] }), index("show_authors_user").on(table.userId)],
 );
 
 /** One row a show; `revision` counts every save, and a save names the revision it was written from. */
 export const drafts = sqliteTable("drafts", {
-  showId: text("show_id").primaryKey().references(() => shows.id, { onDelete: "cascade" }),
+  showId: text("show_id")
+    .primaryKey()
+    .references(() => shows.id, { onDelete: "cascade" }),
   revision: integer("revision").notNull(),
   source: text("source").notNull(),
   savedAt: instant("saved_at").notNull(),
@@ -48,15 +56,25 @@ export const showVersions = sqliteTable(
   "show_versions",
   {
     id: id(),
-    showId: text("show_id").notNull().references(() => shows.id),
+    showId: text("show_id")
+      .notNull()
+      .references(() => shows.id),
     number: integer("number").notNull(),
     source: text("source").notNull(),
     seed: integer("seed").notNull(),
     language: integer("language").notNull(),
-    songId: text("song_id").notNull().references(() => songs.id),
-    layoutId: text("layout_id").notNull().references(() => squareLayouts.id),
-    beatMapId: text("beat_map_id").notNull().references(() => beatMaps.id),
-    createdBy: text("created_by").notNull().references(() => users.id),
+    songId: text("song_id")
+      .notNull()
+      .references(() => songs.id),
+    layoutId: text("layout_id")
+      .notNull()
+      .references(() => squareLayouts.id),
+    beatMapId: text("beat_map_id")
+      .notNull()
+      .references(() => beatMaps.id),
+    createdBy: text("created_by")
+      .notNull()
+      .references(() => users.id),
     createdAt: instant("created_at").notNull(),
   },
   (table) => [uniqueIndex("show_versions_number").on(table.showId, table.number)],
@@ -67,9 +85,15 @@ export const runs = sqliteTable(
   "runs",
   {
     id: id(),
-    versionId: text("version_id").notNull().references(() => showVersions.id),
-    layoutId: text("layout_id").notNull().references(() => squareLayouts.id),
-    beatMapId: text("beat_map_id").notNull().references(() => beatMaps.id),
+    versionId: text("version_id")
+      .notNull()
+      .references(() => showVersions.id),
+    layoutId: text("layout_id")
+      .notNull()
+      .references(() => squareLayouts.id),
+    beatMapId: text("beat_map_id")
+      .notNull()
+      .references(() => beatMaps.id),
     /** Hash of the engine build. */
     engine: text("engine").notNull(),
     /** Number of the rules of the show check. */
@@ -89,9 +113,15 @@ export const submissions = sqliteTable(
   "submissions",
   {
     id: id(),
-    assignmentId: text("assignment_id").notNull().references(() => assignments.id),
-    showId: text("show_id").notNull().references(() => shows.id),
-    versionId: text("version_id").notNull().references(() => showVersions.id),
+    assignmentId: text("assignment_id")
+      .notNull()
+      .references(() => assignments.id),
+    showId: text("show_id")
+      .notNull()
+      .references(() => shows.id),
+    versionId: text("version_id")
+      .notNull()
+      .references(() => showVersions.id),
     state: text("state").$type<Exclude<WorkState, "working">>().notNull(),
     handedInAt: instant("handed_in_at").notNull(),
     isLate: integer("is_late", { mode: "boolean" }).notNull(),
@@ -106,10 +136,16 @@ export const submissionEvents = sqliteTable(
   "submission_events",
   {
     id: id(),
-    submissionId: text("submission_id").notNull().references(() => submissions.id),
-    versionId: text("version_id").notNull().references(() => showVersions.id),
+    submissionId: text("submission_id")
+      .notNull()
+      .references(() => submissions.id),
+    versionId: text("version_id")
+      .notNull()
+      .references(() => showVersions.id),
     state: text("state").$type<WorkState>().notNull(),
-    by: text("by").notNull().references(() => users.id),
+    by: text("by")
+      .notNull()
+      .references(() => users.id),
     note: text("note"),
     at: instant("at").notNull(),
   },
@@ -120,9 +156,15 @@ export const comments = sqliteTable(
   "comments",
   {
     id: id(),
-    submissionId: text("submission_id").notNull().references(() => submissions.id),
-    versionId: text("version_id").notNull().references(() => showVersions.id),
-    authorId: text("author_id").notNull().references(() => users.id),
+    submissionId: text("submission_id")
+      .notNull()
+      .references(() => submissions.id),
+    versionId: text("version_id")
+      .notNull()
+      .references(() => showVersions.id),
+    authorId: text("author_id")
+      .notNull()
+      .references(() => users.id),
     anchor: text("anchor", { mode: "json" }).$type<CommentAnchor>().notNull(),
     body: text("body").notNull(),
     createdAt: instant("created_at").notNull(),
@@ -132,10 +174,14 @@ export const comments = sqliteTable(
 );
 
 export const marks = sqliteTable("marks", {
-  submissionId: text("submission_id").primaryKey().references(() => submissions.id),
+  submissionId: text("submission_id")
+    .primaryKey()
+    .references(() => submissions.id),
   levels: text("levels", { mode: "json" }).$type<Record<string, number>>().notNull(),
   note: text("note").notNull(),
-  markedBy: text("marked_by").notNull().references(() => users.id),
+  markedBy: text("marked_by")
+    .notNull()
+    .references(() => users.id),
   savedAt: instant("saved_at").notNull(),
   releasedAt: instant("released_at"),
 });
@@ -144,7 +190,9 @@ export const marks = sqliteTable("marks", {
 export const idempotencyKeys = sqliteTable(
   "idempotency_keys",
   {
-    userId: text("user_id").notNull().references(() => users.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
     key: text("key").notNull(),
     /** SHA-256 of method, path and body. */
     requestHash: text("request_hash").notNull(),

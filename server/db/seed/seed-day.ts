@@ -17,5 +17,10 @@ export function createSeedDay(today: string, timeZone: string, now: number): See
   const date = Temporal.PlainDate.from(today);
   const at = (day: number, time: string) =>
     date.add({ days: day }).toZonedDateTime({ timeZone, plainTime: time }).epochMilliseconds;
-  return { today, dateOf: (day) => date.add({ days: day }).toString(), at, before: (day, time) => Math.min(now, at(day, time)) };
+  return {
+    today,
+    dateOf: (day) => date.add({ days: day }).toString(),
+    at,
+    before: (day, time) => Math.min(now, at(day, time)),
+  };
 }

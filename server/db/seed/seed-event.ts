@@ -34,19 +34,45 @@ export function seedEvent({ db }: FeatureDeps, day: SeedDay): SeededEvent {
   const hash = layoutHash(DEMO_SQUARE, (text) => createHash("sha256").update(text).digest("hex"));
 
   inTransaction(db, (tx) => {
-    tx.insert(squares).values({ id: squareId, name: SQUARE_NAME, townName: TOWN, eventName: EVENT_NAME, timeZone: TIME_ZONE, currentLayoutId: layoutId }).run();
+    tx.insert(squares)
+      .values({
+        id: squareId,
+        name: SQUARE_NAME,
+        townName: TOWN,
+        eventName: EVENT_NAME,
+        timeZone: TIME_ZONE,
+        currentLayoutId: layoutId,
+      })
+      .run();
     tx.insert(squareLayouts).values({ id: layoutId, squareId, number: 1, hash, layout: DEMO_SQUARE, createdAt }).run();
     for (const song of DEMO_SONGS) {
       const beatMapId = beatMapIds.get(song.id) ?? null;
-      tx.insert(songs).values({ id: song.id, title: song.title, credit: song.credit, currentBeatMapId: beatMapId }).run();
-      tx.insert(songFiles).values({ songId: song.id, mediaType: "audio/midi", bytes: Buffer.from(song.file) }).run();
-      tx.insert(beatMaps).values({ id: beatMapId ?? newId(), songId: song.id, number: 1, beatMap: song.beatMap, createdAt }).run();
+      tx.insert(songs)
+        .values({ id: song.id, title: song.title, credit: song.credit, currentBeatMapId: beatMapId })
+        .run();
+      tx.insert(songFiles)
+        .values({ songId: song.id, mediaType: "audio/midi", bytes: Buffer.from(song.file) })
+        .run();
+      tx.insert(beatMaps)
+        .values({ id: beatMapId ?? newId(), songId: song.id, number: 1, beatMap: song.beatMap, createdAt })
+        .run();
     }
     const [firstDate = day.today] = season.map((night) => night.date);
     const lastDate = season.at(-1)?.date ?? day.today;
-    tx.insert(seasons).values({ id: seasonId, squareId, name: SEASON_NAME, firstDate, lastDate, times: [...START_TIMES] }).run();
+    tx.insert(seasons)
+      .values({ id: seasonId, squareId, name: SEASON_NAME, firstDate, lastDate, times: [...START_TIMES] })
+      .run();
     for (const { date, closedReason } of season) {
-      tx.insert(nights).values({ id: nightIds.get(date) ?? newId(), seasonId, date, opensAt: OPENS_AT, closesAt: CLOSES_AT, closedReason }).run();
+      tx.insert(nights)
+        .values({
+          id: nightIds.get(date) ?? newId(),
+          seasonId,
+          date,
+          opensAt: OPENS_AT,
+          closesAt: CLOSES_AT,
+          closedReason,
+        })
+        .run();
     }
   });
   return { layoutId, seasonId, beatMapIds, nightIds };

@@ -15,10 +15,24 @@ import { listSlots } from "./world/season.ts";
 const COORDINATOR = "holm";
 
 /** Places the scheduled shows into the season and publishes the plan, as the coordinator would. */
-export function seedLineup(deps: FeatureDeps, day: SeedDay, people: SeededPeople, event: SeededEvent, forwardIds: ReadonlyMap<string, string>): void {
+export function seedLineup(
+  deps: FeatureDeps,
+  day: SeedDay,
+  people: SeededPeople,
+  event: SeededEvent,
+  forwardIds: ReadonlyMap<string, string>,
+): void {
   inTransaction(deps.db, (tx) => {
     for (const { date, startsAt, scriptId, isPinned } of listSlots(day.today)) {
-      tx.insert(slots).values({ id: newId(), nightId: getId(event.nightIds, date), startsAt, forwardId: getId(forwardIds, scriptId), isPinned }).run();
+      tx.insert(slots)
+        .values({
+          id: newId(),
+          nightId: getId(event.nightIds, date),
+          startsAt,
+          forwardId: getId(forwardIds, scriptId),
+          isPinned,
+        })
+        .run();
     }
   });
   const coordinator = STAFF.find((one) => one.key === COORDINATOR);

@@ -19,7 +19,11 @@ const LAST_LESSON_DAYS = 4;
 /** Adds schools, staff, classes, students, roles, enrolments and the families' answers. */
 export async function seedPeople({ db, clock }: FeatureDeps, day: SeedDay): Promise<SeededPeople> {
   const hasher = createSecretHasher();
-  const secrets = await Promise.all([...STAFF.map((one) => one.password), ...STUDENTS.map((one) => one.passphrase)].map((secret) => hasher.hash(secret)));
+  const secrets = await Promise.all(
+    [...STAFF.map((one) => one.password), ...STUDENTS.map((one) => one.passphrase)].map((secret) =>
+      hasher.hash(secret),
+    ),
+  );
   const hashes = secrets.values();
   const schoolIds = new Map(SCHOOLS.map((school) => [school.key, newId()]));
   const classIds = new Map(CLASSES.map((one) => [one.code as string, newId()]));
@@ -32,28 +36,62 @@ export async function seedPeople({ db, clock }: FeatureDeps, day: SeedDay): Prom
   const createdAt = day.at(YEAR_START_DAY, "09:00");
 
   inTransaction(db, (tx) => {
-    for (const { key, name, shortName, timeZone } of SCHOOLS) tx.insert(schools).values({ id: idOf(schoolIds, key), name, shortName, timeZone }).run();
+    for (const { key, name, shortName, timeZone } of SCHOOLS)
+      tx.insert(schools)
+        .values({ id: idOf(schoolIds, key), name, shortName, timeZone })
+        .run();
     for (const one of STAFF) {
       const id = idOf(userIds, one.key);
       const schoolId = one.school && idOf(schoolIds, one.school);
-      tx.insert(users).values({ id, schoolId, displayName: one.displayName, email: one.email, secretHash: hashes.next().value, createdAt }).run();
+      tx.insert(users)
+        .values({
+          id,
+          schoolId,
+          displayName: one.displayName,
+          email: one.email,
+          secretHash: hashes.next().value,
+          createdAt,
+        })
+        .run();
       for (const role of one.roles) tx.insert(userRoles).values({ userId: id, role }).run();
     }
     for (const one of CLASSES) {
       const id = idOf(classIds, one.code);
-      tx.insert(classes).values({ id, schoolId: idOf(schoolIds, one.school), name: one.name, code: one.code }).run();
-      for (const teacher of one.teachers) tx.insert(classTeachers).values({ classId: id, userId: idOf(userIds, teacher) }).run();
+      tx.insert(classes)
+        .values({ id, schoolId: idOf(schoolIds, one.school), name: one.name, code: one.code })
+        .run();
+      for (const teacher of one.teachers)
+        tx.insert(classTeachers)
+          .values({ classId: id, userId: idOf(userIds, teacher) })
+          .run();
     }
     STUDENTS.forEach((one, n) => {
       const id = idOf(userIds, one.key);
       const lastSeenAt = day.before(-1 - (n % LAST_LESSON_DAYS), "11:40");
       tx.insert(users)
-        .values({ id, schoolId: idOf(schoolIds, one.school), displayName: one.displayName, username: one.username, secretHash: hashes.next().value, createdAt, lastSeenAt })
+        .values({
+          id,
+          schoolId: idOf(schoolIds, one.school),
+          displayName: one.displayName,
+          username: one.username,
+          secretHash: hashes.next().value,
+          createdAt,
+          lastSeenAt,
+        })
         .run();
       tx.insert(userRoles).values({ userId: id, role: "student" }).run();
-      tx.insert(enrolments).values({ classId: idOf(classIds, one.classCode), userId: id }).run();
+      tx.insert(enrolments)
+        .values({ classId: idOf(classIds, one.classCode), userId: id })
+        .run();
       if (one.consent !== "open") {
-        tx.insert(consents).values({ userId: id, isNamePublic: one.consent === "yes", recordedBy: idOf(userIds, teacherOf(one.classCode)), recordedAt: clock.now() }).run();
+        tx.insert(consents)
+          .values({
+            userId: id,
+            isNamePublic: one.consent === "yes",
+            recordedBy: idOf(userIds, teacherOf(one.classCode)),
+            recordedAt: clock.now(),
+          })
+          .run();
       }
     });
   });

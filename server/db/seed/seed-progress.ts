@@ -25,10 +25,29 @@ export function seedProgress({ db }: FeatureDeps, day: SeedDay, people: SeededPe
           const attempts = step.checks.length > 0 ? 1 + Math.floor(next() * 3) : 0;
           const answer = step.question ? step.question.choices.findIndex((choice) => choice.isRight) : null;
           tx.insert(lessonProgress)
-            .values({ userId, lessonId: lesson.id, lessonVersion: lesson.version, stepId: step.id, isDone: true, attempts, answer, source: step.solution, updatedAt: at })
+            .values({
+              userId,
+              lessonId: lesson.id,
+              lessonVersion: lesson.version,
+              stepId: step.id,
+              isDone: true,
+              attempts,
+              answer,
+              source: step.solution,
+              updatedAt: at,
+            })
             .run();
           for (let attempt = 1; attempt <= attempts; attempt += 1) {
-            tx.insert(exerciseAttempts).values({ userId, lessonId: lesson.id, stepId: step.id, at: at + attempt, passed: attempt === attempts, problemCode: null }).run();
+            tx.insert(exerciseAttempts)
+              .values({
+                userId,
+                lessonId: lesson.id,
+                stepId: step.id,
+                at: at + attempt,
+                passed: attempt === attempts,
+                problemCode: null,
+              })
+              .run();
           }
         }
       }

@@ -43,11 +43,18 @@ export async function seedShows(
       const lastDay = work?.handedInDay ?? -1;
       const createdAt = day.before(lastDay - BEGUN_DAYS_BEFORE, "10:55");
       const assignmentId = work === null ? null : (assignmentIds.get(work.assignment) ?? null);
-      tx.insert(shows).values({ id: showId, title: script.title, songId: script.songId, assignmentId, seed: script.seed, createdAt }).run();
-      for (const author of script.authors) tx.insert(showAuthors).values({ showId, userId: getId(people.userIds, author) }).run();
+      tx.insert(shows)
+        .values({ id: showId, title: script.title, songId: script.songId, assignmentId, seed: script.seed, createdAt })
+        .run();
+      for (const author of script.authors)
+        tx.insert(showAuthors)
+          .values({ showId, userId: getId(people.userIds, author) })
+          .run();
       const savedBy = getId(people.userIds, script.authors[0] ?? "");
       const revision = versions.length + 1;
-      tx.insert(drafts).values({ showId, revision, source: script.source, savedAt: day.before(lastDay, LESSON_ENDS), savedBy }).run();
+      tx.insert(drafts)
+        .values({ showId, revision, source: script.source, savedAt: day.before(lastDay, LESSON_ENDS), savedBy })
+        .run();
       for (const version of versions) tx.insert(showVersions).values(version).run();
     }
   });
@@ -67,21 +74,19 @@ function buildShow(script: DemoScript, day: SeedDay, people: SeededPeople, event
   const work = WORK.find((one) => one.scriptId === script.id) ?? null;
   const handedInDay = work?.handedInDay ?? null;
   const sources = handedInDay === null ? [] : [...(work?.earlier ?? []), script.source];
-  const versions = sources.map(
-    (source, n): VersionRow => ({
-      id: newId(),
-      showId,
-      number: n + 1,
-      source,
-      seed: script.seed,
-      language: LANGUAGE_VERSION,
-      songId: script.songId,
-      layoutId: event.layoutId,
-      beatMapId: getId(event.beatMapIds, script.songId),
-      createdBy: getId(people.userIds, script.authors[0] ?? ""),
-      createdAt: day.before((handedInDay ?? 0) - (sources.length - 1 - n), LESSON_ENDS),
-    }),
-  );
+  const versions = sources.map((source, n): VersionRow => ({
+    id: newId(),
+    showId,
+    number: n + 1,
+    source,
+    seed: script.seed,
+    language: LANGUAGE_VERSION,
+    songId: script.songId,
+    layoutId: event.layoutId,
+    beatMapId: getId(event.beatMapIds, script.songId),
+    createdBy: getId(people.userIds, script.authors[0] ?? ""),
+    createdAt: day.before((handedInDay ?? 0) - (sources.length - 1 - n), LESSON_ENDS),
+  }));
   return { showId, script, work, versions };
 }
 
@@ -93,7 +98,9 @@ async function runShow(deps: FeatureDeps, { showId, script, versions }: SeededSh
   const input = { source: script.source, songId: script.songId, song, layout: DEMO_SQUARE, seed: script.seed };
   const outcome = await deps.runs.run(input, { classId: classCode });
   if (outcome.ok !== script.expected.runs) {
-    throw new Error(`${script.id} of the demo world came out otherwise than expected: ${outcome.ok ? "it runs" : outcome.problem.sentence}`);
+    throw new Error(
+      `${script.id} of the demo world came out otherwise than expected: ${outcome.ok ? "it runs" : outcome.problem.sentence}`,
+    );
   }
   if (!outcome.ok) return;
   const { ribbon } = judgeOutcome(outcome, DEMO_SQUARE, song);

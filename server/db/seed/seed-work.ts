@@ -40,7 +40,13 @@ export function seedAssignments({ db }: FeatureDeps, day: SeedDay, people: Seede
 }
 
 /** Adds what was handed in: submissions with their history, comments, marks and forwards. Gives the id of the forward by script id. */
-export function seedWork({ db }: FeatureDeps, day: SeedDay, people: SeededPeople, shows: readonly SeededShow[], assignmentIds: ReadonlyMap<string, string>): Map<string, string> {
+export function seedWork(
+  { db }: FeatureDeps,
+  day: SeedDay,
+  people: SeededPeople,
+  shows: readonly SeededShow[],
+  assignmentIds: ReadonlyMap<string, string>,
+): Map<string, string> {
   const forwardIds = new Map<string, string>();
   inTransaction(db, (tx) => {
     for (const show of shows) {
@@ -68,33 +74,90 @@ export function seedWork({ db }: FeatureDeps, day: SeedDay, people: SeededPeople
   return forwardIds;
 }
 
-function seedHistory(tx: Db, day: SeedDay, people: SeededPeople, { script, versions }: SeededShow, work: DemoWork, submissionId: string): void {
+function seedHistory(
+  tx: Db,
+  day: SeedDay,
+  people: SeededPeople,
+  { script, versions }: SeededShow,
+  work: DemoWork,
+  submissionId: string,
+): void {
   const last = versions.at(-1);
   if (last === undefined) return;
   const [classCode = ""] = (script.authors[0] ?? "").split("/");
   const teacher = getId(people.userIds, teacherOf(classCode));
   const markedAt = day.before((work.handedInDay ?? 0) + 1, MARKING_TIME);
   for (const version of versions) {
-    tx.insert(submissionEvents).values({ submissionId, versionId: version.id, state: "submitted", by: version.createdBy, at: version.createdAt }).run();
+    tx.insert(submissionEvents)
+      .values({ submissionId, versionId: version.id, state: "submitted", by: version.createdBy, at: version.createdAt })
+      .run();
     if (version === last) continue;
     // An earlier version was sent back that evening.
-    tx.insert(submissionEvents).values({ submissionId, versionId: version.id, state: "revise", by: teacher, at: version.createdAt + SENT_BACK_AFTER_MS }).run();
+    tx.insert(submissionEvents)
+      .values({
+        submissionId,
+        versionId: version.id,
+        state: "revise",
+        by: teacher,
+        at: version.createdAt + SENT_BACK_AFTER_MS,
+      })
+      .run();
   }
   if (work.state === "revise" || work.state === "marked") {
-    tx.insert(submissionEvents).values({ submissionId, versionId: last.id, state: work.state, by: teacher, at: markedAt, note: work.mark?.note ?? null }).run();
+    tx.insert(submissionEvents)
+      .values({
+        submissionId,
+        versionId: last.id,
+        state: work.state,
+        by: teacher,
+        at: markedAt,
+        note: work.mark?.note ?? null,
+      })
+      .run();
   }
   for (const { by, anchor, body } of work.comments ?? []) {
-    tx.insert(comments).values({ submissionId, versionId: last.id, authorId: getId(people.userIds, by), anchor, body, createdAt: markedAt }).run();
+    tx.insert(comments)
+      .values({
+        submissionId,
+        versionId: last.id,
+        authorId: getId(people.userIds, by),
+        anchor,
+        body,
+        createdAt: markedAt,
+      })
+      .run();
   }
   if (work.mark) {
     const { levels, note } = work.mark;
-    const rubric = tx.select({ rubric: assignments.rubric }).from(assignments).innerJoin(submissions, eq(submissions.assignmentId, assignments.id)).where(eq(submissions.id, submissionId)).get()?.rubric ?? [];
+    const rubric =
+      tx
+        .select({ rubric: assignments.rubric })
+        .from(assignments)
+        .innerJoin(submissions, eq(submissions.assignmentId, assignments.id))
+        .where(eq(submissions.id, submissionId))
+        .get()?.rubric ?? [];
     const byCriterion = Object.fromEntries(rubric.map((criterion, n) => [criterion.id, levels[n] ?? 1]));
-    tx.insert(marks).values({ submissionId, levels: byCriterion, note, markedBy: teacher, savedAt: markedAt, releasedAt: work.state === "marked" ? markedAt : null }).run();
+    tx.insert(marks)
+      .values({
+        submissionId,
+        levels: byCriterion,
+        note,
+        markedBy: teacher,
+        savedAt: markedAt,
+        releasedAt: work.state === "marked" ? markedAt : null,
+      })
+      .run();
   }
 }
 
-function seedForward(tx: Db, day: SeedDay, people: SeededPeople, { script, versions }: SeededShow, forward: NonNullable<DemoWork["forward"]>, submissionId: string): string {
+function seedForward(
+  tx: Db,
+  day: SeedDay,
+  people: SeededPeople,
+  { script, versions }: SeededShow,
+  forward: NonNullable<DemoWork["forward"]>,
+  submissionId: string,
+): string {
   const id = newId();
   const [classCode = ""] = (script.authors[0] ?? "").split("/");
   const last = versions.at(-1);

@@ -8,7 +8,23 @@ import { createSecretHasher } from "../../identity/secret-hasher.ts";
 import { createRunPool, type RunPool } from "../../runs/run-pool.ts";
 import type { Db } from "../connection.ts";
 import { isEmptyDatabase } from "../is-empty-database.ts";
-import { assignments, beatMaps, classes, forwards, lessonProgress, runs, schools, showAuthors, shows, showVersions, songFiles, squareLayouts, submissions, userRoles, users } from "../schema/index.ts";
+import {
+  assignments,
+  beatMaps,
+  classes,
+  forwards,
+  lessonProgress,
+  runs,
+  schools,
+  showAuthors,
+  shows,
+  showVersions,
+  songFiles,
+  squareLayouts,
+  submissions,
+  userRoles,
+  users,
+} from "../schema/index.ts";
 import { seedDemoWorld } from "./index.ts";
 import { DEMO_SCRIPTS } from "./world/scripts/index.ts";
 import { demoStudent, STAFF, STUDENTS } from "./world/people.ts";
@@ -41,14 +57,29 @@ describe("seedDemoWorld", () => {
     expect(await count(users)).toBe(STUDENTS.length + STAFF.length);
     const roles = db.select().from(userRoles).all();
     const holders = (role: string) => roles.filter((row) => row.role === role).length;
-    expect([holders("student"), holders("teacher"), holders("coordinator"), holders("admin")]).toEqual([STUDENTS.length, 5, 1, 1]);
-    expect(db.select().from(users).all().every((row) => row.secretHash?.startsWith("$argon2id$"))).toBe(true);
+    expect([holders("student"), holders("teacher"), holders("coordinator"), holders("admin")]).toEqual([
+      STUDENTS.length,
+      5,
+      1,
+      1,
+    ]);
+    expect(
+      db
+        .select()
+        .from(users)
+        .all()
+        .every((row) => row.secretHash?.startsWith("$argon2id$")),
+    ).toBe(true);
   });
 
   it("lets the people it prints sign in with the secrets it prints", async () => {
     const wren = demoStudent("7B-TARN/wren");
     expect(signIns.join("\n")).toContain(wren.passphrase.replaceAll("-", " "));
-    const row = db.select().from(users).all().find((one) => one.username === "wren");
+    const row = db
+      .select()
+      .from(users)
+      .all()
+      .find((one) => one.username === "wren");
     expect(await createSecretHasher().verify(row?.secretHash ?? null, wren.passphrase)).toBe(true);
   });
 
@@ -69,25 +100,60 @@ describe("seedDemoWorld", () => {
     }
     expect(ran.some((run) => !run.summary.isOk)).toBe(true);
     expect(ran.some((run) => run.summary.findings.some((finding) => finding.severity === "stop"))).toBe(true);
-    const ribbons = database.connection.sqlite.prepare("select count(*) from drafts where ribbon is not null").pluck().get();
+    const ribbons = database.connection.sqlite
+      .prepare("select count(*) from drafts where ribbon is not null")
+      .pluck()
+      .get();
     expect(ribbons).toBe(DEMO_SCRIPTS.filter((script) => script.expected.runs).length);
   });
 
   it("has work in every state and forwards in every state", () => {
-    const states = new Set(db.select().from(submissions).all().map((row) => row.state));
+    const states = new Set(
+      db
+        .select()
+        .from(submissions)
+        .all()
+        .map((row) => row.state),
+    );
     expect([...states].sort()).toEqual(["marked", "revise", "submitted"]);
     expect(db.select().from(shows).all().length).toBeGreaterThan(db.select().from(submissions).all().length);
-    const forwardStates = new Set(db.select().from(forwards).all().map((row) => row.state));
+    const forwardStates = new Set(
+      db
+        .select()
+        .from(forwards)
+        .all()
+        .map((row) => row.state),
+    );
     expect([...forwardStates].sort()).toEqual(["approved", "declined", "waiting"]);
   });
 
   it("gives one student work in many states, and leaves some with nothing", () => {
-    const authors = new Set(db.select().from(showAuthors).all().map((row) => row.userId));
-    const students = db.select().from(users).all().filter((row) => row.username !== null);
+    const authors = new Set(
+      db
+        .select()
+        .from(showAuthors)
+        .all()
+        .map((row) => row.userId),
+    );
+    const students = db
+      .select()
+      .from(users)
+      .all()
+      .filter((row) => row.username !== null);
     expect(students.some((row) => !authors.has(row.id))).toBe(true);
     const wren = students.find((row) => row.username === "wren")?.id;
-    const own = db.select().from(showAuthors).all().filter((row) => row.userId === wren).map((row) => row.showId);
-    const wrens = db.select().from(submissions).all().filter((row) => own.includes(row.showId)).map((row) => row.state);
+    const own = db
+      .select()
+      .from(showAuthors)
+      .all()
+      .filter((row) => row.userId === wren)
+      .map((row) => row.showId);
+    const wrens = db
+      .select()
+      .from(submissions)
+      .all()
+      .filter((row) => own.includes(row.showId))
+      .map((row) => row.state);
     expect(new Set(wrens)).toEqual(new Set(["marked", "revise", "submitted"]));
   });
 
@@ -112,7 +178,9 @@ describe("seedDemoWorld", () => {
     expect(database.connection.sqlite.pragma("foreign_key_check")).toEqual([]);
     expect(database.connection.sqlite.pragma("integrity_check", { simple: true })).toBe("ok");
     const loose = database.connection.sqlite
-      .prepare("select count(*) from forwards f left join submissions s on s.id = f.submission_id left join show_versions v on v.id = f.version_id where s.id is null or v.id is null")
+      .prepare(
+        "select count(*) from forwards f left join submissions s on s.id = f.submission_id left join show_versions v on v.id = f.version_id where s.id is null or v.id is null",
+      )
       .pluck()
       .get();
     expect(loose).toBe(0);

@@ -1,6 +1,12 @@
 import type { AssignmentSummary } from "../../../shared/contracts/assignments.ts";
 import type { WorkState } from "../../../shared/contracts/shows.ts";
-import { AssignmentIdSchema, ClassIdSchema, ShowIdSchema, SongIdSchema, SubmissionIdSchema } from "../../../shared/ids.ts";
+import {
+  AssignmentIdSchema,
+  ClassIdSchema,
+  ShowIdSchema,
+  SongIdSchema,
+  SubmissionIdSchema,
+} from "../../../shared/ids.ts";
 import type { Db } from "../../db/connection.ts";
 import { listSongFacts } from "../../event/song.queries.ts";
 import type { Actor } from "../../http/actor.ts";
@@ -47,7 +53,11 @@ type OwnWork = NonNullable<AssignmentSummary["mine"]>;
 function ownWork(db: Db, actor: Actor, rows: readonly AssignmentWithClass[]): Map<string, OwnWork> {
   const enrolled = new Set(listEnrolledClassIds(db, actor.userId));
   const wanted = rows.filter((row) => enrolled.has(row.assignment.classId));
-  const work = listOwnWork(db, actor.userId, wanted.map((row) => row.assignment.id));
+  const work = listOwnWork(
+    db,
+    actor.userId,
+    wanted.map((row) => row.assignment.id),
+  );
   const submissionIds = work.flatMap((row) => (row.submission ? [row.submission.id] : []));
   const comments = countComments(db, submissionIds);
   const marks = listReleasedMarks(db, submissionIds);
@@ -73,12 +83,22 @@ function ownWork(db: Db, actor: Actor, rows: readonly AssignmentWithClass[]): Ma
 const FURTHEST: readonly WorkState[] = ["marked", "revise", "submitted", "working"];
 
 /** How many students of each assignment are how far, for classes that the caller teaches. */
-function workCounts(db: Db, actor: Actor, rows: readonly AssignmentWithClass[]): Map<string, NonNullable<AssignmentSummary["counts"]>> {
+function workCounts(
+  db: Db,
+  actor: Actor,
+  rows: readonly AssignmentWithClass[],
+): Map<string, NonNullable<AssignmentSummary["counts"]>> {
   const taught = new Set(listTaughtClassIds(db, actor.userId));
   const wanted = rows.filter((row) => taught.has(row.assignment.classId));
-  const students = countStudents(db, wanted.map((row) => row.assignment.classId));
+  const students = countStudents(
+    db,
+    wanted.map((row) => row.assignment.classId),
+  );
   const states = new Map<string, Map<string, WorkState>>(wanted.map((row) => [row.assignment.id, new Map()]));
-  for (const { assignmentId, userId, state } of listAuthorWork(db, wanted.map((row) => row.assignment.id))) {
+  for (const { assignmentId, userId, state } of listAuthorWork(
+    db,
+    wanted.map((row) => row.assignment.id),
+  )) {
     const byStudent = states.get(assignmentId ?? "");
     const now = state ?? "working";
     const before = byStudent?.get(userId);
@@ -90,7 +110,13 @@ function workCounts(db: Db, actor: Actor, rows: readonly AssignmentWithClass[]):
       const count = (state: WorkState) => reached.filter((one) => one === state).length;
       return [
         assignment.id,
-        { students: students.get(assignment.classId) ?? 0, working: count("working"), submitted: count("submitted"), revise: count("revise"), marked: count("marked") },
+        {
+          students: students.get(assignment.classId) ?? 0,
+          working: count("working"),
+          submitted: count("submitted"),
+          revise: count("revise"),
+          marked: count("marked"),
+        },
       ];
     }),
   );

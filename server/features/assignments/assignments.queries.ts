@@ -44,27 +44,48 @@ export function getAssignment(db: Db, assignmentId: string): AssignmentWithClass
 /** The assignments of these classes, next due first. */
 export function listAssignments(db: Db, classIds: readonly string[]): AssignmentWithClass[] {
   if (classIds.length === 0) return [];
-  return selectAssignments(db).where(inArray(assignments.classId, [...classIds])).orderBy(asc(assignments.dueAt), asc(assignments.title)).all();
+  return selectAssignments(db)
+    .where(inArray(assignments.classId, [...classIds]))
+    .orderBy(asc(assignments.dueAt), asc(assignments.title))
+    .all();
 }
 
 export function listEnrolledClassIds(db: Db, userId: string): string[] {
-  return db.select({ id: enrolments.classId }).from(enrolments).where(eq(enrolments.userId, userId)).all().map((row) => row.id);
+  return db
+    .select({ id: enrolments.classId })
+    .from(enrolments)
+    .where(eq(enrolments.userId, userId))
+    .all()
+    .map((row) => row.id);
 }
 
 export function listTaughtClassIds(db: Db, userId: string): string[] {
-  return db.select({ id: classTeachers.classId }).from(classTeachers).where(eq(classTeachers.userId, userId)).all().map((row) => row.id);
+  return db
+    .select({ id: classTeachers.classId })
+    .from(classTeachers)
+    .where(eq(classTeachers.userId, userId))
+    .all()
+    .map((row) => row.id);
 }
 
 /** The person's show for each of these assignments: the one handed in, else the one saved last. */
 export function listOwnWork(db: Db, userId: string, assignmentIds: readonly string[]) {
   if (assignmentIds.length === 0) return [];
   return db
-    .select({ assignmentId: shows.assignmentId, showId: shows.id, showTitle: shows.title, submission: submissions, savedAt: drafts.savedAt })
+    .select({
+      assignmentId: shows.assignmentId,
+      showId: shows.id,
+      showTitle: shows.title,
+      submission: submissions,
+      savedAt: drafts.savedAt,
+    })
     .from(shows)
     .innerJoin(showAuthors, eq(showAuthors.showId, shows.id))
     .innerJoin(drafts, eq(drafts.showId, shows.id))
     .leftJoin(submissions, and(eq(submissions.showId, shows.id), eq(submissions.assignmentId, shows.assignmentId)))
-    .where(and(eq(showAuthors.userId, userId), inArray(shows.assignmentId, [...assignmentIds]), eq(shows.isArchived, false)))
+    .where(
+      and(eq(showAuthors.userId, userId), inArray(shows.assignmentId, [...assignmentIds]), eq(shows.isArchived, false)),
+    )
     .orderBy(asc(drafts.savedAt))
     .all();
 }
@@ -84,7 +105,11 @@ export function countComments(db: Db, submissionIds: readonly string[]): Map<str
 /** The levels of released marks, by submission. */
 export function listReleasedMarks(db: Db, submissionIds: readonly string[]): Map<string, Record<string, number>> {
   if (submissionIds.length === 0) return new Map();
-  const rows = db.select().from(marks).where(inArray(marks.submissionId, [...submissionIds])).all();
+  const rows = db
+    .select()
+    .from(marks)
+    .where(inArray(marks.submissionId, [...submissionIds]))
+    .all();
   return new Map(rows.filter((row) => row.releasedAt !== null).map((row) => [row.submissionId, row.levels]));
 }
 
@@ -107,7 +132,12 @@ export function listAuthorWork(db: Db, assignmentIds: readonly string[]) {
     .from(shows)
     .innerJoin(showAuthors, eq(showAuthors.showId, shows.id))
     .leftJoin(submissions, and(eq(submissions.showId, shows.id), eq(submissions.assignmentId, shows.assignmentId)))
-    .where(and(inArray(shows.assignmentId, [...assignmentIds]), or(eq(shows.isArchived, false), inArray(submissions.state, ["submitted", "revise", "marked"]))))
+    .where(
+      and(
+        inArray(shows.assignmentId, [...assignmentIds]),
+        or(eq(shows.isArchived, false), inArray(submissions.state, ["submitted", "revise", "marked"])),
+      ),
+    )
     .all();
 }
 
@@ -132,13 +162,20 @@ export function hasMarks(db: Db, assignmentId: string): boolean {
 }
 
 export function hasShows(db: Db, assignmentId: string): boolean {
-  return db.select({ id: shows.id }).from(shows).where(eq(shows.assignmentId, assignmentId)).limit(1).get() !== undefined;
+  return (
+    db.select({ id: shows.id }).from(shows).where(eq(shows.assignmentId, assignmentId)).limit(1).get() !== undefined
+  );
 }
 
 /** The show to hand in with its draft, or null. */
 export function findShowWithDraft(db: Db, showId: string) {
   return (
-    db.select({ show: shows, draft: drafts }).from(shows).innerJoin(drafts, eq(drafts.showId, shows.id)).where(eq(shows.id, showId)).get() ?? null
+    db
+      .select({ show: shows, draft: drafts })
+      .from(shows)
+      .innerJoin(drafts, eq(drafts.showId, shows.id))
+      .where(eq(shows.id, showId))
+      .get() ?? null
   );
 }
 
@@ -148,12 +185,21 @@ export function setShowAssignment(db: Db, showId: string, assignmentId: string):
 
 export function findSubmission(db: Db, assignmentId: string, showId: string): SubmissionRow | null {
   return (
-    db.select().from(submissions).where(and(eq(submissions.assignmentId, assignmentId), eq(submissions.showId, showId))).get() ?? null
+    db
+      .select()
+      .from(submissions)
+      .where(and(eq(submissions.assignmentId, assignmentId), eq(submissions.showId, showId)))
+      .get() ?? null
   );
 }
 
 /** What the authors of a show handed in for an assignment with another show, or null. */
-export function findOtherSubmission(db: Db, assignmentId: string, showId: string, authorIds: readonly string[]): { title: string } | null {
+export function findOtherSubmission(
+  db: Db,
+  assignmentId: string,
+  showId: string,
+  authorIds: readonly string[],
+): { title: string } | null {
   const rows = db
     .select({ showId: submissions.showId, title: shows.title })
     .from(submissions)
@@ -166,7 +212,11 @@ export function findOtherSubmission(db: Db, assignmentId: string, showId: string
 }
 
 export function nextVersionNumber(db: Db, showId: string): number {
-  const row = db.select({ last: max(showVersions.number) }).from(showVersions).where(eq(showVersions.showId, showId)).get();
+  const row = db
+    .select({ last: max(showVersions.number) })
+    .from(showVersions)
+    .where(eq(showVersions.showId, showId))
+    .get();
   return (row?.last ?? 0) + 1;
 }
 
@@ -179,10 +229,16 @@ export function saveSubmission(db: Db, row: typeof submissions.$inferInsert & { 
   const { versionId, state, handedInAt, isLate, hashesAgree } = row;
   db.insert(submissions)
     .values(row)
-    .onConflictDoUpdate({ target: [submissions.assignmentId, submissions.showId], set: { versionId, state, handedInAt, isLate, hashesAgree } })
+    .onConflictDoUpdate({
+      target: [submissions.assignmentId, submissions.showId],
+      set: { versionId, state, handedInAt, isLate, hashesAgree },
+    })
     .run();
 }
 
 export function setHashesAgree(db: Db, submissionId: string, versionId: string, hashesAgree: boolean): void {
-  db.update(submissions).set({ hashesAgree }).where(and(eq(submissions.id, submissionId), eq(submissions.versionId, versionId))).run();
+  db.update(submissions)
+    .set({ hashesAgree })
+    .where(and(eq(submissions.id, submissionId), eq(submissions.versionId, versionId)))
+    .run();
 }

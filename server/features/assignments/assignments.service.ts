@@ -1,4 +1,9 @@
-import type { AssignmentDetail, AssignmentFields, AssignmentSummary, Rubric } from "../../../shared/contracts/assignments.ts";
+import type {
+  AssignmentDetail,
+  AssignmentFields,
+  AssignmentSummary,
+  Rubric,
+} from "../../../shared/contracts/assignments.ts";
 import { ProblemError } from "../../../shared/problem.ts";
 import type { Clock } from "../../clock.ts";
 import { type Db, inTransaction } from "../../db/connection.ts";
@@ -46,7 +51,12 @@ export function getAssignmentDetail(db: Db, actor: Actor, assignmentId: string):
 }
 
 /** Sets an assignment for a class. Throws `not-found` for a class of others, `invalid-request` naming the field. */
-export function createAssignment({ db, clock }: AssignmentsDeps, actor: Actor, classId: string, fields: AssignmentFields): AssignmentSummary {
+export function createAssignment(
+  { db, clock }: AssignmentsDeps,
+  actor: Actor,
+  classId: string,
+  fields: AssignmentFields,
+): AssignmentSummary {
   return inTransaction(db, (tx) => {
     assertRelation(actor, listClassRelations(tx, actor.userId, classId));
     assertFields(tx, fields);
@@ -61,15 +71,24 @@ export function createAssignment({ db, clock }: AssignmentsDeps, actor: Actor, c
  * Changes an assignment. Throws `wrong-state` for another rubric once something was marked with it,
  * and for another song once a show was begun for it; `invalid-request`; `not-found`.
  */
-export function changeAssignment(db: Db, actor: Actor, assignmentId: string, change: Partial<AssignmentFields>): AssignmentSummary {
+export function changeAssignment(
+  db: Db,
+  actor: Actor,
+  assignmentId: string,
+  change: Partial<AssignmentFields>,
+): AssignmentSummary {
   return inTransaction(db, (tx) => {
     const { assignment } = getRelatedAssignment(tx, actor, assignmentId);
     assertFields(tx, change);
     if (change.rubric && !isSameRubric(change.rubric, assignment.rubric) && hasMarks(tx, assignmentId)) {
-      throw new ProblemError("wrong-state", { detail: "Something was marked with this rubric, so it stays as it is. Set a new assignment for another rubric." });
+      throw new ProblemError("wrong-state", {
+        detail: "Something was marked with this rubric, so it stays as it is. Set a new assignment for another rubric.",
+      });
     }
     if (change.songId !== undefined && change.songId !== assignment.songId && hasShows(tx, assignmentId)) {
-      throw new ProblemError("wrong-state", { detail: "Shows were begun with this song, so it stays. Set a new assignment for another song." });
+      throw new ProblemError("wrong-state", {
+        detail: "Shows were begun with this song, so it stays. Set a new assignment for another song.",
+      });
     }
     const set = Object.fromEntries(Object.entries(change).filter(([, value]) => value !== undefined));
     updateAssignment(tx, assignmentId, set);
@@ -84,11 +103,13 @@ function getRelatedAssignment(db: Db, actor: Actor, assignmentId: string): Assig
 }
 
 function assertFields(db: Db, fields: Partial<AssignmentFields>): void {
-  if (fields.songId !== undefined && !findSong(db, fields.songId)) throw fieldProblem("/songId", "There is no such song. Choose one from the list.");
+  if (fields.songId !== undefined && !findSong(db, fields.songId))
+    throw fieldProblem("/songId", "There is no such song. Choose one from the list.");
   const twice = firstRepeat((fields.rubric ?? []).map((criterion) => criterion.id));
   if (twice !== null) throw fieldProblem(`/rubric/${twice}/id`, "Two criteria have the same id.");
   const asked = firstRepeat((fields.requirements ?? []).map((requirement) => requirement.kind));
-  if (asked !== null) throw fieldProblem(`/requirements/${asked}/kind`, "This is asked for twice. Keep one and count it up.");
+  if (asked !== null)
+    throw fieldProblem(`/requirements/${asked}/kind`, "This is asked for twice. Keep one and count it up.");
 }
 
 /** Place of the first value that came before, or null. */

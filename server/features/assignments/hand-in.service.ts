@@ -47,7 +47,12 @@ interface KeptHandIn {
  * counts. What the script does refuses nothing. Throws `not-found`, `draft-conflict` with `{ draft }`
  * when the revision is not the saved one, `past-due`, `wrong-state`.
  */
-export async function handIn(deps: FeatureDeps, actor: Actor, assignmentId: string, input: HandIn): Promise<HandInResult> {
+export async function handIn(
+  deps: FeatureDeps,
+  actor: Actor,
+  assignmentId: string,
+  input: HandIn,
+): Promise<HandInResult> {
   const { db, log } = deps;
   const { assignment } = getAssignment(db, assignmentId);
   assertRelation(actor, listClassRelations(db, actor.userId, assignment.classId));
@@ -57,7 +62,10 @@ export async function handIn(deps: FeatureDeps, actor: Actor, assignmentId: stri
   if (hashesAgree !== null) setHashesAgree(db, kept.submissionId, kept.version.id, hashesAgree);
   if (hashesAgree === false) {
     appendAudit(db, { at: deps.clock.now(), actorId: null, event: "hash-mismatch", subject: kept.version.id });
-    log.error({ alarm: "hash-mismatch", versionId: kept.version.id, browser: input.hash, server: run?.hash }, "browser and server disagree on a show; the server's run counts");
+    log.error(
+      { alarm: "hash-mismatch", versionId: kept.version.id, browser: input.hash, server: run?.hash },
+      "browser and server disagree on a show; the server's run counts",
+    );
   }
   return {
     submissionId: SubmissionIdSchema.parse(kept.submissionId),
@@ -88,7 +96,14 @@ function keepHandIn(db: Db, now: number, actor: Actor, assignment: AssignmentRow
   const song = getSong(db, show.songId);
   const layoutId = getCurrentLayout(db).id;
   const same = before?.state === "submitted" ? findVersion(db, before.versionId) : null;
-  if (before && same && same.source === draft.source && same.seed === show.seed && same.layoutId === layoutId && same.beatMapId === song.beatMapId) {
+  if (
+    before &&
+    same &&
+    same.source === draft.source &&
+    same.seed === show.seed &&
+    same.layoutId === layoutId &&
+    same.beatMapId === song.beatMapId
+  ) {
     // The very same work again: a retry whose first answer got lost makes no second version.
     return { submissionId: before.id, version: same, isLate: before.isLate };
   }
@@ -107,8 +122,24 @@ function keepHandIn(db: Db, now: number, actor: Actor, assignment: AssignmentRow
   };
   insertVersion(db, version);
   const submissionId = before?.id ?? newId();
-  saveSubmission(db, { id: submissionId, assignmentId: assignment.id, showId: show.id, versionId: version.id, state: "submitted", handedInAt: now, isLate, hashesAgree: null });
-  insertSubmissionEvent(db, { submissionId, versionId: version.id, state: "submitted", by: actor.userId, note: null, at: now });
+  saveSubmission(db, {
+    id: submissionId,
+    assignmentId: assignment.id,
+    showId: show.id,
+    versionId: version.id,
+    state: "submitted",
+    handedInAt: now,
+    isLate,
+    hashesAgree: null,
+  });
+  insertSubmissionEvent(db, {
+    submissionId,
+    versionId: version.id,
+    state: "submitted",
+    by: actor.userId,
+    note: null,
+    at: now,
+  });
   return { submissionId, version, isLate };
 }
 
@@ -116,22 +147,39 @@ function keepHandIn(db: Db, now: number, actor: Actor, assignment: AssignmentRow
  * Whether the work may be handed in now, and whether it is late. Work that was sent back may always
  * come again, and keeps the lateness of its first hand-in: the teacher asked for another pass.
  */
-function assertOpen(assignment: AssignmentRow, before: { readonly state: string; readonly isLate: boolean } | null, now: number): boolean {
-  if (before?.state === "marked") throw new ProblemError("wrong-state", { detail: "This is marked already. Ask your teacher to open it again." });
+function assertOpen(
+  assignment: AssignmentRow,
+  before: { readonly state: string; readonly isLate: boolean } | null,
+  now: number,
+): boolean {
+  if (before?.state === "marked")
+    throw new ProblemError("wrong-state", { detail: "This is marked already. Ask your teacher to open it again." });
   if (before?.state === "revise") return before.isLate;
   const isOver = now > assignment.dueAt;
-  if (isOver && assignment.lateRule === "closed") throw new ProblemError("past-due", { detail: "The due date is over and this assignment takes nothing more. Your work is saved. Talk to your teacher." });
+  if (isOver && assignment.lateRule === "closed")
+    throw new ProblemError("past-due", {
+      detail: "The due date is over and this assignment takes nothing more. Your work is saved. Talk to your teacher.",
+    });
   return isOver;
 }
 
-function assertFits(db: Db, assignment: AssignmentRow, show: { readonly id: string; readonly assignmentId: string | null; readonly songId: string }): void {
+function assertFits(
+  db: Db,
+  assignment: AssignmentRow,
+  show: { readonly id: string; readonly assignmentId: string | null; readonly songId: string },
+): void {
   if (show.assignmentId !== null && show.assignmentId !== assignment.id) {
-    throw new ProblemError("wrong-state", { detail: "This show belongs to another assignment. Make a copy of it first." });
+    throw new ProblemError("wrong-state", {
+      detail: "This show belongs to another assignment. Make a copy of it first.",
+    });
   }
   if (show.assignmentId === null && show.songId !== assignment.songId) {
     throw new ProblemError("wrong-state", { detail: "This assignment asks for another song." });
   }
   const authorIds = listAuthors(db, [show.id]).map((author) => author.userId);
   const other = findOtherSubmission(db, assignment.id, show.id, authorIds);
-  if (other) throw new ProblemError("wrong-state", { detail: `You handed in "${other.title}" for this assignment. Change that show and hand it in again.` });
+  if (other)
+    throw new ProblemError("wrong-state", {
+      detail: `You handed in "${other.title}" for this assignment. Change that show and hand it in again.`,
+    });
 }

@@ -1,7 +1,6 @@
 import { eq } from "drizzle-orm";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { contracts } from "../../../shared/contracts/index.ts";
-import type { AssignmentId, ShowId } from "../../../shared/ids.ts";
 import { auditLog, drafts, runs, showVersions, submissionEvents, submissions } from "../../db/schema/index.ts";
 import { runUnfinishedVersions } from "../../show-runs/run-version.ts";
 import { buildAssignment, buildClass, buildShow, buildSquare, buildUser } from "../../../tests/support/factories.ts";
@@ -22,13 +21,31 @@ beforeEach(() => {
   wren = buildUser(server.db).id;
   classId = buildClass(server.db, { studentIds: [wren] }).id;
   assignment = buildAssignment(server.db, { classId });
-  show = buildShow(server.db, { assignmentId: assignment.id, songId: assignment.songId, authorIds: [wren], revision: 3, source: "square.all.on();\n" });
+  show = buildShow(server.db, {
+    assignmentId: assignment.id,
+    songId: assignment.songId,
+    authorIds: [wren],
+    revision: 3,
+    source: "square.all.on();\n",
+  });
 });
 afterEach(() => server.dispose());
 
-function handIn(input: { showId?: string; revision?: number; hash?: string | null; assignmentId?: string; as?: string; key?: string } = {}) {
+function handIn(
+  input: {
+    showId?: string;
+    revision?: number;
+    hash?: string | null;
+    assignmentId?: string;
+    as?: string;
+    key?: string;
+  } = {},
+) {
   const { showId = show.id, revision = 3, hash = SERVER_HASH, assignmentId = assignment.id, as = wren, key } = input;
-  const call = { params: { assignmentId: assignmentId as AssignmentId }, body: { showId: showId as ShowId, revision, hash } };
+  const call = {
+    params: { assignmentId: assignmentId },
+    body: { showId: showId, revision, hash },
+  };
   return server.call(contracts.assignments.handIn, key === undefined ? call : { ...call, idempotencyKey: key }, { as });
 }
 
@@ -41,21 +58,32 @@ describe("POST /api/assignments/:assignmentId/submissions", () => {
   it("keeps version, run, submission and history, and agrees with the browser", async () => {
     const { status, body } = await handIn();
     expect(status).toBe(201);
-    expect(body).toMatchObject({ state: "submitted", versionNumber: 1, isLate: false, hashesAgree: true, run: { isOk: true, hash: SERVER_HASH, seconds: 16 } });
+    expect(body).toMatchObject({
+      state: "submitted",
+      versionNumber: 1,
+      isLate: false,
+      hashesAgree: true,
+      run: { isOk: true, hash: SERVER_HASH, seconds: 16 },
+    });
     const version = server.db.select().from(showVersions).get();
     expect(version).toMatchObject({ showId: show.id, source: "square.all.on();\n", seed: show.seed, createdBy: wren });
     const run = server.db.select().from(runs).get();
     expect(run).toMatchObject({ versionId: version?.id, hash: SERVER_HASH });
     expect(run?.timeline).not.toBeNull();
     expect(run?.ribbon).not.toBeNull();
-    expect(server.db.select().from(submissionEvents).all()).toEqual([expect.objectContaining({ state: "submitted", by: wren, versionId: version?.id })]);
+    expect(server.db.select().from(submissionEvents).all()).toEqual([
+      expect.objectContaining({ state: "submitted", by: wren, versionId: version?.id }),
+    ]);
   });
 
   it("takes a script that does not run, and says why", async () => {
     setDraft(BROKEN_SOURCE, 3);
     const { status, body } = await handIn({ hash: null });
     expect(status).toBe(201);
-    expect(body).toMatchObject({ hashesAgree: null, run: { isOk: false, hash: null, problem: { code: "unknown-word", range: { line: 1 } } } });
+    expect(body).toMatchObject({
+      hashesAgree: null,
+      run: { isOk: false, hash: null, problem: { code: "unknown-word", range: { line: 1 } } },
+    });
   });
 
   it("shows an empty timeline as a stop of the show check", async () => {
@@ -68,7 +96,13 @@ describe("POST /api/assignments/:assignmentId/submissions", () => {
     expect(status).toBe(201);
     expect(body).toMatchObject({ hashesAgree: false, run: { hash: SERVER_HASH } });
     expect(server.db.select().from(submissions).get()?.hashesAgree).toBe(false);
-    expect(server.db.select().from(auditLog).all().map((row) => row.event)).toContain("hash-mismatch");
+    expect(
+      server.db
+        .select()
+        .from(auditLog)
+        .all()
+        .map((row) => row.event),
+    ).toContain("hash-mismatch");
   });
 
   it("makes a second version of changed work, one row of submission, and no version of the same work", async () => {
@@ -90,18 +124,28 @@ describe("POST /api/assignments/:assignmentId/submissions", () => {
   it("answers draft-conflict with the saved draft when the revision is another", async () => {
     const { status, body } = await handIn({ revision: 2 });
     expect(status).toBe(409);
-    expect(body).toMatchObject({ type: "/problems/draft-conflict", draft: { revision: 3, source: "square.all.on();\n" } });
+    expect(body).toMatchObject({
+      type: "/problems/draft-conflict",
+      draft: { revision: 3, source: "square.all.on();\n" },
+    });
     expect(server.db.select().from(showVersions).all()).toEqual([]);
   });
 
   it("takes late work and says so, or refuses it, by the assignment's rule", async () => {
     const over = server.clock.now() - 1;
-    const late = buildAssignment(server.db, { classId, dueAt: over, lateRule: "accept-late", songId: assignment.songId });
+    const late = buildAssignment(server.db, {
+      classId,
+      dueAt: over,
+      lateRule: "accept-late",
+      songId: assignment.songId,
+    });
     const lateShow = buildShow(server.db, { assignmentId: late.id, songId: late.songId, authorIds: [wren] });
     expect((await handIn({ assignmentId: late.id, showId: lateShow.id, revision: 1 })).body.isLate).toBe(true);
     const closed = buildAssignment(server.db, { classId, dueAt: over, lateRule: "closed", songId: assignment.songId });
     const closedShow = buildShow(server.db, { assignmentId: closed.id, songId: closed.songId, authorIds: [wren] });
-    expect((await handIn({ assignmentId: closed.id, showId: closedShow.id, revision: 1 })).body.type).toBe("/problems/past-due");
+    expect((await handIn({ assignmentId: closed.id, showId: closedShow.id, revision: 1 })).body.type).toBe(
+      "/problems/past-due",
+    );
   });
 
   it("takes work that was sent back even after a closed due date, and keeps it in time", async () => {
@@ -132,7 +176,9 @@ describe("POST /api/assignments/:assignmentId/submissions", () => {
     expect((await handIn({ showId: free.id, revision: 1 })).status).toBe(201);
     const otherSong = buildShow(server.db, { authorIds: [wren] });
     const next = buildAssignment(server.db, { classId, songId: assignment.songId });
-    expect((await handIn({ assignmentId: next.id, showId: otherSong.id, revision: 1 })).body.type).toBe("/problems/wrong-state");
+    expect((await handIn({ assignmentId: next.id, showId: otherSong.id, revision: 1 })).body.type).toBe(
+      "/problems/wrong-state",
+    );
   });
 
   it("answers not-found for another's show and for another class's assignment", async () => {

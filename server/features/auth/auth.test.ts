@@ -4,7 +4,6 @@ import { buildClass, buildSchool, buildUser } from "../../../tests/support/facto
 import { createTestServer, type TestServer } from "../../../tests/support/test-server.ts";
 import { authContract } from "../../../shared/contracts/auth.ts";
 import { classesContract } from "../../../shared/contracts/classes.ts";
-import type { ClassId, UserId } from "../../../shared/ids.ts";
 import { auditLog, userRoles, users } from "../../db/schema/index.ts";
 import { createSecretHasher } from "../../identity/secret-hasher.ts";
 

@@ -33,12 +33,21 @@ export function createExercises(deps: FeatureDeps): Exercises {
   const { db, clock } = deps;
   const aims = new Map<string, Timeline | null>();
 
-  async function findAim(lesson: LessonFile, step: LessonFileStep, song: SongRow, layout: LayoutRow): Promise<Timeline | null> {
+  async function findAim(
+    lesson: LessonFile,
+    step: LessonFileStep,
+    song: SongRow,
+    layout: LayoutRow,
+  ): Promise<Timeline | null> {
     if (step.aim === null) return null;
     const key = [lesson.id, lesson.version, step.id, song.beatMapId, layout.id].join("/");
     const known = aims.get(key);
     if (known !== undefined) return known;
-    const outcome = await runOrSayBusy(deps, { source: step.aim, songId: song.id, song: song.beatMap, layout: layout.layout, seed: lesson.seed }, null);
+    const outcome = await runOrSayBusy(
+      deps,
+      { source: step.aim, songId: song.id, song: song.beatMap, layout: layout.layout, seed: lesson.seed },
+      null,
+    );
     const aim = outcome.ok ? outcome.timeline : null;
     aims.set(key, aim);
     return aim;
@@ -46,7 +55,8 @@ export function createExercises(deps: FeatureDeps): Exercises {
 
   return {
     async attempt(actor, { lessonId, stepId, source }) {
-      if (Buffer.byteLength(source, "utf8") > SCRIPT_LIMIT_BYTES) throw new ProblemError("too-large", { detail: `A script has at most ${SCRIPT_LIMIT_BYTES} bytes.` });
+      if (Buffer.byteLength(source, "utf8") > SCRIPT_LIMIT_BYTES)
+        throw new ProblemError("too-large", { detail: `A script has at most ${SCRIPT_LIMIT_BYTES} bytes.` });
       const { lesson, step } = getStep(lessonId, stepId);
       const song = getSong(db, lesson.songId);
       const layout = getCurrentLayout(db);
@@ -69,10 +79,22 @@ export function createExercises(deps: FeatureDeps): Exercises {
           updatedAt: clock.now(),
         };
         saveProgress(tx, row);
-        insertAttempt(tx, { userId: actor.userId, lessonId, stepId, at: clock.now(), passed, problemCode: outcome.ok ? null : outcome.problem.code });
+        insertAttempt(tx, {
+          userId: actor.userId,
+          lessonId,
+          stepId,
+          at: clock.now(),
+          passed,
+          problemCode: outcome.ok ? null : outcome.problem.code,
+        });
         return presentProgress(stepId, row);
       });
-      return { progress, results: [...results], problem: outcome.ok ? null : presentProblem(outcome.problem), hash: outcome.ok ? outcome.hash : null };
+      return {
+        progress,
+        results: [...results],
+        problem: outcome.ok ? null : presentProblem(outcome.problem),
+        hash: outcome.ok ? outcome.hash : null,
+      };
     },
   };
 }

@@ -7,12 +7,20 @@ export type ProgressRow = typeof lessonProgress.$inferSelect;
 /** A person's progress in every lesson, or in one. */
 export function listProgress(db: Db, userId: string, lessonId: string | null): ProgressRow[] {
   const own = eq(lessonProgress.userId, userId);
-  return db.select().from(lessonProgress).where(lessonId === null ? own : and(own, eq(lessonProgress.lessonId, lessonId))).all();
+  return db
+    .select()
+    .from(lessonProgress)
+    .where(lessonId === null ? own : and(own, eq(lessonProgress.lessonId, lessonId)))
+    .all();
 }
 
 /** A person's progress in one step, or null before the first try. */
 export function findProgress(db: Db, userId: string, lessonId: string, stepId: string): ProgressRow | null {
-  const step = and(eq(lessonProgress.userId, userId), eq(lessonProgress.lessonId, lessonId), eq(lessonProgress.stepId, stepId));
+  const step = and(
+    eq(lessonProgress.userId, userId),
+    eq(lessonProgress.lessonId, lessonId),
+    eq(lessonProgress.stepId, stepId),
+  );
   return db.select().from(lessonProgress).where(step).get() ?? null;
 }
 
@@ -37,7 +45,14 @@ export function hasPassedAttempt(db: Db, userId: string, lessonId: string, stepI
   const row = db
     .select({ one: sql<number>`1` })
     .from(exerciseAttempts)
-    .where(and(eq(exerciseAttempts.userId, userId), eq(exerciseAttempts.lessonId, lessonId), eq(exerciseAttempts.stepId, stepId), eq(exerciseAttempts.passed, true)))
+    .where(
+      and(
+        eq(exerciseAttempts.userId, userId),
+        eq(exerciseAttempts.lessonId, lessonId),
+        eq(exerciseAttempts.stepId, stepId),
+        eq(exerciseAttempts.passed, true),
+      ),
+    )
     .limit(1)
     .get();
   return row !== undefined;
@@ -45,5 +60,8 @@ export function hasPassedAttempt(db: Db, userId: string, lessonId: string, stepI
 
 /** One class of a student, by which the runs of a lesson are shared out fairly; null when enrolled in none. */
 export function findClassId(db: Db, userId: string): string | null {
-  return db.select({ id: enrolments.classId }).from(enrolments).where(eq(enrolments.userId, userId)).limit(1).get()?.id ?? null;
+  return (
+    db.select({ id: enrolments.classId }).from(enrolments).where(eq(enrolments.userId, userId)).limit(1).get()?.id ??
+    null
+  );
 }

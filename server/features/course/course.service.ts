@@ -47,12 +47,22 @@ export function answerStep(
 ): StepProgress {
   const { lesson, step } = getStep(lessonId, stepId);
   if (!step.question) throw fieldProblem("/choice", "This step has no question.");
-  if (!step.question.choices[choice]) throw fieldProblem("/choice", `The question has ${step.question.choices.length} answers.`);
+  if (!step.question.choices[choice])
+    throw fieldProblem("/choice", `The question has ${step.question.choices.length} answers.`);
   return inTransaction(db, (tx) => {
     const before = findProgress(tx, actor.userId, lessonId, stepId);
     const isAnswered = isGoodAnswer(step, choice);
-    const isDone = before?.isDone === true || (isAnswered && (!needsRun(step) || hasPassedAttempt(tx, actor.userId, lessonId, stepId)));
-    const row: ProgressRow = { ...startProgress(actor, lesson, step), ...before, lessonVersion: lesson.version, answer: choice, isDone, updatedAt: clock.now() };
+    const isDone =
+      before?.isDone === true ||
+      (isAnswered && (!needsRun(step) || hasPassedAttempt(tx, actor.userId, lessonId, stepId)));
+    const row: ProgressRow = {
+      ...startProgress(actor, lesson, step),
+      ...before,
+      lessonVersion: lesson.version,
+      answer: choice,
+      isDone,
+      updatedAt: clock.now(),
+    };
     saveProgress(tx, row);
     return presentProgress(stepId, row);
   });
@@ -87,5 +97,15 @@ export function isGoodAnswer(step: LessonFileStep, choice: number | null): boole
 
 /** Progress before the first try. */
 export function startProgress(actor: Pick<Actor, "userId">, lesson: LessonFile, step: LessonFileStep): ProgressRow {
-  return { userId: actor.userId, lessonId: lesson.id, lessonVersion: lesson.version, stepId: step.id, isDone: false, attempts: 0, answer: null, source: null, updatedAt: 0 };
+  return {
+    userId: actor.userId,
+    lessonId: lesson.id,
+    lessonVersion: lesson.version,
+    stepId: step.id,
+    isDone: false,
+    attempts: 0,
+    answer: null,
+    source: null,
+    updatedAt: 0,
+  };
 }

@@ -10,7 +10,8 @@ const [lesson] = LESSONS;
 const predict = lesson?.steps.find((step) => step.kind === "predict" && step.question);
 const investigate = lesson?.steps.find((step) => step.kind === "investigate" && step.question);
 const checked = lesson?.steps.find((step) => step.checks.length > 0);
-if (!lesson || !predict || !investigate || !checked) throw new Error("Lesson 1 has a prediction, a question and a check.");
+if (!lesson || !predict || !investigate || !checked)
+  throw new Error("Lesson 1 has a prediction, a question and a check.");
 const lessonId = lesson.id;
 
 let server: TestServer;
@@ -26,8 +27,10 @@ beforeEach(() => {
 });
 afterEach(() => server.dispose());
 
-const answer = (stepId: string, choice: number, as = wren) => server.call(contracts.course.answer, { params: { lessonId, stepId }, body: { choice } }, { as });
-const attempt = (stepId: string, source: string, as = wren) => server.call(contracts.course.attempt, { params: { lessonId, stepId }, body: { source } }, { as });
+const answer = (stepId: string, choice: number, as = wren) =>
+  server.call(contracts.course.answer, { params: { lessonId, stepId }, body: { choice } }, { as });
+const attempt = (stepId: string, source: string, as = wren) =>
+  server.call(contracts.course.attempt, { params: { lessonId, stepId }, body: { source } }, { as });
 const wrongChoice = investigate.question?.choices.findIndex((choice) => !choice.isRight) ?? -1;
 const rightChoice = investigate.question?.choices.findIndex((choice) => choice.isRight) ?? -1;
 
@@ -41,7 +44,9 @@ describe("GET /api/lessons and /api/lessons/:lessonId", () => {
     expect((await open(wren)).body.teacherNotes).toEqual([]);
     expect((await open(teacher)).body.teacherNotes.length).toBeGreaterThan(0);
     expect(JSON.stringify((await open(wren)).body)).not.toContain('"solution"');
-    expect((await server.call(contracts.course.lesson, { params: { lessonId: "no-lesson" } }, { as: wren })).status).toBe(404);
+    expect(
+      (await server.call(contracts.course.lesson, { params: { lessonId: "no-lesson" } }, { as: wren })).status,
+    ).toBe(404);
   });
 });
 
@@ -50,7 +55,10 @@ describe("PUT /api/lessons/:lessonId/steps/:stepId/answer", () => {
     expect((await answer(predict.id, 1)).body.progress).toMatchObject({ isDone: true, answer: 1 });
     expect((await answer(investigate.id, wrongChoice)).body.progress.isDone).toBe(false);
     expect((await answer(investigate.id, rightChoice)).body.progress.isDone).toBe(true);
-    expect((await answer(investigate.id, wrongChoice)).body.progress).toMatchObject({ isDone: true, answer: wrongChoice });
+    expect((await answer(investigate.id, wrongChoice)).body.progress).toMatchObject({
+      isDone: true,
+      answer: wrongChoice,
+    });
   });
 
   it("refuses a choice that is not there, a step without a question, and an unknown step", async () => {

@@ -24,9 +24,18 @@ export interface ForwardFacts extends ForwardContext {
 /** Facts of these forwards: what is common to all is fetched once. */
 export function gatherForwardFacts(db: Db, rows: readonly ForwardContext[]): ForwardFacts[] {
   const songs = listSongFacts(db);
-  const named = listNamedAuthors(db, rows.map((row) => row.show.id));
-  const runs = listLatestRuns(db, rows.map((row) => row.forward.versionId));
-  const slotCounts = listSlotCounts(db, rows.map((row) => row.forward.id));
+  const named = listNamedAuthors(
+    db,
+    rows.map((row) => row.show.id),
+  );
+  const runs = listLatestRuns(
+    db,
+    rows.map((row) => row.forward.versionId),
+  );
+  const slotCounts = listSlotCounts(
+    db,
+    rows.map((row) => row.forward.id),
+  );
   return rows.map((row) => {
     const authors = named.get(row.show.id) ?? [];
     const song = songs.get(row.show.songId);

@@ -33,13 +33,20 @@ interface ForwardsDeps {
  * Forwards marked work to the event. Throws `wrong-state` for work that is not marked or does not
  * run, `blocked-by-stop`, `already-done` while an earlier forward is not declined, `not-found`.
  */
-export function forwardSubmission({ db, clock }: ForwardsDeps, actor: Actor, submissionId: string, note: string): ForwardSummary {
+export function forwardSubmission(
+  { db, clock }: ForwardsDeps,
+  actor: Actor,
+  submissionId: string,
+  note: string,
+): ForwardSummary {
   return inTransaction(db, (tx) => {
     const { submission, classId } = getSubmissionToForward(tx, submissionId);
     assertRelation(actor, listClassRelations(tx, actor.userId, classId));
-    if (submission.state !== "marked") throw new ProblemError("wrong-state", { detail: "Release the mark first, then forward the show." });
+    if (submission.state !== "marked")
+      throw new ProblemError("wrong-state", { detail: "Release the mark first, then forward the show." });
     const earlier = findLatestForward(tx, submissionId);
-    if (earlier && earlier.state !== "declined") throw new ProblemError("already-done", { detail: "This show is with the event already." });
+    if (earlier && earlier.state !== "declined")
+      throw new ProblemError("already-done", { detail: "This show is with the event already." });
     assertPlayable(findLatestRun(tx, submission.versionId));
     const id = newId();
     insertForward(tx, {
@@ -70,28 +77,55 @@ export function getForwardDetail(
 ): { forward: ForwardSummary; run: RunSummary; layoutId: LayoutId; findings: RunSummary["findings"] } {
   const facts = getFacts(db, getRelatedForward(db, actor, forwardId));
   const run = presentRunSummary(facts.run, facts.seconds);
-  return { forward: presentFor(db, actor, facts), run, layoutId: LayoutIdSchema.parse(facts.run?.layoutId ?? facts.layoutId), findings: run.findings };
+  return {
+    forward: presentFor(db, actor, facts),
+    run,
+    layoutId: LayoutIdSchema.parse(facts.run?.layoutId ?? facts.layoutId),
+    findings: run.findings,
+  };
 }
 
 /** Approves a waiting show. Throws `wrong-state`, `blocked-by-stop`, `not-found`. */
-export function approveForward({ db, clock }: ForwardsDeps, actor: Actor, forwardId: string, note: string): ForwardSummary {
+export function approveForward(
+  { db, clock }: ForwardsDeps,
+  actor: Actor,
+  forwardId: string,
+  note: string,
+): ForwardSummary {
   return inTransaction(db, (tx) => {
     const { forward } = getRelatedForward(tx, actor, forwardId);
-    if (forward.state !== "waiting") throw new ProblemError("wrong-state", { detail: "Only a show that waits can be approved." });
+    if (forward.state !== "waiting")
+      throw new ProblemError("wrong-state", { detail: "Only a show that waits can be approved." });
     assertPlayable(findLatestRun(tx, forward.versionId));
-    answerForward(tx, forwardId, { state: "approved", answer: note === "" ? null : note, answeredBy: actor.userId, answeredAt: clock.now() });
+    answerForward(tx, forwardId, {
+      state: "approved",
+      answer: note === "" ? null : note,
+      answeredBy: actor.userId,
+      answeredAt: clock.now(),
+    });
     appendAudit(tx, { at: clock.now(), actorId: actor.userId, event: "show-approved", subject: forwardId });
     return presentFor(tx, actor, getFacts(tx, getForward(tx, forwardId)));
   });
 }
 
 /** Sends a show back to its teacher with a note and frees its slots. Throws `wrong-state` when declined already, `not-found`. */
-export function declineForward({ db, clock }: ForwardsDeps, actor: Actor, forwardId: string, note: string): ForwardSummary {
+export function declineForward(
+  { db, clock }: ForwardsDeps,
+  actor: Actor,
+  forwardId: string,
+  note: string,
+): ForwardSummary {
   return inTransaction(db, (tx) => {
     const { forward } = getRelatedForward(tx, actor, forwardId);
-    if (forward.state === "declined") throw new ProblemError("wrong-state", { detail: "This show was sent back already." });
+    if (forward.state === "declined")
+      throw new ProblemError("wrong-state", { detail: "This show was sent back already." });
     deleteSlotsOfForward(tx, forwardId);
-    answerForward(tx, forwardId, { state: "declined", answer: note, answeredBy: actor.userId, answeredAt: clock.now() });
+    answerForward(tx, forwardId, {
+      state: "declined",
+      answer: note,
+      answeredBy: actor.userId,
+      answeredAt: clock.now(),
+    });
     appendAudit(tx, { at: clock.now(), actorId: actor.userId, event: "show-declined", subject: forwardId });
     return presentFor(tx, actor, getFacts(tx, getForward(tx, forwardId)));
   });
@@ -119,8 +153,17 @@ function getFacts(db: Db, row: ForwardContext): ForwardFacts {
 function assertPlayable(run: RunFace | null): void {
   const stops = countFindings(run, "stop");
   if (stops > 0) {
-    const detail = stops === 1 ? "The show check has a stop. It has to be mended first." : `The show check has ${stops} stops. They have to be mended first.`;
-    throw new ProblemError("blocked-by-stop", { detail, extensions: { findings: run?.summary.findings.filter((finding) => finding.severity === "stop") } });
+    const detail =
+      stops === 1
+        ? "The show check has a stop. It has to be mended first."
+        : `The show check has ${stops} stops. They have to be mended first.`;
+    throw new ProblemError("blocked-by-stop", {
+      detail,
+      extensions: { findings: run?.summary.findings.filter((finding) => finding.severity === "stop") },
+    });
   }
-  if (!run?.summary.isOk) throw new ProblemError("wrong-state", { detail: "This script does not run on the server, so there is nothing to show." });
+  if (!run?.summary.isOk)
+    throw new ProblemError("wrong-state", {
+      detail: "This script does not run on the server, so there is nothing to show.",
+    });
 }

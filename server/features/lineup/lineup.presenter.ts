@@ -4,7 +4,16 @@ import type { Db } from "../../db/connection.ts";
 import { findSquare } from "../../event/square.queries.ts";
 import { tonightIn } from "../../event/night-time.ts";
 import { countFindings, type ForwardFacts, gatherForwardFacts, presentForward } from "./forward.presenter.ts";
-import { findLastPublication, findSeason, listApprovedForwards, listNights, listSlots, type NightRow, type SeasonRow, type SlotRow } from "./lineup.queries.ts";
+import {
+  findLastPublication,
+  findSeason,
+  listApprovedForwards,
+  listNights,
+  listSlots,
+  type NightRow,
+  type SeasonRow,
+  type SlotRow,
+} from "./lineup.queries.ts";
 import { checkPlan } from "./plan-check.ts";
 import { countChanges, toPublishedNights, toPublishedSlots } from "./publication.ts";
 import { ProblemError } from "../../../shared/problem.ts";
@@ -50,7 +59,10 @@ export function loadLineup(db: Db, now: number): LoadedLineup {
       isOnCurrentLayout: (show.run?.layoutId ?? show.layoutId) === square.currentLayoutId,
     })),
   });
-  const changeCount = countChanges(last?.publication ?? null, { nights: toPublishedNights(nights), slots: toPublishedSlots(nights, slots, shows) });
+  const changeCount = countChanges(last?.publication ?? null, {
+    nights: toPublishedNights(nights),
+    slots: toPublishedSlots(nights, slots, shows),
+  });
   return { season, timeZone: square.timeZone, tonight, nights, slots, shows, last, findings, changeCount };
 }
 

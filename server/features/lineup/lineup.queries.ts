@@ -97,7 +97,10 @@ export function getSubmissionToForward(db: Db, submissionId: string) {
 }
 
 /** Authors of these shows and whether their names may be public. */
-export function listNamedAuthors(db: Db, showIds: readonly string[]): Map<string, { displayName: string; isNamePublic: boolean }[]> {
+export function listNamedAuthors(
+  db: Db,
+  showIds: readonly string[],
+): Map<string, { displayName: string; isNamePublic: boolean }[]> {
   const authors = new Map<string, { displayName: string; isNamePublic: boolean }[]>();
   if (showIds.length === 0) return authors;
   const rows = db
@@ -118,7 +121,11 @@ export function insertForward(db: Db, row: typeof forwards.$inferInsert & { id: 
   db.insert(forwards).values(row).run();
 }
 
-export function answerForward(db: Db, forwardId: string, answer: Pick<ForwardRow, "state" | "answer" | "answeredBy" | "answeredAt">): void {
+export function answerForward(
+  db: Db,
+  forwardId: string,
+  answer: Pick<ForwardRow, "state" | "answer" | "answeredBy" | "answeredAt">,
+): void {
   db.update(forwards).set(answer).where(eq(forwards.id, forwardId)).run();
 }
 
@@ -138,7 +145,11 @@ export function getNight(db: Db, nightId: string): NightRow {
   return row;
 }
 
-export function updateNight(db: Db, nightId: string, change: Partial<Pick<NightRow, "opensAt" | "closesAt" | "closedReason">>): void {
+export function updateNight(
+  db: Db,
+  nightId: string,
+  change: Partial<Pick<NightRow, "opensAt" | "closesAt" | "closedReason">>,
+): void {
   if (Object.keys(change).length > 0) db.update(nights).set(change).where(eq(nights.id, nightId)).run();
 }
 
@@ -164,14 +175,24 @@ export function getSlot(db: Db, slotId: string): SlotRow {
 /** Another slot at this time of this night, or null. */
 export function findSlotAt(db: Db, nightId: string, startsAt: string, exceptSlotId: string | null): SlotRow | null {
   const at = and(eq(slots.nightId, nightId), eq(slots.startsAt, startsAt));
-  return db.select().from(slots).where(exceptSlotId === null ? at : and(at, ne(slots.id, exceptSlotId))).get() ?? null;
+  return (
+    db
+      .select()
+      .from(slots)
+      .where(exceptSlotId === null ? at : and(at, ne(slots.id, exceptSlotId)))
+      .get() ?? null
+  );
 }
 
 export function insertSlot(db: Db, row: typeof slots.$inferInsert): void {
   db.insert(slots).values(row).run();
 }
 
-export function updateSlot(db: Db, slotId: string, change: Partial<Pick<SlotRow, "nightId" | "startsAt" | "isPinned">>): void {
+export function updateSlot(
+  db: Db,
+  slotId: string,
+  change: Partial<Pick<SlotRow, "nightId" | "startsAt" | "isPinned">>,
+): void {
   db.update(slots).set(change).where(eq(slots.id, slotId)).run();
 }
 

@@ -1,7 +1,13 @@
 import type { lineupContract } from "../../../shared/contracts/lineup.ts";
 import type { FeatureDeps } from "../../deps.ts";
 import type { Handlers } from "../../http/mount.ts";
-import { approveForward, declineForward, forwardSubmission, getForwardDetail, listOwnForwards } from "./forwards.service.ts";
+import {
+  approveForward,
+  declineForward,
+  forwardSubmission,
+  getForwardDetail,
+  listOwnForwards,
+} from "./forwards.service.ts";
 import { getLineup, moveSlot, placeShow, publishLineup, removeSlot, setNight } from "./lineup.service.ts";
 import { getProgramme } from "./programme.service.ts";
 

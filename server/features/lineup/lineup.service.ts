@@ -9,7 +9,20 @@ import type { Actor } from "../../http/actor.ts";
 import { appendAudit } from "../../identity/audit-log.ts";
 import { fieldProblem } from "../../work/field-problem.ts";
 import { loadLineup, presentLineup } from "./lineup.presenter.ts";
-import { deleteSlot, findSeason, findSlotAt, getForward, getNight, getSlot, insertPublication, insertSlot, type NightRow, type SlotRow, updateNight, updateSlot } from "./lineup.queries.ts";
+import {
+  deleteSlot,
+  findSeason,
+  findSlotAt,
+  getForward,
+  getNight,
+  getSlot,
+  insertPublication,
+  insertSlot,
+  type NightRow,
+  type SlotRow,
+  updateNight,
+  updateSlot,
+} from "./lineup.queries.ts";
 import { toPublishedNights, toPublishedSlots } from "./publication.ts";
 
 interface LineupDeps {
@@ -29,7 +42,8 @@ export function getLineup({ db, clock }: LineupDeps): Lineup {
 export function placeShow(deps: LineupDeps, input: { forwardId: string; nightId: string; startsAt: string }): Lineup {
   return change(deps, (db) => {
     const { forward } = getForward(db, input.forwardId);
-    if (forward.state !== "approved") throw new ProblemError("wrong-state", { detail: "Approve the show first, then place it." });
+    if (forward.state !== "approved")
+      throw new ProblemError("wrong-state", { detail: "Approve the show first, then place it." });
     assertPlace(deps, db, getNight(db, input.nightId), input.startsAt);
     const taken = findSlotAt(db, input.nightId, input.startsAt, null);
     if (taken) throw slotTaken(taken);
@@ -53,7 +67,8 @@ export function moveSlot(
     const isPinned = input.isPinned ?? slot.isPinned;
     const moves = nightId !== slot.nightId || startsAt !== slot.startsAt;
     if (moves) {
-      if (slot.isPinned && input.isPinned !== false) throw new ProblemError("wrong-state", { detail: "This slot is pinned. Take the pin out first." });
+      if (slot.isPinned && input.isPinned !== false)
+        throw new ProblemError("wrong-state", { detail: "This slot is pinned. Take the pin out first." });
       assertNotOver(deps, db, getNight(db, slot.nightId));
       assertPlace(deps, db, getNight(db, nightId), startsAt);
       makeRoom(db, slot, { nightId, startsAt, swap: input.swap });
@@ -76,9 +91,14 @@ export function setNight(
   return change(deps, (db) => {
     const night = getNight(db, nightId);
     const next = { opensAt: input.opensAt ?? night.opensAt, closesAt: input.closesAt ?? night.closesAt };
-    if (secondsOfNight(next.closesAt) <= secondsOfNight(next.opensAt)) throw fieldProblem("/closesAt", "The night has to close after it opens.");
-    if (input.closedReason === "") throw fieldProblem("/closedReason", "Say why the night is closed, so that families know.");
-    updateNight(db, nightId, { ...next, closedReason: input.closedReason === undefined ? night.closedReason : input.closedReason });
+    if (secondsOfNight(next.closesAt) <= secondsOfNight(next.opensAt))
+      throw fieldProblem("/closesAt", "The night has to close after it opens.");
+    if (input.closedReason === "")
+      throw fieldProblem("/closedReason", "Say why the night is closed, so that families know.");
+    updateNight(db, nightId, {
+      ...next,
+      closedReason: input.closedReason === undefined ? night.closedReason : input.closedReason,
+    });
   });
 }
 
@@ -94,7 +114,8 @@ export function publishLineup({ db, clock }: LineupDeps, actor: Actor): { number
       const detail = stops.length === 1 ? "One stop is open." : `${stops.length} stops are open.`;
       throw new ProblemError("lineup-has-stops", { detail, extensions: { findings: stops } });
     }
-    if (loaded.last && loaded.changeCount === 0) throw new ProblemError("already-done", { detail: "Nothing changed since the last publication." });
+    if (loaded.last && loaded.changeCount === 0)
+      throw new ProblemError("already-done", { detail: "Nothing changed since the last publication." });
     const number = (loaded.last?.publication.number ?? 0) + 1;
     const publishedAt = clock.now();
     insertPublication(tx, {
@@ -106,7 +127,13 @@ export function publishLineup({ db, clock }: LineupDeps, actor: Actor): { number
       publishedBy: actor.userId,
       publishedAt,
     });
-    appendAudit(tx, { at: publishedAt, actorId: actor.userId, event: "lineup-published", subject: loaded.season.id, detail: { number, changes: loaded.changeCount } });
+    appendAudit(tx, {
+      at: publishedAt,
+      actorId: actor.userId,
+      event: "lineup-published",
+      subject: loaded.season.id,
+      detail: { number, changes: loaded.changeCount },
+    });
     return { number, publishedAt };
   });
 }
@@ -121,7 +148,8 @@ function change(deps: LineupDeps, work: (db: Db) => void): Lineup {
 
 function assertPlace(deps: LineupDeps, db: Db, night: NightRow, startsAt: string): void {
   assertNotOver(deps, db, night);
-  if (night.closedReason !== null) throw new ProblemError("wrong-state", { detail: `This night is closed: ${night.closedReason}.` });
+  if (night.closedReason !== null)
+    throw new ProblemError("wrong-state", { detail: `This night is closed: ${night.closedReason}.` });
   const times = findSeason(db)?.times ?? [];
   if (!times.includes(startsAt)) throw fieldProblem("/startsAt", `The board offers these times: ${times.join(", ")}.`);
 }
@@ -138,11 +166,15 @@ function makeRoom(db: Db, slot: SlotRow, to: { nightId: string; startsAt: string
   const taken = findSlotAt(db, to.nightId, to.startsAt, slot.id);
   if (!taken) return;
   if (!to.swap) throw slotTaken(taken);
-  if (taken.isPinned) throw new ProblemError("wrong-state", { detail: "The slot there is pinned. Take its pin out first." });
+  if (taken.isPinned)
+    throw new ProblemError("wrong-state", { detail: "The slot there is pinned. Take its pin out first." });
   updateSlot(db, slot.id, { startsAt: BETWEEN_TWO_TIMES });
   updateSlot(db, taken.id, { nightId: slot.nightId, startsAt: slot.startsAt });
 }
 
 function slotTaken(taken: SlotRow): ProblemError {
-  return new ProblemError("slot-taken", { detail: `Another show starts at ${taken.startsAt} that night.`, extensions: { slotId: taken.id } });
+  return new ProblemError("slot-taken", {
+    detail: `Another show starts at ${taken.startsAt} that night.`,
+    extensions: { slotId: taken.id },
+  });
 }

@@ -1,9 +1,19 @@
 import { eq } from "drizzle-orm";
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { contracts } from "../../../shared/contracts/index.ts";
-import type { ForwardId, NightId, SlotId, SubmissionId } from "../../../shared/ids.ts";
 import { consents, lineupPublications, runs, slots } from "../../db/schema/index.ts";
-import { buildClass, buildForward, buildNight, buildRun, buildSchool, buildSeason, buildSlot, buildSquare, buildSubmission, buildUser } from "../../../tests/support/factories.ts";
+import {
+  buildClass,
+  buildForward,
+  buildNight,
+  buildRun,
+  buildSchool,
+  buildSeason,
+  buildSlot,
+  buildSquare,
+  buildSubmission,
+  buildUser,
+} from "../../../tests/support/factories.ts";
 import { createTestServer, type TestServer } from "../../../tests/support/test-server.ts";
 import { findVersion } from "../../show-runs/runs.queries.ts";
 
@@ -36,23 +46,39 @@ afterEach(() => server.dispose());
 const marked = () => buildSubmission(server.db, { studentId: wren, classId, state: "marked" });
 function forwarded(state: "waiting" | "approved" | "declined" = "approved") {
   const submission = marked();
-  return buildForward(server.db, { submissionId: submission.id, versionId: submission.versionId, forwardedBy: teacher, state });
+  return buildForward(server.db, {
+    submissionId: submission.id,
+    versionId: submission.versionId,
+    forwardedBy: teacher,
+    state,
+  });
 }
 function addStop(versionId: string) {
   const version = findVersion(server.db, versionId)!;
-  const stop = { rule: "street-flash", severity: "stop" as const, sentence: "Too many flashes.", moments: [0], lights: [], lines: [1] };
+  const stop = {
+    rule: "street-flash",
+    severity: "stop" as const,
+    sentence: "Too many flashes.",
+    moments: [0],
+    lights: [],
+    lines: [1],
+  };
   const { summary } = server.db.select().from(runs).where(eq(runs.versionId, versionId)).get()!;
   buildRun(server.db, version, { summary: { ...summary, findings: [stop] }, createdAt: Date.UTC(2026, 10, 3) });
 }
 const agree = () => server.db.insert(consents).values({ userId: wren, isNamePublic: true, recordedAt: 0 }).run();
 
 const forward = (id: string, as = teacher) =>
-  server.call(contracts.lineup.forward, { params: { submissionId: id as SubmissionId }, body: { note: "Lovely bells." } }, { as });
-const idOf = (row: { id: string }) => ({ params: { forwardId: row.id as ForwardId } });
+  server.call(contracts.lineup.forward, { params: { submissionId: id }, body: { note: "Lovely bells." } }, { as });
+const idOf = (row: { id: string }) => ({ params: { forwardId: row.id } });
 const place = (row: { id: string }, startsAt: string, night: { id: string } = friday) =>
-  server.call(contracts.lineup.place, { body: { forwardId: row.id as ForwardId, nightId: night.id as NightId, startsAt } }, { as: coordinator });
+  server.call(
+    contracts.lineup.place,
+    { body: { forwardId: row.id, nightId: night.id, startsAt } },
+    { as: coordinator },
+  );
 const move = (slotId: string, body: object) =>
-  server.call(contracts.lineup.move, { params: { slotId: slotId as SlotId }, body }, { as: coordinator });
+  server.call(contracts.lineup.move, { params: { slotId: slotId }, body }, { as: coordinator });
 const publish = () => server.call(contracts.lineup.publish, {}, { as: coordinator });
 const getLineup = async () => (await server.call(contracts.lineup.lineup, {}, { as: coordinator })).body;
 
@@ -60,7 +86,13 @@ describe("POST /api/submissions/:submissionId/forward", () => {
   it("forwards marked work under the class's name, or the child's when the family agreed", async () => {
     const first = await forward(marked().id);
     expect(first.status).toBe(201);
-    expect(first.body.forward).toMatchObject({ state: "waiting", publicName: "class 7B, Tarn Road", authors: ["Wren"], note: "Lovely bells.", slotCount: 0 });
+    expect(first.body.forward).toMatchObject({
+      state: "waiting",
+      publicName: "class 7B, Tarn Road",
+      authors: ["Wren"],
+      note: "Lovely bells.",
+      slotCount: 0,
+    });
     agree();
     expect((await forward(marked().id)).body.forward.publicName).toBe("Wren, Tarn Road");
   });
@@ -83,7 +115,11 @@ describe("POST /api/submissions/:submissionId/forward", () => {
     const submission = marked();
     const first = await forward(submission.id);
     expect((await forward(submission.id)).body.type).toBe("/problems/already-done");
-    await server.call(contracts.lineup.decline, { ...idOf(first.body.forward), body: { note: "Too long." } }, { as: coordinator });
+    await server.call(
+      contracts.lineup.decline,
+      { ...idOf(first.body.forward), body: { note: "Too long." } },
+      { as: coordinator },
+    );
     expect((await forward(submission.id)).status).toBe(201);
   });
 
@@ -117,7 +153,8 @@ describe("GET /api/forwards/:forwardId", () => {
 });
 
 describe("POST /api/forwards/:forwardId/approve", () => {
-  const approve = (row: { id: string }) => server.call(contracts.lineup.approve, { ...idOf(row), body: {} }, { as: coordinator });
+  const approve = (row: { id: string }) =>
+    server.call(contracts.lineup.approve, { ...idOf(row), body: {} }, { as: coordinator });
 
   it("approves a waiting show once", async () => {
     const row = forwarded("waiting");
@@ -134,13 +171,18 @@ describe("POST /api/forwards/:forwardId/approve", () => {
 });
 
 describe("POST /api/forwards/:forwardId/decline", () => {
-  const decline = (row: { id: string }, note: string) => server.call(contracts.lineup.decline, { ...idOf(row), body: { note } }, { as: coordinator });
+  const decline = (row: { id: string }, note: string) =>
+    server.call(contracts.lineup.decline, { ...idOf(row), body: { note } }, { as: coordinator });
 
   it("always takes a note and frees the slots", async () => {
     const row = forwarded();
     buildSlot(server.db, { forwardId: row.id, nightId: friday.id });
     expect((await decline(row, " ")).status).toBe(422);
-    expect((await decline(row, "The song is over before the show.")).body.forward).toMatchObject({ state: "declined", answer: "The song is over before the show.", slotCount: 0 });
+    expect((await decline(row, "The song is over before the show.")).body.forward).toMatchObject({
+      state: "declined",
+      answer: "The song is over before the show.",
+      slotCount: 0,
+    });
     expect(server.db.select().from(slots).all()).toEqual([]);
     expect((await decline(row, "Again.")).body.type).toBe("/problems/wrong-state");
     expect((await decline({ id: "nothing" }, "Why.")).status).toBe(404);
@@ -166,7 +208,10 @@ describe("POST /api/lineup/slots", () => {
   it("refuses a waiting show, a closed night, a night that is over and a time off the board", async () => {
     expect((await place(forwarded("waiting"), "18:00")).body.type).toBe("/problems/wrong-state");
     const closed = buildNight(server.db, { seasonId: friday.seasonId, date: "2026-12-06", closedReason: "Market day" });
-    expect((await place(forwarded(), "18:00", closed)).body).toMatchObject({ type: "/problems/wrong-state", detail: "This night is closed: Market day." });
+    expect((await place(forwarded(), "18:00", closed)).body).toMatchObject({
+      type: "/problems/wrong-state",
+      detail: "This night is closed: Market day.",
+    });
     const over = buildNight(server.db, { seasonId: friday.seasonId, date: "2026-11-30" });
     expect((await place(forwarded(), "18:00", over)).body.type).toBe("/problems/wrong-state");
     expect((await place(forwarded(), "18:07")).body.errors[0].pointer).toBe("/startsAt");
@@ -178,7 +223,10 @@ describe("PATCH /api/lineup/slots/:slotId", () => {
   it("moves to another night and swaps two only when asked to", async () => {
     const one = buildSlot(server.db, { forwardId: forwarded().id, nightId: friday.id, startsAt: "18:00" });
     const two = buildSlot(server.db, { forwardId: forwarded().id, nightId: saturday.id, startsAt: "18:20" });
-    expect((await move(one.id, { nightId: saturday.id, startsAt: "18:20" })).body).toMatchObject({ type: "/problems/slot-taken", slotId: two.id });
+    expect((await move(one.id, { nightId: saturday.id, startsAt: "18:20" })).body).toMatchObject({
+      type: "/problems/slot-taken",
+      slotId: two.id,
+    });
     const { body } = await move(one.id, { nightId: saturday.id, startsAt: "18:20", swap: true });
     expect(body.slots).toEqual([
       expect.objectContaining({ id: two.id, nightId: friday.id, startsAt: "18:00" }),
@@ -205,7 +253,7 @@ describe("PATCH /api/lineup/slots/:slotId", () => {
 describe("DELETE /api/lineup/slots/:slotId", () => {
   it("puts the show back into the tray", async () => {
     const row = buildSlot(server.db, { forwardId: forwarded().id, nightId: friday.id });
-    const remove = () => server.call(contracts.lineup.remove, { params: { slotId: row.id as SlotId } }, { as: coordinator });
+    const remove = () => server.call(contracts.lineup.remove, { params: { slotId: row.id } }, { as: coordinator });
     const { body } = await remove();
     expect(body.slots).toEqual([]);
     expect(body.findings).toEqual([expect.objectContaining({ rule: "not-placed" })]);
@@ -214,7 +262,8 @@ describe("DELETE /api/lineup/slots/:slotId", () => {
 });
 
 describe("PATCH /api/lineup/nights/:nightId", () => {
-  const setNight = (body: object, id = friday.id) => server.call(contracts.lineup.setNight, { params: { nightId: id as NightId }, body }, { as: coordinator });
+  const setNight = (body: object, id = friday.id) =>
+    server.call(contracts.lineup.setNight, { params: { nightId: id }, body }, { as: coordinator });
 
   it("closes a night with a reason, which stops what is placed there, and opens it again", async () => {
     buildSlot(server.db, { forwardId: forwarded().id, nightId: friday.id });
@@ -237,10 +286,22 @@ describe("POST /api/lineup/publish and GET /api/programme", () => {
     agree();
     const row = forwarded();
     await place(row, "18:20");
-    expect(await programme()).toMatchObject({ eventName: "Quillhaven Winter Lights", publishedAt: null, nights: [], shows: [] });
+    expect(await programme()).toMatchObject({
+      eventName: "Quillhaven Winter Lights",
+      publishedAt: null,
+      nights: [],
+      shows: [],
+    });
     expect((await publish()).body).toEqual({ number: 1, publishedAt: server.clock.now() });
     const first = await programme();
-    expect(first.shows).toEqual([expect.objectContaining({ date: "2026-12-04", startsAt: "18:20", publicName: "Wren, Tarn Road", description: "The square lights up." })]);
+    expect(first.shows).toEqual([
+      expect.objectContaining({
+        date: "2026-12-04",
+        startsAt: "18:20",
+        publicName: "Wren, Tarn Road",
+        description: "The square lights up.",
+      }),
+    ]);
     const { slots: placed } = await getLineup();
     await move(placed[0].id, { startsAt: "18:40" });
     expect((await getLineup()).changeCount).toBe(1);
@@ -254,13 +315,20 @@ describe("POST /api/lineup/publish and GET /api/programme", () => {
     const row = forwarded();
     await place(row, "18:00");
     addStop(row.versionId);
-    expect((await publish()).body).toMatchObject({ type: "/problems/lineup-has-stops", findings: [{ rule: "show-has-stop" }] });
+    expect((await publish()).body).toMatchObject({
+      type: "/problems/lineup-has-stops",
+      findings: [{ rule: "show-has-stop" }],
+    });
   });
 
   it("answers already-done when nothing changed; a closed night is a change", async () => {
     await publish();
     expect((await publish()).body.type).toBe("/problems/already-done");
-    await server.call(contracts.lineup.setNight, { params: { nightId: saturday.id as NightId }, body: { closedReason: "Storm" } }, { as: coordinator });
+    await server.call(
+      contracts.lineup.setNight,
+      { params: { nightId: saturday.id }, body: { closedReason: "Storm" } },
+      { as: coordinator },
+    );
     expect((await publish()).body.number).toBe(2);
     expect((await programme()).nights).toContainEqual({ date: "2026-12-05", closedReason: "Storm" });
   });
@@ -295,7 +363,10 @@ describe("GET /api/lineup", () => {
   it("answers not-found before a season is set up", async () => {
     const empty = createTestServer();
     const as = buildUser(empty.db, { roles: ["coordinator"], schoolId: null }).id;
-    expect((await empty.call(contracts.lineup.lineup, {}, { as })).body).toMatchObject({ status: 404, detail: "No season is set up yet." });
+    expect((await empty.call(contracts.lineup.lineup, {}, { as })).body).toMatchObject({
+      status: 404,
+      detail: "No season is set up yet.",
+    });
     empty.dispose();
   });
 });

@@ -55,7 +55,9 @@ type Found = Omit<LineupFinding, "slotId" | "forwardId">;
 export function checkPlan(plan: Plan): LineupFinding[] {
   const shows = new Map(plan.shows.map((show) => [show.forwardId, show]));
   const findings: LineupFinding[] = [];
-  for (const night of plan.nights.filter((one) => one.date >= plan.tonight).sort((a, b) => a.date.localeCompare(b.date))) {
+  for (const night of plan.nights
+    .filter((one) => one.date >= plan.tonight)
+    .sort((a, b) => a.date.localeCompare(b.date))) {
     const slots = slotsOf(plan, night);
     slots.forEach((slot, place) => {
       const show = shows.get(slot.forwardId);
@@ -63,7 +65,11 @@ export function checkPlan(plan: Plan): LineupFinding[] {
       const before = slots[place - 1];
       const spot = { plan, night, slot, show, before, showBefore: before && shows.get(before.forwardId) };
       for (const found of [...checkShow(spot), ...checkPlace(spot), ...checkNeighbour(spot)]) {
-        findings.push({ ...found, slotId: SlotIdSchema.parse(slot.id), forwardId: ForwardIdSchema.parse(slot.forwardId) });
+        findings.push({
+          ...found,
+          slotId: SlotIdSchema.parse(slot.id),
+          forwardId: ForwardIdSchema.parse(slot.forwardId),
+        });
       }
     });
   }
@@ -83,10 +89,22 @@ interface Spot {
 function checkShow({ show, slot }: Spot): Found[] {
   const found: Found[] = [];
   if (!show.runs) {
-    found.push({ rule: "does-not-run", severity: "stop", cause: "does not run", sentence: `"${show.title}" does not run on the server.`, fix: removeFix(slot) });
+    found.push({
+      rule: "does-not-run",
+      severity: "stop",
+      cause: "does not run",
+      sentence: `"${show.title}" does not run on the server.`,
+      fix: removeFix(slot),
+    });
   } else if (show.stopCount > 0) {
     const stops = show.stopCount === 1 ? "a stop" : `${show.stopCount} stops`;
-    found.push({ rule: "show-has-stop", severity: "stop", cause: stops, sentence: `The show check of "${show.title}" has ${stops}.`, fix: removeFix(slot) });
+    found.push({
+      rule: "show-has-stop",
+      severity: "stop",
+      cause: stops,
+      sentence: `The show check of "${show.title}" has ${stops}.`,
+      fix: removeFix(slot),
+    });
   }
   if (!show.isOnCurrentLayout) {
     found.push({
@@ -104,32 +122,38 @@ function checkShow({ show, slot }: Spot): Found[] {
 function checkPlace(spot: Spot): Found[] {
   const { plan, night, slot, show } = spot;
   if (night.closedReason !== null) {
-    return [{
-      rule: "closed-night",
-      severity: "stop",
-      cause: "closed night",
-      sentence: `${sayDate(night.date)} is closed (${night.closedReason}), but "${show.title}" is placed at ${slot.startsAt}.`,
-      fix: moveFix(plan, slot, show) ?? removeFix(slot),
-    }];
+    return [
+      {
+        rule: "closed-night",
+        severity: "stop",
+        cause: "closed night",
+        sentence: `${sayDate(night.date)} is closed (${night.closedReason}), but "${show.title}" is placed at ${slot.startsAt}.`,
+        fix: moveFix(plan, slot, show) ?? removeFix(slot),
+      },
+    ];
   }
   const start = secondsOfNight(slot.startsAt);
   if (start + show.seconds > secondsOfNight(night.closesAt)) {
-    return [{
-      rule: "past-quiet-hour",
-      severity: "stop",
-      cause: "past quiet hour",
-      sentence: `"${show.title}" ends at ${clockOfNight(start + show.seconds)}, but it must be quiet at ${night.closesAt}.`,
-      fix: moveFix(plan, slot, show) ?? removeFix(slot),
-    }];
+    return [
+      {
+        rule: "past-quiet-hour",
+        severity: "stop",
+        cause: "past quiet hour",
+        sentence: `"${show.title}" ends at ${clockOfNight(start + show.seconds)}, but it must be quiet at ${night.closesAt}.`,
+        fix: moveFix(plan, slot, show) ?? removeFix(slot),
+      },
+    ];
   }
   if (start < secondsOfNight(night.opensAt)) {
-    return [{
-      rule: "past-quiet-hour",
-      severity: "stop",
-      cause: "before the night opens",
-      sentence: `"${show.title}" starts at ${slot.startsAt}, but the night opens at ${night.opensAt}.`,
-      fix: moveFix(plan, slot, show) ?? removeFix(slot),
-    }];
+    return [
+      {
+        rule: "past-quiet-hour",
+        severity: "stop",
+        cause: "before the night opens",
+        sentence: `"${show.title}" starts at ${slot.startsAt}, but the night opens at ${night.opensAt}.`,
+        fix: moveFix(plan, slot, show) ?? removeFix(slot),
+      },
+    ];
   }
   return [];
 }
@@ -185,20 +209,24 @@ function moveFix(plan: Plan, slot: PlannedSlot, show: PlannedShow): Fix {
   const home = plan.nights.find((night) => night.id === slot.nightId);
   if (!home) return null;
   const distance = (night: PlannedNight, time: string) =>
-    Math.abs(daysBetween(home.date, night.date)) * 86_400 + Math.abs(secondsOfNight(time) - secondsOfNight(slot.startsAt));
+    Math.abs(daysBetween(home.date, night.date)) * 86_400 +
+    Math.abs(secondsOfNight(time) - secondsOfNight(slot.startsAt));
   const others = { ...plan, slots: plan.slots.filter((one) => one.id !== slot.id) };
   const places = plan.nights
     .filter((night) => night.date >= plan.tonight && night.closedReason === null)
     .flatMap((night) => plan.times.map((time) => ({ night, time, distance: distance(night, time) })))
     .sort((a, b) => a.distance - b.distance);
-  const place = places.find(({ night, time }) => night.id + time !== slot.nightId + slot.startsAt && fits(others, night, time, show));
+  const place = places.find(
+    ({ night, time }) => night.id + time !== slot.nightId + slot.startsAt && fits(others, night, time, show),
+  );
   if (!place) return null;
   return {
     kind: "move",
     slotId: SlotIdSchema.parse(slot.id),
     nightId: NightIdSchema.parse(place.night.id),
     startsAt: place.time,
-    label: place.night.id === slot.nightId ? `Move to ${place.time}` : `Move to ${sayDate(place.night.date)}, ${place.time}`,
+    label:
+      place.night.id === slot.nightId ? `Move to ${place.time}` : `Move to ${sayDate(place.night.date)}, ${place.time}`,
   };
 }
 
@@ -213,13 +241,16 @@ function fits(plan: Plan, night: PlannedNight, time: string, show: PlannedShow):
   const after = slots.find((slot) => secondsOfNight(slot.startsAt) > start);
   const showBefore = before && shows.get(before.forwardId);
   const showAfter = after && shows.get(after.forwardId);
-  if (before && showBefore && secondsOfNight(before.startsAt) + showBefore.seconds + CHANGEOVER_SECONDS > start) return false;
+  if (before && showBefore && secondsOfNight(before.startsAt) + showBefore.seconds + CHANGEOVER_SECONDS > start)
+    return false;
   if (after && start + show.seconds + CHANGEOVER_SECONDS > secondsOfNight(after.startsAt)) return false;
   return ![showBefore, showAfter].some((neighbour) => neighbour && isSameClass(neighbour, show));
 }
 
 function slotsOf(plan: Plan, night: PlannedNight): PlannedSlot[] {
-  return plan.slots.filter((slot) => slot.nightId === night.id).sort((a, b) => secondsOfNight(a.startsAt) - secondsOfNight(b.startsAt));
+  return plan.slots
+    .filter((slot) => slot.nightId === night.id)
+    .sort((a, b) => secondsOfNight(a.startsAt) - secondsOfNight(b.startsAt));
 }
 
 function isSameClass(a: PlannedShow, b: PlannedShow): boolean {

@@ -2,7 +2,11 @@ import { describe, expect, it } from "vitest";
 import { toPublicName } from "./public-name.ts";
 
 const of = (...authors: [string, boolean][]) =>
-  toPublicName({ authors: authors.map(([displayName, isNamePublic]) => ({ displayName, isNamePublic })), className: "7B", schoolShortName: "Tarn Road" });
+  toPublicName({
+    authors: authors.map(([displayName, isNamePublic]) => ({ displayName, isNamePublic })),
+    className: "7B",
+    schoolShortName: "Tarn Road",
+  });
 
 describe("toPublicName", () => {
   it("names first names and the school when every family agreed", () => {

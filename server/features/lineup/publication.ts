@@ -17,28 +17,34 @@ export function toPublishedNights(nights: readonly NightRow[]): PublishedNight[]
 }
 
 /** The slots as families will see them, by date and time; a slot whose show never ran has nothing to show and is left out. */
-export function toPublishedSlots(nights: readonly NightRow[], slots: readonly SlotRow[], shows: readonly ForwardFacts[]): PublishedSlot[] {
+export function toPublishedSlots(
+  nights: readonly NightRow[],
+  slots: readonly SlotRow[],
+  shows: readonly ForwardFacts[],
+): PublishedSlot[] {
   const dates = new Map(nights.map((night) => [night.id, night.date]));
   const facts = new Map(shows.map((show) => [show.forward.id, show]));
   return slots.flatMap((slot) => {
     const show = facts.get(slot.forwardId);
     const date = dates.get(slot.nightId);
     if (!show?.run || date === undefined) return [];
-    return [{
-      slotId: slot.id,
-      forwardId: slot.forwardId,
-      versionId: show.forward.versionId,
-      runId: show.run.id,
-      nightId: slot.nightId,
-      date,
-      startsAt: slot.startsAt,
-      title: show.show.title,
-      publicName: show.publicName,
-      schoolName: show.schoolName,
-      songTitle: show.songTitle,
-      seconds: show.seconds,
-      description: show.run.summary.description,
-    }];
+    return [
+      {
+        slotId: slot.id,
+        forwardId: slot.forwardId,
+        versionId: show.forward.versionId,
+        runId: show.run.id,
+        nightId: slot.nightId,
+        date,
+        startsAt: slot.startsAt,
+        title: show.show.title,
+        publicName: show.publicName,
+        schoolName: show.schoolName,
+        songTitle: show.songTitle,
+        seconds: show.seconds,
+        description: show.run.summary.description,
+      },
+    ];
   });
 }
 
@@ -46,10 +52,17 @@ export function toPublishedSlots(nights: readonly NightRow[], slots: readonly Sl
 export function countChanges(before: PublishedPlan | null, now: PublishedPlan): number {
   // Before the first publication an open night is nothing to tell.
   const nightsBefore = before?.nights ?? now.nights.map(({ date }) => ({ date, closedReason: null }));
-  return countDifferent(before?.slots ?? [], now.slots, (slot) => slot.slotId) + countDifferent(nightsBefore, now.nights, (night) => night.date);
+  return (
+    countDifferent(before?.slots ?? [], now.slots, (slot) => slot.slotId) +
+    countDifferent(nightsBefore, now.nights, (night) => night.date)
+  );
 }
 
-function countDifferent<Row extends object>(before: readonly Row[], now: readonly Row[], key: (row: Row) => string): number {
+function countDifferent<Row extends object>(
+  before: readonly Row[],
+  now: readonly Row[],
+  key: (row: Row) => string,
+): number {
   const old = new Map(before.map((row) => [key(row), JSON.stringify(row)]));
   const changedOrNew = now.filter((row) => old.get(key(row)) !== JSON.stringify(row)).length;
   const kept = new Set(now.map(key));

@@ -8,7 +8,13 @@ import { getBeatMap } from "../../event/song.queries.ts";
 import type { Actor } from "../../http/actor.ts";
 import { fieldProblem } from "../../work/field-problem.ts";
 import { presentComment } from "./marking.presenter.ts";
-import { getComment, insertComment, listComments, setCommentDeleted, type SubmissionContext } from "./marking.queries.ts";
+import {
+  getComment,
+  insertComment,
+  listComments,
+  setCommentDeleted,
+  type SubmissionContext,
+} from "./marking.queries.ts";
 import { getRelatedSubmission } from "./relate.ts";
 
 interface CommentsDeps {
@@ -30,7 +36,15 @@ export function createComment(
     const context = getRelatedSubmission(tx, actor, submissionId);
     assertAnchor(tx, context, input.anchor);
     const id = newId();
-    insertComment(tx, { id, submissionId, versionId: context.version.id, authorId: actor.userId, anchor: input.anchor, body: input.body, createdAt: clock.now() });
+    insertComment(tx, {
+      id,
+      submissionId,
+      versionId: context.version.id,
+      authorId: actor.userId,
+      anchor: input.anchor,
+      body: input.body,
+      createdAt: clock.now(),
+    });
     const kept = listComments(tx, submissionId).find((row) => row.comment.id === id);
     if (!kept) throw new Error("A comment that was inserted is listed.");
     return presentComment(actor.userId, kept);
@@ -42,7 +56,8 @@ export function deleteComment({ db, clock }: CommentsDeps, actor: Actor, comment
   inTransaction(db, (tx) => {
     const comment = getComment(tx, commentId);
     getRelatedSubmission(tx, actor, comment.submissionId);
-    if (comment.authorId !== actor.userId) throw new ProblemError("not-allowed", { detail: "You can take back your own comments only." });
+    if (comment.authorId !== actor.userId)
+      throw new ProblemError("not-allowed", { detail: "You can take back your own comments only." });
     setCommentDeleted(tx, commentId, clock.now());
   });
 }

@@ -31,7 +31,9 @@ export function listEvidence(
   run: RunRow | null,
   { rubric, requirements }: { readonly rubric: Rubric; readonly requirements: readonly Requirement[] },
 ): Record<string, Evidence[]> {
-  const evidence: Record<string, Evidence[]> = { [WHOLE]: requirements.map((requirement) => toFact(version.source, requirement)) };
+  const evidence: Record<string, Evidence[]> = {
+    [WHOLE]: requirements.map((requirement) => toFact(version.source, requirement)),
+  };
   const add = (key: string, fact: Evidence) => (evidence[key] = [...(evidence[key] ?? []), fact]);
   if (!run?.timeline) return evidence;
   const facts = gatherEvidence({
@@ -40,16 +42,25 @@ export function listEvidence(
     layout: getLayout(db, run.layoutId).layout,
     song: getBeatMap(db, run.beatMapId),
   });
-  for (const { topic, kind, text, lines, moments } of facts) add(findCriterion(rubric, topic), { kind, text, lines, moments });
+  for (const { topic, kind, text, lines, moments } of facts)
+    add(findCriterion(rubric, topic), { kind, text, lines, moments });
   return evidence;
 }
 
 function toFact(source: string, requirement: Requirement): Evidence {
   const uses = listUses(source).filter((use) => use.kind === requirement.kind);
   const isMet = listUnmet(source, [requirement]).length === 0;
-  const asked = requirement.atLeast === 1 ? REQUIREMENT_NAMES[requirement.kind] : `${REQUIREMENT_NAMES[requirement.kind]}, ${requirement.atLeast} times`;
+  const asked =
+    requirement.atLeast === 1
+      ? REQUIREMENT_NAMES[requirement.kind]
+      : `${REQUIREMENT_NAMES[requirement.kind]}, ${requirement.atLeast} times`;
   const found = uses.length === 0 ? "not found" : `found ${uses.length === 1 ? "once" : `${uses.length} times`}`;
-  return { kind: isMet ? "tick" : "triangle", text: `Asked for: ${asked}; ${found}.`, lines: [...new Set(uses.map((use) => use.line))], moments: [] };
+  return {
+    kind: isMet ? "tick" : "triangle",
+    text: `Asked for: ${asked}; ${found}.`,
+    lines: [...new Set(uses.map((use) => use.line))],
+    moments: [],
+  };
 }
 
 /** The first criterion whose id or name speaks of the topic. */

@@ -5,10 +5,18 @@ import { countPoints } from "../../work/points.ts";
 import type { CommentWithAuthor, MarkRow } from "./marking.queries.ts";
 
 export function presentMark(rubric: Rubric, mark: MarkRow): Mark {
-  return { levels: mark.levels, note: mark.note, ...countPoints(rubric, mark.levels), isReleased: mark.releasedAt !== null };
+  return {
+    levels: mark.levels,
+    note: mark.note,
+    ...countPoints(rubric, mark.levels),
+    isReleased: mark.releasedAt !== null,
+  };
 }
 
-export function presentComment(userId: string, { comment, authorName, isTeacher, versionNumber }: CommentWithAuthor): Comment {
+export function presentComment(
+  userId: string,
+  { comment, authorName, isTeacher, versionNumber }: CommentWithAuthor,
+): Comment {
   return {
     id: CommentIdSchema.parse(comment.id),
     authorName,

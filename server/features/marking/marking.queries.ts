@@ -1,7 +1,19 @@
 import { and, asc, eq, inArray, isNull, sql } from "drizzle-orm";
 import { ProblemError } from "../../../shared/problem.ts";
 import type { Db } from "../../db/connection.ts";
-import { assignments, classes, classTeachers, comments, marks, shows, showVersions, submissionEvents, submissions, userRoles, users } from "../../db/schema/index.ts";
+import {
+  assignments,
+  classes,
+  classTeachers,
+  comments,
+  marks,
+  shows,
+  showVersions,
+  submissionEvents,
+  submissions,
+  userRoles,
+  users,
+} from "../../db/schema/index.ts";
 
 export type CommentRow = typeof comments.$inferSelect;
 export type MarkRow = typeof marks.$inferSelect;
@@ -18,7 +30,13 @@ export interface SubmissionContext {
 
 function selectSubmissions(db: Db) {
   return db
-    .select({ submission: submissions, show: shows, version: showVersions, assignment: assignments, className: classes.name })
+    .select({
+      submission: submissions,
+      show: shows,
+      version: showVersions,
+      assignment: assignments,
+      className: classes.name,
+    })
     .from(submissions)
     .innerJoin(shows, eq(shows.id, submissions.showId))
     .innerJoin(showVersions, eq(showVersions.id, submissions.versionId))
@@ -36,7 +54,10 @@ export function getSubmission(db: Db, submissionId: string): SubmissionContext {
 /** What was handed in for these assignments, in the order it came in. */
 export function listSubmissions(db: Db, assignmentIds: readonly string[]): SubmissionContext[] {
   if (assignmentIds.length === 0) return [];
-  return selectSubmissions(db).where(inArray(submissions.assignmentId, [...assignmentIds])).orderBy(asc(submissions.handedInAt)).all();
+  return selectSubmissions(db)
+    .where(inArray(submissions.assignmentId, [...assignmentIds]))
+    .orderBy(asc(submissions.handedInAt))
+    .all();
 }
 
 /** States of what was handed in for these assignments, in the order it came in; no scripts are read. */
@@ -76,7 +97,11 @@ export function getAssignment(db: Db, assignmentId: string) {
 
 export function listMarks(db: Db, submissionIds: readonly string[]): Map<string, MarkRow> {
   if (submissionIds.length === 0) return new Map();
-  const rows = db.select().from(marks).where(inArray(marks.submissionId, [...submissionIds])).all();
+  const rows = db
+    .select()
+    .from(marks)
+    .where(inArray(marks.submissionId, [...submissionIds]))
+    .all();
   return new Map(rows.map((row) => [row.submissionId, row]));
 }
 
@@ -86,7 +111,10 @@ export function findMark(db: Db, submissionId: string): MarkRow | null {
 
 export function saveMarkRow(db: Db, row: typeof marks.$inferInsert): void {
   const { levels, note, markedBy, savedAt } = row;
-  db.insert(marks).values(row).onConflictDoUpdate({ target: marks.submissionId, set: { levels, note, markedBy, savedAt } }).run();
+  db.insert(marks)
+    .values(row)
+    .onConflictDoUpdate({ target: marks.submissionId, set: { levels, note, markedBy, savedAt } })
+    .run();
 }
 
 export function setReleased(db: Db, submissionId: string, releasedAt: number | null): void {
@@ -100,7 +128,12 @@ export function setState(db: Db, submissionId: string, state: SubmissionRow["sta
 /** State history, oldest first. */
 export function listEvents(db: Db, submissionId: string) {
   return db
-    .select({ at: submissionEvents.at, state: submissionEvents.state, by: users.displayName, versionNumber: showVersions.number })
+    .select({
+      at: submissionEvents.at,
+      state: submissionEvents.state,
+      by: users.displayName,
+      versionNumber: showVersions.number,
+    })
     .from(submissionEvents)
     .innerJoin(users, eq(users.id, submissionEvents.by))
     .innerJoin(showVersions, eq(showVersions.id, submissionEvents.versionId))
@@ -120,7 +153,12 @@ export interface CommentWithAuthor {
 /** The comments that stand, oldest first. */
 export function listComments(db: Db, submissionId: string): CommentWithAuthor[] {
   const rows = db
-    .select({ comment: comments, authorName: users.displayName, versionNumber: showVersions.number, teacherId: userRoles.userId })
+    .select({
+      comment: comments,
+      authorName: users.displayName,
+      versionNumber: showVersions.number,
+      teacherId: userRoles.userId,
+    })
     .from(comments)
     .innerJoin(users, eq(users.id, comments.authorId))
     .innerJoin(showVersions, eq(showVersions.id, comments.versionId))
@@ -133,7 +171,11 @@ export function listComments(db: Db, submissionId: string): CommentWithAuthor[] 
 
 /** One comment that was not taken back. Throws `not-found`. */
 export function getComment(db: Db, commentId: string): CommentRow {
-  const row = db.select().from(comments).where(and(eq(comments.id, commentId), isNull(comments.deletedAt))).get();
+  const row = db
+    .select()
+    .from(comments)
+    .where(and(eq(comments.id, commentId), isNull(comments.deletedAt)))
+    .get();
   if (!row) throw new ProblemError("not-found");
   return row;
 }

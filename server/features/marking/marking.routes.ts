@@ -11,7 +11,8 @@ export function createMarkingHandlers(deps: FeatureDeps): Handlers<typeof markin
     inbox: ({ actor }) => ({ assignments: listInbox(deps.db, actor) }),
     queue: ({ actor, params }) => getQueue(deps.db, actor, params.assignmentId),
     submission: ({ actor, params }) => getSubmissionDetail(deps.db, actor, params.submissionId),
-    comment: ({ actor, params, body, commit }) => commit(() => ({ comment: createComment(deps, actor, params.submissionId, body) })),
+    comment: ({ actor, params, body, commit }) =>
+      commit(() => ({ comment: createComment(deps, actor, params.submissionId, body) })),
     deleteComment: ({ actor, params }) => deleteComment(deps, actor, params.commentId),
     saveMark: ({ actor, params, body }) => ({ mark: saveMark(deps, actor, params.submissionId, body) }),
     sendBack: ({ actor, params, body }) => ({ state: sendBack(deps, actor, params.submissionId, body.note) }),

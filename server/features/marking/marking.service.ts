@@ -1,5 +1,13 @@
 import type { QueueRow, SubmissionDetail } from "../../../shared/contracts/marking.ts";
-import { type AssignmentId, AssignmentIdSchema, ClassIdSchema, ShowIdSchema, type SubmissionId, SubmissionIdSchema, VersionIdSchema } from "../../../shared/ids.ts";
+import {
+  type AssignmentId,
+  AssignmentIdSchema,
+  ClassIdSchema,
+  ShowIdSchema,
+  type SubmissionId,
+  SubmissionIdSchema,
+  VersionIdSchema,
+} from "../../../shared/ids.ts";
 import type { Db } from "../../db/connection.ts";
 import { getBeatMap, listSongFacts, songSeconds } from "../../event/song.queries.ts";
 import { type Actor, assertRelation } from "../../http/actor.ts";
@@ -41,9 +49,13 @@ export interface InboxRow {
 /** The teacher's assignments with how much waits; `firstSubmissionId` has waited longest. */
 export function listInbox(db: Db, actor: Actor): InboxRow[] {
   const rows = listTaughtAssignments(db, actor.userId);
-  const work = listSubmissionStates(db, rows.map((row) => row.id));
+  const work = listSubmissionStates(
+    db,
+    rows.map((row) => row.id),
+  );
   return rows.map((row) => {
-    const inState = (state: SubmissionRow["state"]) => work.filter((one) => one.assignmentId === row.id && one.state === state);
+    const inState = (state: SubmissionRow["state"]) =>
+      work.filter((one) => one.assignmentId === row.id && one.state === state);
     const waiting = inState("submitted");
     return {
       id: AssignmentIdSchema.parse(row.id),
@@ -59,13 +71,25 @@ export function listInbox(db: Db, actor: Actor): InboxRow[] {
 }
 
 /** What was handed in: to mark first by the time it came in, then sent back, then marked. Throws `not-found`. */
-export function getQueue(db: Db, actor: Actor, assignmentId: string): { title: string; className: string; rows: QueueRow[] } {
+export function getQueue(
+  db: Db,
+  actor: Actor,
+  assignmentId: string,
+): { title: string; className: string; rows: QueueRow[] } {
   const { assignment, className } = getAssignment(db, assignmentId);
   assertRelation(actor, listClassRelations(db, actor.userId, assignment.classId));
-  const rows = listSubmissions(db, [assignmentId]).sort((a, b) => QUEUE_ORDER.indexOf(a.submission.state) - QUEUE_ORDER.indexOf(b.submission.state));
+  const rows = listSubmissions(db, [assignmentId]).sort(
+    (a, b) => QUEUE_ORDER.indexOf(a.submission.state) - QUEUE_ORDER.indexOf(b.submission.state),
+  );
   const ids = rows.map((row) => row.submission.id);
-  const authors = listAuthorNames(db, rows.map((row) => row.show.id));
-  const runs = listLatestRuns(db, rows.map((row) => row.version.id));
+  const authors = listAuthorNames(
+    db,
+    rows.map((row) => row.show.id),
+  );
+  const runs = listLatestRuns(
+    db,
+    rows.map((row) => row.version.id),
+  );
   const marks = listMarks(db, ids);
   const forwards = listLatestForwards(db, ids);
   return {
@@ -101,7 +125,9 @@ export function getSubmissionDetail(db: Db, actor: Actor, submissionId: string):
   const run = findLatestRun(db, version.id);
   const mark = findMark(db, submission.id);
   const forward = listLatestForwards(db, [submission.id]).get(submission.id);
-  const seconds = run ? run.summary.seconds : (listSongFacts(db).get(version.songId)?.seconds ?? songSeconds(getBeatMap(db, version.beatMapId)));
+  const seconds = run
+    ? run.summary.seconds
+    : (listSongFacts(db).get(version.songId)?.seconds ?? songSeconds(getBeatMap(db, version.beatMapId)));
   return {
     submission: {
       id: SubmissionIdSchema.parse(submission.id),
@@ -124,7 +150,9 @@ export function getSubmissionDetail(db: Db, actor: Actor, submissionId: string):
     comments: listComments(db, submission.id).map((comment) => presentComment(actor.userId, comment)),
     mark: mark && (isTeacher || mark.releasedAt !== null) ? presentMark(assignment.rubric, mark) : null,
     evidence: isTeacher ? listEvidence(db, version, run, assignment) : {},
-    forward: forward ? { state: forward.shownState, note: isTeacher ? forward.note : "", answer: isTeacher ? forward.answer : null } : null,
+    forward: forward
+      ? { state: forward.shownState, note: isTeacher ? forward.note : "", answer: isTeacher ? forward.answer : null }
+      : null,
     history: listEvents(db, submission.id),
   };
 }

@@ -1,9 +1,17 @@
 import { eq } from "drizzle-orm";
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { contracts } from "../../../shared/contracts/index.ts";
-import type { AssignmentId, CommentId, SubmissionId } from "../../../shared/ids.ts";
 import { auditLog, comments, submissionEvents, submissions } from "../../db/schema/index.ts";
-import { buildAssignment, buildClass, buildComment, buildForward, buildMark, buildSquare, buildSubmission, buildUser } from "../../../tests/support/factories.ts";
+import {
+  buildAssignment,
+  buildClass,
+  buildComment,
+  buildForward,
+  buildMark,
+  buildSquare,
+  buildSubmission,
+  buildUser,
+} from "../../../tests/support/factories.ts";
 import { createTestServer, type TestServer } from "../../../tests/support/test-server.ts";
 
 let server: TestServer;
@@ -15,7 +23,11 @@ let classId: string;
 let assignment: ReturnType<typeof buildAssignment>;
 let submission: ReturnType<typeof buildSubmission>;
 
-const criterion = (id: string, name: string) => ({ id, name, levels: ["Not yet", "Nearly", "There", "Beyond"].map((level) => ({ name: level, text: level })) });
+const criterion = (id: string, name: string) => ({
+  id,
+  name,
+  levels: ["Not yet", "Nearly", "There", "Beyond"].map((level) => ({ name: level, text: level })),
+});
 
 beforeEach(() => {
   server = createTestServer();
@@ -25,19 +37,34 @@ beforeEach(() => {
   teacher = buildUser(server.db, { roles: ["teacher"], displayName: "Ms Marlow" }).id;
   otherTeacher = buildUser(server.db, { roles: ["teacher"] }).id;
   classId = buildClass(server.db, { teacherIds: [teacher], studentIds: [wren, ash] }).id;
-  assignment = buildAssignment(server.db, { classId, rubric: [criterion("timing", "Timing"), criterion("code", "Code")] });
+  assignment = buildAssignment(server.db, {
+    classId,
+    rubric: [criterion("timing", "Timing"), criterion("code", "Code")],
+  });
   submission = buildSubmission(server.db, { assignmentId: assignment.id, studentId: wren, classId });
 });
 afterEach(() => server.dispose());
 
-const of = (id: string = submission.id) => ({ params: { submissionId: id as SubmissionId } });
+const of = (id: string = submission.id) => ({ params: { submissionId: id } });
 const stateNow = () => server.db.select().from(submissions).where(eq(submissions.id, submission.id)).get()?.state;
 const detail = (as: string) => server.call(contracts.marking.submission, of(), { as });
 
 describe("GET /api/marking", () => {
   it("counts what waits, what was sent back and what is marked, for one's own classes", async () => {
-    buildSubmission(server.db, { assignmentId: assignment.id, studentId: ash, classId, state: "revise", handedInAt: 1 });
-    buildSubmission(server.db, { assignmentId: assignment.id, studentId: buildUser(server.db).id, classId, state: "submitted", handedInAt: 2 });
+    buildSubmission(server.db, {
+      assignmentId: assignment.id,
+      studentId: ash,
+      classId,
+      state: "revise",
+      handedInAt: 1,
+    });
+    buildSubmission(server.db, {
+      assignmentId: assignment.id,
+      studentId: buildUser(server.db).id,
+      classId,
+      state: "submitted",
+      handedInAt: 2,
+    });
     const { body } = await server.call(contracts.marking.inbox, {}, { as: teacher });
     expect(body.assignments).toHaveLength(1);
     expect(body.assignments[0]).toMatchObject({ toMark: 2, sentBack: 1, marked: 0 });
@@ -49,15 +76,32 @@ describe("GET /api/marking", () => {
 describe("GET /api/assignments/:assignmentId/submissions", () => {
   it("lists to mark first by time, then sent back, then marked", async () => {
     const add = (state: "submitted" | "revise" | "marked", handedInAt: number) =>
-      buildSubmission(server.db, { assignmentId: assignment.id, studentId: buildUser(server.db).id, classId, state, handedInAt }).id;
+      buildSubmission(server.db, {
+        assignmentId: assignment.id,
+        studentId: buildUser(server.db).id,
+        classId,
+        state,
+        handedInAt,
+      }).id;
     const marked = add("marked", 1);
     const back = add("revise", 2);
     const early = add("submitted", 3);
-    const call = { params: { assignmentId: assignment.id as AssignmentId } };
+    const call = { params: { assignmentId: assignment.id } };
     const { status, body } = await server.call(contracts.marking.queue, call, { as: teacher });
     expect(status).toBe(200);
-    expect(body.rows.map((row: { submissionId: string }) => row.submissionId)).toEqual([early, submission.id, back, marked]);
-    expect(body.rows[1]).toMatchObject({ authors: ["Wren"], isOk: true, stopCount: 0, points: null, forwardState: null });
+    expect(body.rows.map((row: { submissionId: string }) => row.submissionId)).toEqual([
+      early,
+      submission.id,
+      back,
+      marked,
+    ]);
+    expect(body.rows[1]).toMatchObject({
+      authors: ["Wren"],
+      isOk: true,
+      stopCount: 0,
+      points: null,
+      forwardState: null,
+    });
     expect((await server.call(contracts.marking.queue, call, { as: otherTeacher })).status).toBe(404);
   });
 });
@@ -75,8 +119,18 @@ describe("GET /api/submissions/:submissionId", () => {
   });
 
   it("keeps the words between teacher and coordinator from the author", async () => {
-    buildForward(server.db, { submissionId: submission.id, versionId: submission.versionId, forwardedBy: teacher, state: "declined", answer: "Too short." });
-    expect((await detail(teacher)).body.forward).toEqual({ state: "declined", note: "Please have a look.", answer: "Too short." });
+    buildForward(server.db, {
+      submissionId: submission.id,
+      versionId: submission.versionId,
+      forwardedBy: teacher,
+      state: "declined",
+      answer: "Too short.",
+    });
+    expect((await detail(teacher)).body.forward).toEqual({
+      state: "declined",
+      note: "Please have a look.",
+      answer: "Too short.",
+    });
     expect((await detail(wren)).body.forward).toEqual({ state: "declined", note: "", answer: null });
   });
 
@@ -87,12 +141,23 @@ describe("GET /api/submissions/:submissionId", () => {
 
 describe("POST /api/submissions/:submissionId/comments", () => {
   const comment = (anchor: object, as = teacher) =>
-    server.call(contracts.marking.comment, { ...of(), body: { anchor: anchor as { kind: "whole" }, body: "Look here." } }, { as });
+    server.call(
+      contracts.marking.comment,
+      { ...of(), body: { anchor: anchor as { kind: "whole" }, body: "Look here." } },
+      { as },
+    );
 
   it("keeps comments on the whole, on lines and on a moment, by teacher and author", async () => {
-    expect((await comment({ kind: "whole" })).body.comment).toMatchObject({ authorName: "Ms Marlow", isMine: true, isTeacher: true });
+    expect((await comment({ kind: "whole" })).body.comment).toMatchObject({
+      authorName: "Ms Marlow",
+      isMine: true,
+      isTeacher: true,
+    });
     expect((await comment({ kind: "lines", from: 1, to: 2 })).status).toBe(201);
-    expect((await comment({ kind: "moment", tick: 32 * 960 }, wren)).body.comment).toMatchObject({ isTeacher: false, anchor: { kind: "moment", tick: 30_720 } });
+    expect((await comment({ kind: "moment", tick: 32 * 960 }, wren)).body.comment).toMatchObject({
+      isTeacher: false,
+      anchor: { kind: "moment", tick: 30_720 },
+    });
     expect((await detail(wren)).body.comments).toHaveLength(3);
   });
 
@@ -115,17 +180,26 @@ describe("POST /api/submissions/:submissionId/comments", () => {
 });
 
 describe("DELETE /api/comments/:commentId", () => {
-  const remove = (id: string, as: string) => server.call(contracts.marking.deleteComment, { params: { commentId: id as CommentId } }, { as });
+  const remove = (id: string, as: string) =>
+    server.call(contracts.marking.deleteComment, { params: { commentId: id } }, { as });
 
   it("takes one's own back, once", async () => {
-    const own = buildComment(server.db, { submissionId: submission.id, versionId: submission.versionId, authorId: wren });
+    const own = buildComment(server.db, {
+      submissionId: submission.id,
+      versionId: submission.versionId,
+      authorId: wren,
+    });
     expect((await remove(own.id, wren)).status).toBe(204);
     expect((await detail(teacher)).body.comments).toEqual([]);
     expect((await remove(own.id, wren)).status).toBe(404);
   });
 
   it("answers not-allowed for another's that one can see, not-found for one that one can not", async () => {
-    const others = buildComment(server.db, { submissionId: submission.id, versionId: submission.versionId, authorId: teacher });
+    const others = buildComment(server.db, {
+      submissionId: submission.id,
+      versionId: submission.versionId,
+      authorId: teacher,
+    });
     expect((await remove(others.id, wren)).status).toBe(403);
     expect((await remove(others.id, ash)).status).toBe(404);
     expect(server.db.select().from(comments).get()?.deletedAt).toBeNull();
@@ -133,7 +207,8 @@ describe("DELETE /api/comments/:commentId", () => {
 });
 
 describe("PUT /api/submissions/:submissionId/mark", () => {
-  const save = (levels: Record<string, number>, as = teacher) => server.call(contracts.marking.saveMark, { ...of(), body: { levels, note: "Good rhythm." } }, { as });
+  const save = (levels: Record<string, number>, as = teacher) =>
+    server.call(contracts.marking.saveMark, { ...of(), body: { levels, note: "Good rhythm." } }, { as });
 
   it("counts points and saves over an earlier mark", async () => {
     expect((await save({ timing: 2 })).body.mark).toMatchObject({ got: 2, of: 8, isReleased: false });
@@ -156,7 +231,8 @@ describe("PUT /api/submissions/:submissionId/mark", () => {
 });
 
 describe("POST /api/submissions/:submissionId/send-back", () => {
-  const sendBack = (as = teacher) => server.call(contracts.marking.sendBack, { ...of(), body: { note: "Let the roof breathe." } }, { as });
+  const sendBack = (as = teacher) =>
+    server.call(contracts.marking.sendBack, { ...of(), body: { note: "Let the roof breathe." } }, { as });
 
   it("asks for another pass with the note among the comments, and keeps history", async () => {
     expect((await sendBack()).body).toEqual({ state: "revise" });
@@ -178,7 +254,9 @@ describe("POST /api/submissions/:submissionId/release", () => {
     buildMark(server.db, { submissionId: submission.id, markedBy: teacher, levels: { timing: 3 } });
     const { status, body } = await release();
     expect(status).toBe(422);
-    expect(body.errors).toEqual([expect.objectContaining({ pointer: "/levels/code", detail: 'Choose a level for "Code".' })]);
+    expect(body.errors).toEqual([
+      expect.objectContaining({ pointer: "/levels/code", detail: 'Choose a level for "Code".' }),
+    ]);
     expect(stateNow()).toBe("submitted");
   });
 
@@ -186,7 +264,13 @@ describe("POST /api/submissions/:submissionId/release", () => {
     buildMark(server.db, { submissionId: submission.id, markedBy: teacher, levels: { timing: 3, code: 4 } });
     expect((await release()).body).toMatchObject({ state: "marked", mark: { got: 7, isReleased: true } });
     expect((await release()).body.type).toBe("/problems/wrong-state");
-    expect(server.db.select().from(auditLog).all().map((row) => row.event)).toContain("mark-released");
+    expect(
+      server.db
+        .select()
+        .from(auditLog)
+        .all()
+        .map((row) => row.event),
+    ).toContain("mark-released");
   });
 
   it("answers not-found to other teachers", async () => {
@@ -203,7 +287,13 @@ describe("POST /api/submissions/:submissionId/reopen", () => {
     expect((await reopen()).body).toEqual({ state: "submitted" });
     expect((await detail(wren)).body.mark).toBeNull();
     expect((await detail(teacher)).body.mark).toMatchObject({ got: 7, isReleased: false });
-    expect(server.db.select().from(submissionEvents).all().map((event) => event.state)).toEqual(["submitted", "marked", "submitted"]);
+    expect(
+      server.db
+        .select()
+        .from(submissionEvents)
+        .all()
+        .map((event) => event.state),
+    ).toEqual(["submitted", "marked", "submitted"]);
   });
 
   it("answers wrong-state for work that waits already, not-found to others", async () => {

@@ -8,7 +8,15 @@ import type { Actor } from "../../http/actor.ts";
 import { appendAudit } from "../../identity/audit-log.ts";
 import { insertSubmissionEvent } from "../../work/work.queries.ts";
 import { presentMark } from "./marking.presenter.ts";
-import { findMark, insertComment, saveMarkRow, setReleased, setState, type SubmissionContext, type SubmissionRow } from "./marking.queries.ts";
+import {
+  findMark,
+  insertComment,
+  saveMarkRow,
+  setReleased,
+  setState,
+  type SubmissionContext,
+  type SubmissionRow,
+} from "./marking.queries.ts";
 import { getRelatedSubmission } from "./relate.ts";
 
 interface MarksDeps {
@@ -20,14 +28,33 @@ interface MarksDeps {
  * Keeps levels and note; nobody but the class's teachers sees them before release. Throws
  * `invalid-request` naming each level of no criterion, `wrong-state` once released, `not-found`.
  */
-export function saveMark({ db, clock }: MarksDeps, actor: Actor, submissionId: string, input: { levels: Record<string, number>; note: string }): Mark {
+export function saveMark(
+  { db, clock }: MarksDeps,
+  actor: Actor,
+  submissionId: string,
+  input: { levels: Record<string, number>; note: string },
+): Mark {
   return inTransaction(db, (tx) => {
     const { submission, assignment } = getRelatedSubmission(tx, actor, submissionId);
-    if (submission.state === "marked") throw new ProblemError("wrong-state", { detail: "This mark is released. Open it again to change it." });
+    if (submission.state === "marked")
+      throw new ProblemError("wrong-state", { detail: "This mark is released. Open it again to change it." });
     const known = new Set(assignment.rubric.map((criterion) => criterion.id));
     const unknown = Object.keys(input.levels).filter((criterionId) => !known.has(criterionId));
-    refuseFields(unknown.map((id) => ({ pointer: `/levels/${id}`, code: "custom", detail: `The rubric has no criterion "${id}".` })));
-    saveMarkRow(tx, { submissionId, levels: input.levels, note: input.note, markedBy: actor.userId, savedAt: clock.now(), releasedAt: null });
+    refuseFields(
+      unknown.map((id) => ({
+        pointer: `/levels/${id}`,
+        code: "custom",
+        detail: `The rubric has no criterion "${id}".`,
+      })),
+    );
+    saveMarkRow(tx, {
+      submissionId,
+      levels: input.levels,
+      note: input.note,
+      markedBy: actor.userId,
+      savedAt: clock.now(),
+      releasedAt: null,
+    });
     const mark = findMark(tx, submissionId);
     if (!mark) throw new Error("A mark that was saved is found.");
     return presentMark(assignment.rubric, mark);
@@ -56,14 +83,24 @@ export function sendBack(deps: MarksDeps, actor: Actor, submissionId: string, no
  * Releases the mark to the authors. Throws `invalid-request` naming every criterion without a level,
  * `wrong-state` for work that does not wait for a mark, `not-found`.
  */
-export function releaseMark({ db, clock }: MarksDeps, actor: Actor, submissionId: string): { state: WorkState; mark: Mark } {
+export function releaseMark(
+  { db, clock }: MarksDeps,
+  actor: Actor,
+  submissionId: string,
+): { state: WorkState; mark: Mark } {
   return inTransaction(db, (tx) => {
     const context = getRelatedSubmission(tx, actor, submissionId);
     assertState(context.submission, ["submitted"], "Only work that waits for a mark can be released.");
     const { rubric } = context.assignment;
     const levels = findMark(tx, submissionId)?.levels ?? {};
     const open = rubric.filter((criterion) => levels[criterion.id] === undefined);
-    refuseFields(open.map(({ id, name }) => ({ pointer: `/levels/${id}`, code: "custom", detail: `Choose a level for "${name}".` })));
+    refuseFields(
+      open.map(({ id, name }) => ({
+        pointer: `/levels/${id}`,
+        code: "custom",
+        detail: `Choose a level for "${name}".`,
+      })),
+    );
     setReleased(tx, submissionId, clock.now());
     const state = changeState(tx, clock, actor, context, "marked", null);
     appendAudit(tx, { at: clock.now(), actorId: actor.userId, event: "mark-released", subject: submissionId });
@@ -83,9 +120,23 @@ export function reopenSubmission({ db, clock }: MarksDeps, actor: Actor, submiss
   });
 }
 
-function changeState(db: Db, clock: Clock, actor: Actor, { submission }: SubmissionContext, state: SubmissionRow["state"], note: string | null): WorkState {
+function changeState(
+  db: Db,
+  clock: Clock,
+  actor: Actor,
+  { submission }: SubmissionContext,
+  state: SubmissionRow["state"],
+  note: string | null,
+): WorkState {
   setState(db, submission.id, state);
-  insertSubmissionEvent(db, { submissionId: submission.id, versionId: submission.versionId, state, by: actor.userId, note, at: clock.now() });
+  insertSubmissionEvent(db, {
+    submissionId: submission.id,
+    versionId: submission.versionId,
+    state,
+    by: actor.userId,
+    note,
+    at: clock.now(),
+  });
   return state;
 }
 

@@ -5,7 +5,11 @@ import { isAuthor, listClassRelations } from "../../work/relations.queries.ts";
 import { getSubmission, type SubmissionContext } from "./marking.queries.ts";
 
 /** A submission that the caller may see, and how they stand to it. Throws `not-found`. */
-export function getRelatedSubmission(db: Db, actor: Actor, submissionId: string): SubmissionContext & { relations: Relation[] } {
+export function getRelatedSubmission(
+  db: Db,
+  actor: Actor,
+  submissionId: string,
+): SubmissionContext & { relations: Relation[] } {
   const row = getSubmission(db, submissionId);
   const relations = listClassRelations(db, actor.userId, row.assignment.classId);
   if (isAuthor(db, actor.userId, row.show.id)) relations.push("author");

@@ -4,7 +4,12 @@ import type { Db } from "../../db/connection.ts";
 import { listSongFacts } from "../../event/song.queries.ts";
 import { presentRibbonFace } from "../../show-runs/ribbon-blob.ts";
 import { listLatestRuns } from "../../show-runs/runs.queries.ts";
-import { listAuthorNames, listLatestForwards, listSubmissionsByShow, type SubmissionRow } from "../../work/work.queries.ts";
+import {
+  listAuthorNames,
+  listLatestForwards,
+  listSubmissionsByShow,
+  type SubmissionRow,
+} from "../../work/work.queries.ts";
 import type { DraftRow, ShowWithDraft } from "./shows.queries.ts";
 
 /** Shows for a list: authors, state of the work and the face of the last good run are fetched once for all. */
@@ -13,8 +18,14 @@ export function presentShows(db: Db, rows: readonly ShowWithDraft[]): ShowSummar
   const songs = listSongFacts(db);
   const authors = listAuthorNames(db, ids);
   const submissions = listSubmissionsByShow(db, ids);
-  const forwards = listLatestForwards(db, [...submissions.values()].map((submission) => submission.id));
-  const runs = listLatestRuns(db, [...submissions.values()].map((submission) => submission.versionId));
+  const forwards = listLatestForwards(
+    db,
+    [...submissions.values()].map((submission) => submission.id),
+  );
+  const runs = listLatestRuns(
+    db,
+    [...submissions.values()].map((submission) => submission.versionId),
+  );
   return rows.map(({ show, draft, assignmentTitle }) => {
     const submission = submissions.get(show.id);
     const song = songs.get(show.songId);

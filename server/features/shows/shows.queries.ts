@@ -45,16 +45,32 @@ export function findAssignment(db: Db, assignmentId: string): typeof assignments
 
 export function insertShow(
   db: Db,
-  row: { readonly show: typeof shows.$inferInsert & { id: string }; readonly authorId: string; readonly source: string; readonly ribbon: Buffer | null },
+  row: {
+    readonly show: typeof shows.$inferInsert & { id: string };
+    readonly authorId: string;
+    readonly source: string;
+    readonly ribbon: Buffer | null;
+  },
 ): void {
   db.insert(shows).values(row.show).run();
   db.insert(showAuthors).values({ showId: row.show.id, userId: row.authorId }).run();
   db.insert(drafts)
-    .values({ showId: row.show.id, revision: 0, source: row.source, savedAt: row.show.createdAt, savedBy: row.authorId, ribbon: row.ribbon })
+    .values({
+      showId: row.show.id,
+      revision: 0,
+      source: row.source,
+      savedAt: row.show.createdAt,
+      savedBy: row.authorId,
+      ribbon: row.ribbon,
+    })
     .run();
 }
 
-export function updateShow(db: Db, showId: string, change: Partial<Pick<ShowRow, "title" | "isArchived" | "seed">>): void {
+export function updateShow(
+  db: Db,
+  showId: string,
+  change: Partial<Pick<ShowRow, "title" | "isArchived" | "seed">>,
+): void {
   if (Object.keys(change).length > 0) db.update(shows).set(change).where(eq(shows.id, showId)).run();
 }
 
@@ -65,7 +81,11 @@ export function getDraft(db: Db, showId: string): DraftRow {
   return row;
 }
 
-export function updateDraft(db: Db, showId: string, change: Pick<DraftRow, "revision" | "source" | "savedAt" | "savedBy">): void {
+export function updateDraft(
+  db: Db,
+  showId: string,
+  change: Pick<DraftRow, "revision" | "source" | "savedAt" | "savedBy">,
+): void {
   db.update(drafts).set(change).where(eq(drafts.showId, showId)).run();
 }
 

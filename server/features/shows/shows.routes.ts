@@ -2,7 +2,15 @@ import type { showsContract } from "../../../shared/contracts/shows.ts";
 import type { FeatureDeps } from "../../deps.ts";
 import type { Handlers } from "../../http/mount.ts";
 import { createDraftRibbons } from "../../show-runs/draft-ribbons.ts";
-import { changeShow, createShow, duplicateShow, getShowDetail, getVersionDetail, listOwnShows, saveDraft } from "./shows.service.ts";
+import {
+  changeShow,
+  createShow,
+  duplicateShow,
+  getShowDetail,
+  getVersionDetail,
+  listOwnShows,
+  saveDraft,
+} from "./shows.service.ts";
 
 /** The handlers of the shows contract. A save answers at once; its ribbon follows in the background. */
 export function createShowsHandlers(deps: FeatureDeps): Handlers<typeof showsContract> {

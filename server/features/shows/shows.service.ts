@@ -15,7 +15,18 @@ import { findLatestRun, findVersion, listLatestRuns } from "../../show-runs/runs
 import { fieldProblem } from "../../work/field-problem.ts";
 import { listClassRelations, listShowRelations, listVersionRelations } from "../../work/relations.queries.ts";
 import { presentDraft, presentShow, presentShows } from "./shows.presenter.ts";
-import { findAssignment, getDraft, getShow, insertShow, listShowsOf, listShowTitles, listVersions, type ShowWithDraft, updateDraft, updateShow } from "./shows.queries.ts";
+import {
+  findAssignment,
+  getDraft,
+  getShow,
+  insertShow,
+  listShowsOf,
+  listShowTitles,
+  listVersions,
+  type ShowWithDraft,
+  updateDraft,
+  updateShow,
+} from "./shows.queries.ts";
 import { firstScript } from "./first-script.ts";
 
 interface ShowsDeps {
@@ -32,16 +43,28 @@ export function listOwnShows(db: Db, actor: Actor, isArchived: boolean): ShowSum
  * Starts a show with a first line to run. Throws `not-found` when the assignment is of a class that
  * the caller is not in, `invalid-request` when the song is unknown or not the assignment's.
  */
-export function createShow({ db, clock }: ShowsDeps, actor: Actor, input: { title: string; songId: string; assignmentId: string | null }): ShowSummary {
+export function createShow(
+  { db, clock }: ShowsDeps,
+  actor: Actor,
+  input: { title: string; songId: string; assignmentId: string | null },
+): ShowSummary {
   const song = findSong(db, input.songId);
   if (!song) throw fieldProblem("/songId", "There is no such song. Choose one from the list.");
   if (input.assignmentId !== null) {
     const assignment = findAssignment(db, input.assignmentId);
-    if (!assignment || !listClassRelations(db, actor.userId, assignment.classId).includes("class-member")) throw new ProblemError("not-found");
+    if (!assignment || !listClassRelations(db, actor.userId, assignment.classId).includes("class-member"))
+      throw new ProblemError("not-found");
     if (assignment.songId !== song.id) throw fieldProblem("/songId", "This assignment asks for another song.");
   }
   return inTransaction(db, (tx) => {
-    const show = { id: newId(), title: input.title, songId: song.id, assignmentId: input.assignmentId, seed: newSeed(), createdAt: clock.now() };
+    const show = {
+      id: newId(),
+      title: input.title,
+      songId: song.id,
+      assignmentId: input.assignmentId,
+      seed: newSeed(),
+      createdAt: clock.now(),
+    };
     insertShow(tx, { show, authorId: actor.userId, source: firstScript(song.title), ribbon: null });
     return presentShow(tx, getShow(tx, show.id));
   });
@@ -51,7 +74,10 @@ export function createShow({ db, clock }: ShowsDeps, actor: Actor, input: { titl
 export function getShowDetail(db: Db, actor: Actor, showId: string): ShowDetail {
   const row = getRelatedShow(db, actor, showId);
   const versions = listVersions(db, showId);
-  const runs = listLatestRuns(db, versions.map((version) => version.id));
+  const runs = listLatestRuns(
+    db,
+    versions.map((version) => version.id),
+  );
   const seconds = listSongFacts(db).get(row.show.songId)?.seconds ?? 0;
   return {
     show: presentShow(db, row),
@@ -74,7 +100,10 @@ export function changeShow(
     const forward = presentShow(tx, getShow(tx, showId)).forwardState;
     if (change.title !== undefined && change.title !== show.title && forward !== null && forward !== "declined") {
       // The title was looked at when the show was approved; the programme prints it.
-      throw fieldProblem("/title", "This show is with the event under this title. Ask your teacher if it has to change.");
+      throw fieldProblem(
+        "/title",
+        "This show is with the event under this title. Ask your teacher if it has to change.",
+      );
     }
     updateShow(tx, showId, {
       ...(change.title === undefined ? {} : { title: change.title }),
@@ -91,7 +120,14 @@ export function duplicateShow({ db, clock }: ShowsDeps, actor: Actor, showId: st
   return inTransaction(db, (tx) => {
     const { show, draft } = getRelatedShow(tx, actor, showId);
     const title = copyTitle(show.title, listShowTitles(tx, actor.userId));
-    const copy = { id: newId(), title, songId: show.songId, assignmentId: null, seed: show.seed, createdAt: clock.now() };
+    const copy = {
+      id: newId(),
+      title,
+      songId: show.songId,
+      assignmentId: null,
+      seed: show.seed,
+      createdAt: clock.now(),
+    };
     insertShow(tx, { show: copy, authorId: actor.userId, source: draft.source, ribbon: draft.ribbon });
     return presentShow(tx, getShow(tx, copy.id));
   });
@@ -120,7 +156,8 @@ export function saveDraft(
       updateDraft(tx, showId, saved);
       return { revision: saved.revision, savedAt: saved.savedAt };
     }
-    const isRepeat = held.revision === input.baseRevision + 1 && held.source === input.source && held.savedBy === actor.userId;
+    const isRepeat =
+      held.revision === input.baseRevision + 1 && held.source === input.source && held.savedBy === actor.userId;
     if (isRepeat) return { revision: held.revision, savedAt: held.savedAt };
     throw new ProblemError("draft-conflict", {
       detail: "The server holds another text. Compare the two and keep what you want.",

@@ -1,9 +1,18 @@
 import { eq } from "drizzle-orm";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { contracts } from "../../../shared/contracts/index.ts";
-import type { AssignmentId, ShowId, SongId, VersionId } from "../../../shared/ids.ts";
 import { drafts, showVersions } from "../../db/schema/index.ts";
-import { buildAssignment, buildClass, buildForward, buildShow, buildSong, buildSquare, buildSubmission, buildUser, buildVersion } from "../../../tests/support/factories.ts";
+import {
+  buildAssignment,
+  buildClass,
+  buildForward,
+  buildShow,
+  buildSong,
+  buildSquare,
+  buildSubmission,
+  buildUser,
+  buildVersion,
+} from "../../../tests/support/factories.ts";
 import { BROKEN_SOURCE } from "../../../tests/support/fake-runs.ts";
 import { createTestServer, type TestServer } from "../../../tests/support/test-server.ts";
 
@@ -25,15 +34,26 @@ beforeEach(() => {
 });
 afterEach(() => server.dispose());
 
-const ofShow = (id: string) => ({ params: { showId: id as ShowId } });
+const ofShow = (id: string) => ({ params: { showId: id } });
 const findDraft = (showId: string) => server.db.select().from(drafts).where(eq(drafts.showId, showId)).get();
 
 describe("POST /api/shows", () => {
   it("starts a show with a first line, lists it and draws its ribbon in the background", async () => {
     const song = buildSong(server.db, { title: "Frost" });
-    const { status, body } = await server.call(contracts.shows.create, { body: { title: "Lanterns", songId: song.id as SongId } }, { as: wren });
+    const { status, body } = await server.call(
+      contracts.shows.create,
+      { body: { title: "Lanterns", songId: song.id } },
+      { as: wren },
+    );
     expect(status).toBe(201);
-    expect(body.show).toMatchObject({ title: "Lanterns", songTitle: "Frost", seconds: 16, workState: null, forwardState: null, assignmentId: null });
+    expect(body.show).toMatchObject({
+      title: "Lanterns",
+      songTitle: "Frost",
+      seconds: 16,
+      workState: null,
+      forwardState: null,
+      assignmentId: null,
+    });
     expect(findDraft(body.show.id)?.source).toContain("square.all.pulse(");
     await vi.waitFor(() => expect(findDraft(body.show.id)?.ribbon).not.toBeNull());
     const list = await server.call(contracts.shows.list, { query: {} }, { as: wren });
@@ -43,23 +63,35 @@ describe("POST /api/shows", () => {
 
   it("counts a show for an assignment as working", async () => {
     const assignment = buildAssignment(server.db, { classId });
-    const body = { title: "For class", songId: assignment.songId as SongId, assignmentId: assignment.id as AssignmentId };
+    const body = {
+      title: "For class",
+      songId: assignment.songId,
+      assignmentId: assignment.id,
+    };
     const made = await server.call(contracts.shows.create, { body }, { as: wren });
     expect(made.body.show).toMatchObject({ workState: "working", assignmentTitle: assignment.title });
   });
 
   it("answers not-found for an assignment of another class", async () => {
     const foreign = buildAssignment(server.db);
-    const body = { title: "Mine", songId: foreign.songId as SongId, assignmentId: foreign.id as AssignmentId };
+    const body = { title: "Mine", songId: foreign.songId, assignmentId: foreign.id };
     expect((await server.call(contracts.shows.create, { body }, { as: wren })).status).toBe(404);
   });
 
   it("names the song when it is unknown or not the assignment's", async () => {
-    const unknown = await server.call(contracts.shows.create, { body: { title: "Mine", songId: "nothing" as SongId } }, { as: wren });
+    const unknown = await server.call(
+      contracts.shows.create,
+      { body: { title: "Mine", songId: "nothing" } },
+      { as: wren },
+    );
     expect(unknown.status).toBe(422);
     expect(unknown.body.errors).toEqual([expect.objectContaining({ pointer: "/songId" })]);
     const assignment = buildAssignment(server.db, { classId });
-    const body = { title: "Mine", songId: buildSong(server.db).id as SongId, assignmentId: assignment.id as AssignmentId };
+    const body = {
+      title: "Mine",
+      songId: buildSong(server.db).id,
+      assignmentId: assignment.id,
+    };
     expect((await server.call(contracts.shows.create, { body }, { as: wren })).body.errors[0].pointer).toBe("/songId");
   });
 });
@@ -74,7 +106,8 @@ describe("GET /api/shows/:showId", () => {
       expect(body.draft).toMatchObject({ revision: 4, source: "square.all.on();\n" });
       expect(body.versions).toHaveLength(1);
     }
-    for (const as of [ash, otherTeacher]) expect((await server.call(contracts.shows.get, ofShow(show.id), { as })).status).toBe(404);
+    for (const as of [ash, otherTeacher])
+      expect((await server.call(contracts.shows.get, ofShow(show.id), { as })).status).toBe(404);
   });
 
   it("keeps a show for an assignment from teachers of the author's other classes", async () => {
@@ -88,32 +121,56 @@ describe("GET /api/shows/:showId", () => {
 describe("PATCH /api/shows/:showId", () => {
   it("renames, archives and deals new luck", async () => {
     const show = buildShow(server.db, { authorIds: [wren] });
-    const { status, body } = await server.call(contracts.shows.update, { ...ofShow(show.id), body: { title: "New name", isArchived: true, seed: 9 } }, { as: wren });
+    const { status, body } = await server.call(
+      contracts.shows.update,
+      { ...ofShow(show.id), body: { title: "New name", isArchived: true, seed: 9 } },
+      { as: wren },
+    );
     expect(status).toBe(200);
     expect(body).toMatchObject({ seed: 9, show: { title: "New name", isArchived: true } });
-    expect((await server.call(contracts.shows.list, { query: { archived: "yes" } }, { as: wren })).body.shows).toHaveLength(1);
+    expect(
+      (await server.call(contracts.shows.list, { query: { archived: "yes" } }, { as: wren })).body.shows,
+    ).toHaveLength(1);
     expect((await server.call(contracts.shows.list, { query: {} }, { as: wren })).body.shows).toHaveLength(0);
   });
 
   it("keeps the title of a show that is with the event", async () => {
     const submission = buildSubmission(server.db, { studentId: wren, classId, state: "marked" });
-    buildForward(server.db, { submissionId: submission.id, versionId: submission.versionId, forwardedBy: teacher, state: "approved" });
-    const refused = await server.call(contracts.shows.update, { ...ofShow(submission.showId), body: { title: "Something else" } }, { as: wren });
+    buildForward(server.db, {
+      submissionId: submission.id,
+      versionId: submission.versionId,
+      forwardedBy: teacher,
+      state: "approved",
+    });
+    const refused = await server.call(
+      contracts.shows.update,
+      { ...ofShow(submission.showId), body: { title: "Something else" } },
+      { as: wren },
+    );
     expect(refused.status).toBe(422);
     expect(refused.body.errors[0].pointer).toBe("/title");
   });
 
   it("answers not-found for another's show and invalid-request for an empty title", async () => {
     const show = buildShow(server.db, { authorIds: [wren] });
-    expect((await server.call(contracts.shows.update, { ...ofShow(show.id), body: { title: "Taken" } }, { as: ash })).status).toBe(404);
-    expect((await server.call(contracts.shows.update, { ...ofShow(show.id), body: { title: " " } }, { as: wren })).status).toBe(422);
+    expect(
+      (await server.call(contracts.shows.update, { ...ofShow(show.id), body: { title: "Taken" } }, { as: ash })).status,
+    ).toBe(404);
+    expect(
+      (await server.call(contracts.shows.update, { ...ofShow(show.id), body: { title: " " } }, { as: wren })).status,
+    ).toBe(422);
   });
 });
 
 describe("POST /api/shows/:showId/duplicate", () => {
   it("copies the draft into a free show and tells two copies apart", async () => {
     const assignment = buildAssignment(server.db, { classId });
-    const show = buildShow(server.db, { authorIds: [wren], title: "Lanterns", source: "square.all.on();\n", assignmentId: assignment.id });
+    const show = buildShow(server.db, {
+      authorIds: [wren],
+      title: "Lanterns",
+      source: "square.all.on();\n",
+      assignmentId: assignment.id,
+    });
     const first = await server.call(contracts.shows.duplicate, ofShow(show.id), { as: wren });
     const second = await server.call(contracts.shows.duplicate, ofShow(show.id), { as: wren });
     expect(first.status).toBe(201);
@@ -130,7 +187,15 @@ describe("POST /api/shows/:showId/duplicate", () => {
 
 describe("PUT /api/shows/:showId/draft", () => {
   const save = (showId: string, baseRevision: number, source: string, as = wren, idempotencyKey?: string) =>
-    server.call(contracts.shows.saveDraft, { ...ofShow(showId), body: { baseRevision, source }, ...(idempotencyKey === undefined ? {} : { idempotencyKey }) }, { as });
+    server.call(
+      contracts.shows.saveDraft,
+      {
+        ...ofShow(showId),
+        body: { baseRevision, source },
+        ...(idempotencyKey === undefined ? {} : { idempotencyKey }),
+      },
+      { as },
+    );
 
   it("counts the revision up", async () => {
     const show = buildShow(server.db, { authorIds: [wren] });
@@ -207,7 +272,8 @@ describe("PUT /api/shows/:showId/draft", () => {
       await gate;
       return inner(...args);
     });
-    for (let revision = 1; revision <= 5; revision++) expect((await save(show.id, revision, `text ${revision}\n`)).status).toBe(200);
+    for (let revision = 1; revision <= 5; revision++)
+      expect((await save(show.id, revision, `text ${revision}\n`)).status).toBe(200);
     expect(run).toHaveBeenCalledOnce();
     open();
     await vi.waitFor(() => expect(run).toHaveBeenCalledTimes(2));
@@ -216,7 +282,7 @@ describe("PUT /api/shows/:showId/draft", () => {
 });
 
 describe("GET /api/versions/:versionId", () => {
-  const get = (id: string, as: string) => server.call(contracts.shows.version, { params: { versionId: id as VersionId } }, { as });
+  const get = (id: string, as: string) => server.call(contracts.shows.version, { params: { versionId: id } }, { as });
 
   it("gives the version to its author, their teacher and, once forwarded, the coordinator", async () => {
     const coordinator = buildUser(server.db, { roles: ["coordinator"], schoolId: null }).id;

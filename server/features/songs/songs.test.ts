@@ -19,7 +19,13 @@ const TUNE: MidiFile = {
     {
       name: "bells",
       program: 14,
-      notes: [60, 62, 64, 65, 67, 69, 71, 72].map((pitch, n) => ({ tick: n * 480, ticks: 480, pitch, velocity: 100, channel: 0 })),
+      notes: [60, 62, 64, 65, 67, 69, 71, 72].map((pitch, n) => ({
+        tick: n * 480,
+        ticks: 480,
+        pitch,
+        velocity: 100,
+        channel: 0,
+      })),
     },
   ],
 };
@@ -34,10 +40,16 @@ afterEach(() => server.dispose());
 
 function insertTune(): SongId {
   const bytes = Buffer.from(writeMidi(TUNE));
-  server.db.insert(songs).values({ id: "tune", title: "Two bars", credit: "made for this test", currentBeatMapId: "tune-beats" }).run();
-  server.db.insert(beatMaps).values({ id: "tune-beats", songId: "tune", number: 1, beatMap: buildBeatMap(TUNE), createdAt: 0 }).run();
+  server.db
+    .insert(songs)
+    .values({ id: "tune", title: "Two bars", credit: "made for this test", currentBeatMapId: "tune-beats" })
+    .run();
+  server.db
+    .insert(beatMaps)
+    .values({ id: "tune-beats", songId: "tune", number: 1, beatMap: buildBeatMap(TUNE), createdAt: 0 })
+    .run();
   buildSongFile(server.db, { songId: "tune", bytes });
-  return "tune" as SongId;
+  return "tune";
 }
 
 describe("GET /api/songs", () => {
@@ -58,16 +70,24 @@ describe("GET /api/songs", () => {
 
 describe("GET /api/songs/:songId", () => {
   it("gives the score in seconds beside the beat map", async () => {
-    const { status, body } = await server.call(contracts.songs.get, { params: { songId: insertTune() } }, { as: userId });
+    const { status, body } = await server.call(
+      contracts.songs.get,
+      { params: { songId: insertTune() } },
+      { as: userId },
+    );
     expect(status).toBe(200);
     expect(body.beatMap.beats).toHaveLength(9);
     const [bells] = body.score.tracks;
     expect(bells.instrument).toBe("bells");
-    expect(bells.notes[3]).toMatchObject({ seconds: expect.closeTo(1.5, 9), length: expect.closeTo(0.5, 9), pitch: 65 });
+    expect(bells.notes[3]).toMatchObject({
+      seconds: expect.closeTo(1.5, 9),
+      length: expect.closeTo(0.5, 9),
+      pitch: 65,
+    });
   });
 
   it("answers not-found for an unknown song", async () => {
-    const { status, body } = await server.call(contracts.songs.get, { params: { songId: "nothing" as SongId } }, { as: userId });
+    const { status, body } = await server.call(contracts.songs.get, { params: { songId: "nothing" } }, { as: userId });
     expect(status).toBe(404);
     expect(body.type).toBe("/problems/not-found");
   });

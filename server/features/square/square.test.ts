@@ -1,6 +1,5 @@
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { contracts } from "../../../shared/contracts/index.ts";
-import type { LayoutId } from "../../../shared/ids.ts";
 import { buildSquare, buildUser, buildVersion } from "../../../tests/support/factories.ts";
 import { createTestServer, type TestServer } from "../../../tests/support/test-server.ts";
 
@@ -36,9 +35,9 @@ describe("GET /api/square", () => {
 describe("GET /api/square/layouts/:layoutId", () => {
   it("gives a layout by its id and not-found for another", async () => {
     const layout = buildSquare(server.db);
-    const found = await server.call(contracts.square.layout, { params: { layoutId: layout.id as LayoutId } }, { as: userId });
+    const found = await server.call(contracts.square.layout, { params: { layoutId: layout.id } }, { as: userId });
     expect(found.body.hash).toBe(layout.hash);
-    const missing = await server.call(contracts.square.layout, { params: { layoutId: "nothing" as LayoutId } }, { as: userId });
+    const missing = await server.call(contracts.square.layout, { params: { layoutId: "nothing" } }, { as: userId });
     expect(missing.status).toBe(404);
   });
 });

@@ -29,7 +29,10 @@ function useForget() {
 export function useHandIn(assignmentId: AssignmentId) {
   const forget = useForget();
   return useMutation({
-    mutationFn: ({ idempotencyKey, ...body }: EndpointCall<typeof assignmentsContract.handIn>["body"] & { idempotencyKey: string }) =>
+    mutationFn: ({
+      idempotencyKey,
+      ...body
+    }: EndpointCall<typeof assignmentsContract.handIn>["body"] & { idempotencyKey: string }) =>
       callApi(assignmentsContract.handIn, { params: { assignmentId }, body, idempotencyKey }),
     onSuccess: forget,
   });

@@ -34,7 +34,8 @@ function useEnter() {
 export function useStudentSignIn() {
   const enter = useEnter();
   return useMutation({
-    mutationFn: (body: EndpointCall<typeof authContract.studentSignIn>["body"]) => callApi(authContract.studentSignIn, { body }),
+    mutationFn: (body: EndpointCall<typeof authContract.studentSignIn>["body"]) =>
+      callApi(authContract.studentSignIn, { body }),
     onSuccess: enter,
   });
 }
@@ -42,7 +43,8 @@ export function useStudentSignIn() {
 export function useStaffSignIn() {
   const enter = useEnter();
   return useMutation({
-    mutationFn: (body: EndpointCall<typeof authContract.staffSignIn>["body"]) => callApi(authContract.staffSignIn, { body }),
+    mutationFn: (body: EndpointCall<typeof authContract.staffSignIn>["body"]) =>
+      callApi(authContract.staffSignIn, { body }),
     onSuccess: enter,
   });
 }
@@ -50,7 +52,8 @@ export function useStaffSignIn() {
 export function useRedeemReset() {
   const enter = useEnter();
   return useMutation({
-    mutationFn: (body: EndpointCall<typeof authContract.redeemReset>["body"]) => callApi(authContract.redeemReset, { body }),
+    mutationFn: (body: EndpointCall<typeof authContract.redeemReset>["body"]) =>
+      callApi(authContract.redeemReset, { body }),
     onSuccess: enter,
   });
 }
@@ -70,6 +73,7 @@ export function useSignOut() {
 
 export function useChangePassword() {
   return useMutation({
-    mutationFn: (body: EndpointCall<typeof authContract.changePassword>["body"]) => callApi(authContract.changePassword, { body }),
+    mutationFn: (body: EndpointCall<typeof authContract.changePassword>["body"]) =>
+      callApi(authContract.changePassword, { body }),
   });
 }

@@ -23,7 +23,11 @@ export class DraftSaver implements DraftTransport {
     this.#saved = saved;
   }
 
-  async saveDraft({ baseRevision, source, idempotencyKey }: Parameters<DraftTransport["saveDraft"]>[0]): Promise<SaveAnswer> {
+  async saveDraft({
+    baseRevision,
+    source,
+    idempotencyKey,
+  }: Parameters<DraftTransport["saveDraft"]>[0]): Promise<SaveAnswer> {
     try {
       const { revision } = await callApi(showsContract.saveDraft, {
         params: { showId: this.#showId },

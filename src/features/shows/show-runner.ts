@@ -18,7 +18,10 @@ export class ShowRunner {
 
   constructor(setting: ShowSetting) {
     this.#setting = setting;
-    this.#checker = new Worker(new URL("../../workers/check.worker.ts", import.meta.url), { type: "module", name: "check" });
+    this.#checker = new Worker(new URL("../../workers/check.worker.ts", import.meta.url), {
+      type: "module",
+      name: "check",
+    });
     this.#checks = Comlink.wrap<CheckWorker>(this.#checker);
   }
 

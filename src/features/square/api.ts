@@ -3,12 +3,6 @@ import { squareContract } from "../../../shared/contracts/square.ts";
 import type { LayoutId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
 
-/** The layout that drafts follow now. */
-export const squareQuery = queryOptions({
-  queryKey: ["square", "current"],
-  queryFn: ({ signal }) => callApi(squareContract.current, {}, signal),
-});
-
 /** A numbered layout never changes. */
 export const layoutQuery = (layoutId: LayoutId) =>
   queryOptions({

@@ -46,12 +46,16 @@ export function Colours() {
         <p className="font-head text-7 font-[650]">Taking turns</p>
         <h3>A show with a chorus</h3>
         <p>
-          Body text, with <a href="#type">a link</a>, <strong>strong words</strong>, <em>a stressed one</em> and <code className="rounded-[2px] bg-well px-1 font-mono">wait(0.5)</code>. Łukasz, Åsa and Zoë read well.
+          Body text, with <a href="#type">a link</a>, <strong>strong words</strong>, <em>a stressed one</em> and{" "}
+          <code className="rounded-[2px] bg-well px-1 font-mono">wait(0.5)</code>. Łukasz, Åsa and Zoë read well.
         </p>
         <p className="text-meta text-slate">Meta text in slate: saved 4 minutes ago · 2:24</p>
         <pre className="rounded-sheet whitespace-pre-wrap border border-line bg-card p-3 font-mono text-3">
           <span className="text-syntax-keyword">for</span> <span className="text-syntax-punctuation">(</span>
-          <span className="text-syntax-keyword">const</span> front <span className="text-syntax-keyword">of</span> <span className="text-syntax-object">square</span>.<span className="text-syntax-call">side</span>(<span className="text-syntax-string">&quot;north&quot;</span>)) wait(<span className="text-syntax-number">0.5</span>){" "}
+          <span className="text-syntax-keyword">const</span> front <span className="text-syntax-keyword">of</span>{" "}
+          <span className="text-syntax-object">square</span>.<span className="text-syntax-call">side</span>(
+          <span className="text-syntax-string">&quot;north&quot;</span>)) wait(
+          <span className="text-syntax-number">0.5</span>){" "}
           <span className="text-syntax-comment">{"// one after another"}</span>
         </pre>
       </GallerySection>

@@ -11,7 +11,20 @@ import { showToast } from "../../components/toast-queue.ts";
 import { Tooltip } from "../../components/tooltip.tsx";
 import { GallerySection } from "./gallery-section.tsx";
 
-const TAGS: TagState[] = ["working", "submitted", "revise", "marked", "waiting", "approved", "declined", "scheduled", "ok", "note", "warn", "stop"];
+const TAGS: TagState[] = [
+  "working",
+  "submitted",
+  "revise",
+  "marked",
+  "waiting",
+  "approved",
+  "declined",
+  "scheduled",
+  "ok",
+  "note",
+  "warn",
+  "stop",
+];
 
 const noAct = () => undefined;
 
@@ -60,7 +73,13 @@ export function Controls() {
             label="More"
             actions={[
               { id: "copy", label: "Make a copy", icon: "copy", onAction: noAct },
-              { id: "move", label: "Hand to another class", icon: "send", onAction: noAct, disabledReason: "You teach one class." },
+              {
+                id: "move",
+                label: "Hand to another class",
+                icon: "send",
+                onAction: noAct,
+                disabledReason: "You teach one class.",
+              },
               { id: "delete", label: "Delete the show", icon: "trash", onAction: noAct, tone: "stop" },
             ]}
           />
@@ -96,19 +115,45 @@ export function Controls() {
           You can still hand in; your teacher sees when it came.
         </Notice>
         <Notice tone="stop" title="This show cannot be forwarded yet.">
-          Bar 21 flashes more than three times a second. This is a planning aid: the venue&apos;s safety officer decides.
+          Bar 21 flashes more than three times a second. This is a planning aid: the venue&apos;s safety officer
+          decides.
         </Notice>
         <div className="flex flex-wrap gap-2">
           <Button onPress={() => showToast({ title: "Saved." })}>Say that it is saved</Button>
-          <Button onPress={() => showToast({ tone: "info", title: "Nine Foxes went to the tray.", action: { label: "Undo", onPress: noAct } })}>Offer undo</Button>
-          <Button onPress={() => showToast({ tone: "stop", title: "The mark was not released.", detail: "The network is away. Try again in a minute." })}>Say that it failed</Button>
+          <Button
+            onPress={() =>
+              showToast({
+                tone: "info",
+                title: "Nine Foxes went to the tray.",
+                action: { label: "Undo", onPress: noAct },
+              })
+            }
+          >
+            Offer undo
+          </Button>
+          <Button
+            onPress={() =>
+              showToast({
+                tone: "stop",
+                title: "The mark was not released.",
+                detail: "The network is away. Try again in a minute.",
+              })
+            }
+          >
+            Say that it failed
+          </Button>
         </div>
       </GallerySection>
       <GallerySection title="Tabs and keys">
         <Tabs
           label="Who is signing in"
           tabs={[
-            { id: "student", label: "I am a student", icon: "book", content: <p>Class code, user name, four words.</p> },
+            {
+              id: "student",
+              label: "I am a student",
+              icon: "book",
+              content: <p>Class code, user name, four words.</p>,
+            },
             { id: "staff", label: "I am staff", icon: "people", content: <p>Work e-mail and password.</p> },
           ]}
         />

@@ -31,21 +31,52 @@ export function Fields() {
           <TextField label="Class code" isMono defaultValue="TARN-7B" />
           <TextField label="User name" defaultValue="wren" autoComplete="username" />
           <div>
-            <TextField label="Your four words" defaultValue="kettle river owl" end={<IconButton icon="eye" label="Show the words" isPressed />} hint="Each word fills one bar." />
+            <TextField
+              label="Your four words"
+              defaultValue="kettle river owl"
+              end={<IconButton icon="eye" label="Show the words" isPressed />}
+              hint="Each word fills one bar."
+            />
             <ProgressSteps total={4} done={3} isWide ground="paper" label="3 of 4 words typed" className="mt-2" />
           </div>
-          <Select label="Song" placeholder="Choose a song" options={[{ value: "bells", label: "Quillhaven Bells" }, { value: "waltz", label: "Tea Room Waltz" }]} />
-          <TextField label="Due date" type="date" error="Choose a day after today." id="gallery-due" defaultValue="2026-11-20" />
+          <Select
+            label="Song"
+            placeholder="Choose a song"
+            options={[
+              { value: "bells", label: "Quillhaven Bells" },
+              { value: "waltz", label: "Tea Room Waltz" },
+            ]}
+          />
+          <TextField
+            label="Due date"
+            type="date"
+            error="Choose a day after today."
+            id="gallery-due"
+            defaultValue="2026-11-20"
+          />
           <TextField label="Room" isOptional placeholder="Room 12" />
-          <TextArea label="To Wren and Idris" defaultValue="The foxes really run. For the next pass: what wakes them in bars 1 to 4?" className="col-span-full" />
+          <TextArea
+            label="To Wren and Idris"
+            defaultValue="The foxes really run. For the next pass: what wakes them in bars 1 to 4?"
+            className="col-span-full"
+          />
           <div className="space-y-2">
             <Checkbox label="Gentle preview" defaultChecked hint="Softens quick changes of brightness." />
             <Checkbox label="Show my name on the programme" />
             <Checkbox label="Locked by your school" disabled defaultChecked />
           </div>
-          <RadioRow legend="Fits the song" legendEnd={level ? `${Number(level) + 1} of 4` : "not chosen"} options={LEVELS} value={level} onChange={setLevel} />
+          <RadioRow
+            legend="Fits the song"
+            legendEnd={level ? `${Number(level) + 1} of 4` : "not chosen"}
+            options={LEVELS}
+            value={level}
+            onChange={setLevel}
+          />
         </div>
-        <ErrorSummary attempt={0} errors={[{ fieldId: "gallery-due", message: "Due date: choose a day after today." }]} />
+        <ErrorSummary
+          attempt={0}
+          errors={[{ fieldId: "gallery-due", message: "Due date: choose a day after today." }]}
+        />
       </GallerySection>
       <GallerySection title="Dialogs">
         <div className="flex flex-wrap gap-2">
@@ -67,7 +98,14 @@ export function Fields() {
         >
           <TextField label="Title" hint="Up to 40 characters; the town reads it." />
         </Dialog>
-        <ConfirmDialog isOpen={open === "confirm"} title="Delete Nine Foxes?" confirmLabel="Delete the show" cancelLabel="Keep it" onConfirm={close} onCancel={close}>
+        <ConfirmDialog
+          isOpen={open === "confirm"}
+          title="Delete Nine Foxes?"
+          confirmLabel="Delete the show"
+          cancelLabel="Keep it"
+          onConfirm={close}
+          onCancel={close}
+        >
           <p>The script and its 3 versions go. This cannot be undone.</p>
         </ConfirmDialog>
       </GallerySection>

@@ -37,23 +37,49 @@ export function Pictures() {
         {SIZES.map((size) => (
           <div key={size}>
             <p className="mb-1 text-meta text-slate">{size}</p>
-            <Ribbon ribbon={SAMPLE_RIBBONS.foxes} label={`Nine Foxes, size ${size}`} size={size} isSquare={size === "marking"} now={size === "reading" ? 0.64 : null} />
+            <Ribbon
+              ribbon={SAMPLE_RIBBONS.foxes}
+              label={`Nine Foxes, size ${size}`}
+              size={size}
+              isSquare={size === "marking"}
+              now={size === "reading" ? 0.64 : null}
+            />
           </div>
         ))}
       </GallerySection>
       <GallerySection title="Show cards">
         <ul className="grid grid-cols-[repeat(auto-fill,minmax(15rem,1fr))] gap-4 max-wide:grid-cols-2 max-wide:gap-3">
           <li>
-            <ShowCard ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.foxes} label="" />} title="Nine Foxes" to="/design" line="with Idris · 2:24" tag={<Tag state="scheduled">On the square</Tag>} />
+            <ShowCard
+              ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.foxes} label="" />}
+              title="Nine Foxes"
+              to="/design"
+              line="with Idris · 2:24"
+              tag={<Tag state="scheduled">On the square</Tag>}
+            />
           </li>
           <li>
-            <ShowCard ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.suns} label="" />} title="Ten Small Suns" to="/design" line="saved 4 minutes ago" tag={<Tag state="working" />} />
+            <ShowCard
+              ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.suns} label="" />}
+              title="Ten Small Suns"
+              to="/design"
+              line="saved 4 minutes ago"
+              tag={<Tag state="working" />}
+            />
           </li>
           <li>
-            <ShowCard ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.rain} label="" />} title="Rain on the Baths" to="/design" line="my own idea · 1:52" />
+            <ShowCard
+              ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.rain} label="" />}
+              title="Rain on the Baths"
+              to="/design"
+              line="my own idea · 1:52"
+            />
           </li>
           <li>
-            <SkeletonGroup label="Loading a show" className="h-full rounded-sheet border border-line bg-card p-2.5 shadow-sheet-1">
+            <SkeletonGroup
+              label="Loading a show"
+              className="h-full rounded-sheet border border-line bg-card p-2.5 shadow-sheet-1"
+            >
               <Skeleton shape="ribbon" />
               <Skeleton className="mt-4 ml-1 w-2/3" />
               <Skeleton className="mt-3 ml-1 w-1/2" />
@@ -73,8 +99,19 @@ export function Pictures() {
               </LinkButton>
             }
           />
-          <ListRow title="One song, two moods" line="Handed in yesterday, 14:10" to="/design" isWholeRow tag={<Tag state="submitted" />} />
-          <ListRow isHere title="Wren, Idris" line="yesterday" ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.suns} label="" size="queue" />} />
+          <ListRow
+            title="One song, two moods"
+            line="Handed in yesterday, 14:10"
+            to="/design"
+            isWholeRow
+            tag={<Tag state="submitted" />}
+          />
+          <ListRow
+            isHere
+            title="Wren, Idris"
+            line="yesterday"
+            ribbon={<Ribbon ribbon={SAMPLE_RIBBONS.suns} label="" size="queue" />}
+          />
           <ListRow
             lead={<DateLeaf dateTime="2026-12-11" weekday="Fri" day="11" label="Friday 11 December" />}
             title="Nine Foxes"

@@ -32,13 +32,37 @@ const SUN: Pattern = (row, moment) => {
   const wave = Math.max(0, Math.sin(row * 0.45 - moment * 60));
   return [moment < 0.25 ? trail((moment * 320 - row + 400) % ROWS, 5) : wave * wave, Math.floor(row / 10)];
 };
-const RAIN: Pattern = (row, moment) => [Math.max(trail((moment * 200 - row + 400) % ROWS, 5), trail((row + moment * 150 + 400) % ROWS, 5)), moment > 0.4 && moment < 0.7 ? 2 : row % 2];
+const RAIN: Pattern = (row, moment) => [
+  Math.max(trail((moment * 200 - row + 400) % ROWS, 5), trail((row + moment * 150 + 400) % ROWS, 5)),
+  moment > 0.4 && moment < 0.7 ? 2 : row % 2,
+];
 const FIRST: Pattern = (row, moment) => (moment < 0.3 ? [trail((moment * 140 - row + 400) % ROWS, 4), 0] : [0, 0]);
 
 /** Invented ribbons for the gallery. */
 export const SAMPLE_RIBBONS = {
-  foxes: buildSample([[255, 138, 60], [255, 90, 74], [255, 191, 63]], FOX),
-  suns: buildSample([[255, 191, 63], [255, 138, 60], [255, 215, 154]], SUN),
-  rain: buildSample([[95, 155, 255], [191, 227, 255], [63, 201, 176]], RAIN),
+  foxes: buildSample(
+    [
+      [255, 138, 60],
+      [255, 90, 74],
+      [255, 191, 63],
+    ],
+    FOX,
+  ),
+  suns: buildSample(
+    [
+      [255, 191, 63],
+      [255, 138, 60],
+      [255, 215, 154],
+    ],
+    SUN,
+  ),
+  rain: buildSample(
+    [
+      [95, 155, 255],
+      [191, 227, 255],
+      [63, 201, 176],
+    ],
+    RAIN,
+  ),
   first: buildSample([[255, 191, 63]], FIRST),
 };

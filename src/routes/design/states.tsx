@@ -13,7 +13,11 @@ const retry = () => undefined;
 export function States() {
   return (
     <GallerySection title="Empty, loading, failed">
-      <EmptyState title="No show yet" picture={<Ribbon ribbon={SAMPLE_RIBBONS.first} label="" />} action={<Button icon="plus">New show</Button>}>
+      <EmptyState
+        title="No show yet"
+        picture={<Ribbon ribbon={SAMPLE_RIBBONS.first} label="" />}
+        action={<Button icon="plus">New show</Button>}
+      >
         Your first show begins in lesson 1. Its first threads will look like this.
       </EmptyState>
       <EmptyState title="Nothing waits for marking" icon="tick">
@@ -21,7 +25,13 @@ export function States() {
       </EmptyState>
       <div className="grid grid-cols-2 gap-4 max-wide:grid-cols-1">
         <Card as="section" aria-labelledby="gallery-card">
-          <CardHeader titleId="gallery-card" title="Who needs you" detail="3 hands" actions={<Button size="small">All seen</Button>} level={3} />
+          <CardHeader
+            titleId="gallery-card"
+            title="Who needs you"
+            detail="3 hands"
+            actions={<Button size="small">All seen</Button>}
+            level={3}
+          />
           <div className="p-4">A card with a head.</div>
         </Card>
         <Card isLifted isPadded>

@@ -46,7 +46,8 @@ const MOST_TABS = 400;
 
 /** The next stop of the focus. In the editor Tab indents; Escape first lets it out. */
 async function pressTab(page: Page): Promise<void> {
-  if (await page.evaluate((editor) => document.activeElement?.matches(editor) ?? false, EDITOR)) await page.keyboard.press("Escape");
+  if (await page.evaluate((editor) => document.activeElement?.matches(editor) ?? false, EDITOR))
+    await page.keyboard.press("Escape");
   await page.keyboard.press("Tab");
 }
 

@@ -34,7 +34,12 @@ async function read<T>(page: Page, path: string): Promise<T> {
 
 interface Listed {
   shows: { id: string; title: string; assignmentId: string | null }[];
-  assignments: { id: string; title: string; firstSubmissionId?: string | null; mine?: { submissionId: string | null } | null }[];
+  assignments: {
+    id: string;
+    title: string;
+    firstSubmissionId?: string | null;
+    mine?: { submissionId: string | null } | null;
+  }[];
   classes: { id: string }[];
   lessons: { id: string }[];
   forwards: { id: string; state: string }[];
@@ -52,8 +57,20 @@ const openMenu = (name: string) => async (page: Page) => {
 
 /** Every path of the route table has its entry here; the accessibility test fails for one that has none. */
 export const PAGES: Readonly<Record<string, PageCheck>> = {
-  "/": { as: "nobody", open: "/", empty: { none: "It leads on to another page." }, error: { none: "It leads on to another page." }, dialog: NO_DIALOG },
-  "/sign-in": { as: "nobody", open: "/sign-in", empty: { none: "A form is never empty of its fields." }, error: "/api/auth/student-sign-in", dialog: NO_DIALOG },
+  "/": {
+    as: "nobody",
+    open: "/",
+    empty: { none: "It leads on to another page." },
+    error: { none: "It leads on to another page." },
+    dialog: NO_DIALOG,
+  },
+  "/sign-in": {
+    as: "nobody",
+    open: "/sign-in",
+    empty: { none: "A form is never empty of its fields." },
+    error: "/api/auth/student-sign-in",
+    dialog: NO_DIALOG,
+  },
   "/home": {
     as: "student",
     open: "/home",
@@ -64,11 +81,24 @@ export const PAGES: Readonly<Record<string, PageCheck>> = {
     error: "/api/shows*",
     dialog: openMenu("Wren"),
   },
-  "/shows": { as: "student", open: "/shows", empty: [{ url: "/api/shows*", body: { shows: [] } }], error: "/api/shows*", dialog: openMenu("Wren") },
-  "/shows/new": { as: "student", open: "/shows/new", empty: [{ url: "/api/songs", body: { songs: [] } }], error: "/api/songs", dialog: openMenu("Wren") },
+  "/shows": {
+    as: "student",
+    open: "/shows",
+    empty: [{ url: "/api/shows*", body: { shows: [] } }],
+    error: "/api/shows*",
+    dialog: openMenu("Wren"),
+  },
+  "/shows/new": {
+    as: "student",
+    open: "/shows/new",
+    empty: [{ url: "/api/songs", body: { songs: [] } }],
+    error: "/api/songs",
+    dialog: openMenu("Wren"),
+  },
   "/shows/:showId": {
     as: "student",
-    open: async (page) => `/shows/${first((await read<Listed>(page, "/api/shows")).shows.filter((show) => show.assignmentId !== null)).id}`,
+    open: async (page) =>
+      `/shows/${first((await read<Listed>(page, "/api/shows")).shows.filter((show) => show.assignmentId !== null)).id}`,
     empty: { none: "A show always has a script; an empty one is only a short one." },
     error: "/api/songs/*",
     dialog: openMenu("Hand in"),
@@ -80,7 +110,13 @@ export const PAGES: Readonly<Record<string, PageCheck>> = {
     error: "/api/assignments/*",
     dialog: openMenu("Wren"),
   },
-  "/lessons": { as: "student", open: "/lessons", empty: [{ url: "/api/lessons", body: { lessons: [] } }], error: "/api/lessons", dialog: openMenu("Wren") },
+  "/lessons": {
+    as: "student",
+    open: "/lessons",
+    empty: [{ url: "/api/lessons", body: { lessons: [] } }],
+    error: "/api/lessons",
+    dialog: openMenu("Wren"),
+  },
   "/lessons/:lessonId": {
     as: "student",
     open: async (page) => `/lessons/${first((await read<Listed>(page, "/api/lessons")).lessons).id}`,
@@ -94,13 +130,39 @@ export const PAGES: Readonly<Record<string, PageCheck>> = {
     empty: [
       {
         url: "/api/programme",
-        body: { eventName: "Quillhaven Winter Lights", townName: "Quillhaven", timeZone: "America/New_York", tonight: "2026-12-01", publishedAt: null, nights: [], shows: [] },
+        body: {
+          eventName: "Quillhaven Winter Lights",
+          townName: "Quillhaven",
+          timeZone: "America/New_York",
+          tonight: "2026-12-01",
+          publishedAt: null,
+          nights: [],
+          shows: [],
+        },
       },
     ],
     error: "/api/programme",
     dialog: NO_DIALOG,
   },
-  "/account": { as: "teacher", open: "/account", empty: { none: "A form is never empty of its fields." }, error: NO_REQUEST, dialog: openMenu("Ms Marlow") },
-  "/design": { as: "nobody", open: "/design", empty: { none: "It lists the components." }, error: NO_REQUEST, dialog: NO_DIALOG },
-  "*": { as: "nobody", open: "/nowhere", empty: { none: "It says that nothing is here." }, error: NO_REQUEST, dialog: NO_DIALOG },
+  "/account": {
+    as: "teacher",
+    open: "/account",
+    empty: { none: "A form is never empty of its fields." },
+    error: NO_REQUEST,
+    dialog: openMenu("Ms Marlow"),
+  },
+  "/design": {
+    as: "nobody",
+    open: "/design",
+    empty: { none: "It lists the components." },
+    error: NO_REQUEST,
+    dialog: NO_DIALOG,
+  },
+  "*": {
+    as: "nobody",
+    open: "/nowhere",
+    empty: { none: "It says that nothing is here." },
+    error: NO_REQUEST,
+    dialog: NO_DIALOG,
+  },
 };

@@ -35,7 +35,14 @@ export async function startProduct(options: { dataDir?: string; port?: number } 
   const dataDir = options.dataDir ?? mkdtempSync(path.join(tmpdir(), "duskbell-journey-"));
   const child = spawn(process.execPath, ["--import", "tsx", "server/main.ts"], {
     cwd: ROOT,
-    env: { ...process.env, PORT: String(port), HOST: "127.0.0.1", DATA_DIR: dataDir, LOG_LEVEL: "warn", NODE_ENV: "production" },
+    env: {
+      ...process.env,
+      PORT: String(port),
+      HOST: "127.0.0.1",
+      DATA_DIR: dataDir,
+      LOG_LEVEL: "warn",
+      NODE_ENV: "production",
+    },
     stdio: ["ignore", "pipe", "pipe"],
   });
   let printed = "";

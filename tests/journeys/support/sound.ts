@@ -28,7 +28,10 @@ export async function tapSound(context: BrowserContext): Promise<void> {
           if (context.state !== "running") continue;
           const samples = new Float32Array(tap.fftSize);
           tap.getFloatTimeDomainData(samples);
-          level = Math.max(level, Math.sqrt(samples.reduce((sum, sample) => sum + sample * sample, 0) / samples.length));
+          level = Math.max(
+            level,
+            Math.sqrt(samples.reduce((sum, sample) => sum + sample * sample, 0) / samples.length),
+          );
         }
         return level;
       },

@@ -25,7 +25,11 @@ export function AssignmentRows({ assignments, now }: AssignmentRowsProps) {
             line={`${assignment.songTitle} · ${step.line ?? `due ${presentDue(assignment.dueAt, HERE)}`}`}
             tag={assignment.mine ? <Tag state={assignment.mine.state} /> : null}
             actions={
-              <LinkButton look={step.isUrgent ? "main" : "plain"} to={step.to} aria-label={`${step.label}: ${assignment.title}`}>
+              <LinkButton
+                look={step.isUrgent ? "main" : "plain"}
+                to={step.to}
+                aria-label={`${step.label}: ${assignment.title}`}
+              >
                 {step.label}
               </LinkButton>
             }

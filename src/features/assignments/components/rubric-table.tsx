@@ -10,9 +10,13 @@ export interface RubricTableProps {
 /** The criteria with their four levels, the chosen one marked by a tick and a frame. Narrow, it scrolls by itself. */
 export function RubricTable({ rubric, levels }: RubricTableProps) {
   return (
-    // Scrollable by keyboard, so it must take the focus.
-    // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
-    <div className="overflow-x-auto rounded-sheet border border-line bg-card" tabIndex={0} role="region" aria-label="Rubric">
+    <div
+      className="overflow-x-auto rounded-sheet border border-line bg-card"
+      // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex -- it scrolls, so the keyboard must reach it
+      tabIndex={0}
+      role="region"
+      aria-label="Rubric"
+    >
       <table className="w-full min-w-[44rem] border-collapse text-left">
         <tbody>
           {rubric.map((criterion) => (
@@ -23,7 +27,10 @@ export function RubricTable({ rubric, levels }: RubricTableProps) {
               {criterion.levels.map((level, i) => {
                 const isChosen = levels?.[criterion.id] === i + 1;
                 return (
-                  <td key={level.name} className={`w-1/5 border-l border-line p-3 align-top ${isChosen ? "bg-spruce-tint" : ""}`}>
+                  <td
+                    key={level.name}
+                    className={`w-1/5 border-l border-line p-3 align-top ${isChosen ? "bg-spruce-tint" : ""}`}
+                  >
                     <span className="flex items-center gap-1.5 font-semibold">
                       {isChosen && <Icon name="check" label="chosen" />}
                       {level.name}

@@ -3,7 +3,7 @@ import type { HandInResult } from "../../../../shared/contracts/assignments.ts";
 import { describeHandIn } from "./hand-in.ts";
 
 const result = (fields: Partial<HandInResult>): HandInResult => ({
-  submissionId: "submission-1" as HandInResult["submissionId"],
+  submissionId: "submission-1",
   state: "submitted",
   versionNumber: 2,
   isLate: false,
@@ -15,7 +15,11 @@ const result = (fields: Partial<HandInResult>): HandInResult => ({
 
 describe("describeHandIn", () => {
   it("says only that it is in when there is nothing to remark", () => {
-    expect(describeHandIn(result({}))).toEqual({ tone: "ok", title: "Handed in as version 2.", detail: "Your teacher has it." });
+    expect(describeHandIn(result({}))).toEqual({
+      tone: "ok",
+      title: "Handed in as version 2.",
+      detail: "Your teacher has it.",
+    });
   });
 
   it("names everything the teacher will see", () => {
@@ -24,7 +28,11 @@ describe("describeHandIn", () => {
         isLate: true,
         hashesAgree: false,
         unmet: [{ kind: "loop", atLeast: 1 }],
-        run: { ...result({}).run, isOk: false, findings: [{ rule: "street-flash", severity: "stop", sentence: "", moments: [], lights: [], lines: [] }] },
+        run: {
+          ...result({}).run,
+          isOk: false,
+          findings: [{ rule: "street-flash", severity: "stop", sentence: "", moments: [], lights: [], lines: [] }],
+        },
       }),
     );
     expect(said.tone).toBe("warn");

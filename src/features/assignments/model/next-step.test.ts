@@ -6,11 +6,11 @@ const NOW = Date.UTC(2026, 11, 1, 16);
 const DAY = 86_400_000;
 
 const assignment = (fields: Partial<AssignmentSummary>): AssignmentSummary => ({
-  id: "assignment-1" as AssignmentSummary["id"],
-  classId: "class-1" as AssignmentSummary["classId"],
+  id: "assignment-1",
+  classId: "class-1",
   className: "7B",
   title: "Twelve bars of calm",
-  songId: "frost-fair" as AssignmentSummary["songId"],
+  songId: "frost-fair",
   songTitle: "Frost Fair",
   dueAt: NOW + DAY,
   lateRule: "accept-late",
@@ -19,7 +19,7 @@ const assignment = (fields: Partial<AssignmentSummary>): AssignmentSummary => ({
   ...fields,
 });
 const mine = (state: NonNullable<AssignmentSummary["mine"]>["state"]): AssignmentSummary["mine"] => ({
-  showId: "show-1" as NonNullable<AssignmentSummary["mine"]>["showId"],
+  showId: "show-1",
   showTitle: "Calm",
   state,
   submissionId: null,
@@ -30,7 +30,10 @@ const mine = (state: NonNullable<AssignmentSummary["mine"]>["state"]): Assignmen
 describe("nextStepOf", () => {
   it("asks to begin until the due date, and only to look once hand-in is closed", () => {
     expect(nextStepOf(assignment({}), NOW)).toMatchObject({ label: "Begin", isUrgent: true });
-    expect(nextStepOf(assignment({ dueAt: NOW - 1, lateRule: "closed" }), NOW)).toMatchObject({ label: "Look", line: "hand-in is closed" });
+    expect(nextStepOf(assignment({ dueAt: NOW - 1, lateRule: "closed" }), NOW)).toMatchObject({
+      label: "Look",
+      line: "hand-in is closed",
+    });
   });
 
   it("leads work under way straight to the studio", () => {

@@ -18,7 +18,12 @@ export function nextStepOf(assignment: AssignmentSummary, now: number): NextStep
   const isOver = assignment.dueAt < now;
   const late = isOver ? (assignment.lateRule === "closed" ? "hand-in is closed" : "late work is still taken") : null;
   if (mine === null) {
-    return { label: isOver && assignment.lateRule === "closed" ? "Look" : "Begin", to: page, isUrgent: !isOver, line: late };
+    return {
+      label: isOver && assignment.lateRule === "closed" ? "Look" : "Begin",
+      to: page,
+      isUrgent: !isOver,
+      line: late,
+    };
   }
   switch (mine.state) {
     case "working":
@@ -28,7 +33,12 @@ export function nextStepOf(assignment: AssignmentSummary, now: number): NextStep
     case "revise":
       return { label: "Read and fix", to: page, isUrgent: true, line: comments(mine.commentCount, assignment.dueAt) };
     case "marked":
-      return { label: "Read the mark", to: page, isUrgent: false, line: mine.points ? `${mine.points.got} of ${mine.points.of} points` : null };
+      return {
+        label: "Read the mark",
+        to: page,
+        isUrgent: false,
+        line: mine.points ? `${mine.points.got} of ${mine.points.of} points` : null,
+      };
   }
 }
 
@@ -47,11 +57,20 @@ export interface StudioAction {
 export function studioActionOf(assignment: AssignmentSummary, now: number): StudioAction {
   const { mine } = assignment;
   if (mine !== null) {
-    const words = { working: "Carry on", submitted: "Change and hand in again", revise: "Fix it in the studio", marked: "Open the studio" } as const;
+    const words = {
+      working: "Carry on",
+      submitted: "Change and hand in again",
+      revise: "Fix it in the studio",
+      marked: "Open the studio",
+    } as const;
     return { label: words[mine.state], to: `/shows/${mine.showId}`, reason: null };
   }
   if (assignment.dueAt < now && assignment.lateRule === "closed") {
-    return { label: "Begin", to: null, reason: "The due date is over and hand-in is closed. Ask your teacher if you want to begin now." };
+    return {
+      label: "Begin",
+      to: null,
+      reason: "The due date is over and hand-in is closed. Ask your teacher if you want to begin now.",
+    };
   }
   return { label: "Begin", to: `/shows/new?assignment=${assignment.id}`, reason: null };
 }

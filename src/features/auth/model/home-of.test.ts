@@ -18,7 +18,12 @@ describe("nextPath", () => {
   });
 
   it("never leaves the portal", () => {
-    for (const away of ["https://elsewhere.example", "//elsewhere.example", "/\\elsewhere.example", "javascript:alert(1)"]) {
+    for (const away of [
+      "https://elsewhere.example",
+      "//elsewhere.example",
+      "/\\elsewhere.example",
+      "javascript:alert(1)",
+    ]) {
       expect(next(away)).toBe("/home");
     }
   });

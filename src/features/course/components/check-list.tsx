@@ -17,7 +17,15 @@ export interface CheckListProps {
 }
 
 /** What a step asks for: passed, not yet (with what was seen and one thing to try), or waiting. */
-export function CheckList({ checks, results, isChecking, onCheck, disabledReason, onShowMoment, onShowLine }: CheckListProps) {
+export function CheckList({
+  checks,
+  results,
+  isChecking,
+  onCheck,
+  disabledReason,
+  onShowMoment,
+  onShowLine,
+}: CheckListProps) {
   const passed = results?.filter((result) => result.state === "passed").length ?? 0;
   return (
     <Card as="section" aria-labelledby="checks">
@@ -26,7 +34,13 @@ export function CheckList({ checks, results, isChecking, onCheck, disabledReason
         title="Checks"
         detail={results === null ? `${checks.length} to pass` : `${passed} of ${checks.length} so far`}
         actions={
-          <Button look="main" icon={results === null ? "check" : "turn"} onPress={onCheck} isPending={isChecking} disabledReason={disabledReason}>
+          <Button
+            look="main"
+            icon={results === null ? "check" : "turn"}
+            onPress={onCheck}
+            isPending={isChecking}
+            disabledReason={disabledReason}
+          >
             {results === null ? "Check" : "Check again"}
           </Button>
         }
@@ -38,14 +52,18 @@ export function CheckList({ checks, results, isChecking, onCheck, disabledReason
           return (
             <li key={check.id} className="flex gap-3 border-t border-line px-4 py-3 first:border-t-0">
               {state === "passed" && <Icon name="tick" label="Passed" className="mt-0.5 size-[1.25em] text-spruce" />}
-              {state === "not-yet" && <Icon name="knot" label="Not yet" className="mt-0.5 size-[1.25em] text-lamp-ink" />}
+              {state === "not-yet" && (
+                <Icon name="knot" label="Not yet" className="mt-0.5 size-[1.25em] text-lamp-ink" />
+              )}
               {state === "waiting" && <Icon name="clock" label="Waits" className="mt-0.5 size-[1.25em] text-slate" />}
               <div className="min-w-0 flex-1">
                 <p className={state === "waiting" ? "text-soft" : ""}>
                   {state === "not-yet" && <strong>Not yet: </strong>}
                   <CodeText text={check.text} />
                 </p>
-                {result && state === "not-yet" && <NotYet result={result} onShowMoment={onShowMoment} onShowLine={onShowLine} />}
+                {result && state === "not-yet" && (
+                  <NotYet result={result} onShowMoment={onShowMoment} onShowLine={onShowLine} />
+                )}
               </div>
             </li>
           );
@@ -55,7 +73,11 @@ export function CheckList({ checks, results, isChecking, onCheck, disabledReason
   );
 }
 
-function NotYet({ result, onShowMoment, onShowLine }: { result: CheckResult } & Pick<CheckListProps, "onShowMoment" | "onShowLine">) {
+function NotYet({
+  result,
+  onShowMoment,
+  onShowLine,
+}: { result: CheckResult } & Pick<CheckListProps, "onShowMoment" | "onShowLine">) {
   const { seen, hint, tick, line } = result;
   return (
     <div className="mt-2 bg-lamp-tint px-3.5 py-2.5">

@@ -14,7 +14,13 @@ export interface LessonFrameProps {
   workbench: ReactNode;
 }
 
-const KIND_WORDS = { predict: "Predict", run: "Run", investigate: "Investigate", change: "Change", make: "Make" } as const;
+const KIND_WORDS = {
+  predict: "Predict",
+  run: "Run",
+  investigate: "Investigate",
+  change: "Change",
+  make: "Make",
+} as const;
 
 /** The page of a lesson: the rail of its steps, the text on one side, stage and script on the other. */
 export function LessonFrame({ lesson, here, children, workbench }: LessonFrameProps) {

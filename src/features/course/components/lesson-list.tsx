@@ -31,7 +31,8 @@ export function LessonList({ lessons, isTeacher, nextLessonId }: LessonListProps
               <>
                 {lesson.summary} <span className="whitespace-nowrap">{lesson.minutes} minutes.</span>
                 <span className="mt-1 block">
-                  New words: {lesson.words.map((word, i) => (
+                  New words:{" "}
+                  {lesson.words.map((word, i) => (
                     <span key={word}>
                       {i > 0 && ", "}
                       <code>{word}</code>
@@ -39,13 +40,23 @@ export function LessonList({ lessons, isTeacher, nextLessonId }: LessonListProps
                   ))}
                 </span>
                 {!isTeacher && (
-                  <ProgressSteps className="mt-2" ground="paper" total={total} done={done} label={isDone ? "All steps done" : `${done} of ${total} steps done`} />
+                  <ProgressSteps
+                    className="mt-2"
+                    ground="paper"
+                    total={total}
+                    done={done}
+                    label={isDone ? "All steps done" : `${done} of ${total} steps done`}
+                  />
                 )}
               </>
             }
             tag={!isTeacher && isDone ? <Tag state="ok">Done</Tag> : null}
             actions={
-              <LinkButton look={lesson.id === nextLessonId ? "main" : "plain"} to={`/lessons/${lesson.id}`} aria-label={`${label}: ${lesson.title}`}>
+              <LinkButton
+                look={lesson.id === nextLessonId ? "main" : "plain"}
+                to={`/lessons/${lesson.id}`}
+                aria-label={`${label}: ${lesson.title}`}
+              >
                 {label}
               </LinkButton>
             }

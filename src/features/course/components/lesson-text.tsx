@@ -4,7 +4,9 @@ import { Fragment } from "react";
 export function CodeText({ text }: { text: string }) {
   return (
     <>
-      {text.split("`").map((piece, i) => (i % 2 === 1 ? <code key={i}>{piece}</code> : <Fragment key={i}>{piece}</Fragment>))}
+      {text
+        .split("`")
+        .map((piece, i) => (i % 2 === 1 ? <code key={i}>{piece}</code> : <Fragment key={i}>{piece}</Fragment>))}
     </>
   );
 }

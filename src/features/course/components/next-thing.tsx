@@ -16,7 +16,12 @@ export function NextThing({ lessons }: NextThingProps) {
   const isFirst = lessons.every((each) => stepsDone(each) === 0);
   const here = lesson?.steps[done];
   return (
-    <Card as="section" isLifted aria-labelledby="next-thing" className="grid grid-cols-[1fr_1.15fr] overflow-hidden border-dusk bg-dusk p-0 max-wide:grid-cols-1">
+    <Card
+      as="section"
+      isLifted
+      aria-labelledby="next-thing"
+      className="grid grid-cols-[1fr_1.15fr] overflow-hidden border-dusk bg-dusk p-0 max-wide:grid-cols-1"
+    >
       <div className="on-dusk px-7 py-7 max-wide:order-2 max-wide:px-4 max-wide:py-5">
         <p className="text-on-dusk-soft">{isFirst ? "Start here" : "Next thing to do"}</p>
         {lesson ? (
@@ -29,13 +34,26 @@ export function NextThing({ lessons }: NextThingProps) {
               {here && (
                 <>
                   {" · "}
-                  {done === 0 ? `${lesson.minutes} minutes, ` : `you are on step ${done + 1} of ${lesson.steps.length}, `}
+                  {done === 0
+                    ? `${lesson.minutes} minutes, `
+                    : `you are on step ${done + 1} of ${lesson.steps.length}, `}
                   <em>{here.kind}</em>
                 </>
               )}
             </p>
-            <ProgressSteps className="mt-4" total={lesson.steps.length} done={done} label={`Step ${done + 1} of ${lesson.steps.length}`} />
-            <LinkButton className="mt-5" look="lamp" size="large" icon="play" to={`/lessons/${lesson.id}${here ? `?step=${here.id}` : ""}`}>
+            <ProgressSteps
+              className="mt-4"
+              total={lesson.steps.length}
+              done={done}
+              label={`Step ${done + 1} of ${lesson.steps.length}`}
+            />
+            <LinkButton
+              className="mt-5"
+              look="lamp"
+              size="large"
+              icon="play"
+              to={`/lessons/${lesson.id}${here ? `?step=${here.id}` : ""}`}
+            >
               {done === 0 ? "Start the lesson" : "Carry on"}
             </LinkButton>
           </>
@@ -51,7 +69,10 @@ export function NextThing({ lessons }: NextThingProps) {
           </>
         )}
       </div>
-      <StreetScene className="min-h-60 max-wide:order-1 max-wide:h-32 max-wide:min-h-0" lighting={isFirst ? "one" : "slow"} />
+      <StreetScene
+        className="min-h-60 max-wide:order-1 max-wide:h-32 max-wide:min-h-0"
+        lighting={isFirst ? "one" : "slow"}
+      />
     </Card>
   );
 }

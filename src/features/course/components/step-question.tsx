@@ -25,8 +25,17 @@ export function StepQuestion({ question, answer, onAnswer, error }: StepQuestion
         </legend>
         <div className="clear-both space-y-2">
           {question.choices.map((choice, i) => (
-            <label key={choice.text} className="flex cursor-pointer items-start gap-3 rounded-cut border-[1.5px] border-rim px-3 py-2.5 has-checked:border-ink has-checked:bg-well">
-              <input type="radio" name={name} className="mt-0.5 size-5 accent-main" checked={answer === i} onChange={() => onAnswer(i)} />
+            <label
+              key={choice.text}
+              className="flex cursor-pointer items-start gap-3 rounded-cut border-[1.5px] border-rim px-3 py-2.5 has-checked:border-ink has-checked:bg-well"
+            >
+              <input
+                type="radio"
+                name={name}
+                className="mt-0.5 size-5 accent-main"
+                checked={answer === i}
+                onChange={() => onAnswer(i)}
+              />
               <span>
                 <CodeText text={choice.text} />
               </span>
@@ -36,7 +45,9 @@ export function StepQuestion({ question, answer, onAnswer, error }: StepQuestion
       </fieldset>
       <div aria-live="polite">
         {picked && (
-          <div className={`flex gap-3 border-l-4 px-4 py-3 ${picked.isRight ? "border-spruce bg-spruce-tint" : "border-lamp-ink bg-lamp-tint"}`}>
+          <div
+            className={`flex gap-3 border-l-4 px-4 py-3 ${picked.isRight ? "border-spruce bg-spruce-tint" : "border-lamp-ink bg-lamp-tint"}`}
+          >
             <Icon name={picked.isRight ? "tick" : "knot"} label={picked.isRight ? "Yes" : "Not yet"} />
             <p>
               <CodeText text={picked.answer} />
@@ -44,7 +55,11 @@ export function StepQuestion({ question, answer, onAnswer, error }: StepQuestion
           </div>
         )}
       </div>
-      {error !== null && <Notice tone="warn" role="alert" title="Your answer is not kept yet.">{error}</Notice>}
+      {error !== null && (
+        <Notice tone="warn" role="alert" title="Your answer is not kept yet.">
+          {error}
+        </Notice>
+      )}
     </div>
   );
 }

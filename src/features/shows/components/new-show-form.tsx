@@ -27,10 +27,14 @@ export function NewShowForm({ songs, assignment, onCreated }: NewShowFormProps) 
     event.preventDefault();
     setIsTitleMissing(title.trim() === "");
     if (title.trim() === "" || songId === null) return;
-    create.mutate({ title, songId, assignmentId: assignment?.id ?? null }, { onSuccess: ({ show }) => onCreated(show) });
+    create.mutate(
+      { title, songId, assignmentId: assignment?.id ?? null },
+      { onSuccess: ({ show }) => onCreated(show) },
+    );
   };
 
-  const refused = create.error instanceof ApiProblem ? create.error.errors.find((field) => field.pointer === "/title") : undefined;
+  const refused =
+    create.error instanceof ApiProblem ? create.error.errors.find((field) => field.pointer === "/title") : undefined;
   const offered = assignment ? songs.filter((song) => song.id === assignment.songId) : songs;
   return (
     <form onSubmit={handleSubmit} noValidate className="max-w-2xl space-y-6">
@@ -56,11 +60,20 @@ export function NewShowForm({ songs, assignment, onCreated }: NewShowFormProps) 
               key={song.id}
               className="flex cursor-pointer items-start gap-3 rounded-sheet border-[1.5px] border-rim bg-card px-4 py-3 has-checked:border-ink has-checked:bg-well"
             >
-              <input type="radio" name="song" className="mt-1 size-5 accent-main" value={song.id} checked={songId === song.id} onChange={() => setSongId(song.id)} />
+              <input
+                type="radio"
+                name="song"
+                aria-label={song.title}
+                className="mt-1 size-5 accent-main"
+                value={song.id}
+                checked={songId === song.id}
+                onChange={() => setSongId(song.id)}
+              />
               <span>
                 <span className="font-semibold">{song.title}</span>
                 <span className="block text-slate">
-                  {presentLength(song.seconds)} · {Math.round(song.beatsPerMinute)} beats a minute, {song.beatsPerBar} in a bar · {song.instruments.join(", ")}
+                  {presentLength(song.seconds)} · {Math.round(song.beatsPerMinute)} beats a minute, {song.beatsPerBar}{" "}
+                  in a bar · {song.instruments.join(", ")}
                 </span>
               </span>
             </label>

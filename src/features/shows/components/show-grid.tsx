@@ -1,3 +1,4 @@
+import type { ReactNode } from "react";
 import type { ShowSummary } from "../../../../shared/contracts/shows.ts";
 import { PictureRibbon } from "../../../components/picture-ribbon.tsx";
 import { ShowCard } from "../../../components/show-card.tsx";
@@ -13,14 +14,16 @@ export interface ShowGridProps {
   /** Display name of the reader, left out of "with". */
   reader: string;
   now: number;
+  /** Further acts on a show, in the corner of its card. */
+  actionsOf?: (show: ShowSummary) => ReactNode;
 }
 
 /** Shows as cards, each known by its ribbon. */
-export function ShowGrid({ shows, reader, now }: ShowGridProps) {
+export function ShowGrid({ shows, reader, now, actionsOf }: ShowGridProps) {
   return (
     <ul className={GRID}>
       {shows.map((show) => (
-        <li key={show.id}>
+        <li key={show.id} className="relative">
           <ShowCard
             to={`/shows/${show.id}`}
             title={show.title}
@@ -28,6 +31,7 @@ export function ShowGrid({ shows, reader, now }: ShowGridProps) {
             tag={<ShowTag show={show} />}
             ribbon={<PictureRibbon picture={show.ribbon} label="" />}
           />
+          {actionsOf && <div className="absolute right-2 bottom-2 z-1">{actionsOf(show)}</div>}
         </li>
       ))}
     </ul>

@@ -56,7 +56,9 @@ export function ScriptBench(props: ScriptBenchProps) {
   const player = useDisposable(() => new ShowPlayer({ layout, song, score }), [layout, song, score]);
   const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
   const latest = useRef({ onChange, run, runSoon });
-  latest.current = { onChange, run, runSoon };
+  useEffect(() => {
+    latest.current = { onChange, run, runSoon };
+  });
 
   const editor = useDisposable(() => {
     const parent = editorBox.current;
@@ -91,7 +93,10 @@ export function ScriptBench(props: ScriptBenchProps) {
     player?.setTimeline(state.onStage);
     editor?.setActLines(listActLines(state.onStage));
   }, [player, editor, state.onStage]);
-  useEffect(() => editor?.setProblem(state.outcome && !state.outcome.ok ? state.outcome.problem : null), [editor, state.outcome]);
+  useEffect(
+    () => editor?.setProblem(state.outcome && !state.outcome.ok ? state.outcome.problem : null),
+    [editor, state.outcome],
+  );
   useEffect(() => player?.setGentle(isGentleChosen || gentleReason !== null), [player, isGentleChosen, gentleReason]);
 
   return (
@@ -115,8 +120,18 @@ export function ScriptBench(props: ScriptBenchProps) {
           {aim && <RibbonRow name="The aim" timeline={aim.timeline} layout={layout} />}
         </dl>
       </div>
-      {player && <TransportBar song={song} player={player} onToggle={() => void player.transport.toggle()} onToggleLoop={() => toggleLoop(player)} />}
-      <section aria-label="Script" className="flex min-h-52 flex-1 flex-col overflow-hidden rounded-sheet border border-line bg-card shadow-sheet-1">
+      {player && (
+        <TransportBar
+          song={song}
+          player={player}
+          onToggle={() => void player.transport.toggle()}
+          onToggleLoop={() => toggleLoop(player)}
+        />
+      )}
+      <section
+        aria-label="Script"
+        className="flex min-h-52 flex-1 flex-col overflow-hidden rounded-sheet border border-line bg-card shadow-sheet-1"
+      >
         <div className="flex flex-wrap items-center gap-3 border-b border-line px-4 py-2">
           <h2 className="text-5">Script</h2>
           <p className="min-w-0 flex-1 text-meta text-soft" role="status">
@@ -148,14 +163,25 @@ function toggleLoop(player: ShowPlayer): void {
 
 function RibbonRow({ name, timeline, layout }: { name: string; timeline: Timeline | null; layout: Layout }) {
   const cells = useMemo(
-    () => (timeline ? ribbonCells(timeline, layout, { rows: Math.min(LESSON_ROWS, listFronts(layout).length), columns: LESSON_COLUMNS }) : null),
+    () =>
+      timeline
+        ? ribbonCells(timeline, layout, {
+            rows: Math.min(LESSON_ROWS, listFronts(layout).length),
+            columns: LESSON_COLUMNS,
+          })
+        : null,
     [timeline, layout],
   );
   return (
     <>
       <dt>{name}</dt>
       <dd>
-        <Ribbon ribbon={cells} size="row" isSquare label={`${name}: ${timeline ? `${timeline.cues.count} cues` : "nothing yet"}`} />
+        <Ribbon
+          ribbon={cells}
+          size="row"
+          isSquare
+          label={`${name}: ${timeline ? `${timeline.cues.count} cues` : "nothing yet"}`}
+        />
       </dd>
     </>
   );
