@@ -11,6 +11,8 @@ import { runUnfinishedVersions } from "./show-runs/run-version.ts";
 import { tidyDatabase } from "./upkeep.ts";
 
 const CLIENT_DIR = resolve(import.meta.dirname, "../dist/client");
+/** Wall time of one run. Fuel decides; on a busy machine an honest show takes seconds, so the backstop is far off. */
+const RUN_DEADLINE_MS = 15_000;
 const TIDY_EVERY_MS = 60 * 60 * 1000;
 /** A version whose run got lost (a crash, a full pool) waits no longer than this. */
 const CATCH_UP_EVERY_MS = 60 * 1000;
@@ -49,7 +51,7 @@ export async function startServer(
   prepare: (parts: { connection: Connection; runs: RunPool }) => Promise<void>,
 ): Promise<RunningServer> {
   const connection = openDataDir(config.dataDir);
-  const runs = createRunPool({ threads: config.runThreads });
+  const runs = createRunPool({ threads: config.runThreads, deadlineMs: RUN_DEADLINE_MS });
   const close = async () => {
     await runs.close();
     connection.sqlite.pragma("wal_checkpoint(TRUNCATE)");
