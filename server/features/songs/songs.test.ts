@@ -78,10 +78,10 @@ describe("GET /api/songs/:songId", () => {
     expect(status).toBe(200);
     expect(body.beatMap.beats).toHaveLength(9);
     const [bells] = body.score.tracks;
-    expect(bells.instrument).toBe("bells");
+    expect(bells.name).toBe("bells");
     expect(bells.notes[3]).toMatchObject({
-      seconds: expect.closeTo(1.5, 9),
-      length: expect.closeTo(0.5, 9),
+      start: expect.closeTo(1.5, 9),
+      lasts: expect.closeTo(0.5, 9),
       pitch: 65,
     });
   });

@@ -144,6 +144,107 @@ export const PAGES: Readonly<Record<string, PageCheck>> = {
     error: "/api/programme",
     dialog: NO_DIALOG,
   },
+  "/classes": {
+    as: "teacher",
+    open: "/classes",
+    empty: [{ url: "/api/classes", body: { classes: [] } }],
+    error: "/api/classes",
+    dialog: { none: "It opens nothing but the account menu, which the other pages show." },
+  },
+  "/classes/:classId/:section?": {
+    as: "teacher",
+    open: async (page) => `/classes/${first((await read<Listed>(page, "/api/classes")).classes).id}`,
+    empty: { none: "A class without students shows the same form to add them that the test of the page opens." },
+    error: "/api/classes/*",
+    dialog: openMenu("Add students"),
+  },
+  "/classes/:classId/assignments/new": {
+    as: "teacher",
+    open: async (page) => `/classes/${first((await read<Listed>(page, "/api/classes")).classes).id}/assignments/new`,
+    empty: { none: "A form is never empty of its fields." },
+    error: "/api/songs",
+    dialog: openMenu("Ms Marlow"),
+  },
+  "/assignments/:assignmentId/edit": {
+    as: "teacher",
+    open: async (page) => `/assignments/${first((await read<Listed>(page, "/api/assignments")).assignments).id}/edit`,
+    empty: { none: "A form is never empty of its fields." },
+    error: "/api/assignments/*",
+    dialog: openMenu("Ms Marlow"),
+  },
+  "/marking": {
+    as: "teacher",
+    open: "/marking",
+    empty: [{ url: "/api/marking", body: { assignments: [] } }],
+    error: "/api/marking",
+    dialog: openMenu("Ms Marlow"),
+  },
+  "/marking/:assignmentId/:submissionId?": {
+    as: "teacher",
+    open: async (page) => {
+      const { assignments } = await read<Listed>(page, "/api/marking");
+      const waiting = first(assignments.filter((one) => typeof one.firstSubmissionId === "string"));
+      return `/marking/${waiting.id}/${waiting.firstSubmissionId ?? ""}`;
+    },
+    empty: [{ url: "/api/assignments/*/submissions", body: { title: "Showpiece", className: "7B", rows: [] } }],
+    error: "/api/submissions/*",
+    dialog: openMenu("All keys"),
+  },
+  "/forwarded": {
+    as: "teacher",
+    open: "/forwarded",
+    empty: [{ url: "/api/forwards", body: { forwards: [] } }],
+    error: "/api/forwards",
+    dialog: openMenu("Ms Marlow"),
+  },
+  "/forwarded/:forwardId": {
+    as: "teacher",
+    open: async (page) => `/forwarded/${first((await read<Listed>(page, "/api/forwards")).forwards).id}`,
+    empty: { none: "A forwarded show always has a version." },
+    error: "/api/forwards/*",
+    dialog: openMenu("Ms Marlow"),
+  },
+  "/event/shows": {
+    as: "coordinator",
+    open: "/event/shows",
+    empty: [{ url: "/api/forwards", body: { forwards: [] } }],
+    error: "/api/forwards",
+    dialog: openMenu("Petra Holm"),
+  },
+  "/event/shows/:forwardId": {
+    as: "coordinator",
+    open: async (page) =>
+      `/event/shows/${first((await read<Listed>(page, "/api/forwards")).forwards.filter((one) => one.state === "waiting")).id}`,
+    empty: { none: "A forwarded show always has a version." },
+    error: "/api/forwards/*",
+    dialog: openMenu("Send back"),
+  },
+  "/lineup": {
+    as: "coordinator",
+    open: "/lineup",
+    empty: { none: "The board of a season always has nights; its tray says itself when it is empty." },
+    error: "/api/lineup",
+    dialog: async (page) => {
+      await page
+        .getByRole("button", { name: /^Place / })
+        .first()
+        .click();
+    },
+  },
+  "/admin": {
+    as: "admin",
+    open: "/admin",
+    empty: { none: "There is always the admin who looks at it." },
+    error: "/api/admin/overview",
+    dialog: openMenu("Aron Quist"),
+  },
+  "/admin/audit": {
+    as: "admin",
+    open: "/admin/audit",
+    empty: [{ url: "/api/admin/audit*", body: { rows: [], hasMore: false, isChainWhole: true } }],
+    error: "/api/admin/audit*",
+    dialog: openMenu("Aron Quist"),
+  },
   "/account": {
     as: "teacher",
     open: "/account",

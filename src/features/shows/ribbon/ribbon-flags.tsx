@@ -3,6 +3,9 @@ import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
 import { joinClasses } from "../../../components/class-names.ts";
 import { fitFlag, toX, type RibbonScale } from "./ribbon-scale.ts";
 
+/** A narrower pennant is only drawn: nobody hits it (WCAG 2.5.8), and the playhead goes there all the same. */
+const MIN_TARGET = 24;
+
 export interface RibbonFlagsProps {
   song: BeatMap;
   scale: RibbonScale;
@@ -20,12 +23,23 @@ export function RibbonFlags({ song, scale, playing, onSeek }: RibbonFlagsProps) 
         const width = toX(scale, section.end * TICKS_PER_BEAT) - toX(scale, start) - 3;
         const fit = fitFlag(section.name, width);
         const bar = song.bars.findLast((candidate) => candidate.start <= section.start + 1e-6)?.number ?? 1;
+        const place = { left: toX(scale, start), width: Math.max(0, width) };
+        if (width < MIN_TARGET) {
+          return (
+            <span
+              key={`${section.name}-${section.start}`}
+              aria-hidden="true"
+              className="large-ribbon-flag"
+              style={place}
+            />
+          );
+        }
         return (
           <button
             key={`${section.name}-${section.start}`}
             type="button"
             className={joinClasses("large-ribbon-flag", index === playing && "is-on", fit === "tight" && "is-tight")}
-            style={{ left: toX(scale, start), width: Math.max(0, width) }}
+            style={place}
             aria-label={`Go to ${section.name}, bar ${bar}`}
             aria-current={index === playing ? "true" : undefined}
             onClick={() => onSeek(start)}
