@@ -20,36 +20,38 @@ export function TransportBar({ song, player, onToggle, onToggleLoop }: Transport
   const isOn = state.isPlaying || state.isStarting;
   const goBack = () => player.seekTick(state.isLooping && state.loop ? state.loop.start : 0);
   return (
-    <div className="studio-transport studio-card" role="group" aria-label="Play the show">
-      <button
-        type="button"
-        className="studio-quiet-icon studio-back"
-        aria-label={state.isLooping ? "Back to the start of the loop" : "Back to the start"}
-        onClick={goBack}
-      >
-        <Icon name="to-start" />
-      </button>
-      <button
-        type="button"
-        className="studio-play"
-        aria-label={isOn ? "Pause" : "Play"}
-        aria-keyshortcuts="Space"
-        onClick={onToggle}
-      >
-        <Icon name={isOn ? "pause" : "play"} className="size-6" />
-      </button>
-      <SongClock song={song} player={player} />
-      <button type="button" className="studio-toggle" aria-pressed={state.isLooping} onClick={onToggleLoop}>
-        <Icon name="loop" />
-        <span className="studio-toggle-word">Loop</span> <b>{state.isLooping ? "on" : "off"}</b>
-      </button>
-      <SpeedChoice rate={state.rate} onRate={(rate) => player.transport.setRate(rate)} />
-      <VolumeControl
-        volume={state.volume}
-        hasSound={state.hasSound}
-        hasFailed={state.hasFailed}
-        onVolume={(volume) => player.transport.setVolume(volume)}
-      />
+    <div className="studio-transport-frame">
+      <div className="studio-transport studio-card" role="group" aria-label="Play the show">
+        <button
+          type="button"
+          className="studio-quiet-icon studio-back"
+          aria-label={state.isLooping ? "Back to the start of the loop" : "Back to the start"}
+          onClick={goBack}
+        >
+          <Icon name="to-start" />
+        </button>
+        <button
+          type="button"
+          className="studio-play"
+          aria-label={isOn ? "Pause" : "Play"}
+          aria-keyshortcuts="Space"
+          onClick={onToggle}
+        >
+          <Icon name={isOn ? "pause" : "play"} className="size-6" />
+        </button>
+        <SongClock song={song} player={player} />
+        <button type="button" className="studio-toggle" aria-pressed={state.isLooping} onClick={onToggleLoop}>
+          <Icon name="loop" />
+          <span className="studio-toggle-word">Loop</span> <b>{state.isLooping ? "on" : "off"}</b>
+        </button>
+        <SpeedChoice rate={state.rate} onRate={(rate) => player.transport.setRate(rate)} />
+        <VolumeControl
+          volume={state.volume}
+          hasSound={state.hasSound}
+          hasFailed={state.hasFailed}
+          onVolume={(volume) => player.transport.setVolume(volume)}
+        />
+      </div>
     </div>
   );
 }

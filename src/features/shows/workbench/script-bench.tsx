@@ -101,7 +101,7 @@ export function ScriptBench(props: ScriptBenchProps) {
 
   return (
     <div className="studio-bench flex h-full flex-col gap-3">
-      <div className="on-dusk overflow-hidden rounded-sheet bg-dusk">
+      <div className="on-dusk shrink-0 overflow-hidden rounded-sheet bg-dusk">
         <div className="grid h-[clamp(13rem,33vh,22rem)]">
           {player && (
             <StageWindow
