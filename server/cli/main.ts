@@ -1,7 +1,9 @@
 import { ProblemError } from "../../shared/problem.ts";
 import { backup } from "./backup.ts";
 import { type Command, UsageError } from "./command.ts";
+import { check } from "./check.ts";
 import { restore } from "./restore.ts";
+import { run } from "./run.ts";
 import { seed } from "./seed.ts";
 import { userAdd } from "./user-add.ts";
 
@@ -9,7 +11,7 @@ const EXIT_FAILED = 1;
 const EXIT_USAGE = 2;
 
 /** In the order of `help`. Each reads the same environment as the server (DATA_DIR above all). */
-const COMMANDS: readonly Command[] = [backup, restore, userAdd, seed];
+const COMMANDS: readonly Command[] = [run, check, backup, restore, userAdd, seed];
 
 function sayHelp(): void {
   console.log("npm run -s duskbell -- COMMAND\n");

@@ -1,0 +1,54 @@
+import { checkShow, mergeFindings } from "../../sandbox/checks/index.ts";
+import type { Finding } from "../../sandbox/engine/model.ts";
+import { createRunPool, type RunPool } from "../runs/run-pool.ts";
+import { type Command, parseOptions, UsageError } from "./command.ts";
+import { buildRunInput, RUN_OPTIONS } from "./run-input.ts";
+
+const EXIT_STOPS = 1;
+
+/** `check`: scripts against the show check. Exit code 1 when one does not run or has a stop. */
+export const check: Command = {
+  name: "check",
+  usage: "check FILE.ts ... [--song frost-fair] [--layout demo] [--seed 1]",
+  summary: "Runs scripts and lists what the show check finds. A planning aid: the safety officer decides.",
+  async run(args, say) {
+    const { values, rest } = parseOptions(args, { values: RUN_OPTIONS });
+    if (rest.length === 0) throw new UsageError("check takes at least one script: check my-show.ts --song frost-fair");
+    const runs = createRunPool({ threads: 1 });
+    let hasStop = false;
+    try {
+      for (const file of rest) {
+        const { lines, isStopped } = await checkFile(runs, file, values);
+        hasStop ||= isStopped;
+        for (const line of lines) say(line);
+      }
+    } finally {
+      await runs.close();
+    }
+    return hasStop ? EXIT_STOPS : 0;
+  },
+};
+
+async function checkFile(
+  runs: RunPool,
+  file: string,
+  values: ReadonlyMap<string, string>,
+): Promise<{ lines: string[]; isStopped: boolean }> {
+  const input = buildRunInput(file, values);
+  const outcome = await runs.run(input);
+  if (!outcome.ok) {
+    const { range, sentence } = outcome.problem;
+    return { lines: [`${file}: does not run. Line ${range.line}: ${sentence}`], isStopped: true };
+  }
+  const { layout, song } = input;
+  const findings = mergeFindings([outcome.findings, checkShow({ timeline: outcome.timeline, layout, song })]);
+  const count = (severity: Finding["severity"]) => findings.filter((finding) => finding.severity === severity).length;
+  const head = `${file}: ${count("stop")} stops, ${count("warn")} warnings, ${count("note")} notes`;
+  return { lines: [head, ...findings.map(describeFinding)], isStopped: count("stop") > 0 };
+}
+
+function describeFinding({ severity, sentence, lines, measured }: Finding): string {
+  const where = lines.length > 0 ? ` (line ${lines.join(", ")})` : "";
+  const figure = measured ? ` [${measured.value} of ${measured.limit} ${measured.unit}]` : "";
+  return `  ${severity}: ${sentence}${figure}${where}`;
+}

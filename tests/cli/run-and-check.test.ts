@@ -1,0 +1,55 @@
+import { spawnSync } from "node:child_process";
+import { readFileSync } from "node:fs";
+import path from "node:path";
+import { describe, expect, it } from "vitest";
+
+const ROOT = path.resolve(import.meta.dirname, "../..");
+
+function duskbell(...args: readonly string[]) {
+  const { status, stdout, stderr } = spawnSync(process.execPath, ["--import", "tsx", "server/cli/main.ts", ...args], {
+    cwd: ROOT,
+    encoding: "utf8",
+  });
+  return { status, stdout, stderr };
+}
+
+interface Sidecar {
+  readonly song: string;
+  readonly seed: number;
+  readonly hash: string;
+}
+
+describe("duskbell run", () => {
+  it("comes to the hash that is kept beside the sample", () => {
+    const kept = JSON.parse(readFileSync(path.join(ROOT, "tests/samples/melody.json"), "utf8")) as Sidecar;
+    const { status, stdout } = duskbell(
+      "run",
+      "tests/samples/melody.ts",
+      "--song",
+      kept.song,
+      "--seed",
+      String(kept.seed),
+      "--json",
+    );
+    expect(status).toBe(0);
+    const outcome = JSON.parse(stdout) as { ok: boolean; hash: string };
+    expect(outcome.ok).toBe(true);
+    // The song's name in the database is part of the hash; here it is the demo song's own id, as in the sidecar.
+    expect(outcome.hash).toBe(kept.hash);
+  });
+
+  it("names the option and the fix, and exits with 2", () => {
+    const { status, stderr } = duskbell("run", "tests/samples/melody.ts", "--song", "no-such-song");
+    expect(status).toBe(2);
+    expect(stderr).toContain("--song takes frost-fair");
+  });
+});
+
+describe("duskbell check", () => {
+  it("says why a script does not run, with its line, and exits with 1", () => {
+    // The waltz asks for bar 0, which only a song with a pick-up has.
+    const { status, stdout } = duskbell("check", "tests/samples/waltz.ts", "--song", "frost-fair");
+    expect(status).toBe(1);
+    expect(stdout).toContain("tests/samples/waltz.ts: does not run. Line 1:");
+  });
+});
