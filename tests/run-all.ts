@@ -70,9 +70,8 @@ function vitest(name: string, args: readonly string[]): void {
 }
 
 try {
-  ensureNativeModule(say);
   ensureChromium(say);
-  ensureClientBuild(say);
+  await Promise.all([ensureNativeModule(say), ensureClientBuild(say)]);
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);
   console.log("0 passed, 1 failed");

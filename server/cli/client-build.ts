@@ -1,7 +1,7 @@
-import { spawnSync } from "node:child_process";
 import { createHash } from "node:crypto";
 import { existsSync, readdirSync, readFileSync, writeFileSync } from "node:fs";
 import path from "node:path";
+import { runQuietly } from "./run-quietly.ts";
 
 const ROOT = path.resolve(import.meta.dirname, "../..");
 const STAMP = path.join(ROOT, "dist/client/.inputs");
@@ -24,16 +24,17 @@ function hashInputs(): string {
 
 /**
  * Builds the client with Vite unless the built one is made from the same inputs.
- * Throws an Error with Vite's output when the build fails.
+ * Rejects with an Error with Vite's output when the build fails.
  */
-export function ensureClientBuild(log: (line: string) => void): void {
+export async function ensureClientBuild(log: (line: string) => void): Promise<void> {
   const inputs = hashInputs();
   if (existsSync(STAMP) && readFileSync(STAMP, "utf8") === inputs) return;
   log("Building the pages, once (under a minute) ...");
-  const built = spawnSync(process.execPath, ["node_modules/vite/bin/vite.js", "build", "--logLevel", "warn"], {
-    cwd: ROOT,
-    encoding: "utf8",
-  });
-  if (built.status !== 0) throw new Error(`The pages could not be built:\n${built.stdout}${built.stderr}`);
+  const built = await runQuietly(
+    process.execPath,
+    ["node_modules/vite/bin/vite.js", "build", "--logLevel", "warn"],
+    ROOT,
+  );
+  if (!built.isOk) throw new Error(`The pages could not be built:\n${built.output}`);
   writeFileSync(STAMP, inputs);
 }

@@ -1,5 +1,6 @@
 import { spawnSync } from "node:child_process";
 import { createRequire } from "node:module";
+import { runQuietly } from "./run-quietly.ts";
 
 const COMPILERS = ["python3", "make", "g++"] as const;
 const APT_PACKAGES = "python3 make g++";
@@ -17,17 +18,17 @@ function isOnPath(program: string): boolean {
 /**
  * Makes sure that better-sqlite3 is compiled for this machine. `npm ci` runs no install scripts here
  * (.npmrc), so that the compilers can be looked for first: without them, root installs them with
- * apt-get, anybody else is told the command. Throws an Error that names what to do.
+ * apt-get, anybody else is told the command. Rejects with an Error that names what to do.
  */
-export function ensureNativeModule(log: (line: string) => void): void {
+export async function ensureNativeModule(log: (line: string) => void): Promise<void> {
   createRequire(import.meta.url).resolve("better-sqlite3/package.json");
   if (loads()) return;
   const missing = COMPILERS.filter((program) => !isOnPath(program));
   if (missing.length > 0) installCompilers(missing, log);
   log("Compiling the database driver, once (about a minute) ...");
-  const built = spawnSync("npm", ["rebuild", "better-sqlite3", "--ignore-scripts=false"], { encoding: "utf8" });
-  if (built.status !== 0 || !loads()) {
-    throw new Error(`The database driver (better-sqlite3) could not be compiled:\n${built.stdout}${built.stderr}`);
+  const built = await runQuietly("npm", ["rebuild", "better-sqlite3", "--ignore-scripts=false"]);
+  if (!built.isOk || !loads()) {
+    throw new Error(`The database driver (better-sqlite3) could not be compiled:\n${built.output}`);
   }
 }
 

@@ -42,7 +42,7 @@ export function Component() {
     <Page title={title} layout="full">
       <div className="relative on-dusk overflow-hidden bg-dusk print:hidden">
         <StreetScene className="absolute inset-0" fronts={14} />
-        <div className="relative mx-auto max-w-public px-6 pt-8 pb-40 max-wide:px-4 max-wide:pb-28">
+        <div className="relative mx-auto max-w-public px-6 pt-8 pb-56 max-wide:px-4 max-wide:pb-36">
           <h1 tabIndex={-1}>{title}</h1>
           {data && (
             <p className="mt-1">

@@ -17,7 +17,7 @@ const STUDENT = ["/home", "/shows", "/lessons"];
 
 /** What a first visit of each page loads, as gzip would send it: scripts, styles, fonts and data. */
 export async function benchPages(): Promise<Figure[]> {
-  ensureClientBuild(console.log);
+  await ensureClientBuild(console.log);
   const product = await startProduct();
   const browser = await launchBrowser();
   const figures: Figure[] = [];

@@ -5,7 +5,7 @@ import type { AddressInfo } from "node:net";
 import { mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
-import { buildClass, buildShow, buildUser } from "../support/factories.ts";
+import { buildClass, buildShow, buildSquare, buildUser } from "../support/factories.ts";
 import { createTestServer } from "../support/test-server.ts";
 import { createTestClock } from "../support/test-clock.ts";
 import { type Figure, median } from "./measure.ts";
@@ -23,6 +23,7 @@ const SCRIPT = "// Gold runs up the north side.\n".repeat(190);
  */
 export async function benchRequests(): Promise<Figure[]> {
   const portal = createTestServer({ clock: createTestClock(Date.now()), checkResponses: false });
+  buildSquare(portal.db);
   const student = buildUser(portal.db);
   buildClass(portal.db, { studentIds: [student.id] });
   const show = buildShow(portal.db, { authorIds: [student.id], source: SCRIPT });

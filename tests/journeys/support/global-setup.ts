@@ -18,7 +18,7 @@ export default async function setup(project: TestProject): Promise<(() => Promis
     project.provide("address", running);
     return undefined;
   }
-  ensureClientBuild((line) => console.log(line));
+  await ensureClientBuild((line) => console.log(line));
   const product = await startProduct();
   project.provide("address", product.address);
   return () => product.stop();
