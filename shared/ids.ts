@@ -1,8 +1,9 @@
 import { z } from "zod";
 
 /**
- * Branded ids. Rows are named by a random text id (21 characters, URL-safe); each kind has its own
- * brand, so that a show id cannot be passed where a class id is asked for.
+ * Ids. Rows are named by a random text id (22 characters, URL-safe). Each kind has its own schema and
+ * type, so that a signature says which is meant. The shared builder loses zod's brand on the way: the
+ * compiler takes any text for any of them, and only the schemas judge what comes from outside.
  */
 const id = <const Brand extends string>(brand: Brand) =>
   z

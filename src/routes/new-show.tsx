@@ -1,6 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
 import { useNavigate, useSearchParams, type LoaderFunctionArgs } from "react-router";
-import { type AssignmentId, AssignmentIdSchema } from "../../shared/ids.ts";
+import { AssignmentIdSchema } from "../../shared/ids.ts";
 import { EmptyState } from "../components/empty-state.tsx";
 import { Page, PageHeader } from "../components/page.tsx";
 import { QueryView } from "../components/query-view.tsx";

@@ -7,7 +7,7 @@ import type { HandInResult } from "../../shared/contracts/assignments.ts";
 import type { BeatMap, Score } from "../../shared/contracts/songs.ts";
 import type { ShowDetail } from "../../shared/contracts/shows.ts";
 import type { Layout } from "../../shared/contracts/square.ts";
-import { type AssignmentId, ShowIdSchema, type ShowId, type VersionId } from "../../shared/ids.ts";
+import { ShowIdSchema, type ShowId } from "../../shared/ids.ts";
 import { Page } from "../components/page.tsx";
 import { QueryView } from "../components/query-view.tsx";
 import { showToast } from "../components/toast-queue.ts";

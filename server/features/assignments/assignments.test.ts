@@ -2,7 +2,7 @@ import { eq } from "drizzle-orm";
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { contracts } from "../../../shared/contracts/index.ts";
 import type { AssignmentFields } from "../../../shared/contracts/assignments.ts";
-import type { ClassId, } from "../../../shared/ids.ts";
+import type { ClassId } from "../../../shared/ids.ts";
 import { assignments } from "../../db/schema/index.ts";
 import {
   buildAssignment,
