@@ -3,8 +3,11 @@ import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
 import { joinClasses } from "../../../components/class-names.ts";
 import { fitFlag, toX, type RibbonScale } from "./ribbon-scale.ts";
 
-/** A narrower pennant is only drawn: nobody hits it (WCAG 2.5.8), and the playhead goes there all the same. */
-const MIN_TARGET = 24;
+/**
+ * A narrower pennant is only drawn: a target has 24 px (WCAG 2.5.8) beside the playhead's grip, which can lie
+ * over its start. The playhead goes there all the same.
+ */
+const MIN_TARGET = 40;
 
 export interface RibbonFlagsProps {
   song: BeatMap;
