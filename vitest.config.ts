@@ -8,6 +8,8 @@ import { defineConfig } from "vitest/config";
 export default defineConfig({
   test: {
     maxWorkers: 2,
+    // Pages walked side by side; more would only wait for the two cores.
+    maxConcurrency: 3,
     testTimeout: 30_000,
     hookTimeout: 120_000,
     projects: [

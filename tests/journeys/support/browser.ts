@@ -35,6 +35,8 @@ export interface PersonOptions {
   readonly colorScheme?: "light" | "dark";
   /** Console errors that the test causes on purpose. */
   readonly expectedErrors?: RegExp;
+  /** What an earlier profile kept: cookies of a sign-in. Nothing by default. */
+  readonly storageState?: Awaited<ReturnType<BrowserContext["storageState"]>> | undefined;
 }
 
 /** Opens a fresh browser profile on the product. */
@@ -43,6 +45,7 @@ export async function openPerson(browser: Browser, address: string, options: Per
     baseURL: address,
     viewport: { width: options.width ?? 1366, height: options.height ?? 768 },
     colorScheme: options.colorScheme ?? "light",
+    ...(options.storageState && { storageState: options.storageState }),
   });
   const page = await context.newPage();
   const faults: string[] = [];
