@@ -4,39 +4,31 @@ import { afterAll, beforeAll, describe, expect, inject, it } from "vitest";
 import { flattenRoutes } from "./support/flatten-routes.ts";
 import { launchBrowser, openPerson, type Person } from "./support/browser.ts";
 import { type PageCheck, PAGES } from "./support/pages.ts";
-import { ADMIN, COORDINATOR, signInStaff, signInStudent, TEACHER } from "./support/sign-in.ts";
+import { signInAs, type Visitor } from "./support/sign-in.ts";
 
 /** Rules of WCAG 2.0, 2.1 and 2.2, levels A and AA, as axe-core (the outside reference) reads them. */
 const TAGS = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"];
 const THEMES = ["light", "dark"] as const;
 
-const address = inject("address");
 type StorageState = Awaited<ReturnType<BrowserContext["storageState"]>>;
 
+const address = inject("address");
+/** What the browser of each signed-in person keeps: one sign-in by the form serves all pages. */
+const kept = new Map<Visitor, StorageState>();
 let browser: Browser;
 
 beforeAll(async () => {
   browser = await launchBrowser();
-  for (const [as, signIn] of Object.entries(SIGN_INS)) {
+  for (const visitor of new Set(Object.values(PAGES).map((check) => check.as))) {
     const person = await openPerson(browser, address);
-    await signIn(person.page);
-    kept.set(as as PageCheck["as"], await person.context.storageState());
+    await signInAs(person.page, visitor);
+    kept.set(visitor, await person.context.storageState());
     await person.close();
   }
 });
 afterAll(() => browser.close());
 
-const SIGN_INS: Readonly<Record<Exclude<PageCheck["as"], "nobody">, (page: Page) => Promise<void>>> = {
-  student: (page) => signInStudent(page),
-  teacher: (page) => signInStaff(page, TEACHER),
-  coordinator: (page) => signInStaff(page, COORDINATOR),
-  admin: (page) => signInStaff(page, ADMIN),
-};
-
-/** What the browser of each signed-in person keeps: one sign-in by the form serves all pages. */
-const kept = new Map<PageCheck["as"], StorageState>();
-
-async function openAs(as: PageCheck["as"]): Promise<Person> {
+async function openAs(as: Visitor): Promise<Person> {
   return openPerson(browser, address, {
     width: 1280,
     height: 800,

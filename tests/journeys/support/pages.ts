@@ -1,4 +1,5 @@
 import type { Page } from "playwright-core";
+import type { Visitor } from "./sign-in.ts";
 
 /** An API answer put in place of the server's, to bring a page into a state. */
 export interface Fake {
@@ -13,7 +14,7 @@ export type Without = { readonly none: string };
 
 /** One page of the router's table, with how to bring it into each of its states. */
 export interface PageCheck {
-  readonly as: "student" | "teacher" | "coordinator" | "admin" | "nobody";
+  readonly as: Visitor;
   /** The address to open; pages of one object look its id up. Called with a signed-in page. */
   readonly open: string | ((page: Page) => Promise<string>);
   readonly empty: readonly Fake[] | Without;

@@ -29,3 +29,14 @@ export async function signInStaff(page: Page, key: string): Promise<void> {
   await page.getByRole("button", { name: "Sign in" }).click();
   await page.waitForURL((url) => url.pathname !== "/sign-in");
 }
+
+/** Whoever opens a page in a test. */
+export type Visitor = "student" | "teacher" | "coordinator" | "admin" | "nobody";
+
+/** Signs in the demo world's person of that kind; nobody stays signed out. */
+export async function signInAs(page: Page, visitor: Visitor): Promise<void> {
+  if (visitor === "student") await signInStudent(page);
+  if (visitor === "teacher") await signInStaff(page, TEACHER);
+  if (visitor === "coordinator") await signInStaff(page, COORDINATOR);
+  if (visitor === "admin") await signInStaff(page, ADMIN);
+}
