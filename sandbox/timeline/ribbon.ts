@@ -29,20 +29,27 @@ const STRENGTH_POWER = 0.56;
 /** Moments looked at in each cell; a pulse of half a beat is met in a song of any usual length. */
 const LOOKS_PER_CELL = 4;
 
+/** How many cells, and of which stretch of the song: ticks from `start` up to `end`, all of it when left out. */
+export interface RibbonSize {
+  readonly rows: number;
+  readonly columns: number;
+  readonly stretch?: { readonly start: number; readonly end: number };
+}
+
 /**
  * Gives the ribbon's cells of a timeline; at most one row a front. An incomplete timeline has bare
- * weave after its last cue. About 1300 frames are sampled.
+ * weave after its last cue. Four frames a column are sampled.
  */
 export function ribbonCells(
   timeline: Timeline,
   layout: Layout,
-  size: { readonly rows: number; readonly columns: number } = { rows: RIBBON_ROWS, columns: RIBBON_COLUMNS },
+  size: RibbonSize = { rows: RIBBON_ROWS, columns: RIBBON_COLUMNS },
 ): RibbonCells {
   const lights = listLights(layout);
   const cursor = createLightsCursor(timeline, lights, buildTracks(timeline));
   const fronts = listFronts(layout);
   const rows = Math.min(size.rows, fronts.length);
-  const { columns } = size;
+  const { columns, stretch = { start: 0, end: timeline.endTick } } = size;
   const rowOfLight = Uint16Array.from(lights, (light) => Math.floor((light.frontIndex * rows) / fronts.length));
   const shares = shareOfLights(lights, rowOfLight, rows);
   const sums = new Float64Array(rows * columns * 4);
@@ -50,7 +57,8 @@ export function ribbonCells(
   const until = timeline.isComplete ? timeline.endTick : count > 0 ? (tick[count - 1] ?? 0) + 1 : 0;
   for (let column = 0; column < columns; column++) {
     for (let look = 0; look < LOOKS_PER_CELL; look++) {
-      const at = ((column + (look + 0.5) / LOOKS_PER_CELL) / columns) * timeline.endTick;
+      const share = (column + (look + 0.5) / LOOKS_PER_CELL) / columns;
+      const at = stretch.start + share * (stretch.end - stretch.start);
       if (at >= until) break;
       const frame = cursor.seek(at);
       for (let light = 0; light < lights.length; light++) {

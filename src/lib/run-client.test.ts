@@ -1,6 +1,7 @@
 import * as Comlink from "comlink";
 import { afterEach, describe, expect, it, vi } from "vitest";
 import type { RunInput, RunOutcome } from "../../sandbox/engine/model.ts";
+import type { Timeline } from "../../sandbox/timeline/model.ts";
 import type { RunWorker } from "../workers/run.worker.ts";
 import { RunClient, RunReplacedError } from "./run-client.ts";
 
@@ -23,6 +24,10 @@ class FakeWorkers {
     this.made.push(record);
     const worker: RunWorker = {
       warmUp: () => Promise.resolve(),
+      drawRibbon: (_timeline, _layout, { rows, columns }) =>
+        Promise.resolve({ rows, columns, cells: new Uint8Array(rows * columns * 4) }),
+      describe: (timeline) =>
+        timeline.songId === "hang" ? new Promise(() => {}) : Promise.resolve({ summary: timeline.songId, steps: [] }),
       run: ({ source }) => {
         record.ran.push(source);
         return source === "hang"
@@ -85,6 +90,22 @@ describe("RunClient", () => {
     expect(await codeOf(client.run(inputOf("break")))).toBe("could-not-run");
     expect(workers.made[0]?.isEnded).toBe(true);
     expect(await codeOf(client.run(inputOf("a")))).toBe("a");
+  });
+
+  it("asks the next worker for the words when a run ended the one it had asked", async () => {
+    const workers = new FakeWorkers();
+    client = new RunClient(workers.make);
+    const setting = {} as Pick<RunInput, "layout" | "song">;
+    const unanswered = client.describe({ songId: "hang" } as Timeline, setting);
+    const isDone = vi.fn();
+    unanswered.then(isDone, isDone);
+    void client.run(inputOf("hang")).catch(() => undefined);
+    await vi.waitFor(() => expect(workers.made[0]?.ran).toEqual(["hang"]));
+    expect(await codeOf(client.run(inputOf("a")))).toBe("a");
+    expect((await client.describe({ songId: "tune" } as Timeline, setting)).summary).toBe("tune");
+    expect(isDone).not.toHaveBeenCalled();
+    client.dispose();
+    await expect(unanswered).rejects.toBeInstanceOf(RunReplacedError);
   });
 
   it("ends its workers and refuses runs when it is disposed", async () => {

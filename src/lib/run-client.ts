@@ -1,6 +1,9 @@
 import * as Comlink from "comlink";
 import type { RunInput, RunOutcome } from "../../sandbox/engine/model.ts";
 import { createStoppedOutcome } from "../../sandbox/engine/stopped.ts";
+import type { ShowDescription } from "../../sandbox/timeline/describe.ts";
+import type { Timeline } from "../../sandbox/timeline/model.ts";
+import type { RibbonCells, RibbonSize } from "../../sandbox/timeline/ribbon.ts";
 import type { RunWorker } from "../workers/run.worker.ts";
 
 /** Wall time of one run: the backstop for what fuel can not count. Fuel ends a plain endless loop within about a second. */
@@ -8,10 +11,12 @@ const DEADLINE_MS = 3000;
 
 /** One worker with its remote half. */
 interface Seat {
-  readonly worker: Worker;
   readonly remote: Comlink.Remote<RunWorker>;
   /** Settles when the engine is loaded; rejects when it can not be. */
   readonly warm: Promise<void>;
+  /** Rejects when the worker is ended: what it was asked is never answered. */
+  readonly ended: Promise<never>;
+  readonly end: () => void;
 }
 
 /** How a client gets its workers; tests pass their own. */
@@ -83,12 +88,34 @@ export class RunClient {
     }
   }
 
+  /** The ribbon of a timeline, drawn beside the page. Rejects with `RunReplacedError` after `dispose`. */
+  drawRibbon(timeline: Timeline, layout: RunInput["layout"], size: RibbonSize): Promise<RibbonCells> {
+    return this.#ask((remote) => remote.drawRibbon(timeline, layout, size));
+  }
+
+  /** A show in words. Rejects with `RunReplacedError` after `dispose`. */
+  describe(timeline: Timeline, { layout, song }: Pick<RunInput, "layout" | "song">): Promise<ShowDescription> {
+    return this.#ask((remote) => remote.describe(timeline, layout, song));
+  }
+
+  /** Asks the present worker; when a run ends it, the next one. */
+  async #ask<T>(question: (remote: Comlink.Remote<RunWorker>) => Promise<T>): Promise<T> {
+    for (;;) {
+      const seat = this.#seat;
+      try {
+        return await Promise.race([question(seat.remote), seat.ended]);
+      } catch (error) {
+        if (this.#isDisposed || !(error instanceof RunReplacedError)) throw error;
+      }
+    }
+  }
+
   /** Ends the workers; a run under way rejects. */
   dispose(): void {
     this.#isDisposed = true;
     this.#stop?.(new RunReplacedError("The run client is disposed."));
-    this.#end(this.#seat);
-    if (this.#spare !== null) this.#end(this.#spare);
+    this.#seat.end();
+    this.#spare?.end();
     this.#spare = null;
   }
 
@@ -102,17 +129,21 @@ export class RunClient {
     // A spare that fails is noticed when it is needed.
     warm.catch(() => {});
     failed.catch(() => {});
-    return { worker, remote, warm };
+    let end = () => {};
+    const ended = new Promise<never>((_, reject) => {
+      end = () => {
+        worker.terminate();
+        reject(new RunReplacedError("The worker was ended."));
+      };
+    });
+    ended.catch(() => {});
+    return { remote, warm, ended, end };
   }
 
   #replaceSeat(): void {
-    this.#end(this.#seat);
+    this.#seat.end();
     if (this.#isDisposed) return;
     this.#seat = this.#spare ?? this.#createSeat();
     this.#spare = null;
-  }
-
-  #end(seat: Seat): void {
-    seat.worker.terminate();
   }
 }

@@ -1,8 +1,7 @@
 import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
 import { lazy, Suspense, useMemo } from "react";
-import { useNavigate, useParams, type LoaderFunctionArgs } from "react-router";
+import { useNavigate, useParams, useSearchParams, type LoaderFunctionArgs } from "react-router";
 import { decodeRibbon } from "../../sandbox/timeline/ribbon.ts";
-import { describeShow } from "../../sandbox/timeline/describe.ts";
 import type { HandInResult } from "../../shared/contracts/assignments.ts";
 import type { BeatMap, Score } from "../../shared/contracts/songs.ts";
 import type { ShowDetail } from "../../shared/contracts/shows.ts";
@@ -95,6 +94,7 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
   const { show, draft, seed } = detail;
   const { data: session, dataUpdatedAt } = useSuspenseQuery(sessionQuery);
   const navigate = useNavigate();
+  const openAt = usePlaceInAddress();
   const now = useNow();
   const assignment = useQuery({
     ...assignmentQuery(show.assignmentId ?? "none"),
@@ -140,10 +140,9 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
         score={score}
         runScript={runner.runScript}
         checkShow={runner.checkShow}
-        describeShow={(timeline) => {
-          const { summary, steps } = describeShow(timeline, layout, beatMap);
-          return [summary, ...steps].join(" ");
-        }}
+        drawRibbon={runner.drawRibbon}
+        describeShow={runner.describeShow}
+        openAt={openAt}
         draft={{
           userId: session.user.id,
           showId: show.id,
@@ -158,6 +157,13 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
       />
     </Suspense>
   );
+}
+
+/** Where a link from a comment leads: `?line=12` a line of the script, `?at=3840` a moment in ticks. */
+function usePlaceInAddress() {
+  const [search] = useSearchParams();
+  const read = (name: string) => (/^\d{1,9}$/.test(search.get(name) ?? "") ? Number(search.get(name)) : null);
+  return { line: read("line"), tick: read("at") };
 }
 
 function showHandedIn(result: HandInResult, onOpen: () => void): void {

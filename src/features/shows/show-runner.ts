@@ -1,6 +1,8 @@
 import * as Comlink from "comlink";
 import type { Finding, RunInput, RunOutcome } from "../../../sandbox/engine/model.ts";
+import type { ShowDescription } from "../../../sandbox/timeline/describe.ts";
 import type { Timeline } from "../../../sandbox/timeline/model.ts";
+import type { RibbonCells, RibbonSize } from "../../../sandbox/timeline/ribbon.ts";
 import { RunClient } from "../../lib/run-client.ts";
 import type { CheckWorker } from "../../workers/check.worker.ts";
 
@@ -33,6 +35,14 @@ export class ShowRunner {
     const { layout, song } = this.#setting;
     return this.#checks.check({ timeline, layout, song });
   };
+
+  /** The ribbon of a timeline of this setting. Bound. */
+  readonly drawRibbon = (timeline: Timeline, size: RibbonSize): Promise<RibbonCells> =>
+    this.#runs.drawRibbon(timeline, this.#setting.layout, size);
+
+  /** A timeline of this setting in words. Bound. */
+  readonly describeShow = (timeline: Timeline): Promise<ShowDescription> =>
+    this.#runs.describe(timeline, this.#setting);
 
   dispose(): void {
     this.#runs.dispose();

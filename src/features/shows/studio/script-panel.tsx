@@ -17,6 +17,8 @@ export interface ScriptPanelHandle {
 export interface ScriptPanelProps {
   /** The text to begin with. */
   source: string;
+  /** A line to go to at opening, and again when it changes. */
+  openLine: number | null;
   names: ScriptNames;
   problem: Problem | null;
   actLines: readonly number[];
@@ -34,7 +36,8 @@ const SIZE_KEY = "duskbell-script-large";
 
 /** The script with its head: what is on stage, the size of the letters, Run. */
 export function ScriptPanel(props: ScriptPanelProps) {
-  const { source, names, problem, actLines, player, stageNote, isRunning, onChange, onRun, onSave, ref } = props;
+  const { source, openLine, names, problem, actLines, player, stageNote, isRunning, onChange, onRun, onSave, ref } =
+    props;
   const hostRef = useRef<HTMLDivElement>(null);
   const hintId = useId();
   const [isLarge, setIsLarge] = useState(() => localStorage.getItem(SIZE_KEY) === "yes");
@@ -57,6 +60,9 @@ export function ScriptPanel(props: ScriptPanelProps) {
     return made;
   }, []);
 
+  useEffect(() => {
+    if (openLine !== null) editor?.goToLine(openLine);
+  }, [editor, openLine]);
   useEffect(() => editor?.setNames(names), [editor, names]);
   useEffect(() => editor?.setProblem(problem), [editor, problem]);
   useEffect(() => editor?.setActLines(actLines), [editor, actLines]);

@@ -2,14 +2,13 @@ import { useCallback, useEffect, useMemo, useState } from "react";
 import { SIDES, type Layout } from "../../../../shared/contracts/square.ts";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
-import { ribbonCells, type RibbonCells } from "../../../../sandbox/timeline/ribbon.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
-import { queueDrawing } from "../../../components/draw-queue.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
 import { LargeRibbon } from "../ribbon/large-ribbon.tsx";
 import { findSongPlace, nearestBarLine, type TickLoop } from "../ribbon/song-place.ts";
 import { findRibbonTimeline, type RunState } from "./run-model.ts";
 import type { ShowPlayer } from "./show-player.ts";
+import { useRibbonCells, type ShowPictures } from "./use-show-pictures.ts";
 import { StageWindow, type StageWindowProps } from "./stage-window.tsx";
 import { TransportBar } from "./transport-bar.tsx";
 import { useTransport } from "./use-transport.ts";
@@ -20,14 +19,16 @@ const RIBBON_COLUMNS = 340;
 export interface SongColumnProps extends StageWindowProps {
   song: BeatMap;
   run: RunState;
+  drawRibbon: ShowPictures["drawRibbon"];
 }
 
 /** The stage, the transport and the ribbon, one under the other. */
-export function SongColumn({ song, run, ...stage }: SongColumnProps) {
+export function SongColumn({ song, run, drawRibbon, ...stage }: SongColumnProps) {
   const { layout, player } = stage;
   const transport = useTransport(player);
   const timeline = findRibbonTimeline(run);
-  const cells = useRibbonCells(timeline, layout);
+  const size = useMemo(() => ({ rows: layout.fronts.length, columns: RIBBON_COLUMNS }), [layout]);
+  const cells = useRibbonCells(timeline, drawRibbon, size);
   const bands = useMemo(() => listBands(layout), [layout]);
   const section = usePlayingSection(player, song);
   const thread = useThread();
@@ -60,18 +61,6 @@ export function SongColumn({ song, run, ...stage }: SongColumnProps) {
       </div>
     </section>
   );
-}
-
-/** The cells of a timeline's ribbon, worked out after the paint; the old ones stay until then. */
-function useRibbonCells(timeline: Timeline | null, layout: Layout): RibbonCells | null {
-  const [cells, setCells] = useState<RibbonCells | null>(null);
-  useEffect(() => {
-    if (!timeline) return;
-    return queueDrawing(() =>
-      setCells(ribbonCells(timeline, layout, { rows: layout.fronts.length, columns: RIBBON_COLUMNS })),
-    );
-  }, [timeline, layout]);
-  return timeline ? cells : null;
 }
 
 /** Index of the section that is playing; renders again only when it changes. */

@@ -22,9 +22,10 @@ import { useAsides } from "./use-asides.ts";
 import { useDraft, type DraftSource } from "./use-draft.ts";
 import { usePlayKeys } from "./use-play-keys.ts";
 import { useScriptRun, type ScriptRunOptions } from "./use-script-run.ts";
+import { useDescription, type ShowPictures } from "./use-show-pictures.ts";
 import { VersionDialog } from "./version-dialog.tsx";
 
-export interface StudioProps extends ScriptRunOptions {
+export interface StudioProps extends ScriptRunOptions, ShowPictures {
   title: string;
   /** "A show for the square · due Friday 4 December" */
   context: string;
@@ -38,8 +39,8 @@ export interface StudioProps extends ScriptRunOptions {
   readVersion: (versionId: string) => Promise<string>;
   /** Hands in what is saved; null where there is nobody to hand it to. */
   onHandIn: ((source: string) => Promise<void>) | null;
-  /** Words on what the show looks like, from its timeline; said where the picture is described. */
-  describeShow?: ((timeline: NonNullable<ReturnType<typeof useScriptRun>["state"]["onStage"]>) => string) | undefined;
+  /** Where to open: a line of the script, a moment in ticks (a link from a comment). */
+  openAt: { readonly line: number | null; readonly tick: number | null };
 }
 
 type OpenDialog = { kind: "hand-in" } | { kind: "versions" } | { kind: "version"; version: StudioVersion } | null;
@@ -77,6 +78,10 @@ function OpenStudio(props: OpenStudioProps) {
   useEffect(() => player.setTimeline(run.onStage), [player, run.onStage]);
   useEffect(() => player.setGentle(isGentle), [player, isGentle]);
   usePlayKeys(player);
+  const { line: openLine, tick: openTick } = props.openAt;
+  useEffect(() => {
+    if (openTick !== null) player.seekTick(openTick);
+  }, [player, openTick]);
 
   const actLines = useMemo(() => listActLines(run.onStage), [run.onStage]);
   const findings = listFindings(run);
@@ -113,11 +118,7 @@ function OpenStudio(props: OpenStudioProps) {
     requestAnimationFrame(() => editor.current?.insert(code));
   };
   const asides = useAsides(store, props.readVersion);
-  const { describeShow } = props;
-  const description = useMemo(
-    () => (run.onStage && describeShow ? describeShow(run.onStage) : "Nothing is on stage yet."),
-    [run.onStage, describeShow],
-  );
+  const description = useDescription(run.onStage, props.describeShow);
 
   return (
     <div className="studio" data-tab={selected}>
@@ -143,7 +144,8 @@ function OpenStudio(props: OpenStudioProps) {
           gentleReason={gentleReason}
           onGentle={setWantsGentle}
           onGoToLine={goToLine}
-          description={description}
+          description={description ? [description.summary, ...description.steps].join(" ") : "Nothing is on stage yet."}
+          drawRibbon={props.drawRibbon}
         />
         <div className="studio-work">
           <div
@@ -154,6 +156,7 @@ function OpenStudio(props: OpenStudioProps) {
             <ScriptPanel
               ref={editor}
               source={firstSource}
+              openLine={openLine}
               names={names}
               problem={problem}
               actLines={actLines}

@@ -3,9 +3,9 @@ import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { Icon } from "../../../components/icon.tsx";
 import { findSongPlace, presentClock } from "../ribbon/song-place.ts";
 import type { ShowPlayer } from "./show-player.ts";
+import { SoundPanel } from "./sound-panel.tsx";
 import { SpeedChoice } from "./speed-choice.tsx";
 import { useTransport } from "./use-transport.ts";
-import { VolumeControl } from "./volume-control.tsx";
 
 export interface TransportBarProps {
   song: BeatMap;
@@ -45,12 +45,7 @@ export function TransportBar({ song, player, onToggle, onToggleLoop }: Transport
           <span className="studio-toggle-word">Loop</span> <b>{state.isLooping ? "on" : "off"}</b>
         </button>
         <SpeedChoice rate={state.rate} onRate={(rate) => player.transport.setRate(rate)} />
-        <VolumeControl
-          volume={state.volume}
-          hasSound={state.hasSound}
-          hasFailed={state.hasFailed}
-          onVolume={(volume) => player.transport.setVolume(volume)}
-        />
+        <SoundPanel transport={player.transport} state={state} />
       </div>
     </div>
   );
