@@ -1,6 +1,6 @@
-import { eq } from "drizzle-orm";
+import { and, eq } from "drizzle-orm";
 import { ribbonCells } from "../../sandbox/timeline/ribbon.ts";
-import { drafts, shows } from "../db/schema/index.ts";
+import { draftHistory, drafts, shows } from "../db/schema/index.ts";
 import type { FeatureDeps } from "../deps.ts";
 import { findSong } from "../event/song.queries.ts";
 import { getCurrentLayout } from "../event/square.queries.ts";
@@ -23,7 +23,13 @@ export function createDraftRibbons({ db, runs, log }: FeatureDeps): DraftRibbons
 
   async function runDraft(showId: string): Promise<void> {
     const draft = db
-      .select({ source: drafts.source, songId: shows.songId, seed: shows.seed, assignmentId: shows.assignmentId })
+      .select({
+        revision: drafts.revision,
+        source: drafts.source,
+        songId: shows.songId,
+        seed: shows.seed,
+        assignmentId: shows.assignmentId,
+      })
       .from(drafts)
       .innerJoin(shows, eq(shows.id, drafts.showId))
       .where(eq(drafts.showId, showId))
@@ -37,9 +43,11 @@ export function createDraftRibbons({ db, runs, log }: FeatureDeps): DraftRibbons
       classId === undefined ? {} : { classId },
     );
     if (!outcome.ok) return;
-    db.update(drafts)
-      .set({ ribbon: encodeRibbon(ribbonCells(outcome.timeline, layout)) })
-      .where(eq(drafts.showId, showId))
+    const ribbon = encodeRibbon(ribbonCells(outcome.timeline, layout));
+    db.update(drafts).set({ ribbon }).where(eq(drafts.showId, showId)).run();
+    db.update(draftHistory)
+      .set({ ribbon })
+      .where(and(eq(draftHistory.showId, showId), eq(draftHistory.revision, draft.revision)))
       .run();
   }
 

@@ -49,6 +49,15 @@ export const DraftSchema = z.object({
 });
 export type Draft = z.infer<typeof DraftSchema>;
 
+export const EarlierDraftSchema = z.object({
+  revision: z.int().min(0),
+  savedAt: InstantSchema,
+  /** Display name of the author who wrote it; null for a text that nobody has saved yet. */
+  by: z.string().nullable(),
+  ribbon: RibbonSchema.nullable(),
+});
+export type EarlierDraft = z.infer<typeof EarlierDraftSchema>;
+
 export const VersionSummarySchema = z.object({
   id: VersionIdSchema,
   number: z.int(),
@@ -144,6 +153,24 @@ export const showsContract = defineContract({
     // `draft-conflict` carries { draft: Draft }: what the server holds.
     problems: ["invalid-request", "not-found", "draft-conflict", "key-reused", "too-large"],
     isIdempotent: true,
+  },
+  history: {
+    method: "GET",
+    path: "/api/shows/:showId/history",
+    summary: "Lists earlier texts of a draft, newest first; the first is the draft itself.",
+    access: ofAuthorOrTeacher,
+    params,
+    response: z.object({ drafts: z.array(EarlierDraftSchema) }),
+    problems: ["not-found"],
+  },
+  earlierDraft: {
+    method: "GET",
+    path: "/api/shows/:showId/history/:revision",
+    summary: "Gives one earlier text of a draft.",
+    access: ofAuthorOrTeacher,
+    params: z.object({ showId: ShowIdSchema, revision: z.coerce.number().int().min(0) }),
+    response: DraftSchema,
+    problems: ["not-found"],
   },
   version: {
     method: "GET",

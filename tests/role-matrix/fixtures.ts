@@ -99,6 +99,8 @@ export const FIXTURES: Readonly<Record<string, Fixture>> = {
   "shows.update": ofShow({ title: "Another title" }),
   "shows.duplicate": ofShow(),
   "shows.saveDraft": ofShow({ baseRevision: 1, source: "// saved\n" }),
+  "shows.history": ofShow(),
+  "shows.earlierDraft": call(({ showId }) => ({ params: { showId, revision: 1 } })),
   "shows.version": call(({ forwardedVersionId: versionId }) => ({ params: { versionId } })),
 
   "marking.inbox": nothing,

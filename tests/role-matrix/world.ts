@@ -2,7 +2,7 @@ import { LESSONS } from "../../lessons/index.ts";
 import type { MidiFile } from "../../sandbox/music/midi-file.ts";
 import { writeMidi } from "../../sandbox/music/write-midi.ts";
 import type { Db } from "../../server/db/connection.ts";
-import { signInResets } from "../../server/db/schema/index.ts";
+import { draftHistory, signInResets } from "../../server/db/schema/index.ts";
 import { createSecretHasher } from "../../server/identity/secret-hasher.ts";
 import type { Relation, Role } from "../../shared/roles.ts";
 import {
@@ -170,6 +170,10 @@ export async function buildWorld(db: Db, now: number) {
   const openAssignment = assignment();
   // A show of each student for the open assignment, so that a hand-in fails for nothing but access.
   const handIns = mapPeople(people, (userId) => show(userId, members.includes(userId) ? openAssignment : null));
+
+  db.insert(draftHistory)
+    .values({ showId: handIns["student-own"], revision: 1, source: CANARY, beganAt: now, savedAt: now, savedBy: own })
+    .run();
 
   const submitted = work("submitted");
   buildMark(db, { submissionId: submitted.id, markedBy: teacher, note: CANARY });

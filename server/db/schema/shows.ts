@@ -51,6 +51,28 @@ export const drafts = sqliteTable("drafts", {
   ribbon: blob("ribbon", { mode: "buffer" }),
 });
 
+/**
+ * Earlier texts of a draft: one row for a few minutes of one person's edits, so that a lesson is some
+ * ten rows. The last row is the draft itself.
+ */
+export const draftHistory = sqliteTable(
+  "draft_history",
+  {
+    showId: text("show_id")
+      .notNull()
+      .references(() => shows.id, { onDelete: "cascade" }),
+    revision: integer("revision").notNull(),
+    source: text("source").notNull(),
+    /** The first save that went into the row. */
+    beganAt: instant("began_at").notNull(),
+    savedAt: instant("saved_at").notNull(),
+    savedBy: text("saved_by").references(() => users.id),
+    /** Ribbon cells of its run on the server; null when it did not run well. */
+    ribbon: blob("ribbon", { mode: "buffer" }),
+  },
+  (table) => [primaryKey({ columns: [table.showId, table.revision] })],
+);
+
 /** What was handed in, as it was: never changed, never deleted (triggers refuse it). */
 export const showVersions = sqliteTable(
   "show_versions",

@@ -2,6 +2,7 @@ import type { showsContract } from "../../../shared/contracts/shows.ts";
 import type { FeatureDeps } from "../../deps.ts";
 import type { Handlers } from "../../http/mount.ts";
 import { createDraftRibbons } from "../../show-runs/draft-ribbons.ts";
+import { getEarlierDraft, listHistory } from "./draft-history.service.ts";
 import {
   changeShow,
   createShow,
@@ -34,6 +35,8 @@ export function createShowsHandlers(deps: FeatureDeps): Handlers<typeof showsCon
       ribbons.refresh(params.showId);
       return saved;
     },
+    history: ({ actor, params }) => ({ drafts: listHistory(deps.db, actor, params.showId) }),
+    earlierDraft: ({ actor, params }) => getEarlierDraft(deps.db, actor, params.showId, params.revision),
     version: ({ actor, params }) => getVersionDetail(deps.db, actor, params.versionId),
   };
 }

@@ -14,6 +14,7 @@ import { presentRibbon } from "../../show-runs/ribbon-blob.ts";
 import { findLatestRun, findVersion, listLatestRuns } from "../../show-runs/runs.queries.ts";
 import { fieldProblem } from "../../work/field-problem.ts";
 import { listClassRelations, listShowRelations, listVersionRelations } from "../../work/relations.queries.ts";
+import { keepInHistory } from "./draft-history.queries.ts";
 import { presentDraft, presentShow, presentShows } from "./shows.presenter.ts";
 import {
   findAssignment,
@@ -154,6 +155,7 @@ export function saveDraft(
     if (held.revision === input.baseRevision) {
       const saved = { revision: held.revision + 1, source: input.source, savedAt: clock.now(), savedBy: actor.userId };
       updateDraft(tx, showId, saved);
+      keepInHistory(tx, held, saved);
       return { revision: saved.revision, savedAt: saved.savedAt };
     }
     const isRepeat =
@@ -185,7 +187,8 @@ export function getVersionDetail(db: Db, actor: Actor, versionId: string): Versi
   };
 }
 
-function getRelatedShow(db: Db, actor: Actor, showId: string): ShowWithDraft {
+/** A show that the caller stands to in a way the endpoint grants. Throws `not-found`. */
+export function getRelatedShow(db: Db, actor: Actor, showId: string): ShowWithDraft {
   const row = getShow(db, showId);
   assertRelation(actor, listShowRelations(db, actor.userId, row.show));
   return row;

@@ -281,6 +281,49 @@ describe("PUT /api/shows/:showId/draft", () => {
   });
 });
 
+describe("GET /api/shows/:showId/history", () => {
+  const save = (id: string, baseRevision: number, source: string, as = wren) =>
+    server.call(contracts.shows.saveDraft, { ...ofShow(id), body: { baseRevision, source } }, { as });
+  const list = (id: string, as = wren) => server.call(contracts.shows.history, ofShow(id), { as });
+  const read = (id: string, revision: number, as = wren) =>
+    server.call(contracts.shows.earlierDraft, { params: { showId: id, revision } }, { as });
+  const body = "square.all.on();\nwait(4);\nsquare.all.off();\n";
+
+  it("keeps a few minutes of one person's edits as one text, and the text they began with", async () => {
+    const show = buildShow(server.db, { authorIds: [wren], source: body });
+    await save(show.id, 1, `${body}// one\n`);
+    await save(show.id, 2, `${body}// one two\n`);
+    expect((await list(show.id)).body.drafts.map((draft: { revision: number }) => draft.revision)).toEqual([3, 1]);
+    expect((await read(show.id, 1)).body.source).toBe(body);
+    expect((await read(show.id, 2)).status).toBe(404);
+    server.clock.advance(6 * 60_000);
+    await save(show.id, 3, `${body}// later\n`);
+    expect((await list(show.id)).body.drafts).toHaveLength(3);
+    await vi.waitFor(async () => expect((await list(show.id)).body.drafts[0].ribbon).not.toBeNull());
+  });
+
+  it("keeps a script that was deleted, replaced, or written over by a partner, however soon", async () => {
+    const show = buildShow(server.db, { authorIds: [wren, ash], source: "" });
+    await save(show.id, 1, body);
+    await save(show.id, 2, "");
+    await save(show.id, 3, "song.end;\n");
+    await save(show.id, 4, "song.end; // ash\n", ash);
+    const { drafts: kept } = (await list(show.id)).body;
+    const texts = await Promise.all(
+      kept.map(async ({ revision }: { revision: number }) => (await read(show.id, revision)).body.source as string),
+    );
+    expect(texts).toEqual(["song.end; // ash\n", "song.end;\n", body, ""]);
+    expect(new Set(kept.map(({ by }: { by: string | null }) => by)).size).toBe(3);
+  });
+
+  it("is for authors and their teacher only", async () => {
+    const show = buildShow(server.db, { authorIds: [wren], source: body });
+    await save(show.id, 1, "mine\n");
+    expect((await list(show.id, teacher)).status).toBe(200);
+    for (const as of [ash, otherTeacher]) expect((await read(show.id, 1, as)).status).toBe(404);
+  });
+});
+
 describe("GET /api/versions/:versionId", () => {
   const get = (id: string, as: string) => server.call(contracts.shows.version, { params: { versionId: id } }, { as });
 
