@@ -47,13 +47,14 @@ export function linearToSrgb(linear: number): number {
 /** Linear channel of every whole sRGB value: sampling reads this instead of taking powers. */
 const LINEAR_OF_BYTE: Float64Array = Float64Array.from({ length: 256 }, (_, value) => srgbToLinear(value));
 
+/** Gives the linear channel (0 to 1) of the lowest eight bits of `value`, an sRGB channel. */
+export function channelToLinear(value: number): number {
+  return LINEAR_OF_BYTE[value & 0xff] ?? 0;
+}
+
 /** Gives the linear red, green and blue (0 to 1) of a colour 0xRRGGBB. */
 export function colourToLinear(colour: number): readonly [number, number, number] {
-  return [
-    LINEAR_OF_BYTE[(colour >>> 16) & 0xff] ?? 0,
-    LINEAR_OF_BYTE[(colour >>> 8) & 0xff] ?? 0,
-    LINEAR_OF_BYTE[colour & 0xff] ?? 0,
-  ];
+  return [channelToLinear(colour >>> 16), channelToLinear(colour >>> 8), channelToLinear(colour)];
 }
 
 /** Gives the colour 0xRRGGBB nearest to three linear channels (0 to 1; clamped). */

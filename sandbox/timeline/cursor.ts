@@ -1,8 +1,9 @@
 import type { Layout } from "../../shared/contracts/square.ts";
 import { listLights, type Light } from "../square/lights.ts";
-import { colourToLinear, levelToY, relativeLuminance, WARM_WHITE } from "./colour.ts";
+import { channelToLinear, colourToLinear, levelToY, relativeLuminance, WARM_WHITE } from "./colour.ts";
 import { NO_COLOUR, type Timeline } from "./model.ts";
-import { buildTracks, channelAt, envelopeAt, findEntry, levelAt, type Tracks } from "./tracks.ts";
+import { buildTracks, channelAt, envelopeAt, findEntry, levelAt, type LevelTrack, type Tracks } from "./tracks.ts";
+import { listLeaders } from "./twins.ts";
 
 /** The level at which a switched light comes on (rule 20). */
 export const SWITCH_LEVEL = 50;
@@ -63,6 +64,7 @@ export function createLightsCursor(timeline: Timeline, lights: readonly SampledL
 }
 
 const WARM = colourToLinear(WARM_WHITE);
+const [WARM_RED, WARM_GREEN, WARM_BLUE] = WARM;
 
 class TrackCursor implements Cursor {
   readonly frame: Frame;
@@ -75,8 +77,11 @@ class TrackCursor implements Cursor {
   readonly #pulseEntry: Int32Array;
   /** Entries of the pulses that run, in order. */
   readonly #running: number[][];
-  /** Where each light was read last. */
+  /** Where each light was read last, and up to where (outside) it shows the same as there. */
   readonly #tick: Float64Array;
+  readonly #until: Float64Array;
+  /** For each light the first that is told the same; looked for when all are read at once. */
+  #leaders: Uint32Array | null = null;
 
   constructor(timeline: Timeline, lights: readonly SampledLight[], tracks: Tracks) {
     this.#timeline = timeline;
@@ -89,15 +94,23 @@ class TrackCursor implements Cursor {
     this.#pulseEntry = before(tracks.pulse.first);
     this.#running = lights.map(() => []);
     this.#tick = new Float64Array(lights.length).fill(-1);
+    this.#until = new Float64Array(lights.length).fill(-1);
   }
 
   seek(tick: number): Frame {
-    this.frame.tick = tick;
-    for (let light = 0; light < this.#lights.length; light++) this.seekLight(light, tick);
-    return this.frame;
+    const { frame } = this;
+    const leaders = (this.#leaders ??= listLeaders(this.#lights, this.#tracks));
+    frame.tick = tick;
+    for (let light = 0; light < leaders.length; light++) {
+      const leader = leaders[light] ?? light;
+      if (leader === light) this.seekLight(light, tick);
+      else this.#copy(leader, light);
+    }
+    return frame;
   }
 
   seekLight(light: number, tick: number): Frame {
+    if (tick >= (this.#tick[light] ?? 0) && tick < (this.#until[light] ?? 0)) return this.frame;
     // Not a number fails both comparisons: such a moment is dark, too.
     if (!(tick >= 0 && tick < this.#timeline.endTick)) {
       this.#darken(light);
@@ -109,6 +122,7 @@ class TrackCursor implements Cursor {
     const traits = this.#lights[light];
     if (traits?.hasColour) this.#showColour(light, tick);
     else this.#showPlain(light, tick, traits?.isSwitched ?? false);
+    this.#until[light] = this.#steadyUntil(light, tick, traits?.hasColour ?? false);
     return this.frame;
   }
 
@@ -117,6 +131,33 @@ class TrackCursor implements Cursor {
     rgb[light * 3] = rgb[light * 3 + 1] = rgb[light * 3 + 2] = 0;
     level[light] = 0;
     cue[light] = colourCue[light] = -1;
+    this.#until[light] = -1;
+  }
+
+  #copy(from: number, to: number): void {
+    const { rgb, level, cue, colourCue } = this.frame;
+    rgb[to * 3] = rgb[from * 3] ?? 0;
+    rgb[to * 3 + 1] = rgb[from * 3 + 1] ?? 0;
+    rgb[to * 3 + 2] = rgb[from * 3 + 2] ?? 0;
+    level[to] = level[from] ?? 0;
+    cue[to] = cue[from] ?? -1;
+    colourCue[to] = colourCue[from] ?? -1;
+    // Its own entries were not moved on, so what is shown says nothing about them.
+    this.#until[to] = -1;
+  }
+
+  /** Up to where (outside) a light that was just read at `tick` stays as it is; `tick` itself while it moves. */
+  #steadyUntil(light: number, tick: number, hasColour: boolean): number {
+    const { level, colour, pulse } = this.#tracks;
+    if ((this.#running[light] ?? []).length > 0) return tick;
+    let until = Math.min(this.#timeline.endTick, nextTick(pulse, light, this.#pulseEntry[light] ?? 0));
+    const levelEntry = this.#levelEntry[light] ?? 0;
+    if (isMoving(level, light, levelEntry, tick)) return tick;
+    until = Math.min(until, nextTick(level, light, levelEntry));
+    if (!hasColour) return until;
+    const colourEntry = this.#colourEntry[light] ?? 0;
+    if (isMoving(colour, light, colourEntry, tick)) return tick;
+    return Math.min(until, nextTick(colour, light, colourEntry));
   }
 
   #advance(light: number, tick: number): void {
@@ -129,16 +170,44 @@ class TrackCursor implements Cursor {
       tick,
     );
     const running = this.#running[light] ?? [];
-    let kept = 0;
-    for (const entry of running) if ((pulse.end[entry] ?? 0) > tick) running[kept++] = entry;
-    running.length = kept;
+    if (running.length > 0) {
+      let kept = 0;
+      for (let place = 0; place < running.length; place++) {
+        const entry = running[place] ?? 0;
+        if ((pulse.end[entry] ?? 0) > tick) running[kept++] = entry;
+      }
+      running.length = kept;
+    }
     const until = pulse.first[light + 1] ?? 0;
     let entry = this.#pulseEntry[light] ?? 0;
     while (entry + 1 < until && (pulse.tick[entry + 1] ?? 0) <= tick) {
       entry++;
-      if ((pulse.end[entry] ?? 0) > tick) running.push(entry);
+      if ((pulse.end[entry] ?? 0) <= tick) continue;
+      if (running.length > 0) this.#dropOutshone(running, entry);
+      running.push(entry);
     }
     this.#pulseEntry[light] = entry;
+  }
+
+  /**
+   * Takes out running pulses that a pulse which starts now outshines to their end: of the same colour
+   * and no longer. Without it a thousand pulses on top of each other would be read at every moment.
+   */
+  #dropOutshone(running: number[], newest: number): void {
+    const { tick, length, end, cue } = this.#tracks.pulse;
+    const { colour } = this.#timeline.cues;
+    const newestColour = colour[cue[newest] ?? 0];
+    const newestEnd = (tick[newest] ?? 0) + (length[newest] ?? 0);
+    let kept = 0;
+    for (let place = 0; place < running.length; place++) {
+      const entry = running[place] ?? 0;
+      const isOutshone =
+        (tick[entry] ?? 0) + (length[entry] ?? 0) <= newestEnd &&
+        (end[entry] ?? 0) <= (end[newest] ?? 0) &&
+        colour[cue[entry] ?? 0] === newestColour;
+      if (!isOutshone) running[kept++] = entry;
+    }
+    running.length = kept;
   }
 
   #goBack(light: number, tick: number): void {
@@ -168,7 +237,9 @@ class TrackCursor implements Cursor {
         cue = levels.cue[levelEntry] ?? -1;
       }
     }
-    for (const entry of this.#running[light] ?? []) {
+    const running = this.#running[light] ?? [];
+    for (let place = 0; place < running.length; place++) {
+      const entry = running[place] ?? 0;
       const envelope = envelopeAt(pulse, entry, tick);
       const from = pulse.cue[entry] ?? -1;
       if (envelope > best || (envelope === best && from > cue)) {
@@ -178,7 +249,9 @@ class TrackCursor implements Cursor {
     }
     if (isSwitched && cue >= 0) best = 100;
     const y = levelToY(best);
-    for (let channel = 0; channel < 3; channel++) frame.rgb[light * 3 + channel] = (WARM[channel] ?? 0) * y;
+    frame.rgb[light * 3] = WARM_RED * y;
+    frame.rgb[light * 3 + 1] = WARM_GREEN * y;
+    frame.rgb[light * 3 + 2] = WARM_BLUE * y;
     frame.level[light] = best;
     frame.cue[light] = cue;
     frame.colourCue[light] = -1;
@@ -188,7 +261,9 @@ class TrackCursor implements Cursor {
   #showColour(light: number, tick: number): void {
     const { level: levels, colour, pulse } = this.#tracks;
     const { frame } = this;
-    let [red, green, blue] = [1, 1, 1];
+    let red = 1;
+    let green = 1;
+    let blue = 1;
     let ownCue = -1;
     const colourEntry = this.#colourEntry[light] ?? -1;
     if (colourEntry >= (colour.first[light] ?? 0)) {
@@ -198,49 +273,71 @@ class TrackCursor implements Cursor {
       ownCue = colour.cue[colourEntry] ?? -1;
     }
     const own = relativeLuminance(red, green, blue);
-    const at = light * 3;
-    frame.rgb[at] = frame.rgb[at + 1] = frame.rgb[at + 2] = 0;
-    frame.level[light] = 0;
-    let brightest = 0;
-    let cue = -1;
-    let colourCue = -1;
-    const add = (
-      level: number,
-      r: number,
-      g: number,
-      b: number,
-      luminance: number,
-      from: number,
-      colourFrom: number,
-    ) => {
-      const y = levelToY(level);
-      if (y * luminance <= 0) return;
-      frame.rgb[at] = Math.max(frame.rgb[at] ?? 0, y * r);
-      frame.rgb[at + 1] = Math.max(frame.rgb[at + 1] ?? 0, y * g);
-      frame.rgb[at + 2] = Math.max(frame.rgb[at + 2] ?? 0, y * b);
-      frame.level[light] = Math.max(frame.level[light] ?? 0, level);
-      if (y * luminance > brightest || (y * luminance === brightest && from > cue)) {
-        brightest = y * luminance;
-        cue = from;
-        colourCue = colourFrom;
-      }
-    };
+    const shown = this.#shown;
+    shown.red = shown.green = shown.blue = shown.level = shown.brightest = 0;
+    shown.cue = shown.colourCue = -1;
     const levelEntry = this.#levelEntry[light] ?? -1;
     if (levelEntry >= (levels.first[light] ?? 0))
-      add(levelAt(levels, levelEntry, tick), red, green, blue, own, levels.cue[levelEntry] ?? -1, ownCue);
-    for (const entry of this.#running[light] ?? []) {
+      addTo(shown, levelAt(levels, levelEntry, tick), red, green, blue, own, levels.cue[levelEntry] ?? -1, ownCue);
+    const running = this.#running[light] ?? [];
+    for (let place = 0; place < running.length; place++) {
+      const entry = running[place] ?? 0;
       const envelope = envelopeAt(pulse, entry, tick);
       const from = pulse.cue[entry] ?? -1;
       const named = this.#timeline.cues.colour[from] ?? NO_COLOUR;
       if (named === NO_COLOUR) {
-        add(envelope, red, green, blue, own, from, ownCue);
+        addTo(shown, envelope, red, green, blue, own, from, ownCue);
       } else {
-        const [r, g, b] = colourToLinear(named);
-        add(envelope, r, g, b, relativeLuminance(r, g, b), from, from);
+        const r = channelToLinear(named >>> 16);
+        const g = channelToLinear(named >>> 8);
+        const b = channelToLinear(named);
+        addTo(shown, envelope, r, g, b, relativeLuminance(r, g, b), from, from);
       }
     }
-    frame.cue[light] = cue;
-    frame.colourCue[light] = colourCue;
+    const at = light * 3;
+    frame.rgb[at] = shown.red;
+    frame.rgb[at + 1] = shown.green;
+    frame.rgb[at + 2] = shown.blue;
+    frame.level[light] = shown.level;
+    frame.cue[light] = shown.cue;
+    frame.colourCue[light] = shown.colourCue;
+  }
+
+  /** What the light being read shows so far; one object for all, since it is filled a million times. */
+  readonly #shown: Shown = { red: 0, green: 0, blue: 0, level: 0, brightest: 0, cue: -1, colourCue: -1 };
+}
+
+interface Shown {
+  red: number;
+  green: number;
+  blue: number;
+  level: number;
+  brightest: number;
+  cue: number;
+  colourCue: number;
+}
+
+/** Adds a level in a colour of this luminance to what a light shows. */
+function addTo(
+  shown: Shown,
+  level: number,
+  red: number,
+  green: number,
+  blue: number,
+  luminance: number,
+  cue: number,
+  colourCue: number,
+): void {
+  const y = levelToY(level);
+  if (y * luminance <= 0) return;
+  if (y * red > shown.red) shown.red = y * red;
+  if (y * green > shown.green) shown.green = y * green;
+  if (y * blue > shown.blue) shown.blue = y * blue;
+  if (level > shown.level) shown.level = level;
+  if (y * luminance > shown.brightest || (y * luminance === shown.brightest && cue > shown.cue)) {
+    shown.brightest = y * luminance;
+    shown.cue = cue;
+    shown.colourCue = colourCue;
   }
 }
 
@@ -249,4 +346,19 @@ function nextEntry(ticks: Uint32Array, entry: number, until: number, tick: numbe
   let found = entry;
   while (found + 1 < until && (ticks[found + 1] ?? 0) <= tick) found++;
   return found;
+}
+
+/** Tick of the entry after `entry` of a light, infinity after its last. */
+function nextTick({ first, tick }: Pick<LevelTrack, "first" | "tick">, light: number, entry: number): number {
+  return entry + 1 < (first[light + 1] ?? 0) ? (tick[entry + 1] ?? Infinity) : Infinity;
+}
+
+/** Whether the line of an entry in force has not reached its end. */
+function isMoving(
+  { first, tick, length }: Pick<LevelTrack, "first" | "tick" | "length">,
+  light: number,
+  entry: number,
+  at: number,
+): boolean {
+  return entry >= (first[light] ?? 0) && at < (tick[entry] ?? 0) + (length[entry] ?? 0);
 }
