@@ -5,12 +5,13 @@ import type { CheckContext } from "./context.ts";
 export const BIN_TICKS = CURVE_STEP_TICKS;
 
 /** Gives the number of bins of a show. */
-export function countBins({ timeline }: Pick<CheckContext, "timeline">): number {
-  return Math.ceil(timeline.endTick / BIN_TICKS);
+export function countBins(endTick: number): number {
+  return Math.ceil(endTick / BIN_TICKS);
 }
 
-/** Gives the highest level (0 to 100) that a curve reaches in each bin. */
-export function highestPerBin({ tick, level }: LightCurve, bins: number): Float32Array {
+/** Gives the highest level (0 to 100) that a curve reaches in each bin of a show that ends at `endTick`. */
+export function highestPerBin({ tick, level }: LightCurve, endTick: number): Float32Array {
+  const bins = countBins(endTick);
   const highest = new Float32Array(bins);
   for (let point = 0; point < tick.length; point++) {
     const start = tick[point] ?? 0;
@@ -35,11 +36,9 @@ export function highestPerBin({ tick, level }: LightCurve, bins: number): Float3
 
 /** Gives for each bin whether any light of the square is lit in it. */
 export function litBins(context: CheckContext): Uint8Array {
-  const bins = countBins(context);
+  const bins = countBins(context.timeline.endTick);
   const lit = new Uint8Array(bins);
-  for (const curve of new Set(context.curves())) {
-    const highest = highestPerBin(curve, bins);
-    for (let bin = 0; bin < bins; bin++) if ((highest[bin] ?? 0) > 0) lit[bin] = 1;
-  }
+  for (const { isLit, highest } of new Set(context.facts()))
+    if (isLit) for (let bin = 0; bin < bins; bin++) if ((highest[bin] ?? 0) > 0) lit[bin] = 1;
   return lit;
 }

@@ -62,12 +62,8 @@ function byShare(share: number, good: number, poor: number): Evidence["kind"] {
 }
 
 function litFrontIndexes(context: CheckContext): ReadonlySet<number> {
-  const curves = context.curves();
-  return new Set(
-    context.lights
-      .filter(({ index }) => curves[index]?.level.some((level) => level > 0))
-      .map(({ frontIndex }) => frontIndex),
-  );
+  const facts = context.facts();
+  return new Set(context.lights.filter(({ index }) => facts[index]?.isLit).map(({ frontIndex }) => frontIndex));
 }
 
 function frontsLit(context: CheckContext): ShowEvidence[] {

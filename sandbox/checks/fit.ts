@@ -92,9 +92,8 @@ function listDark(lit: Uint8Array, first: number, last: number): (readonly [numb
 }
 
 function findDarkFronts(context: CheckContext): Finding[] {
-  const curves = context.curves();
-  const isLit = (light: number) => (curves[light]?.level ?? []).some((level) => level > 0);
-  const litFronts = new Set(context.lights.filter((light) => isLit(light.index)).map((light) => light.frontId));
+  const facts = context.facts();
+  const litFronts = new Set(context.lights.filter(({ index }) => facts[index]?.isLit).map(({ frontId }) => frontId));
   const darkLights = context.lights.filter((light) => !litFronts.has(light.frontId));
   const dark = new Map(darkLights.map((light) => [light.frontId, light.frontName]));
   if (dark.size === 0) return [];

@@ -1,6 +1,7 @@
 import type { Finding, Severity } from "../engine/model.ts";
 import { findColourNeverLit } from "./colour-never-lit.ts";
-import { createCheckContext, type CheckContext, type CheckInput } from "./context.ts";
+import type { Timeline } from "../timeline/model.ts";
+import { openSetting, type CheckContext, type CheckInput, type CheckSetting } from "./context.ts";
 import { findFadeCut } from "./fade-cut.ts";
 import { MOST_PLACES } from "./finding.ts";
 import { findFit } from "./fit.ts";
@@ -36,13 +37,20 @@ const RANK: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 };
  * nothing here ever blocks handing in. Throws `RangeError` when the timeline is for another number
  * of lights. The same input gives the same findings.
  */
-export function checkShow(input: CheckInput): Finding[] {
-  return checkContext(createCheckContext(input));
+export function checkShow({ timeline, ...setting }: CheckInput): Finding[] {
+  return createShowCheck(setting)(timeline);
 }
 
-/** As `checkShow`, with a context that others use, too. */
-export function checkContext(context: CheckContext): Finding[] {
-  return mergeFindings(RULES.map((rule) => rule(context)));
+/**
+ * Gives a check of one show after another on the same square, song and rules, which works out again
+ * only what changed since the last one: for a script that is edited. The findings are those of `checkShow`.
+ */
+export function createShowCheck(setting: CheckSetting): (timeline: Timeline) => Finding[] {
+  const open = openSetting(setting);
+  return (timeline) => {
+    const context = open(timeline);
+    return mergeFindings(RULES.map((rule) => rule(context)));
+  };
 }
 
 /**

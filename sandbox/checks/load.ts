@@ -1,10 +1,13 @@
 import type { Circuit } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
+import type { Light } from "../square/lights.ts";
 import { createLightsCursor } from "../timeline/cursor.ts";
 import { nameBar } from "../timeline/words.ts";
-import { BIN_TICKS, countBins, highestPerBin } from "./bins.ts";
+import { BIN_TICKS, countBins } from "./bins.ts";
+import { createRecall } from "./check-memory.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, lineOfCue } from "./finding.ts";
+import type { LightFacts } from "./light-facts.ts";
 import { continuousLimitWatts } from "./load-rules.ts";
 
 /** What a circuit carries in a show. */
@@ -27,35 +30,47 @@ export interface CircuitLoad {
  * wide and count the highest level in them.
  */
 export function listCircuitLoads(context: CheckContext): readonly CircuitLoad[] {
-  const { layout, lights, rules } = context;
-  const bins = countBins(context);
-  const watts = new Map(layout.circuits.map(({ id }) => [id, new Float64Array(bins)]));
-  const curves = context.curves();
-  const known = new Map<object, Float32Array>();
-  for (const light of lights) {
-    const curve = curves[light.index];
-    const sum = watts.get(light.circuit);
-    if (curve === undefined || sum === undefined) continue;
-    const highest = known.get(curve) ?? highestPerBin(curve, bins);
-    known.set(curve, highest);
-    for (let bin = 0; bin < bins; bin++) sum[bin] = (sum[bin] ?? 0) + (light.watts * (highest[bin] ?? 0)) / 100;
-  }
+  const { layout, lights, rules, timeline } = context;
+  const facts = context.facts();
   return layout.circuits.map((circuit) => {
     const onIt = lights.filter((light) => light.circuit === circuit.id);
-    const sum = watts.get(circuit.id) ?? new Float64Array(0);
-    let peakBin = 0;
-    sum.forEach((value, bin) => {
-      if (value > (sum[peakBin] ?? 0)) peakBin = bin;
-    });
+    const peak = recallPeak(
+      context.memory,
+      circuit.id,
+      onIt.map(({ index }) => facts[index]),
+      () => findPeak(facts, onIt, countBins(timeline.endTick)),
+    );
     return {
       circuit,
       limitAmps: continuousLimitWatts(circuit.volts, circuit.breakerAmps, rules.continuousShare) / circuit.volts,
-      peakAmps: (sum[peakBin] ?? 0) / circuit.volts,
-      peakTick: peakBin * BIN_TICKS,
+      peakAmps: peak.watts / circuit.volts,
+      peakTick: peak.bin * BIN_TICKS,
       fullAmps: onIt.reduce((total, light) => total + light.watts, 0) / circuit.volts,
       lights: onIt.map((light) => light.index),
     };
   });
+}
+
+interface Peak {
+  readonly bin: number;
+  readonly watts: number;
+}
+
+const recallPeak = createRecall<Peak>();
+
+/** The first bin in which these lights take most watts. */
+function findPeak(facts: readonly LightFacts[], lights: readonly Light[], bins: number): Peak {
+  const wattsOf = new Map<LightFacts, number>();
+  for (const { index, watts } of lights) {
+    const own = facts[index];
+    if (own?.isLit === true) wattsOf.set(own, (wattsOf.get(own) ?? 0) + watts);
+  }
+  const sum = new Float64Array(bins);
+  for (const [{ highest }, watts] of wattsOf)
+    for (let bin = 0; bin < bins; bin++) sum[bin] = (sum[bin] ?? 0) + (watts * (highest[bin] ?? 0)) / 100;
+  let peak = 0;
+  for (let bin = 1; bin < bins; bin++) if ((sum[bin] ?? 0) > (sum[peak] ?? 0)) peak = bin;
+  return { bin: peak, watts: sum[peak] ?? 0 };
 }
 
 const PLANNING_AID = "This is a planning aid: lamp plates and a licensed electrician decide.";

@@ -1,5 +1,4 @@
-import type { Layout, Side } from "../../shared/contracts/square.ts";
-import { REFERENCE_VIEW, sideGeometry } from "../square/geometry.ts";
+import { REFERENCE_VIEW, type LightGeometry } from "../square/geometry.ts";
 import { paneArea } from "../square/shapes.ts";
 
 /** Side of a cell of the reference picture, in pixels. Blocks are looked at in steps of a cell. */
@@ -15,30 +14,40 @@ export const FLASH_AREA_PIXELS = 21_824;
 /** Number of places of the block in a picture. */
 export const BLOCK_COUNT = (COLUMNS - BLOCK_COLUMNS + 1) * (ROWS - BLOCK_ROWS + 1);
 
-/** Where the lights of one side shine in its reference picture: pixels lit in cells, by light index. */
-export type PictureAreas = ReadonlyMap<number, readonly (readonly [cell: number, pixels: number])[]>;
+/** Where a light shines in the picture: cells, each once, and the pixels lit in each. */
+export interface PictureCells {
+  readonly cell: Uint16Array;
+  readonly pixels: Float64Array;
+}
 
-/** Gives the lit cells of every light in the reference picture of a side, those that stand free included. */
-export function listPictureAreas(layout: Layout, side: Side): PictureAreas {
-  const areas = new Map<number, readonly (readonly [number, number])[]>();
-  for (const front of sideGeometry(layout, side))
-    for (const { lightIndex, panes, beads } of front.lights) {
-      const cells = new Map<number, number>();
-      const add = (column: number, row: number, pixels: number) => {
-        if (column < 0 || row < 0 || column >= COLUMNS || row >= ROWS) return;
-        const cell = row * COLUMNS + column;
-        cells.set(cell, (cells.get(cell) ?? 0) + pixels);
-      };
-      for (const pane of panes) {
-        const filled = paneArea(pane) / Math.max(1e-9, pane.width * pane.height);
-        for (let column = Math.floor(pane.x / CELL); column * CELL < pane.x + pane.width; column++)
-          for (let row = Math.floor(pane.y / CELL); row * CELL < pane.y + pane.height; row++)
-            add(column, row, filled * overlap(pane.x, pane.width, column) * overlap(pane.y, pane.height, row));
-      }
-      for (const { x, y, radius } of beads) add(Math.floor(x / CELL), Math.floor(y / CELL), Math.PI * radius * radius);
-      areas.set(lightIndex, [...cells]);
-    }
-  return areas;
+/** Gives the lit cells of a light as drawn in the reference picture. */
+export function listPictureCells({ panes, beads }: Pick<LightGeometry, "panes" | "beads">): PictureCells {
+  const cells = new Map<number, number>();
+  const add = (column: number, row: number, pixels: number) => {
+    if (column < 0 || row < 0 || column >= COLUMNS || row >= ROWS) return;
+    const cell = row * COLUMNS + column;
+    cells.set(cell, (cells.get(cell) ?? 0) + pixels);
+  };
+  for (const pane of panes) {
+    const filled = paneArea(pane) / Math.max(1e-9, pane.width * pane.height);
+    for (let column = Math.floor(pane.x / CELL); column * CELL < pane.x + pane.width; column++)
+      for (let row = Math.floor(pane.y / CELL); row * CELL < pane.y + pane.height; row++)
+        add(column, row, filled * overlap(pane.x, pane.width, column) * overlap(pane.y, pane.height, row));
+  }
+  for (const { x, y, radius } of beads) add(Math.floor(x / CELL), Math.floor(y / CELL), Math.PI * radius * radius);
+  return toCells(cells);
+}
+
+/** Gives the cells of several lights as one; what two of them fill is counted twice. */
+export function joinCells(parts: readonly PictureCells[]): PictureCells {
+  const cells = new Map<number, number>();
+  for (const { cell, pixels } of parts)
+    cell.forEach((at, place) => cells.set(at, (cells.get(at) ?? 0) + (pixels[place] ?? 0)));
+  return toCells(cells);
+}
+
+function toCells(cells: ReadonlyMap<number, number>): PictureCells {
+  return { cell: Uint16Array.from(cells.keys()), pixels: Float64Array.from(cells.values()) };
 }
 
 /** Length of a stretch inside one cell. */
@@ -47,38 +56,38 @@ function overlap(start: number, length: number, cell: number): number {
 }
 
 /** Gives the lit pixels of a few lights together in every block: by block, left to right and top to bottom. */
-export function sumBlocks(areas: PictureAreas, lights: Iterable<number>): Float64Array {
+export function sumBlocks(parts: Iterable<PictureCells>): Float64Array {
   const cells = new Float64Array(COLUMNS * ROWS);
-  for (const light of lights)
-    // Lights that overlap do not light a pixel twice.
-    for (const [cell, pixels] of areas.get(light) ?? [])
-      cells[cell] = Math.min(CELL * CELL, (cells[cell] ?? 0) + pixels);
+  for (const { cell, pixels } of parts)
+    for (let place = 0; place < cell.length; place++) {
+      const at = cell[place] ?? 0;
+      // Lights that overlap do not light a pixel twice.
+      cells[at] = Math.min(CELL * CELL, (cells[at] ?? 0) + (pixels[place] ?? 0));
+    }
   const wide = COLUMNS + 1;
   const sums = new Float64Array(wide * (ROWS + 1));
   for (let row = 0; row < ROWS; row++)
-    for (let column = 0; column < COLUMNS; column++)
-      sums[(row + 1) * wide + column + 1] =
+    for (let column = 0; column < COLUMNS; column++) {
+      const at = (row + 1) * wide + column + 1;
+      sums[at] =
         (cells[row * COLUMNS + column] ?? 0) +
-        (sums[row * wide + column + 1] ?? 0) +
-        (sums[(row + 1) * wide + column] ?? 0) -
-        (sums[row * wide + column] ?? 0);
+        (sums[at - wide] ?? 0) +
+        (sums[at - 1] ?? 0) -
+        (sums[at - wide - 1] ?? 0);
+    }
   const blocks = new Float64Array(BLOCK_COUNT);
   let block = 0;
   for (let row = 0; row + BLOCK_ROWS <= ROWS; row++)
     for (let column = 0; column + BLOCK_COLUMNS <= COLUMNS; column++) {
-      const at = (y: number, x: number) => sums[y * wide + x] ?? 0;
+      const top = row * wide + column;
+      const bottom = top + BLOCK_ROWS * wide;
       blocks[block++] =
-        at(row + BLOCK_ROWS, column + BLOCK_COLUMNS) -
-        at(row, column + BLOCK_COLUMNS) -
-        at(row + BLOCK_ROWS, column) +
-        at(row, column);
+        (sums[bottom + BLOCK_COLUMNS] ?? 0) - (sums[top + BLOCK_COLUMNS] ?? 0) - (sums[bottom] ?? 0) + (sums[top] ?? 0);
     }
   return blocks;
 }
 
-/** Gives the lit pixels of a few lights all together: no block has more. */
-export function sumAll(areas: PictureAreas, lights: Iterable<number>): number {
-  let sum = 0;
-  for (const light of lights) for (const [, pixels] of areas.get(light) ?? []) sum += pixels;
-  return sum;
+/** Gives the lit pixels of some cells all together: no block has more. */
+export function sumPixels({ pixels }: PictureCells): number {
+  return pixels.reduce((sum, value) => sum + value, 0);
 }

@@ -1,23 +1,14 @@
-import { SIDES, type Side } from "../../shared/contracts/square.ts";
+import type { Side } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
-import type { Light } from "../square/lights.ts";
-import { colourToLinear, relativeLuminance, WARM_WHITE } from "../timeline/colour.ts";
-import type { LightCurve } from "../timeline/curves.ts";
 import { nameBar } from "../timeline/words.ts";
+import { createRecall } from "./check-memory.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, linesAt } from "./finding.ts";
-import { FORMER_STEP, formerRed, isRedChange, isSaturatedRed, type LinearColour } from "./flash-series.ts";
-import {
-  BLOCK_COUNT,
-  FLASH_AREA_PIXELS,
-  listPictureAreas,
-  sumAll,
-  sumBlocks,
-  type PictureAreas,
-} from "./picture-area.ts";
-import { isWithinSecond, sortRises, type Rise } from "./rises.ts";
+import { groupLights, type LightGroup } from "./light-groups.ts";
+import { BLOCK_COUNT, FLASH_AREA_PIXELS, joinCells, sumBlocks, sumPixels, type PictureCells } from "./picture-area.ts";
+import { isWithinSecond, listEvents, listRises } from "./rises.ts";
+import { measureSides, type SideMeasure } from "./side-measures.ts";
 import { countStreetFlashes } from "./street-flash.ts";
-import { findTransitions } from "./transitions.ts";
 
 /**
  * The picture rule: what flashes on a screen that shows a side of the square. WCAG 2.2, success
@@ -38,121 +29,87 @@ export interface PictureCount {
   readonly lights: readonly number[];
 }
 
-type RiseTimes = (curve: LightCurve, light: Light) => readonly number[];
+/** The measures of a red flash; the worse of the two counts. */
+const RED_MEASURES = ["formerRed", "currentRed"] as const;
+
+const recallCount = createRecall<PictureCount>();
 
 /** Gives the flash counts of the reference picture of each side that has lights: general, then red. */
 export function countPictureFlashes(context: CheckContext): readonly PictureCount[] {
-  const sides = SIDES.filter((side) => context.lights.some((light) => light.side === side));
-  const general = listRises(context, generalRises);
-  const reds = [formerRedRises, currentRedRises].map((measure) => listRises(context, measure));
-  return sides.flatMap((side) => {
-    const areas = listPictureAreas(context.layout, side);
-    const [former, current] = reds.map((rises) => countBlocks(context, side, "red", areas, rises));
-    const red = former !== undefined && current !== undefined && current.worst > former.worst ? current : former;
-    return [countBlocks(context, side, "general", areas, general), ...(red === undefined ? [] : [red])];
-  });
+  return measureSides(context.layout).flatMap((measure) => countSide(context, measure));
 }
 
-/** Plain strings shine in warm white, which has less luminance than the white of the definition. */
-const WARM_LUMINANCE = relativeLuminance(...colourToLinear(WARM_WHITE));
-
-function generalRises({ tick, luminance }: LightCurve, { hasColour }: Light): readonly number[] {
-  const full = hasColour ? 1 : WARM_LUMINANCE;
-  return risingTimes(tick, luminance, 0.1 / full, 0.8 / full);
+function countSide(context: CheckContext, measure: SideMeasure): readonly PictureCount[] {
+  const { side, cells } = measure;
+  const facts = context.facts();
+  const inView = context.lights.filter(({ index }) => cells.has(index));
+  const told = inView.map(({ index }) => facts[index]);
+  const count = (kind: PictureCount["kind"], measures: readonly RiseMeasure[]) =>
+    recallCount(context.memory, `${side} ${kind}`, told, () => {
+      const groups = groupLights(context, inView);
+      const shapes = groups.map(({ lights }) => joinCells(lights.flatMap((light) => cells.get(light) ?? [])));
+      const counts = measures.map((rises) => countBlocks(context, { side, kind }, groups, shapes, rises));
+      return counts.reduce((worse, next) => (next.worst > worse.worst ? next : worse));
+    });
+  return [count("general", ["general"]), count("red", RED_MEASURES)];
 }
 
-/** A red that is saturated counts with its strength, any other colour as none: on the strict side. */
-function formerRedRises({ tick, rgb }: LightCurve): readonly number[] {
-  if (rgb.length === 0) return [];
-  const strength = Float64Array.from(tick, (_, point) => {
-    const colour = colourAt(rgb, point);
-    return isSaturatedRed(colour) ? formerRed(colour) : 0;
-  });
-  return risingTimes(tick, strength, FORMER_STEP, Infinity);
-}
-
-/** Changes of chromaticity towards a saturated red. */
-function currentRedRises({ tick, rgb }: LightCurve): readonly number[] {
-  if (rgb.length === 0) return [];
-  const times: number[] = [];
-  let state: LinearColour = [0, 0, 0];
-  for (let point = 0; point < tick.length; point++) {
-    const colour = colourAt(rgb, point);
-    if (colour.every((channel) => channel <= 0)) continue;
-    if (state.every((channel) => channel <= 0)) state = colour;
-    if (!isRedChange(state, colour, "current")) continue;
-    if (isSaturatedRed(colour)) times.push(tick[point] ?? 0);
-    state = colour;
-  }
-  return times;
-}
-
-function risingTimes(
-  tick: Float64Array,
-  values: ArrayLike<number>,
-  step: number,
-  darkerBelow: number,
-): readonly number[] {
-  return findTransitions(tick, values, { step, darkerBelow }, 0)
-    .filter((transition) => transition.isRising)
-    .map((transition) => transition.time);
-}
-
-const colourAt = (rgb: Float32Array, point: number): LinearColour => [
-  rgb[point * 3] ?? 0,
-  rgb[point * 3 + 1] ?? 0,
-  rgb[point * 3 + 2] ?? 0,
-];
-
-function listRises(context: CheckContext, measure: RiseTimes): readonly Rise[] {
-  const known = new Map<LightCurve, readonly number[]>();
-  const curves = context.curves();
-  return sortRises(
-    context.lights.flatMap((light) => {
-      const curve = curves[light.index];
-      if (curve === undefined) return [];
-      const ticks = known.get(curve) ?? measure(curve, light);
-      known.set(curve, ticks);
-      return ticks.map((tick) => ({ light: light.index, tick, seconds: context.tempo.toSeconds(tick) }));
-    }),
-  );
-}
+type RiseMeasure = "general" | (typeof RED_MEASURES)[number];
 
 function countBlocks(
-  { rules }: CheckContext,
-  side: Side,
-  kind: PictureCount["kind"],
-  areas: PictureAreas,
-  rises: readonly Rise[],
+  { rules, tempo }: CheckContext,
+  what: Pick<PictureCount, "side" | "kind">,
+  groups: readonly LightGroup[],
+  shapes: readonly PictureCells[],
+  measure: RiseMeasure,
 ): PictureCount {
-  const inView = rises.filter(({ light }) => areas.has(light));
-  const times: number[][] = Array.from({ length: BLOCK_COUNT }, () => []);
-  let most: PictureCount = { side, kind, worst: 0, tick: 0, lights: [] };
-  for (let start = 0; start < inView.length;) {
-    const first = inView[start];
-    if (first === undefined) break;
-    let end = start;
-    const lights = new Set<number>();
+  const rises = listRises(
+    groups.map(({ facts }) => facts[measure]),
+    tempo,
+  );
+  const blocksOf = createBlockList(shapes);
+  const events = listEvents(rises, rules.flashTogetherSeconds, {
+    weights: [Float64Array.from(shapes, sumPixels)],
+    isEvent: ([pixels = 0], listGroups) => pixels >= FLASH_AREA_PIXELS - 1e-6 && blocksOf(listGroups()).length > 0,
+  });
+  let most: PictureCount = { ...what, worst: 0, tick: 0, lights: [] };
+  // Flashes of each block in the second up to the event looked at.
+  const inSecond = new Uint16Array(BLOCK_COUNT);
+  let oldest = 0;
+  for (const { tick, seconds, groups: rising } of events) {
     for (
-      let rise = inView[end];
-      rise !== undefined && rise.seconds - first.seconds <= rules.flashTogetherSeconds;
-      rise = inView[++end]
+      let event = events[oldest];
+      event !== undefined && !isWithinSecond(event.seconds, seconds);
+      event = events[++oldest]
     )
-      lights.add(rise.light);
-    let isEvent = false;
-    if (sumAll(areas, lights) >= FLASH_AREA_PIXELS)
-      sumBlocks(areas, lights).forEach((pixels, block) => {
-        if (pixels < FLASH_AREA_PIXELS) return;
-        isEvent = true;
-        const earlier = (times[block] ?? []).filter((time) => isWithinSecond(time, first.seconds));
-        earlier.push(first.seconds);
-        times[block] = earlier;
-        if (earlier.length > most.worst)
-          most = { side, kind, worst: earlier.length, tick: first.tick, lights: [...lights] };
-      });
-    start = isEvent ? end : start + 1;
+      for (const block of blocksOf(event.groups)) inSecond[block] = (inSecond[block] ?? 1) - 1;
+    let worst = 0;
+    for (const block of blocksOf(rising)) {
+      inSecond[block] = (inSecond[block] ?? 0) + 1;
+      worst = Math.max(worst, inSecond[block] ?? 0);
+    }
+    if (worst > most.worst)
+      most = { ...what, worst, tick, lights: rising.flatMap((group) => groups[group]?.lights ?? []) };
   }
   return most;
+}
+
+/** Gives the blocks in which some groups light a quarter or more; each set of groups is looked at once. */
+function createBlockList(shapes: readonly PictureCells[]): (groups: readonly number[]) => Uint16Array {
+  const known = new Map<string, Uint16Array>();
+  return (groups) => {
+    const key = groups.join(",");
+    const blocks =
+      known.get(key) ??
+      Uint16Array.from(
+        sumBlocks(groups.flatMap((group) => shapes[group] ?? [])).reduce<number[]>((found, pixels, block) => {
+          if (pixels >= FLASH_AREA_PIXELS) found.push(block);
+          return found;
+        }, []),
+      );
+    known.set(key, blocks);
+    return blocks;
+  };
 }
 
 /** Finds sides whose picture flashes too often, where the street rule did not stop them already. */

@@ -1,13 +1,14 @@
-import { SIDES, type Side } from "../../shared/contracts/square.ts";
+import type { Side } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
-import { sideGeometry } from "../square/geometry.ts";
 import type { Light } from "../square/lights.ts";
-import type { LightCurve } from "../timeline/curves.ts";
+import { nameBar } from "../timeline/words.ts";
+import { createRecall } from "./check-memory.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, linesAt } from "./finding.ts";
-import { isWithinSecond, sortRises, type Rise } from "./rises.ts";
-import { findTransitions } from "./transitions.ts";
-import { nameBar } from "../timeline/words.ts";
+import { groupLights, type LightGroup } from "./light-groups.ts";
+import { isWithinSecond, listEvents, listRises } from "./rises.ts";
+import type { EventRules } from "./rules.ts";
+import { measureSides, type SideMeasure } from "./side-measures.ts";
 
 /**
  * The street rule: what flashes on the real square, whatever the picture on a screen shows.
@@ -31,8 +32,8 @@ import { nameBar } from "../timeline/words.ts";
 export interface FlashEvent {
   readonly tick: number;
   readonly seconds: number;
-  /** Light indexes that rise together. */
-  readonly lights: readonly number[];
+  /** Light indexes that rise together; lights that do the same share a list. */
+  readonly lights: readonly (readonly number[])[];
 }
 
 /** What was counted in one view. */
@@ -47,82 +48,76 @@ export interface FlashCount {
   readonly longestRun: number;
 }
 
-/** Several rules and the evidence ask for the same counts. */
-const countsOf = new WeakMap<CheckContext, readonly FlashCount[]>();
+const recallCount = createRecall<FlashCount>();
 
-/** Gives the flash counts of every side that has lights, and of the whole square when it has several sides. Worked out once for a context. */
+/** Gives the flash counts of every side that has lights, and of the whole square when it has several sides. */
 export function countStreetFlashes(context: CheckContext): readonly FlashCount[] {
-  const counts = countsOf.get(context) ?? countViews(context);
-  countsOf.set(context, counts);
-  return counts;
+  const measures = measureSides(context.layout);
+  const views: readonly (Side | null)[] =
+    measures.length === 1 ? measures.map(({ side }) => side) : [...measures.map(({ side }) => side), null];
+  const facts = context.facts();
+  return views.map((side) => {
+    // What stands on no side is in every view.
+    const inView = context.lights.filter((light) => side === null || light.side === side || light.side === null);
+    const told = inView.map(({ index }) => facts[index]);
+    return recallCount(context.memory, side ?? "all", told, () => countView(context, side, inView, measures));
+  });
 }
 
-function countViews(context: CheckContext): readonly FlashCount[] {
-  const rises = listRises(context);
-  const sides = SIDES.filter((side) => context.lights.some((light) => light.side === side));
-  const areas = measureAreas(context, sides);
-  const views: readonly (Side | null)[] = sides.length === 1 ? sides : [...sides, null];
-  return views.map((side) => {
-    const weights = listWeights(context, side, areas);
-    const counts = rises.map((measure) => countView(context, side, weights, measure));
-    return counts.reduce((worse, count) =>
-      count.worst > worse.worst || (count.worst === worse.worst && count.longestRun > worse.longestRun) ? count : worse,
+function countView(
+  context: CheckContext,
+  side: Side | null,
+  inView: readonly Light[],
+  measures: readonly SideMeasure[],
+): FlashCount {
+  const { rules, tempo } = context;
+  const groups = groupLights(context, inView);
+  const weights = weighGroups(inView, groups, listAreas(measures, side));
+  const counts = (["byLuminance", "byStrongest"] as const).map((measure) => {
+    const rises = listRises(
+      groups.map((group) => group.facts[measure]),
+      tempo,
+    );
+    const events = listEvents(rises, rules.flashTogetherSeconds, {
+      weights,
+      // A sum of thirds may lack the last digit of a quarter.
+      isEvent: ([area = 0, number = 0]) => Math.max(area, number) >= rules.flashShare - 1e-9,
+    });
+    return countEvents(
+      side,
+      events.map(({ tick, seconds, groups: rising }) => ({
+        tick,
+        seconds,
+        lights: rising.map((group) => groups[group]?.lights ?? []),
+      })),
+      rules,
     );
   });
-}
-
-/** Shares of what is in view, by light index: of the luminous area, and of the number of lights. */
-type Weights = ReadonlyMap<number, { readonly area: number; readonly number: number }>;
-
-/** Luminous area of every light in the reference picture of its side, in square pixels. */
-function measureAreas({ layout }: CheckContext, sides: readonly Side[]): ReadonlyMap<number, number> {
-  return new Map(
-    sides.flatMap((side) =>
-      sideGeometry(layout, side).flatMap((front) =>
-        front.lights.map((light) => [light.lightIndex, light.area] as const),
-      ),
-    ),
+  return counts.reduce((worse, count) =>
+    count.worst > worse.worst || (count.worst === worse.worst && count.longestRun > worse.longestRun) ? count : worse,
   );
 }
 
-/** What stands on no side is in every view. */
-function listWeights({ lights }: CheckContext, side: Side | null, areas: ReadonlyMap<number, number>): Weights {
-  const inView = lights.filter((light) => side === null || light.side === side || light.side === null);
-  const areaOf = (light: Light) => areas.get(light.index) ?? 0;
-  const numberOf = (light: Light) => 1 / (light.pixels ?? 1);
-  const sum = (measure: (light: Light) => number) => inView.reduce((total, light) => total + measure(light), 0) || 1;
-  const [area, number] = [sum(areaOf), sum(numberOf)];
-  return new Map(
-    inView.map((light) => [light.index, { area: areaOf(light) / area, number: numberOf(light) / number }]),
-  );
+/** Luminous area of every light in view, in square pixels of its side's reference picture. */
+function listAreas(measures: readonly SideMeasure[], side: Side | null): ReadonlyMap<number, number> {
+  return new Map(measures.flatMap((measure) => (side === null || measure.side === side ? [...measure.area] : [])));
 }
 
-/** Rising transitions of all lights by time: once by luminance, once by the strongest channel. */
-function listRises(context: CheckContext): readonly (readonly Rise[])[] {
-  const { rules, tempo, lights } = context;
-  const rule = { step: rules.flashStep, darkerBelow: rules.flashDarkerBelow };
-  const curves = context.curves();
-  const measures = lights.some((light) => light.hasColour)
-    ? (["luminance", "strongest"] as const)
-    : (["luminance"] as const);
-  return measures.map((measure) => {
-    const known = new Map<LightCurve, readonly number[]>();
-    const rises = curves.flatMap((curve, light) => {
-      const ticks =
-        known.get(curve) ??
-        findTransitions(curve.tick, curve[measure], rule, 0)
-          .filter((transition) => transition.isRising)
-          .map((transition) => transition.time);
-      known.set(curve, ticks);
-      return ticks.map((tick) => ({ light, tick, seconds: tempo.toSeconds(tick) }));
-    });
-    return sortRises(rises);
-  });
+/** Shares of what is in view, by group: of the luminous area, and of the number of lights. A strip's pixels are one light together. */
+function weighGroups(
+  inView: readonly Light[],
+  groups: readonly LightGroup[],
+  areas: ReadonlyMap<number, number>,
+): readonly [Float64Array, Float64Array] {
+  const pixelsOf = new Map(inView.map(({ index, pixels }) => [index, pixels ?? 1]));
+  const share = (measure: (light: number) => number): Float64Array => {
+    const total = inView.reduce((sum, { index }) => sum + measure(index), 0) || 1;
+    return Float64Array.from(groups, ({ lights }) => lights.reduce((sum, light) => sum + measure(light), 0) / total);
+  };
+  return [share((light) => areas.get(light) ?? 0), share((light) => 1 / (pixelsOf.get(light) ?? 1))];
 }
 
-function countView({ rules }: CheckContext, side: Side | null, weights: Weights, rises: readonly Rise[]): FlashCount {
-  const inView = rises.filter(({ light }) => weights.has(light));
-  const events = groupRises(inView, weights, rules.flashShare, rules.flashTogetherSeconds);
+function countEvents(side: Side | null, events: readonly FlashEvent[], rules: EventRules): FlashCount {
   let worst = 0;
   let oldest = 0;
   events.forEach(({ seconds }, newest) => {
@@ -130,33 +125,6 @@ function countView({ rules }: CheckContext, side: Side | null, weights: Weights,
     worst = Math.max(worst, newest - oldest + 1);
   });
   return { side, events, worst, longestRun: longestRunAtLimit(events, rules.flashesPerSecond) };
-}
-
-/** From the earliest on: rises within 20 ms are one event when their lights weigh enough. */
-function groupRises(rises: readonly Rise[], weights: Weights, needed: number, together: number): FlashEvent[] {
-  const events: FlashEvent[] = [];
-  for (let start = 0; start < rises.length;) {
-    const first = rises[start];
-    if (first === undefined) break;
-    const lights = new Set<number>();
-    let [area, number] = [0, 0];
-    let end = start;
-    for (let rise = rises[end]; rise !== undefined && rise.seconds - first.seconds <= together; rise = rises[++end]) {
-      if (lights.has(rise.light)) continue;
-      lights.add(rise.light);
-      const weight = weights.get(rise.light);
-      area += weight?.area ?? 0;
-      number += weight?.number ?? 0;
-    }
-    // A sum of thirds may lack the last digit of a quarter.
-    if (Math.max(area, number) >= needed - 1e-9) {
-      events.push({ tick: first.tick, seconds: first.seconds, lights: [...lights] });
-      start = end;
-    } else {
-      start++;
-    }
-  }
-  return events;
 }
 
 /** The longest stretch in which events follow each other so that `limit` of them fall in each second. */
@@ -216,7 +184,7 @@ function describeOver(context: CheckContext, { side, events, worst }: FlashCount
     hint: "Pulse on whole beats, let fewer lights pulse at once, or use fades. The event's safety officer decides.",
     measured: { value: worst, limit, unit: "flashes a second" },
     moments: bad.map(({ tick }) => tick),
-    lights: together.flatMap(({ lights }) => lights),
-    lines: together.flatMap(({ tick, lights }) => linesAt(context, tick, lights)),
+    lights: together.flatMap(({ lights }) => lights.flat()),
+    lines: together.flatMap(({ tick, lights }) => linesAt(context, tick, lights.flat())),
   });
 }

@@ -1,5 +1,5 @@
 import type { Finding } from "../engine/model.ts";
-import { listOnSpans, type OnSpan } from "../timeline/switching.ts";
+import type { OnSpan } from "../timeline/switching.ts";
 import { listOf } from "./by-line.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, lineOfCue } from "./finding.ts";
@@ -49,13 +49,14 @@ export function findHalfCycle(context: CheckContext): Finding[] {
 
 /** Finds relays that come on more often than they are rated for over half a minute. */
 export function findRelayRate(context: CheckContext): Finding[] {
-  const { rules, tempo, lights, tracks } = context;
+  const { rules, tempo, lights } = context;
+  const onSpans = context.onSpans();
   const most = rules.relayCyclesPerSecond * rules.relayWindowSeconds;
   let worst = 0;
   const places: { readonly light: number; readonly span: OnSpan }[] = [];
   for (const { index, boxKind } of lights) {
     if (boxKind !== "relay") continue;
-    const spans = listOnSpans(tracks, index);
+    const spans = onSpans[index] ?? [];
     const times = spans.map(({ start }) => tempo.toSeconds(start));
     let oldest = 0;
     let isOver = false;
@@ -84,17 +85,14 @@ export function findRelayRate(context: CheckContext): Finding[] {
 }
 
 /** Gives how often each relay comes on in the show, by light index: what wear is worked out from. */
-export function countRelayCycles({
-  lights,
-  tracks,
-}: Pick<CheckContext, "lights" | "tracks">): ReadonlyMap<number, number> {
-  return new Map(
-    lights.filter(({ boxKind }) => boxKind === "relay").map(({ index }) => [index, listOnSpans(tracks, index).length]),
-  );
+export function countRelayCycles(context: CheckContext): ReadonlyMap<number, number> {
+  const onSpans = context.onSpans();
+  const relays = context.lights.filter(({ boxKind }) => boxKind === "relay");
+  return new Map(relays.map(({ index }) => [index, onSpans[index]?.length ?? 0]));
 }
 
 function listShort(
-  { lights, tracks, tempo }: CheckContext,
+  { lights, tempo, onSpans }: CheckContext,
   kind: "relay" | "solid-state",
   limit: number,
   rounding = ROUNDING_SECONDS,
@@ -106,7 +104,7 @@ function listShort(
   };
   for (const { index, boxKind } of lights) {
     if (boxKind !== kind) continue;
-    const spans = listOnSpans(tracks, index);
+    const spans = onSpans()[index] ?? [];
     spans.forEach(({ start, end, cue }, place) => {
       add(index, start, end, cue);
       const next = spans[place + 1];

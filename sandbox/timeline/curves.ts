@@ -8,7 +8,7 @@ import type { Tracks } from "./tracks.ts";
 /**
  * How one light runs through the whole show, as points to be joined by straight lines. Where it
  * jumps there are two points, one just before. Ticks rise; before the first point it is dark, after
- * the last it stays as it is. Equal lights share one curve: treat it as frozen.
+ * the last it stays as it is.
  */
 export interface LightCurve {
   readonly tick: Float64Array;
@@ -27,107 +27,98 @@ export const JUMP_TICKS = 1e-3;
 /** Moving stretches get a point at least this often: 1/16 beat. */
 export const CURVE_STEP_TICKS = 60;
 
-/** Gives the curve of every light, by index. Cost: about the points, and one reading for each. */
-export function traceLights(timeline: Timeline, lights: readonly Light[], tracks: Tracks): readonly LightCurve[] {
+/** Gives what traces lights of a show one by one. Cost of a light: about its points, and one reading for each. */
+export function createTracer(
+  timeline: Timeline,
+  lights: readonly Light[],
+  tracks: Tracks,
+): (light: Light) => LightCurve {
   const cursor = createLightsCursor(timeline, lights, tracks);
-  const known = new Map<string, LightCurve>();
-  return lights.map((light) => {
-    const key = keyOf(light, tracks);
-    const same = known.get(key);
-    if (same !== undefined) return same;
-    const curve = light.isSwitched ? traceSwitched(tracks, light.index) : traceLight(cursor, tracks, light);
-    known.set(key, curve);
-    return curve;
-  });
-}
-
-/** Two lights of one kind that all the same cues speak to are equal. */
-function keyOf(light: Light, { level, colour, pulse }: Tracks): string {
-  const cuesOf = (track: { readonly first: Uint32Array; readonly cue: Uint32Array }) =>
-    track.cue.subarray(track.first[light.index] ?? 0, track.first[light.index + 1] ?? 0).join(",");
-  return `${light.hasColour} ${light.isSwitched} ${cuesOf(level)} ${cuesOf(pulse)} ${light.hasColour ? cuesOf(colour) : ""}`;
+  return (light) => (light.isSwitched ? traceSwitched(tracks, light.index) : traceLight(cursor, tracks, light));
 }
 
 function traceSwitched(tracks: Tracks, light: number): LightCurve {
-  const points = listOnSpans(tracks, light).flatMap(({ start, end }) => [
-    [start - JUMP_TICKS, 0],
-    [start, 1],
-    [end - JUMP_TICKS, 1],
-    [end, 0],
-  ]);
-  const on = Float32Array.from(points, ([, value]) => value ?? 0);
-  return {
-    tick: Float64Array.from(points, ([tick]) => tick ?? 0),
-    level: on.map((value) => value * 100),
-    luminance: on,
-    strongest: on,
-    rgb: new Float32Array(0),
-  };
+  const spans = listOnSpans(tracks, light);
+  const tick = new Float64Array(spans.length * 4);
+  const on = new Float32Array(spans.length * 4);
+  spans.forEach(({ start, end }, span) => {
+    tick.set([start - JUMP_TICKS, start, end - JUMP_TICKS, end], span * 4);
+    on.set([0, 1, 1, 0], span * 4);
+  });
+  return { tick, level: on.map((value) => value * 100), luminance: on, strongest: on, rgb: new Float32Array(0) };
 }
 
 function traceLight(cursor: Cursor, tracks: Tracks, light: Light): LightCurve {
-  const ticks: number[] = [];
-  const levels: number[] = [];
-  const luminances: number[] = [];
-  const strongests: number[] = [];
-  const colours: number[] = [];
-  const read = (tick: number) => {
-    const { rgb, level } = cursor.seekLight(light.index, tick);
-    const at = light.index * 3;
-    const [red, green, blue] = [rgb[at] ?? 0, rgb[at + 1] ?? 0, rgb[at + 2] ?? 0];
-    // Red is the full channel of the warm white that plain strings have.
-    return {
-      level: level[light.index] ?? 0,
-      luminance: light.hasColour ? relativeLuminance(red, green, blue) : red,
-      strongest: Math.max(red, green, blue),
-      rgb: [red, green, blue],
-    };
-  };
-  const add = (tick: number) => {
-    const { level, luminance, strongest, rgb } = read(tick);
-    ticks.push(tick);
-    levels.push(level);
-    luminances.push(luminance);
-    strongests.push(strongest);
-    if (light.hasColour) colours.push(...rgb);
-  };
-  const { breaks, moves } = listBreaks(tracks, light);
-  let nextMove = 0;
-  let movesUntil = 0;
-  breaks.forEach((tick, index) => {
-    if (tick > 0) add(tick - JUMP_TICKS);
-    add(tick);
-    for (let move = moves[nextMove]; move !== undefined && move.start <= tick; move = moves[++nextMove])
-      movesUntil = Math.max(movesUntil, move.end);
-    const next = breaks[index + 1];
-    if (next === undefined || movesUntil <= tick) return;
-    for (let between = tick + CURVE_STEP_TICKS; between < next; between += CURVE_STEP_TICKS) add(between);
-  });
-  return {
-    tick: Float64Array.from(ticks),
-    level: Float32Array.from(levels),
-    luminance: Float32Array.from(luminances),
-    strongest: Float32Array.from(strongests),
-    rgb: Float32Array.from(colours),
-  };
+  const tick = Float64Array.from(listPoints(tracks, light));
+  const count = tick.length;
+  const { frame } = cursor;
+  const level = new Float32Array(count);
+  const luminance = new Float32Array(count);
+  // Red is the full channel of the warm white that plain strings have, so it is their light, too.
+  const strongest = light.hasColour ? new Float32Array(count) : luminance;
+  const rgb = new Float32Array(light.hasColour ? count * 3 : 0);
+  for (let point = 0; point < count; point++) {
+    cursor.seekLight(light.index, tick[point] ?? 0);
+    level[point] = frame.level[light.index] ?? 0;
+    const red = frame.rgb[light.index * 3] ?? 0;
+    if (!light.hasColour) {
+      luminance[point] = red;
+      continue;
+    }
+    const green = frame.rgb[light.index * 3 + 1] ?? 0;
+    const blue = frame.rgb[light.index * 3 + 2] ?? 0;
+    luminance[point] = relativeLuminance(red, green, blue);
+    strongest[point] = Math.max(red, green, blue);
+    rgb[point * 3] = red;
+    rgb[point * 3 + 1] = green;
+    rgb[point * 3 + 2] = blue;
+  }
+  return { tick, level, luminance, strongest, rgb };
 }
 
-/** Ticks at which a light may jump or bend, sorted, the last the song's end; and the fades and pulses between them, by start. */
-function listBreaks(
-  { level, colour, pulse, endTick }: Tracks,
-  light: Light,
-): { readonly breaks: readonly number[]; readonly moves: readonly { readonly start: number; readonly end: number }[] } {
-  const moves: { start: number; end: number }[] = [];
-  const { index } = light;
-  for (const track of light.hasColour ? [level, colour] : [level])
-    for (let entry = track.first[index] ?? 0; entry < (track.first[index + 1] ?? 0); entry++) {
-      const start = track.tick[entry] ?? 0;
-      moves.push({ start, end: start + (track.length[entry] ?? 0) });
+/** The ticks of a light's curve: where it may jump or bend, just before that, and steps where it moves. */
+function listPoints(tracks: Tracks, light: Light): number[] {
+  const { starts, ends } = listMoves(tracks, light);
+  const breaks = Float64Array.from([...starts, ...ends, ...(starts.length > 0 ? [tracks.endTick] : [])]).sort();
+  const points: number[] = [];
+  let nextMove = 0;
+  let movesUntil = 0;
+  for (let place = 0; place < breaks.length; place++) {
+    const tick = breaks[place] ?? 0;
+    if (tick > tracks.endTick) break;
+    const next = breaks[place + 1] ?? tick;
+    if (next === tick && place + 1 < breaks.length) continue;
+    if (tick > 0) points.push(tick - JUMP_TICKS);
+    points.push(tick);
+    while (nextMove < starts.length && (starts[nextMove] ?? 0) <= tick) {
+      movesUntil = Math.max(movesUntil, ends[nextMove] ?? 0);
+      nextMove++;
     }
-  for (let entry = pulse.first[index] ?? 0; entry < (pulse.first[index + 1] ?? 0); entry++)
-    moves.push({ start: pulse.tick[entry] ?? 0, end: pulse.end[entry] ?? 0 });
-  moves.sort((a, b) => a.start - b.start);
-  const ticks = new Set(moves.flatMap(({ start, end }) => [start, end]));
-  if (ticks.size > 0) ticks.add(endTick);
-  return { breaks: [...ticks].filter((tick) => tick <= endTick).sort((a, b) => a - b), moves };
+    const until = movesUntil > tick ? Math.min(next, tracks.endTick) : tick;
+    for (let between = tick + CURVE_STEP_TICKS; between < until; between += CURVE_STEP_TICKS) points.push(between);
+  }
+  return points;
+}
+
+/** What a light is told, by start: where each fade and pulse starts and ends; at once is both at one tick. */
+function listMoves(
+  { level, colour, pulse }: Tracks,
+  { index, hasColour }: Light,
+): { readonly starts: readonly number[]; readonly ends: readonly number[] } {
+  const starts: number[] = [];
+  const ends: number[] = [];
+  for (const { first, tick, length } of hasColour ? [level, colour] : [level])
+    for (let entry = first[index] ?? 0; entry < (first[index + 1] ?? 0); entry++) {
+      starts.push(tick[entry] ?? 0);
+      ends.push((tick[entry] ?? 0) + (length[entry] ?? 0));
+    }
+  for (let entry = pulse.first[index] ?? 0; entry < (pulse.first[index + 1] ?? 0); entry++) {
+    starts.push(pulse.tick[entry] ?? 0);
+    ends.push(pulse.end[entry] ?? 0);
+  }
+  const order = Uint32Array.from(starts.keys()).sort((a, b) => (starts[a] ?? 0) - (starts[b] ?? 0));
+  return {
+    starts: Array.from(order, (move) => starts[move] ?? 0),
+    ends: Array.from(order, (move) => ends[move] ?? 0),
+  };
 }
