@@ -39,7 +39,7 @@ export default defineConfig({
           globalSetup: ["tests/journeys/support/global-setup.ts"],
           environment: "node",
           fileParallelism: false,
-          testTimeout: 180_000,
+          testTimeout: 300_000,
           hookTimeout: 240_000,
         },
       },

@@ -55,7 +55,8 @@ function StepEntry({ step, number }: { step: RailStep; number: number }) {
       >
         {step.state === "done" ? <Icon name="check" className="size-4" /> : number}
       </span>
-      {step.label}
+      {/* Seven names do not fit beside each other on a phone: there only the present one is shown. */}
+      <span className={step.state === "here" ? "whitespace-nowrap" : "max-sm:sr-only"}>{step.label}</span>
       <span className="sr-only">, {WORDS[step.state]}</span>
     </>
   );

@@ -31,7 +31,7 @@ export function SubBand({ title, detail, sections, sectionsLabel = "Sections", c
     <div className="flex flex-wrap items-stretch gap-x-6 gap-y-1 border-b border-line bg-card px-6 pt-1.5 max-wide:gap-x-4 max-wide:px-4 max-wide:pt-2 print:hidden">
       <div
         className={joinClasses(
-          "flex items-baseline gap-2 self-center py-2 max-wide:w-full",
+          "flex flex-wrap items-baseline gap-x-2 self-center py-2 max-wide:w-full",
           sections && "border-line pr-4 wide:border-r",
         )}
       >

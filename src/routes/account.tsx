@@ -37,7 +37,7 @@ export function Component() {
   };
 
   return (
-    <Page title="Your account" density="staff">
+    <Page title="Your account" density="staff" className="mx-auto max-w-page">
       <PageHeader title="Change your password" lead="Every other place where you are signed in is signed out." />
       <form onSubmit={handleSubmit} noValidate className="max-w-md space-y-4">
         {change.isSuccess && <Notice tone="ok" role="status" title="Your password is changed." />}

@@ -19,7 +19,7 @@ const ITEMS: Readonly<Record<Role, readonly BandItem[]>> = {
     { to: "/event/shows", label: "Shows", icon: "ribbon" },
   ],
   admin: [
-    { to: "/admin", label: "Admin", icon: "settings" },
+    { to: "/admin", label: "Admin", icon: "settings", isExact: true },
     { to: "/admin/audit", label: "Audit log", icon: "history" },
   ],
 };

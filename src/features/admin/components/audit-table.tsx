@@ -18,16 +18,9 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
     );
   }
   return (
-    <div
-      // Wider than a phone: the keyboard must be able to scroll it.
-      // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
-      tabIndex={0}
-      role="region"
-      aria-label="Rows of the audit log"
-      className="relative overflow-x-auto rounded-sheet border border-line bg-card shadow-sheet-1"
-    >
-      <table className="w-full border-collapse">
-        <thead>
+    <div className="relative rounded-sheet border border-line bg-card shadow-sheet-1">
+      <table className="w-full border-collapse max-wide:block">
+        <thead className="max-wide:sr-only">
           <tr className="border-b-[1.5px] border-line text-left text-meta text-slate [&>th]:px-4 [&>th]:py-2 [&>th]:font-semibold">
             <th scope="col" className="text-right">
               No.
@@ -38,9 +31,12 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
             <th scope="col">On</th>
           </tr>
         </thead>
-        <tbody className="divide-y divide-line">
+        <tbody className="divide-y divide-line max-wide:block">
           {rows.map((row) => (
-            <tr key={row.id} className="[&>*]:px-4 [&>*]:py-1.5">
+            <tr
+              key={row.id}
+              className="max-wide:flex max-wide:flex-wrap max-wide:items-baseline max-wide:gap-x-3 max-wide:px-4 max-wide:py-2.5 wide:[&>*]:px-4 wide:[&>*]:py-1.5"
+            >
               <td className="text-right font-mono text-meta text-slate">{row.id}</td>
               <td className="font-mono text-meta whitespace-nowrap">
                 {toLocalDate(row.at, timeZone)} {presentTime(row.at, timeZone)}
@@ -48,8 +44,8 @@ export function AuditTable({ rows, timeZone }: AuditTableProps) {
               <td className="whitespace-nowrap">
                 {row.actorName ?? <span className="text-slate">nobody signed in</span>}
               </td>
-              <td>{row.event}</td>
-              <td className="font-mono text-meta text-slate">{row.subject ?? ""}</td>
+              <td className="max-wide:order-first max-wide:w-full max-wide:font-[650]">{row.event}</td>
+              <td className="font-mono text-meta break-all text-slate">{row.subject ?? ""}</td>
             </tr>
           ))}
         </tbody>

@@ -55,9 +55,9 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
           </Button>
         }
       />
-      <div className="relative overflow-x-auto">
-        <table className="w-full border-collapse">
-          <thead>
+      <div className="relative">
+        <table className="w-full border-collapse max-wide:block">
+          <thead className="max-wide:sr-only">
             <tr className="border-b-[1.5px] border-line text-left text-meta text-slate [&>th]:px-4 [&>th]:py-2 [&>th]:font-semibold">
               <th scope="col">Name</th>
               <th scope="col">E-mail</th>
@@ -69,10 +69,13 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
               </th>
             </tr>
           </thead>
-          <tbody className="divide-y divide-line">
+          <tbody className="divide-y divide-line max-wide:block">
             {staff.map((row) => (
-              <tr key={row.id} className="[&>*]:px-4 [&>*]:py-1.5">
-                <th scope="row" className="text-left font-[650] whitespace-nowrap">
+              <tr
+                key={row.id}
+                className="max-wide:relative max-wide:flex max-wide:flex-wrap max-wide:items-center max-wide:gap-x-4 max-wide:gap-y-1 max-wide:px-4 max-wide:py-3 wide:[&>*]:px-4 wide:[&>*]:py-1.5"
+              >
+                <th scope="row" className="text-left font-[650] whitespace-nowrap max-wide:w-full max-wide:pr-36 max-wide:leading-9">
                   {row.displayName}{" "}
                   {row.isDisabled && (
                     <Tag state="plain" icon="lock">
@@ -80,13 +83,13 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
                     </Tag>
                   )}
                 </th>
-                <td className="font-mono text-meta">{row.email}</td>
+                <td className="font-mono text-meta max-wide:w-full">{row.email}</td>
                 <td>{row.roles.join(", ")}</td>
                 <td className="whitespace-nowrap">{row.schoolName ?? "the event"}</td>
                 <td className="whitespace-nowrap text-slate">
                   {row.lastSeenAt === null ? "never" : presentWhen(row.lastSeenAt, now, timeZone)}
                 </td>
-                <td className="text-right">
+                <td className="text-right max-wide:absolute max-wide:top-2 max-wide:right-3">
                   {row.isDisabled ? (
                     <Button
                       size="small"
