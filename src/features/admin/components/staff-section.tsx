@@ -75,7 +75,10 @@ export function StaffSection({ staff, schools, ownId, timeZone, now }: StaffSect
                 key={row.id}
                 className="max-wide:relative max-wide:flex max-wide:flex-wrap max-wide:items-center max-wide:gap-x-4 max-wide:gap-y-1 max-wide:px-4 max-wide:py-3 wide:[&>*]:px-4 wide:[&>*]:py-1.5"
               >
-                <th scope="row" className="text-left font-[650] whitespace-nowrap max-wide:w-full max-wide:pr-36 max-wide:leading-9">
+                <th
+                  scope="row"
+                  className="text-left font-[650] whitespace-nowrap max-wide:w-full max-wide:pr-36 max-wide:leading-9"
+                >
                   {row.displayName}{" "}
                   {row.isDisabled && (
                     <Tag state="plain" icon="lock">
