@@ -13,14 +13,14 @@ export interface DialogProps {
   children: ReactNode;
   /** Buttons at the foot, the main one last. */
   actions?: ReactNode;
-  size?: "small" | "normal" | "wide";
+  size?: "small" | "normal" | "wide" | "full";
   /** alertdialog: a question that must be answered; a press outside does not close it. */
   role?: "dialog" | "alertdialog";
   /** While work is under way nothing closes it. */
   isBusy?: boolean;
 }
 
-const SIZES = { small: "max-w-[28rem]", normal: "max-w-[36rem]", wide: "max-w-[56rem]" };
+const SIZES = { small: "max-w-[28rem]", normal: "max-w-[36rem]", wide: "max-w-[56rem]", full: "max-w-[84rem]" };
 
 /** A sheet over the page for one task. Keeps the focus inside, Escape closes; on a phone it comes from below. */
 export function Dialog({

@@ -1,7 +1,6 @@
 import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
 import { lazy, Suspense, useMemo } from "react";
 import { useNavigate, useParams, useSearchParams, type LoaderFunctionArgs } from "react-router";
-import { decodeRibbon } from "../../sandbox/timeline/ribbon.ts";
 import type { HandInResult } from "../../shared/contracts/assignments.ts";
 import type { BeatMap, Score } from "../../shared/contracts/songs.ts";
 import type { ShowDetail } from "../../shared/contracts/shows.ts";
@@ -13,17 +12,17 @@ import { showToast } from "../components/toast-queue.ts";
 import { assignmentQuery, useHandIn } from "../features/assignments/api.ts";
 import { describeHandIn } from "../features/assignments/model/hand-in.ts";
 import { sessionQuery } from "../features/auth/api.ts";
-import { showQuery, versionQuery } from "../features/shows/api.ts";
+import { showQuery } from "../features/shows/api.ts";
+import { useShowHistory } from "../features/shows/use-show-history.ts";
 import { DraftSaver } from "../features/shows/draft-saver.ts";
 import { ShowRunner } from "../features/shows/show-runner.ts";
 import { StudioLoading } from "../features/shows/studio/studio-loading.tsx";
 import { songQuery } from "../features/songs/api.ts";
 import { layoutQuery } from "../features/square/api.ts";
 import { useDisposable } from "../hooks/use-disposable.ts";
-import { useNow } from "../hooks/use-now.ts";
 import { HERE } from "../lib/format.ts";
 import { queryClient } from "../lib/query-client.ts";
-import { presentDue, presentWhen } from "../lib/zoned-time.ts";
+import { presentDue } from "../lib/zoned-time.ts";
 import { requireSession } from "./guards.ts";
 
 /** Editor, stage and sound: a chunk of their own. */
@@ -95,7 +94,6 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
   const { data: session, dataUpdatedAt } = useSuspenseQuery(sessionQuery);
   const navigate = useNavigate();
   const openAt = usePlaceInAddress();
-  const now = useNow();
   const assignment = useQuery({
     ...assignmentQuery(show.assignmentId ?? "none"),
     enabled: show.assignmentId !== null,
@@ -108,12 +106,7 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
   // What the server held at opening: later revisions come as answers to saves.
   // eslint-disable-next-line react-hooks/exhaustive-deps
   const saver = useMemo(() => new DraftSaver(show.id, { revision: draft.revision, source: draft.source }), [show.id]);
-  const versions = detail.versions.map((version) => ({
-    id: version.id,
-    title: `Version ${version.number}`,
-    when: presentWhen(version.createdAt, now, HERE),
-    ribbon: version.ribbon && decodeRibbon(version.ribbon),
-  }));
+  const history = useShowHistory(detail);
 
   const handleHandIn = async (source: string) => {
     if (!runner) throw new Error("The script can not be run yet.");
@@ -151,8 +144,7 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
           transport: saver,
           signedInAt: dataUpdatedAt,
         }}
-        versions={versions}
-        readVersion={async (versionId) => (await queryClient.fetchQuery(versionQuery(versionId))).source}
+        history={history}
         onHandIn={show.assignmentId === null ? null : handleHandIn}
       />
     </Suspense>

@@ -24,6 +24,20 @@ export const versionQuery = (versionId: VersionId) =>
     staleTime: Infinity,
   });
 
+export const historyQuery = (showId: ShowId) =>
+  queryOptions({
+    queryKey: ["shows", "history", showId],
+    queryFn: async ({ signal }) => (await callApi(showsContract.history, { params: { showId } }, signal)).drafts,
+    staleTime: 0,
+  });
+
+export const earlierDraftQuery = (showId: ShowId, revision: number) =>
+  queryOptions({
+    queryKey: ["shows", "history", showId, revision],
+    queryFn: ({ signal }) => callApi(showsContract.earlierDraft, { params: { showId, revision } }, signal),
+    staleTime: Infinity,
+  });
+
 export function useCreateShow() {
   const client = useQueryClient();
   return useMutation({

@@ -1,31 +1,19 @@
 import { useEffect, useState } from "react";
-import type { RibbonCells } from "../../../../sandbox/timeline/ribbon.ts";
 import { Button } from "../../../components/button.tsx";
 import { joinClasses } from "../../../components/class-names.ts";
 import { Icon, type IconName } from "../../../components/icon.tsx";
 import { Ribbon } from "../../../components/ribbon.tsx";
 import { useDisclosure } from "../../../hooks/use-disclosure.ts";
 import type { DraftState } from "../drafts/draft-model.ts";
+import type { KeptText } from "../history/kept-text.ts";
 import { presentSaveStatus, type SaveStatus } from "../drafts/save-status.ts";
-
-/** A version that was handed in or kept, as the list shows it. */
-export interface StudioVersion {
-  readonly id: string;
-  /** "Version 3" */
-  readonly title: string;
-  /** "today, 10:14" */
-  readonly when: string;
-  readonly ribbon: RibbonCells | null;
-}
 
 export interface SaveMenuProps {
   draft: DraftState;
-  versions: readonly StudioVersion[];
-  /** Texts that were put aside when another was chosen; on this computer only. */
-  asides: readonly StudioVersion[];
-  /** The menu is opening: time to read what it shows. */
-  onOpen: () => void;
-  onLook: (version: StudioVersion) => void;
+  /** What was handed in, newest first. */
+  versions: readonly KeptText[];
+  /** Opens the history at a text; null at the newest. */
+  onLook: (id: string | null) => void;
   /** Opens the choice between two versions. */
   onChoose: () => void;
 }
@@ -35,7 +23,7 @@ const ICONS: { readonly [T in SaveStatus["tone"]]: IconName } = { calm: "check",
 const AGE_MS = 5000;
 
 /** The save state, always in words; it opens to the reason and to earlier versions. */
-export function SaveMenu({ draft, versions, asides, onOpen, onLook, onChoose }: SaveMenuProps) {
+export function SaveMenu({ draft, versions, onLook, onChoose }: SaveMenuProps) {
   const { isOpen, panelId, rootRef, toggle, close } = useDisclosure();
   const [now, setNow] = useState(() => Date.now());
   useEffect(() => {
@@ -44,13 +32,9 @@ export function SaveMenu({ draft, versions, asides, onOpen, onLook, onChoose }: 
   }, []);
   const { label, detail, tone } = presentSaveStatus(draft, Math.max(now, draft.savedAt ?? 0));
   const isChoice = label === "Two versions";
-  const look = (version: StudioVersion) => {
+  const look = (id: string | null) => {
     close();
-    onLook(version);
-  };
-  const handleToggle = () => {
-    if (!isOpen) onOpen();
-    toggle();
+    onLook(id);
   };
   return (
     <div ref={rootRef} className="studio-save">
@@ -59,7 +43,7 @@ export function SaveMenu({ draft, versions, asides, onOpen, onLook, onChoose }: 
         className={joinClasses("studio-save-button", `is-${tone}`)}
         aria-expanded={isOpen}
         aria-controls={panelId}
-        onClick={handleToggle}
+        onClick={toggle}
       >
         <Icon name={ICONS[tone]} />
         <span className="studio-save-words">
@@ -86,45 +70,30 @@ export function SaveMenu({ draft, versions, asides, onOpen, onLook, onChoose }: 
               Choose
             </Button>
           )}
-          <h2>Earlier versions</h2>
+          <h2>Handed in</h2>
           {versions.length === 0 ? (
-            <p className="studio-empty">None yet. Each time you hand in, a version is kept here.</p>
+            <p className="studio-empty">Nothing yet. Each time you hand in, a version is kept here.</p>
           ) : (
-            <VersionList versions={versions} onLook={look} />
+            <ul>
+              {versions.map((version) => (
+                <li key={version.id}>
+                  <Ribbon ribbon={version.ribbon} label="" size="strip" />
+                  <div>
+                    <b>{version.title}</b>
+                    <span>{version.when}</span>
+                  </div>
+                  <Button look="quiet" size="small" onPress={() => look(version.id)}>
+                    Look
+                  </Button>
+                </li>
+              ))}
+            </ul>
           )}
-          {asides.length > 0 && (
-            <>
-              <h2>Put aside on this computer</h2>
-              <VersionList versions={asides} onLook={look} />
-            </>
-          )}
+          <Button icon="history" size="small" onPress={() => look(null)}>
+            History: all earlier texts
+          </Button>
         </div>
       )}
     </div>
-  );
-}
-
-function VersionList({
-  versions,
-  onLook,
-}: {
-  versions: readonly StudioVersion[];
-  onLook: (version: StudioVersion) => void;
-}) {
-  return (
-    <ul>
-      {versions.map((version) => (
-        <li key={version.id}>
-          <Ribbon ribbon={version.ribbon} label="" size="strip" />
-          <div>
-            <b>{version.title}</b>
-            <span>{version.when}</span>
-          </div>
-          <Button look="quiet" size="small" onPress={() => onLook(version)}>
-            Look
-          </Button>
-        </li>
-      ))}
-    </ul>
   );
 }

@@ -2,17 +2,17 @@ import { Link } from "react-router";
 import { Button } from "../../../components/button.tsx";
 import { ThemeToggle } from "../../../components/theme-toggle.tsx";
 import type { DraftState } from "../drafts/draft-model.ts";
-import { SaveMenu, type StudioVersion } from "./save-menu.tsx";
+import type { KeptText } from "../history/kept-text.ts";
+import { SaveMenu } from "./save-menu.tsx";
 
 export interface StudioHeaderProps {
   title: string;
   context: string;
   homeHref: string;
   draft: DraftState;
-  versions: readonly StudioVersion[];
-  asides: readonly StudioVersion[];
-  onOpenSaves: () => void;
-  onLook: (version: StudioVersion) => void;
+  versions: readonly KeptText[];
+  /** Opens the history at a text; null at the newest. */
+  onLook: (id: string | null) => void;
   onChoose: () => void;
   /** Null where there is nobody to hand it to. */
   onHandIn: (() => void) | null;
@@ -25,8 +25,6 @@ export function StudioHeader({
   homeHref,
   draft,
   versions,
-  asides,
-  onOpenSaves,
   onLook,
   onChoose,
   onHandIn,
@@ -47,14 +45,7 @@ export function StudioHeader({
         <h1>{title}</h1>
         <p>{context}</p>
       </div>
-      <SaveMenu
-        draft={draft}
-        versions={versions}
-        asides={asides}
-        onOpen={onOpenSaves}
-        onLook={onLook}
-        onChoose={onChoose}
-      />
+      <SaveMenu draft={draft} versions={versions} onLook={onLook} onChoose={onChoose} />
       <ThemeToggle className="studio-theme" />
       {onHandIn && (
         <Button icon="sent" onPress={onHandIn}>

@@ -1,15 +1,17 @@
-import { useCallback, useEffect, useMemo, useRef, useState } from "react";
+import { lazy, Suspense, useCallback, useEffect, useMemo, useRef, useState } from "react";
 import type { BeatMap, Score } from "../../../../shared/contracts/songs.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
+import { showToast } from "../../../components/toast-queue.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
+import type { KeptText } from "../history/kept-text.ts";
+import { useHistory, type HistorySource } from "../history/use-history.ts";
 import { listScriptNames } from "../editor/script-names.ts";
 import { CheckPane } from "./check-pane.tsx";
 import { HandInDialog } from "./hand-in-dialog.tsx";
 import { NamesPane } from "./names-pane.tsx";
 import { NotesPane } from "./notes-pane.tsx";
 import { findGentleReason, listActLines, listFindings, presentRun } from "./run-model.ts";
-import type { StudioVersion } from "./save-menu.tsx";
 import { ScriptPanel, type ScriptPanelHandle } from "./script-panel.tsx";
 import { ShowPlayer } from "./show-player.ts";
 import { SongColumn } from "./song-column.tsx";
@@ -17,13 +19,18 @@ import "./studio.css";
 import { StudioHeader } from "./studio-header.tsx";
 import { StudioLoading } from "./studio-loading.tsx";
 import { TrayTabs, type TrayTab } from "./tray-tabs.tsx";
-import { TwoVersionsDialog } from "./two-versions-dialog.tsx";
-import { useAsides } from "./use-asides.ts";
 import { useDraft, type DraftSource } from "./use-draft.ts";
 import { usePlayKeys } from "./use-play-keys.ts";
 import { useScriptRun, type ScriptRunOptions } from "./use-script-run.ts";
 import { useDescription, type ShowPictures } from "./use-show-pictures.ts";
-import { VersionDialog } from "./version-dialog.tsx";
+
+/** Comparing texts is seldom, and its editor is large. */
+const HistoryDialog = lazy(async () => ({
+  default: (await import("../history/history-dialog.tsx")).HistoryDialog,
+}));
+const TwoVersionsDialog = lazy(async () => ({
+  default: (await import("../history/two-versions-dialog.tsx")).TwoVersionsDialog,
+}));
 
 export interface StudioProps extends ScriptRunOptions, ShowPictures {
   title: string;
@@ -35,15 +42,14 @@ export interface StudioProps extends ScriptRunOptions, ShowPictures {
   /** Null for a song without a score: no sound. */
   score: Score | null;
   draft: DraftSource;
-  versions: readonly StudioVersion[];
-  readVersion: (versionId: string) => Promise<string>;
+  history: HistorySource;
   /** Hands in what is saved; null where there is nobody to hand it to. */
   onHandIn: ((source: string) => Promise<void>) | null;
   /** Where to open: a line of the script, a moment in ticks (a link from a comment). */
   openAt: { readonly line: number | null; readonly tick: number | null };
 }
 
-type OpenDialog = { kind: "hand-in" } | { kind: "versions" } | { kind: "version"; version: StudioVersion } | null;
+type OpenDialog = { kind: "hand-in" } | { kind: "two-versions" } | { kind: "history"; id: string | null } | null;
 
 /** The studio: the square, the song, the script and what is to be said about it, on one screen. */
 export function Studio(props: StudioProps) {
@@ -60,7 +66,7 @@ interface OpenStudioProps extends StudioProps {
 }
 
 function OpenStudio(props: OpenStudioProps) {
-  const { layout, song, player, opened, versions, title } = props;
+  const { layout, song, player, opened, title } = props;
   const { store, state: draft } = opened;
   const [firstSource] = useState(draft.source);
   const editor = useRef<ScriptPanelHandle>(null);
@@ -117,7 +123,16 @@ function OpenStudio(props: OpenStudioProps) {
     setTab("script");
     requestAnimationFrame(() => editor.current?.insert(code));
   };
-  const asides = useAsides(store, props.readVersion);
+  const history = useHistory(store, props.history);
+  const restore = (source: string, text: KeptText) => {
+    const before = store?.state.source ?? "";
+    setDialog(null);
+    store?.edit(source);
+    showToast({
+      title: `${text.title} of ${text.when} is your script now.`,
+      action: { label: "Undo", onPress: () => store?.edit(before) },
+    });
+  };
   const description = useDescription(run.onStage, props.describeShow);
 
   return (
@@ -127,11 +142,9 @@ function OpenStudio(props: OpenStudioProps) {
         context={props.context}
         homeHref={props.homeHref}
         draft={draft}
-        versions={versions}
-        asides={asides.versions}
-        onOpenSaves={asides.load}
-        onLook={(version) => setDialog({ kind: "version", version })}
-        onChoose={() => setDialog({ kind: "versions" })}
+        versions={props.history.versions}
+        onLook={(id) => setDialog({ kind: "history", id })}
+        onChoose={() => setDialog({ kind: "two-versions" })}
         onHandIn={props.onHandIn && (() => setDialog({ kind: "hand-in" }))}
       />
       <div className="studio-columns">
@@ -216,25 +229,25 @@ function OpenStudio(props: OpenStudioProps) {
           onClose={() => setDialog(null)}
         />
       )}
-      {dialog?.kind === "version" && (
-        <VersionDialog
-          version={dialog.version}
-          readSource={asides.readSource}
-          onUse={(source) => {
-            setDialog(null);
-            store?.edit(source);
-          }}
-          onClose={() => setDialog(null)}
-        />
-      )}
-      {dialog?.kind === "versions" && draft.sync.kind === "two-versions" && (
-        <TwoVersionsDialog
-          mine={draft.source}
-          theirs={draft.sync.theirs.source}
-          onChoose={choose}
-          onClose={() => setDialog(null)}
-        />
-      )}
+      <Suspense>
+        {dialog?.kind === "history" && (
+          <HistoryDialog
+            history={history}
+            source={draft.source}
+            firstId={dialog.id}
+            onRestore={restore}
+            onClose={() => setDialog(null)}
+          />
+        )}
+        {dialog?.kind === "two-versions" && draft.sync.kind === "two-versions" && (
+          <TwoVersionsDialog
+            mine={draft.source}
+            theirs={draft.sync.theirs.source}
+            onChoose={choose}
+            onClose={() => setDialog(null)}
+          />
+        )}
+      </Suspense>
     </div>
   );
 }
