@@ -16,6 +16,7 @@ export const PROBLEMS = {
   "slot-taken": { status: 409, title: "That time is taken." },
   "already-done": { status: 409, title: "This was done already." },
   "wrong-state": { status: 409, title: "This can not be done now." },
+  "newer-version": { status: 409, title: "A newer version was handed in." },
   "past-due": { status: 409, title: "The due date is over." },
   "blocked-by-stop": { status: 409, title: "A stop of the show check is open." },
   "lineup-has-stops": { status: 409, title: "The lineup has stops to clear." },

@@ -14,6 +14,8 @@ import { InstantSchema, paragraphText, RibbonSchema, RunSummarySchema } from "./
 import { ForwardStateSchema, WorkStateSchema } from "./shows.ts";
 
 const params = z.object({ submissionId: SubmissionIdSchema });
+/** The version the teacher looked at: an answer never lands on one handed in meanwhile. */
+const ofVersion = z.object({ versionId: VersionIdSchema });
 const ofTeacher: readonly Grant[] = [{ role: "teacher", relation: "class-teacher" }];
 const ofAuthorOrTeacher: readonly Grant[] = [{ role: "student", relation: "author" }, ...ofTeacher];
 
@@ -182,9 +184,11 @@ export const markingContract = defineContract({
     summary: "Sends the work back for another pass, with a note.",
     access: ofTeacher,
     params,
-    body: z.object({ note: paragraphText(2000).pipe(z.string().min(1, "Say what the next pass should change.")) }),
+    body: ofVersion.extend({
+      note: paragraphText(2000).pipe(z.string().min(1, "Say what the next pass should change.")),
+    }),
     response: z.object({ state: WorkStateSchema }),
-    problems: ["invalid-request", "not-found", "wrong-state"],
+    problems: ["invalid-request", "not-found", "wrong-state", "newer-version"],
   },
   release: {
     method: "POST",
@@ -192,8 +196,9 @@ export const markingContract = defineContract({
     summary: "Releases the mark to the authors.",
     access: ofTeacher,
     params,
+    body: ofVersion,
     response: z.object({ state: WorkStateSchema, mark: MarkSchema }),
-    problems: ["invalid-request", "not-found", "wrong-state"],
+    problems: ["invalid-request", "not-found", "wrong-state", "newer-version"],
   },
   reopen: {
     method: "POST",

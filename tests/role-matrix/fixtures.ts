@@ -29,6 +29,11 @@ const inClass = (body?: object) => call(({ classId }) => ({ params: { classId },
 const ofAssignment = (body?: object) => call(({ assignmentId }) => ({ params: { assignmentId }, body }));
 const ofShow = (body?: object) => call(({ showId }) => ({ params: { showId }, body }));
 const ofSubmitted = (body?: object) => call(({ submittedId: submissionId }) => ({ params: { submissionId }, body }));
+const ofSubmittedVersion = (body: object) =>
+  call(({ submittedId: submissionId, submittedVersionId: versionId }) => ({
+    params: { submissionId },
+    body: { ...body, versionId },
+  }));
 const ofMarked = (body?: object) => call(({ markedId: submissionId }) => ({ params: { submissionId }, body }));
 const ofForward = (body?: object) => call(({ waitingId: forwardId }) => ({ params: { forwardId }, body }));
 const ofSlot = (body?: object) => call(({ slotId }) => ({ params: { slotId }, body }));
@@ -109,8 +114,8 @@ export const FIXTURES: Readonly<Record<string, Fixture>> = {
   "marking.comment": ofSubmitted({ anchor: { kind: "whole" }, body: "Well timed." }),
   "marking.deleteComment": call(({ comments }, caller) => ({ params: { commentId: comments[ownerFor(caller)] } })),
   "marking.saveMark": ofSubmitted({ levels: { timing: 2 }, note: "Nearly there." }),
-  "marking.sendBack": ofSubmitted({ note: "Look at the start again." }),
-  "marking.release": ofSubmitted(),
+  "marking.sendBack": ofSubmittedVersion({ note: "Look at the start again." }),
+  "marking.release": ofSubmittedVersion({}),
   "marking.reopen": ofMarked(),
 
   "songs.list": nothing,

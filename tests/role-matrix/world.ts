@@ -208,6 +208,7 @@ export async function buildWorld(db: Db, now: number) {
     showId: handIns["student-own"],
     forwardedVersionId: waiting.versionId,
     submittedId: submitted.id,
+    submittedVersionId: submitted.versionId,
     markedId: marked.id,
     comments,
     waitingId: waiting.id,

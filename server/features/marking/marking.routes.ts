@@ -15,8 +15,8 @@ export function createMarkingHandlers(deps: FeatureDeps): Handlers<typeof markin
       commit(() => ({ comment: createComment(deps, actor, params.submissionId, body) })),
     deleteComment: ({ actor, params }) => deleteComment(deps, actor, params.commentId),
     saveMark: ({ actor, params, body }) => ({ mark: saveMark(deps, actor, params.submissionId, body) }),
-    sendBack: ({ actor, params, body }) => ({ state: sendBack(deps, actor, params.submissionId, body.note) }),
-    release: ({ actor, params }) => releaseMark(deps, actor, params.submissionId),
+    sendBack: ({ actor, params, body }) => ({ state: sendBack(deps, actor, params.submissionId, body) }),
+    release: ({ actor, params, body }) => releaseMark(deps, actor, params.submissionId, body.versionId),
     reopen: ({ actor, params }) => ({ state: reopenSubmission(deps, actor, params.submissionId) }),
   };
 }

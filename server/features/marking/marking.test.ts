@@ -11,6 +11,7 @@ import {
   buildSquare,
   buildSubmission,
   buildUser,
+  buildVersion,
 } from "../../../tests/support/factories.ts";
 import { createTestServer, type TestServer } from "../../../tests/support/test-server.ts";
 
@@ -46,7 +47,14 @@ beforeEach(() => {
 afterEach(() => server.dispose());
 
 const of = (id: string = submission.id) => ({ params: { submissionId: id } });
+const ofVersion = () => ({ ...of(), body: { versionId: submission.versionId } });
 const stateNow = () => server.db.select().from(submissions).where(eq(submissions.id, submission.id)).get()?.state;
+/** The author hands in another version of the same show. */
+function handInAgain(): void {
+  const next = buildVersion(server.db, { showId: submission.showId, number: 2 });
+  server.db.update(submissions).set({ versionId: next.id }).where(eq(submissions.id, submission.id)).run();
+  submission = { ...submission, versionId: next.id };
+}
 const detail = (as: string) => server.call(contracts.marking.submission, of(), { as });
 
 describe("GET /api/marking", () => {
@@ -114,7 +122,7 @@ describe("GET /api/submissions/:submissionId", () => {
     expect(before.status).toBe(200);
     expect(before.body.mark).toBeNull();
     expect(before.body.evidence).toEqual({});
-    await server.call(contracts.marking.release, of(), { as: teacher });
+    await server.call(contracts.marking.release, ofVersion(), { as: teacher });
     expect((await detail(wren)).body.mark).toMatchObject({ got: 5, isReleased: true });
   });
 
@@ -225,14 +233,14 @@ describe("PUT /api/submissions/:submissionId/mark", () => {
     expect((await save({ timing: 2 }, otherTeacher)).status).toBe(404);
     expect((await save({ timing: 2 }, wren)).status).toBe(403);
     await save({ timing: 2, code: 2 });
-    await server.call(contracts.marking.release, of(), { as: teacher });
+    await server.call(contracts.marking.release, ofVersion(), { as: teacher });
     expect((await save({ timing: 4, code: 4 })).body.type).toBe("/problems/wrong-state");
   });
 });
 
 describe("POST /api/submissions/:submissionId/send-back", () => {
-  const sendBack = (as = teacher) =>
-    server.call(contracts.marking.sendBack, { ...of(), body: { note: "Let the roof breathe." } }, { as });
+  const sendBack = (as = teacher, versionId = submission.versionId) =>
+    server.call(contracts.marking.sendBack, { ...of(), body: { note: "Let the roof breathe.", versionId } }, { as });
 
   it("asks for another pass with the note among the comments, and keeps history", async () => {
     expect((await sendBack()).body).toEqual({ state: "revise" });
@@ -245,10 +253,18 @@ describe("POST /api/submissions/:submissionId/send-back", () => {
   it("answers not-found to other teachers", async () => {
     expect((await sendBack(otherTeacher)).status).toBe(404);
   });
+
+  it("does not answer a version that was handed in meanwhile", async () => {
+    const seen = submission.versionId;
+    handInAgain();
+    expect((await sendBack(teacher, seen)).body.type).toBe("/problems/newer-version");
+    expect(stateNow()).toBe("submitted");
+  });
 });
 
 describe("POST /api/submissions/:submissionId/release", () => {
-  const release = (as = teacher) => server.call(contracts.marking.release, of(), { as });
+  const release = (as = teacher, versionId = submission.versionId) =>
+    server.call(contracts.marking.release, { ...of(), body: { versionId } }, { as });
 
   it("names every criterion without a level", async () => {
     buildMark(server.db, { submissionId: submission.id, markedBy: teacher, levels: { timing: 3 } });
@@ -276,6 +292,15 @@ describe("POST /api/submissions/:submissionId/release", () => {
   it("answers not-found to other teachers", async () => {
     expect((await release(otherTeacher)).status).toBe(404);
   });
+
+  it("does not mark a version that was handed in meanwhile", async () => {
+    buildMark(server.db, { submissionId: submission.id, markedBy: teacher, levels: { timing: 3, code: 4 } });
+    const seen = submission.versionId;
+    handInAgain();
+    expect((await release(teacher, seen)).body.type).toBe("/problems/newer-version");
+    expect(stateNow()).toBe("submitted");
+    expect((await release()).body).toMatchObject({ state: "marked" });
+  });
 });
 
 describe("POST /api/submissions/:submissionId/reopen", () => {
@@ -283,7 +308,7 @@ describe("POST /api/submissions/:submissionId/reopen", () => {
 
   it("takes a released mark from the author's sight and work sent back to submitted", async () => {
     buildMark(server.db, { submissionId: submission.id, markedBy: teacher, levels: { timing: 3, code: 4 } });
-    await server.call(contracts.marking.release, of(), { as: teacher });
+    await server.call(contracts.marking.release, ofVersion(), { as: teacher });
     expect((await reopen()).body).toEqual({ state: "submitted" });
     expect((await detail(wren)).body.mark).toBeNull();
     expect((await detail(teacher)).body.mark).toMatchObject({ got: 7, isReleased: false });

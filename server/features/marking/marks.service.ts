@@ -61,11 +61,20 @@ export function saveMark(
   });
 }
 
-/** Sends submitted work back for another pass; the note stands among the comments. Throws `wrong-state`, `not-found`. */
-export function sendBack(deps: MarksDeps, actor: Actor, submissionId: string, note: string): WorkState {
+/**
+ * Sends submitted work back for another pass; the note stands among the comments. Throws
+ * `wrong-state`, `newer-version` when another version was handed in meanwhile, `not-found`.
+ */
+export function sendBack(
+  deps: MarksDeps,
+  actor: Actor,
+  submissionId: string,
+  { versionId, note }: { versionId: string; note: string },
+): WorkState {
   return inTransaction(deps.db, (tx) => {
     const context = getRelatedSubmission(tx, actor, submissionId);
     assertState(context.submission, ["submitted"], "Only work that waits for a mark can be sent back.");
+    assertSameVersion(context.submission, versionId);
     insertComment(tx, {
       id: newId(),
       submissionId,
@@ -81,16 +90,19 @@ export function sendBack(deps: MarksDeps, actor: Actor, submissionId: string, no
 
 /**
  * Releases the mark to the authors. Throws `invalid-request` naming every criterion without a level,
- * `wrong-state` for work that does not wait for a mark, `not-found`.
+ * `wrong-state` for work that does not wait for a mark, `newer-version` when another version was
+ * handed in meanwhile, `not-found`.
  */
 export function releaseMark(
   { db, clock }: MarksDeps,
   actor: Actor,
   submissionId: string,
+  versionId: string,
 ): { state: WorkState; mark: Mark } {
   return inTransaction(db, (tx) => {
     const context = getRelatedSubmission(tx, actor, submissionId);
     assertState(context.submission, ["submitted"], "Only work that waits for a mark can be released.");
+    assertSameVersion(context.submission, versionId);
     const { rubric } = context.assignment;
     const levels = findMark(tx, submissionId)?.levels ?? {};
     const open = rubric.filter((criterion) => levels[criterion.id] === undefined);
@@ -142,6 +154,11 @@ function changeState(
 
 function assertState(submission: SubmissionRow, states: readonly SubmissionRow["state"][], detail: string): void {
   if (!states.includes(submission.state)) throw new ProblemError("wrong-state", { detail });
+}
+
+function assertSameVersion(submission: SubmissionRow, versionId: string): void {
+  if (submission.versionId !== versionId)
+    throw new ProblemError("newer-version", { detail: "A newer version was handed in meanwhile. Look at it first." });
 }
 
 function refuseFields(errors: readonly FieldError[]): void {

@@ -1,7 +1,7 @@
 import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
 import type { EndpointCall, EndpointResponse } from "../../../shared/contract.ts";
 import { markingContract } from "../../../shared/contracts/marking.ts";
-import type { AssignmentId, CommentId, SubmissionId } from "../../../shared/ids.ts";
+import type { AssignmentId, CommentId, SubmissionId, VersionId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
 
 export type MarkingInbox = EndpointResponse<typeof markingContract.inbox>["assignments"];
@@ -68,8 +68,10 @@ export function useDeleteComment(submissionId: SubmissionId) {
 export function useSendBack(submissionId: SubmissionId) {
   const forget = useForget();
   return useMutation({
-    mutationFn: (note: string) => callApi(markingContract.sendBack, { params: { submissionId }, body: { note } }),
-    onSuccess: forget,
+    mutationFn: (body: { versionId: VersionId; note: string }) =>
+      callApi(markingContract.sendBack, { params: { submissionId }, body }),
+    // A refusal may mean that a newer version is there to be looked at.
+    onSettled: forget,
   });
 }
 
@@ -77,7 +79,10 @@ export function useRelease(submissionId: SubmissionId) {
   const client = useQueryClient();
   const forget = useForget();
   return useMutation({
-    mutationFn: () => callApi(markingContract.release, { params: { submissionId } }),
+    mutationFn: (versionId: VersionId) =>
+      callApi(markingContract.release, { params: { submissionId }, body: { versionId } }),
+    // A refusal may mean that a newer version is there to be looked at.
+    onError: forget,
     onSuccess: ({ state, mark }) => {
       client.setQueryData(
         submissionQuery(submissionId).queryKey,

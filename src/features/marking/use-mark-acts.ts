@@ -67,7 +67,7 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
         });
         return;
       }
-      release.mutate(undefined, {
+      release.mutate(submission.versionId, {
         // The desk stays: what is marked is often forwarded next. J goes on.
         onSuccess: ({ mark }) => tell(`The mark of ${authors} is released.`, `${mark.got} of ${mark.of}.`),
         onError: (error) => {
@@ -77,13 +77,16 @@ export function useMarkActs({ submission, draft, onDone, onOpen }: MarkActsOptio
       });
     },
     sendBack: (note: string, onSent: () => void) =>
-      sendBack.mutate(note, {
-        onSuccess: () => {
-          tell(`The work of ${authors} is sent back.`, "They can hand it in again.");
-          onSent();
-          onDone();
+      sendBack.mutate(
+        { versionId: submission.versionId, note },
+        {
+          onSuccess: () => {
+            tell(`The work of ${authors} is sent back.`, "They can hand it in again.");
+            onSent();
+            onDone();
+          },
         },
-      }),
+      ),
     takeBack: () => takeBack(),
   };
 }
