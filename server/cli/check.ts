@@ -1,4 +1,3 @@
-import { checkShow, mergeFindings } from "../../sandbox/checks/index.ts";
 import type { Finding } from "../../sandbox/engine/model.ts";
 import { createRunPool, type RunPool } from "../runs/run-pool.ts";
 import { type Command, parseOptions, UsageError } from "./command.ts";
@@ -34,14 +33,9 @@ async function checkFile(
   file: string,
   values: ReadonlyMap<string, string>,
 ): Promise<{ lines: string[]; isStopped: boolean }> {
-  const input = buildRunInput(file, values);
-  const outcome = await runs.run(input);
-  if (!outcome.ok) {
-    const { range, sentence } = outcome.problem;
-    return { lines: [`${file}: does not run. Line ${range.line}: ${sentence}`], isStopped: true };
-  }
-  const { layout, song } = input;
-  const findings = mergeFindings([outcome.findings, checkShow({ timeline: outcome.timeline, layout, song })]);
+  const { problem, findings } = await runs.judge(buildRunInput(file, values));
+  if (problem)
+    return { lines: [`${file}: does not run. Line ${problem.range.line}: ${problem.sentence}`], isStopped: true };
   const count = (severity: Finding["severity"]) => findings.filter((finding) => finding.severity === severity).length;
   const head = `${file}: ${count("stop")} stops, ${count("warn")} warnings, ${count("note")} notes`;
   return { lines: [head, ...findings.map(describeFinding)], isStopped: count("stop") > 0 };

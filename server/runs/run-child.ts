@@ -1,6 +1,6 @@
 import { Worker } from "node:worker_threads";
-import { createStoppedOutcome } from "../../sandbox/engine/stopped.ts";
 import type { ChildMessage, RunRequest, ThreadMessage } from "./messages.ts";
+import { createStoppedAnswer } from "./stopped-answer.ts";
 import { bundleWorker } from "./worker-bundle.ts";
 
 /**
@@ -60,8 +60,8 @@ class Thread {
     if (this.#request?.id !== message.id) return;
     clearTimeout(this.#timer);
     this.#request = null;
-    send({ kind: "done", id: message.id, outcome: message.outcome });
-    if (message.isSpent) this.#replace();
+    send(message.kind === "failed" ? message : { kind: "done", id: message.id, answer: message.answer });
+    if (message.kind === "failed" || message.isSpent) this.#replace();
     else takeUp(this);
   }
 
@@ -70,11 +70,9 @@ class Thread {
     const request = this.#request;
     this.#request = null;
     if (request !== null) {
-      const outcome = {
-        ...createStoppedOutcome(request.input.source, code, details),
-        engineMs: code === "too-much-work" ? request.deadlineMs : 0,
-      };
-      send({ kind: "done", id: request.id, outcome });
+      const { id, work, input, deadlineMs } = request;
+      const engineMs = code === "too-much-work" ? deadlineMs : 0;
+      send({ kind: "done", id, answer: createStoppedAnswer(work, input, { code, details, engineMs }) });
     }
     this.#replace();
   }

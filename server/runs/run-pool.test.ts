@@ -1,9 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { judgeRun } from "../../sandbox/checks/judge-run.ts";
 import type { RunInput } from "../../sandbox/engine/model.ts";
 import { HOSTILE_SCRIPTS } from "../../tests/support/hostile-scripts.ts";
 import { SMALL_LAYOUT, SMALL_SONG, runWell } from "../../tests/support/run-script.ts";
 import { FairQueue } from "./fair-queue.ts";
-import { RunPoolClosedError, RunQueueFullError, createRunPool, type RunPool } from "./run-pool.ts";
+import { JudgingFailedError, RunPoolClosedError, RunQueueFullError, createRunPool, type RunPool } from "./run-pool.ts";
+import { createStoppedAnswer } from "./stopped-answer.ts";
 
 const HONEST =
   'for (const front of square.fronts) {\n  front.pulse(1, "gold");\n  wait(roll(3));\n}\nsquare.all.shuffled().off();';
@@ -32,6 +34,27 @@ describe("createRunPool", () => {
     const outcome = await pool.run(inputOf(HONEST));
     expect(outcome).toMatchObject({ ok: true, hash: golden });
     expect(outcome.engineMs).toBeGreaterThan(0);
+  });
+
+  it("judges a run as judging it here does", { timeout: SLOW_MS }, async () => {
+    const input = inputOf(HONEST);
+    const judged = await pool.judge(input);
+    expect(judged).toEqual(judgeRun(await runWell(HONEST), input.layout, input.song));
+    expect(judged).toMatchObject({ problem: null, hash: golden, ribbon: { rows: 4, columns: 320 } });
+  });
+
+  it("judges what a script wrote before its problem", { timeout: SLOW_MS }, async () => {
+    const stopped = await pool.judge(inputOf("square.all.on();\nwait(1);\nwait(1 - 3);"));
+    expect(stopped).toMatchObject({ problem: { code: "negative-time", range: { line: 3 } }, hash: null });
+    expect(stopped.findings).toMatchObject([{ rule: "incomplete", severity: "stop" }]);
+  });
+
+  it("rejects a run that it can not judge, and judges the next", { timeout: SLOW_MS }, async () => {
+    // A front without an outline can not be drawn; scripts do not ask for it.
+    const fronts = SMALL_LAYOUT.fronts.map((front) => ({ ...front, silhouette: undefined }));
+    const broken = { ...inputOf(HONEST), layout: { ...SMALL_LAYOUT, fronts } as unknown as RunInput["layout"] };
+    await expect(pool.judge(broken)).rejects.toBeInstanceOf(JudgingFailedError);
+    expect(await pool.judge(inputOf(HONEST))).toMatchObject({ hash: golden });
   });
 
   it("carries the timeline across as typed arrays", async () => {
@@ -88,6 +111,19 @@ describe("createRunPool", () => {
     await short.close();
     await refused;
     await expect(short.run(inputOf(HONEST))).rejects.toBeInstanceOf(RunPoolClosedError);
+  });
+});
+
+describe("createStoppedAnswer", () => {
+  it("names the reason and keeps nothing, whatever was wanted", () => {
+    const why = { code: "too-much-work", details: "Stopped after 5 ms.", engineMs: 5 } as const;
+    const problem = { code: "too-much-work", details: "Stopped after 5 ms." };
+    expect(createStoppedAnswer("run", inputOf(HONEST), why)).toMatchObject({
+      outcome: { ok: false, problem, engineMs: 5 },
+    });
+    expect(createStoppedAnswer("judge", inputOf(HONEST), why)).toMatchObject({
+      judged: { problem, hash: null, timeline: null, ribbon: null, findings: [], description: "Nothing lights up." },
+    });
   });
 });
 

@@ -1,9 +1,10 @@
 import { fork, type ChildProcess } from "node:child_process";
 import { fileURLToPath } from "node:url";
 import type { RunInput } from "../../sandbox/engine/model.ts";
-import { createStoppedOutcome } from "../../sandbox/engine/stopped.ts";
+import type { JudgedRun } from "../../sandbox/checks/judge-run.ts";
 import { FairQueue } from "./fair-queue.ts";
-import type { ChildMessage, RunRequest, TimedOutcome } from "./messages.ts";
+import type { ChildMessage, RunAnswer, RunRequest, RunWork, TimedOutcome } from "./messages.ts";
+import { createStoppedAnswer } from "./stopped-answer.ts";
 
 const CHILD = fileURLToPath(new URL("./run-child.ts", import.meta.url));
 /** A child that does not answer so long after a thread's deadline is stuck itself. */
@@ -24,9 +25,19 @@ export interface RunPool {
    * Runs a script; its outcome is a value whatever it does. Rejects with `RunQueueFullError` when too
    * many runs wait, and with `RunPoolClosedError` after `close`.
    */
-  run(input: RunInput, options?: { readonly classId?: string }): Promise<TimedOutcome>;
+  run(input: RunInput, options?: RunOptions): Promise<TimedOutcome>;
+  /**
+   * Runs a script as `run` does and works out everything that is kept of it: the show check, the
+   * timeline's bytes, the ribbon and its words. Rejects with `JudgingFailedError` when that fails.
+   */
+  judge(input: RunInput, options?: RunOptions): Promise<JudgedRun>;
   /** Ends the child process; runs under way are rejected. */
   close(): Promise<void>;
+}
+
+export interface RunOptions {
+  /** Whose turn it is; runs without a class share one. */
+  readonly classId?: string;
 }
 
 export interface RunPoolOptions {
@@ -48,6 +59,11 @@ export class RunPoolBrokenError extends Error {
   override readonly name = "RunPoolBrokenError";
 }
 
+/** A run was made and could not be judged: a bug of the show check. */
+export class JudgingFailedError extends Error {
+  override readonly name = "JudgingFailedError";
+}
+
 /** The pool was closed. */
 export class RunPoolClosedError extends Error {
   override readonly name = "RunPoolClosedError";
@@ -55,8 +71,9 @@ export class RunPoolClosedError extends Error {
 
 interface Job {
   readonly group: string;
+  readonly work: RunWork;
   readonly input: RunInput;
-  readonly resolve: (outcome: TimedOutcome) => void;
+  readonly resolve: (answer: RunAnswer) => void;
   readonly reject: (error: Error) => void;
   tries: number;
 }
@@ -87,13 +104,24 @@ class ChildRunPool implements RunPool {
     this.#child = this.#startChild();
   }
 
-  run(input: RunInput, options: { readonly classId?: string } = {}): Promise<TimedOutcome> {
+  async run(input: RunInput, options: RunOptions = {}): Promise<TimedOutcome> {
+    const answer = await this.#ask("run", input, options);
+    if (answer.work !== "run") throw new Error(`The pool was asked to run and answered "${answer.work}".`);
+    return answer.outcome;
+  }
+
+  async judge(input: RunInput, options: RunOptions = {}): Promise<JudgedRun> {
+    const answer = await this.#ask("judge", input, options);
+    if (answer.work !== "judge") throw new Error(`The pool was asked to judge and answered "${answer.work}".`);
+    return answer.judged;
+  }
+
+  #ask(work: RunWork, input: RunInput, { classId = NO_CLASS }: RunOptions): Promise<RunAnswer> {
     if (this.#isClosed) return Promise.reject(new RunPoolClosedError("The run pool is closed."));
     if (this.#queue.size >= this.#maxWaiting)
       return Promise.reject(new RunQueueFullError(`${this.#queue.size} runs wait already.`));
     return new Promise((resolve, reject) => {
-      const group = options.classId ?? NO_CLASS;
-      this.#queue.add(group, { group, input, resolve, reject, tries: 0 });
+      this.#queue.add(classId, { group: classId, work, input, resolve, reject, tries: 0 });
       this.#advance();
     });
   }
@@ -146,7 +174,8 @@ class ChildRunPool implements RunPool {
     if (running === undefined) return;
     clearTimeout(running.timer);
     this.#running.delete(message.id);
-    running.job.resolve(message.outcome);
+    if (message.kind === "failed") running.job.reject(new JudgingFailedError(message.reason));
+    else running.job.resolve(message.answer);
     if (this.#runsOfChild >= RUNS_PER_CHILD && this.#running.size === 0) this.#replaceChild(child);
     this.#advance();
   }
@@ -178,7 +207,7 @@ class ChildRunPool implements RunPool {
     const child = this.#child;
     const timer = setTimeout(() => this.#replaceChild(child), this.#deadlineMs + CHILD_GRACE_MS);
     this.#running.set(id, { job, timer });
-    const request: RunRequest = { id, input: job.input, deadlineMs: this.#deadlineMs };
+    const request: RunRequest = { id, work: job.work, input: job.input, deadlineMs: this.#deadlineMs };
     child.send(request, (error) => {
       if (error !== null) this.#replaceChild(child);
     });
@@ -203,11 +232,10 @@ class ChildRunPool implements RunPool {
     for (const { job, timer } of lost) {
       clearTimeout(timer);
       if (job.tries < MAX_TRIES) this.#queue.addFirst(job.group, job);
-      else
-        job.resolve({
-          ...createStoppedOutcome(job.input.source, "could-not-run", "The process that ran it ended."),
-          engineMs: 0,
-        });
+      else {
+        const details = "The process that ran it ended.";
+        job.resolve(createStoppedAnswer(job.work, job.input, { code: "could-not-run", details, engineMs: 0 }));
+      }
     }
     this.#advance();
   }

@@ -1,5 +1,4 @@
 import { and, eq } from "drizzle-orm";
-import { ribbonCells } from "../../sandbox/timeline/ribbon.ts";
 import { draftHistory, drafts, shows } from "../db/schema/index.ts";
 import type { FeatureDeps } from "../deps.ts";
 import { findSong } from "../event/song.queries.ts";
@@ -38,12 +37,12 @@ export function createDraftRibbons({ db, runs, log }: FeatureDeps): DraftRibbons
     if (!draft || !song) return;
     const { layout } = getCurrentLayout(db);
     const [classId] = listShowClassIds(db, { id: showId, assignmentId: draft.assignmentId });
-    const outcome = await runs.run(
+    const judged = await runs.judge(
       { source: draft.source, songId: song.id, song: song.beatMap, layout, seed: draft.seed },
       classId === undefined ? {} : { classId },
     );
-    if (!outcome.ok) return;
-    const ribbon = encodeRibbon(ribbonCells(outcome.timeline, layout));
+    if (judged.problem !== null || judged.ribbon === null) return;
+    const ribbon = encodeRibbon(judged.ribbon);
     db.update(drafts).set({ ribbon }).where(eq(drafts.showId, showId)).run();
     db.update(draftHistory)
       .set({ ribbon })

@@ -1,10 +1,5 @@
 import type { BeatMap } from "../../shared/contracts/songs.ts";
-import type { Layout } from "../../shared/contracts/square.ts";
-import type { Finding, RunOutcome } from "../../sandbox/engine/model.ts";
-import { checkShow, mergeFindings } from "../../sandbox/checks/index.ts";
-import { encodeTimeline } from "../../sandbox/timeline/codec.ts";
-import { describeShow } from "../../sandbox/timeline/describe.ts";
-import { ribbonCells } from "../../sandbox/timeline/ribbon.ts";
+import type { JudgedRun } from "../../sandbox/checks/judge-run.ts";
 import { newId } from "../db/schema/columns.ts";
 import type { FeatureDeps } from "../deps.ts";
 import { getBeatMap, songSeconds } from "../event/song.queries.ts";
@@ -15,7 +10,7 @@ import { encodeRibbon } from "./ribbon-blob.ts";
 import { findLatestRun, insertRun, listVersionsWithoutRun, type RunRow, type VersionRow } from "./runs.queries.ts";
 
 /** What a run of a version came to, as its row keeps it. */
-export type RunResult = Pick<RunRow, "summary" | "hash" | "timeline" | "ribbon">;
+type RunResult = Pick<RunRow, "summary" | "hash" | "timeline" | "ribbon">;
 
 /** Versions being run now: a hand-in and the pass for unfinished ones never run the same twice. */
 const underWay = new Map<string, Promise<RunRow | null>>();
@@ -45,7 +40,7 @@ async function runNow(
   const song = getBeatMap(db, version.beatMapId);
   try {
     const input = { source: version.source, songId: version.songId, song, layout, seed: version.seed };
-    const outcome = await runs.run(input, classId === null ? {} : { classId });
+    const judged = await runs.judge(input, classId === null ? {} : { classId });
     const row: RunRow = {
       id: newId(),
       versionId: version.id,
@@ -53,7 +48,7 @@ async function runNow(
       beatMapId: version.beatMapId,
       engine: engineHash(),
       rulesVersion: CHECK_RULES_VERSION,
-      ...judgeOutcome(outcome, layout, song),
+      ...toResult(judged, song),
       createdAt: clock.now(),
     };
     insertRun(db, row);
@@ -67,24 +62,22 @@ async function runNow(
   }
 }
 
-/** Turns an outcome into what is kept of it: summary with the show check, hash, timeline and ribbon. */
-export function judgeOutcome(outcome: RunOutcome, layout: Layout, song: BeatMap): RunResult {
-  const { timeline } = outcome;
-  const checked: Finding[] = timeline ? checkShow({ timeline, layout, song }) : [];
-  const hash = outcome.ok ? outcome.hash : null;
+/** A judged run as its row keeps it. */
+function toResult(judged: JudgedRun, song: BeatMap): RunResult {
+  const { problem, hash, cueCount, findings, timeline, ribbon, description } = judged;
   return {
     summary: {
-      isOk: outcome.ok,
-      problem: outcome.ok ? null : presentProblem(outcome.problem),
+      isOk: problem === null,
+      problem: problem && presentProblem(problem),
       hash,
-      cueCount: outcome.cueCount,
-      findings: mergeFindings([outcome.findings, checked]).map(presentFinding),
+      cueCount,
+      findings: findings.map(presentFinding),
       seconds: songSeconds(song),
-      description: timeline ? describeShow(timeline, layout, song).summary : "Nothing lights up.",
+      description,
     },
     hash,
-    timeline: timeline ? Buffer.from(encodeTimeline(timeline)) : null,
-    ribbon: timeline ? encodeRibbon(ribbonCells(timeline, layout)) : null,
+    timeline: timeline && Buffer.from(timeline),
+    ribbon: ribbon && encodeRibbon(ribbon),
   };
 }
 

@@ -188,7 +188,7 @@ describe("POST /api/assignments/:assignmentId/submissions", () => {
   });
 
   it("is safe once the version is kept: a run that got lost is made up for at start-up", async () => {
-    const run = vi.spyOn(server.deps.runs, "run").mockRejectedValueOnce(new Error("the pool is gone"));
+    const run = vi.spyOn(server.deps.runs, "judge").mockRejectedValueOnce(new Error("the pool is gone"));
     const { status, body } = await handIn();
     expect(status).toBe(201);
     expect(body).toMatchObject({ hashesAgree: null, run: { isOk: false, problem: null } });

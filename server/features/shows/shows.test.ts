@@ -255,7 +255,7 @@ describe("PUT /api/shows/:showId/draft", () => {
     await save(show.id, 1, "square.all.on();\n");
     await vi.waitFor(() => expect(findDraft(show.id)?.ribbon).not.toBeNull());
     const good = findDraft(show.id)?.ribbon;
-    const run = vi.spyOn(server.deps.runs, "run");
+    const run = vi.spyOn(server.deps.runs, "judge");
     await save(show.id, 2, BROKEN_SOURCE);
     await vi.waitFor(() => expect(run).toHaveBeenCalledOnce());
     await run.mock.results[0]?.value;
@@ -265,10 +265,10 @@ describe("PUT /api/shows/:showId/draft", () => {
   it("runs a show that is saved many times while it runs once more, not many times", async () => {
     const show = buildShow(server.db, { authorIds: [wren] });
     const { runs } = server.deps;
-    const inner = runs.run.bind(runs);
+    const inner = runs.judge.bind(runs);
     let open = () => {};
     const gate = new Promise<void>((resolve) => (open = resolve));
-    const run = vi.spyOn(runs, "run").mockImplementation(async (...args) => {
+    const run = vi.spyOn(runs, "judge").mockImplementation(async (...args) => {
       await gate;
       return inner(...args);
     });
