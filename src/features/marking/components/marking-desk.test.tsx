@@ -209,6 +209,7 @@ describe("releasing", () => {
     const release = screen.getByRole("button", { name: "Release mark" });
     expect(release.getAttribute("aria-disabled")).toBe("true");
     expect(screen.getByText("“Uses the square” has no level yet.")).toBeTruthy();
+    expect(listToasts().map((toast) => toast.detail)).toContain("“Uses the square” has no level yet.");
     expect(requests.some((request) => request.path.endsWith("/release"))).toBe(false);
   });
 

@@ -4,6 +4,7 @@ import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 import { Button } from "../../../components/button.tsx";
 import { KeyHints } from "../../../components/kbd.tsx";
+import { showToast } from "../../../components/toast-queue.ts";
 import { formatNames } from "../../../lib/format.ts";
 import type { DeskAction } from "../model/desk-keys.ts";
 import { presentMoment } from "../model/comment-place.ts";
@@ -87,6 +88,10 @@ export function MarkingDesk({
     (acts.hasReleased && !isOpen ? findNextToMark(queue.rows, submission.id) : null) ??
     findNeighbour(queue.rows, submission.id, 1);
 
+  const showCriterion = (id: string | null) => {
+    setCurrentId(id);
+    document.querySelector(`[data-criterion="${id ?? ""}"]`)?.scrollIntoView({ block: "nearest" });
+  };
   const handleAction = (action: DeskAction) => {
     if (action.kind === "next" && next) onGo(next.submissionId);
     if (action.kind === "previous" && previous) onGo(previous.submissionId);
@@ -94,12 +99,17 @@ export function MarkingDesk({
     if (action.kind === "comment")
       comments.write(playback ? { kind: "moment", tick: Math.round(playback.getTick()) } : { kind: "whole" });
     if (action.kind === "keys") setDialog("keys");
-    if (action.kind === "release" && isOpen && obstacle === null) void acts.release();
+    if (action.kind === "release" && isOpen) {
+      if (obstacle === null) void acts.release();
+      else {
+        showToast({ title: "The mark is not released yet.", detail: obstacle });
+        showCriterion(findCurrent(rubric, draft.text.levels));
+      }
+    }
     if (action.kind === "level" && isOpen && currentId !== null) {
       const after = pressLevel(rubric, { levels: draft.text.levels, currentId }, action.level);
       draft.setLevel(currentId, action.level);
-      setCurrentId(after.currentId);
-      document.querySelector(`[data-criterion="${after.currentId}"]`)?.scrollIntoView({ block: "nearest" });
+      showCriterion(after.currentId);
     }
   };
   useDeskKeys(handleAction);
