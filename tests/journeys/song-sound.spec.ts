@@ -3,9 +3,12 @@ import type { Browser, Page } from "playwright-core";
 import { rolldown } from "rolldown";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { readMidi } from "../../sandbox/music/read-midi.ts";
+import { buildBeatMap } from "../../sandbox/music/beat-map.ts";
 import { buildScore } from "../../sandbox/music/score.ts";
+import { createTempo } from "../../sandbox/timeline/tempo.ts";
 import { DEMO_SONGS } from "../../server/db/seed/world/songs/demo-songs.ts";
 import type { Score } from "../../shared/contracts/songs.ts";
+import { TICKS_PER_BEAT } from "../../shared/units.ts";
 import type { renderSong } from "../../src/features/shows/audio/render-song.ts";
 import { launchBrowser } from "./support/browser.ts";
 
@@ -56,6 +59,30 @@ function measure(score: Score): Promise<Level> {
   );
 }
 
+/** Seconds from each moment to where the sound rises near it; a moment at which nothing rises counts as half a second off. */
+function findOnsetErrors(score: Score, moments: readonly number[]): Promise<number[]> {
+  return page.evaluate(
+    async ({ score: wanted, moments: at, seconds, sampleRate }) => {
+      const { songSound } = window as unknown as { songSound: { renderSong: typeof renderSong } };
+      const samples = await songSound.renderSong(wanted, { from: 0, to: seconds }, sampleRate);
+      const loudest = (from: number, to: number) => {
+        let peak = 0;
+        for (let i = Math.max(0, Math.round(from * sampleRate)); i < to * sampleRate; i += 1)
+          peak = Math.max(peak, Math.abs(samples[i] ?? 0));
+        return peak;
+      };
+      return at.map((moment) => {
+        const before = loudest(moment - 0.08, moment - 0.04);
+        const after = loudest(moment, moment + 0.1);
+        for (let time = moment - 0.04; time < moment + 0.1; time += 0.001)
+          if (loudest(time, time + 0.001) > before + (after - before) * 0.2) return time - moment;
+        return 0.5;
+      });
+    },
+    { score, moments, seconds: SECONDS, sampleRate: SAMPLE_RATE },
+  );
+}
+
 describe("the sound of the demo songs", () => {
   it.each(DEMO_SONGS.map((song) => [song.title, song.file] as const))(
     "%s is heard, every instrument of it, and clips nowhere",
@@ -70,6 +97,26 @@ describe("the sound of the demo songs", () => {
       }
     },
   );
+
+  it("sounds each drum within 20 ms of the moment that scripts and lights have for it", async () => {
+    const errors: number[] = [];
+    for (const { file } of DEMO_SONGS) {
+      const midi = readMidi(file);
+      const score = buildScore(midi);
+      const drums = score.tracks.filter((track) => track.isDrums);
+      const map = buildBeatMap(midi);
+      const tempo = createTempo(map);
+      const moments = drums
+        .flatMap(({ name }) => map.instruments.find((instrument) => instrument.name === name)?.hits ?? [])
+        .map((beat) => tempo.toSeconds(beat * TICKS_PER_BEAT))
+        .sort((a, b) => a - b);
+      // A drum that rings hides where the next begins.
+      const alone = moments.filter((at, i) => at > 0.3 && at < SECONDS - 0.2 && at - (moments[i - 1] ?? 0) > 0.3);
+      if (alone.length > 0) errors.push(...(await findOnsetErrors({ ...score, tracks: drums }, alone)));
+    }
+    expect(errors.length).toBeGreaterThan(10);
+    expect(Math.max(...errors.map(Math.abs))).toBeLessThan(0.02);
+  });
 
   it("is silent where a score has no notes", async () => {
     expect((await measure({ seconds: 4, tracks: [] })).peak).toBe(0);

@@ -66,7 +66,7 @@ describe("HeardClock", () => {
     }
     expect(Math.max(...steps)).toBeLessThan(1.3 / 60);
     expect(Math.min(...steps)).toBeGreaterThan(0.7 / 60);
-    expect(Math.abs(last - (5 - 0.03))).toBeLessThan(0.02);
+    expect(Math.abs(last - (5 - 0.03))).toBeLessThan(0.001);
   });
 
   it("follows a jump of the audio clock at once", () => {

@@ -21,57 +21,87 @@ export interface PlayheadOptions {
   readonly loop: LoopRange | null;
 }
 
-/** Which second of the song belongs to which time of a clock, from one moment on. Immutable. */
+/** A shorter loop would only buzz. */
+const SHORTEST_LOOP_SECONDS = 0.05;
+
+/**
+ * Which second of the song belongs to which time of a clock, from one moment on. Immutable.
+ *
+ * Everything is worked out from the way: the seconds played since the start, loops unrolled. A way is
+ * cut into turns at `#wayOfTurn`, which is a product and not a sum, so that the ten-thousandth turn
+ * begins as exactly as the first; both `songAt` and `listSpans` go through it, so that what is laid and
+ * what is shown cannot part, and no note at the very start of a loop falls between two spans.
+ */
 export class Playhead {
   readonly #options: PlayheadOptions;
+  readonly #loop: LoopRange | null;
 
   constructor(options: PlayheadOptions) {
     this.#options = options;
+    const { loop, song } = options;
+    // A loop that lies behind is not gone back to: the song plays on to its end.
+    this.#loop = loop && loop.end - loop.start > SHORTEST_LOOP_SECONDS && song < loop.end ? loop : null;
   }
 
   /** The song's second at a time of the clock: before the start it stands, at the end it stays. */
   songAt(clock: number): number {
-    const { song, end } = this.#options;
-    const passed = this.#passed(clock);
-    const loop = this.#loop;
-    if (!loop || song + passed < loop.end) return Math.min(end, song + passed);
-    return loop.start + ((song + passed - loop.end) % (loop.end - loop.start));
+    return this.#place(this.#wayAt(clock)).song;
   }
 
   /** Whether the song is over at a time of the clock; never in a loop. */
   isOverAt(clock: number): boolean {
-    return !this.#loop && this.#options.song + this.#passed(clock) >= this.#options.end;
+    return !this.#loop && this.#wayAt(clock) >= this.#wayOfTurn(0);
   }
 
-  /** The stretches of the song that belong to a stretch of the clock, in order. */
+  /** Seconds of the clock until the song starts; 0 once it has. */
+  secondsUntilStart(clock: number): number {
+    return Math.max(0, this.#options.clock - clock);
+  }
+
+  /** The stretches of the song that belong to a stretch of the clock, in order. Spans that meet share their edge. */
   listSpans(fromClock: number, toClock: number): PlayedSpan[] {
-    const { rate, end } = this.#options;
-    const loop = this.#loop;
     const spans: PlayedSpan[] = [];
-    let clock = Math.max(fromClock, this.#options.clock);
-    while (clock < toClock) {
-      const from = this.songAt(clock);
-      const last = loop && from < loop.end ? loop.end : end;
-      const to = Math.min(last, from + (toClock - clock) * rate);
-      // Rounding may leave less than a sample; going on would never end.
-      if (to - from < 1e-6) {
-        if (!loop) break;
-        clock += 1e-6;
-        continue;
-      }
-      spans.push({ from, to, clock });
-      clock += (to - from) / rate;
+    const end = this.#wayAt(toClock);
+    let way = this.#wayAt(fromClock);
+    let { turn, song } = this.#place(way);
+    while (way < end && (this.#loop !== null || way < this.#wayOfTurn(0))) {
+      const turnEnd = this.#wayOfTurn(turn);
+      const isWhole = turnEnd <= end;
+      const to = isWhole ? this.#lastSecond() : this.#place(end).song;
+      if (to > song) spans.push({ from: song, to, clock: this.#options.clock + way / this.#options.rate });
+      way = Math.min(turnEnd, end);
+      turn += 1;
+      song = this.#loop?.start ?? this.#options.end;
     }
     return spans;
   }
 
-  /** The loop, unless the song is already past it: then it plays on to the end. */
-  get #loop(): LoopRange | null {
-    const { loop, song } = this.#options;
-    return loop && loop.end - loop.start > 0.05 && song < loop.end ? loop : null;
+  /** Seconds of the song played at a time of the clock, as if no loop went back. */
+  #wayAt(clock: number): number {
+    return Math.max(0, clock - this.#options.clock) * this.#options.rate;
   }
 
-  #passed(clock: number): number {
-    return Math.max(0, clock - this.#options.clock) * this.#options.rate;
+  /** The way at which a turn ends: turn 0 leads from the start to the loop's end (or the song's). */
+  #wayOfTurn(turn: number): number {
+    const { song, end } = this.#options;
+    if (!this.#loop) return end - song;
+    return this.#loop.end - song + turn * (this.#loop.end - this.#loop.start);
+  }
+
+  #lastSecond(): number {
+    return this.#loop?.end ?? this.#options.end;
+  }
+
+  #place(way: number): { readonly turn: number; readonly song: number } {
+    const { song, end } = this.#options;
+    if (way < this.#wayOfTurn(0)) return { turn: 0, song: song + way };
+    if (!this.#loop) return { turn: 0, song: end };
+    const length = this.#loop.end - this.#loop.start;
+    let turn = 1 + Math.floor((way - this.#wayOfTurn(0)) / length);
+    // A division may land a hair beside the edge of a turn; the edges themselves decide.
+    if (way < this.#wayOfTurn(turn - 1)) turn -= 1;
+    else if (way >= this.#wayOfTurn(turn)) turn += 1;
+    if (turn === 0) return { turn, song: song + way };
+    return { turn, song: Math.min(this.#loop.end, this.#loop.start + (way - this.#wayOfTurn(turn - 1))) };
   }
 }

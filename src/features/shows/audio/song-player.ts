@@ -1,9 +1,9 @@
-import type { Score } from "../../../../shared/contracts/songs.ts";
-import { Ensemble } from "./ensemble.ts";
+import type { BeatMap, Score } from "../../../../shared/contracts/songs.ts";
+import { findCountIn, listBeatClicks, type BeatClick } from "./beat-clicks.ts";
 import { HeardClock } from "./heard-clock.ts";
 import { NoteQueue } from "./note-queue.ts";
-import { Playhead, type LoopRange } from "./playhead.ts";
-import { createLiveContext, type Context } from "./tone.ts";
+import { Playhead, type LoopRange, type PlayedSpan } from "./playhead.ts";
+import { LiveDevice, type SoundDevice } from "./sound-device.ts";
 
 /** Notes are laid this far ahead; a hidden page's timers run once a second, so further there. */
 const AHEAD_SECONDS = 0.2;
@@ -18,8 +18,10 @@ const WORTH_HOLDING_SECONDS = 0.2;
 
 export interface SongPlayerOptions {
   readonly score: Score;
-  /** The song's end in seconds, by its beat map. */
-  readonly endSeconds: number;
+  /** For the metronome, and the song's end. */
+  readonly song: Pick<BeatMap, "beats" | "bars">;
+  /** The loudspeaker of this computer when left out. */
+  readonly openDevice?: () => SoundDevice;
 }
 
 /**
@@ -29,14 +31,12 @@ export interface SongPlayerOptions {
  */
 export class SongPlayer {
   readonly #queue: NoteQueue;
-  readonly #score: Score;
+  readonly #options: SongPlayerOptions;
+  readonly #clicks: readonly BeatClick[];
   readonly #end: number;
   readonly #listeners = new Set<() => void>();
-  #context: Context | null = null;
-  #master: GainNode | null = null;
+  #device: SoundDevice | null = null;
   #clock: HeardClock | null = null;
-  #ensemble: Ensemble | null = null;
-  #building: Promise<Ensemble> | null = null;
   #playhead: Playhead | null = null;
   #laidUntil = 0;
   #turn: ReturnType<typeof setInterval> | undefined;
@@ -45,13 +45,18 @@ export class SongPlayer {
   #loop: LoopRange | null = null;
   #volume = 0.8;
   #hasSound = true;
+  #hasMetronome = false;
+  #hasCountIn = false;
+  /** Seconds of the clock between two strokes of the count-in under way. */
+  #countSeconds = 0;
   /** Counts starts and stops, so that a start that waited for the device knows it was overtaken. */
   #order = 0;
 
-  constructor({ score, endSeconds }: SongPlayerOptions) {
-    this.#score = score;
-    this.#end = endSeconds;
-    this.#queue = new NoteQueue(score);
+  constructor(options: SongPlayerOptions) {
+    this.#options = options;
+    this.#queue = new NoteQueue(options.score);
+    this.#clicks = listBeatClicks(options.song);
+    this.#end = (options.song.beats.at(-1) ?? 0) / 1_000_000;
   }
 
   get isPlaying(): boolean {
@@ -75,10 +80,21 @@ export class SongPlayer {
     return this.#end;
   }
 
-  /** The moment of the song being heard, in seconds from the start of the audio. */
-  positionSeconds(): number {
+  /** The moment of the song that is heard now, or `ahead` seconds later; in seconds from the start of the audio. */
+  positionSeconds(ahead = 0): number {
     if (!this.#playhead || !this.#clock) return this.#rest;
-    return this.#playhead.songAt(this.#clock.now());
+    return this.#playhead.songAt(this.#clock.now() + ahead);
+  }
+
+  /** Strokes of the count-in that are still to come; 0 once the song sounds. */
+  get countInLeft(): number {
+    if (!this.#playhead || !this.#clock || this.#countSeconds === 0) return 0;
+    return Math.ceil(this.#playhead.secondsUntilStart(this.#clock.now()) / this.#countSeconds);
+  }
+
+  /** What is heard, as a stream to record; null where there is no sound. */
+  stream(): MediaStream | null {
+    return this.#hasSound ? (this.#device?.stream() ?? null) : null;
   }
 
   /** Plays on from where it stands; from the loop's start, or the song's, when it stands at the end. */
@@ -88,7 +104,7 @@ export class SongPlayer {
     await this.#openDevice();
     if (order !== this.#order || this.isPlaying) return;
     const isAtEnd = this.#rest >= this.#end - 0.01;
-    this.#startAt(isAtEnd ? (this.#loop?.start ?? 0) : this.#rest);
+    this.#startAt(isAtEnd ? (this.#loop?.start ?? 0) : this.#rest, this.#hasCountIn);
     this.#notify();
   }
 
@@ -124,7 +140,17 @@ export class SongPlayer {
   setVolume(volume: number): void {
     this.#volume = Math.min(1, Math.max(0, volume));
     // The ear hears the square of the slider as even steps.
-    if (this.#master) this.#master.gain.value = this.#volume ** 2;
+    this.#device?.setGain(this.#volume ** 2);
+  }
+
+  /** A stroke on each beat, high on the first of a bar. Strokes that were laid already are heard. */
+  setMetronome(hasMetronome: boolean): void {
+    this.#hasMetronome = hasMetronome;
+  }
+
+  /** One bar of strokes before the song, at each `play`. */
+  setCountIn(hasCountIn: boolean): void {
+    this.#hasCountIn = hasCountIn;
   }
 
   subscribe(listener: () => void): () => void {
@@ -136,38 +162,27 @@ export class SongPlayer {
     this.#order += 1;
     this.#listeners.clear();
     this.#stop();
-    this.#ensemble?.dispose();
-    this.#ensemble = null;
-    const context = this.#context;
-    this.#context = null;
-    if (context) void context.close().then(() => context.dispose());
+    this.#device?.dispose();
+    this.#device = null;
   }
 
   async #openDevice(): Promise<void> {
-    if (this.#clock && !this.#context) return;
-    if (!this.#context) {
-      this.#context = createLiveContext();
-      const raw = this.#context.rawContext;
-      this.#master = raw.createGain();
-      this.#master.gain.value = this.#volume ** 2;
-      this.#master.connect(raw.destination);
-      this.#clock = new HeardClock(raw);
+    if (this.#clock && !this.#device) return;
+    if (!this.#device) {
+      this.#device = this.#options.openDevice?.() ?? new LiveDevice(this.#options.score);
+      this.#device.setGain(this.#volume ** 2);
+      this.#clock = new HeardClock(this.#device.time);
     }
-    const context = this.#context;
+    const device = this.#device;
     const isOpen = await Promise.race([
-      context.resume().then(() => context.state === "running"),
+      device.resume(),
       new Promise<boolean>((resolve) => setTimeout(() => resolve(false), DEVICE_PATIENCE_MS)),
     ]).catch(() => false);
-    if (context !== this.#context) return;
-    if (isOpen && this.#master) {
-      this.#building ??= Ensemble.create(this.#score, context, this.#master);
-      const ensemble = await this.#building;
-      if (context === this.#context) this.#ensemble = ensemble;
-      else ensemble.dispose();
-      return;
-    }
+    if (device !== this.#device) return;
+    if (isOpen) return device.prepare();
     this.#hasSound = false;
-    this.#context = null;
+    this.#device = null;
+    device.dispose();
     this.#clock = new HeardClock({
       get currentTime() {
         return performance.now() / 1000;
@@ -175,17 +190,26 @@ export class SongPlayer {
     });
   }
 
-  #startAt(song: number): void {
+  #startAt(song: number, isCountedIn = false): void {
     if (!this.#clock) return;
     const now = this.#now();
     // Notes that were laid before a jump are hushed, not taken back: start behind the last of them.
-    const clock = this.#context ? Math.max(now + LEAD_SECONDS, this.#laidUntil + 0.01) : now;
+    const first = this.#device ? Math.max(now + LEAD_SECONDS, this.#laidUntil + 0.01) : now;
+    this.#device?.open(first);
+    const clock = first + (isCountedIn ? this.#countIn(song, first) : 0);
     this.#playhead = new Playhead({ clock, song, rate: this.#rate, end: this.#end, loop: this.#loop });
     this.#laidUntil = clock;
-    this.#ensemble?.open(clock);
     this.#takeUpHeld(song, clock);
     this.#layAhead();
     this.#turn = setInterval(() => this.#layAhead(), TURN_MS);
+  }
+
+  /** Lays the strokes of a count-in from a time of the clock on; gives how long they take. */
+  #countIn(song: number, from: number): number {
+    const { beats, beatSeconds } = findCountIn(this.#options.song, song);
+    this.#countSeconds = beatSeconds / this.#rate;
+    for (let beat = 0; beat < beats; beat += 1) this.#device?.playClick(from + beat * this.#countSeconds, beat === 0);
+    return beats * this.#countSeconds;
   }
 
   #startAgain(): void {
@@ -195,19 +219,20 @@ export class SongPlayer {
 
   #stop(): void {
     clearInterval(this.#turn);
-    if (this.#playhead) this.#ensemble?.hush(this.#laidUntil);
+    if (this.#playhead) this.#device?.hush(this.#laidUntil);
     this.#playhead = null;
+    this.#countSeconds = 0;
   }
 
   /** The time of the clock that notes are laid by. */
   #now(): number {
-    return this.#context ? this.#context.rawContext.currentTime : (this.#clock?.now() ?? 0);
+    return this.#device?.time.currentTime ?? this.#clock?.now() ?? 0;
   }
 
   #takeUpHeld(song: number, clock: number): void {
     for (const note of this.#queue.listSounding(song)) {
       const left = (note.start + note.lasts - song) / this.#rate;
-      if (left > WORTH_HOLDING_SECONDS) this.#ensemble?.play(note, clock, left);
+      if (left > WORTH_HOLDING_SECONDS) this.#device?.playNote(note, clock, left);
     }
   }
 
@@ -216,16 +241,22 @@ export class SongPlayer {
     if (!playhead || !this.#clock) return;
     const ahead = document.hidden ? AHEAD_HIDDEN_SECONDS : AHEAD_SECONDS;
     const until = Math.max(this.#laidUntil, this.#now() + ahead);
-    if (this.#ensemble)
-      for (const span of playhead.listSpans(this.#laidUntil, until))
-        for (const note of this.#queue.listStarting(span.from, span.to))
-          this.#ensemble.play(note, span.clock + (note.start - span.from) / this.#rate, note.lasts / this.#rate);
+    if (this.#device) for (const span of playhead.listSpans(this.#laidUntil, until)) this.#laySpan(this.#device, span);
     this.#laidUntil = until;
     if (playhead.isOverAt(this.#clock.now())) {
       this.#rest = this.#end;
       this.#stop();
       this.#notify();
     }
+  }
+
+  #laySpan(device: SoundDevice, { from, to, clock }: PlayedSpan): void {
+    const timeOf = (start: number) => clock + (start - from) / this.#rate;
+    for (const note of this.#queue.listStarting(from, to))
+      device.playNote(note, timeOf(note.start), note.lasts / this.#rate);
+    if (!this.#hasMetronome) return;
+    for (const click of this.#clicks)
+      if (click.start >= from && click.start < to) device.playClick(timeOf(click.start), click.isFirst);
   }
 
   #notify(): void {

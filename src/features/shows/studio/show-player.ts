@@ -19,6 +19,8 @@ export interface ShownMoment {
   readonly seconds: number;
   readonly frame: Frame;
   readonly rgb: Float32Array;
+  /** Strokes of a count-in still to come; 0 when none is under way. */
+  readonly countIn: number;
   /** Strength by line number; empty while nothing is on stage. */
   readonly linesLit: ArrayLike<number>;
 }
@@ -29,6 +31,9 @@ export interface ShowPlayerOptions {
   /** Null for a song that has no score: the show runs without sound. */
   readonly score: Score | null;
 }
+
+/** What is drawn in one animation frame is seen at the next (60 a second; a faster screen only gains). */
+export const SCREEN_DELAY_SECONDS = 1 / 60;
 
 const NO_LINES: readonly number[] = [];
 
@@ -62,7 +67,7 @@ export class ShowPlayer {
       toSeconds: (tick) => this.tempo.toSeconds(tick),
       loadPlayer: async () => {
         const { SongPlayer: Player } = await import("../audio/song-player.ts");
-        return new Player({ score: score ?? { seconds: 0, tracks: [] }, endSeconds: this.tempo.endSeconds });
+        return new Player({ score: score ?? { seconds: 0, tracks: [] }, song });
       },
     });
     this.#transport.subscribe(() => this.redraw());
@@ -77,7 +82,7 @@ export class ShowPlayer {
   }
 
   get tick(): number {
-    return Math.min(this.tempo.endTick, Math.max(0, this.tempo.toTick(this.#transport.positionSeconds())));
+    return this.#toTick(this.#transport.positionSeconds());
   }
 
   /** Puts another show on stage; the place in the song stays. */
@@ -120,10 +125,14 @@ export class ShowPlayer {
     this.#transport.dispose();
   }
 
+  #toTick(seconds: number): number {
+    return Math.min(this.tempo.endTick, Math.max(0, this.tempo.toTick(seconds)));
+  }
+
   #draw(now: number): void {
     this.#request = 0;
-    const seconds = this.#transport.positionSeconds();
-    const tick = this.tick;
+    const seconds = this.#transport.positionSeconds(SCREEN_DELAY_SECONDS);
+    const tick = this.#toTick(seconds);
     const frame = this.#cursor?.seek(tick) ?? this.#dark;
     let isSettled = true;
     if (this.#isGentle) {
@@ -133,7 +142,8 @@ export class ShowPlayer {
       this.#gentle.jumpTo(frame.rgb);
     }
     const linesLit = this.#linesLit?.(frame) ?? NO_LINES;
-    for (const view of this.#views) view.showMoment({ tick, seconds, frame, rgb: this.#gentle.rgb, linesLit });
+    const countIn = this.#transport.countInLeft;
+    for (const view of this.#views) view.showMoment({ tick, seconds, frame, rgb: this.#gentle.rgb, countIn, linesLit });
     const isMoving = this.#transport.isPlaying || !isSettled;
     this.#lastDrawn = isMoving ? now : 0;
     if (isMoving) this.redraw();

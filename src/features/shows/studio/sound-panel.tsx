@@ -1,3 +1,4 @@
+import { Checkbox } from "../../../components/checkbox.tsx";
 import { Icon } from "../../../components/icon.tsx";
 import { useDisclosure } from "../../../hooks/use-disclosure.ts";
 import { SpeedChoice } from "./speed-choice.tsx";
@@ -8,7 +9,7 @@ export interface SoundPanelProps {
   state: TransportState;
 }
 
-/** Volume and speed: in the bar where it is wide enough, else behind one button. */
+/** Behind one button: metronome and count-in, and what the bar has no room for of volume and speed. */
 export function SoundPanel({ transport, state }: SoundPanelProps) {
   const { isOpen, panelId, rootRef, toggle } = useDisclosure();
   const { volume, hasSound, hasFailed } = state;
@@ -57,6 +58,16 @@ export function SoundPanel({ transport, state }: SoundPanelProps) {
             <span aria-hidden="true">Speed</span>
             <SpeedChoice rate={state.rate} onRate={(rate) => transport.setRate(rate)} />
           </div>
+          <Checkbox
+            label="Metronome: a tick on every beat"
+            checked={state.hasMetronome}
+            onChange={(event) => transport.setMetronome(event.target.checked)}
+          />
+          <Checkbox
+            label="Count in a bar before playing"
+            checked={state.hasCountIn}
+            onChange={(event) => transport.setCountIn(event.target.checked)}
+          />
         </div>
       )}
     </div>

@@ -63,11 +63,11 @@ function SongClock({ song, player }: { song: BeatMap; player: ShowPlayer }) {
       if (element && element.textContent !== text) element.textContent = text;
     };
     return player.addView({
-      showMoment: ({ tick, seconds }) => {
+      showMoment: ({ tick, seconds, countIn }) => {
         const place = findSongPlace(song, tick);
         write(bar, String(place.bar));
         write(beat, String(place.beat));
-        write(section, song.sections[place.section]?.name ?? "song");
+        write(section, countIn > 0 ? `count-in ${countIn}` : (song.sections[place.section]?.name ?? "song"));
         write(clock, presentClock(seconds));
         [...(beads?.children ?? [])].forEach((bead, index) => {
           bead.classList.toggle("is-on", index + 1 === place.beat);

@@ -5,6 +5,7 @@ import { Transport, type PlaybackEngine } from "./transport-model.ts";
 class FakeEngine implements PlaybackEngine {
   isPlaying = false;
   hasSound = true;
+  countInLeft = 0;
   position = 0;
   readonly calls: string[] = [];
   #listener: () => void = () => undefined;
@@ -26,6 +27,9 @@ class FakeEngine implements PlaybackEngine {
   setLoop = (loop: { start: number; end: number } | null) =>
     void this.calls.push(loop ? `loop ${loop.start}-${loop.end}` : "no loop");
   setRate = (rate: number) => void this.calls.push(`rate ${rate}`);
+  setMetronome = (isOn: boolean) => void this.calls.push(`metronome ${isOn}`);
+  setCountIn = (isOn: boolean) => void this.calls.push(`count-in ${isOn}`);
+  stream = () => null;
   setVolume = (volume: number) => void this.calls.push(`volume ${volume}`);
   subscribe = (listener: () => void) => {
     this.#listener = listener;
@@ -58,9 +62,10 @@ describe("Transport", () => {
     const { engine, transport, countLoads } = setUp();
     transport.seek(12);
     transport.setRate(0.5);
+    transport.setCountIn(true);
     expect(countLoads()).toBe(0);
     await transport.play();
-    expect(engine.calls).toEqual(["seek 12", "rate 0.5", "volume 0.7", "no loop"]);
+    expect(engine.calls).toEqual(["seek 12", "rate 0.5", "volume 0.7", "no loop", "metronome false", "count-in true"]);
     expect(transport.state).toMatchObject({ isPlaying: true, isStarting: false });
   });
 

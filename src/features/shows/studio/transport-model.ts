@@ -5,13 +5,18 @@ import type { TickLoop } from "../ribbon/song-place.ts";
 export interface PlaybackEngine {
   readonly isPlaying: boolean;
   readonly hasSound: boolean;
-  positionSeconds(): number;
+  /** Strokes of a count-in still to come. */
+  readonly countInLeft: number;
+  positionSeconds(ahead?: number): number;
   play(): Promise<void>;
   pause(): void;
   seek(seconds: number): void;
   setLoop(loop: LoopRange | null): void;
   setRate(rate: number): void;
   setVolume(volume: number): void;
+  setMetronome(hasMetronome: boolean): void;
+  setCountIn(hasCountIn: boolean): void;
+  stream(): MediaStream | null;
   subscribe(listener: () => void): () => void;
   dispose(): void;
 }
@@ -35,6 +40,10 @@ export interface TransportState {
   readonly loop: TickLoop | null;
   readonly rate: number;
   readonly volume: number;
+  /** A stroke on every beat. */
+  readonly hasMetronome: boolean;
+  /** A bar of strokes before the song starts. */
+  readonly hasCountIn: boolean;
 }
 
 /** Play, pause, jump, loop, speed and volume; before the sound is loaded it keeps the place itself. */
@@ -50,6 +59,8 @@ export class Transport {
     loop: null,
     rate: 1,
     volume: 0.7,
+    hasMetronome: false,
+    hasCountIn: false,
   };
   #engine: PlaybackEngine | null = null;
   #loading: Promise<PlaybackEngine> | null = null;
@@ -68,8 +79,18 @@ export class Transport {
     return this.#state.isPlaying;
   }
 
-  positionSeconds(): number {
-    return this.#engine?.positionSeconds() ?? this.#rest;
+  /** The moment of the song that is heard now, or `ahead` seconds later. */
+  positionSeconds(ahead = 0): number {
+    return this.#engine?.positionSeconds(ahead) ?? this.#rest;
+  }
+
+  get countInLeft(): number {
+    return this.#engine?.countInLeft ?? 0;
+  }
+
+  /** What is heard, as a stream to record; null before the sound is loaded, and where there is none. */
+  stream(): MediaStream | null {
+    return this.#engine?.stream() ?? null;
   }
 
   /** Call from the person's own act, else the browser stays silent. */
@@ -121,6 +142,16 @@ export class Transport {
     this.#engine?.setVolume(volume);
   }
 
+  setMetronome(hasMetronome: boolean): void {
+    this.#set({ hasMetronome });
+    this.#engine?.setMetronome(hasMetronome);
+  }
+
+  setCountIn(hasCountIn: boolean): void {
+    this.#set({ hasCountIn });
+    this.#engine?.setCountIn(hasCountIn);
+  }
+
   subscribe(listener: () => void): () => void {
     this.#listeners.add(listener);
     return () => this.#listeners.delete(listener);
@@ -153,6 +184,8 @@ export class Transport {
     engine.setRate(this.#state.rate);
     engine.setVolume(this.#state.volume);
     engine.setLoop(this.#readLoop());
+    engine.setMetronome(this.#state.hasMetronome);
+    engine.setCountIn(this.#state.hasCountIn);
     engine.subscribe(() => this.#set({ isPlaying: engine.isPlaying, hasSound: engine.hasSound }));
     this.#engine = engine;
   }

@@ -6,8 +6,8 @@ const OWN_SPACE =
   "input, textarea, select, button, a, summary, [contenteditable=true], [role=slider], [role=tab], [role=radio], [role=dialog]";
 
 /**
- * Space plays and pauses anywhere but where it writes or presses; Escape stops from anywhere but the
- * editor and open dialogs, where it means something else.
+ * Space plays and pauses anywhere but where it writes or presses; Escape stops from anywhere, also while
+ * writing, unless it closes something (a dialog, a list of words, a search).
  */
 export function usePlayKeys(player: ShowPlayer): void {
   useEffect(() => {
@@ -18,8 +18,7 @@ export function usePlayKeys(player: ShowPlayer): void {
         event.preventDefault();
         player.transport.toggle();
       }
-      if (event.key === "Escape" && !target?.closest("[contenteditable=true], [role=dialog], [aria-expanded=true]"))
-        player.transport.pause();
+      if (event.key === "Escape" && !target?.closest("[role=dialog], [aria-expanded=true]")) player.transport.pause();
     };
     document.addEventListener("keydown", handleKey);
     return () => document.removeEventListener("keydown", handleKey);
