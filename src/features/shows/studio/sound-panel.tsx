@@ -31,10 +31,7 @@ export function SoundPanel({ transport, state }: SoundPanelProps) {
           <Icon name="mute" /> {hasFailed ? "No sound came. Press play again." : "No sound here"}
         </p>
       ) : (
-        <div className="studio-sound-wide">
-          <Icon name="volume" />
-          {slider}
-        </div>
+        <div className="studio-sound-wide">{slider}</div>
       )}
       <button
         type="button"
