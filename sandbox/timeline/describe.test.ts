@@ -33,6 +33,8 @@ describe("describeShow", () => {
       ...Array.from({ length: 8 }, (_, turn) => pulse(20 + turn, ALL, 1, 0x00_00_ff)),
       off(28, ALL),
     ];
+    const beats = describeCues(cues).starts.map((tick) => tick / 960);
+    expect(beats).toEqual([0, 4, 12, 20, 28]);
     expect(describeCues(cues).steps).toEqual([
       "Bar 1: all is dark.",
       "Bars 2 to 3 (verse): the north side lights up one front after another, in gold.",

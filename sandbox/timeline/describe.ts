@@ -14,6 +14,8 @@ export interface ShowDescription {
   readonly summary: string;
   /** A sentence for each part of the song, in order; equal neighbours are one. */
   readonly steps: readonly string[];
+  /** The tick at which each step begins. */
+  readonly starts: readonly number[];
 }
 
 /**
@@ -37,9 +39,14 @@ export function describeShow(timeline: Timeline, layout: Layout, song: BeatMap):
       ? []
       : [{ span, activity, words: describeActivity(activity, sides, (front) => fronts[front]?.name ?? "") }];
   });
-  const steps = joinParts(parts).map(({ spans: joined, words }) => `${nameSpans(joined)}: ${words}.`);
-  const ending = timeline.isComplete ? [] : ["The script stopped here, so the show is not whole."];
-  return { summary: summarise(parts, timeline.isComplete), steps: [...steps, ...ending] };
+  const joined = joinParts(parts);
+  const steps = joined.map((part) => `${nameSpans(part.spans)}: ${part.words}.`);
+  const starts = joined.map((part) => part.spans[0]?.start ?? 0);
+  if (!timeline.isComplete) {
+    steps.push("The script stopped here, so the show is not whole.");
+    starts.push(parts.at(-1)?.span.end ?? 0);
+  }
+  return { summary: summarise(parts, timeline.isComplete), steps, starts };
 }
 
 interface Part {

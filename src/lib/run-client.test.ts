@@ -27,7 +27,9 @@ class FakeWorkers {
       drawRibbon: (_timeline, _layout, { rows, columns }) =>
         Promise.resolve({ rows, columns, cells: new Uint8Array(rows * columns * 4) }),
       describe: (timeline) =>
-        timeline.songId === "hang" ? new Promise(() => {}) : Promise.resolve({ summary: timeline.songId, steps: [] }),
+        timeline.songId === "hang"
+          ? new Promise(() => {})
+          : Promise.resolve({ summary: timeline.songId, steps: [], starts: [] }),
       run: ({ source }) => {
         record.ran.push(source);
         return source === "hang"

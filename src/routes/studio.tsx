@@ -20,7 +20,7 @@ import { StudioLoading } from "../features/shows/studio/studio-loading.tsx";
 import { songQuery } from "../features/songs/api.ts";
 import { layoutQuery } from "../features/square/api.ts";
 import { useDisposable } from "../hooks/use-disposable.ts";
-import { HERE } from "../lib/format.ts";
+import { formatNames, HERE } from "../lib/format.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { presentDue } from "../lib/zoned-time.ts";
 import { requireSession } from "./guards.ts";
@@ -75,7 +75,15 @@ function ShowStudio({ detail }: { detail: ShowDetail }) {
     <QueryView query={layout} errorTitle="The square could not be loaded." skeleton={loading} frame={frame}>
       {(square) => (
         <QueryView query={song} errorTitle="The song could not be loaded." skeleton={loading} frame={frame}>
-          {({ beatMap, score }) => <OpenShow detail={detail} layout={square.layout} beatMap={beatMap} score={score} />}
+          {({ song: { title, credit }, beatMap, score }) => (
+            <OpenShow
+              detail={detail}
+              songTitle={`${title}, ${credit}`}
+              layout={square.layout}
+              beatMap={beatMap}
+              score={score}
+            />
+          )}
         </QueryView>
       )}
     </QueryView>
@@ -84,12 +92,13 @@ function ShowStudio({ detail }: { detail: ShowDetail }) {
 
 interface OpenShowProps {
   detail: ShowDetail;
+  songTitle: string;
   layout: Layout;
   beatMap: BeatMap;
   score: Score;
 }
 
-function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
+function OpenShow({ detail, songTitle, layout, beatMap, score }: OpenShowProps) {
   const { show, draft, seed } = detail;
   const { data: session, dataUpdatedAt } = useSuspenseQuery(sessionQuery);
   const navigate = useNavigate();
@@ -128,6 +137,8 @@ function OpenShow({ detail, layout, beatMap, score }: OpenShowProps) {
         title={show.title}
         context={`${show.assignmentTitle ?? "A show of your own"}${due}`}
         homeHref="/home"
+        authors={formatNames(show.authors.map((name) => name.split(" ")[0] ?? name))}
+        songTitle={songTitle}
         layout={layout}
         song={beatMap}
         score={score}

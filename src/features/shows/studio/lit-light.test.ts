@@ -47,12 +47,18 @@ const cursor = createCursor(timeline, layout);
 describe("findLitLight", () => {
   it("tells the brightest light, its colour's name and the line that acts", () => {
     const lit = findLitLight(timeline, cursor.seek(960), lights);
-    expect(lit).toEqual({ part: "windows", level: 73, colour: "gold", line: 4 });
+    expect(lit).toEqual({ part: "windows", level: 73, colour: "gold", line: 4, callers: [12] });
     expect(lit && presentLitLight(lit)).toBe("windows at 73, gold");
   });
 
   it("names no colour for a plain string of lamps", () => {
-    expect(findLitLight(timeline, cursor.seek(0), lights)).toEqual({ part: "roof", level: 40, colour: null, line: 9 });
+    expect(findLitLight(timeline, cursor.seek(0), lights)).toEqual({
+      part: "roof",
+      level: 40,
+      colour: null,
+      line: 9,
+      callers: [],
+    });
   });
 
   it("counts the pixels of a strip, and writes a colour without a name as it is", () => {

@@ -14,6 +14,8 @@ export interface LitLight {
   readonly colour: string | null;
   /** The line that acts, from 1; null when it is not known. */
   readonly line: number | null;
+  /** The lines that called it, the nearest first: a function's line, then the one that called the function. */
+  readonly callers: readonly number[];
 }
 
 /** The brightest of some lights at the frame's moment, or null when all of them are dark. */
@@ -22,11 +24,13 @@ export function findLitLight(timeline: Timeline, frame: Frame, lights: readonly 
   for (const light of lights)
     if ((frame.level[light.index] ?? 0) > (best ? (frame.level[best.index] ?? 0) : 0.5)) best = light;
   if (!best) return null;
+  const lines = linesOfCue(timeline, frame.cue[best.index] ?? -1);
   return {
     part: best.pixel === null ? best.part : `${best.part}, light ${best.pixel}`,
     level: Math.max(1, Math.round(frame.level[best.index] ?? 0)),
     colour: best.hasColour ? findColourWord(timeline, frame.colourCue[best.index] ?? -1) : null,
-    line: linesOfCue(timeline, frame.cue[best.index] ?? -1).at(-1) ?? null,
+    line: lines.at(-1) ?? null,
+    callers: lines.slice(0, -1).reverse(),
   };
 }
 

@@ -1,5 +1,6 @@
 import { Link } from "react-router";
 import { Button } from "../../../components/button.tsx";
+import { Menu, type MenuAction } from "../../../components/menu.tsx";
 import { ThemeToggle } from "../../../components/theme-toggle.tsx";
 import type { DraftState } from "../drafts/draft-model.ts";
 import type { KeptText } from "../history/kept-text.ts";
@@ -14,6 +15,8 @@ export interface StudioHeaderProps {
   /** Opens the history at a text; null at the newest. */
   onLook: (id: string | null) => void;
   onChoose: () => void;
+  /** What is done seldom: full screen, files, luck. */
+  actions: MenuAction[];
   /** Null where there is nobody to hand it to. */
   onHandIn: (() => void) | null;
 }
@@ -27,6 +30,7 @@ export function StudioHeader({
   versions,
   onLook,
   onChoose,
+  actions,
   onHandIn,
 }: StudioHeaderProps) {
   return (
@@ -47,6 +51,7 @@ export function StudioHeader({
       </div>
       <SaveMenu draft={draft} versions={versions} onLook={onLook} onChoose={onChoose} />
       <ThemeToggle className="studio-theme" />
+      <Menu label="More for this show" isIconOnly actions={actions} className="studio-more" />
       {onHandIn && (
         <Button icon="sent" onPress={onHandIn}>
           Hand in

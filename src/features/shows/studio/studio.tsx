@@ -1,12 +1,14 @@
 import { lazy, Suspense, useCallback, useEffect, useMemo, useRef, useState } from "react";
 import type { BeatMap, Score } from "../../../../shared/contracts/songs.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
+import type { MenuAction } from "../../../components/menu.tsx";
 import { showToast } from "../../../components/toast-queue.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
 import type { KeptText } from "../history/kept-text.ts";
 import { useHistory, type HistorySource } from "../history/use-history.ts";
 import { listScriptNames } from "../editor/script-names.ts";
+import { enterFullScreen } from "../viewer/enter-full-screen.ts";
 import { CheckPane } from "./check-pane.tsx";
 import { HandInDialog } from "./hand-in-dialog.tsx";
 import { NamesPane } from "./names-pane.tsx";
@@ -20,7 +22,9 @@ import { StudioHeader } from "./studio-header.tsx";
 import { StudioLoading } from "./studio-loading.tsx";
 import { TrayTabs, type TrayTab } from "./tray-tabs.tsx";
 import { useDraft, type DraftSource } from "./use-draft.ts";
+import { saveScript } from "./save-script.ts";
 import { usePlayKeys } from "./use-play-keys.ts";
+import { WordsPane } from "./words-pane.tsx";
 import { useScriptRun, type ScriptRunOptions } from "./use-script-run.ts";
 import { useDescription, type ShowPictures } from "./use-show-pictures.ts";
 
@@ -32,11 +36,18 @@ const TwoVersionsDialog = lazy(async () => ({
   default: (await import("../history/two-versions-dialog.tsx")).TwoVersionsDialog,
 }));
 
+/** For the class, seldom for one alone. */
+const Projector = lazy(async () => ({ default: (await import("../viewer/projector.tsx")).Projector }));
+
 export interface StudioProps extends ScriptRunOptions, ShowPictures {
   title: string;
   /** "A show for the square · due Friday 4 December" */
   context: string;
   homeHref: string;
+  /** First names of its authors: "Wren and Idris". */
+  authors: string;
+  /** "Ten Small Suns, our arrangement" */
+  songTitle: string;
   layout: Layout;
   song: BeatMap;
   /** Null for a song without a score: no sound. */
@@ -49,7 +60,12 @@ export interface StudioProps extends ScriptRunOptions, ShowPictures {
   openAt: { readonly line: number | null; readonly tick: number | null };
 }
 
-type OpenDialog = { kind: "hand-in" } | { kind: "two-versions" } | { kind: "history"; id: string | null } | null;
+type OpenDialog =
+  | { kind: "hand-in" }
+  | { kind: "projector" }
+  | { kind: "two-versions" }
+  | { kind: "history"; id: string | null }
+  | null;
 
 /** The studio: the square, the song, the script and what is to be said about it, on one screen. */
 export function Studio(props: StudioProps) {
@@ -133,7 +149,28 @@ function OpenStudio(props: OpenStudioProps) {
       action: { label: "Undo", onPress: () => store?.edit(before) },
     });
   };
+  const actions: MenuAction[] = [
+    {
+      id: "projector",
+      label: "Full screen for the class",
+      icon: "external",
+      disabledReason: run.onStage ? null : "Nothing is on stage yet.",
+      onAction: () => {
+        enterFullScreen();
+        setDialog({ kind: "projector" });
+      },
+    },
+    {
+      id: "file",
+      label: "Save the script as a file",
+      icon: "download",
+      onAction: () => saveScript(title, draft.source),
+    },
+  ];
   const description = useDescription(run.onStage, props.describeShow);
+  const spokenDescription = description
+    ? [description.summary, ...description.steps].join(" ")
+    : "Nothing is on stage yet.";
 
   return (
     <div className="studio" data-tab={selected}>
@@ -145,6 +182,7 @@ function OpenStudio(props: OpenStudioProps) {
         versions={props.history.versions}
         onLook={(id) => setDialog({ kind: "history", id })}
         onChoose={() => setDialog({ kind: "two-versions" })}
+        actions={actions}
         onHandIn={props.onHandIn && (() => setDialog({ kind: "hand-in" }))}
       />
       <div className="studio-columns">
@@ -157,7 +195,7 @@ function OpenStudio(props: OpenStudioProps) {
           gentleReason={gentleReason}
           onGentle={setWantsGentle}
           onGoToLine={goToLine}
-          description={description ? [description.summary, ...description.steps].join(" ") : "Nothing is on stage yet."}
+          description={spokenDescription}
           drawRibbon={props.drawRibbon}
         />
         <div className="studio-work">
@@ -211,6 +249,9 @@ function OpenStudio(props: OpenStudioProps) {
                     onShow={(note) => showMoment(note.tick, note.line)}
                   />
                 )}
+                {selected === "words" && (
+                  <WordsPane description={description} onShow={(tick) => player.seekTick(tick)} />
+                )}
                 {selected === "names" && <NamesPane layout={layout} names={names} onInsert={insert} />}
               </div>
             )}
@@ -230,6 +271,21 @@ function OpenStudio(props: OpenStudioProps) {
         />
       )}
       <Suspense>
+        {dialog?.kind === "projector" && (
+          <Projector
+            player={player}
+            layout={layout}
+            song={song}
+            title={title}
+            authors={props.authors}
+            songTitle={props.songTitle}
+            isGentle={isGentle}
+            gentleReason={gentleReason}
+            onGentle={setWantsGentle}
+            description={spokenDescription}
+            onClose={() => setDialog(null)}
+          />
+        )}
         {dialog?.kind === "history" && (
           <HistoryDialog
             history={history}

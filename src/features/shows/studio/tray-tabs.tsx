@@ -2,7 +2,7 @@ import { useRef, type KeyboardEvent } from "react";
 import { Icon, type IconName } from "../../../components/icon.tsx";
 import { joinClasses } from "../../../components/class-names.ts";
 
-export const TRAY_TABS = ["script", "check", "notes", "names"] as const;
+export const TRAY_TABS = ["script", "check", "notes", "names", "words"] as const;
 export type TrayTab = (typeof TRAY_TABS)[number];
 
 const LOOKS: { readonly [T in TrayTab]: { readonly word: string; readonly icon: IconName } } = {
@@ -10,6 +10,7 @@ const LOOKS: { readonly [T in TrayTab]: { readonly word: string; readonly icon: 
   check: { word: "Check", icon: "tick" },
   notes: { word: "Notes", icon: "pencil" },
   names: { word: "Names", icon: "street" },
+  words: { word: "In words", icon: "note" },
 };
 
 export interface TrayTabsProps {
@@ -21,7 +22,7 @@ export interface TrayTabsProps {
   hasScript: boolean;
 }
 
-/** Script, Check, Notes, Names: one at a time. Left and right arrows move. */
+/** Script, Check, Notes, Names, In words: one at a time. Left and right arrows move. */
 export function TrayTabs({ selected, onSelect, counts, hasScript }: TrayTabsProps) {
   const ref = useRef<HTMLDivElement>(null);
   const tabs = TRAY_TABS.filter((tab) => hasScript || tab !== "script");

@@ -16,7 +16,10 @@ export interface WhyCardProps {
   onGoToLine: (line: number) => void;
 }
 
-/** What is lit on a front, how much, and the line that did it. */
+/** So many calls are named; a script that calls itself has more. */
+const MOST_CALLERS = 3;
+
+/** What is lit on a front, how much, the line that did it, and the lines that called it. */
 export function WhyCard({ place, width, onGoToLine }: WhyCardProps) {
   const { name, lit, x, y } = place;
   const line = lit?.line ?? null;
@@ -32,12 +35,24 @@ export function WhyCard({ place, width, onGoToLine }: WhyCardProps) {
         {line !== null && (
           <>
             {" · "}
-            <button type="button" tabIndex={-1} onClick={() => onGoToLine(line)}>
-              line {line}
-            </button>
+            <LineLink line={line} onGoToLine={onGoToLine} />
           </>
         )}
+        {lit?.callers.slice(0, MOST_CALLERS).map((caller, index) => (
+          <span key={index}>
+            {" from "}
+            <LineLink line={caller} onGoToLine={onGoToLine} />
+          </span>
+        ))}
       </span>
     </div>
+  );
+}
+
+function LineLink({ line, onGoToLine }: { line: number; onGoToLine: (line: number) => void }) {
+  return (
+    <button type="button" tabIndex={-1} onClick={() => onGoToLine(line)}>
+      line {line}
+    </button>
   );
 }
