@@ -1,11 +1,15 @@
 import { describe, expect, it } from "vitest";
+import { DEMO_SQUARE } from "../../server/db/seed/world/square.ts";
 import { runScript } from "../../tests/support/run-script.ts";
+import type { Layout } from "../../shared/contracts/square.ts";
+import { PROBLEMS } from "./problems/index.ts";
 
 /**
- * Each problem as a pupil meets it: script, code, line and column, and the sentence where the design
- * fixes it. Every one of them runs through the whole engine.
+ * Each problem as a pupil meets it: script, code, line and column, the sentence where the design
+ * fixes it, and the square where the small one does not do. Every one of them runs through the whole
+ * engine, and every code of the catalogue has one.
  */
-const CASES: readonly (readonly [code: string, place: string, script: string, sentence?: string])[] = [
+const CASES: readonly (readonly [code: string, place: string, script: string, sentence?: string, layout?: Layout])[] = [
   ["not-run", "2:1", "function flash() { wait(1); }\nflash;", "You named `flash`, but you did not run it."],
   ["not-run", "1:1", "square.all.on;", "You named `on`, but you did not run it."],
   ["ran-too-early", "1:7", "at(8, square.all.off());", "This runs right now, not at beat 8."],
@@ -79,6 +83,10 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
     "This loop never ends. The clock does not move in it.",
   ],
   ["endless", "2:1", "let i = 0;\nwhile (i < 10) { i = i; }", "This loop ran too long, so I stopped it."],
+  ["too-much-work", "2:1", "wait(1);\nrepeat(1e9, () => { });", "This script ran too long, so I stopped it."],
+  ["too-many-cues", "2:26", "wait(1);\nfor (;;) { square.all[0].on(); wait(0.001); }"],
+  ["too-many-changes", "1:23", "for (;;) { square.all.on(); wait(0.001); }", undefined, DEMO_SQUARE],
+  ["could-not-run", "2:6", 'wait(1);\nJSON.parse("{");', "I had to stop this script."],
   ["calls-itself", "1:10", "function grow(n) { grow(n + 1); }\ngrow(1);", "`grow` calls itself too many times."],
   ["too-many-notes", "1:24", "while (true) { console.log(1); }"],
   ["too-big", "1:33", 'let s = "a"; while (true) s = s + s;'],
@@ -98,6 +106,9 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
   ["extra-bracket", "1:8", "wait(1));"],
   ["missing-quote", "1:14", 'square.front("bakery).on();\nwait(1);'],
   ["missing-quote", "1:9", "let q = `abc"],
+  ["missing-name", "2:10", "wait(1);\nfunction () { wait(1); }"],
+  ["missing-name", "1:8", "square.;\nwait(1);"],
+  ["unreadable", "2:12", "wait(1);\nlet x = 3 +* 4;", "I can not read this line."],
   ["missing-comma", "1:22", "square.all.fadeTo(50 2);"],
   ["two-steps", "1:9", "wait(1) wait(2)"],
   ["curly-quotes", "1:14", "square.front(“bakery”).on();"],
@@ -139,6 +150,9 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
   ["no-comma", "2:6", "let x = 1;\nx = (1, 2);"],
   ["no-this", "1:13", "console.log(this);"],
   ["no-tag", "1:1", "String.raw`x`;"],
+  ["no-with", "2:1", "const o = { a: 1 };\nwith (o) { wait(1); }"],
+  ["no-using", "1:1", "using x = 1;"],
+  ["not-here", "2:1", "wait(1);\ndebugger;"],
   ["not-here", "1:11", "const d = Date.now();"],
   ["not-here", "1:13", "console.log(window);"],
   ["not-here", "1:11", 'const s = Symbol("x");'],
@@ -147,9 +161,13 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
 ];
 
 describe("problems", () => {
-  for (const [code, place, script, sentence] of CASES) {
+  it("are all shown by a script below", () => {
+    expect(Object.keys(PROBLEMS).filter((code) => !CASES.some(([shown]) => shown === code))).toEqual([]);
+  });
+
+  for (const [code, place, script, sentence, layout] of CASES) {
     it(`${code} at ${place}: ${script.slice(0, 60)}`, async () => {
-      const outcome = await runScript(script);
+      const outcome = await runScript(script, layout === undefined ? {} : { layout });
       if (outcome.ok) throw new Error("The script ran.");
       const { problem } = outcome;
       expect([problem.code, `${problem.range.line}:${problem.range.column}`]).toEqual([code, place]);

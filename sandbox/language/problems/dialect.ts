@@ -23,7 +23,6 @@ export const DIALECT_PROBLEMS = defineEntries({
   "no-this": { sentence: "`this` only works inside a class.", hint: "Use the name of the thing." },
   "no-tag": { sentence: "A text in backticks can not follow a name.", hint: "Put it in `(` and `)`." },
   "no-cast": { sentence: "A type in `<` and `>` can not stand here.", hint: "Write `as` and the type after it." },
-  "no-directive": { sentence: "This word is not part of our scripts.", hint: "Take it out." },
   "not-here": { sentence: "`{word}` is not part of our scripts.", hint: "{try}" },
   "no-using": { sentence: "`{word}` does not work here.", hint: "Use `const`." },
 });
