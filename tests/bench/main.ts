@@ -1,5 +1,6 @@
 import { writeFileSync } from "node:fs";
 import { parseArgs } from "node:util";
+import { benchChecks } from "./checks.ts";
 import { benchHandIns } from "./hand-ins.ts";
 import { benchPages } from "./pages.ts";
 import { benchRequests } from "./requests.ts";
@@ -10,7 +11,7 @@ import type { Figure } from "./measure.ts";
 const { values } = parseArgs({ options: { json: { type: "string" } } });
 
 const figures: Figure[] = [];
-for (const bench of [benchRuns, benchHandIns, benchRequests, benchPages]) {
+for (const bench of [benchRuns, benchChecks, benchHandIns, benchRequests, benchPages]) {
   for (const figure of await bench()) {
     figures.push(figure);
     const ratio = figure.ratio === null ? "" : `  ${figure.ratio.toFixed(2)} x ${figure.against ?? ""}`;
