@@ -1,7 +1,7 @@
 import type { KeyboardEvent } from "react";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
-import { toTick, toX, type RibbonScale } from "./ribbon-scale.ts";
+import { isInView, toTick, toX, type RibbonScale } from "./ribbon-scale.ts";
 import { nearestBarLine, type TickLoop } from "./song-place.ts";
 import { useDragX } from "./use-drag-x.ts";
 
@@ -37,6 +37,7 @@ export function LoopEdge({ end, song, scale, loop, onLoop }: LoopEdgeProps) {
     place(lines[index + step]);
     event.preventDefault();
   };
+  if (!isInView(scale, at)) return null;
   const bar = end === "start" ? (song.bars[index]?.number ?? 1) : (song.bars[index - 1]?.number ?? 1);
   return (
     <div

@@ -2,7 +2,7 @@ import { useEffect, useRef, type KeyboardEvent } from "react";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
 import { findSongPlace } from "./song-place.ts";
-import { toTick, toX, type RibbonScale } from "./ribbon-scale.ts";
+import { isInView, toTick, toX, type RibbonScale } from "./ribbon-scale.ts";
 import { useDragX } from "./use-drag-x.ts";
 
 export interface PlayheadProps {
@@ -25,6 +25,7 @@ export function Playhead({ song, scale, followTick, onSeek }: PlayheadProps) {
         const head = ref.current;
         if (!head) return;
         tickRef.current = tick;
+        head.classList.toggle("is-outside", !isInView(scale, tick));
         head.style.transform = `translateX(${toX(scale, tick).toFixed(1)}px)`;
         const { bar, beat } = findSongPlace(song, tick);
         const text = `bar ${bar}, beat ${beat}`;
@@ -47,7 +48,7 @@ export function Playhead({ song, scale, followTick, onSeek }: PlayheadProps) {
     };
     const step = steps[event.key];
     if (event.key === "Home") onSeek(0);
-    else if (event.key === "End") onSeek(scale.endTick - TICKS_PER_BEAT);
+    else if (event.key === "End") onSeek((song.beats.length - 2) * TICKS_PER_BEAT);
     else if (step !== undefined) onSeek(Math.round(tickRef.current / TICKS_PER_BEAT + step) * TICKS_PER_BEAT);
     else return;
     event.preventDefault();

@@ -1,6 +1,6 @@
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
-import { findBarStep, toX, type RibbonScale } from "./ribbon-scale.ts";
+import { findBarStep, isInView, toX, type RibbonScale } from "./ribbon-scale.ts";
 
 /** Numbers keep at least this far apart, in pixels. */
 const NUMBER_ROOM = 46;
@@ -15,11 +15,12 @@ export interface RibbonBarsProps {
 
 /** Bar lines and numbers under the ribbon. The playhead says them aloud, so they are hidden here. */
 export function RibbonBars({ song, scale, loop }: RibbonBarsProps) {
-  const step = findBarStep(scale, song.bars.length, NUMBER_ROOM);
+  const shown = song.bars.filter((bar) => isInView(scale, bar.start * TICKS_PER_BEAT));
+  const step = findBarStep(scale, shown.length, NUMBER_ROOM);
   const right = loop ? toX(scale, loop.end) : 0;
   return (
     <div className="large-ribbon-bars" aria-hidden="true">
-      {song.bars.map((bar) => {
+      {shown.map((bar) => {
         const isNumbered = bar.number > 0 && (bar.number - 1) % step === 0;
         return (
           <span

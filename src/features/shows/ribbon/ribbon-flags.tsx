@@ -26,6 +26,7 @@ export function RibbonFlags({ song, scale, playing, onSeek }: RibbonFlagsProps) 
         const width = toX(scale, section.end * TICKS_PER_BEAT) - toX(scale, start) - 3;
         const fit = fitFlag(section.name, width);
         const bar = song.bars.findLast((candidate) => candidate.start <= section.start + 1e-6)?.number ?? 1;
+        if (section.end * TICKS_PER_BEAT <= scale.startTick || start >= scale.endTick) return null;
         const place = { left: toX(scale, start), width: Math.max(0, width) };
         if (width < MIN_TARGET) {
           return (

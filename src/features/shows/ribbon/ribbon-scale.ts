@@ -1,19 +1,29 @@
-/** Where ticks lie across a ribbon whose ends are cut: `tail` pixels at either end carry no time. */
+/**
+ * Where ticks lie across a ribbon whose ends are cut: `tail` pixels at either end carry no time. It shows
+ * the stretch from `startTick` to `endTick`.
+ */
 export interface RibbonScale {
   readonly width: number;
   readonly tail: number;
+  readonly startTick: number;
   readonly endTick: number;
 }
 
-/** Pixels from the left edge. */
-export function toX({ width, tail, endTick }: RibbonScale, tick: number): number {
-  return tail + ((width - 2 * tail) * Math.min(Math.max(tick, 0), endTick)) / Math.max(1, endTick);
+/** Pixels from the left edge; what lies outside the stretch is at its ends. */
+export function toX({ width, tail, startTick, endTick }: RibbonScale, tick: number): number {
+  const inside = Math.min(Math.max(tick, startTick), endTick) - startTick;
+  return tail + ((width - 2 * tail) * inside) / Math.max(1, endTick - startTick);
 }
 
-/** The tick at a place, inside the song. */
-export function toTick({ width, tail, endTick }: RibbonScale, x: number): number {
+/** The tick at a place, inside the stretch. */
+export function toTick({ width, tail, startTick, endTick }: RibbonScale, x: number): number {
   const share = (x - tail) / Math.max(1, width - 2 * tail);
-  return Math.round(Math.min(Math.max(share, 0), 1) * endTick);
+  return Math.round(startTick + Math.min(Math.max(share, 0), 1) * (endTick - startTick));
+}
+
+/** Whether a moment is in the stretch that the ribbon shows. */
+export function isInView({ startTick, endTick }: RibbonScale, tick: number): boolean {
+  return tick >= startTick && tick <= endTick;
 }
 
 /** How many bars lie between two numbers, so that numbers keep `room` pixels apart: 1, 2, 4, 8, 16 ... */

@@ -50,12 +50,18 @@ describe("presentClock", () => {
 });
 
 describe("ribbon scale", () => {
-  const scale = { width: 728, tail: 14, endTick: 7000 };
+  const scale = { width: 728, tail: 14, startTick: 0, endTick: 7000 };
 
   it("leads from ticks to pixels and back, ends inside the cut", () => {
     expect([toX(scale, 0), toX(scale, 7000), toX(scale, 9000)]).toEqual([14, 714, 714]);
     for (const tick of [0, 1234, 7000]) expect(toTick(scale, toX(scale, tick))).toBe(tick);
     expect([toTick(scale, -50), toTick(scale, 2000)]).toEqual([0, 7000]);
+  });
+
+  it("shows a stretch from end to end, what lies outside at its ends", () => {
+    const part = { ...scale, startTick: 3500 };
+    expect([toX(part, 3500), toX(part, 5250), toX(part, 0)]).toEqual([14, 364, 14]);
+    expect([toTick(part, 14), toTick(part, 364), toTick(part, -9)]).toEqual([3500, 5250, 3500]);
   });
 
   it("numbers bars further apart where there is no room, and ends before there is any width", () => {

@@ -1,11 +1,15 @@
 import { useState } from "react";
+import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
 import type { ScriptName, ScriptNames } from "../editor/script-names.ts";
+import { MomentsRuler } from "./moments-ruler.tsx";
 import { NamesMap } from "./names-map.tsx";
 import { NamesList } from "./names-list.tsx";
+import type { ShowPlayer } from "./show-player.ts";
 
 const VIEWS = [
   { id: "fronts", word: "Fronts" },
+  { id: "moments", word: "Moments" },
   { id: "song", word: "Song" },
   { id: "colours", word: "Colours" },
   { id: "words", word: "Words" },
@@ -14,13 +18,15 @@ type View = (typeof VIEWS)[number]["id"];
 
 export interface NamesPaneProps {
   layout: Layout;
+  song: BeatMap;
+  player: ShowPlayer;
   names: ScriptNames;
   /** Puts code into the script at the cursor. */
   onInsert: (code: string) => void;
 }
 
 /** All names a script may use: the fronts on a map of the square, the song's sections and instruments, colours, words. */
-export function NamesPane({ layout, names, onInsert }: NamesPaneProps) {
+export function NamesPane({ layout, song, player, names, onInsert }: NamesPaneProps) {
   const [view, setView] = useState<View>("fronts");
   return (
     <div className="studio-names">
@@ -32,6 +38,7 @@ export function NamesPane({ layout, names, onInsert }: NamesPaneProps) {
         ))}
       </div>
       {view === "fronts" && <NamesMap layout={layout} onInsert={onInsert} />}
+      {view === "moments" && <MomentsRuler song={song} player={player} onInsert={onInsert} />}
       {view === "song" && <NamesList items={listSongNames(names)} label="Names of the song" onInsert={onInsert} />}
       {view === "colours" && (
         <NamesList

@@ -1,11 +1,12 @@
 import type { BeatMap, Score } from "../../../../shared/contracts/songs.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
-import { listLights } from "../../../../sandbox/square/lights.ts";
+import { listLights, type Light } from "../../../../sandbox/square/lights.ts";
 import { createFrame, createCursor, type Cursor, type Frame } from "../../../../sandbox/timeline/cursor.ts";
 import { createLinesLit } from "../../../../sandbox/timeline/lines.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 import { createTempo, type Tempo } from "../../../../sandbox/timeline/tempo.ts";
 import { GentleFilter } from "../stage/gentle-filter.ts";
+import { findLitLight, type LitLight } from "./lit-light.ts";
 import { Transport } from "./transport-model.ts";
 
 /** What is drawn or shown anew for every moment: the stage, the playhead, the glow lines. */
@@ -51,6 +52,7 @@ export class ShowPlayer {
   readonly #gentle: GentleFilter;
   #timeline: Timeline | null = null;
   #cursor: Cursor | null = null;
+  #pointer: Cursor | null = null;
   #linesLit: ((frame: Frame) => Float32Array) | null = null;
   #isGentle = true;
   #request = 0;
@@ -90,6 +92,7 @@ export class ShowPlayer {
     if (timeline === this.#timeline) return;
     this.#timeline = timeline;
     this.#cursor = timeline && createCursor(timeline, this.#layout);
+    this.#pointer = null;
     this.#linesLit = timeline && createLinesLit(timeline);
     this.redraw();
   }
@@ -101,6 +104,15 @@ export class ShowPlayer {
 
   seekTick(tick: number): void {
     this.#transport.seek(this.tempo.toSeconds(tick));
+  }
+
+  /** The brightest of some lights at any tick; null when they are dark. */
+  readLight(lights: readonly Light[], tick: number): LitLight | null {
+    if (!this.#timeline) return null;
+    // A cursor of its own: the one on stage would lose its place.
+    this.#pointer ??= createCursor(this.#timeline, this.#layout);
+    for (const { index } of lights) this.#pointer.seekLight(index, tick);
+    return findLitLight(this.#timeline, this.#pointer.frame, lights);
   }
 
   /** The frame at the present moment. Borrowed. */

@@ -2,10 +2,13 @@ import { useCallback, useEffect, useMemo, useState } from "react";
 import { SIDES, type Layout } from "../../../../shared/contracts/square.ts";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
+import { listFronts, listLights } from "../../../../sandbox/square/lights.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
 import { LargeRibbon } from "../ribbon/large-ribbon.tsx";
+import { followTickInView, wholeSong } from "../ribbon/ribbon-view.ts";
 import { findSongPlace, nearestBarLine, type TickLoop } from "../ribbon/song-place.ts";
+import { presentLitLight } from "./lit-light.ts";
 import { findRibbonTimeline, type RunState } from "./run-model.ts";
 import type { ShowPlayer } from "./show-player.ts";
 import { useRibbonCells, type ShowPictures } from "./use-show-pictures.ts";
@@ -27,7 +30,18 @@ export function SongColumn({ song, run, drawRibbon, ...stage }: SongColumnProps)
   const { layout, player } = stage;
   const transport = useTransport(player);
   const timeline = findRibbonTimeline(run);
-  const size = useMemo(() => ({ rows: layout.fronts.length, columns: RIBBON_COLUMNS }), [layout]);
+  const [view, setView] = useState<TickLoop>(() => wholeSong(song));
+  // Wherever the playhead goes, by playing or by a key, the ribbon shows it.
+  useEffect(() => {
+    let seen = -1;
+    return player.addView({
+      showMoment: ({ tick }) => {
+        if (tick !== seen) setView((shown) => followTickInView(shown, song, tick));
+        seen = tick;
+      },
+    });
+  }, [player, song]);
+  const size = useMemo(() => ({ rows: layout.fronts.length, columns: RIBBON_COLUMNS, stretch: view }), [layout, view]);
   const cells = useRibbonCells(timeline, drawRibbon, size);
   const bands = useMemo(() => listBands(layout), [layout]);
   const section = usePlayingSection(player, song);
@@ -36,6 +50,21 @@ export function SongColumn({ song, run, drawRibbon, ...stage }: SongColumnProps)
     (show: (tick: number) => void) => player.addView({ showMoment: ({ tick }) => show(tick) }),
     [player],
   );
+  const fronts = useMemo(() => listFronts(layout), [layout]);
+  const lights = useMemo(() => listLights(layout), [layout]);
+  const describeAt = (row: number, tick: number): string | null => {
+    const front = fronts[row];
+    const lit =
+      front &&
+      player.readLight(
+        front.lights.flatMap((index) => lights[index] ?? []),
+        tick,
+      );
+    if (!front) return null;
+    return lit
+      ? `${front.front.name}, ${presentLitLight(lit)}${lit.line === null ? "" : ` · line ${lit.line}`}`
+      : `${front.front.name}, dark`;
+  };
   const toggleLoop = () => {
     const { loop, isLooping } = player.transport.state;
     player.transport.setLoop(loop ?? loopAround(song, player.tick), !isLooping);
@@ -47,6 +76,9 @@ export function SongColumn({ song, run, drawRibbon, ...stage }: SongColumnProps)
       <div className="studio-ribbon studio-card" role="group" aria-label="Ribbon of the show">
         <LargeRibbon
           song={song}
+          view={view}
+          onView={setView}
+          describeAt={describeAt}
           cells={cells}
           bands={bands}
           thread={thread}
@@ -55,7 +87,7 @@ export function SongColumn({ song, run, drawRibbon, ...stage }: SongColumnProps)
           isLooping={transport.isLooping}
           followTick={followTick}
           onSeek={(tick) => player.seekTick(tick)}
-          onLoop={(loop) => player.transport.setLoop(loop)}
+          onLoop={(loop) => player.transport.setLoop(loop, true)}
           section={section}
         />
       </div>

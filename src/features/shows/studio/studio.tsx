@@ -252,7 +252,9 @@ function OpenStudio(props: OpenStudioProps) {
                 {selected === "words" && (
                   <WordsPane description={description} onShow={(tick) => player.seekTick(tick)} />
                 )}
-                {selected === "names" && <NamesPane layout={layout} names={names} onInsert={insert} />}
+                {selected === "names" && (
+                  <NamesPane layout={layout} song={song} player={player} names={names} onInsert={insert} />
+                )}
               </div>
             )}
           </div>
