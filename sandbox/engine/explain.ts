@@ -14,6 +14,8 @@ export function explainFailure(compiled: CompiledScript, result: RuntimeResult):
   const sites = (result.report?.sites ?? [0]).map((site) => compiled.marked.sites[site] ?? scriptSite(compiled));
   const site = sites.at(-1) ?? scriptSite(compiled);
   const failure = result.report?.failure ?? null;
+  // Without its report nobody knows how a run ended: never take that for a good end.
+  if (result.end === "ended" && result.report === null) return explainBroken(compiled, site, "The run gave no report.");
   if (result.end === "out-of-fuel") return explainFuel(compiled, sites);
   if (result.end === "unreadable") return explainUnreadable(compiled, result.details);
   if (result.end === "broken") return explainBroken(compiled, site, result.details);

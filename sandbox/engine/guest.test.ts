@@ -1,8 +1,10 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import { bundleLibrary } from "../../tests/support/bundle-library.ts";
-import { SMALL_LAYOUT, SMALL_SONG } from "../../tests/support/run-script.ts";
+import { SMALL_LAYOUT, SMALL_SONG, runScript } from "../../tests/support/run-script.ts";
 import { createNodeHost } from "../../server/runs/node-host.worker.ts";
+import { compileScript } from "../language/compile.ts";
 import type { EngineHost } from "./engine.ts";
+import { explainFailure } from "./explain.ts";
 import type { GuestTables } from "./guest.ts";
 import { LIBRARY } from "./library.generated.ts";
 import { GuestRuntime, type RuntimeResult } from "./runtime.ts";
@@ -113,6 +115,24 @@ describe("the guest's realm", () => {
     const two = await runRaw("for (let i = 0; i < 500000; i++) {}");
     expect(one.fuel).toBe(two.fuel);
     expect(one.fuel).toBeGreaterThan(50);
+  });
+});
+
+describe("a report that is missing", () => {
+  it.each([
+    ["a name of five million letters", "square.front", "unknown-front"],
+    ["a colour of five million letters", "square.all.colour", "unknown-colour"],
+  ])("is no good end: %s is a problem", async (_, word, code) => {
+    const outcome = await runScript(`const long = "x".repeat(5e6);\n${word}(long);`);
+    expect(outcome).toMatchObject({ ok: false, problem: { code, range: { line: 2 } } });
+    if (!outcome.ok) expect(outcome.problem.sentence.length).toBeLessThan(200);
+  });
+
+  it("is a problem even when nothing else tells", () => {
+    const compiled = compileScript("wait(1);", null);
+    if (!compiled.ok) throw new Error(compiled.problem.sentence);
+    const silent = { end: "ended", details: "", report: null, buffer: new Uint8Array(20), fuel: 0 } as const;
+    expect(explainFailure(compiled, silent)).toMatchObject({ code: "could-not-run" });
   });
 });
 

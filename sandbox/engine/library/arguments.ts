@@ -2,6 +2,9 @@ import { near } from "../../language/near-name.ts";
 import { MAX_CALLBACK_DEPTH } from "../guest.ts";
 import { fail, state } from "./state.ts";
 
+/** Letters of a name that a sentence shows; longer than any name of a layout or a song. */
+const LONGEST_NAME = 80;
+
 /** An action of the script: any function; the library passes as many arguments as it names. */
 export type Callback = (...values: never[]) => unknown;
 
@@ -59,8 +62,10 @@ export function action(word: string, value: unknown, argument: number): Callback
 
 /** Stops with the unknown name and, when one is near enough, the name that was meant. */
 export function unknownName(code: string, name: string, names: readonly string[], argument = 0): never {
+  // A script can build a name of any length: no name is near it, and the report must not carry it.
   const meant = near(name, names);
-  return fail(code, meant === null ? { name, names: names.slice(0, 4).join(", ") } : { name, meant }, argument);
+  const shown = name.length > LONGEST_NAME ? `${name.slice(0, LONGEST_NAME)}...` : name;
+  return fail(code, meant === null ? { name: shown, names: names.slice(0, 4).join(", ") } : { name, meant }, argument);
 }
 
 /** Runs an action of the script with as many of `first` and `second` as it names without a default (rule 7). */
