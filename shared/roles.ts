@@ -10,11 +10,12 @@ export type Role = z.infer<typeof RoleSchema>;
  * the loaded row; a grant asks for one of them.
  *
  * - `author`: wrote the show (or handed in the submission).
+ * - `asked`: was asked by an author to write the show together, and has not answered yet.
  * - `class-member`: is enrolled in the class that the object belongs to.
  * - `class-teacher`: teaches that class.
  * - `forwarded`: the object was forwarded to the event, so the coordinator may see it.
  */
-export const RELATIONS = ["author", "class-member", "class-teacher", "forwarded"] as const;
+export const RELATIONS = ["author", "asked", "class-member", "class-teacher", "forwarded"] as const;
 export type Relation = (typeof RELATIONS)[number];
 
 /** One way to be allowed: a role, and (if the endpoint names one object) a relation to it. */

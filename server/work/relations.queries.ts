@@ -1,7 +1,15 @@
 import { and, eq, inArray, ne } from "drizzle-orm";
 import type { Relation } from "../../shared/roles.ts";
 import type { Db } from "../db/connection.ts";
-import { assignments, classTeachers, enrolments, forwards, showAuthors, shows } from "../db/schema/index.ts";
+import {
+  assignments,
+  classTeachers,
+  enrolments,
+  forwards,
+  showAuthors,
+  showInvitations,
+  shows,
+} from "../db/schema/index.ts";
 
 /** How a person stands to a class. */
 export function listClassRelations(db: Db, userId: string, classId: string): Relation[] {
@@ -22,6 +30,7 @@ export function listShowRelations(
 ): Relation[] {
   const relations: Relation[] = [];
   if (isAuthor(db, userId, show.id)) relations.push("author");
+  if (isAsked(db, userId, show.id)) relations.push("asked");
   if (teaches(db, userId, listShowClassIds(db, show))) relations.push("class-teacher");
   return relations;
 }
@@ -75,6 +84,15 @@ export function isAuthor(db: Db, userId: string, showId: string): boolean {
     .select({ id: showAuthors.showId })
     .from(showAuthors)
     .where(and(eq(showAuthors.showId, showId), eq(showAuthors.userId, userId)))
+    .get();
+  return row !== undefined;
+}
+
+function isAsked(db: Db, userId: string, showId: string): boolean {
+  const row = db
+    .select({ id: showInvitations.showId })
+    .from(showInvitations)
+    .where(and(eq(showInvitations.showId, showId), eq(showInvitations.userId, userId)))
     .get();
   return row !== undefined;
 }

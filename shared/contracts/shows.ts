@@ -2,6 +2,7 @@ import { z } from "zod";
 import { defineContract } from "../contract.ts";
 import { AssignmentIdSchema, LayoutIdSchema, ShowIdSchema, SongIdSchema, VersionIdSchema } from "../ids.ts";
 import type { Grant } from "../roles.ts";
+import { partnersContract } from "./partners.ts";
 import { InstantSchema, lineText, RibbonSchema, RunSummarySchema, SourceSchema } from "./common.ts";
 
 const params = z.object({ showId: ShowIdSchema });
@@ -90,6 +91,7 @@ export const VersionDetailSchema = z.object({
 export type VersionDetail = z.infer<typeof VersionDetailSchema>;
 
 export const showsContract = defineContract({
+  ...partnersContract,
   list: {
     method: "GET",
     path: "/api/shows",

@@ -14,7 +14,9 @@ import { programmeQuery } from "../features/lineup/programme/api.ts";
 import { ComingShows } from "../features/lineup/programme/coming-shows.tsx";
 import { sessionQuery } from "../features/auth/api.ts";
 import { showsQuery } from "../features/shows/api.ts";
+import { Invitations } from "../features/shows/components/invitations.tsx";
 import { ShowGrid, ShowGridSkeleton } from "../features/shows/components/show-grid.tsx";
+import { invitationsQuery } from "../features/shows/partners-api.ts";
 import { useNow } from "../hooks/use-now.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { requireSession } from "./guards.ts";
@@ -26,6 +28,7 @@ export async function loader({ request }: LoaderFunctionArgs) {
   await requireSession(request, "student");
   void queryClient.prefetchQuery(lessonsQuery);
   void queryClient.prefetchQuery(showsQuery());
+  void queryClient.prefetchQuery(invitationsQuery);
   void queryClient.prefetchQuery(assignmentsQuery);
   void queryClient.prefetchQuery(programmeQuery);
   return null;
@@ -38,6 +41,7 @@ export function Component() {
   return (
     <Page title="Home">
       <PageHeader title={`Hello, ${name.split(" ")[0]}`} />
+      <Invitations />
       <Next />
       <div className="mt-8 grid grid-cols-[1fr_19.75rem] gap-9 max-wide:grid-cols-1">
         <div className="min-w-0 space-y-9">

@@ -7,6 +7,7 @@ import { QueryView } from "../components/query-view.tsx";
 import { Ribbon } from "../components/ribbon.tsx";
 import { sessionQuery } from "../features/auth/api.ts";
 import { showsQuery } from "../features/shows/api.ts";
+import { Invitations } from "../features/shows/components/invitations.tsx";
 import { ShowGrid, ShowGridSkeleton } from "../features/shows/components/show-grid.tsx";
 import { ShowMenu } from "../features/shows/components/show-menu.tsx";
 import { useNow } from "../hooks/use-now.ts";
@@ -45,6 +46,7 @@ export function Component() {
           </>
         }
       />
+      {!isArchive && <Invitations />}
       <QueryView
         query={useQuery(showsQuery(archived))}
         errorTitle="Your shows could not be loaded."

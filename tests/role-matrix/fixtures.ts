@@ -28,6 +28,7 @@ const ofStep = (stepId: string | undefined, body: object) =>
 const inClass = (body?: object) => call(({ classId }) => ({ params: { classId }, body }));
 const ofAssignment = (body?: object) => call(({ assignmentId }) => ({ params: { assignmentId }, body }));
 const ofShow = (body?: object) => call(({ showId }) => ({ params: { showId }, body }));
+const ofShared = (body?: object) => call(({ sharedId: showId }) => ({ params: { showId }, body }));
 const ofSubmitted = (body?: object) => call(({ submittedId: submissionId }) => ({ params: { submissionId }, body }));
 const ofSubmittedVersion = (body: object) =>
   call(({ submittedId: submissionId, submittedVersionId: versionId }) => ({
@@ -107,6 +108,15 @@ export const FIXTURES: Readonly<Record<string, Fixture>> = {
   "shows.history": ofShow(),
   "shows.earlierDraft": call(({ showId }) => ({ params: { showId, revision: 1 } })),
   "shows.version": call(({ forwardedVersionId: versionId }) => ({ params: { versionId } })),
+
+  "shows.partners": ofShared(),
+  "shows.askPartner": call(({ showId, thirdId: userId }) => ({ params: { showId }, body: { userId } })),
+  "shows.withdrawPartner": call(({ sharedId: showId, people }) => ({
+    params: { showId, userId: people["student-same-class"] },
+  })),
+  "shows.leave": ofShared(),
+  "shows.invitations": nothing,
+  "shows.answerInvitation": ofShared({ answer: "join" }),
 
   "marking.inbox": nothing,
   "marking.queue": ofAssignment(),

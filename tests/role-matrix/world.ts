@@ -2,7 +2,7 @@ import { LESSONS } from "../../lessons/index.ts";
 import type { MidiFile } from "../../sandbox/music/midi-file.ts";
 import { writeMidi } from "../../sandbox/music/write-midi.ts";
 import type { Db } from "../../server/db/connection.ts";
-import { draftHistory, signInResets } from "../../server/db/schema/index.ts";
+import { draftHistory, showAuthors, showInvitations, signInResets } from "../../server/db/schema/index.ts";
 import { createSecretHasher } from "../../server/identity/secret-hasher.ts";
 import type { Relation, Role } from "../../shared/roles.ts";
 import {
@@ -53,7 +53,7 @@ export const ROLE_OF: Readonly<Record<SignedInCaller, Role>> = {
 /** How each caller stands to the objects; `forwarded` counts for the coordinator where the object was forwarded. */
 export const RELATIONS_OF: Readonly<Record<SignedInCaller, readonly Relation[]>> = {
   "student-own": ["author", "class-member"],
-  "student-same-class": ["class-member"],
+  "student-same-class": ["class-member", "asked"],
   "student-other-class": [],
   "student-other-school": [],
   "teacher-own-class": ["class-teacher"],
@@ -127,7 +127,8 @@ export async function buildWorld(db: Db, now: number) {
   const own = people["student-own"];
   const teacher = people["teacher-own-class"];
 
-  const members = [own, people["student-same-class"]];
+  const third = student(school);
+  const members = [own, people["student-same-class"], third];
   const classId = buildClass(db, {
     schoolId: school,
     name: CANARY,
@@ -175,6 +176,13 @@ export async function buildWorld(db: Db, now: number) {
     .values({ showId: handIns["student-own"], revision: 1, source: CANARY, beganAt: now, savedAt: now, savedBy: own })
     .run();
 
+  // A show for no assignment, which a second author may leave and a classmate is asked to join.
+  const sharedId = show(own, null);
+  db.insert(showAuthors).values({ showId: sharedId, userId: third }).run();
+  db.insert(showInvitations)
+    .values({ showId: sharedId, userId: people["student-same-class"], askedBy: own, askedAt: now })
+    .run();
+
   const submitted = work("submitted");
   buildMark(db, { submissionId: submitted.id, markedBy: teacher, note: CANARY });
   // A comment of everybody's own, so that taking it back fails for nothing but access.
@@ -206,6 +214,8 @@ export async function buildWorld(db: Db, now: number) {
     assignmentId: openAssignment,
     handIns,
     showId: handIns["student-own"],
+    sharedId,
+    thirdId: third,
     forwardedVersionId: waiting.versionId,
     submittedId: submitted.id,
     submittedVersionId: submitted.versionId,

@@ -38,6 +38,24 @@ export const showAuthors = sqliteTable(
   (table) => [primaryKey({ columns: [table.showId, table.userId] }), index("show_authors_user").on(table.userId)],
 );
 
+/** Classmates who were asked to write a show together and have not answered. */
+export const showInvitations = sqliteTable(
+  "show_invitations",
+  {
+    showId: text("show_id")
+      .notNull()
+      .references(() => shows.id, { onDelete: "cascade" }),
+    userId: text("user_id")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
+    askedBy: text("asked_by")
+      .notNull()
+      .references(() => users.id, { onDelete: "cascade" }),
+    askedAt: instant("asked_at").notNull(),
+  },
+  (table) => [primaryKey({ columns: [table.showId, table.userId] }), index("show_invitations_user").on(table.userId)],
+);
+
 /** One row a show; `revision` counts every save, and a save names the revision it was written from. */
 export const drafts = sqliteTable("drafts", {
   showId: text("show_id")

@@ -4,6 +4,14 @@ import type { Handlers } from "../../http/mount.ts";
 import { createDraftRibbons } from "../../show-runs/draft-ribbons.ts";
 import { getEarlierDraft, listHistory } from "./draft-history.service.ts";
 import {
+  answerInvitation,
+  askPartner,
+  getPartners,
+  leaveShow,
+  listInvitations,
+  withdrawPartner,
+} from "./partners.service.ts";
+import {
   changeShow,
   createShow,
   duplicateShow,
@@ -37,6 +45,14 @@ export function createShowsHandlers(deps: FeatureDeps): Handlers<typeof showsCon
     },
     history: ({ actor, params }) => ({ drafts: listHistory(deps.db, actor, params.showId) }),
     earlierDraft: ({ actor, params }) => getEarlierDraft(deps.db, actor, params.showId, params.revision),
+    partners: ({ actor, params }) => getPartners(deps.db, actor, params.showId),
+    askPartner: ({ actor, params, body }) => askPartner(deps, actor, params.showId, body.userId),
+    withdrawPartner: ({ actor, params }) => withdrawPartner(deps.db, actor, params.showId, params.userId),
+    leave: ({ actor, params }) => ({ copyId: leaveShow(deps, actor, params.showId) }),
+    invitations: ({ actor }) => ({ invitations: listInvitations(deps.db, actor) }),
+    answerInvitation: ({ actor, params, body }) => ({
+      isAuthor: answerInvitation(deps.db, actor, params.showId, body.answer),
+    }),
     version: ({ actor, params }) => getVersionDetail(deps.db, actor, params.versionId),
   };
 }

@@ -5,11 +5,12 @@ import { Dialog } from "../../../components/dialog.tsx";
 import { Menu } from "../../../components/menu.tsx";
 import { TextField } from "../../../components/text-field.tsx";
 import { showToast } from "../../../components/toast-queue.ts";
+import { PartnersDialog } from "./partners-dialog.tsx";
 import { useDuplicateShow, useUpdateShow } from "../api.ts";
 
-/** Rename, copy, archive or bring back a show. Archiving is undone from its message. */
+/** Rename, write together, copy, archive or bring back a show. Archiving is undone from its message. */
 export function ShowMenu({ show }: { show: ShowSummary }) {
-  const [isRenaming, setIsRenaming] = useState(false);
+  const [open, setOpen] = useState<"rename" | "partners" | null>(null);
   const update = useUpdateShow();
   const duplicate = useDuplicateShow();
   const fail = (title: string) => (error: Error) => showToast({ tone: "stop", title, detail: error.message });
@@ -40,14 +41,16 @@ export function ShowMenu({ show }: { show: ShowSummary }) {
         isIconOnly
         size="small"
         actions={[
-          { id: "rename", label: "Rename", icon: "pencil", onAction: () => setIsRenaming(true) },
+          { id: "rename", label: "Rename", icon: "pencil", onAction: () => setOpen("rename") },
+          { id: "partners", label: "Write together", icon: "people", onAction: () => setOpen("partners") },
           { id: "copy", label: "Make a copy", icon: "copy", onAction: handleDuplicate },
           show.isArchived
             ? { id: "back", label: "Bring it back", icon: "undo", onAction: () => setArchived(false) }
             : { id: "archive", label: "Archive", icon: "box", onAction: () => setArchived(true) },
         ]}
       />
-      {isRenaming && <RenameDialog show={show} onClose={() => setIsRenaming(false)} />}
+      {open === "rename" && <RenameDialog show={show} onClose={() => setOpen(null)} />}
+      {open === "partners" && <PartnersDialog show={show} onClose={() => setOpen(null)} />}
     </>
   );
 }
