@@ -29,6 +29,21 @@ describe("countFlashes", () => {
     expect(grey(108) - grey(64)).toBeCloseTo(0.0987, 4);
     expect(countFlashes(series(64, 108, 64, 108, 64, 108, 64, [108, 25]), FPS).worst).toBe(0);
   });
+  it("G19: passes at three flashes, fails at three and a half, whichever way the first goes", () => {
+    for (const [a, b] of [
+      [0, 255],
+      [255, 0],
+    ] as const) {
+      const alternate = (transitions: number) =>
+        series(...Array.from({ length: transitions + 1 }, (_, turn) => (turn % 2 ? b : a)));
+      expect([6, 7].map((transitions) => isPass(alternate(transitions)))).toEqual([true, false]);
+    }
+  });
+  it("counts sixteenths that toggle: 90 beats a minute pass at the limit, 100 fail", () => {
+    const toggles = (tempo: number) =>
+      Array.from({ length: 3000 }, (_, millis) => Math.floor((millis * tempo * 4) / 60_000) % 2);
+    expect([90, 100].map((tempo) => countFlashes(toggles(tempo), 1000).isPass)).toEqual([true, false]);
+  });
   it("y001: one flash below 0.1 leaves fewer than seven", () => {
     expect(isPass(series(64, 109, 64, 109, 64, 108, 64, [109, 25]))).toBe(true);
   });
@@ -138,5 +153,12 @@ describe("countRedFlashes", () => {
       [rgb(180, 0, 0), 0],
     ] as const;
     for (const [colour, distance] of known) expect(chromaticityDistance(pure, colour)).toBeCloseTo(distance, 4);
+    // The last two are no red flashes in 2.2, and both are in 2.0 and 2.1.
+    for (const [other] of known.slice(4)) {
+      const flashes = (["current", "former"] as const).map(
+        (rule) => countRedFlashes(alternate(pure, other), FPS, rule).worst,
+      );
+      expect(flashes).toEqual([0, 7]);
+    }
   });
 });

@@ -10,21 +10,24 @@ import { FORMER_STEP, formerRed, isRedChange, isSaturatedRed, type LinearColour 
 import type { EventRules } from "./rules.ts";
 import { findTransitions, GENERAL_FLASH } from "./transitions.ts";
 
-/**
- * What the rules need to know of one light's way through the show. Rises are the ticks (may be
- * fractional) at which it gets brighter by a step, in order; each measure has its own.
- */
+/** Ticks (may be fractional), in order, at which a light has got brighter by a step, and darker. */
+export interface LightTransitions {
+  readonly rising: Float64Array;
+  readonly falling: Float64Array;
+}
+
+/** What the rules need to know of one light's way through the show; each measure has its own transitions. */
 export interface LightFacts {
   readonly isLit: boolean;
   /** Highest level (0 to 100) in each bin (see `bins.ts`). */
   readonly highest: Float32Array;
   /** Street rule: by the light's own luminance, and by its strongest channel. */
-  readonly byLuminance: Float64Array;
-  readonly byStrongest: Float64Array;
-  /** Picture rule: general flash, and red flash by the definitions of WCAG 2.1 and of 2.2. */
-  readonly general: Float64Array;
-  readonly formerRed: Float64Array;
-  readonly currentRed: Float64Array;
+  readonly byLuminance: LightTransitions;
+  readonly byStrongest: LightTransitions;
+  /** Picture rule: general flash, and red flash (to red and away) by the definitions of WCAG 2.1 and of 2.2. */
+  readonly general: LightTransitions;
+  readonly formerRed: LightTransitions;
+  readonly currentRed: LightTransitions;
 }
 
 /**
@@ -96,49 +99,56 @@ function readFacts(curve: LightCurve, hasColour: boolean, endTick: number, rules
   const { tick, level, luminance, strongest } = curve;
   const { flashStep, flashDarkerBelow } = rules;
   const full = hasColour ? 1 : WARM_LUMINANCE;
-  const byLuminance = listRising(tick, luminance, flashStep, flashDarkerBelow);
+  const byLuminance = listTransitions(tick, luminance, flashStep, flashDarkerBelow);
   return {
     isLit: level.some((value) => value > 0),
     highest: highestPerBin(curve, endTick),
     byLuminance,
-    byStrongest: hasColour ? listRising(tick, strongest, flashStep, flashDarkerBelow) : byLuminance,
-    general: listRising(tick, luminance, GENERAL_FLASH.step / full, GENERAL_FLASH.darkerBelow / full),
+    byStrongest: hasColour ? listTransitions(tick, strongest, flashStep, flashDarkerBelow) : byLuminance,
+    general: listTransitions(tick, luminance, GENERAL_FLASH.step / full, GENERAL_FLASH.darkerBelow / full),
     formerRed: hasColour ? listFormerRed(curve) : NONE,
     currentRed: hasColour ? listCurrentRed(curve) : NONE,
   };
 }
 
-const NONE = new Float64Array(0);
+const NONE: LightTransitions = { rising: new Float64Array(0), falling: new Float64Array(0) };
 
-function listRising(tick: Float64Array, values: ArrayLike<number>, step: number, darkerBelow: number): Float64Array {
-  const times: number[] = [];
+function listTransitions(
+  tick: Float64Array,
+  values: ArrayLike<number>,
+  step: number,
+  darkerBelow: number,
+): LightTransitions {
+  const rising: number[] = [];
+  const falling: number[] = [];
   for (const { isRising, time } of findTransitions(tick, values, { step, darkerBelow }, 0))
-    if (isRising) times.push(time);
-  return Float64Array.from(times);
+    (isRising ? rising : falling).push(time);
+  return { rising: new Float64Array(rising), falling: new Float64Array(falling) };
 }
 
 /** A red that is saturated counts with its strength, any other colour as none: on the strict side. */
-function listFormerRed({ tick, rgb }: LightCurve): Float64Array {
+function listFormerRed({ tick, rgb }: LightCurve): LightTransitions {
   const strength = Float64Array.from(tick, (_, point) => {
     const colour = colourAt(rgb, point);
     return isSaturatedRed(colour) ? formerRed(colour) : 0;
   });
-  return listRising(tick, strength, FORMER_STEP, Infinity);
+  return listTransitions(tick, strength, FORMER_STEP, Infinity);
 }
 
-/** Changes of chromaticity towards a saturated red. */
-function listCurrentRed({ tick, rgb }: LightCurve): Float64Array {
-  const times: number[] = [];
+/** Changes of chromaticity towards a saturated red, and away from it. */
+function listCurrentRed({ tick, rgb }: LightCurve): LightTransitions {
+  const rising: number[] = [];
+  const falling: number[] = [];
   let state: LinearColour = [0, 0, 0];
   for (let point = 0; point < tick.length; point++) {
     const colour = colourAt(rgb, point);
     if (isBlack(colour)) continue;
     if (isBlack(state)) state = colour;
     if (!isRedChange(state, colour, "current")) continue;
-    if (isSaturatedRed(colour)) times.push(tick[point] ?? 0);
+    (isSaturatedRed(colour) ? rising : falling).push(tick[point] ?? 0);
     state = colour;
   }
-  return Float64Array.from(times);
+  return { rising: new Float64Array(rising), falling: new Float64Array(falling) };
 }
 
 const isBlack = ([red, green, blue]: LinearColour) => red <= 0 && green <= 0 && blue <= 0;

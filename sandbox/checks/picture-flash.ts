@@ -15,14 +15,15 @@ import { countStreetFlashes } from "./street-flash.ts";
  * criterion 2.3.1, on the reference picture of 1024 x 768 pixels: more than three general or three
  * red flashes in a second, over a quarter (21 824 pixels) of any block of 341 x 256 pixels, fail.
  *
- * Lit areas are those of the drawn panes and lamps; changes within 20 ms add up, also of different
- * lights. A red flash is one by the definition of 2.2 or by that of 2.1, whichever finds more: the
+ * Seven transitions that take turns are three and a half flashes and fail (technique G19), so four
+ * rises in a second are too many, and so are four falls. Lit areas are those of the drawn panes and
+ * lamps; changes within 20 ms add up, also of different lights. A red flash is one by the definition of 2.2 or by that of 2.1, whichever finds more: the
  * first can not judge red against black. A screen that passes does not prove that the street does.
  */
 export interface PictureCount {
   readonly side: Side;
   readonly kind: "general" | "red";
-  /** Most flashes in any half-open second in any block. */
+  /** Most rises, or most falls, in any half-open second in any block. */
   readonly worst: number;
   /** Tick and lights of the flash that made it so many, or of the last one that counted most. */
   readonly tick: number;
@@ -44,31 +45,30 @@ function countSide(context: CheckContext, measure: SideMeasure): readonly Pictur
   const facts = context.facts();
   const inView = context.lights.filter(({ index }) => cells.has(index));
   const told = inView.map(({ index }) => facts[index]);
-  const count = (kind: PictureCount["kind"], measures: readonly RiseMeasure[]) =>
+  const count = (kind: PictureCount["kind"], measures: readonly ("general" | (typeof RED_MEASURES)[number])[]) =>
     recallCount(context.memory, `${side} ${kind}`, told, () => {
       const groups = groupLights(context, inView);
       const shapes = groups.map(({ lights }) => joinCells(lights.flatMap((light) => cells.get(light) ?? [])));
-      const counts = measures.map((rises) => countBlocks(context, { side, kind }, groups, shapes, rises));
+      const counts = measures.flatMap((of) =>
+        (["rising", "falling"] as const).map((direction) =>
+          countBlocks(context, { side, kind }, groups, shapes, ({ facts }) => facts[of][direction]),
+        ),
+      );
       return counts.reduce((worse, next) => (next.worst > worse.worst ? next : worse));
     });
   return [count("general", ["general"]), count("red", RED_MEASURES)];
 }
-
-type RiseMeasure = "general" | (typeof RED_MEASURES)[number];
 
 function countBlocks(
   { rules, tempo }: CheckContext,
   what: Pick<PictureCount, "side" | "kind">,
   groups: readonly LightGroup[],
   shapes: readonly PictureCells[],
-  measure: RiseMeasure,
+  transitionsOf: (group: LightGroup) => Float64Array,
 ): PictureCount {
-  const rises = listRises(
-    groups.map(({ facts }) => facts[measure]),
-    tempo,
-  );
+  const transitions = listRises(groups.map(transitionsOf), tempo);
   const blocksOf = createBlockList(shapes);
-  const events = listEvents(rises, rules.flashTogetherSeconds, {
+  const events = listEvents(transitions, rules.flashTogetherSeconds, {
     weights: [Float64Array.from(shapes, sumPixels)],
     isEvent: ([pixels = 0], listGroups) => pixels >= FLASH_AREA_PIXELS - 1e-6 && blocksOf(listGroups()).length > 0,
   });

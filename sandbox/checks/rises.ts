@@ -1,6 +1,6 @@
 import type { Tempo } from "../timeline/tempo.ts";
 
-/** Rising transitions (halves of flashes) of several groups of lights, in order of time. */
+/** Transitions of one direction (halves of flashes) of several groups of lights, in order of time. */
 export interface Rises {
   readonly count: number;
   /** May be fractional. */
@@ -18,7 +18,7 @@ export function isWithinSecond(first: number, last: number): boolean {
   return last - first < 1 - ROUNDING_SECONDS;
 }
 
-/** Gives the rises of groups in order of time; `ticks` holds those of each group, in order. */
+/** Gives the rises (or the falls) of groups in order of time; `ticks` holds those of each group, in order. */
 export function listRises(ticks: readonly Float64Array[], tempo: Tempo): Rises {
   const count = ticks.reduce((sum, { length }) => sum + length, 0);
   const [tick, seconds, group] = [new Float64Array(count), new Float64Array(count), new Uint32Array(count)];

@@ -37,6 +37,13 @@ describe("electrical sums (NEC 210.20(A), as restated in trade publications)", (
     ] as const)
       expect([15, 20].map((amps) => Math.round(continuousLimitWatts(120, amps) / watts))).toEqual([on15, on20]);
   });
+  it("counts whole lamps of 5 and 7 W (computed): 288 and 205 on 15 A, 384 and 274 on 20 A", () => {
+    for (const [watts, on15, on20] of [
+      [5, 288, 384],
+      [7, 205, 274],
+    ] as const)
+      expect([15, 20].map((amps) => Math.floor(continuousLimitWatts(120, amps) / watts + 1e-9))).toEqual([on15, on20]);
+  });
   it("adds 125 % of the continuous load to the rest: 6 A and 5 A fit 15 A, 11 A and 2 A do not", () => {
     expect(neededBreakerAmps(6, 5)).toBe(12.5);
     expect(neededBreakerAmps(11, 2)).toBe(15.75);

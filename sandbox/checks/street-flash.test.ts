@@ -106,6 +106,27 @@ describe("shows that flash", () => {
   });
 });
 
+describe("two houses that are each legal at two flashes a second (computed; changes within 20 ms are one by TRACE, 2024)", () => {
+  const [LEFT, RIGHT] = [NORTH.slice(0, 5), NORTH.slice(5)];
+  /** At 120 beats a minute: on for half a beat, off for half a beat. */
+  const blink = (lights: readonly number[], later: number) =>
+    every(1, (beat) => [on(beat + later, lights), off(beat + later + 0.5, lights)]).filter(
+      ({ tick }) => tick < 31 * 960,
+    );
+  it("pass one by one, and in step", () => {
+    expect(worst(blink(LEFT, 0))[0]).toBe(2);
+    expect(worst([...blink(LEFT, 0), ...blink(RIGHT, 0)])[0]).toBe(2);
+    // 20 ms are 0.04 beats.
+    expect(worst([...blink(LEFT, 0), ...blink(RIGHT, 0.038)])[0]).toBe(2);
+  });
+  it("fail together when one is more than 20 ms late: four flashes a second in one view", () => {
+    expect(worst([...blink(LEFT, 0), ...blink(RIGHT, 0.05)])[0]).toBe(4);
+  });
+  it("fail together in exactly opposite states, where the mean over the view would see nothing", () => {
+    expect(worst([...blink(LEFT, 0), ...blink(RIGHT, 0.5)])[0]).toBe(4);
+  });
+});
+
 describe("the limit", () => {
   it("lets three flashes a second pass and not the next faster tempo (WCAG 2.2, 2.3.1; 180 and 181 beats a minute)", () => {
     const onBeats = every(1, (beat) => pulse(beat, NORTH, 1));

@@ -75,7 +75,7 @@ function countView(
   const weights = weighGroups(inView, groups, listAreas(measures, side));
   const counts = (["byLuminance", "byStrongest"] as const).map((measure) => {
     const rises = listRises(
-      groups.map((group) => group.facts[measure]),
+      groups.map((group) => group.facts[measure].rising),
       tempo,
     );
     const events = listEvents(rises, rules.flashTogetherSeconds, {

@@ -36,6 +36,22 @@ describe("level and light", () => {
       expect(yToLevel(relativeLuminance(red, green, blue))).toBeCloseTo(toLab(parse(colour))?.l ?? -1, 2);
     }
   });
+  it("meets the L* of #777777 and of the primaries that culori 4.0.2 gives (lab65)", () => {
+    const lightness = (hex: string) => {
+      const [red, green, blue] = colourToLinear(Number.parseInt(hex.slice(1), 16));
+      return yToLevel(relativeLuminance(red, green, blue));
+    };
+    for (const [hex, known] of [
+      ["#777777", 50.034],
+      ["#ff0000", 53.2371],
+      ["#00ff00", 87.7355],
+      ["#0000ff", 32.3009],
+    ] as const) {
+      expect(toLab(parse(hex))?.l).toBeCloseTo(known, 3);
+      // WCAG's weights have four places, culori's matrix more: a fiftieth of a level apart at most.
+      expect(Math.abs(lightness(hex) - known)).toBeLessThan(0.02);
+    }
+  });
   it("gives back the level it was given", () => {
     for (let level = 0; level <= 100; level += 0.25) expect(yToLevel(levelToY(level))).toBeCloseTo(level, 9);
   });
