@@ -1,5 +1,5 @@
 import { useQuery, useSuspenseQuery } from "@tanstack/react-query";
-import { lazy, Suspense, useMemo } from "react";
+import { lazy, Suspense, useMemo, useState } from "react";
 import { useNavigate, useParams, useSearchParams, type LoaderFunctionArgs } from "react-router";
 import type { HandInResult } from "../../shared/contracts/assignments.ts";
 import type { BeatMap, Score } from "../../shared/contracts/songs.ts";
@@ -13,6 +13,7 @@ import { assignmentQuery, useHandIn } from "../features/assignments/api.ts";
 import { describeHandIn } from "../features/assignments/model/hand-in.ts";
 import { sessionQuery } from "../features/auth/api.ts";
 import { showQuery } from "../features/shows/api.ts";
+import { useDealAgain } from "../features/shows/use-deal-again.ts";
 import { useShowHistory } from "../features/shows/use-show-history.ts";
 import { DraftSaver } from "../features/shows/draft-saver.ts";
 import { ShowRunner } from "../features/shows/show-runner.ts";
@@ -108,18 +109,22 @@ function OpenShow({ detail, songTitle, layout, beatMap, score }: OpenShowProps) 
     enabled: show.assignmentId !== null,
   });
   const handIn = useHandIn(show.assignmentId ?? "none");
+  const [firstSeed] = useState(seed);
   const runner = useDisposable(
-    () => new ShowRunner({ songId: show.songId, song: beatMap, layout, seed }),
-    [show.songId, beatMap, layout, seed],
+    () => new ShowRunner({ songId: show.songId, song: beatMap, layout, seed: firstSeed }),
+    [show.songId, beatMap, layout, firstSeed],
   );
+  // Other luck is another function, so that the studio runs its script again.
+  const runScript = useMemo(() => runner && ((source: string) => runner.runScript(source, seed)), [runner, seed]);
+  const dealAgain = useDealAgain(show.id, seed);
   // What the server held at opening: later revisions come as answers to saves.
   // eslint-disable-next-line react-hooks/exhaustive-deps
   const saver = useMemo(() => new DraftSaver(show.id, { revision: draft.revision, source: draft.source }), [show.id]);
   const history = useShowHistory(detail);
 
   const handleHandIn = async (source: string) => {
-    if (!runner) throw new Error("The script can not be run yet.");
-    const [revision, outcome] = await Promise.all([saver.revisionOf(source), runner.runScript(source)]);
+    if (!runScript) throw new Error("The script can not be run yet.");
+    const [revision, outcome] = await Promise.all([saver.revisionOf(source), runScript(source)]);
     const result = await handIn.mutateAsync({
       showId: show.id,
       revision,
@@ -129,7 +134,7 @@ function OpenShow({ detail, songTitle, layout, beatMap, score }: OpenShowProps) 
     showHandedIn(result, () => void navigate(`/assignments/${show.assignmentId ?? ""}`));
   };
 
-  if (!runner || session === null) return <StudioLoading title={show.title} />;
+  if (!runner || !runScript || session === null) return <StudioLoading title={show.title} />;
   const due = assignment.data ? ` · due ${presentDue(assignment.data.assignment.dueAt, HERE)}` : "";
   return (
     <Suspense fallback={<StudioLoading title={show.title} />}>
@@ -142,7 +147,8 @@ function OpenShow({ detail, songTitle, layout, beatMap, score }: OpenShowProps) 
         layout={layout}
         song={beatMap}
         score={score}
-        runScript={runner.runScript}
+        runScript={runScript}
+        onDealAgain={dealAgain}
         checkShow={runner.checkShow}
         drawRibbon={runner.drawRibbon}
         describeShow={runner.describeShow}

@@ -27,8 +27,9 @@ export class ShowRunner {
     this.#checks = Comlink.wrap<CheckWorker>(this.#checker);
   }
 
-  /** The outcome of a script; the latest wins. Bound, so that it can be passed on. */
-  readonly runScript = (source: string): Promise<RunOutcome> => this.#runs.run({ ...this.#setting, source });
+  /** The outcome of a script, with other luck than the setting's if given; the latest wins. Bound, so that it can be passed on. */
+  readonly runScript = (source: string, seed = this.#setting.seed): Promise<RunOutcome> =>
+    this.#runs.run({ ...this.#setting, source, seed });
 
   /** Findings of the show check on a timeline of this setting. Bound. */
   readonly checkShow = (timeline: Timeline): Promise<readonly Finding[]> => {

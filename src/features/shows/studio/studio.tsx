@@ -1,16 +1,11 @@
-import { lazy, Suspense, useCallback, useEffect, useMemo, useRef, useState } from "react";
+import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import type { BeatMap, Score } from "../../../../shared/contracts/songs.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
-import type { MenuAction } from "../../../components/menu.tsx";
-import { showToast } from "../../../components/toast-queue.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
-import type { KeptText } from "../history/kept-text.ts";
-import { useHistory, type HistorySource } from "../history/use-history.ts";
+import type { HistorySource } from "../history/use-history.ts";
 import { listScriptNames } from "../editor/script-names.ts";
-import { enterFullScreen } from "../viewer/enter-full-screen.ts";
 import { CheckPane } from "./check-pane.tsx";
-import { HandInDialog } from "./hand-in-dialog.tsx";
 import { NamesPane } from "./names-pane.tsx";
 import { NotesPane } from "./notes-pane.tsx";
 import { findGentleReason, listActLines, listFindings, presentRun } from "./run-model.ts";
@@ -18,26 +13,16 @@ import { ScriptPanel, type ScriptPanelHandle } from "./script-panel.tsx";
 import { ShowPlayer } from "./show-player.ts";
 import { SongColumn } from "./song-column.tsx";
 import "./studio.css";
+import { listShowActions } from "./show-actions.ts";
+import { StudioDialogs, type OpenDialog } from "./studio-dialogs.tsx";
 import { StudioHeader } from "./studio-header.tsx";
 import { StudioLoading } from "./studio-loading.tsx";
 import { TrayTabs, type TrayTab } from "./tray-tabs.tsx";
 import { useDraft, type DraftSource } from "./use-draft.ts";
-import { saveScript } from "./save-script.ts";
 import { usePlayKeys } from "./use-play-keys.ts";
 import { WordsPane } from "./words-pane.tsx";
 import { useScriptRun, type ScriptRunOptions } from "./use-script-run.ts";
 import { useDescription, type ShowPictures } from "./use-show-pictures.ts";
-
-/** Comparing texts is seldom, and its editor is large. */
-const HistoryDialog = lazy(async () => ({
-  default: (await import("../history/history-dialog.tsx")).HistoryDialog,
-}));
-const TwoVersionsDialog = lazy(async () => ({
-  default: (await import("../history/two-versions-dialog.tsx")).TwoVersionsDialog,
-}));
-
-/** For the class, seldom for one alone. */
-const Projector = lazy(async () => ({ default: (await import("../viewer/projector.tsx")).Projector }));
 
 export interface StudioProps extends ScriptRunOptions, ShowPictures {
   title: string;
@@ -53,19 +38,14 @@ export interface StudioProps extends ScriptRunOptions, ShowPictures {
   /** Null for a song without a score: no sound. */
   score: Score | null;
   draft: DraftSource;
+  /** Deals new luck: another seed, another run. */
+  onDealAgain: () => void;
   history: HistorySource;
   /** Hands in what is saved; null where there is nobody to hand it to. */
   onHandIn: ((source: string) => Promise<void>) | null;
   /** Where to open: a line of the script, a moment in ticks (a link from a comment). */
   openAt: { readonly line: number | null; readonly tick: number | null };
 }
-
-type OpenDialog =
-  | { kind: "hand-in" }
-  | { kind: "projector" }
-  | { kind: "two-versions" }
-  | { kind: "history"; id: string | null }
-  | null;
 
 /** The studio: the square, the song, the script and what is to be said about it, on one screen. */
 export function Studio(props: StudioProps) {
@@ -88,7 +68,7 @@ function OpenStudio(props: OpenStudioProps) {
   const editor = useRef<ScriptPanelHandle>(null);
   const isPhone = useMediaQuery("(max-width: 559px)");
   const [tab, setTab] = useState<TrayTab>(isPhone ? "script" : "check");
-  const [dialog, setDialog] = useState<OpenDialog>(null);
+  const [dialog, setDialog] = useState<OpenDialog | null>(null);
   const [wantsGentle, setWantsGentle] = useState(() => window.matchMedia("(prefers-reduced-motion: reduce)").matches);
   const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
   const { state: run, run: runNow, runSoon } = useScriptRun(props);
@@ -96,7 +76,10 @@ function OpenStudio(props: OpenStudioProps) {
   const isGentle = wantsGentle || gentleReason !== null;
   const selected = !isPhone && tab === "script" ? "check" : tab;
 
-  useEffect(() => runNow(firstSource), [runNow, firstSource]);
+  // The store and this agree unless the text was changed from outside: another version, another computer.
+  const lastEdited = useRef(firstSource);
+  // At opening, and again with other luck.
+  useEffect(() => runNow(lastEdited.current), [runNow]);
   useEffect(() => player.setTimeline(run.onStage), [player, run.onStage]);
   useEffect(() => player.setGentle(isGentle), [player, isGentle]);
   usePlayKeys(player);
@@ -117,8 +100,6 @@ function OpenStudio(props: OpenStudioProps) {
     if (tick !== undefined) player.seekTick(tick);
     if (line !== undefined) goToLine(line);
   };
-  // The store and this agree unless the text was changed from outside: another version, another computer.
-  const lastEdited = useRef(firstSource);
   useEffect(() => {
     const source = store?.state.source ?? "";
     if (source === lastEdited.current) return;
@@ -131,46 +112,21 @@ function OpenStudio(props: OpenStudioProps) {
     store?.edit(source);
     runSoon(source);
   };
-  const choose = (source: string) => {
-    setDialog(null);
-    void store?.choose(source);
-  };
   const insert = (code: string) => {
     setTab("script");
     requestAnimationFrame(() => editor.current?.insert(code));
   };
-  const history = useHistory(store, props.history);
-  const restore = (source: string, text: KeptText) => {
-    const before = store?.state.source ?? "";
-    setDialog(null);
-    store?.edit(source);
-    showToast({
-      title: `${text.title} of ${text.when} is your script now.`,
-      action: { label: "Undo", onPress: () => store?.edit(before) },
-    });
-  };
-  const actions: MenuAction[] = [
-    {
-      id: "projector",
-      label: "Full screen for the class",
-      icon: "external",
-      disabledReason: run.onStage ? null : "Nothing is on stage yet.",
-      onAction: () => {
-        enterFullScreen();
-        setDialog({ kind: "projector" });
-      },
-    },
-    {
-      id: "file",
-      label: "Save the script as a file",
-      icon: "download",
-      onAction: () => saveScript(title, draft.source),
-    },
-  ];
+  const actions = listShowActions({
+    title,
+    source: draft.source,
+    hasStage: run.onStage !== null,
+    onOpen: setDialog,
+    onDealAgain: props.onDealAgain,
+  });
   const description = useDescription(run.onStage, props.describeShow);
-  const spokenDescription = description
-    ? [description.summary, ...description.steps].join(" ")
-    : "Nothing is on stage yet.";
+  const spoken = description ? [description.summary, ...description.steps].join(" ") : "Nothing is on stage yet.";
+
+  const stage = { layout, song, player, isGentle, gentleReason, onGentle: setWantsGentle, description: spoken };
 
   return (
     <div className="studio" data-tab={selected}>
@@ -186,18 +142,7 @@ function OpenStudio(props: OpenStudioProps) {
         onHandIn={props.onHandIn && (() => setDialog({ kind: "hand-in" }))}
       />
       <div className="studio-columns">
-        <SongColumn
-          layout={layout}
-          song={song}
-          player={player}
-          run={run}
-          isGentle={isGentle}
-          gentleReason={gentleReason}
-          onGentle={setWantsGentle}
-          onGoToLine={goToLine}
-          description={spokenDescription}
-          drawRibbon={props.drawRibbon}
-        />
+        <SongColumn {...stage} run={run} onGoToLine={goToLine} drawRibbon={props.drawRibbon} />
         <div className="studio-work">
           <div
             id="studio-pane-script"
@@ -263,49 +208,19 @@ function OpenStudio(props: OpenStudioProps) {
       <p className="sr-only" role="status">
         {run.isRunning ? "" : presentRun(run)}
       </p>
-      {dialog?.kind === "hand-in" && props.onHandIn && (
-        <HandInDialog
-          title={title}
-          run={run}
-          isRunCurrent={run.ranSource === draft.source}
-          onHandIn={() => props.onHandIn?.(draft.source) ?? Promise.resolve()}
-          onClose={() => setDialog(null)}
-        />
-      )}
-      <Suspense>
-        {dialog?.kind === "projector" && (
-          <Projector
-            player={player}
-            layout={layout}
-            song={song}
-            title={title}
-            authors={props.authors}
-            songTitle={props.songTitle}
-            isGentle={isGentle}
-            gentleReason={gentleReason}
-            onGentle={setWantsGentle}
-            description={spokenDescription}
-            onClose={() => setDialog(null)}
-          />
-        )}
-        {dialog?.kind === "history" && (
-          <HistoryDialog
-            history={history}
-            source={draft.source}
-            firstId={dialog.id}
-            onRestore={restore}
-            onClose={() => setDialog(null)}
-          />
-        )}
-        {dialog?.kind === "two-versions" && draft.sync.kind === "two-versions" && (
-          <TwoVersionsDialog
-            mine={draft.source}
-            theirs={draft.sync.theirs.source}
-            onChoose={choose}
-            onClose={() => setDialog(null)}
-          />
-        )}
-      </Suspense>
+      <StudioDialogs
+        {...stage}
+        dialog={dialog}
+        title={title}
+        authors={props.authors}
+        songTitle={props.songTitle}
+        store={store}
+        draft={draft}
+        run={run}
+        history={props.history}
+        onHandIn={props.onHandIn}
+        onClose={() => setDialog(null)}
+      />
     </div>
   );
 }
