@@ -7,7 +7,7 @@ import { createTempo, type Tempo } from "../timeline/tempo.ts";
 import { buildTracks, type Tracks } from "../timeline/tracks.ts";
 import { CheckMemory } from "./check-memory.ts";
 import { listFacts, type LightFacts } from "./light-facts.ts";
-import { DEFAULT_RULES, type EventRules } from "./rules.ts";
+import { tightenRules, type EventRules } from "./rules.ts";
 
 /** Where shows are checked: what stays the same from one check to the next. */
 export interface CheckSetting {
@@ -45,11 +45,11 @@ export function createCheckContext({ timeline, ...setting }: CheckInput): CheckC
 }
 
 /** Gives what makes contexts of one setting after another, with one memory. */
-export function openSetting({ layout, song, rules: stricter }: CheckSetting): (timeline: Timeline) => CheckContext {
+export function openSetting({ layout, song, rules: own }: CheckSetting): (timeline: Timeline) => CheckContext {
   const memory = new CheckMemory();
   const lights = listLights(layout);
   const tempo = createTempo(song);
-  const rules = { ...DEFAULT_RULES, ...stricter };
+  const rules = tightenRules(own);
   return (timeline) => {
     if (lights.length !== timeline.lightCount)
       throw new RangeError(`The timeline is for ${timeline.lightCount} lights, the layout has ${lights.length}.`);

@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { buildFront, buildShow, buildSong, colour, fadeTo, off, on, pulse } from "../../tests/factories/small-show.ts";
 import type { WrittenCue } from "../timeline/build.ts";
 import { findColourNeverLit } from "./colour-never-lit.ts";
+import { findColourNotShown } from "./colour-not-shown.ts";
 import { createCheckContext, type CheckContext } from "./context.ts";
 import { findFadeCut } from "./fade-cut.ts";
 import { findNeverSeen } from "./never-seen.ts";
@@ -119,6 +120,29 @@ describe("rule 33: colour never lit", () => {
   });
   it("leaves lights alone that have no colour", () => {
     expect(dark([colour(1, [0, 1], 0xff)])).toEqual([]);
+  });
+});
+
+describe("colour not shown", () => {
+  const plain = (cues: readonly WrittenCue[]) => findColourNotShown(context(cues)).map(({ lines }) => lines[0]);
+
+  it("finds a line that gives colours to lights without colour alone", () => {
+    expect(findColourNotShown(context([colour(1, [0, 1], 0xff, 0, 4), colour(2, 1, 0xff, 0, 4)]))).toMatchObject([
+      {
+        rule: "colour-not-shown",
+        severity: "note",
+        lines: [4],
+        moments: [960, 1920],
+        lights: ["front-a/roof", "front-a/windows"],
+      },
+    ]);
+  });
+  it("leaves a line alone that reaches a colour light, at once or in another turn", () => {
+    expect(plain([colour(1, [1, 2], 0xff)])).toEqual([]);
+    expect(plain([colour(1, 1, 0xff, 0, 4), colour(2, 2, 0xff, 0, 4), colour(3, 1, 0xff, 0, 5)])).toEqual([5]);
+  });
+  it("leaves pulses alone: they are seen, whatever their colour", () => {
+    expect(plain([pulse(1, 1, 1, 0xff)])).toEqual([]);
   });
 });
 

@@ -83,7 +83,7 @@ describe("gatherEvidence", () => {
     expect(facts("safety", [on(0, 2), pulse(0, 0, 1), pulse(4, 0, 1)])).toEqual([
       "tick: The fullest circuit takes 53 % of what it may take (a planning aid).",
       "tick: The north side flashes at most 1 time in a second. The limit is 3.",
-      "info: The relays come on 2 times in a show, the busiest 2 times.",
+      "info: The relays come on 2 times in a show, the busiest 2 times: in a season 0 % of its life.",
     ]);
   });
   it("fits what travels to the person who marks", () => {

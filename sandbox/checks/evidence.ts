@@ -11,7 +11,7 @@ import { createCheckContext, type CheckContext, type CheckInput } from "./contex
 import { lineOfCue, MOST_PLACES } from "./finding.ts";
 import { listCircuitLoads } from "./load.ts";
 import { countStreetFlashes } from "./street-flash.ts";
-import { countRelayCycles } from "./switching.ts";
+import { countRelayCycles, getWearShare } from "./switching.ts";
 import { listUses } from "./use.ts";
 
 /** What a fact is about; a rubric's criterion picks the topics that help to judge it. */
@@ -266,11 +266,13 @@ function flashesCounted(context: CheckContext): ShowEvidence[] {
   if (worst === null) return [];
   const limit = context.rules.flashesPerSecond;
   if (worst.worst === 0) return [fact("safety", "tick", "No side flashes.")];
+  const longest = Math.max(...sides.map(({ longestRun }) => longestRun));
+  const run = longest > 0 ? ` The longest run at the limit lasts ${Math.round(longest)} s.` : "";
   return [
     fact(
       "safety",
       worst.worst <= limit ? "tick" : "triangle",
-      `The ${worst.side} side flashes at most ${countWord(worst.worst, "time")} in a second. The limit is ${limit}.`,
+      `The ${worst.side} side flashes at most ${countWord(worst.worst, "time")} in a second. The limit is ${limit}.${run}`,
       { moments: worst.events.slice(0, 1).map(({ tick }) => tick) },
     ),
   ];
@@ -280,11 +282,13 @@ function relayClicks(context: CheckContext): ShowEvidence[] {
   const cycles = [...countRelayCycles(context).values()];
   if (cycles.length === 0) return [];
   const total = cycles.reduce((sum, count) => sum + count, 0);
+  const busiest = Math.max(...cycles);
+  const wear = Math.round(100 * getWearShare(context, busiest));
   return [
     fact(
       "safety",
       "info",
-      `The relays come on ${countWord(total, "time")} in a show, the busiest ${countWord(Math.max(...cycles), "time")}.`,
+      `The relays come on ${countWord(total, "time")} in a show, the busiest ${countWord(busiest, "time")}: in a season ${wear} % of its life.`,
     ),
   ];
 }

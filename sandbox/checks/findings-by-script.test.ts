@@ -77,7 +77,7 @@ const CASES: readonly Case[] = [
   },
   {
     rule: "street-flash-long-run",
-    lines: [],
+    lines: [2],
     beat: 0,
     song: buildSong({}, { tempo: 179 }),
     script: "repeat(32, () => {\n  square.all.pulse(1);\n  wait(1);\n});",
@@ -105,6 +105,13 @@ const CASES: readonly Case[] = [
     layout: HEAVY,
     script: 'square.parts("roof").on();\nwait(2);\nsquare.parts("roof").off();',
   },
+  {
+    rule: "circuit-inrush",
+    lines: [3],
+    beat: 4,
+    layout: HEAVY,
+    script: "wait(4);\nfor (const front of square.fronts) {\n  front.on(60);\n}",
+  },
   { rule: "incomplete", lines: [], beat: null, script: "square.all.on();\nwait(-1);" },
   { rule: "nothing-lit", lines: [], beat: null, script: "wait(4);" },
   {
@@ -128,6 +135,13 @@ const CASES: readonly Case[] = [
     script: 'repeat(100, () => {\n  square.parts("roof").pulse(1);\n  wait(1.5);\n});',
   },
   {
+    rule: "relay-wear",
+    lines: [2],
+    beat: 0,
+    song: buildSong({}, { bars: 80 }),
+    script: 'repeat(300, () => {\n  square.parts("roof").pulse(0.5);\n  wait(1);\n});',
+  },
+  {
     rule: "half-cycle",
     lines: [2],
     beat: 1,
@@ -146,6 +160,12 @@ const CASES: readonly Case[] = [
     lines: [2],
     beat: 1,
     script: 'wait(1);\nsquare.parts("door").colour("red");\nsquare.parts("windows").on();',
+  },
+  {
+    rule: "colour-not-shown",
+    lines: [3],
+    beat: 2,
+    script: 'square.all.on();\nwait(2);\nsquare.parts("windows").colour("red");',
   },
   {
     rule: "off-grid",

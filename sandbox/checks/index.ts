@@ -2,30 +2,35 @@ import type { Finding, Severity } from "../engine/model.ts";
 import { findColourNeverLit } from "./colour-never-lit.ts";
 import type { Timeline } from "../timeline/model.ts";
 import { openSetting, type CheckContext, type CheckInput, type CheckSetting } from "./context.ts";
+import { findColourNotShown } from "./colour-not-shown.ts";
 import { findFadeCut } from "./fade-cut.ts";
 import { MOST_PLACES } from "./finding.ts";
 import { findFit } from "./fit.ts";
+import { findInrush } from "./inrush.ts";
 import { findLoads } from "./load.ts";
 import { findNeverSeen } from "./never-seen.ts";
 import { findNeverSwitches } from "./never-switches.ts";
 import { findOffGrid } from "./off-grid.ts";
 import { findPictureFlashes } from "./picture-flash.ts";
 import { findStreetFlashes } from "./street-flash.ts";
-import { findHalfCycle, findRelayDwell, findRelayRate } from "./switching.ts";
+import { findHalfCycle, findRelayDwell, findRelayRate, findRelayWear } from "./switching.ts";
 
 /** Every rule of the show check. */
 const RULES: readonly ((context: CheckContext) => Finding[])[] = [
   findStreetFlashes,
   findPictureFlashes,
   findLoads,
+  findInrush,
   findFit,
   findRelayDwell,
   findRelayRate,
+  findRelayWear,
   findHalfCycle,
   findNeverSwitches,
   findNeverSeen,
   findFadeCut,
   findColourNeverLit,
+  findColourNotShown,
   findOffGrid,
 ];
 

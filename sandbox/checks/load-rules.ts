@@ -22,17 +22,15 @@ export function energyKilowattHours(watts: number, hours: number): number {
   return (watts * hours) / 1000;
 }
 
-/** Share of its electrical life (switchings at rated load) that a relay uses up in a season, 1 is all of it. */
+/** Gives the share of its electrical life (switchings at rated load) that a relay uses up in so many plays of a show; 1 is all of it. */
 export function relayWearShare({
   cyclesPerShow,
-  showsPerNight,
-  nights,
-  lifeCycles = 100_000,
+  plays,
+  lifeCycles,
 }: {
   readonly cyclesPerShow: number;
-  readonly showsPerNight: number;
-  readonly nights: number;
-  readonly lifeCycles?: number;
+  readonly plays: number;
+  readonly lifeCycles: number;
 }): number {
-  return (cyclesPerShow * showsPerNight * nights) / lifeCycles;
+  return (cyclesPerShow * plays) / lifeCycles;
 }

@@ -80,7 +80,13 @@ const FINDINGS: readonly Finding[] = [
     buildBroadStreet(),
     turns(0.5, (beat) => [pulse(beat, 0, 0.5)]),
   ),
-  ...check(sides, [on(0, 0), off(4, 0), on(28, 0)], {}, buildSong({}, { tempo: 60 })),
+  ...check(sides, [on(0, 0), off(4, 0), on(28, 0), colour(2, 1, 0xff)], {}, buildSong({}, { tempo: 60 })),
+  ...check(
+    buildFront("relay", "dimmer"),
+    Array.from({ length: 300 }, (_, beat) => pulse(beat, 0, 0.5)),
+    { endTick: 400 * 960 },
+    buildSong({}, { bars: 100 }),
+  ),
 ];
 
 describe("what the show check says", () => {

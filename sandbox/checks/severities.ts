@@ -27,6 +27,10 @@ export const SEVERITIES = {
     severity: "warn",
     reason: "A stuck box or a test can switch on everything at once; that is for the square, not the show.",
   },
+  "circuit-inrush": {
+    severity: "note",
+    reason: "Cold filaments may trip a breaker; LED lamps do not, and the layout does not say which hang there.",
+  },
   incomplete: { severity: "stop", reason: "A script that stopped half way is never played." },
   "nothing-lit": { severity: "stop", reason: "A dark show can not be scheduled." },
   "wrong-length": { severity: "stop", reason: "A timeline made for another beat map runs out of step with the song." },
@@ -38,6 +42,10 @@ export const SEVERITIES = {
     severity: "warn",
     reason: "More switching than a relay is rated for at full load shortens its life.",
   },
+  "relay-wear": {
+    severity: "warn",
+    reason: "A relay that is worn out before the season ends leaves a front dark; it is no danger.",
+  },
   "half-cycle": {
     severity: "note",
     reason: "A solid-state box follows the mains in half-cycles, so such short times can not be exact.",
@@ -46,6 +54,7 @@ export const SEVERITIES = {
   "never-seen": { severity: "warn", reason: "A step that nobody sees is nearly always a missing wait." },
   "fade-cut": { severity: "note", reason: "A fade that stops half way may be meant." },
   "colour-never-lit": { severity: "note", reason: "A colour on a dark light changes nothing that is seen." },
+  "colour-not-shown": { severity: "note", reason: "The light shines all the same, in its own colour." },
   "off-grid": { severity: "note", reason: "Steps off the beat may be meant." },
   "ends-early": { severity: "note", reason: "The song plays on over a dark square." },
   "long-dark": { severity: "note", reason: "A long dark stretch may be meant." },

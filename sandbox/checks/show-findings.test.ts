@@ -16,9 +16,12 @@ import { createCheckContext } from "./context.ts";
 import { findFit } from "./fit.ts";
 import { checkShow, hasStop, mergeFindings } from "./index.ts";
 import { continuousLimitWatts, energyKilowattHours, neededBreakerAmps, relayWearShare } from "./load-rules.ts";
+import { findInrush } from "./inrush.ts";
 import { findLoads, listCircuitLoads } from "./load.ts";
+import { DEFAULT_RULES, tightenRules } from "./rules.ts";
 import { SEVERITIES } from "./severities.ts";
-import { countRelayCycles, findHalfCycle, findRelayDwell, findRelayRate } from "./switching.ts";
+import { countStreetFlashes } from "./street-flash.ts";
+import { countRelayCycles, findHalfCycle, findRelayDwell, findRelayRate, findRelayWear } from "./switching.ts";
 
 const rulesOf = (findings: readonly Finding[]) => findings.map(({ rule }) => rule);
 
@@ -52,8 +55,9 @@ describe("electrical sums (NEC 210.20(A), as restated in trade publications)", (
     expect(energyKilowattHours(1440, 2 * 30)).toBeCloseTo(86.4, 9);
   });
   it("counts wear against the 100 000 switchings of relay datasheets: 90 a show are 16 % in a season, 360 are 65 %", () => {
-    expect(relayWearShare({ cyclesPerShow: 90, showsPerNight: 6, nights: 30 })).toBeCloseTo(0.162, 3);
-    expect(relayWearShare({ cyclesPerShow: 360, showsPerNight: 6, nights: 30 })).toBeCloseTo(0.648, 3);
+    const season = { plays: 6 * 30, lifeCycles: 100_000 };
+    expect(relayWearShare({ cyclesPerShow: 90, ...season })).toBeCloseTo(0.162, 3);
+    expect(relayWearShare({ cyclesPerShow: 360, ...season })).toBeCloseTo(0.648, 3);
   });
 });
 
@@ -94,6 +98,25 @@ describe("load", () => {
     expect(load?.peakAmps).toBeCloseTo(10, 6);
     expect(load?.peakTick).toBe(8.5 * 960);
     expect(load?.fullAmps).toBeCloseTo(10, 6);
+  });
+  it("notes many cold lamps that come on at once: filaments take about 12 times their current", () => {
+    const all = [0, 1, 2, 3];
+    const inrush = (cues: readonly WrittenCue[]) => findInrush(check(dimmers(200, 200, 200, 200), cues));
+    // 800 W are 6.7 A; 12 times that is more than five times 15 A.
+    expect(inrush([on(4, all, 100, 6)])).toMatchObject([
+      {
+        rule: "circuit-inrush",
+        severity: "note",
+        measured: { value: 80, limit: 75, unit: "A" },
+        moments: [4 * 960],
+        lines: [6],
+      },
+    ]);
+    expect(inrush([on(4, all, 90)])).toEqual([]);
+    expect(inrush(all.map((light) => on(4 + light / 4, light)))).toEqual([]);
+    expect(inrush([fadeTo(4, all, 100, 4)])).toEqual([]);
+    // Lamps that glow already are not cold.
+    expect(inrush([fadeTo(0, all, 20, 4), on(8, all)])).toEqual([]);
   });
   it("keeps circuits apart", () => {
     const layout = buildFront({ kind: "dimmer", watts: 1400 }, { kind: "dimmer", watts: 1900, circuit: "b" });
@@ -173,6 +196,39 @@ describe("switching", () => {
       lights: ["front-a/roof"],
       lines: [2],
     });
+  });
+  it("warns of a relay that a season of the show would wear out by more than half (100 000 switchings, relay datasheets)", () => {
+    const long = buildFront("relay", "dimmer");
+    const find = (turns: number) => {
+      const cues = Array.from({ length: turns }, (_, turn) => pulse(turn, [0, 1], 0.5, undefined, 5));
+      const timeline = buildShow(long, cues, { endTick: 400 * 960 });
+      return findRelayWear(createCheckContext({ timeline, layout: long, song: buildSong({}, { bars: 100 }) }));
+    };
+    // Half of 100 000 in 180 plays: 277 times a show.
+    expect(find(277)).toEqual([]);
+    expect(find(360)).toMatchObject([
+      {
+        rule: "relay-wear",
+        severity: "warn",
+        measured: { value: 65, limit: 50, unit: "% of its life" },
+        lights: ["front-a/roof"],
+        lines: [5],
+      },
+    ]);
+  });
+  it("takes two solid-state outlets that switch half a cycle apart for one (they wait for the mains, up to 10 ms)", () => {
+    const two = buildLayout([{ side: "north", outlets: ["solid-state", "solid-state"] }]);
+    const blink = (later: number) =>
+      Array.from({ length: 30 }, (_, beat) =>
+        [0, 1].flatMap((light) => [on(beat + light * later, light), off(beat + light * later + 0.5, light)]),
+      ).flat();
+    const worst = (later: number) =>
+      countStreetFlashes(
+        createCheckContext({ timeline: buildShow(two, blink(later)), layout: two, song: buildSong() }),
+      )[0]?.worst;
+    // At 120 beats a minute 10 ms are 0.02 beats; a beat apart the two would be four flashes a second.
+    expect(worst(0.02)).toBe(2);
+    expect(worst(0.25)).toBe(4);
   });
   it("counts how often each relay comes on", () => {
     expect([...countRelayCycles(check([pulse(0, [0, 1], 1), pulse(1, 0, 1), pulse(4, 0, 1)]))]).toEqual([[0, 2]]);
@@ -257,6 +313,21 @@ describe("checkShow", () => {
     const input = { timeline: buildShow(layout, cues), layout, song: buildSong() };
     expect(hasStop(checkShow(input))).toBe(false);
     expect(rulesOf(checkShow({ ...input, rules: { flashesPerSecond: 1 } }))[0]).toBe("street-flash");
+  });
+  it("takes no looser rules for flashes and load from anybody", () => {
+    const loose = {
+      flashesPerSecond: 10,
+      flashShare: 1,
+      flashTogetherSeconds: 0,
+      continuousShare: 1,
+      longestDarkSeconds: 60,
+    };
+    expect(tightenRules(loose)).toEqual({ ...DEFAULT_RULES, longestDarkSeconds: 60 });
+    expect(tightenRules({ flashesPerSecond: 2, relayDwellSeconds: 1 })).toEqual({
+      ...DEFAULT_RULES,
+      flashesPerSecond: 2,
+      relayDwellSeconds: 1,
+    });
   });
   it("refuses a timeline for another layout", () => {
     expect(() =>

@@ -44,8 +44,9 @@ export interface FlashCount {
   readonly events: readonly FlashEvent[];
   /** Most events in any half-open second. */
   readonly worst: number;
-  /** Longest time in seconds without a break in which each second holds as many events as allowed, or more. */
+  /** Longest time in seconds without a break in which each second holds as many events as allowed, or more; and the index of its first event. */
   readonly longestRun: number;
+  readonly longestRunAt: number;
 }
 
 const recallCount = createRecall<FlashCount>();
@@ -124,22 +125,27 @@ function countEvents(side: Side | null, events: readonly FlashEvent[], rules: Ev
     while (!isWithinSecond(events[oldest]?.seconds ?? 0, seconds)) oldest++;
     worst = Math.max(worst, newest - oldest + 1);
   });
-  return { side, events, worst, longestRun: longestRunAtLimit(events, rules.flashesPerSecond) };
+  const run = findLongestRun(events, rules.flashesPerSecond);
+  return { side, events, worst, longestRun: run.seconds, longestRunAt: run.first };
 }
 
 /** The longest stretch in which events follow each other so that `limit` of them fall in each second. */
-function longestRunAtLimit(events: readonly FlashEvent[], limit: number): number {
-  let longest = 0;
+function findLongestRun(
+  events: readonly FlashEvent[],
+  limit: number,
+): { readonly seconds: number; readonly first: number } {
+  let longest = { seconds: 0, first: 0 };
   let from: number | null = null;
   for (let event = limit - 1; event < events.length; event++) {
-    const first = events[event - limit + 1]?.seconds ?? 0;
+    const first = event - limit + 1;
     const last = events[event]?.seconds ?? 0;
-    if (isWithinSecond(first, last)) {
-      from ??= first;
-      longest = Math.max(longest, last - from);
-    } else {
+    if (!isWithinSecond(events[first]?.seconds ?? 0, last)) {
       from = null;
+      continue;
     }
+    from ??= first;
+    const seconds = last - (events[from]?.seconds ?? 0);
+    if (seconds > longest.seconds) longest = { seconds, first: from };
   }
   return longest;
 }
@@ -155,12 +161,15 @@ export function findStreetFlashes(context: CheckContext): Finding[] {
       if (count.side === null && isAnySideOver) continue;
       findings.push(describeOver(context, count));
     } else if (count.side !== null && count.longestRun > rules.flashLongRunSeconds) {
+      const together = count.events.slice(count.longestRunAt, count.longestRunAt + rules.flashesPerSecond);
       findings.push(
         buildFinding(context, "street-flash-long-run", {
           sentence: `The ${count.side} side flashes ${rules.flashesPerSecond} times a second for ${Math.round(count.longestRun)} seconds.`,
           hint: "That keeps the limit. A calm bar in between is kinder to people who are sensitive to flashes.",
           measured: { value: Math.round(count.longestRun * 10) / 10, limit: rules.flashLongRunSeconds, unit: "s" },
-          moments: count.events.slice(0, 1).map(({ tick }) => tick),
+          moments: together.slice(0, 1).map(({ tick }) => tick),
+          lights: together.flatMap(({ lights }) => lights.flat()),
+          lines: together.flatMap(({ tick, lights }) => linesAt(context, tick, lights.flat())),
         }),
       );
     }

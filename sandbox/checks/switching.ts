@@ -3,6 +3,7 @@ import type { OnSpan } from "../timeline/switching.ts";
 import { listOf } from "./by-line.ts";
 import type { CheckContext } from "./context.ts";
 import { buildFinding, lineOfCue } from "./finding.ts";
+import { relayWearShare } from "./load-rules.ts";
 
 /** Beats are whole microseconds, ticks fractions of them: a millisecond short is not short. */
 const ROUNDING_SECONDS = 0.001;
@@ -84,6 +85,36 @@ export function findRelayRate(context: CheckContext): Finding[] {
   ];
 }
 
+/** Finds relays that a season of this show would wear out too far. */
+export function findRelayWear(context: CheckContext): Finding[] {
+  const { rules } = context;
+  const most = (rules.relayWearShare * rules.relayLifeCycles) / rules.seasonPlays;
+  const worn = [...countRelayCycles(context)].filter(([, cycles]) => cycles > most);
+  if (worn.length === 0) return [];
+  const busiest = Math.max(...worn.map(([, cycles]) => cycles));
+  const share = getWearShare(context, busiest);
+  const spans = worn.flatMap(([light]) => context.onSpans()[light] ?? []);
+  return [
+    buildFinding(context, "relay-wear", {
+      sentence: `A relay comes on ${busiest} times. A season of that takes ${inPercent(share)} of its life.`,
+      hint: 'Relays last longer when they switch less: `if (front.box !== "relay") { ... }`.',
+      measured: {
+        value: Math.round(share * 100),
+        limit: Math.round(rules.relayWearShare * 100),
+        unit: "% of its life",
+      },
+      moments: spans.slice(0, 1).map(({ start }) => start),
+      lights: worn.map(([light]) => light),
+      lines: spans.map(({ cue }) => lineOfCue(context, cue)),
+    }),
+  ];
+}
+
+/** Gives the share of a relay's life that a season of shows takes in which it comes on so often. */
+export function getWearShare({ rules }: Pick<CheckContext, "rules">, cycles: number): number {
+  return relayWearShare({ cyclesPerShow: cycles, plays: rules.seasonPlays, lifeCycles: rules.relayLifeCycles });
+}
+
 /** Gives how often each relay comes on in the show, by light index: what wear is worked out from. */
 export function countRelayCycles(context: CheckContext): ReadonlyMap<number, number> {
   const onSpans = context.onSpans();
@@ -120,5 +151,6 @@ function byLine(context: CheckContext, short: readonly ShortSpan[]): (readonly [
   return [...lines].sort(([a], [b]) => a - b);
 }
 
+const inPercent = (share: number) => `${Math.round(share * 100)} %`;
 const inSeconds = (seconds: number) => `${Math.round(seconds * 100) / 100} s`;
 const inMillis = (seconds: number) => `${Math.round(seconds * 10_000) / 10} ms`;

@@ -4,7 +4,7 @@ import { createRequire } from "node:module";
 import { LIBRARY } from "../../sandbox/engine/library.generated.ts";
 
 /** Goes up when a rule of the show check changes, so that a run says by which rules it was judged. */
-export const CHECK_RULES_VERSION = 1;
+export const CHECK_RULES_VERSION = 2;
 
 let hash: string | null = null;
 
