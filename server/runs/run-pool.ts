@@ -38,6 +38,8 @@ export interface RunPool {
 export interface RunOptions {
   /** Whose turn it is; runs without a class share one. */
   readonly classId?: string;
+  /** Wall time of this run, when it is not the pool's. */
+  readonly deadlineMs?: number;
 }
 
 export interface RunPoolOptions {
@@ -73,6 +75,7 @@ interface Job {
   readonly group: string;
   readonly work: RunWork;
   readonly input: RunInput;
+  readonly deadlineMs: number;
   readonly resolve: (answer: RunAnswer) => void;
   readonly reject: (error: Error) => void;
   tries: number;
@@ -116,12 +119,16 @@ class ChildRunPool implements RunPool {
     return answer.judged;
   }
 
-  #ask(work: RunWork, input: RunInput, { classId = NO_CLASS }: RunOptions): Promise<RunAnswer> {
+  #ask(
+    work: RunWork,
+    input: RunInput,
+    { classId = NO_CLASS, deadlineMs = this.#deadlineMs }: RunOptions,
+  ): Promise<RunAnswer> {
     if (this.#isClosed) return Promise.reject(new RunPoolClosedError("The run pool is closed."));
     if (this.#queue.size >= this.#maxWaiting)
       return Promise.reject(new RunQueueFullError(`${this.#queue.size} runs wait already.`));
     return new Promise((resolve, reject) => {
-      this.#queue.add(classId, { group: classId, work, input, resolve, reject, tries: 0 });
+      this.#queue.add(classId, { group: classId, work, input, deadlineMs, resolve, reject, tries: 0 });
       this.#advance();
     });
   }
@@ -205,9 +212,10 @@ class ChildRunPool implements RunPool {
     job.tries++;
     this.#runsOfChild++;
     const child = this.#child;
-    const timer = setTimeout(() => this.#replaceChild(child), this.#deadlineMs + CHILD_GRACE_MS);
+    const { work, input, deadlineMs } = job;
+    const timer = setTimeout(() => this.#replaceChild(child), deadlineMs + CHILD_GRACE_MS);
     this.#running.set(id, { job, timer });
-    const request: RunRequest = { id, work: job.work, input: job.input, deadlineMs: this.#deadlineMs };
+    const request: RunRequest = { id, work, input, deadlineMs };
     child.send(request, (error) => {
       if (error !== null) this.#replaceChild(child);
     });

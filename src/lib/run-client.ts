@@ -52,8 +52,9 @@ export class RunClient {
   /**
    * Gives the outcome of a script, a value whatever the script does. Rejects with `RunReplacedError`
    * when a newer run or `dispose` came first, and with the worker's error when the engine did not load.
+   * `deadlineMs`: wall time of this run, when it is not the client's.
    */
-  async run(input: RunInput): Promise<RunOutcome> {
+  async run(input: RunInput, deadlineMs: number = this.#deadlineMs): Promise<RunOutcome> {
     if (this.#isDisposed) throw new RunReplacedError("The run client is disposed.");
     this.#stop?.(new RunReplacedError("A newer run took its place."));
     let timer: ReturnType<typeof setTimeout> | undefined;
@@ -72,8 +73,8 @@ export class RunClient {
       const late = new Promise<RunOutcome>((resolve) => {
         timer = setTimeout(() => {
           if (this.#seat === seat) this.#replaceSeat();
-          resolve(createStoppedOutcome(input.source, "too-much-work", `Stopped after ${this.#deadlineMs} ms.`));
-        }, this.#deadlineMs);
+          resolve(createStoppedOutcome(input.source, "too-much-work", `Stopped after ${deadlineMs} ms.`));
+        }, deadlineMs);
       });
       const outcome = await Promise.race([seat.remote.run(input), late, stopped]);
       if (!outcome.ok && outcome.problem.code === "could-not-run" && this.#seat === seat) this.#replaceSeat();

@@ -2,19 +2,10 @@ import { mkdirSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { type Browser, type BrowserContext, chromium, type Page } from "playwright-core";
+import { BROWSER_ARGS } from "../../support/browser-args.ts";
 import { ensureChromium } from "../../support/chromium.ts";
 
-/** Without the background flags Chromium asks for hosts of its own, which a closed network refuses noisily. */
-const ARGS = [
-  "--no-sandbox",
-  "--disable-gpu",
-  "--disable-quic",
-  "--no-first-run",
-  "--disable-background-networking",
-  "--disable-component-update",
-  "--disable-sync",
-  "--autoplay-policy=user-gesture-required",
-];
+const ARGS = [...BROWSER_ARGS, "--autoplay-policy=user-gesture-required"];
 
 export async function launchBrowser(): Promise<Browser> {
   return chromium.launch({ executablePath: ensureChromium(console.log), args: ARGS });
@@ -36,6 +27,8 @@ export interface PersonOptions {
   /** Console errors that the test causes on purpose. */
   readonly expectedErrors?: RegExp;
   /** What an earlier profile kept: cookies of a sign-in. Nothing by default. */
+  /** Lets the page keep its files for a time without network. Off: what a test puts in place of an answer must reach the page. */
+  readonly isKeptOffline?: boolean;
   readonly storageState?: Awaited<ReturnType<BrowserContext["storageState"]>> | undefined;
 }
 
@@ -45,6 +38,7 @@ export async function openPerson(browser: Browser, address: string, options: Per
     baseURL: address,
     viewport: { width: options.width ?? 1366, height: options.height ?? 768 },
     colorScheme: options.colorScheme ?? "light",
+    serviceWorkers: options.isKeptOffline ? "allow" : "block",
     ...(options.storageState && { storageState: options.storageState }),
   });
   const page = await context.newPage();
