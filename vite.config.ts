@@ -1,6 +1,6 @@
 import react from "@vitejs/plugin-react";
 import tailwindcss from "@tailwindcss/vite";
-import { defineConfig } from "vite";
+import { defineConfig, type Plugin } from "vite";
 
 const apiOrigin = process.env.DUSKBELL_API_ORIGIN ?? "http://127.0.0.1:8120";
 
@@ -8,8 +8,30 @@ const apiOrigin = process.env.DUSKBELL_API_ORIGIN ?? "http://127.0.0.1:8120";
 const FRAMEWORK =
   /node_modules\/(react|react-dom|scheduler|react-router|@tanstack\/react-query|@tanstack\/query-core|zod)\//;
 
+const SERVICE_WORKER = "service-worker.js";
+/** Beside the built files: what `src/public` holds, and the page itself. */
+const OTHER_FILES = ["/index.html", "/theme.js", "/mark.svg"];
+
+/** Gives the service worker the list of the files it keeps, once they all have their names. */
+function listBuiltFiles(): Plugin {
+  return {
+    name: "list-built-files",
+    apply: "build",
+    generateBundle: {
+      order: "post",
+      handler(_options, bundle) {
+        const worker = bundle[SERVICE_WORKER];
+        if (worker?.type !== "chunk") return;
+        const files = Object.keys(bundle).filter((name) => name.startsWith("assets/") && !name.endsWith(".map"));
+        const list = JSON.stringify([...OTHER_FILES, ...files.map((name) => `/${name}`).sort()]);
+        worker.code = worker.code.replaceAll("BUILT_FILES", list);
+      },
+    },
+  };
+}
+
 export default defineConfig({
-  plugins: [react(), tailwindcss()],
+  plugins: [react(), tailwindcss(), listBuiltFiles()],
   publicDir: "src/public",
   worker: { format: "es" },
   server: {
@@ -25,7 +47,10 @@ export default defineConfig({
     // The content policy allows no data: addresses.
     assetsInlineLimit: 0,
     rolldownOptions: {
+      input: { main: "index.html", "service-worker": "src/service-worker.ts" },
       output: {
+        // Its address stays the same from version to version: that is how a browser finds the next one.
+        entryFileNames: ({ name }) => (name === "service-worker" ? SERVICE_WORKER : "assets/[name]-[hash].js"),
         codeSplitting: { groups: [{ name: "framework", test: FRAMEWORK }] },
       },
     },

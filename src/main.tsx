@@ -3,6 +3,7 @@ import { StrictMode } from "react";
 import { createRoot } from "react-dom/client";
 import { RouterProvider } from "react-router";
 import { queryClient } from "./lib/query-client.ts";
+import { registerServiceWorker } from "./lib/register-service-worker.ts";
 import { router } from "./router.tsx";
 import "./styles/fonts.css";
 import "./styles/main.css";
@@ -17,3 +18,6 @@ createRoot(root).render(
     </QueryClientProvider>
   </StrictMode>,
 );
+
+// In development files change all the time.
+if (import.meta.env.PROD) registerServiceWorker();

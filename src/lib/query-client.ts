@@ -19,11 +19,13 @@ function isAnswer(error: unknown): boolean {
 export function createQueryClient(): QueryClient {
   return new QueryClient({
     defaultOptions: {
+      // The browser's own idea of being online keeps requests back; ours fail at once, and what is kept answers.
       queries: {
+        networkMode: "always",
         staleTime: STALE_AFTER_MS,
         retry: (failures, error) => !isAnswer(error) && failures < READ_ATTEMPTS - 1,
       },
-      mutations: { retry: false },
+      mutations: { networkMode: "always", retry: false },
     },
   });
 }

@@ -22,6 +22,7 @@ import { songQuery } from "../features/songs/api.ts";
 import { layoutQuery } from "../features/square/api.ts";
 import { useDisposable } from "../hooks/use-disposable.ts";
 import { formatNames, HERE } from "../lib/format.ts";
+import type { Shelved } from "../lib/offline-shelf.ts";
 import { queryClient } from "../lib/query-client.ts";
 import { presentDue } from "../lib/zoned-time.ts";
 import { requireSession } from "./guards.ts";
@@ -67,7 +68,7 @@ function StudioMessage({ children }: { children: React.ReactNode }) {
   );
 }
 
-function ShowStudio({ detail }: { detail: ShowDetail }) {
+function ShowStudio({ detail }: { detail: Shelved<ShowDetail> }) {
   const song = useQuery(songQuery(detail.show.songId));
   const layout = useQuery(layoutQuery(detail.layoutId));
   const loading = <StudioLoading title={detail.show.title} />;
@@ -92,7 +93,7 @@ function ShowStudio({ detail }: { detail: ShowDetail }) {
 }
 
 interface OpenShowProps {
-  detail: ShowDetail;
+  detail: Shelved<ShowDetail>;
   songTitle: string;
   layout: Layout;
   beatMap: BeatMap;
@@ -156,7 +157,8 @@ function OpenShow({ detail, songTitle, layout, beatMap, score }: OpenShowProps) 
         draft={{
           userId: session.user.id,
           showId: show.id,
-          server: { revision: draft.revision, source: draft.source },
+          server: detail.keptAt === undefined ? draft : null,
+          remembered: draft,
           savedAt: draft.savedAt,
           transport: saver,
           signedInAt: dataUpdatedAt,

@@ -3,16 +3,21 @@ import type { EndpointCall } from "../../../shared/contract.ts";
 import { assignmentsContract } from "../../../shared/contracts/assignments.ts";
 import type { AssignmentId, ClassId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
+import { askOrRecall } from "../../lib/offline-shelf.ts";
 
 export const assignmentsQuery = queryOptions({
   queryKey: ["assignments", "list"],
-  queryFn: async ({ signal }) => (await callApi(assignmentsContract.list, {}, signal)).assignments,
+  queryFn: async ({ signal }) =>
+    (await askOrRecall("assignments", () => callApi(assignmentsContract.list, {}, signal))).assignments,
 });
 
 export const assignmentQuery = (assignmentId: AssignmentId) =>
   queryOptions({
     queryKey: ["assignments", "one", assignmentId],
-    queryFn: ({ signal }) => callApi(assignmentsContract.get, { params: { assignmentId } }, signal),
+    queryFn: ({ signal }) =>
+      askOrRecall(`assignment/${assignmentId}`, () =>
+        callApi(assignmentsContract.get, { params: { assignmentId } }, signal),
+      ),
   });
 
 /** What a change to an assignment or a hand-in makes old: lists, shows and the marking queue. */

@@ -2,11 +2,17 @@ import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query
 import type { EndpointCall } from "../../../shared/contract.ts";
 import { authContract, type Session } from "../../../shared/contracts/auth.ts";
 import { callApi } from "../../lib/api-client.ts";
+import { askOrRecall, clearShelf } from "../../lib/offline-shelf.ts";
 
 /** Who is signed in; null when nobody is. */
 export const sessionQuery = queryOptions({
   queryKey: ["auth", "session"],
-  queryFn: async ({ signal }) => (await callApi(authContract.session, {}, signal)).session,
+  queryFn: async ({ signal }) => {
+    const { session, keptAt } = await askOrRecall("session", () => callApi(authContract.session, {}, signal));
+    if (keptAt === undefined && session === null) await clearShelf();
+    // Without the server the person before is believed to be here, for as long as the session would have lasted.
+    return keptAt !== undefined && session !== null && session.endsAt < Date.now() ? null : session;
+  },
   // Every page waits for it: a server that is down is said at once, not after three tries.
   retry: false,
 });
@@ -26,7 +32,10 @@ function useEnter() {
   const client = useQueryClient();
   return (session: Session) => {
     const before = client.getQueryData(sessionQuery.queryKey);
-    if (before?.user.id !== session.user.id) client.clear();
+    if (before?.user.id !== session.user.id) {
+      client.clear();
+      void clearShelf();
+    }
     client.setQueryData(sessionQuery.queryKey, session);
   };
 }
@@ -64,7 +73,8 @@ export function useSignOut() {
   return useMutation({
     mutationFn: ({ everywhere }: { everywhere: boolean }) =>
       callApi(everywhere ? authContract.signOutEverywhere : authContract.signOut, {}),
-    onSuccess: () => {
+    onSuccess: async () => {
+      await clearShelf();
       client.clear();
       client.setQueryData(sessionQuery.queryKey, null);
     },

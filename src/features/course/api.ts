@@ -2,10 +2,12 @@ import { queryOptions, useMutation, useQueryClient } from "@tanstack/react-query
 import type { EndpointResponse } from "../../../shared/contract.ts";
 import { courseContract } from "../../../shared/contracts/course.ts";
 import { callApi } from "../../lib/api-client.ts";
+import { askOrRecall } from "../../lib/offline-shelf.ts";
 
 export const lessonsQuery = queryOptions({
   queryKey: ["course", "lessons"],
-  queryFn: async ({ signal }) => (await callApi(courseContract.lessons, {}, signal)).lessons,
+  queryFn: async ({ signal }) =>
+    (await askOrRecall("lessons", () => callApi(courseContract.lessons, {}, signal))).lessons,
 });
 
 export type LessonDetail = EndpointResponse<typeof courseContract.lesson>;
@@ -13,7 +15,8 @@ export type LessonDetail = EndpointResponse<typeof courseContract.lesson>;
 export const lessonQuery = (lessonId: string) =>
   queryOptions({
     queryKey: ["course", "lesson", lessonId],
-    queryFn: ({ signal }) => callApi(courseContract.lesson, { params: { lessonId } }, signal),
+    queryFn: ({ signal }) =>
+      askOrRecall(`lesson/${lessonId}`, () => callApi(courseContract.lesson, { params: { lessonId } }, signal)),
   });
 
 export interface StepKey {

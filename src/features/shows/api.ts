@@ -3,17 +3,21 @@ import type { EndpointCall } from "../../../shared/contract.ts";
 import { showsContract } from "../../../shared/contracts/shows.ts";
 import type { ShowId, VersionId } from "../../../shared/ids.ts";
 import { callApi } from "../../lib/api-client.ts";
+import { askOrRecall } from "../../lib/offline-shelf.ts";
 
 export const showsQuery = (archived: "yes" | "no" = "no") =>
   queryOptions({
     queryKey: ["shows", "list", archived],
-    queryFn: async ({ signal }) => (await callApi(showsContract.list, { query: { archived } }, signal)).shows,
+    queryFn: async ({ signal }) =>
+      (await askOrRecall(`shows/${archived}`, () => callApi(showsContract.list, { query: { archived } }, signal)))
+        .shows,
   });
 
 export const showQuery = (showId: ShowId) =>
   queryOptions({
     queryKey: ["shows", "one", showId],
-    queryFn: ({ signal }) => callApi(showsContract.get, { params: { showId } }, signal),
+    queryFn: ({ signal }) =>
+      askOrRecall(`show/${showId}`, () => callApi(showsContract.get, { params: { showId } }, signal)),
   });
 
 /** A version never changes, so it is read once. */

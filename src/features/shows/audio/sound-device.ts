@@ -85,8 +85,9 @@ export class LiveDevice implements SoundDevice {
 
   stream(): MediaStream {
     if (!this.#recorded) {
+      // Tone wraps the browser's context in a class of its own, so `instanceof` says nothing here.
       const raw = this.#context.rawContext;
-      if (!(raw instanceof AudioContext)) throw new Error("Only a live context can be recorded.");
+      if (!("createMediaStreamDestination" in raw)) throw new Error("Only a live context can be recorded.");
       this.#recorded = raw.createMediaStreamDestination();
       this.#master.connect(this.#recorded);
     }

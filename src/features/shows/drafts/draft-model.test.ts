@@ -139,14 +139,14 @@ describe("presentSaveStatus", () => {
     ["Saved", "20 seconds ago", []],
     ["Saving", "On its way", [edited("a")]],
     ["Saving", "On its way", [edited("a"), sent("k")]],
-    ["Only on this computer", "I keep trying", [edited("a"), sent("k"), { type: "unanswered", idempotencyKey: "k" }]],
+    ["Kept on this computer", "I keep trying", [edited("a"), sent("k"), { type: "unanswered", idempotencyKey: "k" }]],
     [
-      "Only on this computer",
+      "Kept on this computer",
       "Sign in again",
       [edited("a"), sent("k"), { type: "session-ended", idempotencyKey: "k" }],
     ],
     [
-      "Only on this computer",
+      "Kept on this computer",
       "Too long.",
       [edited("a"), sent("k"), { type: "refused", idempotencyKey: "k", reason: "Too long." }],
     ],

@@ -57,20 +57,28 @@ export class DraftStore {
     return this.#state;
   }
 
-  /** Takes up what the server has and what this computer held back; gives back the text to edit. */
-  async open(server: ServerText | null, savedAt: number | null = null): Promise<string> {
+  /**
+   * Takes up what the server has and what this computer held back; gives back the text to edit. Without
+   * an answer of the server, `remembered` is what it said some time ago: used when nothing was held back.
+   */
+  async open(
+    server: ServerText | null,
+    savedAt: number | null = null,
+    remembered: ServerText | null = null,
+  ): Promise<string> {
     const { key, storage } = this.#options;
-    this.#state = createDraftState(server ?? { revision: 0, source: "" }, savedAt);
+    this.#state = createDraftState(server ?? remembered ?? { revision: 0, source: "" }, savedAt);
     try {
       const kept = await storage.listDrafts(key.userId, key.showId);
       kept.sort((a, b) => Number(isUnsaved(b)) - Number(isUnsaved(a)) || b.keptAt - a.keptAt);
-      const [latest, ...older] = kept;
+      const [latest] = kept;
       if (latest) this.#state = { ...restoreDraftState(latest, server), savedAt };
       if (latest || server) await this.#keepNow();
-      // Each text is safe in its new place before its old one is given up.
-      for (const draft of older)
-        if (isUnsaved(draft) && draft.source !== this.#state.source) await this.#putAside(draft.source);
-      for (const draft of kept) if (draft.writer !== key.writer) await storage.deleteDraft(draft);
+      // Each text is safe in its new place before its old one is given up. That goes for the one taken up
+      // as well: its tab may still be open, and what is typed here is not meant to write over it.
+      const others = kept.filter((draft) => draft.writer !== key.writer);
+      for (const source of new Set(others.filter(isUnsaved).map((draft) => draft.source))) await this.#putAside(source);
+      for (const draft of others) await storage.deleteDraft(draft);
     } catch {
       this.#dispatch({ type: "keeping-failed" });
     }

@@ -2,7 +2,7 @@ import { hasUnsavedText, type DraftState } from "./draft-model.ts";
 
 /** What the save state says, always as text. `tone` only picks an icon and a colour. */
 export interface SaveStatus {
-  readonly label: "Saved" | "Saving" | "Only on this computer" | "Only in this tab" | "Two versions";
+  readonly label: "Saved" | "Saving" | "Kept on this computer" | "Only in this tab" | "Two versions";
   readonly detail: string;
   readonly tone: "calm" | "busy" | "careful";
 }
@@ -26,7 +26,7 @@ export function presentSaveStatus(state: DraftState, now: number): SaveStatus {
       detail: "This browser can not keep the text. Do not close the tab until it is saved.",
       tone: "careful",
     };
-  return { label: "Only on this computer", detail: presentReason(state), tone: "careful" };
+  return { label: "Kept on this computer", detail: presentReason(state), tone: "careful" };
 }
 
 function presentReason(state: DraftState): string {

@@ -10,6 +10,8 @@ export interface DraftSource {
   readonly showId: string;
   /** What the server has; null when it does not answer. Read once: later it comes as the answer to a save. */
   readonly server: ServerText | null;
+  /** What it said some time ago, when it does not answer. */
+  readonly remembered: ServerText | null;
   /** When the server saved it, in milliseconds since 1970. */
   readonly savedAt: number | null;
   readonly transport: DraftTransport;
@@ -37,7 +39,15 @@ function getWriter(): string {
 }
 
 /** Opens a show's draft and keeps it saved as long as the caller is on screen. */
-export function useDraft({ userId, showId, server, savedAt, transport, signedInAt }: DraftSource): OpenDraft {
+export function useDraft({
+  userId,
+  showId,
+  server,
+  remembered,
+  savedAt,
+  transport,
+  signedInAt,
+}: DraftSource): OpenDraft {
   const store = useDisposable(
     () =>
       new DraftStore({
@@ -51,7 +61,7 @@ export function useDraft({ userId, showId, server, savedAt, transport, signedInA
   const [opened, setOpened] = useState<DraftStore | null>(null);
   useEffect(() => {
     if (!store) return;
-    void store.open(server, savedAt).then(() => setOpened(store));
+    void store.open(server, savedAt, remembered).then(() => setOpened(store));
     const keep = () => void store.flush();
     const resume = () => store.resume();
     document.addEventListener("visibilitychange", keep);
