@@ -3,9 +3,10 @@ import { colorsNamed } from "culori";
 import { COLOUR_NAMES } from "./colour-names.ts";
 import { RUN_FINDINGS } from "./problems/findings.ts";
 import { PROBLEMS } from "./problems/index.ts";
+import { TYPE_NOTES } from "./problems/types.ts";
 import { ALLOWED_GLOBALS, GLOBAL_WORDS } from "./words.ts";
 
-const ENTRIES = Object.entries({ ...PROBLEMS, ...RUN_FINDINGS });
+const ENTRIES = Object.entries({ ...PROBLEMS, ...RUN_FINDINGS, ...TYPE_NOTES });
 const MAX_WORDS = 20;
 const MAX_GRADE = 6;
 const MAX_AVERAGE_GRADE = 4;

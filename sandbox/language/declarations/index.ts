@@ -1,0 +1,2 @@
+export { buildDeclarations } from "./build.ts";
+export { LIBRARY_DECLARATIONS } from "./lib.ts";

@@ -1,0 +1,55 @@
+import type { WordEntry } from "./entry.ts";
+
+export const OTHER_WORDS: readonly WordEntry[] = [
+  {
+    word: "hue",
+    owners: ["script"],
+    group: "colour",
+    type: "(degrees: number): Colour",
+    usage: "hue(degrees)",
+    meaning: "A colour of the rainbow, 0 to 360.",
+    snippet: "hue(${120})",
+    example: "square.all.on();\nrepeat(12, (turn) => {\n  square.all.colour(hue(turn * 30), 2);\n  wait(2);\n});",
+  },
+  {
+    word: "roll",
+    owners: ["script"],
+    group: "chance",
+    type: "(sides: number): number",
+    usage: "roll(sides)",
+    meaning: "A number from 1 up, as a die gives it.",
+    snippet: "roll(${6})",
+    example: "repeat(16, () => {\n  square.fronts.first(roll(20)).pulse(2);\n  wait(2);\n});",
+  },
+  {
+    word: "chance",
+    owners: ["script"],
+    group: "chance",
+    type: "(percent: number): boolean",
+    usage: "chance(percent)",
+    meaning: "True that often.",
+    snippet: "chance(${50})",
+    example: "for (const front of square.fronts) {\n  if (chance(50)) {\n    front.on();\n  }\n  wait(1);\n}",
+  },
+  {
+    word: "oneOf",
+    owners: ["script"],
+    group: "chance",
+    type: "<Item>(list: ArrayLike<Item>): Item",
+    usage: "oneOf(list)",
+    meaning: "One of a list, by luck.",
+    snippet: "oneOf(${list})",
+    example:
+      'repeat(16, () => {\n  oneOf(square.fronts).pulse(4, oneOf(["gold", "tomato", "skyblue"]));\n  wait(2);\n});',
+  },
+  {
+    word: "log",
+    owners: ["console"],
+    group: "notes",
+    type: "(...values: unknown[]): void",
+    usage: "console.log(value)",
+    meaning: "Writes a note. Nothing lights up.",
+    snippet: "console.log(${value});",
+    example: 'console.log("The song has", song.bars.length, "bars.");\nsquare.all.on();',
+  },
+];
