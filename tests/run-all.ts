@@ -6,6 +6,7 @@ import { ensureClientBuild } from "../server/cli/client-build.ts";
 import { ensureNativeModule } from "../server/cli/native-module.ts";
 import { STATIC_CHECKS, type StaticCheck } from "./support/static-checks.ts";
 import { ensureChromium } from "./support/chromium.ts";
+import { ensureFfmpeg } from "./support/ffmpeg.ts";
 
 /**
  * `npm test`: every check, all of them even when one fails. The static checks run two at a time, the
@@ -95,6 +96,7 @@ function runVitest(name: string, args: readonly string[]): void {
 
 try {
   ensureChromium(say);
+  ensureFfmpeg(say);
   await Promise.all([ensureNativeModule(say), ensureClientBuild(say)]);
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);
