@@ -20,6 +20,8 @@ export interface SceneOptions {
   readonly side: Side;
   readonly view: View;
   readonly dpr: number;
+  /** Whether lit lamps glow beyond their edges. */
+  readonly hasBloom: boolean;
 }
 
 /**
@@ -29,6 +31,7 @@ export interface SceneOptions {
 export class SideScene {
   readonly fronts: readonly FrontGeometry[];
   readonly #size: PictureSize;
+  readonly #bloom: number;
   readonly #base: Surface;
   readonly #trees: Surface;
   readonly #people: Surface;
@@ -40,7 +43,8 @@ export class SideScene {
   readonly #houseLights: LightPainter;
   readonly #treeLights: LightPainter;
 
-  constructor({ layout, side, view, dpr }: SceneOptions) {
+  constructor({ layout, side, view, dpr, hasBloom }: SceneOptions) {
+    this.#bloom = hasBloom ? BLOOM : 0;
     const { width, height } = view;
     this.fronts = sideGeometry(layout, side, view);
     const houses = this.fronts.filter((front) => front.facade);
@@ -83,7 +87,7 @@ export class SideScene {
     context.drawImage(this.#trees.canvas, 0, 0, width, height);
     context.globalCompositeOperation = "lighter";
     const litOnTrees = this.#treeLights.draw(context, rgb);
-    context.globalAlpha = BLOOM;
+    context.globalAlpha = this.#bloom;
     context.drawImage(this.#twelfth.canvas, 0, 0, width, groundY + SPILL);
     context.globalAlpha = 1;
     context.globalCompositeOperation = "source-over";

@@ -24,16 +24,19 @@ export interface StageSize {
 export class Stage {
   readonly #canvas: HTMLCanvasElement;
   readonly #context: CanvasRenderingContext2D;
+  readonly #hasBloom: boolean;
   #layout: Layout;
   #side: Side = "north";
   #first = 0;
   #size: StageSize | null = null;
   #scene: SideScene | null = null;
 
-  constructor(canvas: HTMLCanvasElement, layout: Layout) {
+  /** Without bloom the lit areas are those in which flashes are measured. */
+  constructor(canvas: HTMLCanvasElement, layout: Layout, { hasBloom = true }: { readonly hasBloom?: boolean } = {}) {
     this.#canvas = canvas;
     this.#context = getContext(canvas, false);
     this.#layout = layout;
+    this.#hasBloom = hasBloom;
   }
 
   get side(): Side {
@@ -90,6 +93,7 @@ export class Stage {
       side: this.#side,
       view: { width, height, first: this.#first, count },
       dpr,
+      hasBloom: this.#hasBloom,
     });
     return this.#scene;
   }
