@@ -44,6 +44,53 @@ describe("listUses", () => {
     expect(lines("const [a, b] = square.all.split(2);\nconst c = [a, b];", "list")).toEqual(["1 [ ]", "2 [ ]"]);
     expect(lines(SCRIPT, "song-data")).toEqual(["13 song.section"]);
   });
+  it("finds every kind of loop and condition of the language", () => {
+    const script = `for (let i = 0; i < 2; i++) wait(1);
+for (const front of square.fronts) front.on();
+while (now() < 8) wait(1);
+do {
+  wait(1);
+} while (now() < 16);
+square.fronts.forEach((front) => front.off());
+switch (roll(2)) {
+  case 1:
+    square.all.on(chance(50) ? 40 : 90);
+}
+`;
+    expect(lines(script, "loop")).toEqual(["1 for", "2 for", "3 while", "4 while", "7 forEach"]);
+    expect(lines(script, "condition")).toEqual(["8 switch", "10 ? :"]);
+    expect(lines(script, "nested-loop")).toEqual([]);
+  });
+  it("finds a loop in a loop through callbacks and blocks, three deep too", () => {
+    const script = `repeat(2, () => {
+  if (now() < 4) {
+    square.fronts.forEach((front) => {
+      for (const light of front.lights) light.on();
+    });
+  }
+});
+`;
+    expect(lines(script, "nested-loop")).toEqual(["3 forEach", "4 for"]);
+  });
+  it("finds functions however they are written, and counts parameters with a default", () => {
+    const script = `function a() {}
+const b = function (level: number) {};
+const c = (lights: Lights, beats = 1) => lights.pulse(beats);
+at(4, () => a());
+`;
+    expect(lines(script, "function")).toEqual(["1 a", "2 b", "3 c"]);
+    expect(lines(script, "function-with-parameters")).toEqual(["2 b", "3 c"]);
+  });
+  it("finds what is read of the song by point, bracket and pattern, and of nothing else called song", () => {
+    const script = `const { bars, sections: parts } = song;
+at(song["beats"], () => square.all.on());
+at((song).end, () => square.all.off());
+console.log("song.bars", parts.length, bars.length);
+const mine = { song: 1 };
+console.log(mine.song);
+`;
+    expect(lines(script, "song-data")).toEqual(["1 song.bars", "1 song.sections", '2 song["beats"]', "3 song.end"]);
+  });
   it("finds words of the language, but not in comments, texts or names that the script gives", () => {
     expect(lines("// wait(1)\nlet bar = 'repeat';\nsquare.all.on();\nbar.length;", "word")).toEqual([
       "3 on",

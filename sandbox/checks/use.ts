@@ -39,6 +39,7 @@ export function listUses(source: string): Use[] {
         ...(loop === null ? [] : [["loop", loop] as const]),
         ...(loop === null || loopDepth === 0 ? [] : [["nested-loop", loop] as const]),
         ...functionUses(node),
+        ...songUses(node),
         ...otherUses(node),
       ];
       const line = file.getLineAndCharacterOfPosition(node.getStart(file)).line + 1;
@@ -101,6 +102,20 @@ function ownFunction(node: ts.Node): { readonly name: string; readonly parameter
   return { name: node.name.text, parameters: initializer.parameters.length };
 }
 
+/** What is read of `song`: behind a point, in brackets, or taken apart by a pattern. */
+function songUses(node: ts.Node): (readonly [UseKind, string])[] {
+  if (ts.isPropertyAccessExpression(node) && isSong(node.expression)) return [["song-data", `song.${node.name.text}`]];
+  if (ts.isElementAccessExpression(node) && isSong(node.expression))
+    return [["song-data", `song[${node.argumentExpression.getText()}]`]];
+  if (!ts.isVariableDeclaration(node) || !ts.isObjectBindingPattern(node.name) || !isSong(node.initializer)) return [];
+  return node.name.elements.map(({ propertyName, name }) => ["song-data", `song.${(propertyName ?? name).getText()}`]);
+}
+
+function isSong(node: ts.Node | undefined): boolean {
+  if (node === undefined) return false;
+  return ts.isParenthesizedExpression(node) ? isSong(node.expression) : ts.isIdentifier(node) && node.text === "song";
+}
+
 function otherUses(node: ts.Node): (readonly [UseKind, string])[] {
   if (ts.isIfStatement(node)) return [["condition", "if"]];
   if (ts.isSwitchStatement(node)) return [["condition", "switch"]];
@@ -108,12 +123,7 @@ function otherUses(node: ts.Node): (readonly [UseKind, string])[] {
   if (ts.isArrayLiteralExpression(node) || ts.isElementAccessExpression(node) || ts.isArrayBindingPattern(node))
     return [["list", "[ ]"]];
   if (ts.isPropertyAccessExpression(node)) {
-    const { expression, name } = node;
-    const isSong = ts.isIdentifier(expression) && expression.text === "song";
-    return [
-      ...(isSong ? [["song-data", `song.${name.text}`] as const] : []),
-      ...(MEMBERS.has(name.text) ? [["word", name.text] as const] : []),
-    ];
+    return MEMBERS.has(node.name.text) ? [["word", node.name.text]] : [];
   }
   if (ts.isIdentifier(node) && GLOBALS.has(node.text) && standsAlone(node)) return [["word", node.text]];
   return [];
