@@ -1,14 +1,21 @@
 import { describe, expect, it } from "vitest";
-import { buildSong } from "../../../../tests/factories/small-show.ts";
+import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { listMomentCodes } from "./moment-code.ts";
 
-const song = buildSong({
+/** Eight bars of four. */
+const song: BeatMap = {
+  version: 1,
+  beats: Array.from({ length: 33 }, (_, beat) => beat * 500_000),
+  beatsPerBar: 4,
+  bars: Array.from({ length: 8 }, (_, bar) => ({ number: bar + 1, start: bar * 4, beats: 4 })),
   sections: [
     { name: "verse", start: 4, end: 12 },
     { name: "chorus", start: 12, end: 20 },
     { name: "chorus", start: 20, end: 28 },
   ],
-});
+  instruments: [],
+  loudness: [],
+};
 const codes = (bar: number, beat: number) => listMomentCodes(song, bar, beat).map(({ code }) => code);
 
 describe("listMomentCodes", () => {
