@@ -121,6 +121,8 @@ export const MAX_CUES = 100_000;
 export const MAX_CHANGES = 4_000_000;
 /** A loop that wrote this many cues at one moment stands still. */
 export const STOOD_STILL_CUES = 10_000;
+/** The same in changes: on a large group a loop is at their limit after few cues. */
+export const STOOD_STILL_CHANGES = MAX_CHANGES / 2;
 export const MAX_NOTES = 1000;
 /** Calls of the script's own functions inside each other. */
 export const MAX_CALL_DEPTH = 100;

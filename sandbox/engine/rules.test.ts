@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { buildFront } from "../../tests/factories/small-show.ts";
 import { compileScript } from "../language/compile.ts";
 import { cuesOf, listCues, printed, runScript, runWell } from "../../tests/support/run-script.ts";
 
@@ -345,6 +346,23 @@ square.all
     expect(await problemOf("while (true) {}")).toBe("endless");
     expect(await problemOf("while (true) { square.all[0].on(); wait(0.001); }")).toBe("too-many-cues");
     expect(await problemOf("while (true) { square.all[0].on(); }")).toBe("clock-stood-still");
+  });
+
+  it("34: a loop in which the clock stands still is told so on a large group, too", async () => {
+    // 5000 lights: 800 cues are all the changes that a run may write.
+    const pixels = Array.from({ length: 5 }, () => 1000);
+    const large = { layout: buildFront(...pixels) };
+    const codeOf = async (source: string): Promise<string> => {
+      const outcome = await runScript(source, large);
+      return outcome.ok ? "none" : outcome.problem.code;
+    };
+    expect(await codeOf("while (true) square.all.on();")).toBe("clock-stood-still");
+    expect(await codeOf("wait(1);\nwhile (true) { square.all.on(); square.all.off(); }")).toBe("clock-stood-still");
+    expect(await codeOf("while (true) { square.all.on(); wait(0.001); }")).toBe("too-many-changes");
+    expect(await codeOf("for (let i = 0; i < 900; i++) {\n  square.all.on();\n  if (i % 300 === 0) wait(1);\n}")).toBe(
+      "too-many-changes",
+    );
+    expect(await codeOf("for (let i = 0; i < 800; i++) square.all.on();")).toBe("none");
   });
 
   it("34: 100 calls deep runs and 101 do not; through the library 25", async () => {

@@ -4,6 +4,11 @@ import ts from "typescript";
 export const MAX_NESTING = 80;
 /** How long a chain (`a.b().c()`, `1 + 2 + 3`) may get: keeps every later walk of the tree in its stack. */
 const MAX_CHAIN = 400;
+/**
+ * Levels of the tree past which a host's stack may end first, in the parser: on one host it does, on
+ * another it does not. Scripts within `MAX_NESTING` stay far below.
+ */
+const MAX_LEVELS = 300;
 
 const OPENING = "([{";
 const CLOSING = ")]}";
@@ -45,6 +50,7 @@ function endOfText(text: string, from: number, quote: string): number {
 
 /** Levels that a construct costs in the engine's parser, beside its place in the tree. */
 function weightOf(node: ts.Node): number {
+  if (ts.isTypeNode(node)) return 1;
   switch (node.kind) {
     case ts.SyntaxKind.Block:
     case ts.SyntaxKind.CaseBlock:
@@ -65,6 +71,9 @@ function weightOf(node: ts.Node): number {
     case ts.SyntaxKind.TypeOfExpression:
     case ts.SyntaxKind.VoidExpression:
     case ts.SyntaxKind.DeleteExpression:
+    case ts.SyntaxKind.AwaitExpression:
+    case ts.SyntaxKind.YieldExpression:
+    case ts.SyntaxKind.SpreadElement:
     case ts.SyntaxKind.ConditionalExpression:
     case ts.SyntaxKind.IfStatement:
     case ts.SyntaxKind.ForStatement:
@@ -97,26 +106,37 @@ interface Waiting {
   readonly node: ts.Node;
   readonly depth: number;
   readonly chain: number;
+  /** Levels of the tree, whatever they weigh. */
+  readonly level: number;
 }
 
 /**
  * Offset of the first construct that nests deeper than `MAX_NESTING`, or of a chain that is too
- * long; -1 when there is none. Walks without recursion.
+ * long; -1 when there is none. Past `MAX_LEVELS` it is the start of the script, as on a host whose stack
+ * ended. Walks without recursion.
  */
 export function findDeepNode(file: ts.SourceFile): number {
   let deepest = -1;
-  const waiting: Waiting[] = [{ node: file, depth: 0, chain: 0 }];
+  const waiting: Waiting[] = [{ node: file, depth: 0, chain: 0, level: 0 }];
   for (let next = waiting.pop(); next !== undefined; next = waiting.pop()) {
-    const { node, depth, chain } = next;
+    const { node, depth, chain, level } = next;
+    if (level > MAX_LEVELS) return 0;
     if (depth > MAX_NESTING || chain > MAX_CHAIN) {
       const start = node.getStart(file);
       if (deepest < 0 || start < deepest) deepest = start;
-      continue;
+      // A long chain ends the walk here; what nests is followed, to see how deep it goes.
+      if (chain > MAX_CHAIN) continue;
     }
     const left = leftOperand(node);
     const inner = depth + weightOf(node);
     ts.forEachChild(node, (child) => {
-      waiting.push({ node: child, depth: child === left ? depth : inner, chain: child === left ? chain + 1 : 0 });
+      const goesOn = child === left;
+      waiting.push({
+        node: child,
+        depth: goesOn ? depth : inner,
+        chain: goesOn ? chain + 1 : 0,
+        level: goesOn ? level : level + 1,
+      });
     });
   }
   return deepest;

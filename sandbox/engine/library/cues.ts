@@ -1,4 +1,12 @@
-import { BUFFER_MARK, CUE_WORDS, HEAD_WORDS, MAX_CHANGES, MAX_CUES, STOOD_STILL_CUES } from "../guest.ts";
+import {
+  BUFFER_MARK,
+  CUE_WORDS,
+  HEAD_WORDS,
+  MAX_CHANGES,
+  MAX_CUES,
+  STOOD_STILL_CHANGES,
+  STOOD_STILL_CUES,
+} from "../guest.ts";
 import { fail, notice, state, toTick } from "./state.ts";
 
 /**
@@ -17,7 +25,9 @@ let words = new Uint32Array(FIRST_CUES * CUE_WORDS);
 let kept = 0;
 let written = 0;
 let changes = 0;
+/** Cues and changes written before the clock came to where it is. */
 let stoodSince = 0;
+let stoodSinceChanges = 0;
 let lastClock = -1;
 
 const selections: Uint16Array[] = [];
@@ -81,7 +91,8 @@ function grow(): void {
 }
 
 function failTooMuch(code: "too-many-cues" | "too-many-changes", limit: number): never {
-  return fail(written - stoodSince > STOOD_STILL_CUES ? "clock-stood-still" : code, { limit });
+  const stoodStill = written - stoodSince > STOOD_STILL_CUES || changes - stoodSinceChanges > STOOD_STILL_CHANGES;
+  return fail(stoodStill ? "clock-stood-still" : code, { limit });
 }
 
 /**
@@ -106,6 +117,7 @@ export function writeCue(
   if (clock !== lastClock) {
     lastClock = clock;
     stoodSince = written;
+    stoodSinceChanges = changes;
   }
   changes += lights;
   // What is dropped counts too: a loop that writes behind the end has to stop.
