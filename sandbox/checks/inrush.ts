@@ -37,7 +37,7 @@ export function findInrush(context: CheckContext): Finding[] {
   const [worst] = over;
   if (worst === undefined) return [];
   const { circuit, start, amps, limit } = worst;
-  const others = over.length === 1 ? "" : ` So may ${countWord(over.length - 1, "other circuit")}.`;
+  const others = over.length === 1 ? "" : ` ${countWord(over.length - 1, "other circuit")} may, too.`;
   return [
     buildFinding(context, "circuit-inrush", {
       sentence: `Old lamps on the circuit "${circuit.id}" may take ${Math.round(amps)} A for a moment in ${nameBar(song, start.tick)}.`,

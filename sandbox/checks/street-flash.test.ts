@@ -53,14 +53,19 @@ describe("shows that do not flash", () => {
 describe("shows that flash", () => {
   it("stops the whole square pulsing on half beats: 4 a second", () => {
     const found = findStreetFlashes(context(every(0.5, (beat) => pulse(beat, ALL, 0.5, undefined, 7))));
-    expect(found.map(({ rule, severity }) => [rule, severity])).toEqual([
-      ["street-flash", "stop"],
-      ["street-flash", "stop"],
-    ]);
+    expect(found.map(({ rule, severity }) => [rule, severity])).toEqual([["street-flash", "stop"]]);
     expect(found[0]).toMatchObject({ measured: { value: 4, limit: 3, unit: "flashes a second" }, lines: [7] });
     expect(found[0]?.sentence).toBe(
-      "The north side flashes 4 times in one second in bar 1. More than 3 can harm people.",
+      "The north and south sides flash 4 times in one second in bar 1. More than 3 can harm people.",
     );
+  });
+  it("names every line that flashes too often, wherever in the show", () => {
+    const cues = [0, 16].flatMap((from) =>
+      Array.from({ length: 8 }, (_, turn) => pulse(from + turn / 2, NORTH, 0.5, undefined, from + 2)),
+    );
+    const [found] = findStreetFlashes(context(cues));
+    expect(found).toMatchObject({ lines: [2, 18], measured: { value: 4 } });
+    expect(found?.sentence).toMatch(/^The north side flashes 4 times in one second in bar 1\./);
   });
   it("stops two halves of a side that each pulse on the beat, half a beat apart", () => {
     const cues = every(1, (beat) => [pulse(beat, NORTH.slice(0, 5), 1), pulse(beat + 0.5, NORTH.slice(5), 1)]);

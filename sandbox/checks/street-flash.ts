@@ -1,10 +1,10 @@
 import type { Side } from "../../shared/contracts/square.ts";
 import type { Finding } from "../engine/model.ts";
 import type { Light } from "../square/lights.ts";
-import { nameBar } from "../timeline/words.ts";
+import { joinWords, nameBar } from "../timeline/words.ts";
 import { createRecall } from "./check-memory.ts";
 import type { CheckContext } from "./context.ts";
-import { buildFinding, linesAt } from "./finding.ts";
+import { buildFinding, linesAt, MOST_PLACES } from "./finding.ts";
 import { groupLights, type LightGroup } from "./light-groups.ts";
 import { isWithinSecond, listEvents, listRises } from "./rises.ts";
 import type { EventRules } from "./rules.ts";
@@ -150,50 +150,76 @@ function findLongestRun(
   return longest;
 }
 
-/** Finds views with more events a second than allowed, and long runs at the limit. */
+/** Finds views with more events a second than allowed, one finding for all sides, and long runs at the limit. */
 export function findStreetFlashes(context: CheckContext): Finding[] {
-  const { rules } = context;
+  const { flashesPerSecond, flashLongRunSeconds } = context.rules;
   const counts = countStreetFlashes(context);
-  const findings: Finding[] = [];
-  const isAnySideOver = counts.some(({ side, worst }) => side !== null && worst > rules.flashesPerSecond);
-  for (const count of counts) {
-    if (count.worst > rules.flashesPerSecond) {
-      if (count.side === null && isAnySideOver) continue;
-      findings.push(describeOver(context, count));
-    } else if (count.side !== null && count.longestRun > rules.flashLongRunSeconds) {
-      const together = count.events.slice(count.longestRunAt, count.longestRunAt + rules.flashesPerSecond);
-      findings.push(
-        buildFinding(context, "street-flash-long-run", {
-          sentence: `The ${count.side} side flashes ${rules.flashesPerSecond} times a second for ${Math.round(count.longestRun)} seconds.`,
-          hint: "That keeps the limit. A calm bar in between is kinder to people who are sensitive to flashes.",
-          measured: { value: Math.round(count.longestRun * 10) / 10, limit: rules.flashLongRunSeconds, unit: "s" },
-          moments: together.slice(0, 1).map(({ tick }) => tick),
-          lights: together.flatMap(({ lights }) => lights.flat()),
-          lines: together.flatMap(({ tick, lights }) => linesAt(context, tick, lights.flat())),
-        }),
-      );
-    }
-  }
-  return findings;
+  const sides = counts.filter(({ side }) => side !== null);
+  const over = sides.filter(({ worst }) => worst > flashesPerSecond);
+  const together = counts.filter(({ side, worst }) => side === null && worst > flashesPerSecond);
+  const long = sides.filter(({ worst, longestRun }) => worst <= flashesPerSecond && longestRun > flashLongRunSeconds);
+  return [
+    ...(over.length > 0 ? [describeOver(context, "street-flash", over, nameSides(over, sides.length))] : []),
+    ...(over.length === 0 && together.length > 0
+      ? [describeOver(context, "street-flash-all-sides", together, "The sides together flash")]
+      : []),
+    ...long.map((count) => describeLongRun(context, count)),
+  ];
 }
 
-function describeOver(context: CheckContext, { side, events, worst }: FlashCount): Finding {
+/** "The north side flashes", "The north and south sides flash", "3 sides flash". */
+function nameSides(counts: readonly FlashCount[], all: number): string {
+  const names = counts.flatMap(({ side }) => side ?? []);
+  if (names.length === 1) return `The ${names[0]} side flashes`;
+  if (names.length === all && all > 2) return "All sides flash";
+  return names.length > 2 ? `${names.length} sides flash` : `The ${joinWords(names)} sides flash`;
+}
+
+function describeOver(
+  context: CheckContext,
+  rule: "street-flash" | "street-flash-all-sides",
+  counts: readonly FlashCount[],
+  who: string,
+): Finding {
   const limit = context.rules.flashesPerSecond;
-  const bad = events.filter((event, index) => {
-    const fourth = events[index + limit];
-    return fourth !== undefined && isWithinSecond(event.seconds, fourth.seconds);
-  });
-  const first = bad[0];
-  const startsAt = first === undefined ? 0 : events.indexOf(first);
-  const together = events.slice(startsAt, startsAt + limit + 1);
+  const bad = counts.flatMap(({ events }) => listCrowded(events, limit));
+  const worst = Math.max(...counts.map((count) => count.worst));
+  const [first] = bad.toSorted((a, b) => a.seconds - b.seconds);
   const where = first === undefined ? "" : ` in ${nameBar(context.song, first.tick)}`;
-  const who = side === null ? `The sides together flash` : `The ${side} side flashes`;
-  return buildFinding(context, side === null ? "street-flash-all-sides" : "street-flash", {
+  return buildFinding(context, rule, {
     sentence: `${who} ${worst} times in one second${where}. More than ${limit} can harm people.`,
     hint: "Pulse on whole beats, let fewer lights pulse at once, or use fades. The event's safety officer decides.",
     measured: { value: worst, limit, unit: "flashes a second" },
-    moments: bad.map(({ tick }) => tick),
-    lights: together.flatMap(({ lights }) => lights.flat()),
-    lines: together.flatMap(({ tick, lights }) => linesAt(context, tick, lights.flat())),
+    ...placesOf(context, bad),
   });
+}
+
+/** The events that begin a second with more of them than allowed. */
+function listCrowded(events: readonly FlashEvent[], limit: number): FlashEvent[] {
+  return events.filter((event, index) => {
+    const next = events[index + limit];
+    return next !== undefined && isWithinSecond(event.seconds, next.seconds);
+  });
+}
+
+function describeLongRun(context: CheckContext, { side, events, longestRun, longestRunAt }: FlashCount): Finding {
+  const { flashesPerSecond, flashLongRunSeconds } = context.rules;
+  const start = events.slice(longestRunAt, longestRunAt + flashesPerSecond);
+  return buildFinding(context, "street-flash-long-run", {
+    sentence: `The ${side} side flashes ${flashesPerSecond} times a second for ${Math.round(longestRun)} seconds.`,
+    hint: "That keeps the limit. A calm bar in between is kinder to people who are sensitive to flashes.",
+    measured: { value: Math.round(longestRun * 10) / 10, limit: flashLongRunSeconds, unit: "s" },
+    ...placesOf(context, start),
+    moments: start.slice(0, 1).map(({ tick }) => tick),
+  });
+}
+
+/** When, where and by which lines some events happen; of very many the first ones. */
+function placesOf(context: CheckContext, events: readonly FlashEvent[]) {
+  const shown = events.toSorted((a, b) => a.seconds - b.seconds).slice(0, MOST_PLACES);
+  return {
+    moments: shown.map(({ tick }) => tick),
+    lights: shown.flatMap(({ lights }) => lights.flat()),
+    lines: shown.flatMap(({ tick, lights }) => linesAt(context, tick, lights.flat())),
+  };
 }
