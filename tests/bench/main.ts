@@ -5,13 +5,14 @@ import { benchHandIns } from "./hand-ins.ts";
 import { benchPages } from "./pages.ts";
 import { benchRequests } from "./requests.ts";
 import { benchRuns } from "./runs.ts";
+import { benchStudio } from "./studio.ts";
 import type { Figure } from "./measure.ts";
 
 // `npm run bench [-- --json FILE]`: prints each figure; speed is judged by ratios measured in one run.
 const { values } = parseArgs({ options: { json: { type: "string" } } });
 
 const figures: Figure[] = [];
-for (const bench of [benchRuns, benchChecks, benchHandIns, benchRequests, benchPages]) {
+for (const bench of [benchRuns, benchChecks, benchHandIns, benchRequests, benchPages, benchStudio]) {
   for (const figure of await bench()) {
     figures.push(figure);
     const ratio = figure.ratio === null ? "" : `  ${figure.ratio.toFixed(2)} x ${figure.against ?? ""}`;
