@@ -58,7 +58,8 @@ export function MomentsRuler({ song, player, onInsert }: MomentsRulerProps) {
       <ul className="studio-names-list" aria-label="Ways to write this moment">
         {listMomentCodes(song, bar, beat).map(({ code, meaning }) => (
           <li key={code}>
-            <button type="button" aria-label={`Put in ${code.replaceAll("\n", " ")}`} onClick={() => onInsert(code)}>
+            <button type="button" onClick={() => onInsert(code)}>
+              <span className="sr-only">Put in </span>
               <code>{code.replace(/\s+\n?\}/, " ... }")}</code>
               <span>{meaning}</span>
             </button>
