@@ -27,6 +27,7 @@ export const routes: RouteObject[] = [
           { path: "/assignments/:assignmentId", lazy: () => import("./routes/assignment.tsx") },
           { path: "/lessons", lazy: () => import("./routes/lessons.tsx") },
           { path: "/lessons/:lessonId", lazy: () => import("./routes/lesson.tsx") },
+          { path: "/words", lazy: () => import("./routes/words.tsx") },
           { path: "/programme", lazy: () => import("./routes/programme.tsx") },
           { path: "/classes", lazy: () => import("./routes/classes.tsx") },
           { path: "/classes/:classId/:section?", lazy: () => import("./routes/class.tsx") },

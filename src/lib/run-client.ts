@@ -7,7 +7,7 @@ import type { RibbonCells, RibbonSize } from "../../sandbox/timeline/ribbon.ts";
 import type { RunWorker } from "../workers/run.worker.ts";
 
 /** Wall time of one run: the backstop for what fuel can not count. Fuel ends a plain endless loop within about a second. */
-const DEADLINE_MS = 3000;
+const DEADLINE_MS = 5000;
 
 /** One worker with its remote half. */
 interface Seat {

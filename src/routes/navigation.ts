@@ -7,11 +7,13 @@ const ITEMS: Readonly<Record<Role, readonly BandItem[]>> = {
     { to: "/home", label: "Home", icon: "home" },
     { to: "/lessons", label: "Lessons", icon: "book" },
     { to: "/shows", label: "My shows", icon: "ribbon" },
+    { to: "/words", label: "Words", icon: "letters" },
   ],
   teacher: [
     { to: "/classes", label: "Classes", icon: "people" },
     { to: "/marking", label: "Marking", icon: "pencil" },
     { to: "/lessons", label: "Lessons", icon: "book" },
+    { to: "/words", label: "Words", icon: "letters" },
     { to: "/forwarded", label: "Forwarded", icon: "send" },
   ],
   coordinator: [

@@ -5,7 +5,8 @@ import { SONG_WORDS } from "./song-words.ts";
 import { SQUARE_WORDS } from "./square-words.ts";
 import { TIME_WORDS } from "./time-words.ts";
 
-export { type ExampleNames, findExampleNames, writeExample } from "./example-names.ts";
+export { findExampleNames, writeExample } from "./example-names.ts";
+export { takeFirstBars } from "./first-bars.ts";
 export { WORD_GROUPS, type WordEntry, type WordGroup, type WordOwner } from "./entry.ts";
 
 /** Every word of the language, in the order of the reference. */

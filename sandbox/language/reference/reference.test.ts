@@ -1,9 +1,19 @@
 import { describe, expect, it } from "vitest";
 import { demoSong } from "../../../server/db/seed/world/songs/demo-songs.ts";
 import { DEMO_SQUARE } from "../../../server/db/seed/world/square.ts";
+import { BeatMapSchema } from "../../../shared/contracts/songs.ts";
 import { runWell } from "../../../tests/support/run-script.ts";
 import { GLOBAL_WORDS, LIGHTS_MEMBERS, SONG_MEMBERS, SQUARE_MEMBERS } from "../words.ts";
-import { findExampleNames, findWord, listWordsIn, REFERENCE, WORD_GROUPS, wordId, writeExample } from "./index.ts";
+import {
+  findExampleNames,
+  findWord,
+  listWordsIn,
+  REFERENCE,
+  takeFirstBars,
+  WORD_GROUPS,
+  wordId,
+  writeExample,
+} from "./index.ts";
 
 describe("the reference", () => {
   it("has every word of the language, each once", () => {
@@ -23,8 +33,11 @@ describe("the reference", () => {
   });
 });
 
+/** As the page of words runs them. */
+const EXAMPLE_BARS = 16;
+
 describe.each(["quillhaven-bells", "lantern-waltz"])("examples with %s", (id) => {
-  const song = demoSong(id).beatMap;
+  const song = BeatMapSchema.parse(takeFirstBars(demoSong(id).beatMap, EXAMPLE_BARS));
   const names = findExampleNames(DEMO_SQUARE, song);
 
   it.each(REFERENCE.map((entry) => [wordId(entry), entry] as const))(

@@ -125,6 +125,13 @@ export const PAGES: Readonly<Record<string, PageCheck>> = {
     error: "/api/lessons/*",
     dialog: openMenu("Wren"),
   },
+  "/words": {
+    as: "student",
+    open: "/words",
+    empty: { none: "The language always has its words; a search without a hit is shown by the test of the page." },
+    error: "/api/square",
+    dialog: openMenu("Wren"),
+  },
   "/programme": {
     as: "nobody",
     open: "/programme",

@@ -1,7 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { SONG_MEMBERS, SQUARE_MEMBERS, GLOBAL_WORDS, LIGHTS_MEMBERS } from "../../../../sandbox/language/words.ts";
 import { findCompletionPlace } from "./completion-place.ts";
-import { GLOBAL_WORD_NOTES, LIGHTS_WORD_NOTES, SONG_WORD_NOTES, SQUARE_WORD_NOTES } from "./language-words.ts";
 
 describe("findCompletionPlace", () => {
   it.each<[string, unknown]>([
@@ -30,22 +28,5 @@ describe("findCompletionPlace", () => {
     ["square.all.on();\n  rep", { kind: "word", from: 19 }],
   ])("%j", (before, place) => {
     expect(findCompletionPlace(before)).toEqual(place);
-  });
-});
-
-describe("word notes", () => {
-  const named = (notes: readonly { word: string }[]) =>
-    notes.map(({ word }) => (word === "console.log" ? "console" : word)).sort();
-
-  it("explain each word of the language, and no other", () => {
-    expect(named(GLOBAL_WORD_NOTES)).toEqual([...GLOBAL_WORDS].sort());
-    expect(named(SQUARE_WORD_NOTES)).toEqual([...SQUARE_MEMBERS].sort());
-    expect(named(SONG_WORD_NOTES)).toEqual([...SONG_MEMBERS].sort());
-    expect(named(LIGHTS_WORD_NOTES)).toEqual([...LIGHTS_MEMBERS].sort());
-  });
-
-  it("take 12 words or fewer", () => {
-    for (const { meaning } of [...GLOBAL_WORD_NOTES, ...SQUARE_WORD_NOTES, ...SONG_WORD_NOTES, ...LIGHTS_WORD_NOTES])
-      expect(meaning.split(/\s+/).length).toBeLessThanOrEqual(12);
   });
 });

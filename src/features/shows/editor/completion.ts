@@ -7,16 +7,11 @@ import {
 } from "@codemirror/autocomplete";
 import type { Extension } from "@codemirror/state";
 import { getMiniFrontPath } from "../stage/mini-front-path.ts";
+import type { Offer } from "../../../../sandbox/language/assist.ts";
+import { findWord, listWordsOf, REFERENCE, wordId } from "../../../../sandbox/language/reference/index.ts";
+import { CODE_SHAPES, type Shape } from "./code-shapes.ts";
 import { findCompletionPlace, type CompletionPlace } from "./completion-place.ts";
-import {
-  CODE_SHAPES,
-  GLOBAL_WORD_NOTES,
-  LIGHTS_WORD_NOTES,
-  SECTION_WORDS,
-  SONG_WORD_NOTES,
-  SQUARE_WORD_NOTES,
-  type LanguageWord,
-} from "./language-words.ts";
+import type { LanguageClient } from "./language-client.ts";
 import type { ScriptName, ScriptNames } from "./script-names.ts";
 
 /** A completion that carries the name it stands for, for its picture. */
@@ -24,10 +19,16 @@ interface NameCompletion extends Completion {
   readonly scriptName?: ScriptName;
 }
 
-/** Offers the language's words and the names of the square and the song, by place. */
-export function completeScript(getNames: () => ScriptNames): Extension {
+/** The checker loads while the first words are typed; nobody waits for it that long. */
+const PATIENCE_MS = 300;
+
+/**
+ * Offers the language's words, the names of the square and the song, and the script's own names, by
+ * place: as the type checker sees it, or by the look of the line until it has answered.
+ */
+export function completeScript(getNames: () => ScriptNames, client: LanguageClient): Extension {
   return autocompletion({
-    override: [(context) => complete(context, getNames())],
+    override: [(context) => complete(context, getNames(), client)],
     icons: false,
     maxRenderedOptions: 60,
     activateOnTypingDelay: 60,
@@ -36,32 +37,56 @@ export function completeScript(getNames: () => ScriptNames): Extension {
   });
 }
 
-function complete(context: CompletionContext, names: ScriptNames): CompletionResult | null {
+async function complete(
+  context: CompletionContext,
+  names: ScriptNames,
+  client: LanguageClient,
+): Promise<CompletionResult | null> {
   const place = findCompletionPlace(context.state.sliceDoc(0, context.pos));
   if (!place && !context.explicit) return null;
   const at = place ?? ({ kind: "word", from: context.pos } as const);
+  const offers = await Promise.race([
+    client.ask("listOffers", context.state.doc.toString(), context.pos),
+    new Promise<null>((resolve) => setTimeout(resolve, PATIENCE_MS, null)),
+  ]);
   return {
     from: at.from,
-    options: listOptions(at, names, context),
+    options: offers && offers.length > 0 ? toOptions(offers, at, names) : listOptions(at, names, context),
     validFor: at.kind === "name" ? /^[^"'`]*$/ : /^\w*$/,
   };
 }
 
-function listOptions(place: CompletionPlace, names: ScriptNames, context: CompletionContext): Completion[] {
-  if (place.kind === "name") return names[place.names].map(toNameCompletion);
-  if (place.kind === "word")
-    return [...GLOBAL_WORD_NOTES, ...CODE_SHAPES].map(toWordCompletion).concat(listOwnNames(context, place.from));
-  if (place.of === "square") return SQUARE_WORD_NOTES.map(toWordCompletion);
-  if (place.of === "song") return SONG_WORD_NOTES.map(toWordCompletion);
-  if (place.of === "section")
-    return SONG_WORD_NOTES.filter(({ word }) => SECTION_WORDS.includes(word)).map(toWordCompletion);
-  return LIGHTS_WORD_NOTES.map(toWordCompletion);
+/** The checker's offers; shapes of code where a statement may begin. */
+function toOptions(offers: readonly Offer[], place: CompletionPlace, names: ScriptNames): Completion[] {
+  const known = new Map(Object.values(names).flatMap((list) => list.map((one) => [one.name, one] as const)));
+  const options = offers.map((offer): Completion => {
+    const entry = offer.wordId === null ? undefined : WORDS.get(offer.wordId);
+    if (entry) return toWordCompletion(entry);
+    if (offer.kind === "name") return toNameCompletion(known.get(offer.name) ?? { name: offer.name, note: "" });
+    return offer.kind === "own" ? { label: offer.name, detail: "yours", boost: 1 } : { label: offer.name };
+  });
+  return place.kind === "word" ? [...options, ...WRITES, ...CODE_SHAPES.map(toWordCompletion)] : options;
 }
 
-function toWordCompletion({ word, usage, meaning, snippet }: LanguageWord): Completion {
+function listOptions(place: CompletionPlace, names: ScriptNames, context: CompletionContext): Completion[] {
+  if (place.kind === "name") return names[place.names].map(toNameCompletion);
+  if (place.kind === "member") return listWordsOf(place.of).map(toWordCompletion);
+  return [
+    ...[...listWordsOf("script"), ...CODE_SHAPES].map(toWordCompletion),
+    ...WRITES,
+    ...listOwnNames(context, place.from),
+  ];
+}
+
+function toWordCompletion({ word, usage, meaning, snippet }: Shape): Completion {
   const option: Completion = { label: word, displayLabel: usage, detail: meaning };
   return snippet ? snippetCompletion(snippet, option) : option;
 }
+
+const WORDS = new Map(REFERENCE.map((entry) => [wordId(entry), entry]));
+const LOG = findWord("console", "log");
+/** `console.log` is one word to its writers. */
+const WRITES: readonly Completion[] = LOG ? [toWordCompletion({ ...LOG, word: "console.log" })] : [];
 
 function toNameCompletion(scriptName: ScriptName): NameCompletion {
   return { label: scriptName.name, detail: scriptName.note, scriptName };

@@ -15,11 +15,15 @@ import {
 import type { Problem } from "../../../../sandbox/engine/model.ts";
 import { adoptEditorStyles } from "./adopt-styles.ts";
 import { completeScript } from "./completion.ts";
+import { LanguageClient } from "./language-client.ts";
+import { type AskName, languageKeys, layOut } from "./language-keys.ts";
+import { languageNotes } from "./language-notes.ts";
+import { languageTooltips } from "./language-tooltips.ts";
 import "./editor.css";
 import { createGlowLines, type GlowLines } from "./glow-lines.ts";
 import { nounMarks } from "./noun-marks.ts";
 import { problemNotes, showProblem } from "./problem-note.ts";
-import type { ScriptNames } from "./script-names.ts";
+import { type ScriptNames, toNameTable } from "./script-names.ts";
 import { syntaxClasses } from "./syntax-classes.ts";
 
 export interface ScriptEditorOptions {
@@ -31,6 +35,7 @@ export interface ScriptEditorOptions {
   readonly onChange: (source: string) => void;
   readonly onRun: () => void;
   readonly onSave: () => void;
+  readonly askName: AskName;
 }
 
 /** Marks changes that the program made, so that they are not taken for the author's typing. */
@@ -40,11 +45,13 @@ const fromOutside = Annotation.define<true>();
 export class ScriptEditor {
   readonly #view: EditorView;
   readonly #glow: GlowLines = createGlowLines();
+  readonly #language: LanguageClient;
   #names: ScriptNames;
 
   constructor(options: ScriptEditorOptions) {
     adoptEditorStyles();
     this.#names = options.names;
+    this.#language = new LanguageClient(toNameTable(options.names));
     this.#view = new EditorView({
       parent: options.parent,
       state: EditorState.create({
@@ -69,6 +76,12 @@ export class ScriptEditor {
 
   setNames(names: ScriptNames): void {
     this.#names = names;
+    this.#language.setNames(toNameTable(names));
+  }
+
+  /** Lays the script out by the rules of the language; one undo step. */
+  layOut(): Promise<void> {
+    return layOut(this.#language, this.#view);
   }
 
   setProblem(problem: Problem | null): void {
@@ -116,6 +129,7 @@ export class ScriptEditor {
   }
 
   dispose(): void {
+    this.#language.dispose();
     this.#view.destroy();
   }
 
@@ -139,7 +153,7 @@ export class ScriptEditor {
     ];
   }
 
-  #createExtensions({ hintId, onChange }: ScriptEditorOptions): Extension {
+  #createExtensions({ hintId, onChange, askName }: ScriptEditorOptions): Extension {
     return [
       lineNumbers(),
       this.#glow.extension,
@@ -157,7 +171,10 @@ export class ScriptEditor {
       javascript({ typescript: true }),
       syntaxHighlighting(syntaxClasses),
       nounMarks,
-      completeScript(() => this.#names),
+      completeScript(() => this.#names, this.#language),
+      languageNotes(this.#language),
+      languageTooltips(this.#language),
+      languageKeys(this.#language, askName),
       problemNotes,
       EditorView.lineWrapping,
       EditorView.contentAttributes.of({

@@ -1,6 +1,7 @@
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { SIDES, type Layout, type Silhouette } from "../../../../shared/contracts/square.ts";
 import { COLOUR_NAMES } from "../../../../sandbox/language/colour-names.ts";
+import type { NameTable } from "../../../../sandbox/language/names.ts";
 import type { NameKind } from "../../../../sandbox/language/words.ts";
 import { listFronts } from "../../../../sandbox/square/lights.ts";
 import { colourToHex } from "../../../../sandbox/timeline/colour.ts";
@@ -16,6 +17,19 @@ export interface ScriptName {
 
 /** All names of a layout and a song, by kind. */
 export type ScriptNames = { readonly [K in NameKind]: readonly ScriptName[] };
+
+/** The bare names, as the type checker wants them. */
+export function toNameTable(names: ScriptNames): NameTable {
+  const bare = (kind: NameKind) => names[kind].map(({ name }) => name);
+  return {
+    front: bare("front"),
+    side: bare("side"),
+    part: bare("part"),
+    section: bare("section"),
+    instrument: bare("instrument"),
+    colour: bare("colour"),
+  };
+}
 
 /** The names that scripts may use on this square with this song. */
 export function listScriptNames(layout: Layout, song: BeatMap): ScriptNames {

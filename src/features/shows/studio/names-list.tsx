@@ -1,5 +1,6 @@
+import { CHAPTER_TITLES } from "../reference/chapters.ts";
 import { joinClasses } from "../../../components/class-names.ts";
-import { GLOBAL_WORD_NOTES, LIGHTS_WORD_NOTES, SONG_WORD_NOTES, SQUARE_WORD_NOTES } from "../editor/language-words.ts";
+import { listWordsIn, wordId, type WordGroup } from "../../../../sandbox/language/reference/index.ts";
 import type { ScriptName } from "../editor/script-names.ts";
 
 export interface NamesListProps {
@@ -28,22 +29,18 @@ export function NamesList({ label, items, isDense, onInsert }: NamesListProps) {
   );
 }
 
-const GROUPS = [
-  { title: "By themselves", words: GLOBAL_WORD_NOTES },
-  { title: "square", words: SQUARE_WORD_NOTES },
-  { title: "song and sections", words: SONG_WORD_NOTES },
-  { title: "Lights", words: LIGHTS_WORD_NOTES },
-];
+/** The chapters of the words, with their titles. */
+const CHAPTERS = Object.entries(CHAPTER_TITLES) as [WordGroup, string][];
 
 function WordList({ label }: { label: string }) {
   return (
     <div className="studio-words" role="group" aria-label={label}>
-      {GROUPS.map(({ title, words }) => (
-        <section key={title}>
+      {CHAPTERS.map(([group, title]) => (
+        <section key={group}>
           <h3>{title}</h3>
           <dl>
-            {words.map((word) => (
-              <div key={word.word}>
+            {listWordsIn(group).map((word) => (
+              <div key={wordId(word)}>
                 <dt>
                   <code>{word.usage}</code>
                 </dt>

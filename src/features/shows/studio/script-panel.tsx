@@ -2,6 +2,7 @@ import { useEffect, useId, useRef, useState, type Ref, useImperativeHandle } fro
 import type { Problem } from "../../../../sandbox/engine/model.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { Icon } from "../../../components/icon.tsx";
+import { useAskName } from "../editor/rename-dialog.tsx";
 import { ScriptEditor } from "../editor/script-editor.ts";
 import type { ScriptNames } from "../editor/script-names.ts";
 import type { ShowPlayer } from "./show-player.ts";
@@ -42,9 +43,10 @@ export function ScriptPanel(props: ScriptPanelProps) {
   const hintId = useId();
   const [isLarge, setIsLarge] = useState(() => localStorage.getItem(SIZE_KEY) === "yes");
   // The editor is made once; it calls what is current then.
-  const calls = useRef({ onChange, onRun, onSave });
+  const { askName, dialog } = useAskName();
+  const calls = useRef({ onChange, onRun, onSave, askName });
   useEffect(() => {
-    calls.current = { onChange, onRun, onSave };
+    calls.current = { onChange, onRun, onSave, askName };
   });
   const editor = useDisposable(() => {
     if (!hostRef.current) throw new Error("The editor has no place on the page.");
@@ -56,6 +58,7 @@ export function ScriptPanel(props: ScriptPanelProps) {
       onChange: (text) => calls.current.onChange(text),
       onRun: () => calls.current.onRun(made.source),
       onSave: () => calls.current.onSave(),
+      askName: (request) => calls.current.askName(request),
     });
     return made;
   }, []);
@@ -99,6 +102,15 @@ export function ScriptPanel(props: ScriptPanelProps) {
         </button>
         <button
           type="button"
+          className="studio-quiet-icon"
+          aria-label="Lay the script out"
+          aria-keyshortcuts="Shift+Alt+F"
+          onClick={() => void editor?.layOut()}
+        >
+          <Icon name="script" />
+        </button>
+        <button
+          type="button"
           className="studio-run"
           aria-keyshortcuts="Control+Enter"
           aria-busy={isRunning}
@@ -114,8 +126,10 @@ export function ScriptPanel(props: ScriptPanelProps) {
         style={isLarge ? ({ "--script-size": "1.3125rem" } as React.CSSProperties) : undefined}
       />
       <p id={hintId} className="sr-only">
-        Press Escape, then Tab, to leave the script. Control and Enter runs it. Alt and Enter takes an offered fix.
+        Press Escape, then Tab, to leave the script. Control and Enter runs it. Alt and Enter takes an offered fix. F1
+        explains the word at the cursor, F2 renames it, F8 goes to the next note, F12 to where it was made.
       </p>
+      {dialog}
     </section>
   );
 }

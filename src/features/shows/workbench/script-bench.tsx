@@ -10,6 +10,7 @@ import { Button } from "../../../components/button.tsx";
 import { Ribbon } from "../../../components/ribbon.tsx";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { listScriptNames } from "../editor/script-names.ts";
+import { useAskName } from "../editor/rename-dialog.tsx";
 import { ScriptEditor } from "../editor/script-editor.ts";
 import { findGentleReason, listActLines, presentRun } from "../studio/run-model.ts";
 import { ShowPlayer } from "../studio/show-player.ts";
@@ -55,9 +56,10 @@ export function ScriptBench(props: ScriptBenchProps) {
   const gentleReason = findGentleReason(state);
   const player = useDisposable(() => new ShowPlayer({ layout, song, score }), [layout, song, score]);
   const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
-  const latest = useRef({ onChange, run, runSoon });
+  const { askName, dialog } = useAskName();
+  const latest = useRef({ onChange, run, runSoon, askName });
   useEffect(() => {
-    latest.current = { onChange, run, runSoon };
+    latest.current = { onChange, run, runSoon, askName };
   });
 
   const editor = useDisposable(() => {
@@ -74,6 +76,7 @@ export function ScriptBench(props: ScriptBenchProps) {
       },
       onRun: () => latest.current.run(made.source),
       onSave: () => latest.current.onChange(made.source),
+      askName: (request) => latest.current.askName(request),
     });
     return made;
     // The source opens the editor; what is typed later must not open it anew.
@@ -151,6 +154,7 @@ export function ScriptBench(props: ScriptBenchProps) {
         </p>
         <div ref={editorBox} className="script-editor min-h-0 flex-1 overflow-auto" />
       </section>
+      {dialog}
     </div>
   );
 }

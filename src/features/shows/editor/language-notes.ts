@@ -1,0 +1,50 @@
+import { type Diagnostic, lintKeymap, linter } from "@codemirror/lint";
+import type { Extension } from "@codemirror/state";
+import { keymap } from "@codemirror/view";
+import type { Problem } from "../../../../sandbox/engine/model.ts";
+import type { LanguageClient } from "./language-client.ts";
+import { toOffsets } from "./problem-note.ts";
+
+/** A pause in the typing of this length asks the checker. */
+const PAUSE_MS = 500;
+
+/** What the type checker notices is underlined; the words come on hover, by F8 one after the other, in a list by Ctrl Shift M. */
+export function languageNotes(client: LanguageClient): Extension {
+  return [
+    linter(
+      async (view) => {
+        const { doc } = view.state;
+        const notes = (await client.ask("listNotes", doc.toString())) ?? [];
+        return notes.map((note): Diagnostic => ({
+          ...toOffsets(doc, note.range),
+          severity: "info",
+          message: `${note.sentence} ${note.hint}`,
+          renderMessage: () => renderNote(note),
+        }));
+      },
+      { delay: PAUSE_MS },
+    ),
+    keymap.of(lintKeymap),
+  ];
+}
+
+function renderNote({ sentence, hint, details }: Problem): HTMLElement {
+  const note = document.createElement("div");
+  note.className = "script-tip";
+  const words = document.createElement("p");
+  `${sentence} ${hint}`.split("`").forEach((piece, i) => {
+    if (i % 2 === 0) return words.append(piece);
+    const code = document.createElement("code");
+    code.textContent = piece;
+    words.append(code);
+  });
+  note.append(words);
+  if (details !== undefined) {
+    const more = document.createElement("details");
+    const summary = document.createElement("summary");
+    summary.textContent = "Details";
+    more.append(summary, details);
+    note.append(more);
+  }
+  return note;
+}
