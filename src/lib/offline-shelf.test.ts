@@ -3,7 +3,7 @@ import { afterEach, describe, expect, it } from "vitest";
 import { ApiProblem } from "./api-client.ts";
 import { askOrRecall, clearShelf } from "./offline-shelf.ts";
 
-const offline = () => Promise.reject(new ApiProblem("offline", 0, null));
+const offline = (): Promise<{ title: string }> => Promise.reject(new ApiProblem("offline", 0, null));
 
 afterEach(clearShelf);
 
