@@ -12,10 +12,12 @@ export interface RunEnd {
   readonly digest: string;
   /** Interpreter polls. */
   readonly fuel: number;
+  /** SHA-256 of the timeline; empty where there is none, and for what went straight into the engine. */
+  readonly timeline: string;
 }
 
 /** The end of a run that was ended from outside. */
-export const KILLED_END: RunEnd = { end: KILLED, digest: "", fuel: 0 };
+export const KILLED_END: RunEnd = { end: KILLED, digest: "", fuel: 0, timeline: "" };
 
 /** SHA-256 in hex; both hosts have the same function for it. */
 export async function sha256(bytes: Uint8Array): Promise<string> {
@@ -28,7 +30,7 @@ export async function endOfOutcome(outcome: RunOutcome): Promise<RunEnd> {
   const { notes, findings, fuel, cueCount, timeline } = outcome;
   const problem = outcome.ok ? null : outcome.problem;
   if (problem?.details?.startsWith("Stopped after")) return KILLED_END;
-  const cues = timeline === null ? new Uint8Array() : encodeCanonical(timeline);
-  const said = new TextEncoder().encode(JSON.stringify([problem, notes, findings, cueCount, await sha256(cues)]));
-  return { end: problem?.code ?? "ran", digest: await sha256(said), fuel };
+  const cues = timeline === null ? "" : await sha256(encodeCanonical(timeline));
+  const said = new TextEncoder().encode(JSON.stringify([problem, notes, findings, cueCount, cues]));
+  return { end: problem?.code ?? "ran", digest: await sha256(said), fuel, timeline: cues };
 }

@@ -3,25 +3,15 @@ import type { GuestReport, GuestTables } from "../../sandbox/engine/guest.ts";
 import { GuestRuntime } from "../../sandbox/engine/runtime.ts";
 import { buildTables } from "../../sandbox/engine/tables.ts";
 import { GLOBAL_WORDS, MARK_PREFIX as M } from "../../sandbox/language/words.ts";
-import type { RunInput } from "../../sandbox/engine/model.ts";
-
-/** What a script straight in the engine came to; equal on every host. */
-export interface StraightOutcome {
-  /** See `describeEnd`. */
-  readonly end: string;
-  /** SHA-256 of what it had to say: failure, notes, findings, and its cues as the engine wrote them. */
-  readonly digest: string;
-  readonly fuel: number;
-}
+import type { RunEnd } from "./ends.ts";
+import type { StraightInput } from "./straight-client.ts";
 
 /**
  * Runs a text in the engine as it is: no dialect check, no count of brackets, no types taken off, no
  * marks at its calls, and the marks of the engine in its reach. What holds then is the engine itself.
+ * `end`: see `describeEnd`; `digest`: of failure, notes, findings, and the cues as the engine wrote them.
  */
-export async function runStraight(
-  host: EngineHost,
-  { source, layout, song, seed }: Omit<RunInput, "songId">,
-): Promise<StraightOutcome> {
+export async function runStraight(host: EngineHost, { source, layout, song, seed }: StraightInput): Promise<RunEnd> {
   const tables: GuestTables = { ...buildTables(layout, song), seed, streamOf: [0], streams: [[1, 2, 3]] };
   const words = GLOBAL_WORDS.join(",");
   const code = `(function(${M}w,${M}){"use strict";const {${words}}=${M}w;(()=>{\n${source}\n})()})`;
@@ -32,9 +22,9 @@ export async function runStraight(
     const kept = new Uint8Array(said.length + (buffer?.length ?? 0));
     kept.set(said);
     if (buffer !== null) kept.set(buffer, said.length);
-    return { end: describeEnd(end, report), digest: await host.sha256(kept), fuel };
+    return { end: describeEnd(end, report), digest: await host.sha256(kept), fuel, timeline: "" };
   } catch (error) {
-    return { end: "host error", digest: error instanceof Error ? error.name : String(error), fuel: 0 };
+    return { end: "host error", digest: error instanceof Error ? error.name : String(error), fuel: 0, timeline: "" };
   }
 }
 
