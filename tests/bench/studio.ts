@@ -111,7 +111,11 @@ async function openStudio(browser: Browser, address: string): Promise<OpenStudio
   });
   if (!saved.ok()) throw new Error(`The script of the bench was not saved: ${saved.status()}.`);
   await page.goto(`/shows/${showId}`);
-  await page.getByText("On stage: this script").waitFor();
+  // On a machine with much other work the wall clock may end the first run: it is asked for again.
+  const onStage = page.getByText("On stage: this script");
+  await onStage.or(page.getByText("Nothing on stage yet")).waitFor();
+  if (!(await onStage.isVisible())) await page.getByRole("button", { name: /^Run/ }).click();
+  await onStage.waitFor();
   await page.locator(".cm-content").click();
   return { context, page, cdp: await context.newCDPSession(page) };
 }
