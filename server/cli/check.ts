@@ -1,7 +1,7 @@
 import type { Finding } from "../../sandbox/engine/model.ts";
 import { createRunPool, type RunPool } from "../runs/run-pool.ts";
 import { type Command, parseOptions, UsageError } from "./command.ts";
-import { buildRunInput, RUN_OPTIONS } from "./run-input.ts";
+import { buildRunInput, RUN_OPTIONS, COMMAND_DEADLINE_MS } from "./run-input.ts";
 
 const EXIT_STOPS = 1;
 
@@ -13,7 +13,7 @@ export const check: Command = {
   async run(args, say) {
     const { values, rest } = parseOptions(args, { values: RUN_OPTIONS });
     if (rest.length === 0) throw new UsageError("check takes at least one script: check my-show.ts --song frost-fair");
-    const runs = createRunPool({ threads: 1 });
+    const runs = createRunPool({ threads: 1, deadlineMs: COMMAND_DEADLINE_MS });
     let hasStop = false;
     try {
       for (const file of rest) {

@@ -19,6 +19,9 @@ const LAYOUTS: ReadonlyMap<string, Layout> = new Map([
 /** What `run` and `check` take beside the script: names of options for `parseOptions`. */
 export const RUN_OPTIONS = ["song", "layout", "seed"] as const;
 
+/** Wall time of a run that no page waits for: a busy machine is no reason to give a script up. */
+export const COMMAND_DEADLINE_MS = 60_000;
+
 /** The run that the options ask for. Throws `UsageError` naming the option and the fix. */
 export function buildRunInput(file: string, values: ReadonlyMap<string, string>): RunInput {
   const songName = values.get("song") ?? "frost-fair";

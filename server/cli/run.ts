@@ -1,7 +1,7 @@
 import { createRunPool } from "../runs/run-pool.ts";
 import type { TimedOutcome } from "../runs/messages.ts";
 import { type Command, parseOptions } from "./command.ts";
-import { buildRunInput, getFile, RUN_OPTIONS } from "./run-input.ts";
+import { buildRunInput, getFile, RUN_OPTIONS, COMMAND_DEADLINE_MS } from "./run-input.ts";
 
 const EXIT_STOPPED = 1;
 
@@ -13,7 +13,7 @@ export const run: Command = {
   async run(args, say) {
     const { values, flags, rest } = parseOptions(args, { values: RUN_OPTIONS, flags: ["json"] });
     const input = buildRunInput(getFile(rest, "run"), values);
-    const runs = createRunPool({ threads: 1 });
+    const runs = createRunPool({ threads: 1, deadlineMs: COMMAND_DEADLINE_MS });
     try {
       const outcome = await runs.run(input);
       for (const line of flags.has("json") ? [JSON.stringify(toJson(outcome))] : describe(outcome)) say(line);

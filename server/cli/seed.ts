@@ -5,6 +5,7 @@ import { isEmptyDatabase } from "../db/is-empty-database.ts";
 import { seedDemoWorld } from "../db/seed/index.ts";
 import { createRunPool } from "../runs/run-pool.ts";
 import { openDataDir } from "../start-server.ts";
+import { COMMAND_DEADLINE_MS } from "./run-input.ts";
 import { type Command, parseOptions, UsageError } from "./command.ts";
 
 /** `seed`: the demo world into an empty database. */
@@ -17,7 +18,7 @@ export const seed: Command = {
     if (rest.length > 0) throw new UsageError("seed takes nothing more. Set DATA_DIR to choose the folder.");
     const { dataDir, runThreads } = parseConfig(process.env);
     const connection = openDataDir(dataDir);
-    const runs = createRunPool({ threads: runThreads });
+    const runs = createRunPool({ threads: runThreads, deadlineMs: COMMAND_DEADLINE_MS });
     try {
       if (!isEmptyDatabase(connection.db))
         throw new UsageError(`The database in ${dataDir} is not empty. Choose an empty folder with DATA_DIR.`);

@@ -3,6 +3,8 @@ import { readFileSync } from "node:fs";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
 
+/** A command loads the compiler and the engine; on a busy machine that takes its time. */
+const SLOW_MS = 120_000;
 const ROOT = path.resolve(import.meta.dirname, "../..");
 
 function duskbell(...args: readonly string[]) {
@@ -20,7 +22,7 @@ interface Sidecar {
 }
 
 describe("duskbell run", () => {
-  it("comes to the hash that is kept beside the sample", () => {
+  it("comes to the hash that is kept beside the sample", { timeout: SLOW_MS }, () => {
     const kept = JSON.parse(readFileSync(path.join(ROOT, "tests/samples/melody.json"), "utf8")) as Sidecar;
     const { status, stdout } = duskbell(
       "run",
@@ -38,7 +40,7 @@ describe("duskbell run", () => {
     expect(outcome.hash).toBe(kept.hash);
   });
 
-  it("names the option and the fix, and exits with 2", () => {
+  it("names the option and the fix, and exits with 2", { timeout: SLOW_MS }, () => {
     const { status, stderr } = duskbell("run", "tests/samples/melody.ts", "--song", "no-such-song");
     expect(status).toBe(2);
     expect(stderr).toContain("--song takes frost-fair");
@@ -46,7 +48,7 @@ describe("duskbell run", () => {
 });
 
 describe("duskbell check", () => {
-  it("says why a script does not run, with its line, and exits with 1", () => {
+  it("says why a script does not run, with its line, and exits with 1", { timeout: SLOW_MS }, () => {
     // The waltz asks for bar 0, which only a song with a pick-up has.
     const { status, stdout } = duskbell("check", "tests/samples/waltz.ts", "--song", "frost-fair");
     expect(status).toBe(1);

@@ -39,7 +39,7 @@ beforeAll(async () => {
   database = createTestDatabase();
   db = database.connection.db;
   expect(isEmptyDatabase(db)).toBe(true);
-  pool = createRunPool({ threads: 2 });
+  pool = createRunPool({ threads: 2, deadlineMs: 60_000 });
   signIns = await seedDemoWorld({ db, clock, runs: pool, log: pino({ level: "silent" }) });
 }, 120_000);
 afterAll(async () => {
