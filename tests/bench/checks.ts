@@ -109,7 +109,7 @@ function sampleAll(timeline: Timeline, layout: Layout): void {
 }
 
 /** Four sides of fronts like those of the demo square, with as many lights as asked for. */
-function buildSquareOf(lights: number): Layout {
+export function buildSquareOf(lights: number): Layout {
   const fronts = Math.max(4, Math.round(lights / 25));
   const strip = Math.round(lights / fronts) - 4;
   const outlets: readonly OutletSketch[] = [

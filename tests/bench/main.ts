@@ -1,7 +1,9 @@
 import { writeFileSync } from "node:fs";
 import { parseArgs } from "node:util";
+import { benchAnySource } from "./any-source.ts";
 import { benchChecks } from "./checks.ts";
 import { benchHandIns } from "./hand-ins.ts";
+import { benchMarks } from "./marks.ts";
 import { benchPages } from "./pages.ts";
 import { benchRequests } from "./requests.ts";
 import { benchRuns } from "./runs.ts";
@@ -12,7 +14,16 @@ import type { Figure } from "./measure.ts";
 const { values } = parseArgs({ options: { json: { type: "string" } } });
 
 const figures: Figure[] = [];
-for (const bench of [benchRuns, benchChecks, benchHandIns, benchRequests, benchPages, benchStudio]) {
+for (const bench of [
+  benchRuns,
+  benchMarks,
+  benchChecks,
+  benchHandIns,
+  benchRequests,
+  benchPages,
+  benchStudio,
+  benchAnySource,
+]) {
   for (const figure of await bench()) {
     figures.push(figure);
     const ratio = figure.ratio === null ? "" : `  ${figure.ratio.toFixed(2)} x ${figure.against ?? ""}`;
