@@ -10,6 +10,11 @@ export class FairQueue<T> {
     return this.#size;
   }
 
+  /** Items of one group. */
+  sizeOf(group: string): number {
+    return this.#groups.get(group)?.length ?? 0;
+  }
+
   add(group: string, item: T): void {
     const items = this.#groups.get(group);
     if (items === undefined) this.#groups.set(group, [item]);

@@ -29,7 +29,11 @@ interface Failed {
 
 /** Child process to pool. */
 export type ChildMessage =
-  { readonly kind: "ready" } | { readonly kind: "done"; readonly id: number; readonly answer: RunAnswer } | Failed;
+  | { readonly kind: "ready" }
+  /** A thread has taken the run up: its time counts from here. */
+  | { readonly kind: "started"; readonly id: number }
+  | { readonly kind: "done"; readonly id: number; readonly answer: RunAnswer }
+  | Failed;
 
 /** Worker thread to child process. `isSpent`: the run ended in a way after which the thread is not used again. */
 export type ThreadMessage =

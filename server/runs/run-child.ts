@@ -40,6 +40,7 @@ class Thread {
       request.deadlineMs,
     );
     this.#worker.postMessage(request);
+    send({ kind: "started", id: request.id });
   }
 
   #fail(error: Error): void {

@@ -73,23 +73,46 @@ describe("createRunPool", () => {
     },
   );
 
-  it(
-    "answers an honest run of another class while one class has many hostile ones waiting",
-    { timeout: SLOW_MS },
-    async () => {
+  it("answers an honest run of another class while thirty hostile ones wait", { timeout: SLOW_MS }, async () => {
+    const order: string[] = [];
+    const hostile = Array.from({ length: 30 }, () =>
+      pool.run(inputOf("while (true) {}"), { classId: "loud" }).then(() => order.push("loud")),
+    );
+    const honest = pool.run(inputOf(HONEST), { classId: "quiet" }).then((outcome) => {
+      order.push("quiet");
+      return outcome;
+    });
+    expect(await honest).toMatchObject({ ok: true, hash: golden });
+    await Promise.all(hostile);
+    expect(order).toHaveLength(31);
+    expect(order.indexOf("quiet")).toBeLessThanOrEqual(4);
+  });
+
+  it("serves classes in turn, however many runs each has asked for", { timeout: SLOW_MS }, async () => {
+    const single = createRunPool({ threads: 1 });
+    try {
       const order: string[] = [];
-      const hostile = Array.from({ length: 8 }, () =>
-        pool.run(inputOf("while (true) {}"), { classId: "loud" }).then(() => order.push("loud")),
-      );
-      const honest = pool.run(inputOf(HONEST), { classId: "quiet" }).then((outcome) => {
-        order.push("quiet");
-        return outcome;
-      });
-      expect(await honest).toMatchObject({ ok: true, hash: golden });
-      await Promise.all(hostile);
-      expect(order.indexOf("quiet")).toBeLessThanOrEqual(4);
-    },
-  );
+      const ask = (classId: string) => single.run(inputOf(HONEST), { classId }).then(() => order.push(classId));
+      await Promise.all([..."aaaaaabbc"].map(ask));
+      expect(order.join("")).toBe("abcabaaaa");
+    } finally {
+      await single.close();
+    }
+  });
+
+  it("lets one class fill half of the queue and no more", { timeout: SLOW_MS }, async () => {
+    const small = createRunPool({ threads: 1, maxWaiting: 4 });
+    try {
+      const ask = (classId: string) => small.run(inputOf(HONEST), { classId });
+      const taken = [ask("loud"), ask("loud")];
+      await expect(ask("loud")).rejects.toBeInstanceOf(RunQueueFullError);
+      taken.push(ask("quiet"), ask("quiet"));
+      await expect(ask("third")).rejects.toBeInstanceOf(RunQueueFullError);
+      for (const outcome of await Promise.all(taken)) expect(outcome).toMatchObject({ ok: true, hash: golden });
+    } finally {
+      await small.close();
+    }
+  });
 
   it("refuses a run when too many wait, and takes the next one later", { timeout: SLOW_MS }, async () => {
     const small = createRunPool({ threads: 1, maxWaiting: 1 });

@@ -14,6 +14,8 @@ const RUNS_PER_CHILD = 500;
 /** How often a run is tried when the child dies under it, which another run may have done. */
 const MAX_TRIES = 2;
 const NO_CLASS = "";
+/** How much of the queue one class may fill: the others still get in. */
+const MOST_OF_ONE_CLASS = 0.5;
 /** Loading the compiler and the engine takes seconds on a busy machine. */
 const START_TIMEOUT_MS = 60_000;
 /** Children that may fail in a row before the pool tells its callers. */
@@ -23,7 +25,7 @@ const MAX_FAILED_STARTS = 3;
 export interface RunPool {
   /**
    * Runs a script; its outcome is a value whatever it does. Rejects with `RunQueueFullError` when too
-   * many runs wait, and with `RunPoolClosedError` after `close`.
+   * many runs wait, in all or of the class, and with `RunPoolClosedError` after `close`.
    */
   run(input: RunInput, options?: RunOptions): Promise<TimedOutcome>;
   /**
@@ -47,7 +49,7 @@ export interface RunPoolOptions {
   readonly threads?: number;
   /** Wall time of one run: the backstop for what fuel can not count. */
   readonly deadlineMs?: number;
-  /** Runs that may wait. */
+  /** Runs that may wait; of one class half as many. */
   readonly maxWaiting?: number;
 }
 
@@ -91,7 +93,7 @@ class ChildRunPool implements RunPool {
   readonly #deadlineMs: number;
   readonly #maxWaiting: number;
   readonly #queue = new FairQueue<Job>();
-  readonly #running = new Map<number, { readonly job: Job; readonly timer: NodeJS.Timeout }>();
+  readonly #running = new Map<number, { readonly job: Job; timer: NodeJS.Timeout }>();
   #child: ChildProcess;
   #nextId = 1;
   #runsOfChild = 0;
@@ -127,6 +129,8 @@ class ChildRunPool implements RunPool {
     if (this.#isClosed) return Promise.reject(new RunPoolClosedError("The run pool is closed."));
     if (this.#queue.size >= this.#maxWaiting)
       return Promise.reject(new RunQueueFullError(`${this.#queue.size} runs wait already.`));
+    if (this.#queue.sizeOf(classId) >= Math.max(1, this.#maxWaiting * MOST_OF_ONE_CLASS))
+      return Promise.reject(new RunQueueFullError(`${this.#queue.sizeOf(classId)} runs of this class wait already.`));
     return new Promise((resolve, reject) => {
       this.#queue.add(classId, { group: classId, work, input, deadlineMs, resolve, reject, tries: 0 });
       this.#advance();
@@ -180,6 +184,10 @@ class ChildRunPool implements RunPool {
     const running = this.#running.get(message.id);
     if (running === undefined) return;
     clearTimeout(running.timer);
+    if (message.kind === "started") {
+      running.timer = setTimeout(() => this.#replaceChild(child), running.job.deadlineMs + CHILD_GRACE_MS);
+      return;
+    }
     this.#running.delete(message.id);
     if (message.kind === "failed") running.job.reject(new JudgingFailedError(message.reason));
     else running.job.resolve(message.answer);
@@ -213,7 +221,8 @@ class ChildRunPool implements RunPool {
     this.#runsOfChild++;
     const child = this.#child;
     const { work, input, deadlineMs } = job;
-    const timer = setTimeout(() => this.#replaceChild(child), deadlineMs + CHILD_GRACE_MS);
+    // Until a thread takes it up: after several were ended, new ones are still loading.
+    const timer = setTimeout(() => this.#replaceChild(child), START_TIMEOUT_MS);
     this.#running.set(id, { job, timer });
     const request: RunRequest = { id, work, input, deadlineMs };
     child.send(request, (error) => {
