@@ -3,6 +3,7 @@ import { parseArgs } from "node:util";
 import { benchAnySource } from "./any-source.ts";
 import { benchChecks } from "./checks.ts";
 import { benchHandIns } from "./hand-ins.ts";
+import { benchHostile } from "./hostile.ts";
 import { benchMarks } from "./marks.ts";
 import { benchPages } from "./pages.ts";
 import { benchRequests } from "./requests.ts";
@@ -23,6 +24,7 @@ for (const bench of [
   benchPages,
   benchStudio,
   benchAnySource,
+  benchHostile,
 ]) {
   for (const figure of await bench()) {
     figures.push(figure);
