@@ -128,7 +128,7 @@ export const PAGES: Readonly<Record<string, PageCheck>> = {
   "/words": {
     as: "student",
     open: "/words",
-    empty: { none: "The language always has its words; a search without a hit is shown by the test of the page." },
+    empty: { none: "The language always has its words." },
     error: "/api/square",
     dialog: openMenu("Wren"),
   },

@@ -47,12 +47,30 @@ export function WordCard({ entry, runner }: WordCardProps) {
       id={wordId(entry)}
       className="min-w-0 scroll-mt-20 rounded-sheet border border-line bg-card p-4 shadow-sheet-1 target:border-lamp-ink target:shadow-sheet-2"
     >
-      <h3 className="font-mono text-4 font-bold break-words">{entry.usage}</h3>
+      <div className="flex items-start gap-3">
+        <h3 className="font-mono text-4 font-bold break-words">{entry.usage}</h3>
+        <IconButton
+          icon="copy"
+          label={`Copy the example of ${entry.word}`}
+          className="-my-2 ml-auto shrink-0"
+          onPress={() =>
+            void navigator.clipboard.writeText(example).then(
+              () => showToast({ title: "The example is copied.", detail: "Put it into a script with Ctrl and V." }),
+              () =>
+                showToast({
+                  tone: "warn",
+                  title: "The browser let nothing be copied.",
+                  detail: "Mark it and copy it by hand.",
+                }),
+            )
+          }
+        />
+      </div>
       <p className="mt-1 text-soft">{entry.meaning}</p>
-      <div className="relative mt-3 rounded-cut bg-well">
+      <div className="mt-3 rounded-cut bg-well">
         {/* A long line scrolls: the keyboard must be able to do it. */}
         <pre
-          className="overflow-x-auto p-3 pr-12 font-mono text-meta/relaxed"
+          className="overflow-x-auto p-3 font-mono text-meta/relaxed"
           // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
           tabIndex={0}
           role="group"
@@ -70,22 +88,6 @@ export function WordCard({ entry, runner }: WordCardProps) {
             ))}
           </code>
         </pre>
-        <IconButton
-          icon="copy"
-          label={`Copy the example of ${entry.word}`}
-          className="absolute! top-1 right-1"
-          onPress={() =>
-            void navigator.clipboard.writeText(example).then(
-              () => showToast({ title: "The example is copied.", detail: "Put it into a script with Ctrl and V." }),
-              () =>
-                showToast({
-                  tone: "warn",
-                  title: "The browser let nothing be copied.",
-                  detail: "Mark it and copy it by hand.",
-                }),
-            )
-          }
-        />
       </div>
       {drawn === "none" ? (
         <p className="mt-2 text-meta text-slate">This square or song has nothing for this example.</p>
