@@ -1,29 +1,18 @@
 import type { QuickJSWASMModule } from "quickjs-emscripten-core";
-import { TICKS_PER_BEAT } from "../../shared/units.ts";
-import { compileScript, type CompiledScript } from "../language/compile.ts";
-import { createFinding, isRunFinding } from "../language/finding.ts";
-import { createProblem } from "../language/problem.ts";
-import { layoutHash } from "../square/layout-hash.ts";
-import { encodeCanonical } from "../timeline/canonical.ts";
-import { LANGUAGE_VERSION, type Timeline } from "../timeline/model.ts";
-import { decodeTimelineBuffer, type DecodedHead } from "./decode.ts";
-import { explainFailure } from "./explain.ts";
-import type { GuestFinding, GuestReport, GuestTables } from "./guest.ts";
-import type { Finding, Problem, RunInput, RunOutcome, RunReport, ScriptNote } from "./model.ts";
-import { GuestRuntime, type RuntimeResult } from "./runtime.ts";
-import { buildTables, listNames } from "./tables.ts";
+import { finishRun, type HashHost } from "./finish.ts";
+import type { GuestTables, GuestWork } from "./guest.ts";
+import type { RunInput, RunOutcome } from "./model.ts";
+import { brokenResult, GuestRuntime, type RuntimeResult } from "./runtime.ts";
+import { prepareRun } from "./prepare.ts";
+import { buildTables } from "./tables.ts";
 
 /** What a host lends the engine: it has WebAssembly and cryptography, `sandbox/` has neither. */
-export interface EngineHost {
+export interface EngineHost extends HashHost {
   /**
    * A new instance of the one pinned QuickJS module, with a memory of its own of `WASM_MEMORY_PAGES`
    * pages, initial and maximum. It is used for one run and dropped.
    */
   newModule(): Promise<QuickJSWASMModule>;
-  /** SHA-256 as lower-case hex. */
-  sha256(bytes: Uint8Array): Promise<string> | string;
-  /** UTF-8. */
-  encodeText(text: string): Uint8Array;
 }
 
 export interface Engine {
@@ -31,111 +20,27 @@ export interface Engine {
   run(input: RunInput): Promise<RunOutcome>;
 }
 
-const NOTHING: RunReport = { notes: [], findings: [], fuel: 0, cueCount: 0 };
-
-/** Gives an engine on a host. Stateless: any number of runs, each in an instance of its own. */
+/**
+ * Gives an engine on a host. Stateless: any number of runs, each in an instance of its own. A host with
+ * several threads takes the same steps one by one: `prepareRun`, `GuestRuntime`, `finishRun`.
+ */
 export function createEngine(host: EngineHost): Engine {
   return {
     async run(input) {
-      const compiled = compileScript(input.source, listNames(input.layout, input.song));
-      if (!compiled.ok) return { ok: false, problem: compiled.problem, timeline: null, ...NOTHING };
-      const tables: GuestTables = {
-        ...buildTables(input.layout, input.song),
-        seed: input.seed >>> 0,
-        streamOf: compiled.marked.streamOf,
-        streams: compiled.marked.streams,
-      };
+      const prepared = prepareRun(input);
+      if (!prepared.ok) return prepared;
       const module = await host.newModule();
-      const result = runGuarded(module, compiled, tables);
-      return finish(host, input, compiled, tables, result);
+      const result = runGuarded(module, buildTables(input.layout, input.song), prepared.work);
+      return finishRun(host, input, prepared.compiled, result);
     },
   };
 }
 
-/** Runs in a fresh instance. What the host throws there (its stack ended, memory out of bounds) is the script's doing. */
-function runGuarded(module: QuickJSWASMModule, compiled: CompiledScript, tables: GuestTables): RuntimeResult {
+/** Runs in a fresh instance. */
+function runGuarded(module: QuickJSWASMModule, tables: GuestTables, work: GuestWork): RuntimeResult {
   try {
-    return new GuestRuntime(module).run(compiled.marked.code, tables);
+    return new GuestRuntime(module, tables).run(work);
   } catch (error) {
-    const details = error instanceof Error ? `${error.name}: ${error.message}` : String(error);
-    return { end: "broken", details, report: null, buffer: null, fuel: 0 };
+    return brokenResult(error);
   }
-}
-
-async function finish(
-  host: EngineHost,
-  input: RunInput,
-  compiled: CompiledScript,
-  tables: GuestTables,
-  result: RuntimeResult,
-): Promise<RunOutcome> {
-  const hash = await layoutHash(input.layout, async (text) => host.sha256(host.encodeText(text)));
-  const problem = explainFailure(compiled, result);
-  const head: DecodedHead = {
-    language: LANGUAGE_VERSION,
-    songId: input.songId,
-    layoutHash: hash,
-    seed: tables.seed,
-    lightCount: tables.lightCount,
-    endTick: (input.song.beats.length - 1) * TICKS_PER_BEAT,
-    isComplete: problem === null,
-  };
-  const decoded = readTimeline(result, head, compiled);
-  const report = readReport(compiled, result, decoded.timeline);
-  const stopped = problem ?? decoded.problem;
-  if (stopped !== null || decoded.timeline === null)
-    return {
-      ok: false,
-      problem: stopped ?? wholeScriptProblem(compiled, "No result."),
-      timeline: decoded.timeline,
-      ...report,
-    };
-  return {
-    ok: true,
-    timeline: decoded.timeline,
-    hash: await host.sha256(encodeCanonical(decoded.timeline)),
-    ...report,
-  };
-}
-
-interface Decoded {
-  readonly timeline: Timeline | null;
-  readonly problem: Problem | null;
-}
-
-/** The timeline of a result; a damaged one, which only a broken engine can hand out, is a problem. */
-function readTimeline(result: RuntimeResult, head: DecodedHead, compiled: CompiledScript): Decoded {
-  if (result.buffer === null) return { timeline: null, problem: null };
-  try {
-    return {
-      timeline: decodeTimelineBuffer(result.buffer, head, (site) => compiled.marked.sites[site]?.line ?? 1),
-      problem: null,
-    };
-  } catch (error) {
-    const details = error instanceof Error ? `${error.name}: ${error.message}` : String(error);
-    return { timeline: null, problem: wholeScriptProblem(compiled, details) };
-  }
-}
-
-function wholeScriptProblem(compiled: CompiledScript, details: string): Problem {
-  const [excerpt = ""] = compiled.text.split("\n");
-  return createProblem(
-    "could-not-run",
-    {},
-    { range: { line: 1, column: 1, endLine: 1, endColumn: 1 }, excerpt: excerpt.slice(0, 60), details },
-  );
-}
-
-function readReport(compiled: CompiledScript, result: RuntimeResult, timeline: Timeline | null): RunReport {
-  const lineOf = (site: number): number => compiled.marked.sites[site]?.line ?? 1;
-  const report: Pick<GuestReport, "notes" | "findings"> = result.report ?? { notes: [], findings: [] };
-  const notes: ScriptNote[] = report.notes.map(({ site, text, tick }) => ({ line: lineOf(site), text, tick }));
-  const ofRun = report.findings.flatMap((finding) => toFinding(finding, lineOf) ?? []);
-  return { notes, findings: [...compiled.findings, ...ofRun], fuel: result.fuel, cueCount: timeline?.cues.count ?? 0 };
-}
-
-function toFinding(finding: GuestFinding, lineOf: (site: number) => number): Finding | null {
-  if (!isRunFinding(finding.rule)) return null;
-  const moments = [...new Set(finding.ticks)].sort((a, b) => a - b);
-  return createFinding(finding.rule, finding.values, { moments, lines: [lineOf(finding.site)] });
 }

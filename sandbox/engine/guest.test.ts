@@ -5,7 +5,7 @@ import { createNodeHost } from "../../server/runs/node-host.worker.ts";
 import { compileScript } from "../language/compile.ts";
 import type { EngineHost } from "./engine.ts";
 import { explainFailure } from "./explain.ts";
-import type { GuestTables } from "./guest.ts";
+import type { GuestLuck } from "./guest.ts";
 import { LIBRARY } from "./library.generated.ts";
 import { GuestRuntime, type RuntimeResult } from "./runtime.ts";
 import { buildTables } from "./tables.ts";
@@ -14,7 +14,8 @@ import { buildTables } from "./tables.ts";
  * The walls of the guest without the dialect check in front of them: whatever a script could write if
  * that check missed it.
  */
-const TABLES: GuestTables = { ...buildTables(SMALL_LAYOUT, SMALL_SONG), seed: 1, streamOf: [0], streams: [[1, 2, 3]] };
+const TABLES = buildTables(SMALL_LAYOUT, SMALL_SONG);
+const LUCK: GuestLuck = { seed: 1, streamOf: [0], streams: [[1, 2, 3]] };
 
 let host: EngineHost;
 beforeAll(async () => {
@@ -22,7 +23,10 @@ beforeAll(async () => {
 });
 
 async function runRaw(body: string): Promise<RuntimeResult> {
-  return new GuestRuntime(await host.newModule()).run(`(function(words, marks) { ${body}\n})`, TABLES);
+  return new GuestRuntime(await host.newModule(), TABLES).run({
+    code: `(function(words, marks) { ${body}\n})`,
+    luck: LUCK,
+  });
 }
 
 async function say(expression: string): Promise<string | undefined> {

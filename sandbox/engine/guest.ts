@@ -35,7 +35,7 @@ export interface InstrumentTable {
   readonly notes: readonly NoteTable[];
 }
 
-/** Everything a script can ask about, and the luck of each of its statements. */
+/** Everything a script can ask about: the same for every script on one square and song. */
 export interface GuestTables {
   readonly lightCount: number;
   /** Kind of box of every single light. */
@@ -55,11 +55,22 @@ export interface GuestTables {
     readonly loudness: readonly number[];
   };
   readonly colours: { readonly [name: string]: number };
+}
+
+/** The luck of each statement of one script. */
+export interface GuestLuck {
   readonly seed: number;
   /** For each call site, the index of the stream of its statement. */
   readonly streamOf: readonly number[];
   /** For each stream, three words of 32 bits. */
   readonly streams: readonly (readonly [number, number, number])[];
+}
+
+/** One script for an engine that has its tables: plain data, so that it can be handed to another thread. */
+export interface GuestWork {
+  /** The marked script. */
+  readonly code: string;
+  readonly luck: GuestLuck;
 }
 
 /** A stop inside the guest: thrown by the library, or an error of the engine that it caught. */

@@ -7,7 +7,7 @@ import {
   MAX_REPORT_LENGTH,
   REPORT_FUEL,
 } from "./limits.ts";
-import type { GuestReport, GuestTables } from "./guest.ts";
+import type { GuestReport, GuestTables, GuestWork } from "./guest.ts";
 import { LIBRARY } from "./library.generated.ts";
 
 /** How a run of the marked script ended, as the engine tells it. */
@@ -33,6 +33,12 @@ export interface RuntimeResult {
   readonly fuel: number;
 }
 
+/** What a run that the host itself broke gives: its stack ended, memory out of bounds. That is the script's doing. */
+export function brokenResult(error: unknown): RuntimeResult {
+  const details = error instanceof Error ? `${error.name}: ${error.message}` : String(error);
+  return { end: "broken", details, report: null, buffer: null, fuel: 0 };
+}
+
 /**
  * One QuickJS, for one run. The module instance is used up by it and dropped whole: nothing of a run
  * can reach the next, and disposing after a failure, which can abort, is never needed.
@@ -40,10 +46,12 @@ export interface RuntimeResult {
 export class GuestRuntime {
   readonly #runtime: QuickJSRuntime;
   readonly #context: QuickJSContext;
+  readonly #library: QuickJSHandle;
   #polls = 0;
   #limit = Infinity;
 
-  constructor(module: QuickJSWASMModule) {
+  /** Loads the library and gives it its tables, which takes most of a run's time. Throws whatever the host throws. */
+  constructor(module: QuickJSWASMModule, tables: GuestTables) {
     this.#runtime = module.newRuntime({
       memoryLimitBytes: GUEST_MEMORY_BYTES,
       maxStackSizeBytes: GUEST_STACK_BYTES,
@@ -65,19 +73,19 @@ export class GuestRuntime {
         Promise: false,
       },
     });
+    this.#library = this.#must(this.#context.evalCode(LIBRARY, "library.js"));
+    this.#tell("open", tables);
   }
 
   /** Runs a marked script. Throws whatever the host throws; then this and its module are lost. */
-  run(code: string, tables: GuestTables): RuntimeResult {
-    const library = this.#must(this.#context.evalCode(LIBRARY, "library.js"));
-    const text = this.#context.newString(JSON.stringify(tables));
-    this.#must(this.#context.callFunction(this.#context.getProp(library, "open"), this.#context.undefined, text));
+  run({ code, luck }: GuestWork): RuntimeResult {
+    this.#tell("deal", luck);
     const compiled = this.#context.evalCode(code, "script.js");
     if (compiled.error)
       return { end: "unreadable", details: this.#describe(compiled.error), report: null, buffer: null, fuel: 0 };
     this.#startFuel(FUEL_LIMIT);
     const ran = this.#context.callFunction(
-      this.#context.getProp(library, "run"),
+      this.#context.getProp(this.#library, "run"),
       this.#context.undefined,
       compiled.value,
     );
@@ -87,7 +95,13 @@ export class GuestRuntime {
     this.#startFuel(REPORT_FUEL);
     const end = isOut ? "out-of-fuel" : jobsDone ? "ended" : "broken";
     const details = ran.error ? this.#describe(ran.error) : "";
-    return { end, details, fuel, report: this.#readReport(library), buffer: this.#readBuffer(library) };
+    return { end, details, fuel, report: this.#readReport(), buffer: this.#readBuffer() };
+  }
+
+  /** Hands the library something as JSON. */
+  #tell(name: "open" | "deal", value: unknown): void {
+    const text = this.#context.newString(JSON.stringify(value));
+    this.#must(this.#context.callFunction(this.#context.getProp(this.#library, name), this.#context.undefined, text));
   }
 
   #startFuel(limit: number): void {
@@ -118,15 +132,15 @@ export class GuestRuntime {
     return `${read("name")}: ${read("message")} ${read("stack")}`.slice(0, 1000);
   }
 
-  #readReport(library: QuickJSHandle): GuestReport | null {
-    const result = this.#context.callFunction(this.#context.getProp(library, "report"), this.#context.undefined);
+  #readReport(): GuestReport | null {
+    const result = this.#context.callFunction(this.#context.getProp(this.#library, "report"), this.#context.undefined);
     if (result.error) return null;
     const text = this.#context.getString(result.value);
     return text.length > MAX_REPORT_LENGTH ? null : (JSON.parse(text) as GuestReport);
   }
 
-  #readBuffer(library: QuickJSHandle): Uint8Array | null {
-    const result = this.#context.callFunction(this.#context.getProp(library, "buffer"), this.#context.undefined);
+  #readBuffer(): Uint8Array | null {
+    const result = this.#context.callFunction(this.#context.getProp(this.#library, "buffer"), this.#context.undefined);
     if (result.error) return null;
     return this.#context.getArrayBuffer(result.value).value.slice();
   }

@@ -15,8 +15,8 @@ function partsOf(lights: readonly Light[]): PartTable[] {
   return [...parts.values()];
 }
 
-/** Everything a script can ask about a layout and a song, in the shape that crosses into the engine; luck apart. */
-export function buildTables(layout: Layout, song: BeatMap): Omit<GuestTables, "seed" | "streamOf" | "streams"> {
+/** Everything a script can ask about a layout and a song, in the shape that crosses into the engine. */
+export function buildTables(layout: Layout, song: BeatMap): GuestTables {
   const lights = listLights(layout);
   const fronts: FrontTable[] = listFronts(layout).map(({ front, lights: indexes }) => ({
     name: front.name,

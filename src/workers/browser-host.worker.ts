@@ -1,7 +1,6 @@
-import { newQuickJSWASMModuleFromVariant, newVariant } from "quickjs-emscripten-core";
+import { newQuickJSWASMModuleFromVariant, newVariant, type QuickJSWASMModule } from "quickjs-emscripten-core";
 import releaseVariant from "@jitl/quickjs-wasmfile-release-sync";
 import wasmUrl from "@jitl/quickjs-wasmfile-release-sync/wasm?url";
-import type { EngineHost } from "../../sandbox/engine/engine.ts";
 import { WASM_MEMORY_PAGES } from "../../sandbox/engine/limits.ts";
 
 let compiling: Promise<WebAssembly.Module> | null = null;
@@ -22,20 +21,11 @@ export function loadEngineModule(): Promise<WebAssembly.Module> {
   return compiling;
 }
 
-/** What a browser lends the engine. Every run gets an instance with a memory of its own. */
-export function createBrowserHost(): EngineHost {
-  return {
-    newModule: async () => {
-      const wasmModule = await loadEngineModule();
-      const wasmMemory = new WebAssembly.Memory({ initial: WASM_MEMORY_PAGES, maximum: WASM_MEMORY_PAGES });
-      const module = await newQuickJSWASMModuleFromVariant(newVariant(releaseVariant, { wasmModule, wasmMemory }));
-      if (module.getWasmMemory() !== wasmMemory) throw new Error("The engine did not take the fixed memory.");
-      return module;
-    },
-    sha256: async (bytes) => {
-      const digest = await crypto.subtle.digest("SHA-256", bytes.slice());
-      return Array.from(new Uint8Array(digest), (byte) => byte.toString(16).padStart(2, "0")).join("");
-    },
-    encodeText: (text) => new TextEncoder().encode(text),
-  };
+/** An instance of the engine with a memory of its own, for one run. */
+export async function newBrowserModule(): Promise<QuickJSWASMModule> {
+  const wasmModule = await loadEngineModule();
+  const wasmMemory = new WebAssembly.Memory({ initial: WASM_MEMORY_PAGES, maximum: WASM_MEMORY_PAGES });
+  const module = await newQuickJSWASMModuleFromVariant(newVariant(releaseVariant, { wasmModule, wasmMemory }));
+  if (module.getWasmMemory() !== wasmMemory) throw new Error("The engine did not take the fixed memory.");
+  return module;
 }

@@ -1,33 +1,50 @@
 import * as Comlink from "comlink";
-import { createEngine } from "../../sandbox/engine/engine.ts";
-import type { RunInput, RunOutcome } from "../../sandbox/engine/model.ts";
-import { describeShow, type ShowDescription } from "../../sandbox/timeline/describe.ts";
-import type { Timeline } from "../../sandbox/timeline/model.ts";
-import { ribbonCells, type RibbonCells, type RibbonSize } from "../../sandbox/timeline/ribbon.ts";
-import { createBrowserHost, loadEngineModule } from "./browser-host.worker.ts";
+import type { GuestTables, GuestWork } from "../../sandbox/engine/guest.ts";
+import { brokenResult, GuestRuntime, type RuntimeResult } from "../../sandbox/engine/runtime.ts";
+import { newBrowserModule } from "./browser-host.worker.ts";
 
-/** What the page calls. The worker runs one script at a time and never ends itself: the page does that. */
-export interface RunWorker {
-  /** Loads and compiles the engine, so that the first run finds it warm. */
-  warmUp(): Promise<void>;
-  run(input: RunInput): Promise<RunOutcome>;
-  /**
-   * The ribbon of a timeline. A call of its own, after the answer of the run: the lights come first.
-   */
-  drawRibbon(timeline: Timeline, layout: RunInput["layout"], size: RibbonSize): Promise<RibbonCells>;
-  /** A show in words. */
-  describe(timeline: Timeline, layout: RunInput["layout"], song: RunInput["song"]): Promise<ShowDescription>;
+let tables: GuestTables | null = null;
+/** An engine with its tables that no script has touched yet: a run finds it open. */
+let ready: Promise<GuestRuntime> | null = null;
+
+async function openEngine(given: GuestTables): Promise<GuestRuntime> {
+  return new GuestRuntime(await newBrowserModule(), given);
 }
 
-const engine = createEngine(createBrowserHost());
-
-const worker: RunWorker = {
-  warmUp: async () => {
-    await loadEngineModule();
+/**
+ * The engine alone, without the compiler: small, so that a new worker is there at once when one had to be
+ * ended. It runs one script at a time and never ends itself: the page does that.
+ */
+const runWorker = {
+  /** Takes the tables of a square and a song; settles when an engine is open for them. */
+  open: async (given: GuestTables): Promise<void> => {
+    tables = given;
+    ready = openEngine(given);
+    await ready;
   },
-  run: (input) => engine.run(input),
-  drawRibbon: (timeline, layout, size) => Promise.resolve(ribbonCells(timeline, layout, size)),
-  describe: (timeline, layout, song) => Promise.resolve(describeShow(timeline, layout, song)),
+  /** Runs a script in the open engine, which is used up by it; the next is opened after the answer. */
+  execute: async (work: GuestWork): Promise<RuntimeResult> => {
+    if (!tables) throw new Error("A run needs the tables of a square and a song.");
+    const engine = await (ready ?? openEngine(tables));
+    ready = null;
+    setTimeout(() => {
+      if (tables) ready ??= openEngine(tables);
+      // Whoever runs next hears of it.
+      ready?.catch(() => {});
+    });
+    const result = runGuarded(engine, work);
+    return result.buffer ? Comlink.transfer(result, [result.buffer.buffer]) : result;
+  },
 };
 
-Comlink.expose(worker);
+function runGuarded(engine: GuestRuntime, work: GuestWork): RuntimeResult {
+  try {
+    return engine.run(work);
+  } catch (error) {
+    return brokenResult(error);
+  }
+}
+
+export type RunWorker = typeof runWorker;
+
+Comlink.expose(runWorker);

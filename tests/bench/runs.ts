@@ -1,12 +1,11 @@
 import vm from "node:vm";
 import { readFileSync } from "node:fs";
 import path from "node:path";
-import { compileScript } from "../../sandbox/language/compile.ts";
 import { LIBRARY } from "../../sandbox/engine/library.generated.ts";
 import { createEngine } from "../../sandbox/engine/engine.ts";
-import type { GuestTables } from "../../sandbox/engine/guest.ts";
 import type { RunInput } from "../../sandbox/engine/model.ts";
-import { buildTables, listNames } from "../../sandbox/engine/tables.ts";
+import { prepareRun } from "../../sandbox/engine/prepare.ts";
+import { buildTables } from "../../sandbox/engine/tables.ts";
 import { createNodeHost } from "../../server/runs/node-host.worker.ts";
 import { demoSong } from "../../server/db/seed/world/songs/demo-songs.ts";
 import { DEMO_SQUARE } from "../../server/db/seed/world/square.ts";
@@ -34,16 +33,11 @@ export async function benchRuns(): Promise<Figure[]> {
     layout: DEMO_SQUARE,
     seed: SEED,
   };
-  const compiled = compileScript(input.source, listNames(input.layout, input.song));
-  if (!compiled.ok) throw new Error(`The bench script does not compile: ${compiled.problem.sentence}`);
-  const tables: GuestTables = {
-    ...buildTables(input.layout, input.song),
-    seed: input.seed,
-    streamOf: compiled.marked.streamOf,
-    streams: compiled.marked.streams,
-  };
-  const json = JSON.stringify(tables);
-  const { code } = compiled.marked;
+  const prepared = prepareRun(input);
+  if (!prepared.ok) throw new Error(`The bench script does not compile: ${prepared.problem.sentence}`);
+  const { code } = prepared.work;
+  const tables = JSON.stringify(buildTables(input.layout, input.song));
+  const luck = JSON.stringify(prepared.work.luck);
 
   const outcome = await engine.run(input);
   if (!outcome.ok) throw new Error(`The bench script does not run: ${outcome.problem.sentence}`);
@@ -54,15 +48,21 @@ export async function benchRuns(): Promise<Figure[]> {
       const library = context.unwrapResult(context.evalCode(LIBRARY, "library.js"));
       const call = (name: string, argument: Parameters<typeof context.callFunction>[2]) =>
         context.unwrapResult(context.callFunction(context.getProp(library, name), context.undefined, argument));
-      call("open", context.newString(json));
+      call("open", context.newString(tables));
+      call("deal", context.newString(luck));
       call("run", context.unwrapResult(context.evalCode(code, "script.js")));
     },
     vm: () => {
       const realm = vm.createContext({});
       // The global object of a node:vm realm can not be frozen; all else of the closing stays.
       vm.runInContext(KEEP_GLOBAL_OPEN, realm);
-      const library = vm.runInContext(LIBRARY, realm) as { open(tables: string): void; run(script: unknown): void };
-      library.open(json);
+      const library = vm.runInContext(LIBRARY, realm) as {
+        open(tables: string): void;
+        deal(luck: string): void;
+        run(script: unknown): void;
+      };
+      library.open(tables);
+      library.deal(luck);
       library.run(vm.runInContext(code, realm));
     },
   });

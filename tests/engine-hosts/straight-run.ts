@@ -1,5 +1,5 @@
 import type { EngineHost } from "../../sandbox/engine/engine.ts";
-import type { GuestReport, GuestTables } from "../../sandbox/engine/guest.ts";
+import type { GuestLuck, GuestReport } from "../../sandbox/engine/guest.ts";
 import { GuestRuntime } from "../../sandbox/engine/runtime.ts";
 import { buildTables } from "../../sandbox/engine/tables.ts";
 import { GLOBAL_WORDS, MARK_PREFIX as M } from "../../sandbox/language/words.ts";
@@ -12,12 +12,12 @@ import type { StraightInput } from "./straight-client.ts";
  * `end`: see `describeEnd`; `digest`: of failure, notes, findings, and the cues as the engine wrote them.
  */
 export async function runStraight(host: EngineHost, { source, layout, song, seed }: StraightInput): Promise<RunEnd> {
-  const tables: GuestTables = { ...buildTables(layout, song), seed, streamOf: [0], streams: [[1, 2, 3]] };
+  const luck: GuestLuck = { seed, streamOf: [0], streams: [[1, 2, 3]] };
   const words = GLOBAL_WORDS.join(",");
   const code = `(function(${M}w,${M}){"use strict";const {${words}}=${M}w;(()=>{\n${source}\n})()})`;
   const module = await host.newModule();
   try {
-    const { end, report, buffer, fuel } = new GuestRuntime(module).run(code, tables);
+    const { end, report, buffer, fuel } = new GuestRuntime(module, buildTables(layout, song)).run({ code, luck });
     const said = host.encodeText(JSON.stringify([report?.failure, report?.notes, report?.findings]));
     const kept = new Uint8Array(said.length + (buffer?.length ?? 0));
     kept.set(said);

@@ -23,8 +23,8 @@ function step(s: Uint32Array): number {
 }
 
 function open(index: number): Uint32Array {
-  const key = state.tables.streams[index] ?? [0, 0, 0];
-  const stream = new Uint32Array([key[0] ^ state.tables.seed, key[1], key[2], 1]);
+  const key = state.luck.streams[index] ?? [0, 0, 0];
+  const stream = new Uint32Array([key[0] ^ state.luck.seed, key[1], key[2], 1]);
   for (let round = 0; round < WARM_UP_ROUNDS; round++) step(stream);
   streams[index] = stream;
   return stream;
@@ -32,7 +32,7 @@ function open(index: number): Uint32Array {
 
 /** The next number of the statement's stream: 0 <= x < 1, a multiple of 1 / 2^32. */
 export function draw(): number {
-  const index = state.tables.streamOf[state.frames.site()] ?? 0;
+  const index = state.luck.streamOf[state.frames.site()] ?? 0;
   return step(streams[index] ?? open(index)) / 0x1_00_00_00_00;
 }
 

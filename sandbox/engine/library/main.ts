@@ -1,4 +1,4 @@
-import type { GuestReport, GuestTables } from "../guest.ts";
+import type { GuestLuck, GuestReport, GuestTables } from "../guest.ts";
 import { MAX_CALL_DEPTH } from "../guest.ts";
 import { chance, oneOf, roll } from "./chance.ts";
 import { hue } from "./colour.ts";
@@ -84,6 +84,10 @@ export const library = {
     state.tables = JSON.parse(tables) as GuestTables;
     state.endTick = toTick(state.tables.song.beats.length - 1);
     harden(draw, [words, marks, Lights, Front, Section, Stop]);
+  },
+  /** Takes the luck of the script that comes next. */
+  deal(luck: string): void {
+    state.luck = JSON.parse(luck) as GuestLuck;
   },
   /** Runs the marked script to its end or to its first problem. */
   run(script: Script): void {

@@ -1,4 +1,4 @@
-import type { GuestFailure, GuestFinding, GuestNote, GuestTables } from "../guest.ts";
+import type { GuestFailure, GuestFinding, GuestLuck, GuestNote, GuestTables } from "../guest.ts";
 import { MAX_FINDINGS, MAX_NOTES } from "../guest.ts";
 import { TICKS_PER_BEAT } from "../../../shared/units.ts";
 
@@ -16,6 +16,7 @@ export interface ScriptFrames {
 
 interface RunState {
   tables: GuestTables;
+  luck: GuestLuck;
   frames: ScriptFrames;
   /** Beats; never rounded. */
   clock: number;
@@ -37,10 +38,8 @@ export const state: RunState = {
     sides: [],
     song: { beats: [], beatsPerBar: 4, bars: [], sections: [], instruments: [], loudness: [] },
     colours: {},
-    seed: 0,
-    streamOf: [],
-    streams: [],
   },
+  luck: { seed: 0, streamOf: [], streams: [] },
   frames: { site: () => 0, callers: [], depth: () => 0 },
   clock: 0,
   endTick: 0,

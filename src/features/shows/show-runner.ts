@@ -1,30 +1,22 @@
-import * as Comlink from "comlink";
 import type { Finding, RunInput, RunOutcome } from "../../../sandbox/engine/model.ts";
 import type { ShowDescription } from "../../../sandbox/timeline/describe.ts";
 import type { Timeline } from "../../../sandbox/timeline/model.ts";
 import type { RibbonCells, RibbonSize } from "../../../sandbox/timeline/ribbon.ts";
 import { RunClient } from "../../lib/run-client.ts";
-import type { CheckWorker } from "../../workers/check.worker.ts";
+import { CheckClient } from "./check-client.ts";
 
 /** What does not change from one run of a show to the next. */
 export type ShowSetting = Omit<RunInput, "source">;
 
-/**
- * Runs and checks the scripts of one show, each in a worker of its own. `dispose` ends both.
- */
+/** Runs and checks the scripts of one show, in workers beside the page. `dispose` ends them. */
 export class ShowRunner {
   readonly #setting: ShowSetting;
   readonly #runs = new RunClient();
-  readonly #checker: Worker;
-  readonly #checks: Comlink.Remote<CheckWorker>;
+  readonly #checks = new CheckClient();
 
   constructor(setting: ShowSetting) {
     this.#setting = setting;
-    this.#checker = new Worker(new URL("../../workers/check.worker.ts", import.meta.url), {
-      type: "module",
-      name: "check",
-    });
-    this.#checks = Comlink.wrap<CheckWorker>(this.#checker);
+    this.#runs.open(setting);
   }
 
   /** The outcome of a script, with other luck than the setting's if given; the latest wins. Bound, so that it can be passed on. */
@@ -47,7 +39,6 @@ export class ShowRunner {
 
   dispose(): void {
     this.#runs.dispose();
-    this.#checks[Comlink.releaseProxy]();
-    this.#checker.terminate();
+    this.#checks.dispose();
   }
 }

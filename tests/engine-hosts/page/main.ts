@@ -37,10 +37,23 @@ function startWorker(): Promise<StraightWorker> {
   return hear().then(() => ({ ask, end: () => worker.terminate() }));
 }
 
+/** Squares and songs by their JSON: a client that is given the same object again has it open already. */
+const settings = new Map<string, unknown>();
+
+function readInput(json: string): RunInput {
+  const input = JSON.parse(json) as RunInput;
+  const keep = <T>(value: T): T => {
+    const key = JSON.stringify(value);
+    if (!settings.has(key)) settings.set(key, value);
+    return settings.get(key) as T;
+  };
+  return { ...input, layout: keep(input.layout), song: keep(input.song) };
+}
+
 window.lab = {
   whole: async (json, deadlineMs) => {
     const client = idle.pop() ?? new RunClient();
-    const outcome = await client.run(JSON.parse(json) as RunInput, deadlineMs);
+    const outcome = await client.run(readInput(json), deadlineMs);
     idle.push(client);
     return endOfOutcome(outcome);
   },
