@@ -1,5 +1,5 @@
 import type { Evidence } from "../../shared/contracts/marking.ts";
-import { SIDES } from "../../shared/contracts/square.ts";
+import { SIDES } from "../../shared/sides.ts";
 import { TICKS_PER_BEAT } from "../../shared/units.ts";
 import { listFronts } from "../square/lights.ts";
 import { measureSpans } from "../timeline/activity.ts";

@@ -1,4 +1,5 @@
-import { SIDES, type Layout, type Side } from "../../shared/contracts/square.ts";
+import type { Layout } from "../../shared/contracts/square.ts";
+import { SIDES, type Side } from "../../shared/sides.ts";
 import { sideGeometry } from "../square/geometry.ts";
 import { listPictureCells, type PictureCells } from "./picture-area.ts";
 

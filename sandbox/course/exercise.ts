@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { SIDES } from "../../shared/contracts/square.ts";
+import { SIDES } from "../../shared/sides.ts";
 
 /**
  * What an exercise looks at to say whether a script does what was asked. Each check is data: a

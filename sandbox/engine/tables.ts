@@ -1,5 +1,6 @@
 import type { BeatMap } from "../../shared/contracts/songs.ts";
-import { SIDES, type Layout } from "../../shared/contracts/square.ts";
+import type { Layout } from "../../shared/contracts/square.ts";
+import { SIDES } from "../../shared/sides.ts";
 import { COLOUR_NAMES } from "../language/colour-names.ts";
 import type { NameTable } from "../language/names.ts";
 import { frontBox, listFronts, listLights, type Light } from "../square/lights.ts";

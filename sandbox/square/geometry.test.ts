@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { SIDES } from "../../shared/contracts/square.ts";
+import { SIDES } from "../../shared/sides.ts";
 import { DEMO_SQUARE, LARGE_SQUARE } from "../../server/db/seed/world/square.ts";
 import { REFERENCE_VIEW, sideGeometry } from "./geometry.ts";
 import { listLights } from "./lights.ts";

@@ -1,4 +1,4 @@
-import { SIDES } from "../../shared/contracts/square.ts";
+import { SIDES } from "../../shared/sides.ts";
 import type { Layout, Side, Silhouette } from "../../shared/contracts/square.ts";
 import { facadeOf } from "./facade.ts";
 import type { Facade, Plot } from "./facade.ts";

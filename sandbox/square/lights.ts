@@ -1,4 +1,4 @@
-import { SIDES } from "../../shared/contracts/square.ts";
+import { SIDES } from "../../shared/sides.ts";
 import type { Box, BoxKind, Front, Layout, Outlet, Side } from "../../shared/contracts/square.ts";
 
 /**

@@ -1,5 +1,6 @@
 import type { BeatMap } from "../../shared/contracts/songs.ts";
-import { SIDES, type Layout, type Side } from "../../shared/contracts/square.ts";
+import type { Layout } from "../../shared/contracts/square.ts";
+import { SIDES, type Side } from "../../shared/sides.ts";
 import { listFronts, listLights } from "../square/lights.ts";
 import { measureSpans, type Activity, type Movement } from "./activity.ts";
 import { nameColour } from "./colour-word.ts";

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { SIDES, type Side } from "../sides.ts";
 import { defineContract } from "../contract.ts";
 import { LayoutIdSchema } from "../ids.ts";
 
@@ -14,9 +15,8 @@ export const KebabSchema = z
   .regex(/^[a-z][a-z0-9]*(-[a-z0-9]+)*$/, "Use lower-case letters, numbers and single hyphens.")
   .max(40);
 
-export const SIDES = ["north", "east", "south", "west"] as const;
 export const SideSchema = z.enum(SIDES);
-export type Side = z.infer<typeof SideSchema>;
+export type { Side };
 
 /** What a box can do: switch slowly, switch at a half-cycle, dim, or drive coloured pixels. */
 export const BOX_KINDS = ["relay", "solid-state", "dimmer", "colour"] as const;

@@ -4,15 +4,29 @@ export interface Noted {
   asked: number;
   askMs: number;
   answered: number;
+  /** When the new light was handed to the picture's worker, and when that had drawn it. */
+  sent: number;
   painted: number;
   /** The latest key, and the script it set going in its turn. */
   key: number;
   keyMs: number;
   /** Script of each animation frame. */
   frames: number[];
+  /** Pictures that were drawn. */
+  pictures: number;
 }
 
-const noted: Noted = { asked: 0, askMs: 0, answered: 0, painted: 0, key: 0, keyMs: 0, frames: [] };
+const noted: Noted = {
+  asked: 0,
+  askMs: 0,
+  answered: 0,
+  sent: 0,
+  painted: 0,
+  key: 0,
+  keyMs: 0,
+  frames: [],
+  pictures: 0,
+};
 Object.assign(window, { noted });
 
 /** Calls back when this turn of the page, and what it drew, is over. */
@@ -22,25 +36,40 @@ function afterTurn(run: () => void): void {
   channel.port2.postMessage(null);
 }
 
+/** A call to a worker as it goes over: the name of what is called, or the kind of a message. */
+interface Posted {
+  readonly path?: readonly string[];
+  readonly kind?: string;
+}
+
 const NativeWorker = window.Worker;
 window.Worker = class extends NativeWorker {
   constructor(url: string | URL, options?: WorkerOptions) {
     super(url, options);
-    if (options?.name !== "run") return;
     const post = this.postMessage.bind(this);
-    this.postMessage = (message: { path?: string[] }, ...rest: [never]) => {
+    this.postMessage = (message: Posted, ...rest: [never]) => {
       const start = performance.now();
       post(message, ...rest);
-      if (message.path?.[0] !== "run") return;
-      noted.askMs = performance.now() - start;
-      noted.asked = performance.now();
-      noted.answered = noted.painted = 0;
-      const handleAnswer = () => {
-        noted.answered = performance.now();
-        this.removeEventListener("message", handleAnswer);
-      };
-      this.addEventListener("message", handleAnswer);
+      const called = message.path?.[0] ?? message.kind;
+      if (called === "prepare") {
+        noted.askMs = performance.now() - start;
+        noted.asked = performance.now();
+        noted.answered = noted.sent = noted.painted = 0;
+      }
+      if (called === "finish") this.#onAnswer(() => (noted.answered = performance.now()));
+      if (called === "draw") {
+        const isNew = noted.answered !== 0 && noted.sent === 0;
+        if (isNew) noted.sent = performance.now();
+        this.#onAnswer(() => {
+          noted.pictures += 1;
+          if (isNew) noted.painted = performance.now();
+        });
+      }
     };
+  }
+
+  #onAnswer(hear: () => void): void {
+    this.addEventListener("message", hear, { once: true });
   }
 };
 
@@ -52,14 +81,6 @@ addEventListener(
   },
   true,
 );
-
-const draw = CanvasRenderingContext2D.prototype.drawImage as (...all: unknown[]) => void;
-CanvasRenderingContext2D.prototype.drawImage = function (this: CanvasRenderingContext2D, ...all: unknown[]) {
-  draw.apply(this, all);
-  if (noted.answered === 0 || noted.painted !== 0 || !this.canvas.isConnected) return;
-  noted.painted = -1;
-  afterTurn(() => (noted.painted = performance.now()));
-};
 
 const request = window.requestAnimationFrame.bind(window);
 let frameAt = 0;

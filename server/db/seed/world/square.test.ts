@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { BOX_KINDS, SIDES } from "../../../../shared/contracts/square.ts";
+import { BOX_KINDS } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
 import { frontBox, listFronts, listLights } from "../../../../sandbox/square/lights.ts";
 import { CONTINUOUS_SHARE } from "./figures.ts";

@@ -1,4 +1,5 @@
-import { LayoutSchema, SIDES } from "../../../../shared/contracts/square.ts";
+import { LayoutSchema } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import type { Box, Circuit, Front, Layout, Side } from "../../../../shared/contracts/square.ts";
 import { silhouetteFor } from "../../../../sandbox/square/silhouette.ts";
 import {

@@ -1,5 +1,6 @@
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
-import { SIDES, type Layout, type Silhouette } from "../../../../shared/contracts/square.ts";
+import type { Layout, Silhouette } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import { COLOUR_NAMES } from "../../../../sandbox/language/colour-names.ts";
 import type { NameTable } from "../../../../sandbox/language/names.ts";
 import type { NameKind } from "../../../../sandbox/language/words.ts";

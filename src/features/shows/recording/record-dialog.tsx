@@ -1,5 +1,6 @@
 import { useEffect, useRef, useState } from "react";
-import { SIDES, type Layout, type Side } from "../../../../shared/contracts/square.ts";
+import type { Layout } from "../../../../shared/contracts/square.ts";
+import { SIDES, type Side } from "../../../../shared/sides.ts";
 import { Button } from "../../../components/button.tsx";
 import { Dialog } from "../../../components/dialog.tsx";
 import { Notice } from "../../../components/notice.tsx";

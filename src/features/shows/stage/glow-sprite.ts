@@ -1,4 +1,4 @@
-import { createSurface, type Surface } from "./surface.ts";
+import { createSurface, type Surface, type Canvas2D, type Context2D } from "./surface.ts";
 
 /**
  * Light is baked as two layers: a *tint* layer, white with alpha, that takes the colour of the
@@ -6,8 +6,8 @@ import { createSurface, type Surface } from "./surface.ts";
  * of a lit pane).
  */
 export interface GlowLayers {
-  readonly tint: HTMLCanvasElement;
-  readonly hot: HTMLCanvasElement;
+  readonly tint: Canvas2D;
+  readonly hot: Canvas2D;
 }
 
 const layers = new Map<number, GlowLayers>();
@@ -57,7 +57,7 @@ function fill(surface: Surface, gradient: CanvasGradient, radius: number): void 
 }
 
 /** Lays a colour into a white layer and puts the hot layer over it. `into` must be as large. */
-export function tintLayers(into: CanvasRenderingContext2D, from: GlowLayers, css: string): void {
+export function tintLayers(into: Context2D, from: GlowLayers, css: string): void {
   into.globalCompositeOperation = "copy";
   into.drawImage(from.tint, 0, 0);
   into.globalCompositeOperation = "source-in";
@@ -73,14 +73,14 @@ const KEPT_LAMPS = 512;
 /** Tinted single lamps by colour, for the pixels of colour strips. */
 export class LampCache {
   readonly #radius: number;
-  readonly #lamps = new Map<number, HTMLCanvasElement>();
+  readonly #lamps = new Map<number, Canvas2D>();
 
   constructor(radius: number) {
     this.#radius = radius;
   }
 
   /** `colour` is 0xRRGGBB, already coarse, else the cache is of no use. */
-  get(colour: number, css: () => string): HTMLCanvasElement {
+  get(colour: number, css: () => string): Canvas2D {
     const known = this.#lamps.get(colour);
     if (known) return known;
     if (this.#lamps.size >= KEPT_LAMPS) {

@@ -3,6 +3,7 @@ import { colourToHex } from "../../../../sandbox/timeline/colour.ts";
 import { LampCache } from "./glow-sprite.ts";
 import { haloRadius, LightSprite, type LightScale } from "./light-sprite.ts";
 import { toShownColour } from "./shown-colour.ts";
+import type { Context2D } from "./surface.ts";
 
 /** Baking runs in slices of this length, so that a page with a running show stays smooth. */
 const BAKE_SLICE_MS = 8;
@@ -50,7 +51,7 @@ export class LightPainter {
    * Adds all that is lit; `rgb` holds three linear channels a light, by index in walking order. The
    * context is in view pixels and should add light ("lighter"). Gives back how many lights were lit.
    */
-  draw(context: CanvasRenderingContext2D, rgb: Float32Array): number {
+  draw(context: Context2D, rgb: Float32Array): number {
     let lit = 0;
     for (const entry of this.#lights) {
       const { alpha, colour } = shownAt(rgb, entry.light.lightIndex);

@@ -4,7 +4,7 @@ import { colourToHex } from "../../../../sandbox/timeline/colour.ts";
 import { getGlowLayers, tintLayers, type GlowLayers } from "./glow-sprite.ts";
 import { barThickness, wallClip } from "./paint-house.ts";
 import { listBars, panesPath } from "./paths.ts";
-import { createSurface, releaseSurface, type Surface } from "./surface.ts";
+import { createSurface, releaseSurface, type Surface, type Context2D } from "./surface.ts";
 
 /** Measures of light in a view. */
 export interface LightScale {
@@ -37,7 +37,7 @@ export class LightSprite {
   }
 
   /** Draws the light at `alpha` (0 to 1) in `colour` (0xRRGGBB); the context is in view pixels. */
-  draw(context: CanvasRenderingContext2D, colour: number, alpha: number): void {
+  draw(context: Context2D, colour: number, alpha: number): void {
     if (colour !== this.#colour) {
       tintLayers(this.#tinted.context, this.#layers, colourToHex(colour));
       this.#colour = colour;
@@ -86,12 +86,7 @@ function bakeLayers(front: FrontGeometry, light: LightGeometry, box: Box, scale:
 const WASH: { readonly [part: string]: number } = { windows: 0.034, door: 0.085 };
 
 /** Light falling on the paper of the house, and no further. */
-function bakeWash(
-  context: CanvasRenderingContext2D,
-  front: FrontGeometry,
-  light: LightGeometry,
-  scale: LightScale,
-): void {
+function bakeWash(context: Context2D, front: FrontGeometry, light: LightGeometry, scale: LightScale): void {
   const clip = wallClip(front);
   if (!clip) return;
   const reach = haloRadius(scale) * 3.4;
@@ -114,8 +109,8 @@ function bakeWash(
 
 /** Paper panes lit from the room: pale in the middle, deep at the rim. Bars stay dark. */
 function bakePanes(
-  tint: CanvasRenderingContext2D,
-  hot: CanvasRenderingContext2D,
+  tint: Context2D,
+  hot: Context2D,
   front: FrontGeometry,
   light: LightGeometry,
   scale: LightScale,
@@ -134,7 +129,7 @@ function bakePanes(
       for (const bar of listBars(opening, thickness)) context.clearRect(bar.x, bar.y, bar.width, bar.height);
 }
 
-function bakePane(tint: CanvasRenderingContext2D, hot: CanvasRenderingContext2D, pane: Pane): void {
+function bakePane(tint: Context2D, hot: Context2D, pane: Pane): void {
   const path = panesPath([pane]);
   const x = pane.x + pane.width / 2;
   const y = pane.y + pane.height * 0.56;
@@ -154,12 +149,7 @@ function bakePane(tint: CanvasRenderingContext2D, hot: CanvasRenderingContext2D,
   hot.fill(path);
 }
 
-function bakeLamps(
-  tint: CanvasRenderingContext2D,
-  hot: CanvasRenderingContext2D,
-  light: LightGeometry,
-  scale: LightScale,
-): void {
+function bakeLamps(tint: Context2D, hot: Context2D, light: LightGeometry, scale: LightScale): void {
   const isWindows = light.part === "windows";
   const radius = haloRadius(scale);
   const glow = getGlowLayers(Math.ceil(radius * scale.dpr));

@@ -1,12 +1,8 @@
 import type { FrontGeometry } from "../../../../sandbox/square/geometry.ts";
+import type { Context2D } from "./surface.ts";
 
 /** Strings that are not lit: dull beads on a thin wire. */
-export function paintBeads(
-  context: CanvasRenderingContext2D,
-  front: FrontGeometry,
-  unit: number,
-  isSmall: boolean,
-): void {
+export function paintBeads(context: Context2D, front: FrontGeometry, unit: number, isSmall: boolean): void {
   const radius = isSmall ? 0.5 : Math.max(0.95, unit * 0.0036);
   const isTree = front.tree !== null;
   for (const light of front.lights) {

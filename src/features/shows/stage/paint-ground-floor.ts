@@ -2,9 +2,10 @@ import { hashText, numbersFrom } from "../../../../sandbox/square/stable-chance.
 import type { HouseSheet } from "./paint-house.ts";
 import { cutSheet, shade } from "./paper.ts";
 import { rectPath } from "./paths.ts";
+import type { Context2D } from "./surface.ts";
 
 /** Columns, a shop's board, an awning, a pennant or a marquee: what the street sees first. */
-export function paintGroundFloor(context: CanvasRenderingContext2D, house: HouseSheet): void {
+export function paintGroundFloor(context: Context2D, house: HouseSheet): void {
   const { silhouette } = house.front;
   const hasSignLight = house.front.lights.some((light) => light.part === "sign");
   if (silhouette.ground === "columns") paintColumns(context, house);
@@ -15,7 +16,7 @@ export function paintGroundFloor(context: CanvasRenderingContext2D, house: House
   if (hasSignLight) paintNameBoard(context, house);
 }
 
-function paintColumns(context: CanvasRenderingContext2D, { facade, ink, soft }: HouseSheet): void {
+function paintColumns(context: Context2D, { facade, ink, soft }: HouseSheet): void {
   const { x, width, groundY, groundFloor: g, unit } = facade;
   for (const share of [0.07, 0.31, 0.63, 0.87]) {
     const left = x + width * share;
@@ -27,7 +28,7 @@ function paintColumns(context: CanvasRenderingContext2D, { facade, ink, soft }: 
 }
 
 /** A shop's board with letters too far away to read. */
-function paintBoard(context: CanvasRenderingContext2D, { facade, front, ink, soft }: HouseSheet): void {
+function paintBoard(context: Context2D, { facade, front, ink, soft }: HouseSheet): void {
   const { x, width, groundY, groundFloor: g, unit } = facade;
   const board = rectPath(x + width * 0.05, groundY - g * 0.93, width * 0.9, g * 0.16);
   cutSheet(context, board, { fill: shade(ink, -0.2), blur: soft(5), drop: soft(2) });
@@ -42,7 +43,7 @@ function paintBoard(context: CanvasRenderingContext2D, { facade, front, ink, sof
 }
 
 /** An arm with a small pennant, cut from lighter paper. */
-function paintPennant(context: CanvasRenderingContext2D, { facade, ink, soft }: HouseSheet): void {
+function paintPennant(context: Context2D, { facade, ink, soft }: HouseSheet): void {
   const { x, width, groundY, groundFloor, unit, door } = facade;
   const isRight = door.x > x + width / 2;
   const from = x + width * (isRight ? 0.9 : 0.1);
@@ -70,7 +71,7 @@ function paintPennant(context: CanvasRenderingContext2D, { facade, ink, soft }: 
   context.fillRect(left + size.width * 0.28, top + size.height * 0.24, size.width * 0.44, size.height * 0.1);
 }
 
-function paintAwning(context: CanvasRenderingContext2D, { facade, front, soft }: HouseSheet): void {
+function paintAwning(context: Context2D, { facade, front, soft }: HouseSheet): void {
   const { groundFloor: g, unit } = facade;
   const { x, y, width } = facade.awning;
   const isPale = front.silhouette.awning === 1;
@@ -105,7 +106,7 @@ function paintAwning(context: CanvasRenderingContext2D, { facade, front, soft }:
   context.restore();
 }
 
-function paintMarquee(context: CanvasRenderingContext2D, house: HouseSheet, isNamed: boolean): void {
+function paintMarquee(context: Context2D, house: HouseSheet, isNamed: boolean): void {
   const { facade, ink, soft } = house;
   const { x, width, groundY, groundFloor: g, unit, eaveY, topY } = facade;
   const top = groundY - g * 0.98;
@@ -132,7 +133,7 @@ function paintMarquee(context: CanvasRenderingContext2D, house: HouseSheet, isNa
 }
 
 /** The board on which a sign's light hangs. */
-function paintNameBoard(context: CanvasRenderingContext2D, { facade, front, ink, soft }: HouseSheet): void {
+function paintNameBoard(context: Context2D, { facade, front, ink, soft }: HouseSheet): void {
   const { x, y, width, height } = facade.sign;
   cutSheet(context, rectPath(x, y, width, height), { fill: shade(ink, -0.3), blur: soft(6), drop: soft(2) });
   context.globalAlpha = 0.5;
@@ -141,7 +142,7 @@ function paintNameBoard(context: CanvasRenderingContext2D, { facade, front, ink,
 }
 
 function paintLetters(
-  context: CanvasRenderingContext2D,
+  context: Context2D,
   text: string,
   box: { readonly x: number; readonly y: number; readonly width: number; readonly height: number },
   fill = "#2a3152",

@@ -4,6 +4,7 @@ import { paintGroundFloor } from "./paint-ground-floor.ts";
 import { paintChimney, paintTower, paintTiles } from "./paint-roof.ts";
 import { cutSheet, ROOM, shade, sheetOf, toCss, type Ink } from "./paper.ts";
 import { addPane, addPoints, listBars, outlinePath, rectPath } from "./paths.ts";
+import type { Context2D } from "./surface.ts";
 
 /** Where and how finely a house is painted. */
 export interface PaintScale {
@@ -26,7 +27,7 @@ export interface HouseSheet {
 const FLAT_ROOFS = ["parapet", "pediment", "hip", "round", "deco", "tower"];
 
 /** Paints one unlit house: dark rooms, the facade with its windows cut out, and what hangs on it. */
-export function paintHouse(context: CanvasRenderingContext2D, front: FrontGeometry, scale: PaintScale): void {
+export function paintHouse(context: Context2D, front: FrontGeometry, scale: PaintScale): void {
   if (!front.facade) return;
   const { facade } = front;
   const factor = (scale.isSmall ? 0.25 : facade.unit / 300) * scale.dpr;
@@ -48,7 +49,7 @@ export function paintHouse(context: CanvasRenderingContext2D, front: FrontGeomet
   paintGroundFloor(context, house);
 }
 
-function paintWall(context: CanvasRenderingContext2D, house: HouseSheet): void {
+function paintWall(context: Context2D, house: HouseSheet): void {
   const { facade, front, ink, soft } = house;
   const { x, y, width, height, groundY, unit } = facade;
   const outline = new Path2D();
@@ -90,7 +91,7 @@ function paintWall(context: CanvasRenderingContext2D, house: HouseSheet): void {
   context.stroke(lip);
 }
 
-function paintMouldings(context: CanvasRenderingContext2D, house: HouseSheet): void {
+function paintMouldings(context: Context2D, house: HouseSheet): void {
   const { facade, front, ink, soft } = house;
   const { x, width, unit, groundY, groundFloor, eaveY } = facade;
   const roof = front.silhouette.roof;
@@ -121,7 +122,7 @@ function paintMouldings(context: CanvasRenderingContext2D, house: HouseSheet): v
     });
 }
 
-function paintBars(context: CanvasRenderingContext2D, { facade, ink }: HouseSheet): void {
+function paintBars(context: Context2D, { facade, ink }: HouseSheet): void {
   context.fillStyle = shade(ink, -0.08);
   for (const opening of facade.openings)
     for (const bar of listBars(opening, barThickness(facade.unit)))
@@ -133,7 +134,7 @@ export function barThickness(unit: number): number {
   return Math.max(0.8, unit * 0.0036);
 }
 
-function paintDoor(context: CanvasRenderingContext2D, { facade, ink, soft }: HouseSheet): void {
+function paintDoor(context: Context2D, { facade, ink, soft }: HouseSheet): void {
   const { door, groundY, unit } = facade;
   const hole = new Path2D();
   addPane(hole, door);

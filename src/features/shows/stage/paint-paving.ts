@@ -2,7 +2,7 @@ import { numbersFrom } from "../../../../sandbox/square/stable-chance.ts";
 import type { PictureSize } from "./paint-sky.ts";
 import { cutSheet } from "./paper.ts";
 import { rectPath } from "./paths.ts";
-import { createSurface, type Surface } from "./surface.ts";
+import { createSurface, type Surface, type Context2D } from "./surface.ts";
 
 const ROWS = 8;
 /** The reflection is drawn at half size: wet stone is never sharp. */
@@ -15,7 +15,7 @@ function stoneRows({ height, groundY }: PictureSize): number[] {
 }
 
 /** Wet paving: a dark mirror of what is drawn above it, stones in perspective, a kerb. */
-export function paintPaving(context: CanvasRenderingContext2D, size: PictureSize): void {
+export function paintPaving(context: Context2D, size: PictureSize): void {
   const { width, height, groundY, dpr } = size;
   const paving = height - groundY;
   const ground = context.createLinearGradient(0, groundY, 0, height);
@@ -42,7 +42,7 @@ export function paintPaving(context: CanvasRenderingContext2D, size: PictureSize
   });
 }
 
-function paintStones(context: CanvasRenderingContext2D, size: PictureSize): void {
+function paintStones(context: Context2D, size: PictureSize): void {
   const { width, height, groundY } = size;
   const paving = height - groundY;
   const rows = stoneRows(size);

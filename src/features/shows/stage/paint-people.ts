@@ -1,5 +1,6 @@
 import type { PictureSize } from "./paint-sky.ts";
 import { cutSheet } from "./paper.ts";
+import type { Context2D } from "./surface.ts";
 
 type Hat = "brim" | "bobble" | "bun";
 
@@ -25,7 +26,7 @@ const ONLOOKERS: readonly Onlooker[] = [
 ];
 
 /** Onlookers in the nearest, darkest sheet: heads and shoulders, cropped by the lower edge. */
-export function paintPeople(context: CanvasRenderingContext2D, size: PictureSize, unit: number): void {
+export function paintPeople(context: Context2D, size: PictureSize, unit: number): void {
   const head = unit * 0.041;
   for (const onlooker of ONLOOKERS)
     paintOnlooker(context, size, {
@@ -50,7 +51,7 @@ interface Figure {
   readonly fill: string;
 }
 
-function paintOnlooker(context: CanvasRenderingContext2D, size: PictureSize, figure: Figure): void {
+function paintOnlooker(context: Context2D, size: PictureSize, figure: Figure): void {
   const { x, chin, head: s, fill } = figure;
   const { dpr } = size;
   const foot = size.height + 4;

@@ -1,8 +1,9 @@
 import type { HouseSheet } from "./paint-house.ts";
 import { cutSheet, ROOM, shade } from "./paper.ts";
 import { addPane, addPoints, closedPath, rectPath } from "./paths.ts";
+import type { Context2D } from "./surface.ts";
 
-export function paintChimney(context: CanvasRenderingContext2D, { facade, ink, soft }: HouseSheet): void {
+export function paintChimney(context: Context2D, { facade, ink, soft }: HouseSheet): void {
   if (!facade.chimney) return;
   const { x, y, width, height } = facade.chimney;
   const path = rectPath(x, y, width, height);
@@ -10,7 +11,7 @@ export function paintChimney(context: CanvasRenderingContext2D, { facade, ink, s
   cutSheet(context, path, { fill: shade(ink, -0.3), blur: soft(8), drop: soft(2) });
 }
 
-export function paintTower(context: CanvasRenderingContext2D, house: HouseSheet): void {
+export function paintTower(context: Context2D, house: HouseSheet): void {
   const { facade, ink, soft, isSmall } = house;
   if (!facade.tower) return;
   const { body, cap, belfry, clock } = facade.tower;
@@ -26,7 +27,7 @@ export function paintTower(context: CanvasRenderingContext2D, house: HouseSheet)
   if (!isSmall) paintClock(context, house);
 }
 
-function paintClock(context: CanvasRenderingContext2D, { facade, ink, soft }: HouseSheet): void {
+function paintClock(context: Context2D, { facade, ink, soft }: HouseSheet): void {
   if (!facade.tower) return;
   const { body, clock } = facade.tower;
   const { x, y, radius } = clock;
@@ -60,7 +61,7 @@ function paintClock(context: CanvasRenderingContext2D, { facade, ink, soft }: Ho
 }
 
 /** A hip roof is a darker sheet of its own, with scallops for tiles. */
-export function paintTiles(context: CanvasRenderingContext2D, { facade, front, ink, soft }: HouseSheet): void {
+export function paintTiles(context: Context2D, { facade, front, ink, soft }: HouseSheet): void {
   if (front.silhouette.roof !== "hip") return;
   const roof = new Path2D();
   addPoints(roof, [

@@ -1,7 +1,8 @@
 import type { Side } from "../../../../shared/contracts/square.ts";
-import { SIDES } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import { numbersFrom } from "../../../../sandbox/square/stable-chance.ts";
 import { cutSheet } from "./paper.ts";
+import type { Context2D } from "./surface.ts";
 
 /** Size of the picture in view pixels; `groundY` is the foot of the houses. */
 export interface PictureSize {
@@ -12,7 +13,7 @@ export interface PictureSize {
 }
 
 /** The blue hour: a graded sky, a few stars, torn clouds and roofs in the haze. */
-export function paintSky(context: CanvasRenderingContext2D, size: PictureSize, side: Side): void {
+export function paintSky(context: Context2D, size: PictureSize, side: Side): void {
   const { width, height, groundY, dpr } = size;
   const sky = context.createLinearGradient(0, 0, 0, groundY);
   sky.addColorStop(0, "#1d2442");
@@ -48,7 +49,7 @@ export function paintSky(context: CanvasRenderingContext2D, size: PictureSize, s
     });
 }
 
-function paintStars(context: CanvasRenderingContext2D, { width, groundY }: PictureSize): void {
+function paintStars(context: Context2D, { width, groundY }: PictureSize): void {
   const next = numbersFrom(11);
   for (let star = 0; star < 46; star += 1) {
     const y = next() ** 1.8 * groundY * 0.5;

@@ -2,12 +2,13 @@ import type { FrontGeometry } from "../../../../sandbox/square/geometry.ts";
 import type { PaintScale } from "./paint-house.ts";
 import { cutSheet, layGrain, mixInk, toCss, type Ink } from "./paper.ts";
 import { closedPath } from "./paths.ts";
+import type { Context2D } from "./surface.ts";
 
 const LOW: Ink = [33, 50, 66];
 const HIGH: Ink = [58, 78, 98];
 
 /** Paints an unlit tree: layers of branches, each a sheet on the one below, and a pale tip. */
-export function paintTree(context: CanvasRenderingContext2D, front: FrontGeometry, scale: PaintScale): void {
+export function paintTree(context: Context2D, front: FrontGeometry, scale: PaintScale): void {
   const { tree } = front;
   if (!tree) return;
   const soft = scale.isSmall ? 0.3 : 1;

@@ -1,7 +1,7 @@
 import type { Side } from "../../../../shared/contracts/square.ts";
-import { SIDES } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import { numbersFrom } from "../../../../sandbox/square/stable-chance.ts";
-import { createSurface } from "./surface.ts";
+import { createSurface, type Canvas2D, type Context2D } from "./surface.ts";
 
 /** Red, green and blue, 0 to 255 (sRGB). */
 export type Ink = readonly [number, number, number];
@@ -53,7 +53,7 @@ export interface CutOptions {
 }
 
 /** One layer of cut paper: a filled outline with the shadow that it throws on what lies below. */
-export function cutSheet(context: CanvasRenderingContext2D, path: Path2D, options: CutOptions): void {
+export function cutSheet(context: Context2D, path: Path2D, options: CutOptions): void {
   context.save();
   context.shadowColor = `rgba(8,10,26,${options.alpha ?? 0.5})`;
   context.shadowBlur = options.blur;
@@ -65,10 +65,10 @@ export function cutSheet(context: CanvasRenderingContext2D, path: Path2D, option
 }
 
 const GRAIN_SIZE = 192;
-let grain: HTMLCanvasElement | null = null;
+let grain: Canvas2D | null = null;
 
 /** The grain of the paper: a tile, made once. */
-export function getGrain(): HTMLCanvasElement {
+export function getGrain(): Canvas2D {
   if (grain) return grain;
   const { canvas, context } = createSurface(GRAIN_SIZE, GRAIN_SIZE);
   const next = numbersFrom(5);
@@ -100,7 +100,7 @@ export function getGrain(): HTMLCanvasElement {
 
 /** Lays the grain over what is drawn so far. */
 export function layGrain(
-  context: CanvasRenderingContext2D,
+  context: Context2D,
   operation: GlobalCompositeOperation,
   alpha: number,
   box: { readonly x: number; readonly y: number; readonly width: number; readonly height: number },

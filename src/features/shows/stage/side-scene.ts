@@ -8,7 +8,7 @@ import { paintPeople } from "./paint-people.ts";
 import { paintSky, type PictureSize } from "./paint-sky.ts";
 import { paintTree } from "./paint-tree.ts";
 import { layGrain } from "./paper.ts";
-import { createSurface, releaseSurface, type Surface } from "./surface.ts";
+import { createSurface, releaseSurface, type Surface, type Context2D } from "./surface.ts";
 
 /** Light spills this far below the foot of the houses, in view pixels. */
 const SPILL = 30;
@@ -29,7 +29,6 @@ export interface SceneOptions {
  * on it. Dispose it when side or size change.
  */
 export class SideScene {
-  readonly fronts: readonly FrontGeometry[];
   readonly #size: PictureSize;
   readonly #bloom: number;
   readonly #base: Surface;
@@ -46,9 +45,9 @@ export class SideScene {
   constructor({ layout, side, view, dpr, hasBloom }: SceneOptions) {
     this.#bloom = hasBloom ? BLOOM : 0;
     const { width, height } = view;
-    this.fronts = sideGeometry(layout, side, view);
-    const houses = this.fronts.filter((front) => front.facade);
-    const trees = this.fronts.filter((front) => front.tree);
+    const fronts = sideGeometry(layout, side, view);
+    const houses = fronts.filter((front) => front.facade);
+    const trees = fronts.filter((front) => front.tree);
     const frame = viewFrame(view, houses.length);
     this.#size = { width, height, groundY: frame.groundY, dpr };
     this.#base = this.#paintBase(side, houses, frame.unit);
@@ -69,7 +68,7 @@ export class SideScene {
   }
 
   /** Draws the side under a frame's light; gives back how many lights are lit in the picture. */
-  draw(context: CanvasRenderingContext2D, rgb: Float32Array): number {
+  draw(context: Context2D, rgb: Float32Array): number {
     const { dpr } = this.#size;
     const lit = this.#drawLight(rgb);
     context.setTransform(1, 0, 0, 1, 0, 0);
@@ -118,7 +117,7 @@ export class SideScene {
     return base;
   }
 
-  #paintLayer(paint: (context: CanvasRenderingContext2D) => void): Surface {
+  #paintLayer(paint: (context: Context2D) => void): Surface {
     const { width, height, dpr } = this.#size;
     const layer = createSurface(width * dpr, height * dpr);
     layer.context.scale(dpr, dpr);
@@ -146,7 +145,7 @@ export class SideScene {
     twelfth.context.drawImage(quarter.canvas, 0, 0, twelfth.canvas.width, twelfth.canvas.height);
   }
 
-  #drawReflection(into: CanvasRenderingContext2D): void {
+  #drawReflection(into: Context2D): void {
     const { context, canvas } = this.#reflection;
     const { width, height, groundY } = this.#size;
     const quarter = this.#quarter.canvas;

@@ -1,8 +1,6 @@
 import type { Layout, Side } from "../../../../shared/contracts/square.ts";
-import type { FrontGeometry } from "../../../../sandbox/square/geometry.ts";
-import { findHit, type StageHit } from "./hit-test.ts";
 import { SideScene } from "./side-scene.ts";
-import { getContext } from "./surface.ts";
+import { getContext, type Canvas2D, type Context2D } from "./surface.ts";
 
 /** Finer than this nobody sees, and it costs four times the pixels. */
 const LARGEST_DPR = 2;
@@ -22,30 +20,21 @@ export interface StageSize {
  * owns it says when to draw. `setSize` comes first; `dispose` frees its pixels.
  */
 export class Stage {
-  readonly #canvas: HTMLCanvasElement;
-  readonly #context: CanvasRenderingContext2D;
+  readonly #canvas: Canvas2D;
+  readonly #context: Context2D;
   readonly #hasBloom: boolean;
-  #layout: Layout;
+  readonly #layout: Layout;
   #side: Side = "north";
   #first = 0;
   #size: StageSize | null = null;
   #scene: SideScene | null = null;
 
   /** Without bloom the lit areas are those in which flashes are measured. */
-  constructor(canvas: HTMLCanvasElement, layout: Layout, { hasBloom = true }: { readonly hasBloom?: boolean } = {}) {
+  constructor(canvas: Canvas2D, layout: Layout, { hasBloom = true }: { readonly hasBloom?: boolean } = {}) {
     this.#canvas = canvas;
-    this.#context = getContext(canvas, false);
+    this.#context = getContext(canvas);
     this.#layout = layout;
     this.#hasBloom = hasBloom;
-  }
-
-  get side(): Side {
-    return this.#side;
-  }
-
-  /** The fronts in the picture, with their places in it. */
-  get fronts(): readonly FrontGeometry[] {
-    return this.#scene?.fronts ?? [];
   }
 
   setSize(size: StageSize): void {
@@ -53,12 +42,6 @@ export class Stage {
     this.#size = { ...size, dpr };
     this.#canvas.width = Math.max(1, Math.round(size.width * dpr));
     this.#canvas.height = Math.max(1, Math.round(size.height * dpr));
-    this.#dropScene();
-  }
-
-  setLayout(layout: Layout): void {
-    if (layout === this.#layout) return;
-    this.#layout = layout;
     this.#dropScene();
   }
 
@@ -74,11 +57,6 @@ export class Stage {
   draw(rgb: Float32Array): number {
     const scene = this.#getScene();
     return scene ? scene.draw(this.#context, rgb) : 0;
-  }
-
-  /** What is at a place in CSS pixels from the canvas's corner. */
-  findHit(x: number, y: number): StageHit | null {
-    return findHit(this.fronts, x, y);
   }
 
   dispose(): void {

@@ -1,23 +1,29 @@
+/** A canvas of the page, or one that a worker holds. */
+export type Canvas2D = HTMLCanvasElement | OffscreenCanvas;
+export type Context2D = CanvasRenderingContext2D | OffscreenCanvasRenderingContext2D;
+
 /** A canvas that is never shown, with its drawing context. */
 export interface Surface {
-  readonly canvas: HTMLCanvasElement;
-  readonly context: CanvasRenderingContext2D;
+  readonly canvas: OffscreenCanvas;
+  readonly context: OffscreenCanvasRenderingContext2D;
 }
 
 /** A fresh, transparent surface of at least one pixel each way. */
 export function createSurface(width: number, height: number): Surface {
-  const canvas = document.createElement("canvas");
-  canvas.width = Math.max(1, Math.ceil(width));
-  canvas.height = Math.max(1, Math.ceil(height));
-  return { canvas, context: getContext(canvas, true) };
+  const canvas = new OffscreenCanvas(Math.max(1, Math.ceil(width)), Math.max(1, Math.ceil(height)));
+  const context = canvas.getContext("2d");
+  if (!context) throw new Error(NO_CONTEXT);
+  return { canvas, context };
 }
 
-/** The 2D context of a canvas. Throws when the browser gives none (too many or too large canvases). */
-export function getContext(canvas: HTMLCanvasElement, hasAlpha: boolean): CanvasRenderingContext2D {
-  const context = canvas.getContext("2d", { alpha: hasAlpha });
-  if (!context) throw new Error("The browser gave no 2D drawing context.");
+/** The opaque 2D context of a canvas that is shown. Throws when the browser gives none (too many or too large canvases). */
+export function getContext(canvas: Canvas2D): Context2D {
+  const context = canvas.getContext("2d", { alpha: false }) as Context2D | null;
+  if (!context) throw new Error(NO_CONTEXT);
   return context;
 }
+
+const NO_CONTEXT = "The browser gave no 2D drawing context.";
 
 /** Frees the pixels at once instead of at the next garbage collection. */
 export function releaseSurface(surface: Surface): void {

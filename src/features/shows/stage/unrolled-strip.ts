@@ -1,39 +1,14 @@
-import { SIDES, type Layout, type Side } from "../../../../shared/contracts/square.ts";
+import type { Layout } from "../../../../shared/contracts/square.ts";
 import { sideGeometry, viewFrame, type FrontGeometry } from "../../../../sandbox/square/geometry.ts";
+import { FREE_WIDTH, gapOf, GROUND, listSideSpans } from "./side-spans.ts";
 import { LightPainter } from "./light-painter.ts";
 import { paintBeads } from "./paint-beads.ts";
 import { paintHouse } from "./paint-house.ts";
 import { paintTree } from "./paint-tree.ts";
-import { createSurface, getContext, releaseSurface, type Surface } from "./surface.ts";
+import { createSurface, getContext, releaseSurface, type Surface, type Canvas2D, type Context2D } from "./surface.ts";
 
 /** Pixels of a strip that are drawn: every fourth, more do not fit. */
 const PIXEL_STEP = 4;
-/** Ground below the houses, in CSS pixels. */
-const GROUND = 7;
-
-/** Where a side lies in the strip, in CSS pixels. */
-export interface SideSpan {
-  readonly side: Side;
-  readonly x: number;
-  readonly width: number;
-}
-
-/** Width of what stands free, as a share of the height of the houses. */
-const FREE_WIDTH = 0.5;
-
-function gapOf(width: number): number {
-  return Math.max(5, width * 0.009);
-}
-
-/** Where the sides lie in a strip of this size; what stands free has a place at its right end. */
-export function listSideSpans(layout: Layout, size: { readonly width: number; readonly height: number }): SideSpan[] {
-  const gap = gapOf(size.width);
-  const hasFree = layout.fronts.some((front) => front.side === null);
-  const free = hasFree ? (size.height - GROUND) * FREE_WIDTH + gap : 0;
-  const width = Math.max(0, (size.width - gap * (SIDES.length + 1) - free) / SIDES.length);
-  return SIDES.map((side, i) => ({ side, x: gap + i * (width + gap), width }));
-}
-
 interface Block {
   /** Shift of the block's own view in the strip. */
   readonly x: number;
@@ -43,16 +18,16 @@ interface Block {
 
 /** The whole square unrolled below the stage: four sides in walking order, then what stands free. */
 export class UnrolledStrip {
-  readonly #canvas: HTMLCanvasElement;
-  readonly #context: CanvasRenderingContext2D;
-  #layout: Layout;
+  readonly #canvas: Canvas2D;
+  readonly #context: Context2D;
+  readonly #layout: Layout;
   #size = { width: 0, height: 0, dpr: 1 };
   #base: Surface | null = null;
   #blocks: Block[] = [];
 
-  constructor(canvas: HTMLCanvasElement, layout: Layout) {
+  constructor(canvas: Canvas2D, layout: Layout) {
     this.#canvas = canvas;
-    this.#context = getContext(canvas, false);
+    this.#context = getContext(canvas);
     this.#layout = layout;
   }
 
@@ -62,12 +37,6 @@ export class UnrolledStrip {
     this.#canvas.width = Math.max(1, Math.round(size.width * dpr));
     this.#canvas.height = Math.max(1, Math.round(size.height * dpr));
     this.#build();
-  }
-
-  setLayout(layout: Layout): void {
-    if (layout === this.#layout) return;
-    this.#layout = layout;
-    if (this.#size.width > 0) this.#build();
   }
 
   draw(rgb: Float32Array): void {

@@ -1,5 +1,6 @@
 import { useState } from "react";
-import { SIDES, type Front, type Layout } from "../../../../shared/contracts/square.ts";
+import type { Front, Layout } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import { listFronts } from "../../../../sandbox/square/lights.ts";
 import { Button } from "../../../components/button.tsx";
 import { joinClasses } from "../../../components/class-names.ts";

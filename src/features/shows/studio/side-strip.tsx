@@ -1,5 +1,5 @@
 import type { Side } from "../../../../shared/contracts/square.ts";
-import type { SideSpan } from "../stage/unrolled-strip.ts";
+import type { SideSpan } from "../stage/side-spans.ts";
 
 export interface SideStripProps {
   spans: readonly SideSpan[];

@@ -1,4 +1,4 @@
-import { SIDES, type Side } from "../../../../shared/contracts/square.ts";
+import { SIDES, type Side } from "../../../../shared/sides.ts";
 import { Icon } from "../../../components/icon.tsx";
 
 export interface SideWalkProps {

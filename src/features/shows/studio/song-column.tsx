@@ -1,5 +1,6 @@
 import { useCallback, useEffect, useMemo, useState } from "react";
-import { SIDES, type Layout } from "../../../../shared/contracts/square.ts";
+import type { Layout } from "../../../../shared/contracts/square.ts";
+import { SIDES } from "../../../../shared/sides.ts";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import { TICKS_PER_BEAT } from "../../../../shared/units.ts";
 import { listFronts, listLights } from "../../../../sandbox/square/lights.ts";

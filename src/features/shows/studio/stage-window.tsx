@@ -1,11 +1,14 @@
 import { useCallback, useEffect, useMemo, useRef, useState, type PointerEvent } from "react";
-import { SIDES, type Layout, type Side } from "../../../../shared/contracts/square.ts";
+import type { Layout } from "../../../../shared/contracts/square.ts";
+import { SIDES, type Side } from "../../../../shared/sides.ts";
 import { listFronts, listLights, type Light } from "../../../../sandbox/square/lights.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { useElementSize } from "../../../hooks/use-element-size.ts";
 import { useMediaQuery } from "../../../hooks/use-media-query.ts";
-import { Stage } from "../stage/stage.ts";
-import { listSideSpans, UnrolledStrip } from "../stage/unrolled-strip.ts";
+import { sideGeometry } from "../../../../sandbox/square/geometry.ts";
+import { findHit } from "../stage/hit-test.ts";
+import { Picture } from "../stage/picture.ts";
+import { listSideSpans } from "../stage/side-spans.ts";
 import { findLitLight, type LitLight } from "./lit-light.ts";
 import type { ShowPlayer } from "./show-player.ts";
 import { FrontButtons } from "./front-buttons.tsx";
@@ -39,8 +42,8 @@ export function StageWindow({
   onGoToLine,
   description,
 }: StageWindowProps) {
-  const stageRef = useRef<HTMLCanvasElement>(null);
-  const stripRef = useRef<HTMLCanvasElement>(null);
+  const stageRef = useRef<HTMLDivElement>(null);
+  const stripRef = useRef<HTMLDivElement>(null);
   const stageBox = useRef<HTMLDivElement>(null);
   const stripBox = useRef<HTMLDivElement>(null);
   const stageSize = useElementSize(stageBox);
@@ -53,32 +56,31 @@ export function StageWindow({
   const isPhone = useMediaQuery("(max-width: 559px)");
   const sideLength = fronts.filter(({ front }) => front.side === side).length;
 
-  const stage = useDisposable(() => new Stage(getCanvas(stageRef.current), layout), [layout]);
-  const strip = useDisposable(() => new UnrolledStrip(getCanvas(stripRef.current), layout), [layout]);
+  const from = isPhone ? first : 0;
+  const view = useMemo(
+    () => ({ ...stageSize, first: from, ...(isPhone && { count: PHONE_FRONTS }) }),
+    [stageSize, isPhone, from],
+  );
+  const shownFronts = useMemo(() => (view.width > 0 ? sideGeometry(layout, side, view) : []), [layout, side, view]);
+
+  const [hasFailed, setFailed] = useState(false);
+  const picture = useDisposable(() => {
+    const boxes = { stage: getBox(stageRef.current), strip: getBox(stripRef.current) };
+    return new Picture({ boxes, layout, onFailed: () => setFailed(true) });
+  }, [layout]);
 
   useEffect(() => {
-    if (!stage || stageSize.width === 0) return;
-    stage.setSize({ ...stageSize, dpr: window.devicePixelRatio || 1, ...(isPhone && { count: PHONE_FRONTS }) });
-    player.redraw();
-  }, [stage, stageSize, isPhone, player]);
+    if (view.width === 0) return;
+    picture?.look(side, view.first);
+    picture?.setStageSize({ ...view, dpr: window.devicePixelRatio || 1 });
+  }, [picture, side, view]);
   useEffect(() => {
-    if (!strip || stripSize.width === 0) return;
-    strip.setSize({ ...stripSize, dpr: window.devicePixelRatio || 1 });
-    player.redraw();
-  }, [strip, stripSize, player]);
+    if (stripSize.width > 0) picture?.setStripSize({ ...stripSize, dpr: window.devicePixelRatio || 1 });
+  }, [picture, stripSize]);
   useEffect(() => {
-    stage?.look(side, isPhone ? first : 0);
-    player.redraw();
-  }, [stage, side, first, isPhone, player]);
-  useEffect(() => {
-    if (!stage || !strip) return;
-    return player.addView({
-      showMoment: ({ rgb }) => {
-        stage.draw(rgb);
-        strip.draw(rgb);
-      },
-    });
-  }, [stage, strip, player]);
+    if (picture) return player.addView({ showMoment: ({ rgb }) => picture.draw(rgb) });
+    return undefined;
+  }, [picture, player]);
 
   const readLight = useCallback(
     (candidates: readonly Light[]): LitLight | null =>
@@ -86,29 +88,29 @@ export function StageWindow({
     [player],
   );
   const showWhy = (frontIndex: number, light: Light | null) => {
-    const shown = stage?.fronts.find((front) => front.frontIndex === frontIndex);
+    const shown = shownFronts.find((front) => front.frontIndex === frontIndex);
     if (!shown) return setWhy(null);
     const own = fronts[frontIndex]?.lights.flatMap((index) => lights[index] ?? []) ?? [];
     const lit = (light && readLight([light])) ?? readLight(own);
     setWhy({ name: shown.name, lit, x: shown.x + shown.width / 2, y: shown.y });
   };
-  const handleMove = (event: PointerEvent<HTMLCanvasElement>) => {
+  const handleMove = (event: PointerEvent<HTMLDivElement>) => {
     const box = event.currentTarget.getBoundingClientRect();
-    const hit = stage?.findHit(event.clientX - box.left, event.clientY - box.top);
+    const hit = findHit(shownFronts, event.clientX - box.left, event.clientY - box.top);
     if (hit) showWhy(hit.front.frontIndex, hit.light ? (lights[hit.light.lightIndex] ?? null) : null);
     else setWhy(null);
   };
-  const handleUp = (event: PointerEvent<HTMLCanvasElement>) => {
+  const handleUp = (event: PointerEvent<HTMLDivElement>) => {
     handleMove(event);
     const box = event.currentTarget.getBoundingClientRect();
-    const hit = stage?.findHit(event.clientX - box.left, event.clientY - box.top);
+    const hit = findHit(shownFronts, event.clientX - box.left, event.clientY - box.top);
     const lit = hit?.light && readLight(lights.slice(hit.light.lightIndex, hit.light.lightIndex + 1));
     // A finger first shows the card; its link goes to the line.
     if (lit?.line && event.pointerType !== "touch") onGoToLine(lit.line);
   };
-  const look = (next: Side, from: number) => {
+  const look = (next: Side, nextFirst: number) => {
     setSide(next);
-    setFirst(from);
+    setFirst(nextFirst);
     setWhy(null);
   };
   const walk = (step: number) => {
@@ -123,8 +125,9 @@ export function StageWindow({
   return (
     <div className="studio-window" onPointerLeave={() => setWhy(null)}>
       <div ref={stageBox} className="studio-window-stage">
-        <canvas
+        <div
           ref={stageRef}
+          className="studio-picture"
           role="img"
           aria-label={`${sideName(side)} of the square at dusk`}
           aria-describedby="studio-description"
@@ -134,21 +137,24 @@ export function StageWindow({
         <p id="studio-description" className="sr-only">
           {description}
         </p>
-        {stage && (
-          <FrontButtons
-            fronts={stage.fronts}
-            key={`${side}-${first}-${stageSize.width}`}
-            onShow={(index) => showWhy(index, null)}
-            onHide={() => setWhy(null)}
-            onGo={() => why?.lit?.line && onGoToLine(why.lit.line)}
-          />
+        {hasFailed && (
+          <p role="alert" className="studio-picture-failed">
+            The picture of the square can not be drawn here. Reload the page; the script and the sound go on without it.
+          </p>
         )}
+        <FrontButtons
+          fronts={shownFronts}
+          key={`${side}-${from}-${stageSize.width}`}
+          onShow={(index) => showWhy(index, null)}
+          onHide={() => setWhy(null)}
+          onGo={() => why?.lit?.line && onGoToLine(why.lit.line)}
+        />
         {why && <WhyCard place={why} width={stageSize.width} onGoToLine={onGoToLine} />}
       </div>
       <SideWalk side={side} onWalk={walk} />
       <GentleButton isGentle={isGentle} reason={gentleReason} onGentle={onGentle} />
       <div ref={stripBox} className="studio-window-strip">
-        <canvas ref={stripRef} role="img" aria-label="All fronts of the square side by side" />
+        <div ref={stripRef} className="studio-picture" role="img" aria-label="All fronts of the square side by side" />
         <SideStrip
           spans={stripSize.width > 0 ? listSideSpans(layout, stripSize) : []}
           side={side}
@@ -159,9 +165,9 @@ export function StageWindow({
   );
 }
 
-function getCanvas(canvas: HTMLCanvasElement | null): HTMLCanvasElement {
-  if (!canvas) throw new Error("The canvas is not on the page.");
-  return canvas;
+function getBox(box: HTMLDivElement | null): HTMLDivElement {
+  if (!box) throw new Error("The picture's box is not on the page.");
+  return box;
 }
 
 function sideName(side: Side): string {
