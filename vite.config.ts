@@ -31,7 +31,7 @@ function listBuiltFiles(): Plugin {
 }
 
 export default defineConfig({
-  plugins: [react(), tailwindcss(), listBuiltFiles()],
+  plugins: [react({ compiler: true }), tailwindcss(), listBuiltFiles()],
   publicDir: "src/public",
   worker: { format: "es" },
   server: {

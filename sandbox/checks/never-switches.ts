@@ -2,28 +2,31 @@ import type { Finding } from "../engine/model.ts";
 import { SWITCH_LEVEL } from "../timeline/cursor.ts";
 import { LinePairs, listOf } from "./by-line.ts";
 import type { CheckContext } from "./context.ts";
-import { buildFinding } from "./finding.ts";
+import { buildFinding, lineOfCue } from "./finding.ts";
 
 /**
- * A level cue above 0 that never brings a switched light to 50, at which it comes on (rule 20). A
- * fade down from above 50 is a way to switch off and is left alone.
+ * A line whose levels above 0 never bring a switched light to 50, at which it comes on (rule 20). A
+ * fade down from above 50 is a way to switch off and is left alone, and so are the low steps of a loop
+ * that reaches 50 in a later turn.
  */
 export function findNeverSwitches(context: CheckContext): Finding[] {
-  const { tracks, lights, timeline } = context;
+  const { tracks, lights } = context;
   const { level } = tracks;
-  const reaches = new Uint8Array(timeline.cues.count);
+  /** Lines that bring some switched light to 50, or down from there. */
+  const reachingLines = new Set<number>();
   const darkLights = new Map<number, number[]>();
   for (const { index, isSwitched } of lights) {
     if (!isSwitched) continue;
     for (let entry = level.first[index] ?? 0; entry < (level.first[index + 1] ?? 0); entry++) {
       const cue = level.cue[entry] ?? 0;
       const to = level.to[entry] ?? 0;
-      if (to >= SWITCH_LEVEL || to === 0 || (level.from[entry] ?? 0) >= SWITCH_LEVEL) reaches[cue] = 1;
+      if (to >= SWITCH_LEVEL || to === 0 || (level.from[entry] ?? 0) >= SWITCH_LEVEL)
+        reachingLines.add(lineOfCue(context, cue));
       else listOf(darkLights, cue).push(index);
     }
   }
   const pairs = new LinePairs(context);
-  for (const [cue, dark] of darkLights) if (reaches[cue] === 0) pairs.add(cue, -1, dark);
+  for (const [cue, dark] of darkLights) if (!reachingLines.has(lineOfCue(context, cue))) pairs.add(cue, -1, dark);
   return pairs.list().map((pair) =>
     buildFinding(context, "never-switches", {
       sentence: "This box is on or off. The level stays below 50, so its lights stay off.",

@@ -1,8 +1,9 @@
 /** What the probe notes of a page: times in milliseconds of the page's clock; 0 is not yet. */
 export interface Noted {
-  /** When the latest run was asked for, and what asking cost. */
+  /** Start of the page's clock, in milliseconds since 1970. */
+  readonly origin: number;
+  /** When the latest run was asked for. */
   asked: number;
-  askMs: number;
   answered: number;
   /** When the new light was handed to the picture's worker, and when that had drawn it. */
   sent: number;
@@ -17,8 +18,8 @@ export interface Noted {
 }
 
 const noted: Noted = {
+  origin: performance.timeOrigin,
   asked: 0,
-  askMs: 0,
   answered: 0,
   sent: 0,
   painted: 0,
@@ -46,13 +47,12 @@ const NativeWorker = window.Worker;
 window.Worker = class extends NativeWorker {
   constructor(url: string | URL, options?: WorkerOptions) {
     super(url, options);
+    // The first to listen, so that an answer is noted before anybody acts on it.
+    this.addEventListener("message", () => this.#waiting.splice(0).forEach((hear) => hear()));
     const post = this.postMessage.bind(this);
     this.postMessage = (message: Posted, ...rest: [never]) => {
-      const start = performance.now();
-      post(message, ...rest);
       const called = message.path?.[0] ?? message.kind;
       if (called === "prepare") {
-        noted.askMs = performance.now() - start;
         noted.asked = performance.now();
         noted.answered = noted.sent = noted.painted = 0;
       }
@@ -65,11 +65,14 @@ window.Worker = class extends NativeWorker {
           if (isNew) noted.painted = performance.now();
         });
       }
+      post(message, ...rest);
     };
   }
 
+  #waiting: (() => void)[] = [];
+
   #onAnswer(hear: () => void): void {
-    this.addEventListener("message", hear, { once: true });
+    this.#waiting.push(hear);
   }
 };
 

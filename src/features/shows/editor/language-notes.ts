@@ -5,8 +5,8 @@ import type { Problem } from "../../../../sandbox/engine/model.ts";
 import type { LanguageClient } from "./language-client.ts";
 import { toOffsets } from "./problem-note.ts";
 
-/** A pause in the typing of this length asks the checker. */
-const PAUSE_MS = 500;
+/** A pause in the typing of this length asks the checker: after the script has run, which comes first. */
+const PAUSE_MS = 900;
 
 /** What the type checker notices is underlined; the words come on hover, by F8 one after the other, in a list by Ctrl Shift M. */
 export function languageNotes(client: LanguageClient): Extension {

@@ -3,7 +3,7 @@ import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 
 /** What the studio knows of runs. Kept in one object, so that a late answer can be told from a new one. */
 export interface RunState {
-  /** The number of the newest run; answers to others are dropped. */
+  /** The number of the newest run that was heard of; answers to older ones are dropped. */
   readonly run: number;
   readonly isRunning: boolean;
   /** The newest outcome, good or not. */
@@ -35,13 +35,14 @@ export const FIRST_RUN_STATE: RunState = {
 };
 
 export function reduceRun(state: RunState, event: RunEvent): RunState {
-  if (event.type === "started") return { ...state, run: event.run, isRunning: true, failure: null };
   if (event.type === "checked") return event.timeline === state.onStage ? { ...state, checked: event.findings } : state;
-  if (event.run !== state.run) return state;
-  if (event.type === "failed") return { ...state, isRunning: false, failure: event.reason };
+  if (event.run < state.run) return state;
+  const heard = { ...state, run: event.run, isRunning: event.type === "started", failure: null };
+  if (event.type === "started") return heard;
+  if (event.type === "failed") return { ...heard, failure: event.reason };
   const { outcome, source } = event;
-  if (!outcome.ok) return { ...state, isRunning: false, outcome, ranSource: source };
-  return { ...state, isRunning: false, outcome, ranSource: source, onStage: outcome.timeline, checked: null };
+  if (!outcome.ok) return { ...heard, outcome, ranSource: source };
+  return { ...heard, outcome, ranSource: source, onStage: outcome.timeline, checked: null };
 }
 
 /** What the ribbon shows: the newest run as far as it came, else what is on stage. */

@@ -97,6 +97,14 @@ export class ShowPlayer {
     this.redraw();
   }
 
+  /** The same at once, without waiting for an animation frame; gentle until somebody says that it was checked. */
+  showUnchecked(timeline: Timeline): void {
+    this.#isGentle = true;
+    this.setTimeline(timeline);
+    cancelAnimationFrame(this.#request);
+    this.#draw(performance.now());
+  }
+
   setGentle(isGentle: boolean): void {
     this.#isGentle = isGentle;
     this.redraw();

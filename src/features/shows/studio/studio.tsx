@@ -71,7 +71,7 @@ function OpenStudio(props: OpenStudioProps) {
   const [dialog, setDialog] = useState<OpenDialog | null>(null);
   const [wantsGentle, setWantsGentle] = useState(() => window.matchMedia("(prefers-reduced-motion: reduce)").matches);
   const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
-  const { state: run, run: runNow, runSoon } = useScriptRun(props);
+  const { state: run, run: runNow, runSoon } = useScriptRun(props, player);
   const gentleReason = findGentleReason(run);
   const isGentle = wantsGentle || gentleReason !== null;
   const selected = !isPhone && tab === "script" ? "check" : tab;

@@ -1,4 +1,4 @@
-import { useEffect, useState, useSyncExternalStore } from "react";
+import { startTransition, useEffect, useState } from "react";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { createDraftState, type DraftState, type ServerText } from "../drafts/draft-model.ts";
 import { createIndexedDbStorage } from "../drafts/draft-storage.ts";
@@ -58,10 +58,14 @@ export function useDraft({
       }),
     [userId, showId, transport],
   );
+  const [state, setState] = useState(NOTHING);
   const [opened, setOpened] = useState<DraftStore | null>(null);
   useEffect(() => {
     if (!store) return;
-    void store.open(server, savedAt, remembered).then(() => setOpened(store));
+    void store.open(server, savedAt, remembered).then(() => {
+      setState(store.state);
+      setOpened(store);
+    });
     const keep = () => void store.flush();
     const resume = () => store.resume();
     document.addEventListener("visibilitychange", keep);
@@ -73,9 +77,11 @@ export function useDraft({
     // eslint-disable-next-line react-hooks/exhaustive-deps -- what the server had is read once, at opening
   }, [store]);
   useEffect(() => store?.resume(), [store, signedInAt]);
-  const state = useSyncExternalStore(
-    (listener) => store?.subscribe(listener) ?? (() => undefined),
-    () => store?.state ?? NOTHING,
-  );
+  useEffect(() => {
+    if (!store) return;
+    const take = () => setState(store.state);
+    // Every keystroke comes by here; what the page says about saving may follow a moment later.
+    return store.subscribe(() => startTransition(take));
+  }, [store]);
   return { store: opened === store ? opened : null, state };
 }

@@ -1,15 +1,24 @@
 import { useCallback, useEffect, useMemo, useReducer, useRef } from "react";
 import type { Finding, RunOutcome } from "../../../../sandbox/engine/model.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
+import { afterPaint } from "./after-paint.ts";
 import { FIRST_RUN_STATE, reduceRun, type RunState } from "./run-model.ts";
 
 /** A pause in the typing of this length runs the script. */
 const TYPING_PAUSE_MS = 600;
+/** A run that takes this long is said to be running. */
+const SLOW_RUN_MS = 150;
 const FAILED = "The script could not be run here. Try again.";
 
 export interface ScriptRunOptions {
   readonly runScript: (source: string) => Promise<RunOutcome>;
   readonly checkShow: (timeline: Timeline) => Promise<readonly Finding[]>;
+}
+
+/** Whatever shows the square, as far as a run needs it. */
+export interface RunStage {
+  /** Shows a timeline that has not been checked yet, at once. */
+  showUnchecked(timeline: Timeline): void;
 }
 
 export interface ScriptRun {
@@ -20,8 +29,11 @@ export interface ScriptRun {
   readonly runSoon: (source: string) => void;
 }
 
-/** Runs scripts, newest first: a run that is overtaken is forgotten. The show check follows after the paint. */
-export function useScriptRun({ runScript, checkShow }: ScriptRunOptions): ScriptRun {
+/**
+ * Runs scripts, newest first: a run that is overtaken is forgotten. The light comes first, before the page
+ * renders anew; the show check follows after the paint.
+ */
+export function useScriptRun({ runScript, checkShow }: ScriptRunOptions, stage: RunStage | null): ScriptRun {
   const [state, dispatch] = useReducer(reduceRun, FIRST_RUN_STATE);
   const count = useRef(0);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
@@ -30,13 +42,21 @@ export function useScriptRun({ runScript, checkShow }: ScriptRunOptions): Script
     (source: string) => {
       clearTimeout(timer.current);
       const number = (count.current += 1);
-      dispatch({ type: "started", run: number });
-      runScript(source).then(
-        (outcome) => dispatch({ type: "finished", run: number, source, outcome }),
-        () => dispatch({ type: "failed", run: number, reason: FAILED }),
-      );
+      // Most runs are over before a person could read that one is under way.
+      const slow = setTimeout(() => dispatch({ type: "started", run: number }), SLOW_RUN_MS);
+      const isNewest = () => number === count.current;
+      runScript(source)
+        .then(
+          (outcome) => {
+            if (!isNewest()) return;
+            if (outcome.ok) stage?.showUnchecked(outcome.timeline);
+            dispatch({ type: "finished", run: number, source, outcome });
+          },
+          () => isNewest() && dispatch({ type: "failed", run: number, reason: FAILED }),
+        )
+        .finally(() => clearTimeout(slow));
     },
-    [runScript],
+    [runScript, stage],
   );
   const runSoon = useCallback(
     (source: string) => {
@@ -51,16 +71,16 @@ export function useScriptRun({ runScript, checkShow }: ScriptRunOptions): Script
     const timeline = state.onStage;
     if (!timeline) return;
     let isOvertaken = false;
-    const afterPaint = setTimeout(() => {
+    const cancel = afterPaint(() => {
       // A check that fails leaves the preview gentle: the safe side.
       checkShow(timeline).then(
         (findings) => isOvertaken || dispatch({ type: "checked", timeline, findings }),
         () => undefined,
       );
-    }, 0);
+    });
     return () => {
       isOvertaken = true;
-      clearTimeout(afterPaint);
+      cancel();
     };
   }, [state.onStage, checkShow]);
 

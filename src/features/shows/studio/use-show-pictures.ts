@@ -2,6 +2,7 @@ import { useEffect, useState } from "react";
 import type { ShowDescription } from "../../../../sandbox/timeline/describe.ts";
 import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 import type { RibbonCells, RibbonSize } from "../../../../sandbox/timeline/ribbon.ts";
+import { afterPaint } from "./after-paint.ts";
 
 /** What is worked out of a timeline beside the page. */
 export interface ShowPictures {
@@ -36,12 +37,15 @@ function useWorkedOut<Question, Answer>(
   useEffect(() => {
     if (!timeline) return;
     let isOvertaken = false;
-    ask(timeline, question).then(
-      (found) => isOvertaken || setAnswer(found),
-      () => undefined,
-    );
+    const cancel = afterPaint(() => {
+      ask(timeline, question).then(
+        (found) => isOvertaken || setAnswer(found),
+        () => undefined,
+      );
+    });
     return () => {
       isOvertaken = true;
+      cancel();
     };
   }, [timeline, question, ask]);
   return timeline ? answer : null;

@@ -51,10 +51,9 @@ export function ScriptBench(props: ScriptBenchProps) {
   const hintId = useId();
   const editorBox = useRef<HTMLDivElement>(null);
   const [isGentleChosen, setIsGentleChosen] = useState(false);
-  const scriptRun = useScriptRun({ runScript, checkShow });
-  const { state, run, runSoon } = scriptRun;
-  const gentleReason = findGentleReason(state);
   const player = useDisposable(() => new ShowPlayer({ layout, song, score }), [layout, song, score]);
+  const { state, run, runSoon } = useScriptRun({ runScript, checkShow }, player);
+  const gentleReason = findGentleReason(state);
   const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
   const { askName, dialog } = useAskName();
   const latest = useRef({ onChange, run, runSoon, askName });
