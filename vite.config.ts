@@ -1,6 +1,8 @@
 import react from "@vitejs/plugin-react";
 import tailwindcss from "@tailwindcss/vite";
+import { constants } from "node:zlib";
 import { defineConfig, type Plugin } from "vite";
+import { compression, defineAlgorithm } from "vite-plugin-compression2";
 
 const apiOrigin = process.env.DUSKBELL_API_ORIGIN ?? "http://127.0.0.1:8120";
 
@@ -22,7 +24,7 @@ function listBuiltFiles(): Plugin {
       handler(_options, bundle) {
         const worker = bundle[SERVICE_WORKER];
         if (worker?.type !== "chunk") return;
-        const files = Object.keys(bundle).filter((name) => name.startsWith("assets/") && !name.endsWith(".map"));
+        const files = Object.keys(bundle).filter((name) => name.startsWith("assets/") && !/\.(map|gz|br)$/.test(name));
         const list = JSON.stringify([...OTHER_FILES, ...files.map((name) => `/${name}`).sort()]);
         worker.code = worker.code.replaceAll("BUILT_FILES", list);
       },
@@ -30,8 +32,20 @@ function listBuiltFiles(): Plugin {
   };
 }
 
+/** Squeezed once, here, as small as it goes: a class that opens the studio at once would else keep the server busy with it. */
+const compressFiles = compression({
+  include: /\.(js|css|svg|wasm)$/,
+  threshold: 1024,
+  algorithms: [
+    defineAlgorithm("gzip", { level: constants.Z_BEST_COMPRESSION }),
+    defineAlgorithm("brotliCompress", {
+      params: { [constants.BROTLI_PARAM_QUALITY]: constants.BROTLI_MAX_QUALITY },
+    }),
+  ],
+});
+
 export default defineConfig({
-  plugins: [react({ compiler: true }), tailwindcss(), listBuiltFiles()],
+  plugins: [react({ compiler: true }), tailwindcss(), listBuiltFiles(), compressFiles],
   publicDir: "src/public",
   worker: { format: "es" },
   server: {

@@ -1,11 +1,13 @@
 import express, { type RequestHandler, Router } from "express";
+import expressStaticGzip from "express-static-gzip";
 import { join } from "node:path";
 import { ProblemError } from "../../shared/problem.ts";
 
 const YEAR_MS = 365 * 24 * 60 * 60 * 1000;
 
 /**
- * Serves the built client. Files under `/assets/` carry their hash in the name and never change; all
+ * Serves the built client. Files under `/assets/` carry their hash in the name and never change, and were
+ * compressed by the build; all
  * others are asked for again each time. Every other page address gets `index.html`, since the client
  * knows the routes; anything that is not a page navigation and has no file is `not-found`.
  */
@@ -13,7 +15,12 @@ export function staticClient(clientDir: string): Router {
   const router = Router();
   router.use(
     "/assets",
-    express.static(join(clientDir, "assets"), { immutable: true, maxAge: YEAR_MS, index: false, redirect: false }),
+    expressStaticGzip(join(clientDir, "assets"), {
+      enableBrotli: true,
+      orderPreference: ["br", "gzip"],
+      index: false,
+      serveStatic: { immutable: true, maxAge: YEAR_MS, redirect: false },
+    }),
   );
   router.use("/assets", missing);
   router.use(

@@ -45,12 +45,12 @@ interface OpenSetting extends RunSetting {
  * Runs scripts in two workers beside the page: one reads them, one is the engine. The latest run wins: a
  * run that has not ended when the next is asked for is stopped, and its promise rejects with
  * `RunReplacedError`. An engine's worker that had to be ended is never used again; a warm spare takes its
- * place at once.
+ * place at once. Nothing is loaded before the first question: whoever opens a page sees it first.
  */
 export class RunClient {
   readonly #makers: RunWorkerMakers;
   readonly #deadlineMs: number;
-  #script: WorkerSeat<ScriptWorker>;
+  #script: WorkerSeat<ScriptWorker> | null = null;
   #setting: OpenSetting | null = null;
   #engine: EngineSeat | null = null;
   #spare: EngineSeat | null = null;
@@ -61,12 +61,6 @@ export class RunClient {
   constructor(makers: RunWorkerMakers = MAKERS, deadlineMs: number = DEADLINE_MS) {
     this.#makers = makers;
     this.#deadlineMs = deadlineMs;
-    this.#script = startSeat(makers.script);
-  }
-
-  /** Readies the workers for a square and a song, so that the first run finds them warm. The same again costs nothing. */
-  open(setting: RunSetting): void {
-    this.#openFor(setting);
   }
 
   /**
@@ -88,7 +82,7 @@ export class RunClient {
 
   async #runSteps(input: RunInput, deadlineMs: number, signal: AbortSignal): Promise<RunOutcome> {
     const engine = this.#openFor(input);
-    const script = this.#script;
+    const script = this.#getScript();
     let atWork: WorkerSeat<unknown> = script;
     let timer: ReturnType<typeof setTimeout> | undefined;
     // Reading a script takes no time worth stopping; only a script that runs is.
@@ -141,7 +135,7 @@ export class RunClient {
     for (;;) {
       if (this.#isDisposed) throw new RunReplacedError("The run client is disposed.");
       try {
-        return await this.#script.ask(question);
+        return await this.#getScript().ask(question);
       } catch (error) {
         if (!(error instanceof WorkerEndedError)) throw error;
       }
@@ -155,11 +149,15 @@ export class RunClient {
     for (const seat of [this.#script, this.#engine, this.#spare]) seat?.end();
   }
 
+  #getScript(): WorkerSeat<ScriptWorker> {
+    return (this.#script ??= startSeat(this.#makers.script));
+  }
+
   /** The engine's worker, open for a square and a song. */
   #openFor({ layout, song, songId }: RunSetting): EngineSeat {
     let setting = this.#setting;
     if (setting?.layout !== layout || setting.song !== song || setting.songId !== songId) {
-      const tables = this.#script.ask((script) => script.open({ layout, song, songId }));
+      const tables = this.#getScript().ask((script) => script.open({ layout, song, songId }));
       // Whoever runs hears of it.
       tables.catch(() => {});
       setting = this.#setting = { layout, song, songId, tables };
@@ -178,8 +176,8 @@ export class RunClient {
     seat.end();
     if (this.#isDisposed) return;
     if (seat === this.#script) {
-      this.#script = startSeat(this.#makers.script);
-      // The new one has to be told.
+      this.#script = null;
+      // The next one has to be told.
       this.#setting = null;
     } else if (seat === this.#engine) {
       this.#engine = this.#spare ?? this.#startEngine();

@@ -27,8 +27,10 @@ import { queryClient } from "../lib/query-client.ts";
 import { presentDue } from "../lib/zoned-time.ts";
 import { requireSession } from "./guards.ts";
 
-/** Editor, stage and sound: a chunk of their own. */
-const Studio = lazy(async () => ({ default: (await import("../features/shows/studio/studio.tsx")).Studio }));
+/** Editor, stage and sound: a chunk of their own, fetched while the show, its song and its square are asked for. */
+const importStudio = () => import("../features/shows/studio/studio.tsx");
+importStudio().catch(() => undefined);
+const Studio = lazy(async () => ({ default: (await importStudio()).Studio }));
 
 function parseId(value: string | undefined): ShowId {
   const id = ShowIdSchema.safeParse(value);

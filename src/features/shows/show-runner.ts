@@ -16,7 +16,6 @@ export class ShowRunner {
 
   constructor(setting: ShowSetting) {
     this.#setting = setting;
-    this.#runs.open(setting);
   }
 
   /** The outcome of a script, with other luck than the setting's if given; the latest wins. Bound, so that it can be passed on. */
