@@ -6,6 +6,7 @@ import { createProblem } from "./problem.ts";
 import type { ProblemCode } from "./problems/index.ts";
 import { toExcerpt, toRange } from "./ranges.ts";
 import type { SentenceValues } from "./sentence.ts";
+import { findSyntaxFix } from "./syntax-fixes.ts";
 import { NAME_PARAMETERS } from "./words.ts";
 
 /** Codes of the compiler's parser that have words of their own here. */
@@ -39,6 +40,9 @@ const KEYWORDS = [
   "continue",
   "default",
 ];
+
+/** Words that stand before a bracket and a body. */
+const HEADS = ["for", "while", "switch", "if"];
 
 /** Words of TypeScript that can not be names. */
 const RESERVED: ReadonlySet<string> = new Set(
@@ -170,6 +174,18 @@ const misspeltKeyword: Explain = (fault) => {
   return null;
 };
 
+/** `fro (let i = 0; ...) {`: the parser stumbles inside of the brackets, over what is right there. */
+const misspeltHead: Explain = ({ text, start }) => {
+  const lineStart = text.lastIndexOf("\n", start - 1) + 1;
+  const [line = ""] = text.slice(lineStart).split("\n");
+  const [, indent = "", word = ""] = /^(\s*)([A-Za-z]+)\s*\(.*\{\s*(?:\/\/.*)?$/.exec(line) ?? [];
+  const meant = word === "" || KEYWORDS.includes(word) ? null : near(word, HEADS);
+  const at = lineStart + indent.length;
+  return meant === null
+    ? null
+    : { code: "unknown-word", values: { name: word, meant }, start: at, end: at + word.length };
+};
+
 const missingName: Explain = (fault) =>
   fault.code === IDENTIFIER_EXPECTED && /\b(let|const|function|class)\s*$|\.\s*$/.test(fault.before)
     ? here(fault, "missing-name")
@@ -185,7 +201,15 @@ const missingComma: Explain = (fault) =>
     ? here(fault, "missing-comma")
     : null;
 
-const EXPLAINERS: readonly Explain[] = [curlyQuotes, missingQuote, elseAlone, numberFirst, reservedName, unquotedName];
+const EXPLAINERS: readonly Explain[] = [
+  curlyQuotes,
+  missingQuote,
+  elseAlone,
+  numberFirst,
+  reservedName,
+  unquotedName,
+  misspeltHead,
+];
 const AFTER_BRACKETS: readonly Explain[] = [splitName, misspeltKeyword, missingName, twoSteps, missingComma];
 
 /** The first explanation that fits; brackets come between, since a missing one makes the parser stumble anywhere. */
@@ -229,9 +253,11 @@ export function explainSyntax(file: ts.SourceFile, diagnostics: readonly ts.Diag
     before: text.slice(lineStart, first.start),
     after,
   });
+  const fix = findSyntaxFix(file, found);
   return createProblem(found.code, found.values, {
     range: toRange(file, found.start, found.end),
     excerpt: toExcerpt(text, found.start, found.end),
     details,
+    ...(fix && { fix }),
   });
 }

@@ -4,6 +4,7 @@ import { benchAnySource } from "./any-source.ts";
 import { benchChecks } from "./checks.ts";
 import { benchHandIns } from "./hand-ins.ts";
 import { benchHostile } from "./hostile.ts";
+import { benchLanguage } from "./language.ts";
 import { benchMarks } from "./marks.ts";
 import { benchPages } from "./pages.ts";
 import { benchRequests } from "./requests.ts";
@@ -19,6 +20,7 @@ for (const bench of [
   benchRuns,
   benchMarks,
   benchChecks,
+  benchLanguage,
   benchHandIns,
   benchRequests,
   benchPages,
