@@ -43,6 +43,14 @@ const TEXT_PAIRS: Readonly<Record<string, readonly string[]>> = {
   "syntax-punctuation": ["card", "paper", "well", "glow"],
 };
 
+/** Strong contrast: success criterion 1.4.6, 7 to 1. */
+const STRONG_MINIMUM = 7;
+const STRONG_PAIRS = Object.fromEntries(
+  [...colours.keys()]
+    .filter((name) => name.startsWith("strong-") && name !== "strong-ground")
+    .map((name) => [name, ["strong-ground"]]),
+);
+
 /** Borders of controls, focus rings, bars and signs on their grounds. */
 const SIGN_PAIRS: Readonly<Record<string, readonly string[]>> = {
   rim: ["paper", "card", "well"],
@@ -83,6 +91,10 @@ describe("colour tokens", () => {
 
   it.each(listPairs(TEXT_PAIRS))("keep words readable: $front on $ground, $theme", ({ front, ground, theme }) => {
     expect(contrast(front, ground, theme)).toBeGreaterThanOrEqual(TEXT_MINIMUM);
+  });
+
+  it.each(listPairs(STRONG_PAIRS))("are strong where asked for: $front, $theme", ({ front, ground, theme }) => {
+    expect(contrast(front, ground, theme)).toBeGreaterThanOrEqual(STRONG_MINIMUM);
   });
 
   it.each(listPairs(SIGN_PAIRS))(

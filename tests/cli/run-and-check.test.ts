@@ -1,5 +1,6 @@
 import { spawnSync } from "node:child_process";
-import { readFileSync } from "node:fs";
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { tmpdir } from "node:os";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
 
@@ -48,6 +49,22 @@ describe("duskbell run", () => {
 });
 
 describe("duskbell check", () => {
+  it("names values of the wrong kind in the editor's words", { timeout: SLOW_MS }, () => {
+    const folder = mkdtempSync(path.join(tmpdir(), "duskbell-check-"));
+    try {
+      const file = path.join(folder, "kinds.ts");
+      writeFileSync(
+        file,
+        "function later(level: string) {\n  return level;\n}\nif (now() > 4) later(3);\nsquare.all.on();\n",
+      );
+      const { status, stdout } = duskbell("check", file, "--song", "frost-fair");
+      expect(status).toBe(0);
+      expect(stdout).toContain("  kind: `later` needs a text here, but this is 3. (line 4)");
+    } finally {
+      rmSync(folder, { recursive: true, force: true });
+    }
+  });
+
   it("says why a script does not run, with its line, and exits with 1", { timeout: SLOW_MS }, () => {
     // The waltz asks for bar 0, which only a song with a pick-up has.
     const { status, stdout } = duskbell("check", "tests/samples/waltz.ts", "--song", "frost-fair");

@@ -2,6 +2,7 @@ import { type Diagnostic, lintKeymap, linter } from "@codemirror/lint";
 import type { Extension } from "@codemirror/state";
 import { keymap } from "@codemirror/view";
 import type { Problem } from "../../../../sandbox/engine/model.ts";
+import { appendWords } from "./append-words.ts";
 import type { LanguageClient } from "./language-client.ts";
 import { toOffsets } from "./problem-note.ts";
 
@@ -32,12 +33,7 @@ function renderNote({ sentence, hint, details }: Problem): HTMLElement {
   const note = document.createElement("div");
   note.className = "script-tip";
   const words = document.createElement("p");
-  `${sentence} ${hint}`.split("`").forEach((piece, i) => {
-    if (i % 2 === 0) return words.append(piece);
-    const code = document.createElement("code");
-    code.textContent = piece;
-    words.append(code);
-  });
+  appendWords(words, `${sentence} ${hint}`);
   note.append(words);
   if (details !== undefined) {
     const more = document.createElement("details");

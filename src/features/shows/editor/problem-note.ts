@@ -1,6 +1,7 @@
 import { StateEffect, StateField, type EditorState, type Extension, type Text } from "@codemirror/state";
 import { Decoration, EditorView, keymap, WidgetType, type DecorationSet } from "@codemirror/view";
 import type { Problem, SourceRange } from "../../../../sandbox/engine/model.ts";
+import { appendWords } from "./append-words.ts";
 
 const setProblem = StateEffect.define<Problem | null>();
 
@@ -43,21 +44,11 @@ class ProblemWidget extends WidgetType {
   }
 }
 
-/** Backticks mark code in sentences. */
-function appendWords(parent: HTMLElement, sentence: string): void {
-  sentence.split("`").forEach((piece, i) => {
-    if (i % 2 === 0) return parent.append(piece);
-    const code = document.createElement("code");
-    code.textContent = piece;
-    parent.append(code);
-  });
-}
-
 function createFixButton(view: EditorView, label: string): HTMLButtonElement {
   const button = document.createElement("button");
   button.type = "button";
   button.className = "problem-note-fix";
-  button.textContent = label;
+  appendWords(button, label);
   button.addEventListener("click", () => {
     applyFix(view);
     view.focus();
@@ -114,8 +105,14 @@ function applyFix(view: EditorView): boolean {
   return true;
 }
 
-/** Shows problems under their lines; Alt-Enter takes the fix. */
-export const problemNotes: Extension = [shownProblem, keymap.of([{ key: "Alt-Enter", run: applyFix }])];
+/** Shows problems under their lines; Alt-Enter and Ctrl-. take the fix. */
+export const problemNotes: Extension = [
+  shownProblem,
+  keymap.of([
+    { key: "Alt-Enter", run: applyFix },
+    { key: "Mod-.", run: applyFix },
+  ]),
+];
 
 /** Shows one problem, or none. */
 export function showProblem(view: EditorView, problem: Problem | null): void {

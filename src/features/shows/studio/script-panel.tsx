@@ -1,10 +1,13 @@
-import { useEffect, useId, useRef, useState, type Ref, useImperativeHandle } from "react";
+import { useEffect, useId, useRef, type Ref, useImperativeHandle } from "react";
 import type { Problem } from "../../../../sandbox/engine/model.ts";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
+import { joinClasses } from "../../../components/class-names.ts";
 import { Icon } from "../../../components/icon.tsx";
 import { useAskName } from "../editor/rename-dialog.tsx";
 import { ScriptEditor } from "../editor/script-editor.ts";
+import { ScriptLookButton } from "../editor/script-look-button.tsx";
 import type { ScriptNames } from "../editor/script-names.ts";
+import { useScriptLook } from "../editor/use-script-look.ts";
 import type { ShowPlayer } from "./show-player.ts";
 
 /** What the rest of the studio asks of the editor. */
@@ -33,15 +36,13 @@ export interface ScriptPanelProps {
   ref: Ref<ScriptPanelHandle>;
 }
 
-const SIZE_KEY = "duskbell-script-large";
-
-/** The script with its head: what is on stage, the size of the letters, Run. */
+/** The script with its head: what is on stage, how it looks, Run. */
 export function ScriptPanel(props: ScriptPanelProps) {
   const { source, openLine, names, problem, actLines, player, stageNote, isRunning, onChange, onRun, onSave, ref } =
     props;
   const hostRef = useRef<HTMLDivElement>(null);
   const hintId = useId();
-  const [isLarge, setIsLarge] = useState(() => localStorage.getItem(SIZE_KEY) === "yes");
+  const look = useScriptLook();
   // The editor is made once; it calls what is current then.
   const { askName, dialog } = useAskName();
   const calls = useRef({ onChange, onRun, onSave, askName });
@@ -79,10 +80,6 @@ export function ScriptPanel(props: ScriptPanelProps) {
     replace: (text) => editor?.replace(text),
   }));
 
-  const toggleSize = () => {
-    localStorage.setItem(SIZE_KEY, isLarge ? "no" : "yes");
-    setIsLarge(!isLarge);
-  };
   return (
     <section className="studio-script studio-card" aria-labelledby={`${hintId}-title`}>
       <div className="studio-script-head">
@@ -91,15 +88,7 @@ export function ScriptPanel(props: ScriptPanelProps) {
           <Icon name="bulb" className="size-4" />
           <span>{stageNote}</span>
         </p>
-        <button
-          type="button"
-          className="studio-quiet-icon"
-          aria-pressed={isLarge}
-          aria-label="Large letters"
-          onClick={toggleSize}
-        >
-          <Icon name="letters" />
-        </button>
+        <ScriptLookButton look={look} />
         <button
           type="button"
           className="studio-quiet-icon"
@@ -120,14 +109,11 @@ export function ScriptPanel(props: ScriptPanelProps) {
           Run <kbd>Ctrl Enter</kbd>
         </button>
       </div>
-      <div
-        ref={hostRef}
-        className="script-editor studio-script-text"
-        style={isLarge ? ({ "--script-size": "1.3125rem" } as React.CSSProperties) : undefined}
-      />
+      <div ref={hostRef} className={joinClasses("script-editor studio-script-text", look.className)} />
       <p id={hintId} className="sr-only">
-        Press Escape, then Tab, to leave the script. Control and Enter runs it. Alt and Enter takes an offered fix. F1
-        explains the word at the cursor, F2 renames it, F8 goes to the next note, F12 to where it was made.
+        Press Escape, then Tab, to leave the script. Control and Enter runs it. Alt and Enter, or Control and full stop,
+        takes an offered fix. F1 explains the word at the cursor, F2 renames it, F8 goes to the next note, F12 to where
+        it was made.
       </p>
       {dialog}
     </section>

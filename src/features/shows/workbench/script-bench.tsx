@@ -7,11 +7,14 @@ import type { Timeline } from "../../../../sandbox/timeline/model.ts";
 import type { BeatMap } from "../../../../shared/contracts/songs.ts";
 import type { Layout } from "../../../../shared/contracts/square.ts";
 import { Button } from "../../../components/button.tsx";
+import { joinClasses } from "../../../components/class-names.ts";
 import { Ribbon } from "../../../components/ribbon.tsx";
 import { useDisposable } from "../../../hooks/use-disposable.ts";
 import { listScriptNames } from "../editor/script-names.ts";
 import { useAskName } from "../editor/rename-dialog.tsx";
 import { ScriptEditor } from "../editor/script-editor.ts";
+import { ScriptLookButton } from "../editor/script-look-button.tsx";
+import { useScriptLook } from "../editor/use-script-look.ts";
 import { findGentleReason, listActLines, presentRun } from "../studio/run-model.ts";
 import { ShowPlayer } from "../studio/show-player.ts";
 import { StageWindow } from "../studio/stage-window.tsx";
@@ -55,6 +58,7 @@ export function ScriptBench(props: ScriptBenchProps) {
   const { state, run, runSoon } = useScriptRun({ runScript, checkShow }, player);
   const gentleReason = findGentleReason(state);
   const names = useMemo(() => listScriptNames(layout, song), [layout, song]);
+  const look = useScriptLook();
   const { askName, dialog } = useAskName();
   const latest = useRef({ onChange, run, runSoon, askName });
   useEffect(() => {
@@ -139,6 +143,7 @@ export function ScriptBench(props: ScriptBenchProps) {
           <p className="min-w-0 flex-1 text-meta text-soft" role="status">
             {status} {presentRun(state)}
           </p>
+          <ScriptLookButton look={look} />
           {onStartOver && (
             <Button icon="undo" onPress={onStartOver}>
               Start over
@@ -151,7 +156,7 @@ export function ScriptBench(props: ScriptBenchProps) {
         <p id={hintId} className="sr-only">
           Control and Enter runs the script. Escape, then Tab leaves the editor.
         </p>
-        <div ref={editorBox} className="script-editor min-h-0 flex-1 overflow-auto" />
+        <div ref={editorBox} className={joinClasses("script-editor min-h-0 flex-1 overflow-auto", look.className)} />
       </section>
       {dialog}
     </div>
