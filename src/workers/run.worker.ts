@@ -1,11 +1,14 @@
 import * as Comlink from "comlink";
 import type { GuestTables, GuestWork } from "../../sandbox/engine/guest.ts";
 import { brokenResult, GuestRuntime, type RuntimeResult } from "../../sandbox/engine/runtime.ts";
-import { newBrowserModule } from "./browser-host.worker.ts";
+import { loadEngineModule, newBrowserModule } from "./browser-host.worker.ts";
 
 let tables: GuestTables | null = null;
 /** An engine with its tables that no script has touched yet: a run finds it open. */
 let ready: Promise<GuestRuntime> | null = null;
+
+// On its way while the other worker still reads the square and the song.
+loadEngineModule().catch(() => {});
 
 async function openEngine(given: GuestTables): Promise<GuestRuntime> {
   return new GuestRuntime(await newBrowserModule(), given);

@@ -9,11 +9,17 @@ import { toOffsets } from "./problem-note.ts";
 /** A pause in the typing of this length asks the checker: after the script has run, which comes first. */
 const PAUSE_MS = 900;
 
+/** The checker starts this long after the editor: what is needed to run the script is loaded first. */
+const FIRST_MS = 4000;
+
 /** What the type checker notices is underlined; the words come on hover, by F8 one after the other, in a list by Ctrl Shift M. */
 export function languageNotes(client: LanguageClient): Extension {
+  const opened = performance.now();
   return [
     linter(
       async (view) => {
+        const early = opened + FIRST_MS - performance.now();
+        if (early > 0) await new Promise((resolve) => setTimeout(resolve, early));
         const { doc } = view.state;
         const notes = (await client.ask("listNotes", doc.toString())) ?? [];
         return notes.map((note): Diagnostic => ({
