@@ -3,7 +3,7 @@ import type { Finding, Problem } from "../../../../sandbox/engine/model.ts";
 import { Button } from "../../../components/button.tsx";
 import { Icon, type IconName } from "../../../components/icon.tsx";
 import { findSongPlace } from "../ribbon/song-place.ts";
-import { listFindings, type RunState } from "./run-model.ts";
+import { listFindings, splitFindings, type RunState } from "./run-model.ts";
 import { Sentence } from "../../../components/sentence.tsx";
 
 export interface CheckPaneProps {
@@ -22,7 +22,7 @@ const KINDS: { readonly [S in Finding["severity"]]: { readonly word: string; rea
 
 /** What is wrong or worth a look: the problem that stopped the script, then findings, the grave ones first. */
 export function CheckPane({ song, run, onShow, onShowProblem }: CheckPaneProps) {
-  const findings = listFindings(run);
+  const { own, setUp } = splitFindings(listFindings(run));
   const problem = run.outcome?.ok === false ? run.outcome.problem : null;
   const isChecking = run.outcome?.ok === true && run.checked === null;
   return (
@@ -30,29 +30,51 @@ export function CheckPane({ song, run, onShow, onShowProblem }: CheckPaneProps) 
       {run.failure && <p className="studio-empty">{run.failure}</p>}
       <ul className="studio-findings">
         {problem && <ProblemRow problem={problem} onShow={() => onShowProblem(problem)} />}
-        {findings.map((finding) => (
-          <li key={`${finding.rule}-${finding.sentence}`} data-kind={finding.severity}>
-            <Kind severity={finding.severity} />
-            <div>
-              <p>
-                <Sentence text={finding.sentence} /> {finding.hint && <Sentence text={finding.hint} />}
-              </p>
-              <p className="studio-meta">{presentPlaces(song, finding)}</p>
-            </div>
-            {(finding.moments.length > 0 || finding.lines.length > 0) && (
-              <Button size="small" onPress={() => onShow(finding)}>
-                Show me
-              </Button>
-            )}
-          </li>
+        {own.map((finding) => (
+          <FindingRow key={`${finding.rule}-${finding.sentence}`} song={song} finding={finding} onShow={onShow} />
         ))}
       </ul>
-      {!problem && findings.length === 0 && <p className="studio-empty">{presentEmpty(run, isChecking)}</p>}
-      {findings.length > 0 && isChecking && <p className="studio-empty">The flash check is still running.</p>}
+      {!problem && own.length === 0 && <p className="studio-empty">{presentEmpty(run, isChecking)}</p>}
+      {own.length > 0 && isChecking && <p className="studio-empty">The flash check is still running.</p>}
+      {setUp.length > 0 && (
+        <details className="studio-setup">
+          <summary>For whoever sets up the square: {setUp.length === 1 ? "1 note" : `${setUp.length} notes`}</summary>
+          <ul className="studio-findings">
+            {setUp.map((finding) => (
+              <FindingRow key={`${finding.rule}-${finding.sentence}`} song={song} finding={finding} onShow={onShow} />
+            ))}
+          </ul>
+        </details>
+      )}
       <p className="studio-aid">
         A planning aid: flashing light can harm people. The safety officer decides. Handing in is always possible.
       </p>
     </>
+  );
+}
+
+interface FindingRowProps {
+  song: BeatMap;
+  finding: Finding;
+  onShow: (finding: Finding) => void;
+}
+
+function FindingRow({ song, finding, onShow }: FindingRowProps) {
+  return (
+    <li data-kind={finding.severity}>
+      <Kind severity={finding.severity} />
+      <div>
+        <p>
+          <Sentence text={finding.sentence} /> {finding.hint && <Sentence text={finding.hint} />}
+        </p>
+        <p className="studio-meta">{presentPlaces(song, finding)}</p>
+      </div>
+      {(finding.moments.length > 0 || finding.lines.length > 0) && (
+        <Button size="small" onPress={() => onShow(finding)}>
+          Show me
+        </Button>
+      )}
+    </li>
   );
 }
 

@@ -57,6 +57,15 @@ export function listFindings({ outcome, checked }: RunState): readonly Finding[]
     : (outcome?.findings ?? []);
 }
 
+/** Notes about cables and boxes: nothing that a script is wrong about, and of use to others than its author. */
+const SET_UP_RULES: ReadonlySet<string> = new Set(["circuit-inrush", "circuit-everything-on", "relay-wear"]);
+
+/** The findings for the author of a script, and the notes for whoever sets up the square. */
+export function splitFindings(findings: readonly Finding[]): { readonly own: Finding[]; readonly setUp: Finding[] } {
+  const isSetUp = ({ rule, severity }: Finding) => severity === "note" && SET_UP_RULES.has(rule);
+  return { own: findings.filter((finding) => !isSetUp(finding)), setUp: findings.filter(isSetUp) };
+}
+
 const RANK = { stop: 0, warn: 1, note: 2 } as const;
 
 /** Lines that wrote a cue of the timeline, rising. */

@@ -8,7 +8,7 @@ import { listScriptNames } from "../editor/script-names.ts";
 import { CheckPane } from "./check-pane.tsx";
 import { NamesPane } from "./names-pane.tsx";
 import { NotesPane } from "./notes-pane.tsx";
-import { findGentleReason, listActLines, listFindings, presentRun } from "./run-model.ts";
+import { findGentleReason, listActLines, listFindings, presentRun, splitFindings } from "./run-model.ts";
 import { ScriptPanel, type ScriptPanelHandle } from "./script-panel.tsx";
 import { ShowPlayer } from "./show-player.ts";
 import { SongColumn } from "./song-column.tsx";
@@ -168,7 +168,10 @@ function OpenStudio(props: OpenStudioProps) {
             <TrayTabs
               selected={selected}
               onSelect={setTab}
-              counts={{ check: findings.length + (problem ? 1 : 0), notes: run.outcome?.notes.length ?? 0 }}
+              counts={{
+                check: splitFindings(findings).own.length + (problem ? 1 : 0),
+                notes: run.outcome?.notes.length ?? 0,
+              }}
               hasScript={isPhone}
             />
             {selected !== "script" && (
