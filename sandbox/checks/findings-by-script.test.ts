@@ -56,6 +56,19 @@ const CASES: readonly Case[] = [
     script: "for (const front of square.fronts) {\n  at(2, () => front.on());\n}",
   },
   {
+    rule: "never-so",
+    lines: [2],
+    beat: null,
+    script: "for (let turn = 0; turn < 8; turn++) {\n  if (turn % 4 === 4) square.all.on();\n  wait(1);\n}",
+  },
+  { rule: "never-run", lines: [1], beat: null, script: "function wave() {\n  square.all.on();\n}\nwait(1);" },
+  {
+    rule: "all-each-turn",
+    lines: [2],
+    beat: null,
+    script: "for (const front of square.fronts) {\n  square.fronts.pulse(1);\n  wait(2);\n}",
+  },
+  {
     rule: "last-wait",
     lines: [3],
     beat: null,

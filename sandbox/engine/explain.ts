@@ -7,6 +7,7 @@ import type { SentenceValues } from "../language/sentence.ts";
 import type { ProblemCode } from "../language/problems/index.ts";
 import type { GuestFailure } from "./guest.ts";
 import type { Problem } from "./model.ts";
+import { findOnlyText, findOrigin } from "./origin.ts";
 import type { RuntimeResult } from "./runtime.ts";
 
 /** The problem of a run in the words of the catalogue, at its place in the script; null when it ended well. */
@@ -23,19 +24,25 @@ export function explainFailure(compiled: CompiledScript, result: RuntimeResult):
   if (failure.code === "engine") return explainEngine(compiled, site, failure);
   if (failure.code === "thrown") return explainThrown(compiled, site, failure);
   const meant = failure.site === undefined ? site : (compiled.marked.sites[failure.site] ?? site);
-  return explainLibrary(compiled, meant, failure);
+  return explainLibrary(compiled, meant, failure, sites);
 }
 
 function scriptSite(compiled: CompiledScript): Site {
   return compiled.marked.sites[0] as Site;
 }
 
-/** The innermost loop around the innermost call that is in one: that loop has no end. */
-function explainFuel(compiled: CompiledScript, sites: readonly Site[]): Problem {
+/** Head of the outermost loop around the innermost call that is in one: that loop has no end. */
+function headOfLoop(compiled: CompiledScript, sites: readonly Site[]): ProblemPlace | null {
   for (const site of sites.toReversed()) {
     const loop = loopAround(site.node);
-    if (loop !== null) return createProblem("endless", {}, headOf(compiled, loop));
+    if (loop !== null) return headOf(compiled, loop);
   }
+  return null;
+}
+
+function explainFuel(compiled: CompiledScript, sites: readonly Site[]): Problem {
+  const head = headOfLoop(compiled, sites);
+  if (head !== null) return createProblem("endless", {}, head);
   const site = sites.at(-1) ?? scriptSite(compiled);
   return createProblem("too-much-work", {}, placeOfSite(compiled, site));
 }
@@ -144,11 +151,16 @@ function functionName(compiled: CompiledScript, node: ts.Node): string {
   return "This";
 }
 
-function explainLibrary(compiled: CompiledScript, site: Site, failure: GuestFailure): Problem {
-  const argument = failure.argument === undefined ? undefined : argumentOf(site, failure.argument);
+function explainLibrary(compiled: CompiledScript, site: Site, failure: GuestFailure, sites: readonly Site[]): Problem {
+  const written = failure.argument === undefined ? undefined : argumentOf(site, failure.argument);
+  const argument = written === undefined ? undefined : (originOf(compiled, written, failure, sites) ?? written);
   const place = argument === undefined ? placeOfSite(compiled, site) : placeOf(compiled.file, argument);
-  if (failure.code === "calls-itself")
-    return createProblem("calls-itself", { name: functionName(compiled, site.node) }, place);
+  if (failure.code === "calls-itself") {
+    const name = functionName(compiled, site.node);
+    return createProblem("calls-itself", { name }, placeOfSite(compiled, callInside(sites, name) ?? site));
+  }
+  if (failure.code === "clock-stood-still")
+    return createProblem("clock-stood-still", {}, headOfLoop(compiled, sites) ?? place);
   if (failure.code === "not-an-action") return explainAction(compiled, failure, argument, place);
   const code: ProblemCode = isProblemCode(failure.code) ? failure.code : "could-not-run";
   return createProblem(
@@ -156,6 +168,25 @@ function explainLibrary(compiled: CompiledScript, site: Site, failure: GuestFail
     { ...failure.values, ...extraValues(compiled, failure, argument) },
     { ...place, ...fixOf(compiled, failure, argument) },
   );
+}
+
+/** Where a wrong value was written down; a wrong name that stands in the script once is meant wherever it stands. */
+function originOf(
+  compiled: CompiledScript,
+  argument: ts.Node,
+  { values }: GuestFailure,
+  sites: readonly Site[],
+): ts.Node | null {
+  const origin = findOrigin(argument, sites);
+  const name = values["name"];
+  return origin ?? (typeof name === "string" ? findOnlyText(compiled, name) : null);
+}
+
+/** The innermost call of a function by itself. */
+function callInside(sites: readonly Site[], name: string): Site | null {
+  const isOfItself = ({ node }: Site): boolean =>
+    ts.isCallExpression(node) && ts.isIdentifier(node.expression) && node.expression.text === name;
+  return sites.findLast(isOfItself) ?? null;
 }
 
 function argumentOf(site: Site, index: number): ts.Node | undefined {

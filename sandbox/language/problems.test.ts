@@ -52,7 +52,7 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
   ["wait-alone", "1:17", "square.all.on().wait(2);", "Lights can not wait. The script waits."],
   ["no-reading", "1:13", "console.log(square.all.level);", "You can tell lights what to do, but you can not ask them."],
   ["unknown-colour", "1:19", 'square.all.colour("golden");', 'I know no colour "golden". Did you mean "gold"?'],
-  ["unknown-colour", "2:21", 'const shade = "#ff00";\nsquare.all.pulse(1, shade);'],
+  ["unknown-colour", "1:15", 'const shade = "#ff00";\nsquare.all.pulse(1, shade);'],
   ["no-such-section", "1:24", 'song.section("chorus", 3);', 'This song has 2 sections named "chorus", not 3.'],
   ["no-such-bar", "1:10", "song.bar(99);", "There is no bar 99. The last bar is 4."],
   ["no-such-beat", "1:13", "song.bar(2, 5);", "Bar 2 has 4 beats, so it has no beat 5."],
@@ -78,7 +78,7 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
   ],
   [
     "clock-stood-still",
-    "1:30",
+    "1:1",
     "while (true) { square.all[0].on(); }",
     "This loop never ends. The clock does not move in it.",
   ],
@@ -87,7 +87,7 @@ const CASES: readonly (readonly [code: string, place: string, script: string, se
   ["too-many-cues", "2:26", "wait(1);\nfor (;;) { square.all[0].on(); wait(0.001); }"],
   ["too-many-changes", "1:23", "for (;;) { square.all.on(); wait(0.001); }", undefined, DEMO_SQUARE],
   ["could-not-run", "2:6", 'wait(1);\nJSON.parse("{");', "I had to stop this script."],
-  ["calls-itself", "1:10", "function grow(n) { grow(n + 1); }\ngrow(1);", "`grow` calls itself too many times."],
+  ["calls-itself", "1:20", "function grow(n) { grow(n + 1); }\ngrow(1);", "`grow` calls itself too many times."],
   ["too-many-notes", "1:24", "while (true) { console.log(1); }"],
   ["too-big", "1:33", 'let s = "a"; while (true) s = s + s;'],
   [

@@ -42,6 +42,7 @@ const CASES: readonly (readonly [note: string, source: string, sentence?: string
   ["too-many-things 1:26", "square.all.fadeTo(50, 2, 3);"],
   ["no-such-skill 1:11", "song.bars.push(3);", "A list can not do `push`."],
   ["not-to-run 2:1", "const n = 3;\nn();"],
+  ["needs-call 1:5", "if (now < 4) wait(1);", "`now` is steps to run, and not what they give."],
   ["not-a-sum 1:11", "const x = square.all * 2;", "A sum needs numbers, but this is lights."],
   ["not-a-sum 1:6", 'wait("a" < 3 ? 1 : 2);'],
   ["never-the-same 1:5", 'if (square.all.box === "rely") wait(1);'],

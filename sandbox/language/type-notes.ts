@@ -150,6 +150,22 @@ const noSuchSkill: Explain = (place) => {
   });
 };
 
+/** A function by its name alone, where what it gives was meant: `now < 20`. */
+function uncalledName({ checker }: Place, node: ts.Node): string | null {
+  const nodes = ts.isBinaryExpression(node) ? [node.left, node.right] : [node];
+  const found = nodes.find(
+    (one) => ts.isIdentifier(one) && checker.getTypeAtLocation(one).getCallSignatures().length > 0,
+  );
+  return found !== undefined && ts.isIdentifier(found) ? found.text : null;
+}
+
+const notASum: Explain = (place) => {
+  const { node } = place;
+  const name = uncalledName(place, node);
+  if (name !== null) return words("needs-call", { name });
+  return words("not-a-sum", { got: ts.isBinaryExpression(node) ? oddOne(place, node) : kindOf(place, node) });
+};
+
 const EXPLAINERS: { readonly [code: number]: Explain } = {
   2345: wrongArgument,
   2322: wrongValue,
@@ -161,10 +177,9 @@ const EXPLAINERS: { readonly [code: number]: Explain } = {
   2551: noSuchSkill,
   2349: (place) => words("not-to-run", { got: kindOf(place, place.node) }),
   2348: (place) => words("not-to-run", { got: kindOf(place, place.node) }),
-  2362: (place) => words("not-a-sum", { got: kindOf(place, place.node) }),
-  2363: (place) => words("not-a-sum", { got: kindOf(place, place.node) }),
-  2365: (place) =>
-    ts.isBinaryExpression(place.node) ? words("not-a-sum", { got: oddOne(place, place.node) }) : notSure(place),
+  2362: notASum,
+  2363: notASum,
+  2365: notASum,
   2356: (place) => words("not-a-sum", { got: kindOf(place, place.node) }),
   2367: () => words("never-the-same"),
   2678: () => words("never-the-same"),

@@ -18,6 +18,8 @@ export interface Activity {
   /** The same for the first and the last beat of the span. */
   readonly lightFirst: number;
   readonly lightLast: number;
+  /** And at its brightest moment. */
+  readonly lightMost: number;
   readonly movement: Movement;
   /** Moments at which cues light something or fade. */
   readonly steps: number;
@@ -77,6 +79,7 @@ export function measureSpans(
       light: mean(perLook),
       lightFirst,
       lightLast,
+      lightMost: Math.max(...perLook),
       movement,
       steps,
       fronts,

@@ -100,17 +100,25 @@ function describeActivity(activity: Activity, sides: readonly Side[], nameFront:
   return `${who} ${isSeveral ? several : one}${describeColours(activity)}`;
 }
 
-/** Half the light again, or half of it gone, is seen as growing or dimming. */
+/** So much less than the brightest is still as bright to the eye. */
+const NEARLY = 0.95;
+/** Less of a change than this is not told. */
+const SEEN_CHANGE = 0.05;
+
+/** A fade that ends as bright as it gets grows; one that starts so goes dim; half the light again, or half of it gone, is enough. */
 function describeMove(
-  { light, lightFirst, lightLast, fronts }: Activity,
+  { light, lightFirst, lightLast, lightMost, fronts }: Activity,
   movement: Exclude<Movement, "dark">,
 ): readonly [string, string] {
   if (movement === "steady" && light < 0.3) return ["stays dimly lit", "stay dimly lit"];
   if (movement === "together" && fronts.size === 1) return ["lights up", "light up"];
   if (movement === "scattered" && fronts.size <= FEW_FRONTS) return ["lights up now and then", "light up one by one"];
-  if (movement === "fading" && lightLast > lightFirst * 1.5 + 0.05)
+  const endsBrightest = lightLast >= lightMost * NEARLY && lightLast > lightFirst + SEEN_CHANGE;
+  const startsBrightest = lightFirst >= lightMost * NEARLY && lightLast < lightFirst - SEEN_CHANGE;
+  if (movement === "fading" && (endsBrightest || lightLast > lightFirst * 1.5 + SEEN_CHANGE))
     return ["slowly grows brighter", "slowly grow brighter"];
-  if (movement === "fading" && lightLast * 1.5 + 0.05 < lightFirst) return ["slowly goes dim", "slowly go dim"];
+  if (movement === "fading" && (startsBrightest || lightLast * 1.5 + SEEN_CHANGE < lightFirst))
+    return ["slowly goes dim", "slowly go dim"];
   return MOVES[movement];
 }
 

@@ -43,6 +43,21 @@ export const RUN_FINDINGS = define({
     sentence: "`at({beat})` is beat {beat} of the song each time.",
     hint: "Add to where you are: `now() + {beat}`.",
   },
+  "never-so": {
+    severity: "warn",
+    sentence: "What `{sum}` leaves is below {by}, so it is never {number}.",
+    hint: "Use 0 for each turn that comes out even.",
+  },
+  "never-run": {
+    severity: "note",
+    sentence: "You made `{name}`, but nothing runs it.",
+    hint: "Write `{name}()` where it should run.",
+  },
+  "all-each-turn": {
+    severity: "warn",
+    sentence: "Each turn uses all of `{list}`, and not `{item}`.",
+    hint: "Write `{item}` in place of `{list}` here.",
+  },
   "last-wait": {
     severity: "note",
     sentence: "This `wait` does nothing. The clock goes back here.",

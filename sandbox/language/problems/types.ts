@@ -14,6 +14,7 @@ export const TYPE_NOTES = defineEntries({
     hint: "Big and small letters count.",
   },
   "not-to-run": { sentence: "This is {got}. You can not run it.", hint: "Take the `()` off." },
+  "needs-call": { sentence: "`{name}` is steps to run, and not what they give.", hint: "Add `()` after it." },
   "not-a-sum": { sentence: "A sum needs numbers, but this is {got}.", hint: "Use a number here." },
   "never-the-same": { sentence: "These two can never be the same.", hint: "Check how both are spelled." },
   "maybe-nothing": { sentence: "There may be nothing in here.", hint: "Check it with `if` first." },
