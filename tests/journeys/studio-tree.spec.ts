@@ -139,7 +139,7 @@ describe("the studio without a mouse and without a screen", () => {
       "the east side lights up one front after another.",
     ],
     ["a colour", 'square.all.on().colour("red");', "the whole square lights up all together, in red."],
-    ["a fade", "square.all.fadeTo(100, 16);", "Bars 5 to 20 (first verse): the whole square slowly grows brighter."],
+    ["a fade", "square.all.fadeTo(100, 16);", "the whole square slowly grows brighter."],
     ["darkness", "wait(8);\nsquare.all.on();\nwait(8);\nsquare.all.off();", "all is dark."],
   ])("describes %s in words beside the picture", async (_, script, words) => {
     await write(script);

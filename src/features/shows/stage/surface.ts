@@ -16,9 +16,15 @@ export function createSurface(width: number, height: number): Surface {
   return { canvas, context };
 }
 
+/** What both kinds of canvas can do here; their own declarations list other contexts in different ways. */
+interface Drawable {
+  getContext(kind: "2d", options: { readonly alpha: boolean }): Context2D | null;
+}
+
 /** The opaque 2D context of a canvas that is shown. Throws when the browser gives none (too many or too large canvases). */
 export function getContext(canvas: Canvas2D): Context2D {
-  const context = canvas.getContext("2d", { alpha: false }) as Context2D | null;
+  const shown: Drawable = canvas;
+  const context = shown.getContext("2d", { alpha: false });
   if (!context) throw new Error(NO_CONTEXT);
   return context;
 }
