@@ -13,21 +13,10 @@ import { demoSong } from "../../server/db/seed/world/songs/demo-songs.ts";
 import { DEMO_SQUARE } from "../../server/db/seed/world/square.ts";
 import { buildSquareOf } from "./checks.ts";
 import { type Figure, timeInTurns } from "./measure.ts";
+import { HEAVY } from "./runs.ts";
 
 const ROUNDS = 9;
 const SHOWPIECE = readFileSync(path.resolve(import.meta.dirname, "../samples/showpiece.ts"), "utf8");
-/** Some ten thousand cues, each through two functions: the most that the marks of a script have to do. */
-const HEAVY = `function glow(light: Lights, level: number) {
-  light.fadeTo(level, 1);
-}
-function turn(lights: Lights, level: number) {
-  for (const light of lights) glow(light, level);
-}
-for (let beat = 0; beat < 100; beat++) {
-  turn(square.all.first(100), beat % 2 === 0 ? 80 : 20);
-  wait(1);
-}
-`;
 /** Every light for itself, once. */
 const WAVE = "square.all.inTurn(0.01, (light) => light.pulse(2));\nsquare.all.fadeTo(20, 4);\n";
 const SIZES = [50, 500, 5000] as const;

@@ -1,8 +1,9 @@
 import vm from "node:vm";
-import { readFileSync } from "node:fs";
+import { readdirSync, readFileSync } from "node:fs";
 import path from "node:path";
 import { LIBRARY } from "../../sandbox/engine/library.generated.ts";
-import { createEngine } from "../../sandbox/engine/engine.ts";
+import { createEngine, type EngineHost } from "../../sandbox/engine/engine.ts";
+import { FUEL_LIMIT } from "../../sandbox/engine/limits.ts";
 import type { RunInput } from "../../sandbox/engine/model.ts";
 import { prepareRun } from "../../sandbox/engine/prepare.ts";
 import { buildTables } from "../../sandbox/engine/tables.ts";
@@ -16,23 +17,40 @@ const SEED = 20_261_201;
 const KEEP_GLOBAL_OPEN =
   "{ const { freeze } = Object; Object.freeze = (value) => (value === globalThis ? value : freeze(value)); }";
 
+const SAMPLES = path.resolve(import.meta.dirname, "../samples");
+
 /** A whole three-minute show for the demo square: verse, chorus and drums, as a good pupil writes it. */
-const SHOWPIECE = path.resolve(import.meta.dirname, "../samples/showpiece.ts");
+const TYPICAL = readFileSync(path.join(SAMPLES, "showpiece.ts"), "utf8");
+/** Some ten thousand cues, each through two functions: the most that the marks of a script have to do. */
+export const HEAVY = `function glow(light: Lights, level: number) {
+  light.fadeTo(level, 1);
+}
+function turn(lights: Lights, level: number) {
+  for (const light of lights) glow(light, level);
+}
+for (let beat = 0; beat < 100; beat++) {
+  turn(square.all.first(100), beat % 2 === 0 ? 80 : 20);
+  wait(1);
+}
+`;
 
 /**
- * A typical show through the whole engine (compile, fresh module, marks, limits, decoding, hash)
- * against the same marked code and library in a bare QuickJS, and in node:vm.
+ * Shows through the whole engine (compile, fresh module, marks, limits, decoding, hash) against the same
+ * marked code and library in a bare QuickJS, and in node:vm; and the fuel of every sample.
  */
 export async function benchRuns(): Promise<Figure[]> {
   const host = await createNodeHost();
+  return [
+    ...(await measureRun(host, "a three-minute show", TYPICAL)),
+    ...(await measureRun(host, "a heavy show", HEAVY)),
+    ...listFuel(),
+  ];
+}
+
+async function measureRun(host: EngineHost, name: string, source: string): Promise<Figure[]> {
   const engine = createEngine(host);
-  const input: RunInput = {
-    source: readFileSync(SHOWPIECE, "utf8"),
-    songId: "bench",
-    song: demoSong("quillhaven-bells").beatMap,
-    layout: DEMO_SQUARE,
-    seed: SEED,
-  };
+  const song = demoSong("quillhaven-bells").beatMap;
+  const input: RunInput = { source, songId: "bench", song, layout: DEMO_SQUARE, seed: SEED };
   const prepared = prepareRun(input);
   if (!prepared.ok) throw new Error(`The bench script does not compile: ${prepared.problem.sentence}`);
   const { code } = prepared.work;
@@ -66,22 +84,27 @@ export async function benchRuns(): Promise<Figure[]> {
       library.run(vm.runInContext(code, realm));
     },
   });
+  const figure = (against: string, ratio: number): Figure => ({
+    name: `run of ${name}`,
+    value: times.engine,
+    unit: "ms",
+    against,
+    ratio,
+  });
   return [
-    {
-      name: "run of a three-minute show",
-      value: times.engine,
-      unit: "ms",
-      against: "bare QuickJS on the same code",
-      ratio: times.engine / times.bare,
-    },
-    {
-      name: "run of a three-minute show",
-      value: times.engine,
-      unit: "ms",
-      against: "node:vm on the same code",
-      ratio: times.engine / times.vm,
-    },
-    { name: "fuel of a three-minute show", value: outcome.fuel, unit: "polls", against: null, ratio: null },
-    { name: "cues of a three-minute show", value: outcome.cueCount, unit: "cues", against: null, ratio: null },
+    figure("bare QuickJS on the same code", times.engine / times.bare),
+    figure("node:vm on the same code", times.engine / times.vm),
+    { name: `cues of ${name}`, value: outcome.cueCount, unit: "cues", against: null, ratio: null },
   ];
+}
+
+/** Fuel of each sample, as its test holds it, against all that a run may use. */
+function listFuel(): Figure[] {
+  return readdirSync(SAMPLES)
+    .filter((file) => file.endsWith(".json"))
+    .map((file) => {
+      const { fuel } = JSON.parse(readFileSync(path.join(SAMPLES, file), "utf8")) as { readonly fuel: number };
+      const name = `fuel of the sample ${path.basename(file, ".json")}`;
+      return { name, value: fuel, unit: "polls", against: "the limit", ratio: fuel / FUEL_LIMIT };
+    });
 }

@@ -88,16 +88,13 @@ export function runByStack(input: RunInput): Timeline {
     },
     depth: () => depth,
   };
-  const tables = {
-    ...buildTables(input.layout, input.song),
-    seed: input.seed >>> 0,
-    streamOf: marked.streamOf,
-    streams: marked.streams,
-  };
+  const tables = buildTables(input.layout, input.song);
+  const luck = { seed: input.seed >>> 0, streamOf: marked.streamOf, streams: marked.streams };
   const realm = vm.createContext({});
   vm.runInContext(KEEP_GLOBAL_OPEN, realm);
   const library = vm.runInContext(LIBRARY, realm) as Library;
   library.open(JSON.stringify(tables));
+  library.deal(JSON.stringify(luck));
   const code = `(function ($$w, $$) { "use strict"; const { ${GLOBAL_WORDS.join(", ")} } = $$w; (() => {\n${tsBlankSpace(text)}\n})(); })`;
   const script = vm.runInContext(code, realm, { filename: FILE }) as Script;
   library.run((words, marks) => {
@@ -110,7 +107,7 @@ export function runByStack(input: RunInput): Timeline {
     language: 1,
     songId: input.songId,
     layoutHash: "none",
-    seed: tables.seed,
+    seed: luck.seed,
     lightCount: tables.lightCount,
     endTick: (input.song.beats.length - 1) * TICKS_PER_BEAT,
     isComplete: true,
@@ -122,6 +119,7 @@ type Script = (words: unknown, marks: { lend(frames: unknown): void }) => void;
 
 interface Library {
   open(tables: string): void;
+  deal(luck: string): void;
   run(script: Script): void;
   report(): string;
   buffer(): ArrayBuffer;
