@@ -1,5 +1,5 @@
 // Twenty scripts with one mistake each, as beginners write them in lessons 7 to 12; line and code were written down before any check ran.
-import type { WrongScript } from "./wrong-scripts-early.ts";
+import type { WrongScript } from "./wrong-scripts.ts";
 
 export const WRONG_SCRIPTS_LATE: readonly WrongScript[] = [
   {
